@@ -4,7 +4,7 @@
  */
 import { z } from 'zod';
 
-const quantity = (unit: string, what: string, min: number, max: number) =>
+export const number = (unit: string, what: string, min: number, max: number) =>
   z
     .number()
     .min(min)
@@ -22,19 +22,19 @@ export const LIMITS = {
   text: 20_000,
 } as const;
 
-export const size = (what: string, min = 0.01) => quantity('m', what, min, LIMITS.length);
-export const distance = (what: string) => quantity('m', what, 0, LIMITS.length);
-export const coordinate = (what: string) => quantity('m', what, -LIMITS.length, LIMITS.length);
-export const mass = (what: string) => quantity('kg', what, 0, LIMITS.mass);
-export const signedMass = (what: string) => quantity('kg', what, -LIMITS.mass, LIMITS.mass);
-export const massPerMetre = (what: string) => quantity('kg/m', what, 0, 100);
-export const arealDensity = (what: string) => quantity('kg/m²', what, 0, 10);
-export const angle = (what: string) => quantity('rad', what, -2 * Math.PI, 2 * Math.PI);
-export const tolerance = (what: string) => quantity('rad', what, 0, Math.PI / 2);
-export const temperature = (what: string) => quantity('K', what, 200, 350);
-export const pressure = (what: string) => quantity('Pa', what, 20_000, 120_000);
-export const fraction = (what: string) => quantity('1', what, 0, 1);
-export const ratio = (what: string, min: number, max: number) => quantity('1', what, min, max);
+export const size = (what: string, min = 0.01) => number('m', what, min, LIMITS.length);
+export const distance = (what: string) => number('m', what, 0, LIMITS.length);
+export const coordinate = (what: string) => number('m', what, -LIMITS.length, LIMITS.length);
+export const mass = (what: string) => number('kg', what, 0, LIMITS.mass);
+export const signedMass = (what: string) => number('kg', what, -LIMITS.mass, LIMITS.mass);
+export const massPerMetre = (what: string) => number('kg/m', what, 0, 100);
+export const arealDensity = (what: string) => number('kg/m²', what, 0, 10);
+export const angle = (what: string) => number('rad', what, -2 * Math.PI, 2 * Math.PI);
+export const tolerance = (what: string) => number('rad', what, 0, Math.PI / 2);
+export const temperature = (what: string) => number('K', what, 200, 350);
+export const pressure = (what: string) => number('Pa', what, 20_000, 120_000);
+export const fraction = (what: string) => number('1', what, 0, 1);
+export const ratio = (what: string, min: number, max: number) => number('1', what, min, max);
 
 export const count = (what: string, min: number, max: number) =>
   z

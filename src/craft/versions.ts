@@ -1,0 +1,35 @@
+/**
+ * Older craft files step up, one version at a time. To add a version: raise VERSION in `schema.ts` and add here the
+ * step from the one before, which takes and gives plain JSON and must not throw on rubbish.
+ */
+import type { Problem } from './problem.ts';
+import { foundText } from './problem.ts';
+import { VERSION } from './schema.ts';
+
+type Json = Record<string, unknown>;
+export type Step = (file: Json) => Json;
+
+/** Version 0, from before the first release: lists were the same, but there was no support point. */
+const from0: Step = (file) => ({ support: null, ...file, steelyard: 1 });
+
+const STEPS: Readonly<Record<number, Step>> = { 0: from0 };
+
+/** The file at today's version, or the problem with its version. */
+export function stepUp(file: Json): { file: Json } | { problem: Problem } {
+  const { steelyard } = file;
+  if (typeof steelyard !== 'number' || !Number.isInteger(steelyard) || steelyard < 0 || steelyard > VERSION) {
+    return { problem: versionProblem(steelyard) };
+  }
+  let current = file;
+  for (let version = steelyard; version < VERSION; version++) current = STEPS[version]!(current);
+  return { file: current };
+}
+
+const versionProblem = (version: unknown): Problem => ({
+  path: 'steelyard',
+  found: foundText(version),
+  allowed:
+    typeof version === 'number' && version > VERSION
+      ? `a version up to ${VERSION}; this file comes from a newer Steelyard`
+      : `the version of the craft file, a whole number from 0 to ${VERSION}`,
+});

@@ -1,0 +1,52 @@
+/** Edits of hardpoints and of the point that carries the heaviness. */
+import type { Place } from '../../craft/placeSchema.ts';
+import { type Edit, type Recipe, runOf, step } from '../edit.ts';
+import { freeId } from '../ids.ts';
+import { placed, shifted } from '../place.ts';
+
+export const addHardpoint = (name: string, place: Place): Edit =>
+  step(`Add ${name || 'hardpoint'}`, (craft) => {
+    const id = freeId(name || 'hardpoint', craft.hardpoints.byId);
+    craft.hardpoints.byId[id] = { id, name, place };
+    craft.hardpoints.order.push(id);
+  });
+
+/** Takes hardpoints away; the last one stays, and the lead goes to the first left when its own goes. */
+export const removeHardpoints = (ids: readonly string[]): Edit =>
+  step(ids.length === 1 ? 'Remove hardpoint' : `Remove ${ids.length} hardpoints`, (craft) => {
+    const left = craft.hardpoints.order.filter((id) => !ids.includes(id));
+    if (left.length === 0) return;
+    for (const id of craft.hardpoints.order) if (ids.includes(id)) delete craft.hardpoints.byId[id];
+    craft.hardpoints.order = left;
+    if (ids.includes(craft.leadAt)) craft.leadAt = left[0]!;
+  });
+
+export const renameHardpoint = (id: string, name: string): Edit =>
+  runOf(`hardpoint ${id} name`, 'Change name', (craft) => {
+    craft.hardpoints.byId[id]!.name = name;
+  });
+
+export const placeHardpoint =
+  (id: string, place: Place): Recipe =>
+  (craft) => {
+    const hardpoint = craft.hardpoints.byId[id]!;
+    hardpoint.place = placed(hardpoint.place, place);
+  };
+
+export const moveHardpoint = (id: string, place: Place): Edit =>
+  runOf(`hardpoint ${id} place`, 'Move hardpoint', placeHardpoint(id, place));
+
+export const nudgeHardpoints = (ids: readonly string[], by: number): Edit =>
+  runOf(`nudge ${ids.join(' ')}`, 'Nudge hardpoint', (craft) => {
+    for (const id of ids) placeHardpoint(id, shifted(craft.hardpoints.byId[id]!.place, by))(craft);
+  });
+
+export const setLeadAt = (id: string): Edit =>
+  step('Choose hardpoint', (craft) => {
+    craft.leadAt = id;
+  });
+
+export const setSupport = (support: Place | null): Edit =>
+  runOf('support', support ? 'Set the support point' : 'Remove the support point', (craft) => {
+    craft.support = support;
+  });

@@ -1,0 +1,110 @@
+/** Edits of parts. Positions that only the hull knows are handed in, so that an edit needs no physics. */
+import { type Craft, listed } from '../../craft/craft.ts';
+import type { Place } from '../../craft/placeSchema.ts';
+import { LIMITS } from '../../craft/quantities.ts';
+import type { Part, WireEnd } from '../../craft/schema.ts';
+import { type Edit, type Recipe, runOf, step } from '../edit.ts';
+import { freeId } from '../ids.ts';
+import { placed, shifted } from '../place.ts';
+
+export type PartFields = Omit<Part, 'id'>;
+
+/** Adds a part at the end of the list, under an id made from its name. */
+export const addPart = (fields: PartFields): Edit => addParts([fields], `Add ${fields.name || fields.kind}`);
+
+export const addParts = (all: readonly PartFields[], label = `Add ${all.length} parts`): Edit =>
+  step(label, (craft) => {
+    for (const fields of all) insert(craft, fields, craft.parts.order.length);
+  });
+
+function insert(craft: Craft, fields: PartFields, index: number): void {
+  const id = freeId(fields.name || fields.kind, craft.parts.byId);
+  craft.parts.byId[id] = { id, ...fields };
+  craft.parts.order.splice(index, 0, id);
+}
+
+/** Copies parts, each right after its original. */
+export const duplicateParts = (ids: readonly string[]): Edit =>
+  step(ids.length === 1 ? 'Duplicate part' : `Duplicate ${ids.length} parts`, (craft) => {
+    for (const id of ids) {
+      const { id: _, ...fields } = craft.parts.byId[id]!;
+      insert(craft, { ...structuredCloneOf(fields), locked: false }, craft.parts.order.indexOf(id) + 1);
+    }
+  });
+
+const structuredCloneOf = <T>(value: T): T => JSON.parse(JSON.stringify(value));
+
+/** Takes parts away. A wire run that ended at one stays, its end loose where the part was. */
+export const removeParts = (ids: readonly string[]): Edit =>
+  step(ids.length === 1 ? 'Remove part' : `Remove ${ids.length} parts`, (craft) => {
+    for (const wire of listed(craft.wires)) {
+      wire.from = loosened(craft, wire.from, ids);
+      wire.to = loosened(craft, wire.to, ids);
+    }
+    for (const id of ids) delete craft.parts.byId[id];
+    craft.parts.order = craft.parts.order.filter((id) => !ids.includes(id));
+  });
+
+const loosened = (craft: Craft, end: WireEnd, ids: readonly string[]): WireEnd =>
+  end.kind === 'part' && ids.includes(end.part)
+    ? { kind: 'loose', place: { ...craft.parts.byId[end.part]!.place } }
+    : end;
+
+/** Sets fields of one part. `field` names what is typed, so that keystrokes in it undo together. */
+export const setPart = (id: string, field: string, change: Partial<PartFields>): Edit =>
+  runOf(`part ${id} ${field}`, `Change ${field}`, (craft) => {
+    Object.assign(craft.parts.byId[id]!, change);
+  });
+
+/** Sets the same fields of several parts: lock, kind, source of mass. */
+export const setParts = (ids: readonly string[], label: string, change: Partial<PartFields>): Edit =>
+  step(label, (craft) => {
+    for (const id of ids) Object.assign(craft.parts.byId[id]!, change);
+  });
+
+/** A weighed mass replaces the planned one; its tolerance becomes the scale's. */
+export const markWeighed = (id: string, mass: number, massTolerance: number): Edit =>
+  step('Mark weighed', (craft) => {
+    Object.assign(craft.parts.byId[id]!, { mass, massTolerance, massSource: 'weighed' });
+  });
+
+/** Moves a part in the list. */
+export const reorderPart = (id: string, index: number): Edit =>
+  step('Reorder parts', (craft) => {
+    craft.parts.order = craft.parts.order.filter((each) => each !== id);
+    craft.parts.order.splice(index, 0, id);
+  });
+
+export const sortParts = (order: readonly string[]): Edit =>
+  step('Sort parts', (craft) => {
+    craft.parts.order = [...order];
+  });
+
+/** Puts a part at a place. For drags: pass the recipe to `Drag.move`. */
+export const placePart =
+  (id: string, place: Place): Recipe =>
+  (craft) => {
+    const part = craft.parts.byId[id]!;
+    part.place = placed(part.place, place);
+  };
+
+export const movePart = (id: string, place: Place): Edit =>
+  runOf(`part ${id} place`, 'Move part', placePart(id, place));
+
+/** Shifts parts along the hull, keeping their kind of place; locked ones stay. */
+export const shiftParts =
+  (ids: readonly string[], by: number): Recipe =>
+  (craft) => {
+    for (const id of ids) {
+      const part = craft.parts.byId[id]!;
+      if (!part.locked) part.place = placed(part.place, shifted(part.place, by));
+    }
+  };
+
+/** The arrow keys: `by` metres aft. */
+export const nudgeParts = (ids: readonly string[], by: number): Edit =>
+  runOf(`nudge ${ids.join(' ')}`, ids.length === 1 ? 'Nudge part' : 'Nudge parts', shiftParts(ids, by));
+
+/** Whether there is room for so many more parts. */
+export const hasRoom = (craft: Craft, more: number): boolean =>
+  craft.parts.order.length + more <= LIMITS.parts;

@@ -1,0 +1,31 @@
+/** Edits of wire runs. */
+import type { WireEnd, WireRun } from '../../craft/schema.ts';
+import { type Edit, type Recipe, runOf, step } from '../edit.ts';
+import { freeId } from '../ids.ts';
+
+export type WireFields = Omit<WireRun, 'id'>;
+
+export const addWire = (fields: WireFields): Edit =>
+  step(`Add ${fields.name || 'wire run'}`, (craft) => {
+    const id = freeId(fields.name || 'wire', craft.wires.byId);
+    craft.wires.byId[id] = { id, ...fields };
+    craft.wires.order.push(id);
+  });
+
+export const removeWires = (ids: readonly string[]): Edit =>
+  step(ids.length === 1 ? 'Remove wire run' : `Remove ${ids.length} wire runs`, (craft) => {
+    for (const id of ids) delete craft.wires.byId[id];
+    craft.wires.order = craft.wires.order.filter((id) => !ids.includes(id));
+  });
+
+export const setWire = (id: string, field: string, change: Partial<WireFields>): Edit =>
+  runOf(`wire ${id} ${field}`, `Change ${field}`, (craft) => {
+    Object.assign(craft.wires.byId[id]!, change);
+  });
+
+/** Joins one end to a part, or leaves it loose at a place. For drags: pass the recipe to `Drag.move`. */
+export const joinWire =
+  (id: string, side: 'from' | 'to', end: WireEnd): Recipe =>
+  (craft) => {
+    craft.wires.byId[id]![side] = end;
+  };
