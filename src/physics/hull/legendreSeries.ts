@@ -1,0 +1,124 @@
+/**
+ * Running integrals F(ξ) = ∫₋₁^ξ f by Legendre series, so that a table over one panel answers any partial integral.
+ *
+ *   f(ξ) ≈ Σ cₖ Pₖ(ξ), k < n;  cₖ = (2k + 1)/2 · Σⱼ wⱼ f(ξⱼ) Pₖ(ξⱼ)   (Gauss–Legendre nodes ξⱼ, weights wⱼ)
+ *   ∫₋₁^ξ Pₖ = (Pₖ₊₁(ξ) − Pₖ₋₁(ξ))/(2k + 1), and ξ + 1 for k = 0
+ *
+ * F(1) from the series is the n-point Gauss sum itself. The last coefficients tell how well n terms resolve f.
+ * Source: DLMF 18.9.1 (recurrence), 18.9.7 with 18.7.9 (integral), 3.5(v) (Gauss rule).
+ */
+import { gaussLegendre } from '../../numeric/quadrature.ts';
+
+export interface LegendreRule {
+  readonly n: number;
+  readonly nodes: readonly number[];
+  readonly weights: readonly number[];
+  /** n × n, row k: values at the nodes → cₖ. */
+  readonly project: Float64Array;
+  /** n × n, row i: values at the nodes → ∫ from −1 to node i. */
+  readonly running: Float64Array;
+}
+
+const rules = new Map<number, LegendreRule>();
+
+/** The rule with n terms; computed once and kept. */
+export function legendreRule(n: number): LegendreRule {
+  const known = rules.get(n);
+  if (known) return known;
+  const rule = computeRule(n);
+  rules.set(n, rule);
+  return rule;
+}
+
+function computeRule(n: number): LegendreRule {
+  const { nodes, weights } = gaussLegendre(n);
+  const values = nodes.map((xi) => polynomials(n, xi));
+  const project = new Float64Array(n * n);
+  const running = new Float64Array(n * n);
+  for (let k = 0; k < n; k += 1)
+    for (let j = 0; j < n; j += 1) project[k * n + j] = ((2 * k + 1) / 2) * weights[j]! * values[j]![k]!;
+  for (let i = 0; i < n; i += 1)
+    for (let j = 0; j < n; j += 1)
+      for (let k = 0; k < n; k += 1)
+        running[i * n + j]! += project[k * n + j]! * integralOf(k, nodes[i]!, values[i]!);
+  return { n, nodes, weights, project, running };
+}
+
+/** P₀ … Pₙ at ξ. */
+function polynomials(n: number, xi: number): number[] {
+  const p = [1, xi];
+  for (let k = 1; k < n; k += 1) p.push(((2 * k + 1) * xi * p[k]! - k * p[k - 1]!) / (k + 1));
+  return p;
+}
+
+const integralOf = (k: number, xi: number, p: readonly number[]): number =>
+  k === 0 ? xi + 1 : (p[k + 1]! - p[k - 1]!) / (2 * k + 1);
+
+/** Row `row` of an n × n table times the values. */
+export function apply(table: Float64Array, row: number, values: Float64Array): number {
+  const n = values.length;
+  let sum = 0;
+  for (let j = 0; j < n; j += 1) sum += table[row * n + j]! * values[j]!;
+  return sum;
+}
+
+/** Coefficients c₀ … cₙ₋₁ of the values at the nodes. */
+export function coefficientsOf(rule: LegendreRule, values: Float64Array): Float64Array {
+  const c = new Float64Array(rule.n);
+  for (let k = 0; k < rule.n; k += 1) c[k] = apply(rule.project, k, values);
+  return c;
+}
+
+/** ∫₋₁^ξ Σ cₖ Pₖ. */
+export function integralTo(c: Float64Array, xi: number): number {
+  let before = 1;
+  let p = xi;
+  let sum = c[0]! * (xi + 1);
+  for (let k = 1; k < c.length; k += 1) {
+    const next = ((2 * k + 1) * xi * p - k * before) / (k + 1);
+    sum += (c[k]! * (next - before)) / (2 * k + 1);
+    before = p;
+    p = next;
+  }
+  return sum;
+}
+
+/** Σ cₖ Pₖ(ξ). */
+export function valueAt(c: Float64Array, xi: number): number {
+  let before = 1;
+  let p = xi;
+  let sum = c[0]! + (c.length > 1 ? c[1]! * xi : 0);
+  for (let k = 1; k + 1 < c.length; k += 1) {
+    const next = ((2 * k + 1) * xi * p - k * before) / (k + 1);
+    before = p;
+    p = next;
+    sum += c[k + 1]! * p;
+  }
+  return sum;
+}
+
+const MOST_STEPS = 80;
+
+/**
+ * The ξ in [−1, 1] at which the running integral of a series that is nowhere negative reaches `target`: Newton,
+ * with a bisection step wherever Newton would leave the bracket. Clamped to the ends.
+ */
+export function invertIntegral(c: Float64Array, target: number): number {
+  const whole = integralTo(c, 1);
+  if (target <= 0) return -1;
+  if (target >= whole) return 1;
+  let lo = -1;
+  let hi = 1;
+  let xi = (2 * target) / whole - 1;
+  for (let pass = 0; pass < MOST_STEPS; pass += 1) {
+    const excess = integralTo(c, xi) - target;
+    if (excess === 0) return xi;
+    if (excess > 0) hi = xi;
+    else lo = xi;
+    const newton = xi - excess / valueAt(c, xi);
+    const next = newton > lo && newton < hi ? newton : (lo + hi) / 2;
+    if (Math.abs(next - xi) <= 4e-16) return next;
+    xi = next;
+  }
+  return xi;
+}
