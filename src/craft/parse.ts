@@ -61,7 +61,8 @@ function limited(problems: Problem[]): Problem[] {
   ];
 }
 
-function problemsOf(issue: z.core.$ZodIssue, file: unknown): Problem[] {
+/** What zod found, in our words: for every gate of the program. */
+export function problemsOf(issue: z.core.$ZodIssue, file: unknown): Problem[] {
   const path = pathText(issue.path);
   const found = foundText(valueAt(file, issue.path));
   switch (issue.code) {

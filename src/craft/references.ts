@@ -18,7 +18,8 @@ export function referenceProblems(file: CraftFile): Problem[] {
   ];
 }
 
-function repeats(list: string, items: readonly { id: string }[]): Problem[] {
+/** Ids that stand more than once in a list. */
+export function repeats(list: string, items: readonly { id: string }[]): Problem[] {
   const seen = new Map<string, number>();
   return items.flatMap(({ id }, i) => {
     const first = seen.get(id);
