@@ -1,17 +1,17 @@
-/**
- * Constants of nature and of convention, SI, each with its source.
- *
- * Molar gas constant: the whole core uses the 8.314472 J/(mol·K) that CIPM-2007 fixes for moist air, for the lifting
- * gas too, so that air and gas are compared on one footing. CODATA 2018 makes it 8.314462618…, exact since the SI of
- * 2019: 1.1 parts in a million less, far below any blimp's scales. The US Standard Atmosphere carries a value of its
- * own, kept in its file.
- */
+/** Constants of nature and of convention, SI, each with its source. */
 
 /** Standard acceleration of free fall, m/s². 3rd CGPM, 1901; exact by convention. */
 export const STANDARD_GRAVITY = 9.80665;
 
-/** Molar gas constant, J/(mol·K). CODATA 2006, as fixed by CIPM-2007: Picard et al., Metrologia 45 (2008). */
-export const MOLAR_GAS_CONSTANT = 8.314472;
+/** Molar gas constant, J/(mol·K). CODATA 2018, exact since the SI of 2019. For the lifting gas. */
+export const MOLAR_GAS_CONSTANT = 8.314462618;
+
+/**
+ * The same as CIPM-2007 fixes it, from CODATA 2006, J/(mol·K): Picard et al., Metrologia 45 (2008). For moist air
+ * only, whose other constants were fitted with it; 1.1 parts in a million more. (The US Standard Atmosphere has a
+ * third value, kept in its file for the same reason.)
+ */
+export const MOLAR_GAS_CONSTANT_CIPM_2007 = 8.314472;
 
 /** Molar mass of helium, kg/mol. IUPAC standard atomic weight 4.002602. */
 export const MOLAR_MASS_HELIUM = 4.002602e-3;

@@ -1,0 +1,15 @@
+/**
+ * Sentences with quantities in them, written once in SI and read in either system: the core says
+ * `lift is short by ${say(0.012, 'mass')}`, and whoever shows it calls `inUnits`.
+ */
+import { formatQuantity } from './format.ts';
+import type { Quantity, UnitSystem } from './units.ts';
+
+/** A quantity inside a sentence: `{0.012 mass}`. */
+export const say = (si: number, quantity: Quantity): string => `{${si} ${quantity}}`;
+
+/** The sentence with every quantity in the unit of the system. */
+export const inUnits = (sentence: string, system: UnitSystem): string =>
+  sentence.replace(/\{(-?[\d.]+(?:e[+-]\d+)?) (\w+)\}/g, (_, si: string, quantity: Quantity) =>
+    formatQuantity(Number(si), quantity, system),
+  );
