@@ -20,3 +20,7 @@ export interface Infeasible {
 export const solved = <T>(value: T): Solved<T> => ({ status: 'solved', value });
 
 export const infeasible = (why: string, remedy = ''): Infeasible => ({ status: 'infeasible', why, remedy });
+
+/** The value, or null where there is none. */
+export const valueOrNull = <T>(outcome: Outcome<T>): T | null =>
+  outcome.status === 'solved' ? outcome.value : null;

@@ -47,8 +47,10 @@ export interface Assessment {
   /** Keyed as in the terminal's JSON: `hull.volume`, `float.pitch`, … */
   readonly rows: Readonly<Record<string, Row>>;
   readonly verdicts: readonly Verdict[];
-  /** The one sentence that says what is wrong, or that nothing is; in the builder's units via `headline`. */
+  /** Whether it meets its targets. */
   readonly met: boolean;
+  /** The one sentence that says what is wrong, or that nothing is. */
+  readonly headline: string;
   readonly geometry: Geometry | Infeasible;
   /** Things to mind that belong to no single row: a part beyond the hull, air outside the formula's range. */
   readonly cautions: readonly string[];

@@ -6,14 +6,16 @@ export type VerdictKey = (typeof VERDICT_KEYS)[number];
 
 export interface Verdict {
   readonly key: VerdictKey;
-  /** The question it answers: "Floats", "Level", "Upright", "Even", "Lead on the nose". */
+  /** What it is about: "Floats", "Level", "Upright", "Even", "Lead on the nose". */
   readonly title: string;
-  /** met: inside its target. missed: outside it. open: cannot be told. */
+  /** met: inside its target. missed: outside it. open: there is something to do, or it cannot be told. */
   readonly state: 'met' | 'missed' | 'open';
   /** One or two words: "tail-heavy", "level". */
   readonly word: string;
   /** The figure it rests on. */
   readonly row: Row;
+  /** The target in words: "within ±2.0°". */
+  readonly target: string;
   /** How far inside (+) or outside (−) the target, in the row's quantity; null where there is no such number. */
   readonly margin: number | null;
   readonly working: Working;

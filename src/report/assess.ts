@@ -1,0 +1,92 @@
+/** Asks the physics once and gives everything that panels, canvas and terminal show of a craft. */
+import { type Craft, listed } from '../craft/craft.ts';
+import { floatOf } from '../physics/balance/float.ts';
+import { cgOf } from '../physics/balance/loading.ts';
+import { type CraftState, craftStateOf } from '../physics/craftState.ts';
+import { positionOf } from '../physics/mass/position.ts';
+import { inUnits } from '../units/sentence.ts';
+import type { UnitSystem } from '../units/units.ts';
+import type { Assessment, Geometry } from './assessment.ts';
+import { beamOf, leadBar } from './beam.ts';
+import { cautionsOf } from './cautions.ts';
+import { floatRows, supportRows } from './floatRows.ts';
+import { headlineOf } from './headline.ts';
+import { hullRows, massRows } from './hullRows.ts';
+import { leadRows, oneWeightRows } from './leadRows.ts';
+import type { Row } from './row.ts';
+import { noRow, type Rows } from './rows.ts';
+import type { Verdict } from './verdict.ts';
+import { meetsTargets, verdictsOf } from './verdicts.ts';
+
+/** Sentences come in the units asked for; values are SI always. Never throws for a craft from the loading gate. */
+export function assess(craft: Craft, units: UnitSystem = 'metric'): Assessment {
+  const state = craftStateOf(craft);
+  if (state.status === 'infeasible') {
+    const sentence = inUnits([state.why, state.remedy].filter(Boolean).join(' '), units);
+    return {
+      rows: { 'hull.volume': noRow('Gas volume', 'volume', sentence) },
+      verdicts: [],
+      met: false,
+      headline: sentence,
+      geometry: state,
+      cautions: [],
+    };
+  }
+  return assessState(state.value, units);
+}
+
+function assessState(state: CraftState, units: UnitSystem): Assessment {
+  const rows: Rows = {
+    ...hullRows(state),
+    ...massRows(state),
+    ...floatRows(state),
+    ...leadRows(state),
+    ...oneWeightRows(state),
+    ...supportRows(state),
+  };
+  const verdicts = verdictsOf(state, rows);
+  const read = (sentence: string) => inUnits(sentence, units);
+  const readRow = (row: Row): Row => (row.why.includes('{') ? { ...row, why: read(row.why) } : row);
+  const readVerdict = (verdict: Verdict): Verdict => ({
+    ...verdict,
+    row: readRow(verdict.row),
+    target: read(verdict.target),
+    working: { ...verdict.working, inputs: verdict.working.inputs.map(readRow) },
+  });
+  return {
+    rows: Object.fromEntries(Object.entries(rows).map(([key, row]) => [key, readRow(row)])),
+    verdicts: verdicts.map(readVerdict),
+    met: meetsTargets(verdicts),
+    headline: read(headlineOf(state, rows, verdicts)),
+    geometry: geometryOf(state, rows),
+    cautions: cautionsOf(state).map(read),
+  };
+}
+
+function geometryOf(state: CraftState, rows: Rows): Geometry {
+  const { craft, hull, loading, pieces, branches } = state;
+  const attitude = floatOf(loading);
+  return {
+    status: 'solved',
+    hull,
+    cb: loading.cb,
+    cg: cgOf(loading),
+    attitude: attitude.status === 'solved' ? attitude.value : null,
+    pieces: listed(craft.parts).flatMap(({ id }) =>
+      pieces[id]!.map(({ middle, cg, roll }, copy) => ({ part: id, copy, middle, cg, roll })),
+    ),
+    wires: listed(craft.wires).map(({ id }) => ({
+      wire: id,
+      branches: branches[id]!.map(({ points }) => points),
+      mass: branches[id]!.reduce((sum, { mass }) => sum + mass, 0),
+      length: branches[id]!.reduce((sum, { length }) => sum + length, 0),
+    })),
+    hardpoints: listed(craft.hardpoints).map(({ id, place }) => ({
+      hardpoint: id,
+      at: positionOf(place, hull),
+    })),
+    support: craft.support && positionOf(craft.support, hull),
+    beam: beamOf(state),
+    lead: leadBar(state, rows),
+  };
+}
