@@ -1,0 +1,62 @@
+/** One of a few. */
+import { useState } from 'react';
+import type { Problem } from '../../craft/problem.ts';
+import { FieldFrame } from './FieldFrame.tsx';
+
+export interface Choice<T extends string> {
+  readonly value: T;
+  readonly label: string;
+}
+
+export interface ChoiceFieldProps<T extends string> {
+  readonly label: string;
+  /** Null where none of the choices holds, as for parts that differ. */
+  readonly value: T | null;
+  readonly choices: readonly Choice<T>[];
+  onCommit(value: T): Problem | null;
+  /** What stands there when none holds. */
+  readonly none?: string | undefined;
+  readonly bare?: boolean | undefined;
+  readonly hint?: string | undefined;
+  readonly autoFocus?: boolean | undefined;
+  readonly onLeave?: (() => void) | undefined;
+}
+
+export function ChoiceField<T extends string>(props: ChoiceFieldProps<T>) {
+  const { label, value, choices, onCommit, none = 'Choose…', bare, hint, onLeave } = props;
+  const [error, setError] = useState<string | null>(null);
+  const choose = (text: string) => {
+    const chosen = choices.find((choice) => choice.value === text);
+    if (!chosen || chosen.value === value) return;
+    const problem = onCommit(chosen.value);
+    setError(problem && `${label}: ${chosen.label} cannot be taken; allowed: ${problem.allowed}.`);
+  };
+  return (
+    <FieldFrame label={label} error={error} bare={bare} hint={hint}>
+      {(aria) => (
+        <select
+          {...aria}
+          value={value ?? ''}
+          // biome-ignore lint/a11y/noAutofocus: only where the builder just opened this cell
+          autoFocus={props.autoFocus}
+          onChange={(event) => choose(event.currentTarget.value)}
+          onBlur={onLeave}
+          onKeyDown={(event) => {
+            if (onLeave && (event.key === 'Enter' || event.key === 'Escape')) {
+              event.preventDefault();
+              event.stopPropagation();
+              onLeave();
+            }
+          }}
+        >
+          {value === null && <option value="">{none}</option>}
+          {choices.map((choice) => (
+            <option key={choice.value} value={choice.value}>
+              {choice.label}
+            </option>
+          ))}
+        </select>
+      )}
+    </FieldFrame>
+  );
+}

@@ -1,0 +1,82 @@
+/** A number with its unit: SI outside, the builder's unit on screen. Takes sums and other units as typed. */
+import type { KeyboardEvent } from 'react';
+import type { Problem } from '../../craft/problem.ts';
+import { type Quantity, type UnitSystem, unitOf } from '../../units/units.ts';
+import { entryText, problemSentence, readEntry, stepped } from './entry.ts';
+import { FieldFrame } from './FieldFrame.tsx';
+import { type Leave, useDraft } from './useDraft.ts';
+
+export interface QuantityFieldProps {
+  readonly label: string;
+  /** SI; null where there is none yet. */
+  readonly value: number | null;
+  readonly quantity: Quantity;
+  readonly units: UnitSystem;
+  onCommit(value: number): Problem | null;
+  readonly bare?: boolean | undefined;
+  readonly hint?: string | undefined;
+  readonly disabled?: boolean | undefined;
+  readonly autoFocus?: boolean | undefined;
+  readonly startWith?: string | undefined;
+  readonly onLeave?: ((how: Leave) => void) | undefined;
+}
+
+export function QuantityField(props: QuantityFieldProps) {
+  const { label, value, quantity, units, onCommit, startWith, onLeave } = props;
+  const commit = (next: number, text: string): string | null => {
+    if (next === value) return null;
+    const problem = onCommit(next);
+    return problem && problemSentence(label, text, problem, quantity, units);
+  };
+  const draft = useDraft({
+    label,
+    shown: value === null ? '' : entryText(value, quantity, units),
+    read: (text) => readEntry(text, quantity, units),
+    commit,
+    startWith,
+    onLeave,
+  });
+  const onKeyDown = (event: KeyboardEvent<HTMLInputElement>) => {
+    draft.onKeyDown(event);
+    const steps = stepsOf(event);
+    const now = steps === 0 ? null : readEntry(draft.text, quantity, units);
+    if (!now?.ok) return;
+    event.preventDefault();
+    event.stopPropagation();
+    const next = stepped(now.value, steps, quantity, units);
+    draft.replace(entryText(next, quantity, units), next);
+  };
+  return (
+    <FieldFrame
+      label={label}
+      unit={unitOf(quantity, units).symbol}
+      error={draft.error}
+      bare={props.bare}
+      hint={props.hint}
+    >
+      {(aria) => (
+        <input
+          {...aria}
+          type="text"
+          inputMode="decimal"
+          autoComplete="off"
+          className="number"
+          value={draft.text}
+          disabled={props.disabled}
+          // biome-ignore lint/a11y/noAutofocus: only where the builder just opened this cell to type
+          autoFocus={props.autoFocus}
+          onFocus={(event) => startWith === undefined && event.currentTarget.select()}
+          onChange={(event) => draft.set(event.currentTarget.value)}
+          onBlur={draft.onBlur}
+          onKeyDown={onKeyDown}
+        />
+      )}
+    </FieldFrame>
+  );
+}
+
+function stepsOf({ key, shiftKey, altKey, ctrlKey, metaKey }: KeyboardEvent): number {
+  if (altKey || ctrlKey || metaKey) return 0;
+  const size = shiftKey ? 10 : 1;
+  return key === 'ArrowUp' ? size : key === 'ArrowDown' ? -size : 0;
+}
