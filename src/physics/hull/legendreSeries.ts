@@ -21,7 +21,7 @@ export interface LegendreRule {
 
 const rules = new Map<number, LegendreRule>();
 
-/** The rule with n terms; computed once and kept. */
+/** The rule with n terms, 2 ≤ n ≤ 128; computed once and kept. */
 export function legendreRule(n: number): LegendreRule {
   const known = rules.get(n);
   if (known) return known;
@@ -69,27 +69,48 @@ export function coefficientsOf(rule: LegendreRule, values: Float64Array): Float6
   return c;
 }
 
+/** Pₖ₊₁ = RISE[k] ξ Pₖ − FALL[k] Pₖ₋₁, and 1/(2k + 1): tables, because divisions would take most of the time. */
+const MOST_TERMS = 128;
+const RISE = Float64Array.from({ length: MOST_TERMS }, (_, k) => (2 * k + 1) / (k + 1));
+const FALL = Float64Array.from({ length: MOST_TERMS }, (_, k) => k / (k + 1));
+const PER_ODD = Float64Array.from({ length: MOST_TERMS }, (_, k) => 1 / (2 * k + 1));
+
 /** ∫₋₁^ξ Σ cₖ Pₖ. */
 export function integralTo(c: Float64Array, xi: number): number {
   let before = 1;
   let p = xi;
   let sum = c[0]! * (xi + 1);
   for (let k = 1; k < c.length; k += 1) {
-    const next = ((2 * k + 1) * xi * p - k * before) / (k + 1);
-    sum += (c[k]! * (next - before)) / (2 * k + 1);
+    const next = RISE[k]! * xi * p - FALL[k]! * before;
+    sum += c[k]! * (next - before) * PER_ODD[k]!;
     before = p;
     p = next;
   }
   return sum;
 }
 
+/** The same for several series of equal length at one ξ, added to `sums`. */
+export function addIntegralsTo(series: readonly Float64Array[], xi: number, sums: Float64Array): void {
+  const n = series[0]!.length;
+  let before = 1;
+  let p = xi;
+  for (let j = 0; j < series.length; j += 1) sums[j]! += series[j]![0]! * (xi + 1);
+  for (let k = 1; k < n; k += 1) {
+    const next = RISE[k]! * xi * p - FALL[k]! * before;
+    const integral = (next - before) * PER_ODD[k]!;
+    for (let j = 0; j < series.length; j += 1) sums[j]! += series[j]![k]! * integral;
+    before = p;
+    p = next;
+  }
+}
+
 /** Σ cₖ Pₖ(ξ). */
 export function valueAt(c: Float64Array, xi: number): number {
   let before = 1;
   let p = xi;
-  let sum = c[0]! + (c.length > 1 ? c[1]! * xi : 0);
+  let sum = c[0]! + c[1]! * xi;
   for (let k = 1; k + 1 < c.length; k += 1) {
-    const next = ((2 * k + 1) * xi * p - k * before) / (k + 1);
+    const next = RISE[k]! * xi * p - FALL[k]! * before;
     before = p;
     p = next;
     sum += c[k + 1]! * p;
@@ -104,7 +125,7 @@ const MOST_STEPS = 80;
  * with a bisection step wherever Newton would leave the bracket. Clamped to the ends.
  */
 export function invertIntegral(c: Float64Array, target: number): number {
-  const whole = integralTo(c, 1);
+  const whole = 2 * c[0]!;
   if (target <= 0) return -1;
   if (target >= whole) return 1;
   let lo = -1;
@@ -112,11 +133,10 @@ export function invertIntegral(c: Float64Array, target: number): number {
   let xi = (2 * target) / whole - 1;
   for (let pass = 0; pass < MOST_STEPS; pass += 1) {
     const excess = integralTo(c, xi) - target;
-    if (excess === 0) return xi;
     if (excess > 0) hi = xi;
     else lo = xi;
     const newton = xi - excess / valueAt(c, xi);
-    const next = newton > lo && newton < hi ? newton : (lo + hi) / 2;
+    const next = newton >= lo && newton <= hi ? newton : (lo + hi) / 2;
     if (Math.abs(next - xi) <= 4e-16) return next;
     xi = next;
   }

@@ -48,3 +48,13 @@ export function quarterEllipse(length: number, radius: number, end: 'fore' | 'af
     },
   };
 }
+
+/** The same stretch run from its other end, as at the tail of a symmetric form. */
+export function mirrored({ at }: Stretch): Stretch {
+  return {
+    at: (t) => {
+      const { r, dx, dr } = at(1 - t);
+      return { r, dx, dr: -dr };
+    },
+  };
+}

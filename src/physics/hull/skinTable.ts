@@ -4,7 +4,7 @@
  * any tape distance on the face gives the station of the end.
  */
 import type { SkinPath } from './hull.ts';
-import { integralTo, invertIntegral } from './legendreSeries.ts';
+import { addIntegralsTo, integralTo, invertIntegral } from './legendreSeries.ts';
 import { PATH_TERMS, type Panel } from './panels.ts';
 
 /** A point of the meridian: panel and ξ in it. */
@@ -33,8 +33,11 @@ export function skinTable(panels: readonly Panel[]): SkinTable {
   const lateralStations = lateral.map((i) => panels[i]!.x0);
   const length = panels.at(-1)!.x1;
   const tapeLength = tapes.at(-1)!;
-  const sumsAt = ({ index, xi }: Spot): number[] =>
-    starts[index]!.map((start, k) => start + integralTo(panels[index]!.path[k]!, xi));
+  const sumsAt = ({ index, xi }: Spot): Float64Array => {
+    const sums = starts[index]!.slice();
+    addIntegralsTo(panels[index]!.path, xi, sums);
+    return sums;
+  };
   return {
     length,
     tapeLength,
@@ -62,8 +65,8 @@ export function skinTable(panels: readonly Panel[]): SkinTable {
 }
 
 /** The six path integrals from the nose tip to the start of each panel, and last to the tail tip. */
-function cumulativePaths(panels: readonly Panel[]): number[][] {
-  const starts = [PATH_TERMS.map(() => 0)];
+function cumulativePaths(panels: readonly Panel[]): Float64Array[] {
+  const starts = [new Float64Array(PATH_TERMS.length)];
   for (const panel of panels) starts.push(starts.at(-1)!.map((sum, k) => sum + 2 * panel.path[k]![0]!));
   return starts;
 }
@@ -80,12 +83,12 @@ function lastAtOrBelow(values: readonly number[], x: number, count: number): num
   return low;
 }
 
-function difference(a: readonly number[], b: readonly number[]): SkinPath {
+function difference(a: Float64Array, b: Float64Array): SkinPath {
   const sign = b[0]! >= a[0]! ? 1 : -1;
   return asPath(b.map((value, k) => sign * (value - a[k]!)));
 }
 
-const asPath = (sums: readonly number[]): SkinPath => ({
+const asPath = (sums: Float64Array): SkinPath => ({
   length: sums[0]!,
   x: sums[1]!,
   r: sums[2]!,
