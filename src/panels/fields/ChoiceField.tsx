@@ -1,12 +1,8 @@
 /** One of a few. */
 import { useState } from 'react';
 import type { Problem } from '../../craft/problem.ts';
+import type { Choice } from '../words.ts';
 import { FieldFrame } from './FieldFrame.tsx';
-
-export interface Choice<T extends string> {
-  readonly value: T;
-  readonly label: string;
-}
 
 export interface ChoiceFieldProps<T extends string> {
   readonly label: string;

@@ -1,0 +1,95 @@
+/** The lifting gas, and what to mind about it. */
+import { catalogue } from '../catalogue/catalogue.ts';
+import type { Gas } from '../craft/schema.ts';
+import { setGas } from '../edit/edits/craft.ts';
+import { Caution } from './Caution.tsx';
+import { useCommit } from './commit.ts';
+import { useEditor } from './editor.ts';
+import { ChoiceField } from './fields/ChoiceField.tsx';
+import { QuantityField } from './fields/QuantityField.tsx';
+import { RowList } from './RowList.tsx';
+
+const GAS_CHOICES = catalogue.gases.map(({ id, name }) => ({ value: id, label: name }));
+const LIFTING_CHOICES = [
+  { value: 'helium', label: 'Helium' },
+  { value: 'hydrogen', label: 'Hydrogen' },
+] as const;
+
+export function GasPanel() {
+  const { craft, assessment, units } = useEditor();
+  const commit = useCommit();
+  const { lifting, purity, superheat, gaugePressure } = craft.gas;
+  const set = (field: string, change: Partial<Gas>) => commit(setGas(field, change));
+  const known = catalogue.gases.find((gas) => gas.lifting === lifting && gas.purity === purity);
+  const choose = (id: string) => {
+    const gas = catalogue.gases.find((each) => each.id === id)!;
+    return set('gas', { lifting: gas.lifting, purity: gas.purity });
+  };
+  const rows = ['gas.density', 'gas.mass', 'lift.gross'].map((key) => assessment.rows[key]);
+  return (
+    <section className="panel" aria-label="Gas">
+      <ChoiceField
+        label="From the catalogue"
+        value={known?.id ?? null}
+        choices={GAS_CHOICES}
+        none="Own gas"
+        onCommit={choose}
+      />
+      {known && (
+        <p className="aside">
+          <cite>{known.source}</cite>
+        </p>
+      )}
+      <ChoiceField
+        label="Lifting gas"
+        value={lifting}
+        choices={LIFTING_CHOICES}
+        onCommit={(next) => set('lifting gas', { lifting: next })}
+      />
+      <GasCaution lifting={lifting} />
+      <QuantityField
+        label="Purity"
+        value={purity}
+        quantity="fraction"
+        units={units}
+        hint="Share by volume; the rest is taken as air."
+        onCommit={(next) => set('purity', { purity: next })}
+      />
+      <QuantityField
+        label="Superheat"
+        value={superheat}
+        quantity="temperatureDifference"
+        units={units}
+        hint="How much warmer the gas is than the air."
+        onCommit={(next) => set('superheat', { superheat: next })}
+      />
+      <QuantityField
+        label="Gauge pressure"
+        value={gaugePressure}
+        quantity="gaugePressure"
+        units={units}
+        hint="Gas pressure above the air outside."
+        onCommit={(next) => set('gauge pressure', { gaugePressure: next })}
+      />
+      <Caution>
+        A closed envelope in the sun gains pressure and can burst. Vent it, watch the gauge, and keep to the
+        film maker’s limits.
+      </Caution>
+      <RowList rows={rows} units={units} />
+    </section>
+  );
+}
+
+function GasCaution({ lifting }: { lifting: Gas['lifting'] }) {
+  return lifting === 'helium' ? (
+    <Caution>
+      Helium displaces the air one breathes, and whoever breathes it has no warning before fainting. Fill and
+      vent only where air moves freely, never inhale it, and follow the supplier’s sheet.
+    </Caution>
+  ) : (
+    <Caution>
+      Hydrogen burns with a flame one hardly sees, and mixed with air it explodes. Many sites forbid it. Use
+      it only where local rules allow it and with people trained for it.
+    </Caution>
+  );
+}

@@ -1,0 +1,29 @@
+/** The craft's name and the builder's notes. */
+import { setName, setNotes } from '../edit/edits/craft.ts';
+import { Caution } from './Caution.tsx';
+import { useCommit } from './commit.ts';
+import { useEditor } from './editor.ts';
+import { NotesField } from './fields/NotesField.tsx';
+import { TextField } from './fields/TextField.tsx';
+
+export function NotesPanel() {
+  const { craft } = useEditor();
+  const commit = useCommit();
+  return (
+    <section className="panel" aria-label="Notes">
+      <TextField label="Craft name" value={craft.name} onCommit={(name) => commit(setName(name))} />
+      <NotesField label="Notes" rows={14} value={craft.notes} onCommit={(notes) => commit(setNotes(notes))} />
+      <FlightCaution />
+    </section>
+  );
+}
+
+/** What to mind before it flies. */
+export function FlightCaution() {
+  return (
+    <Caution>
+      Flying near people can hurt them, and a light craft drifts in any draught. Fly by the rules of the local
+      aviation authority and of the site; these figures stand in for no inspection, licence or makers’ sheet.
+    </Caution>
+  );
+}

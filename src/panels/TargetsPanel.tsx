@@ -1,0 +1,112 @@
+/** What the craft is to meet, where the lead hangs, and what carries the heaviness. */
+import { listed } from '../craft/craft.ts';
+import type { Targets } from '../craft/schema.ts';
+import { setTargets } from '../edit/edits/craft.ts';
+import { setLeadAt, setSupport } from '../edit/edits/hardpoints.ts';
+import { useCommit } from './commit.ts';
+import { defaultPlace } from './defaults.ts';
+import { useEditor } from './editor.ts';
+import { CheckField } from './fields/CheckField.tsx';
+import { ChoiceField } from './fields/ChoiceField.tsx';
+import { QuantityField } from './fields/QuantityField.tsx';
+import { PlaceFields } from './inspector/PlaceFields.tsx';
+import { FlightCaution } from './NotesPanel.tsx';
+import { RowList } from './RowList.tsx';
+
+export function TargetsPanel() {
+  const { craft } = useEditor();
+  const commit = useCommit();
+  const choices = listed(craft.hardpoints).map(({ id, name }) => ({ value: id, label: name || id }));
+  return (
+    <section className="panel" aria-label="Targets">
+      <TargetFields />
+      <ChoiceField
+        label="Lead at hardpoint"
+        value={craft.leadAt}
+        choices={choices}
+        onCommit={(id) => commit(setLeadAt(id))}
+      />
+      <SupportFields />
+      <FlightCaution />
+    </section>
+  );
+}
+
+function TargetFields() {
+  const { craft, units } = useEditor();
+  const commit = useCommit();
+  const { heaviness, pitchTolerance, heelTolerance, leastPendulumDepth } = craft.targets;
+  const set = (field: string, change: Partial<Targets>) => commit(setTargets(field, change));
+  return (
+    <>
+      <QuantityField
+        label="Least heaviness"
+        value={heaviness.least}
+        quantity="mass"
+        units={units}
+        hint="Negative is light"
+        onCommit={(least) => set('least heaviness', { heaviness: { ...heaviness, least } })}
+      />
+      <QuantityField
+        label="Greatest heaviness"
+        value={heaviness.most}
+        quantity="mass"
+        units={units}
+        onCommit={(most) => set('greatest heaviness', { heaviness: { ...heaviness, most } })}
+      />
+      <QuantityField
+        label="Pitch tolerance"
+        value={pitchTolerance}
+        quantity="angle"
+        units={units}
+        hint="Either way, still level"
+        onCommit={(next) => set('pitch tolerance', { pitchTolerance: next })}
+      />
+      <QuantityField
+        label="Heel tolerance"
+        value={heelTolerance}
+        quantity="angle"
+        units={units}
+        hint="Either way, still even"
+        onCommit={(next) => set('heel tolerance', { heelTolerance: next })}
+      />
+      <QuantityField
+        label="Least pendulum depth"
+        value={leastPendulumDepth}
+        quantity="smallLength"
+        units={units}
+        hint="CB above CG"
+        onCommit={(next) => set('least pendulum depth', { leastPendulumDepth: next })}
+      />
+    </>
+  );
+}
+
+const SUPPORT_ROWS = ['support.load', 'support.pitch', 'support.heel'];
+
+/** The foot of a leg or the tie of a line, if one is asked for. */
+function SupportFields() {
+  const { craft, assessment, units, apply } = useEditor();
+  const commit = useCommit();
+  const { support } = craft;
+  const { geometry } = assessment;
+  const at = geometry.status === 'solved' ? geometry.support : null;
+  return (
+    <>
+      <CheckField
+        label="A support point carries the heaviness"
+        value={support !== null}
+        onCommit={(wanted) => apply(setSupport(wanted ? defaultPlace(assessment) : null))}
+      />
+      {support && (
+        <PlaceFields
+          prefix="Support"
+          place={support}
+          at={at}
+          onPlace={(place) => commit(setSupport(place))}
+        />
+      )}
+      {support && <RowList rows={SUPPORT_ROWS.map((key) => assessment.rows[key])} units={units} />}
+    </>
+  );
+}

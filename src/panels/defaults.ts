@@ -1,0 +1,49 @@
+/** What a new thing is until the builder says otherwise. */
+import type { PartEntry } from '../catalogue/schema.ts';
+import type { Place } from '../craft/placeSchema.ts';
+import type { PartFields } from '../edit/edits/parts.ts';
+import type { WireFields } from '../edit/edits/wires.ts';
+import type { Assessment } from '../report/assessment.ts';
+
+/** On the keel under the CB, where a weight tips nothing; at the nose while the hull cannot be formed. */
+export const defaultPlace = ({ geometry }: Assessment): Place => ({
+  kind: 'keel',
+  station: geometry.status === 'solved' ? geometry.hull.cbStation : 0,
+  drop: 0,
+});
+
+export const blankPart = (place: Place): PartFields => ({
+  kind: 'load',
+  name: 'New part',
+  mass: 0,
+  massTolerance: 0,
+  massSource: 'estimated',
+  place,
+  copies: { kind: 'together', count: 1 },
+  size: { length: 0.05, width: 0.04, height: 0.03 },
+  cgOffset: 0,
+  locked: false,
+  notes: '',
+});
+
+export const partFrom = ({ name, kind, mass, massTolerance, size }: PartEntry, place: Place): PartFields => ({
+  ...blankPart(place),
+  name,
+  kind,
+  mass,
+  massTolerance,
+  massSource: 'catalogue',
+  size: { ...size },
+});
+
+/** A pair of thin conductors along the keel, its ends loose. */
+export const blankWire = (place: Place, massPerMetre: number): WireFields => ({
+  name: 'New wire run',
+  from: { kind: 'loose', place },
+  to: { kind: 'loose', place },
+  path: { kind: 'skin', clock: Math.PI },
+  massPerMetre,
+  conductors: 2,
+  slack: 0.05,
+  notes: '',
+});

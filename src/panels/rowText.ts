@@ -1,0 +1,28 @@
+/** Rows of the report as text in the builder's units. */
+import type { Row } from '../report/row.ts';
+import { decimalsFor, formatNumber, formatQuantity } from '../units/format.ts';
+import { type Quantity, type UnitSystem, unitOf } from '../units/units.ts';
+
+/** "157.1 g", "157.1 ± 2.4 g"; "none" where there is no value. */
+export function rowText(row: Row, units: UnitSystem): string {
+  if (row.value === null) return 'none';
+  if (!row.uncertainty) return formatQuantity(row.value, row.quantity, units);
+  return uncertainText(row.value, row.uncertainty, row.quantity, units);
+}
+
+function uncertainText(value: number, uncertainty: number, quantity: Quantity, units: UnitSystem): string {
+  const unit = unitOf(quantity, units);
+  const spread = uncertainty / unit.si;
+  const decimals = decimalsFor(spread, unit.digits);
+  const number = formatNumber(unit.toDisplay(value), decimals);
+  const band = `${number} ± ${formatNumber(spread, decimals)}`;
+  if (unit.symbol === '°') return `${number}° ± ${formatNumber(spread, decimals)}°`;
+  return unit.symbol ? `${band} ${unit.symbol}` : band;
+}
+
+/** "1.2° inside", "0.4° outside", "on the limit"; empty where there is no margin. */
+export function marginText(margin: number | null, quantity: Quantity, units: UnitSystem): string {
+  if (margin === null) return '';
+  const side = margin < 0 ? 'outside' : 'inside';
+  return `${formatQuantity(Math.abs(margin), quantity, units)} ${side}`;
+}
