@@ -17,10 +17,16 @@ export interface Attitude {
   readonly heel: number;
 }
 
-/** Null when the vector is zero: the body rests in any attitude. */
+/** A hang vector shorter than this is none: a milligram a micrometre out, kg·m. */
+const NOTHING = 1e-12;
+/** Side moments this much smaller than the rest are rounding. */
+const ROUNDING = 1e-12;
+
+/** Null when the vector is as good as zero: the body rests in any attitude. */
 export function attitudeOf([x, y, z]: Vec3): Attitude | null {
-  if (x === 0 && y === 0 && z === 0) return null;
-  if (y === 0) return { pitch: Math.atan2(x, -z), heel: 0 };
+  const size = Math.hypot(x, y, z);
+  if (size < NOTHING) return null;
+  if (Math.abs(y) <= ROUNDING * size) return { pitch: Math.atan2(x, -z), heel: 0 };
   return { pitch: Math.atan2(x, Math.hypot(y, z)), heel: Math.atan2(y, -z) };
 }
 

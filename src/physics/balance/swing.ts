@@ -26,13 +26,16 @@ export interface SwingTerms {
   readonly pitch: number;
 }
 
+/** A pendulum shallower than this is none, m. */
+const LEAST_DEPTH = 1e-9;
+
 /** s */
 export function swingPeriod(terms: SwingTerms): Outcome<number> {
   const { solidMass, pendulumDepth: h } = terms;
   if (!(solidMass > 0)) return infeasible('There is no mass to swing.');
-  if (h <= 0) {
+  if (h < LEAST_DEPTH) {
     return infeasible(
-      `The CG stands ${say(-h, 'smallLength')} above the CB, so the craft does not swing back.`,
+      `The CG is not below the CB (by ${say(-h, 'smallLength')}), so the craft does not swing back.`,
       'Hang something lower.',
     );
   }
