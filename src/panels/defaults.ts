@@ -5,10 +5,10 @@ import type { PartFields } from '../edit/edits/parts.ts';
 import type { WireFields } from '../edit/edits/wires.ts';
 import type { Assessment } from '../report/assessment.ts';
 
-/** On the keel under the CB, where a weight tips nothing; at the nose while the hull cannot be formed. */
+/** On the keel under the CB to the millimetre, where a weight tips nothing; at the nose while the hull cannot be formed. */
 export const defaultPlace = ({ geometry }: Assessment): Place => ({
   kind: 'keel',
-  station: geometry.status === 'solved' ? geometry.hull.cbStation : 0,
+  station: geometry.status === 'solved' ? Number(geometry.hull.cbStation.toFixed(3)) : 0,
   drop: 0,
 });
 
