@@ -1,0 +1,52 @@
+/** The page: the drawing is the middle of it, the ledger under it, one panel beside it. */
+import { useEffect, useState } from 'react';
+import { EditorContext } from '../panels/editor.ts';
+import { CommandBar } from './CommandBar.tsx';
+import { useCell } from './cell.ts';
+import { openFile } from './commands.ts';
+import { Dialogs } from './Dialogs.tsx';
+import { dropKind, takeDrops } from './drops.ts';
+import { NoticeArea } from './NoticeArea.tsx';
+import type { Store } from './store.ts';
+import { usePalette } from './theme.ts';
+import { useEditorOf } from './useEditorOf.ts';
+import { Workspace } from './Workspace.tsx';
+
+export function App({ store }: { store: Store }) {
+  const editor = useEditorOf(store);
+  const palette = usePalette(useCell(store.settings).theme);
+  const over = useDrops(store);
+  const { name } = editor.craft;
+  useEffect(() => {
+    document.title = `${name || 'Craft without a name'} – Steelyard`;
+  }, [name]);
+  return (
+    <EditorContext value={editor}>
+      <CommandBar store={store} />
+      <Workspace store={store} editor={editor} palette={palette} />
+      <Dialogs store={store} />
+      <NoticeArea notices={store.notices} />
+      {over && (
+        <div className="drop-veil">Drop a craft file to open it, or a table of parts to add them.</div>
+      )}
+    </EditorContext>
+  );
+}
+
+/** Whether a file hangs above the page, and what becomes of it when it is let go. */
+function useDrops(store: Store): boolean {
+  const [over, setOver] = useState(false);
+  useEffect(() => takeDrops((file) => void takeFile(store, file), setOver), [store]);
+  return over;
+}
+
+async function takeFile(store: Store, file: File): Promise<void> {
+  switch (dropKind(file)) {
+    case 'table':
+      return store.table.set(await file.text());
+    case 'craft':
+      return openFile(store, file);
+    case 'other':
+      store.notices.add(`${file.name} is neither a craft file (.json) nor a table of parts (.csv).`, 'bad');
+  }
+}

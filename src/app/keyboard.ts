@@ -1,0 +1,46 @@
+/** Listens for keys on the whole page and runs their commands. */
+import { COMMANDS } from './commands.ts';
+import { commandFor } from './shortcuts.ts';
+import type { Store } from './store.ts';
+
+const TYPED_IN =
+  'input:not([type=checkbox]):not([type=radio]):not([type=button]):not([type=file]), textarea, [contenteditable]';
+/** Elements that use the arrow keys themselves. */
+const ARROWED = 'select, [role=tab], [role=separator], [role=slider], [role=menuitem], input[type=radio]';
+
+const closest = (target: EventTarget | null, selector: string): boolean =>
+  target instanceof Element && target.closest(selector) !== null;
+
+/** Starts listening; returns how to stop. */
+export function listenForKeys(store: Store): () => void {
+  /** The field whose text was changed and not yet committed: undo and redo there are the browser's own. */
+  let drafted: EventTarget | null = null;
+  const onInput = ({ target }: Event) => {
+    drafted = closest(target, TYPED_IN) ? target : null;
+  };
+  const onFocusOut = () => {
+    drafted = null;
+  };
+  const onKey = (event: KeyboardEvent) => {
+    if (event.key === 'Enter' || event.key === 'Escape') drafted = null;
+    if (event.defaultPrevented || event.isComposing) return;
+    const command = commandFor(event, closest(event.target, TYPED_IN));
+    if (!command || !allowed(command, event, drafted)) return;
+    event.preventDefault();
+    COMMANDS[command](store);
+  };
+  document.addEventListener('input', onInput);
+  document.addEventListener('focusout', onFocusOut);
+  document.addEventListener('keydown', onKey);
+  return () => {
+    document.removeEventListener('input', onInput);
+    document.removeEventListener('focusout', onFocusOut);
+    document.removeEventListener('keydown', onKey);
+  };
+}
+
+function allowed(command: string, { target, key }: KeyboardEvent, drafted: EventTarget | null): boolean {
+  if (document.querySelector('dialog[open]')) return false;
+  if (command === 'undo' || command === 'redo') return drafted === null || drafted !== target;
+  return !(key.startsWith('Arrow') && closest(target, ARROWED));
+}

@@ -1,0 +1,24 @@
+/** Which craft this tab shows, and names for new ones. */
+
+/** A name that no other craft or page has. */
+export const freshId = (): string =>
+  `${Date.now().toString(36)}-${Math.floor(Math.random() * 2 ** 40).toString(36)}`;
+
+const KEY = 'steelyard craft';
+
+/** The craft this tab showed last, which need not be the last one of all tabs. */
+export function craftOfTab(): string | null {
+  try {
+    return sessionStorage.getItem(KEY);
+  } catch {
+    return null;
+  }
+}
+
+export function rememberForTab(id: string): void {
+  try {
+    sessionStorage.setItem(KEY, id);
+  } catch {
+    // A browser that refuses storage still has the last craft of all tabs, or none.
+  }
+}
