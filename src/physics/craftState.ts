@@ -1,6 +1,8 @@
 /** A craft with everything computed that more than one question needs: hull, air, where each mass is, how it loads. */
 import { type Craft, listed } from '../craft/craft.ts';
-import type { HullShape } from '../craft/hullSchema.ts';
+import type { Place } from '../craft/placeSchema.ts';
+import type { Copies, WireEnd } from '../craft/schema.ts';
+import { kept } from '../numeric/kept.ts';
 import { type Outcome, solved } from '../numeric/outcome.ts';
 import { type Air, airOf } from './air/day.ts';
 import { gasDensity } from './air/gas.ts';
@@ -12,8 +14,8 @@ import { type SkinMass, skinMassOf } from './hull/skinMass.ts';
 import { type Body, pointMass, sumsOf } from './mass/body.ts';
 import { secondOfInertia } from './mass/inertia.ts';
 import { type Piece, piecesOf } from './mass/pieces.ts';
-import { onClock } from './mass/position.ts';
-import { type Branch, branchesOf } from './mass/wirePath.ts';
+import { onClock, positionOf } from './mass/position.ts';
+import { type Branch, branchesOf, type RunEnd } from './mass/wirePath.ts';
 
 export interface CraftState {
   readonly craft: Craft;
@@ -34,16 +36,13 @@ export interface CraftState {
   readonly covariance: Covariance;
 }
 
-/** Hulls by shape: edits leave an untouched shape the same object, so dragging a part computes no hull. */
-const hulls = new WeakMap<HullShape, Outcome<Hull>>();
+/** Edits leave what they do not touch the same object: dragging a part computes no hull and one part's pieces. */
+const hullOfShape = kept(hullOf);
+const piecesOfPart = kept(piecesOf);
+const branchesOfRun = kept(branchesOf);
+const endOfPieces = kept(endAt);
 
-export function hullOfCraft({ hull: { shape } }: Craft): Outcome<Hull> {
-  const known = hulls.get(shape);
-  if (known) return known;
-  const hull = hullOf(shape);
-  hulls.set(shape, hull);
-  return hull;
-}
+export const hullOfCraft = ({ hull: { shape } }: Craft): Outcome<Hull> => hullOfShape(shape);
 
 /** Infeasible only when the hull cannot be formed. The craft must not be changed in place afterwards. */
 export function craftStateOf(craft: Craft): Outcome<CraftState> {
@@ -56,9 +55,13 @@ function stateOn(craft: Craft, hull: Hull): CraftState {
   const gas = gasDensity(craft.gas, air);
   const skin = skinMassOf(craft.hull, hull, craft.film);
   const parts = listed(craft.parts);
-  const pieces = Object.fromEntries(parts.map((part) => [part.id, piecesOf(part, hull)]));
+  const pieces = Object.fromEntries(parts.map((part) => [part.id, piecesOfPart(part, hull)]));
+  const endOf = (end: WireEnd): RunEnd =>
+    end.kind === 'part'
+      ? endOfPieces(pieces[end.part]!, craft.parts.byId[end.part]!.copies.kind)
+      : looseEnd(end.place, hull);
   const branches = Object.fromEntries(
-    listed(craft.wires).map((wire) => [wire.id, branchesOf(wire, craft, pieces, hull)]),
+    listed(craft.wires).map((wire) => [wire.id, branchesOfRun(wire, endOf(wire.from), endOf(wire.to), hull)]),
   );
   const film = bodyOnAxis(skin.film);
   const seams = bodyOnAxis(skin.seams);
@@ -99,6 +102,16 @@ function stateOn(craft: Craft, hull: Hull): CraftState {
     covariance: covarianceOf(uncertain),
   };
 }
+
+/** A part of several pieces at one place is one end of a run; a pair or a ring has an end at each piece. */
+function endAt(pieces: readonly Piece[], copies: Copies['kind']): RunEnd {
+  const points = pieces.map(({ middle }) => middle);
+  return { points: copies === 'together' ? points.slice(0, 1) : points, pair: copies === 'pair' };
+}
+
+const looseEnd = kept(
+  (place: Place, hull: Hull): RunEnd => ({ points: [positionOf(place, hull)], pair: false }),
+);
 
 const bodyOnAxis = ({ mass, station, inertia }: SkinMass['seams']): Body => ({
   mass,

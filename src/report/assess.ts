@@ -1,9 +1,12 @@
 /** Asks the physics once and gives everything that panels, canvas and terminal show of a craft. */
 import { type Craft, listed } from '../craft/craft.ts';
+import { kept } from '../numeric/kept.ts';
 import { floatOf } from '../physics/balance/float.ts';
 import { cgOf } from '../physics/balance/loading.ts';
 import { type CraftState, craftStateOf } from '../physics/craftState.ts';
+import type { Hull } from '../physics/hull/hull.ts';
 import { positionOf } from '../physics/mass/position.ts';
+import { type Branch, drawnBranch } from '../physics/mass/wirePath.ts';
 import { inUnits } from '../units/sentence.ts';
 import type { UnitSystem } from '../units/units.ts';
 import type { Assessment, Geometry } from './assessment.ts';
@@ -63,6 +66,10 @@ function assessState(state: CraftState, units: UnitSystem): Assessment {
   };
 }
 
+const drawnBranches = kept((branches: readonly Branch[], hull: Hull) =>
+  branches.map((branch) => drawnBranch(branch, hull)),
+);
+
 function geometryOf(state: CraftState, rows: Rows): Geometry {
   const { craft, hull, loading, pieces, branches } = state;
   const attitude = floatOf(loading);
@@ -77,7 +84,7 @@ function geometryOf(state: CraftState, rows: Rows): Geometry {
     ),
     wires: listed(craft.wires).map(({ id }) => ({
       wire: id,
-      branches: branches[id]!.map(({ points }) => points),
+      branches: drawnBranches(branches[id]!, hull),
       mass: branches[id]!.reduce((sum, { mass }) => sum + mass, 0),
       length: branches[id]!.reduce((sum, { length }) => sum + length, 0),
     })),

@@ -4,6 +4,7 @@ import { type Craft, keyed, listed } from '../../src/craft/craft.ts';
 import type { Place } from '../../src/craft/placeSchema.ts';
 import type { Part } from '../../src/craft/schema.ts';
 import { assess } from '../../src/report/assess.ts';
+import type { BeamBar } from '../../src/report/assessment.ts';
 import { fixtureCraft, partOf, wireOf } from '../edit/craftFixture.ts';
 import { workedExample } from './workedExample.ts';
 
@@ -98,7 +99,7 @@ test('the bars of the beam add up to solid mass × (CG − CB), and their masses
     fc.property(craft, (given) => {
       const { geometry, rows } = assess(given);
       if (geometry.status === 'infeasible') throw new Error(geometry.why);
-      const sum = (pick: (bar: (typeof geometry.beam)[number]) => number) =>
+      const sum = (pick: (bar: BeamBar) => number) =>
         geometry.beam.reduce((total, bar) => total + pick(bar), 0);
       const mass = rows['mass.solid']!.value!;
       expect(sum((bar) => bar.mass)).toBeCloseTo(mass, 9);

@@ -4,26 +4,25 @@ import { type Craft, keyed } from '../../../src/craft/craft.ts';
 import type { WireRun } from '../../../src/craft/schema.ts';
 import { valueOrNull } from '../../../src/numeric/outcome.ts';
 import type { Vec3 } from '../../../src/numeric/vector.ts';
+import { craftStateOf } from '../../../src/physics/craftState.ts';
 import { hullOf } from '../../../src/physics/hull/hullOf.ts';
-import { piecesOf } from '../../../src/physics/mass/pieces.ts';
-import {
-  type Branch,
-  branchesOf,
-  girthLeg,
-  meridianLeg,
-  straightLeg,
-} from '../../../src/physics/mass/wirePath.ts';
+import { addLeg, type Leg, noSums } from '../../../src/physics/mass/leg.ts';
+import { type Branch, drawnBranch } from '../../../src/physics/mass/wirePath.ts';
 import { fixtureCraft, partOf, wireOf } from '../../edit/craftFixture.ts';
 
 const spheroid = valueOrNull(hullOf({ kind: 'spheroid', length: 3, diameter: 1 }))!;
 const sphere = valueOrNull(hullOf({ kind: 'spheroid', length: 2, diameter: 2 }))!;
 const lying = valueOrNull(hullOf({ kind: 'roundTwoSheet', flatDiameter: 1, stance: 'lying' }))!;
 
-const branches = (wire: WireRun, craft: Craft = fixtureCraft(), hull = spheroid): Branch[] => {
-  const pieces = Object.fromEntries(
-    Object.values(craft.parts.byId).map((part) => [part.id, piecesOf(part, hull)]),
-  );
-  return branchesOf(wire, craft, pieces, hull);
+const branches = (wire: WireRun, craft: Craft = fixtureCraft()): readonly Branch[] =>
+  valueOrNull(craftStateOf({ ...craft, wires: keyed([wire]) }))!.branches[wire.id]!;
+
+/** Length, first and second moments of one leg. */
+const leg = (given: Leg, hull = sphere) => {
+  const sums = noSums();
+  addLeg(sums, given, hull);
+  const [length, ...rest] = sums;
+  return { length, first: rest.slice(0, 3) as [number, number, number], second: rest.slice(3) };
 };
 
 /** Length and mean point of a drawn line: a rival that knows nothing of the hull. */
@@ -40,35 +39,38 @@ const measured = (points: readonly Vec3[]) => {
 };
 
 test('straight: length and second moments of a slender rod, m l²/12 about its middle', () => {
-  const leg = straightLeg([1, 0, 0], [2, 0, 0]);
-  expect(leg.length).toBe(1);
-  expect(leg.second[0] - leg.length * 1.5 ** 2).toBeCloseTo(1 / 12, 12);
+  const rod = leg({ kind: 'straight', a: [1, 0, 0], b: [2, 0, 0] });
+  expect(rod.length).toBeCloseTo(1, 12);
+  expect(rod.second[0]! - rod.length * 1.5 ** 2).toBeCloseTo(1 / 12, 12);
 });
 
 test('round the girth of a sphere: half a circle has length πr and its centroid at 2r/π', () => {
-  const leg = girthLeg(1, 0, Math.PI, sphere);
-  expect(leg.length).toBeCloseTo(Math.PI, 9);
-  expect(Math.abs(leg.first[1]) / leg.length).toBeCloseTo(2 / Math.PI, 9);
-  expect(leg.second[1] + leg.second[2]).toBeCloseTo(Math.PI, 9);
+  const half = leg({ kind: 'girth', station: 1, from: 0, sweep: Math.PI });
+  expect(half.length).toBeCloseTo(Math.PI, 9);
+  expect(Math.abs(half.first[1]) / half.length).toBeCloseTo(2 / Math.PI, 9);
+  expect(half.second[1]! + half.second[2]!).toBeCloseTo(Math.PI, 9);
 });
 
 test('along the meridian of a sphere: a quarter of it, centroid 2r/π in from nose and waist', () => {
-  const leg = meridianLeg(0, 1, Math.PI, sphere);
-  expect(leg.length).toBeCloseTo(Math.PI / 2, 9);
-  expect(1 - leg.first[0] / leg.length).toBeCloseTo(2 / Math.PI, 9);
-  expect(leg.first[2] / leg.length).toBeCloseTo(-2 / Math.PI, 9);
+  const quarter = leg({ kind: 'meridian', from: 0, to: 1, clock: Math.PI });
+  expect(quarter.length).toBeCloseTo(Math.PI / 2, 9);
+  expect(1 - quarter.first[0] / quarter.length).toBeCloseTo(2 / Math.PI, 9);
+  expect(quarter.first[2] / quarter.length).toBeCloseTo(-2 / Math.PI, 9);
 });
 
 test('round the girth goes the shorter way, and nowhere when it is there', () => {
-  expect(girthLeg(1, 0.1, 2 * Math.PI - 0.1, sphere).length).toBeCloseTo(0.2, 9);
-  expect(girthLeg(1, Math.PI, -Math.PI, sphere).length).toBe(0);
+  const at = (clock: number) =>
+    ({ kind: 'loose', place: { kind: 'skin', station: 1.5, clock, standoff: 0 } }) as const;
+  const round = (from: number, to: number) =>
+    branches(wireOf('w', { from: at(from), to: at(to), path: { kind: 'skin', clock: to } }))[0]!.length;
+  expect(round(0.1, 2 * Math.PI - 0.1)).toBeCloseTo(0.5 * 0.2, 9);
+  expect(round(Math.PI, -Math.PI)).toBeCloseTo(0, 9);
 });
 
 test('the section of a lying round hull is no circle, and its girth is the hull’s own', () => {
-  expect(2 * girthLeg(lying.length / 2, 0, Math.PI, lying).length).toBeCloseTo(
-    lying.girth(lying.length / 2),
-    2,
-  );
+  expect(
+    2 * leg({ kind: 'girth', station: lying.length / 2, from: 0, sweep: Math.PI }, lying).length,
+  ).toBeCloseTo(lying.girth(lying.length / 2), 2);
 });
 
 test('a run along the keel from battery to tail thruster, leg by leg', () => {
@@ -97,7 +99,7 @@ test('length and CG agree with the line as drawn', () => {
     fc.property(loose, loose, path, (from, to, route) => {
       const [run] = branches(wireOf('w', { from, to, path: route }));
       fc.pre(run!.length > 0.01);
-      const drawn = measured(run!.points);
+      const drawn = measured(drawnBranch(run!, spheroid));
       expect(drawn.length / run!.length).toBeCloseTo(1, 2);
       run!.cg.forEach((each, i) => {
         expect(each).toBeCloseTo(drawn.mean[i]!, 1);
