@@ -2,6 +2,11 @@
 import type { Craft } from './craft.ts';
 import { keyed } from './craft.ts';
 import type { HullShape } from './hullSchema.ts';
+import { WISHES } from './planningSchema.ts';
+import type { Hardpoint } from './schema.ts';
+
+/** What a hardpoint carries until the builder says otherwise: 10 kg is as good as no limit for a small blimp. */
+export const BLANK_HARDPOINT = { limit: 10, fill: 'continuous' } as const satisfies Partial<Hardpoint>;
 
 const degrees = Math.PI / 180;
 
@@ -15,7 +20,11 @@ export const blankCraft = (name: string, shape: HullShape, length: number): Craf
   day: { kind: 'measured', temperature: 293.15, pressure: 101_325, humidity: 0.5 },
   parts: keyed([]),
   wires: keyed([]),
-  hardpoints: keyed([{ id: 'nose', name: 'Nose', place: { kind: 'axis', station: 0.02 * length } }]),
+  hardpoints: keyed([
+    { id: 'nose', name: 'Nose', place: { kind: 'axis', station: 0.02 * length }, ...BLANK_HARDPOINT },
+  ]),
+  pieces: [],
+  loads: keyed([]),
   leadAt: 'nose',
   support: null,
   targets: {
@@ -24,4 +33,5 @@ export const blankCraft = (name: string, shape: HullShape, length: number): Craf
     heelTolerance: 2 * degrees,
     leastPendulumDepth: 0.01,
   },
+  wishes: [...WISHES],
 });

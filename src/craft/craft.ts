@@ -1,4 +1,5 @@
 /** A craft in memory: as in the file, but with lists keyed by id so that an edit touches one entry. */
+import type { Load } from './planningSchema.ts';
 import type { CraftFile, Hardpoint, Part, WireRun } from './schema.ts';
 
 /** Entries by id, and the order in which the builder wants to see them. Each id stands once in both. */
@@ -7,10 +8,11 @@ export interface Keyed<T> {
   order: string[];
 }
 
-export interface Craft extends Omit<CraftFile, 'steelyard' | 'parts' | 'wires' | 'hardpoints'> {
+export interface Craft extends Omit<CraftFile, 'steelyard' | 'parts' | 'wires' | 'hardpoints' | 'loads'> {
   parts: Keyed<Part>;
   wires: Keyed<WireRun>;
   hardpoints: Keyed<Hardpoint>;
+  loads: Keyed<Load>;
 }
 
 export const keyed = <T extends { id: string }>(items: readonly T[]): Keyed<T> => ({
@@ -26,6 +28,7 @@ export const craftOf = ({ steelyard: _, ...file }: CraftFile): Craft => ({
   parts: keyed(file.parts),
   wires: keyed(file.wires),
   hardpoints: keyed(file.hardpoints),
+  loads: keyed(file.loads),
 });
 
 /** The hardpoint on which the least lead is worked out. */

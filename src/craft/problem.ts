@@ -33,3 +33,10 @@ export function foundText(value: unknown): string {
 }
 
 const cut = (text: string): string => (text.length > LONGEST ? `${text.slice(0, LONGEST)}…` : text);
+
+/** A name that stands for nothing, with some that would. */
+export function unknownId(path: string, id: string, what: string, known: ReadonlySet<string>): Problem {
+  const some = [...known].slice(0, 6).join(', ');
+  const allowed = `the id of ${what} in this file${some ? ` (${some}${known.size > 6 ? ', …' : ''})` : ' (it has none)'}`;
+  return { path, found: JSON.stringify(id), allowed };
+}

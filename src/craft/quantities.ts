@@ -18,6 +18,10 @@ export const LIMITS = {
   parts: 2000,
   wires: 1000,
   copies: 64,
+  loads: 200,
+  places: 20,
+  leadSizes: 40,
+  leadPieces: 1000,
   rows: 500,
   text: 20_000,
 } as const;

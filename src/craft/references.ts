@@ -1,5 +1,6 @@
 /** What the shape of a file cannot say: ids stand once, and what is named exists. */
-import type { Problem } from './problem.ts';
+import { planningProblems } from './planningReferences.ts';
+import { type Problem, unknownId } from './problem.ts';
 import type { CraftFile, WireEnd } from './schema.ts';
 
 export function referenceProblems(file: CraftFile): Problem[] {
@@ -9,12 +10,14 @@ export function referenceProblems(file: CraftFile): Problem[] {
     ...repeats('parts', file.parts),
     ...repeats('wires', file.wires),
     ...repeats('hardpoints', file.hardpoints),
+    ...repeats('loads', file.loads),
     ...file.wires.flatMap((wire, i) => [
       ...danglingEnd(`wires[${i}].from`, wire.from, partIds),
       ...danglingEnd(`wires[${i}].to`, wire.to, partIds),
     ]),
     ...(hardpointIds.has(file.leadAt) ? [] : [unknownId('leadAt', file.leadAt, 'a hardpoint', hardpointIds)]),
     ...bandProblems(file),
+    ...planningProblems(file),
   ];
 }
 
@@ -36,12 +39,6 @@ const danglingEnd = (path: string, end: WireEnd, partIds: ReadonlySet<string>): 
   end.kind === 'loose' || partIds.has(end.part)
     ? []
     : [unknownId(`${path}.part`, end.part, 'a part', partIds)];
-
-function unknownId(path: string, id: string, what: string, known: ReadonlySet<string>): Problem {
-  const some = [...known].slice(0, 6).join(', ');
-  const allowed = `the id of ${what} in this file${some ? ` (${some}${known.size > 6 ? ', …' : ''})` : ' (it has none)'}`;
-  return { path, found: JSON.stringify(id), allowed };
-}
 
 function bandProblems({ targets: { heaviness } }: CraftFile): Problem[] {
   if (heaviness.least <= heaviness.most) return [];

@@ -7,10 +7,11 @@
 import { z } from 'zod';
 import { hullSchema } from './hullSchema.ts';
 import { placeSchema } from './placeSchema.ts';
+import { fillSchema, loadSchema, pieceSchema, slideSchema, WISHES } from './planningSchema.ts';
 import * as q from './quantities.ts';
 
 /** The version this program writes. Older ones step up in `versions.ts`. */
-export const VERSION = 1;
+export const VERSION = 2;
 
 export const PART_KINDS = [
   'thruster',
@@ -98,7 +99,10 @@ export const partSchema = z.strictObject({
     })
     .meta({ description: 'Outside dimensions of one piece' }),
   cgOffset: q.coordinate('CG of the piece aft of the middle of its length'),
-  locked: z.boolean().meta({ description: 'Whether gestures leave it where it is' }),
+  locked: z.boolean().meta({ description: 'Whether gestures and the ballast plan leave it where it is' }),
+  slide: slideSchema.nullable().meta({
+    description: 'The stretch along which the ballast plan may move it; null when it stays where it is',
+  }),
   notes: q.text('Notes', 4000),
 });
 
@@ -128,6 +132,8 @@ export const hardpointSchema = z.strictObject({
   id: q.id('Id of the hardpoint'),
   name: q.text('Name of the hardpoint'),
   place: placeSchema,
+  limit: q.mass('Greatest mass that may hang there, ballast and loads together'),
+  fill: fillSchema,
 });
 
 export const targetsSchema = z.strictObject({
@@ -159,12 +165,23 @@ export const craftFileSchema = z
     parts: listed(partSchema, q.LIMITS.parts, 'Parts, in the builder’s order'),
     wires: listed(wireSchema, q.LIMITS.wires, 'Wire runs'),
     hardpoints: listed(hardpointSchema, 100, 'Places where ballast can be hung').min(1),
+    pieces: listed(pieceSchema, q.LIMITS.leadSizes, 'Pieces of lead at hand, each mass once'),
+    loads: listed(
+      loadSchema,
+      q.LIMITS.loads,
+      'Useful loads that the ballast plan may take aboard; a load is aboard when a part has its id',
+    ),
     leadAt: q.id('Id of the hardpoint on which the least lead is worked out'),
     support: placeSchema.nullable().meta({
       description:
         'The point that carries the static heaviness: the foot of a leg when heavy, the tie of a line when light; null when none is asked for',
     }),
     targets: targetsSchema,
+    wishes: listed(
+      z.enum(WISHES),
+      WISHES.length,
+      'What the ballast plan looks for after least dead ballast, first wish first, each at most once',
+    ),
   })
   .meta({ title: 'Steelyard craft file', description: 'One craft; SI units, angles in radians' });
 

@@ -9,6 +9,7 @@ export const fileOf = (craft: Craft): CraftFile => ({
   parts: listed(craft.parts),
   wires: listed(craft.wires),
   hardpoints: listed(craft.hardpoints),
+  loads: listed(craft.loads),
 });
 
 /** The same craft always gives the same bytes, whatever was edited and undone before. */

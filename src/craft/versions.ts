@@ -12,7 +12,26 @@ export type Step = (file: Json) => Json;
 /** Version 0, from before the first release: lists were the same, but there was no support point. */
 const from0: Step = (file) => ({ support: null, ...file, steelyard: 1 });
 
-const STEPS: Readonly<Record<number, Step>> = { 0: from0 };
+/** Version 1, from before the ballast plan: hardpoints had no limit, parts no slide, and there were no loads to choose from. */
+const from1: Step = (file) => ({
+  pieces: [],
+  loads: [],
+  wishes: ['usefulLoad', 'fewestMoved', 'leastWire'],
+  ...file,
+  parts: eachObject(file.parts, { slide: null }),
+  hardpoints: eachObject(file.hardpoints, { limit: 10, fill: 'continuous' }),
+  steelyard: 2,
+});
+
+/** Every object of a list with those fields, where it has none of its own; anything else as it is. */
+const eachObject = (list: unknown, fields: Json): unknown =>
+  Array.isArray(list)
+    ? list.map((item) =>
+        item !== null && typeof item === 'object' && !Array.isArray(item) ? { ...fields, ...item } : item,
+      )
+    : list;
+
+const STEPS: Readonly<Record<number, Step>> = { 0: from0, 1: from1 };
 
 /** The file at today's version, or the problem with its version. */
 export function stepUp(file: Json): { file: Json } | { problem: Problem } {

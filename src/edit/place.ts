@@ -1,6 +1,8 @@
 /** Places as edits change them: always inside what the craft file allows, and the same object when nothing moved. */
 import type { Place } from '../craft/placeSchema.ts';
+import type { Slide } from '../craft/planningSchema.ts';
 import { LIMITS } from '../craft/quantities.ts';
+import { stationOf, withStation } from '../craft/station.ts';
 
 const TURN = 2 * Math.PI;
 const clamp = (value: number, low: number, high: number): number => Math.min(high, Math.max(low, value));
@@ -11,10 +13,7 @@ const coordinate = (value: number): number => tidy(clamp(value, -LIMITS.length, 
 /** A clock angle brought to 0 … 2π. */
 export const turned = (clock: number): number => tidy(clock - TURN * Math.floor(clock / TURN));
 
-export const stationOf = (place: Place): number => (place.kind === 'free' ? place.x : place.station);
-
-export const withStation = (place: Place, station: number): Place =>
-  place.kind === 'free' ? { ...place, x: station } : { ...place, station };
+export { stationOf, withStation };
 
 export const shifted = (place: Place, by: number): Place => withStation(place, stationOf(place) + by);
 
@@ -22,6 +21,12 @@ export const shifted = (place: Place, by: number): Place => withStation(place, s
 export function placed(before: Place, next: Place): Place {
   const kept = within(next);
   return JSON.stringify(kept) === JSON.stringify(before) ? before : kept;
+}
+
+/** A slide brought within limits, its ends in order; `before` itself when they are equal. */
+export function stretched(before: Slide | null, { from, to }: Slide): Slide {
+  const [fore, aft] = [coordinate(Math.min(from, to)), coordinate(Math.max(from, to))];
+  return before && before.from === fore && before.to === aft ? before : { from: fore, to: aft };
 }
 
 function within(place: Place): Place {

@@ -23,6 +23,7 @@ export const blankPart = (place: Place): PartFields => ({
   size: { length: 0.05, width: 0.04, height: 0.03 },
   cgOffset: 0,
   locked: false,
+  slide: null,
   notes: '',
 });
 

@@ -21,6 +21,7 @@ const part = (name: string): PartFields => ({
   size: { length: 0.1, width: 0.1, height: 0.1 },
   cgOffset: 0,
   locked: false,
+  slide: null,
   notes: '',
 });
 

@@ -17,6 +17,7 @@ const fields = (place: Place): PartFields => ({
   size: { length: 0.1, width: 0.1, height: 0.1 },
   cgOffset: 0,
   locked: false,
+  slide: null,
   notes: '',
 });
 

@@ -25,6 +25,7 @@ const partAt = (i: number, parts: number): Part => ({
   size: { length: 0.06, width: 0.03, height: 0.03 },
   cgOffset: 0,
   locked: false,
+  slide: null,
   notes: '',
 });
 

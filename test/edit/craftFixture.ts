@@ -1,5 +1,5 @@
 /** A small craft of every sort of entry, for tests. */
-import { blankCraft } from '../../src/craft/blank.ts';
+import { BLANK_HARDPOINT, blankCraft } from '../../src/craft/blank.ts';
 import { type Craft, keyed } from '../../src/craft/craft.ts';
 import type { Part, WireRun } from '../../src/craft/schema.ts';
 
@@ -15,6 +15,7 @@ export const partOf = (id: string, change: Partial<Part> = {}): Part => ({
   size: { length: 0.1, width: 0.05, height: 0.05 },
   cgOffset: 0,
   locked: false,
+  slide: null,
   notes: '',
   ...change,
 });
@@ -51,8 +52,8 @@ export function fixtureCraft(): Craft {
     ]),
     wires: keyed([wireOf('power')]),
     hardpoints: keyed([
-      { id: 'nose', name: 'Nose', place: { kind: 'axis', station: 0.05 } },
-      { id: 'chin', name: 'Chin', place: { kind: 'keel', station: 0.6, drop: 0 } },
+      { id: 'nose', name: 'Nose', place: { kind: 'axis', station: 0.05 }, ...BLANK_HARDPOINT },
+      { id: 'chin', name: 'Chin', place: { kind: 'keel', station: 0.6, drop: 0 }, ...BLANK_HARDPOINT },
     ]),
   };
 }

@@ -1,5 +1,6 @@
 import fc from 'fast-check';
 import { expect, test } from 'vitest';
+import { BLANK_HARDPOINT } from '../../src/craft/blank.ts';
 import { type Craft, keyed, listed } from '../../src/craft/craft.ts';
 import type { Place } from '../../src/craft/placeSchema.ts';
 import type { Part } from '../../src/craft/schema.ts';
@@ -139,7 +140,9 @@ test('scaling: twice the size at eight times the masses floats at the same pitch
     parts: keyed(
       listed(one.parts).map((each) => ({ ...each, mass: 8 * each.mass, place: scaledPlace(each.place) })),
     ),
-    hardpoints: keyed([{ id: 'nose', name: 'Nose', place: { kind: 'axis', station: 0.1 } }]),
+    hardpoints: keyed([
+      { id: 'nose', name: 'Nose', place: { kind: 'axis', station: 0.1 }, ...BLANK_HARDPOINT },
+    ]),
   };
   expect(value(two, 'float.pitch')).toBeCloseTo(value(one, 'float.pitch'), 9);
   expect(value(two, 'lead.mass')).toBeCloseTo(8 * value(one, 'lead.mass'), 9);

@@ -1,4 +1,5 @@
 import { expect, test } from 'vitest';
+import { BLANK_HARDPOINT } from '../../src/craft/blank.ts';
 import { type Craft, keyed, listed } from '../../src/craft/craft.ts';
 import { movePart } from '../../src/edit/edits/parts.ts';
 import { run } from '../../src/edit/history.ts';
@@ -112,7 +113,9 @@ test('top-heavy: missed however little is asked for, and said before anything el
 test('lead that no lift is left for: said, with what is short', () => {
   const tight: Craft = {
     ...trimmed(),
-    hardpoints: keyed([{ id: 'nose', name: 'Nose', place: { kind: 'axis', station: 1.4 } }]),
+    hardpoints: keyed([
+      { id: 'nose', name: 'Nose', place: { kind: 'axis', station: 1.4 }, ...BLANK_HARDPOINT },
+    ]),
   };
   const tail = withPart(tight, 'camera', { mass: 0.02, place: { kind: 'axis', station: 2.9 } });
   const lead = verdict(tail, 'lead');

@@ -1,5 +1,5 @@
 /** The worked example as a craft: hand-checked figures stand in `workedExample.test.ts`. */
-import { blankCraft } from '../../src/craft/blank.ts';
+import { BLANK_HARDPOINT, blankCraft } from '../../src/craft/blank.ts';
 import { type Craft, keyed } from '../../src/craft/craft.ts';
 import { partOf } from '../edit/craftFixture.ts';
 
@@ -16,6 +16,8 @@ export function workedExample(): Craft {
       partOf('gondola', { ...point, mass: 0.14, place: { kind: 'keel', station: 1.45, drop: 0.04 } }),
       partOf('battery', { ...point, mass: 0.172, place: { kind: 'keel', station: 1.3, drop: 0.03 } }),
     ]),
-    hardpoints: keyed([{ id: 'nose', name: 'Nose', place: { kind: 'axis', station: 0.05 } }]),
+    hardpoints: keyed([
+      { id: 'nose', name: 'Nose', place: { kind: 'axis', station: 0.05 }, ...BLANK_HARDPOINT },
+    ]),
   };
 }

@@ -44,6 +44,7 @@ function withLead(craft: Craft, mass: number, hardpoint: string): Craft {
     size: { length: 0.02, width: 0.02, height: 0.01 },
     cgOffset: 0,
     locked: false,
+    slide: null,
     notes: '',
   };
   return {

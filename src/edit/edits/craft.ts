@@ -1,5 +1,6 @@
 /** Edits of what the craft is as a whole: name, hull, film, gas, day, targets. */
 import type { HullShape, HullSpec } from '../../craft/hullSchema.ts';
+import type { Wish } from '../../craft/planningSchema.ts';
 import type { Day, Film, Gas, Targets } from '../../craft/schema.ts';
 import { type Edit, type Recipe, runOf, step } from '../edit.ts';
 
@@ -48,4 +49,10 @@ export const setDay = (field: string, day: Day): Edit =>
 export const setTargets = (field: string, change: Partial<Targets>): Edit =>
   runOf(`targets ${field}`, `Change ${field}`, (craft) => {
     Object.assign(craft.targets, change);
+  });
+
+/** What the ballast plan looks for after least dead ballast, first wish first. */
+export const setWishes = (wishes: readonly Wish[]): Edit =>
+  step('Change wishes', (craft) => {
+    if (wishes.join() !== craft.wishes.join()) craft.wishes = [...wishes];
   });

@@ -1,11 +1,14 @@
 /** Edits of parts. Positions that only the hull knows are handed in, so that an edit needs no physics. */
-import { type Craft, listed } from '../../craft/craft.ts';
+import type { Craft } from '../../craft/craft.ts';
+import { freeId } from '../../craft/ids.ts';
 import type { Place } from '../../craft/placeSchema.ts';
+import type { Slide } from '../../craft/planningSchema.ts';
 import { LIMITS } from '../../craft/quantities.ts';
-import type { Part, WireEnd } from '../../craft/schema.ts';
+import type { Part } from '../../craft/schema.ts';
+import { taken } from '../../craft/stowage.ts';
+import { takeOut } from '../../craft/takeOut.ts';
 import { type Edit, type Recipe, runOf, step } from '../edit.ts';
-import { freeId } from '../ids.ts';
-import { placed, shifted } from '../place.ts';
+import { placed, shifted, stretched } from '../place.ts';
 
 export type PartFields = Omit<Part, 'id'>;
 
@@ -18,7 +21,7 @@ export const addParts = (all: readonly PartFields[], label = `Add ${all.length} 
   });
 
 function insert(craft: Craft, fields: PartFields, index: number): void {
-  const id = freeId(fields.name || fields.kind, craft.parts.byId);
+  const id = freeId(fields.name || fields.kind, taken(craft));
   craft.parts.byId[id] = { id, ...fields };
   craft.parts.order.splice(index, 0, id);
 }
@@ -36,19 +39,7 @@ const structuredCloneOf = <T>(value: T): T => JSON.parse(JSON.stringify(value));
 
 /** Takes parts away. A wire run that ended at one stays, its end loose where the part was. */
 export const removeParts = (ids: readonly string[]): Edit =>
-  step(ids.length === 1 ? 'Remove part' : `Remove ${ids.length} parts`, (craft) => {
-    for (const wire of listed(craft.wires)) {
-      wire.from = loosened(craft, wire.from, ids);
-      wire.to = loosened(craft, wire.to, ids);
-    }
-    for (const id of ids) delete craft.parts.byId[id];
-    craft.parts.order = craft.parts.order.filter((id) => !ids.includes(id));
-  });
-
-const loosened = (craft: Craft, end: WireEnd, ids: readonly string[]): WireEnd =>
-  end.kind === 'part' && ids.includes(end.part)
-    ? { kind: 'loose', place: { ...craft.parts.byId[end.part]!.place } }
-    : end;
+  step(ids.length === 1 ? 'Remove part' : `Remove ${ids.length} parts`, (craft) => takeOut(craft, ids));
 
 /** Sets fields of one part. `field` names what is typed, so that keystrokes in it undo together. */
 export const setPart = (id: string, field: string, change: Partial<PartFields>): Edit =>
@@ -90,6 +81,17 @@ export const placePart =
 
 export const movePart = (id: string, place: Place): Edit =>
   runOf(`part ${id} place`, 'Move part', placePart(id, place));
+
+/** Gives a part a slide, or takes it away. For drags of its ends: pass the recipe to `Drag.move`. */
+export const stretchSlide =
+  (id: string, slide: Slide | null): Recipe =>
+  (craft) => {
+    const part = craft.parts.byId[id]!;
+    part.slide = slide && stretched(part.slide, slide);
+  };
+
+export const setSlide = (id: string, slide: Slide | null): Edit =>
+  runOf(`part ${id} slide`, slide ? 'Change slide' : 'Remove slide', stretchSlide(id, slide));
 
 /** Shifts parts along the hull, keeping their kind of place; locked ones stay. */
 export const shiftParts =

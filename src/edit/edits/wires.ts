@@ -1,7 +1,8 @@
 /** Edits of wire runs. */
+
+import { freeId } from '../../craft/ids.ts';
 import type { WireEnd, WireRun } from '../../craft/schema.ts';
 import { type Edit, type Recipe, runOf, step } from '../edit.ts';
-import { freeId } from '../ids.ts';
 
 export type WireFields = Omit<WireRun, 'id'>;
 

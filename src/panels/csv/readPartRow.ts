@@ -57,6 +57,7 @@ function fieldsOf(row: Row, home: Place): PartFields {
     },
     cgOffset: row.quantity('cgOffset') ?? blank.cgOffset,
     locked: row.read('locked', readYes) ?? blank.locked,
+    slide: blank.slide,
     notes: cellText(row.text('notes')),
   };
 }

@@ -36,6 +36,7 @@ const part: fc.Arbitrary<Part> = fc.record({
   size: fc.record({ length: distance, width: distance, height: distance }),
   cgOffset: length,
   locked: fc.boolean(),
+  slide: fc.constant(null),
   notes: text,
 });
 
@@ -156,5 +157,6 @@ const blank: Part = {
   size: { length: 0, width: 0, height: 0 },
   cgOffset: 0,
   locked: false,
+  slide: null,
   notes: '',
 };

@@ -1,0 +1,7 @@
+/** Carrying out a ballast plan. */
+import { type Stowage, stow } from '../../craft/stowage.ts';
+import { type Edit, step } from '../edit.ts';
+
+/** Hangs the ballast, moves the slides and takes the loads aboard, all as one step. */
+export const applyPlan = (stowage: Stowage): Edit =>
+  step('Apply the ballast plan', (craft) => stow(craft, stowage));
