@@ -25,6 +25,7 @@ const ALLOWED: Readonly<Record<string, readonly string[]>> = {
 
 /** Packages a layer may use; node: only where the terminal is. */
 const PACKAGES: Readonly<Record<string, readonly string[]>> = {
+  numeric: ['highs'],
   craft: ['zod'],
   catalogue: ['zod'],
   edit: ['immer'],
