@@ -40,7 +40,7 @@ export interface CraftState {
 const hullOfShape = kept(hullOf);
 const piecesOfPart = kept(piecesOf);
 const branchesOfRun = kept(branchesOf);
-const endOfPieces = kept(endAt);
+export const endOfPieces = kept(endAt);
 
 export const hullOfCraft = ({ hull: { shape } }: Craft): Outcome<Hull> => hullOfShape(shape);
 
@@ -109,7 +109,7 @@ function endAt(pieces: readonly Piece[], copies: Copies['kind']): RunEnd {
   return { points: copies === 'together' ? points.slice(0, 1) : points, pair: copies === 'pair' };
 }
 
-const looseEnd = kept(
+export const looseEnd = kept(
   (place: Place, hull: Hull): RunEnd => ({ points: [positionOf(place, hull)], pair: false }),
 );
 
