@@ -48,9 +48,8 @@ export const stowageOf = (setting: Setting, point: Point): Stowage => ({
   }),
 });
 
-/** What hangs at a hardpoint; less than a microgram is nothing. */
 function piecesAt({ sizes }: Setting, { weights, counts }: Point, h: number): LeadPiece[] {
-  const cut = weights[h]! > 1e-9 ? [{ mass: weights[h]!, count: 1 }] : [];
+  const cut = weights[h]! > 0 ? [{ mass: weights[h]!, count: 1 }] : [];
   const whole = sizes.flatMap(({ mass }, k) => (counts[h]![k]! > 0 ? [{ mass, count: counts[h]![k]! }] : []));
   return [...cut, ...whole];
 }

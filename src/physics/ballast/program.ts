@@ -65,9 +65,14 @@ export function programOf(
   };
 }
 
+/** Ballast of less than some micrograms is what closing objectives left open, g. */
+const NOTHING = 5e-6;
+
 /** The point that a solution stands for; stations that play no part stay as in `before`. */
 export const pointOf = ({ columns }: Program, x: readonly number[], before: Point): Point => ({
-  weights: columns.weights.map((column) => (column === null ? 0 : Math.max(0, x[column]! / GRAMS))),
+  weights: columns.weights.map((column) =>
+    column !== null && x[column]! > NOTHING ? x[column]! / GRAMS : 0,
+  ),
   counts: columns.counts.map((each, h) =>
     each.length > 0 ? each.map((column) => Math.round(x[column]!)) : before.counts[h]!.map(() => 0),
   ),
