@@ -9,13 +9,13 @@ import type { Point } from './point.ts';
 import { type Program, pointOf, programOf } from './program.ts';
 import type { Setting } from './setting.ts';
 import { plus, type Share } from './share.ts';
-import { leastBallast, stagesOf } from './stages.ts';
+import { type Aim, stagesFor } from './stages.ts';
 
 export interface SearchOptions {
   /** Date.now() at which to stop, ms. */
   readonly deadline: number;
-  /** Only least ballast, not what comes after it. Default false. */
-  readonly ballastOnly?: boolean;
+  /** What it is to be best in. Default 'plan'. */
+  readonly aim?: Aim;
   /** Any plan that keeps the limits will do. Default false. */
   readonly anyWillDo?: boolean;
   readonly onBetter?: (better: Better) => void;
@@ -69,7 +69,7 @@ export function attempt(
   const linear = linearAt(setting, point, exact);
   const free = programOf(setting, linear, exact, { reach });
   const program = held ? { ...free, problem: withChoicesHeld(free, held.values) } : free;
-  const stages = options.ballastOnly ? [leastBallast(setting, program)] : stagesOf(setting, linear, program);
+  const stages = stagesFor(options.aim ?? 'plan', setting, linear, program);
   const ordered = solveInOrder(model, program.problem, program.columns.moved, stages, {
     ...orderOptions(options, program, point),
     ...(start ? { start } : {}),

@@ -6,7 +6,7 @@ import { excessOf, hairOf, type Limit, type LimitKey, limitsOf } from './limits.
 import { type Point, stowageOf } from './point.ts';
 import { uncertainOf, worstOf } from './robust.ts';
 import type { Setting } from './setting.ts';
-import { type Planned, type Share, shareOfCraft } from './share.ts';
+import { type Planned, plus, type Share, shareOfCraft, trialShare } from './share.ts';
 
 export interface Exact extends Planned {
   readonly craft: Craft;
@@ -20,7 +20,7 @@ export interface Exact extends Planned {
 export function exactOf(setting: Setting, point: Point): Exact {
   const craft = stowed(setting.craft, stowageOf(setting, point));
   const state = stateOf(craft);
-  const share = shareOfCraft(state);
+  const share = plus(shareOfCraft(state), trialShare(setting), point.trial);
   const limits = limitsOf(state);
   const uncertain = setting.robust ? uncertainOf(state) : [];
   const excess = limits.map(

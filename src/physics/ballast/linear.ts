@@ -24,6 +24,7 @@ import {
   shareOfPart,
   shareWithout,
   times,
+  trialShare,
 } from './share.ts';
 
 export interface Linear {
@@ -82,14 +83,15 @@ const loadLines = (setting: Setting, choice: LoadChoice, stations: readonly numb
 
 /** What the decisions of the point add, by the linear functions. */
 function decided(
-  { sizes }: Setting,
-  { weights, counts, options }: Point,
+  setting: Setting,
+  { weights, counts, options, trial }: Point,
   linear: Pick<Linear, 'slides' | 'loads' | 'weights'>,
 ): Share {
   const hung = weights.map(
-    (weight, h) => weight + counts[h]!.reduce((sum, count, k) => sum + count * sizes[k]!.mass, 0),
+    (weight, h) => weight + counts[h]!.reduce((sum, count, k) => sum + count * setting.sizes[k]!.mass, 0),
   );
   return [
+    times(trialShare(setting), trial),
     ...linear.weights.map((share, h) => times(share, hung[h]!)),
     ...linear.slides.map(({ value }) => value),
     ...options.flatMap((option, l) => (option === null ? [] : [linear.loads[l]![option]!.value])),

@@ -125,7 +125,7 @@ export function planOf(craft: Craft, solver: LinearSolver, options: PlanOptions 
   return { ...plan, binding, bindingComplete: complete };
 }
 
-const noPlan = (status: PlanNotFound['status'], why: string, robust: boolean): PlanNotFound => ({
+export const noPlan = (status: PlanNotFound['status'], why: string, robust: boolean): PlanNotFound => ({
   status,
   robust,
   why,
@@ -166,7 +166,7 @@ function telling(setting: Setting, { onProgress }: PlanOptions): { onBetter?: (b
   };
 }
 
-function planFrom(setting: Setting, found: Found): PlanFound {
+export function planFrom(setting: Setting, found: Found): PlanFound {
   const { craft, robust } = setting;
   const { point, exact, ordered, claimed } = found;
   const fixed = fixedBallast(craft);

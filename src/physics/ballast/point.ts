@@ -15,6 +15,8 @@ export interface Point {
   readonly options: readonly (number | null)[];
   /** Where it would be on each option that is a slide, taken or not, m. */
   readonly stations: readonly (readonly number[])[];
+  /** Mass of the load that is tried, kg. */
+  readonly trial: number;
 }
 
 const within = (value: number, from: number, to: number): number => Math.min(Math.max(value, from), to);
@@ -31,6 +33,7 @@ export const startOf = (setting: Setting): Point => ({
       return site.slide ? within(stationOf(place), site.slide.from, site.slide.to) : stationOf(place);
     }),
   ),
+  trial: 0,
 });
 
 export const stowageOf = (setting: Setting, point: Point): Stowage => ({

@@ -11,7 +11,7 @@ import { type MoveColumns, moveColumns } from './moveColumns.ts';
 import { type LoadColumns, loadColumns, slideColumns } from './placeColumns.ts';
 import type { Point } from './point.ts';
 import type { Setting } from './setting.ts';
-import type { Share } from './share.ts';
+import { type Share, times, trialShare } from './share.ts';
 import { holdRows, stockRows, type WeightColumns, weightColumns } from './weightColumns.ts';
 
 export interface Program {
@@ -25,6 +25,8 @@ export interface Program {
 export interface ProgramColumns extends WeightColumns, MoveColumns {
   readonly slides: readonly number[];
   readonly loads: readonly LoadColumns[];
+  /** The load that is tried, g; null when none is. */
+  readonly trial: number | null;
   /** How far each limit may be broken; none unless asked for. */
   readonly broken: readonly number[];
 }
@@ -54,6 +56,7 @@ export function programOf(
     loads.map(({ taken }) => taken),
   );
   stockRows(draft, setting, weights);
+  const trial = trialColumn(draft, setting);
   const moves = moveColumns(draft, setting, slides, loads);
   const broken = limitRows(draft, setting, linear, exact, { slides, loads }, elastic);
   const { rest, effects } = draft;
@@ -61,8 +64,17 @@ export function programOf(
     problem: draft.problem(),
     rest,
     effects,
-    columns: { ...weights, slides, loads, ...moves, broken },
+    columns: { ...weights, slides, loads, ...moves, trial, broken },
   };
+}
+
+/** Up to all that the craft lifts. */
+function trialColumn(draft: Draft, setting: Setting): number | null {
+  if (!setting.trial) return null;
+  const most = Math.abs(setting.today.loading.grossLift) + setting.today.loading.solid.mass;
+  const column = draft.column('load that is tried', 0, most * GRAMS);
+  draft.adds(column, times(trialShare(setting), 1 / GRAMS));
+  return column;
 }
 
 /** Ballast of less than some micrograms is what closing objectives left open, g. */
@@ -86,4 +98,5 @@ export const pointOf = ({ columns }: Program, x: readonly number[], before: Poin
       column !== null && x[taken[k]!]! > 0.5 ? x[column]! : before.stations[l]![k]!,
     ),
   ),
+  trial: columns.trial === null ? 0 : Math.max(0, x[columns.trial]! / GRAMS),
 });

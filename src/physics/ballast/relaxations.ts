@@ -97,7 +97,7 @@ export function planFor(
   const found = search(setting.value, solver, {
     deadline,
     anyWillDo,
-    ballastOnly: true,
+    aim: 'ballast',
     ...(shouldStop ? { shouldStop } : {}),
   });
   return found.status === 'found' && isKept(found.exact) ? { setting: setting.value, found } : null;

@@ -13,18 +13,21 @@ import { nearestPoint } from './nearest.ts';
 import { ballastOf, type Point, startOf } from './point.ts';
 import type { Setting } from './setting.ts';
 
-/** One search with its solver, which keeps what it knows between rounds. */
 export function search(setting: Setting, solver: LinearSolver, options: SearchOptions): Found | NotFound {
   const model = solver.live();
-  const trial: Attempt = { setting, model, options };
   try {
-    const found = settled(trial, startOf(setting));
-    if (found.status !== 'infeasible' || !found.curved) return found;
-    const near = nearestPoint(setting, model, options.deadline);
-    return near ? settled(trial, near) : found;
+    return searchFrom({ setting, model, options }, startOf(setting));
   } finally {
     model.dispose();
   }
+}
+
+/** The same with a model that lives on, from any point. */
+export function searchFrom(trying: Attempt, begin: Point): Found | NotFound {
+  const found = settled(trying, begin);
+  if (found.status !== 'infeasible' || !found.curved) return found;
+  const near = nearestPoint(trying.setting, trying.model, trying.options.deadline);
+  return near ? settled(trying, near) : found;
 }
 
 const MOST_ROUNDS = 24;
@@ -33,28 +36,28 @@ const FREE_ROUNDS = 5;
 /** Ballast that is worth another round, kg. */
 const WORTH = 1e-7;
 
-function settled(trial: Attempt, begin: Point): Found | NotFound {
+function settled(trying: Attempt, begin: Point): Found | NotFound {
   let point = begin;
   let held: Found | null = null;
   let best: Found | null = null;
   let unsettled = 0;
   for (let round = 0; round < MOST_ROUNDS; round++) {
-    const found: Found | NotFound = attempt(trial, point, held, 0.5 ** Math.max(0, unsettled - FREE_ROUNDS));
+    const found: Found | NotFound = attempt(trying, point, held, 0.5 ** Math.max(0, unsettled - FREE_ROUNDS));
     if (found.status !== 'found') {
-      if (!held || isLate(trial)) return best ?? found;
+      if (!held || isLate(trying)) return best ?? found;
       held = null;
       continue;
     }
     if (held && found.agrees && isKept(found.exact)) {
-      const confirmed = confirm(trial, found);
+      const confirmed = confirm(trying, found);
       if (!confirmed) return found;
       held = confirmed.agrees ? null : confirmed;
-      best = better(trial.setting, best, found);
+      best = better(trying, best, found);
       point = confirmed.point;
       continue;
     }
-    best = better(trial.setting, best, found);
-    if (found.agrees || isLate(trial) || (trial.options.anyWillDo && best)) return best ?? unsettledSlides;
+    best = better(trying, best, found);
+    if (found.agrees || isLate(trying) || (trying.options.anyWillDo && best)) return best ?? unsettledSlides;
     unsettled++;
     held = found.choices ? found : null;
     point = found.point;
@@ -71,17 +74,20 @@ const unsettledSlides: NotFound = {
 const isLate = ({ options }: Attempt): boolean => Date.now() >= options.deadline || !!options.shouldStop?.();
 
 /** A better plan with everything free, linearised where these choices settled; null when there is none. */
-function confirm(trial: Attempt, found: Found): Found | null {
-  if (trial.options.anyWillDo || isLate(trial)) return null;
-  const free = attempt(trial, found.point, null, 1, found.values);
+function confirm(trying: Attempt, found: Found): Found | null {
+  if (trying.options.anyWillDo || isLate(trying)) return null;
+  const free = attempt(trying, found.point, null, 1, found.values);
   if (free.status !== 'found') return null;
-  const saved = ballastOf(trial.setting, found.point) - ballastOf(trial.setting, free.point);
-  return saved > WORTH ? free : null;
+  return costOf(trying, found.point) - costOf(trying, free.point) > WORTH ? free : null;
 }
 
-/** The one with less ballast of those that keep every limit. */
-function better(setting: Setting, best: Found | null, found: Found): Found | null {
+/** The better one of those that keep every limit. */
+function better(trying: Attempt, best: Found | null, found: Found): Found | null {
   if (!isKept(found.exact)) return best;
   if (!best) return found;
-  return ballastOf(setting, found.point) <= ballastOf(setting, best.point) + WORTH ? found : best;
+  return costOf(trying, found.point) <= costOf(trying, best.point) + WORTH ? found : best;
 }
+
+/** What comes first in what is aimed at, kg. */
+const costOf = ({ setting, options }: Attempt, point: Point): number =>
+  options.aim === 'trial' ? -point.trial : ballastOf(setting, point);

@@ -22,6 +22,8 @@ export interface Setting {
   readonly sizes: readonly LeadPiece[];
   /** Whether every plan must hold for every mass within its tolerance. */
   readonly robust: boolean;
+  /** Where a load of any mass is tried, m; null when none is. */
+  readonly trial: Vec3 | null;
 }
 
 export interface WeightSpot {
@@ -82,8 +84,14 @@ export function settingOf(craft: Craft, robust: boolean): Outcome<Setting> {
     loads: looseLoads(craft).map((load) => loadChoice(craft, load)),
     sizes: craft.pieces.filter(({ count }) => count > 0),
     robust,
+    trial: null,
   });
 }
+
+/** Whether pieces or places are to be chosen, so that it is not enough to follow a slope. */
+export const hasChoices = ({ hardpoints, sizes, loads }: Setting): boolean =>
+  (sizes.length > 0 && hardpoints.some(({ fill }) => fill === 'pieces')) ||
+  loads.some(({ load, options }) => !load.must || options.length > 1);
 
 function loadChoice(craft: Craft, load: Load): LoadChoice {
   const options = load.options.map((option) => siteOf(craft, option));

@@ -4,6 +4,7 @@
  */
 import type { Craft } from '../../craft/craft.ts';
 import type { Part, WireEnd, WireRun } from '../../craft/schema.ts';
+import type { Vec3 } from '../../numeric/vector.ts';
 import { type CraftState, endOfPieces, looseEnd } from '../craftState.ts';
 import { type Body, sumsOf } from '../mass/body.ts';
 import { type Piece, piecesOf } from '../mass/pieces.ts';
@@ -80,3 +81,7 @@ function otherEnd({ given, state }: Planned, end: WireEnd): RunEnd {
 /** Σ (1, p) over the pieces: what one more kilogram in each of them would add. */
 export const perKilogram = (pieces: readonly Piece[]): Share =>
   pieces.reduce<Share>((sum, { cg }) => plus(sum, [1, cg[0], cg[1], cg[2], 0]), NO_SHARE);
+
+/** One kilogram of the load that is tried. */
+export const trialShare = ({ trial }: { readonly trial: Vec3 | null }): Share =>
+  trial ? [1, ...trial, 0] : NO_SHARE;

@@ -10,7 +10,7 @@ import type { Program } from './program.ts';
 import { loadMass, type Setting } from './setting.ts';
 import { ballastAt } from './weightColumns.ts';
 
-export type StageKey = 'ballast' | 'usefulLoad' | 'fewestMoved' | 'leastWire' | 'distance';
+export type StageKey = 'trial' | 'ballast' | 'usefulLoad' | 'fewestMoved' | 'leastWire' | 'distance';
 
 export interface Stage {
   readonly key: StageKey;
@@ -18,7 +18,31 @@ export interface Stage {
   readonly terms: readonly Term[];
 }
 
-export function stagesOf(setting: Setting, linear: Linear, program: Program): Stage[] {
+/**
+ * plan: all of it. ballast: least dead ballast alone. follow: that, and the least distance moved. trial: the most of the
+ * load that is tried, then least dead ballast.
+ */
+export type Aim = 'plan' | 'ballast' | 'follow' | 'trial';
+
+export function stagesFor(aim: Aim, setting: Setting, linear: Linear, program: Program): Stage[] {
+  switch (aim) {
+    case 'plan':
+      return stagesOf(setting, linear, program);
+    case 'ballast':
+      return [leastBallast(setting, program)];
+    case 'follow':
+      return [leastBallast(setting, program), leastDistance(program)];
+    case 'trial':
+      return [mostTrial(program), leastBallast(setting, program)];
+  }
+}
+
+const mostTrial = ({ columns }: Program): Stage => ({
+  key: 'trial',
+  terms: columns.trial === null ? [] : [[columns.trial, -1]],
+});
+
+function stagesOf(setting: Setting, linear: Linear, program: Program): Stage[] {
   const by: Record<Wish, () => Stage[]> = {
     usefulLoad: () => usefulLoad(setting, program),
     fewestMoved: () => [fewestMoved(program)],
