@@ -30,6 +30,8 @@ export interface Want {
   readonly loads?: number;
   /** Whether anything slides. Default true. */
   readonly slides?: boolean;
+  /** Further out of trim, with less room to put it right. Default false. */
+  readonly hard?: boolean;
   /** Half-widths of masses as a share of them. Default 0. */
   readonly tolerance?: number;
 }
@@ -45,18 +47,18 @@ const SPOTS: readonly (readonly [string, Place])[] = [
 ];
 
 export function randomCraft(want: Want = {}): fc.Arbitrary<Craft> {
-  const { curved = false, pieces = false, loads = 0, slides = true, tolerance = 0 } = want;
+  const { curved = false, pieces = false, loads = 0, slides = true, hard = false, tolerance = 0 } = want;
   return fc
     .record({
       thruster: double(0.05, 0.2),
       battery: double(0.1, 0.4),
       batteryAt: double(0.4, 2.4),
-      side: double(0, 0.1),
+      side: hard ? double(0.1, 0.5) : double(0, 0.1),
       hang: double(0.03, 0.3),
       deck: double(-0.2, 0.05),
-      slide: fc.tuple(double(0.3, 1.2), double(1, 2.6)),
-      spots: fc.subarray([0, 1, 2, 3], { minLength: 2 }),
-      limits: fc.array(double(0.02, 0.4), { minLength: 4, maxLength: 4 }),
+      slide: hard ? fc.tuple(double(0.8, 1.2), double(1.2, 1.5)) : fc.tuple(double(0.3, 1.2), double(1, 2.6)),
+      spots: fc.subarray([0, 1, 2, 3], { minLength: hard ? 4 : 2 }),
+      limits: fc.array(hard ? double(0.005, 0.1) : double(0.02, 0.4), { minLength: 4, maxLength: 4 }),
       pitch: double(0.3, 6),
       heel: double(0.3, 6),
       band: fc.tuple(double(-0.3, -0.01), double(0, 0.3)),
