@@ -1,0 +1,98 @@
+/** A plan in words: what to slide, hang and leave, and why it cannot be done with less. In SI, for `inUnits`. */
+import type { Craft } from '../craft/craft.ts';
+import type { Place } from '../craft/placeSchema.ts';
+import { stationOf } from '../craft/station.ts';
+import type { PlanFound, PlannedLoad, PlannedSlide, PlannedWeight } from '../physics/ballast/plan.ts';
+import { say } from '../units/sentence.ts';
+import { limitStands, loadName, partName, spotName, stepSaves } from './limitWords.ts';
+
+/** Moves shorter than this are not worth telling, m. */
+const LEAST_MOVE = 5e-4;
+
+const COUNTS = ['no', 'one', 'two', 'three', 'four', 'five', 'six', 'seven', 'eight', 'nine', 'ten'];
+const countWord = (count: number): string => COUNTS[count] ?? String(count);
+
+/** "a, b and c" */
+export const joined = (words: readonly string[]): string =>
+  words.length < 2 ? words.join('') : `${words.slice(0, -1).join(', ')} and ${words.at(-1)}`;
+
+/** "slide Battery to 0.42 m" */
+export const slideWords = (craft: Craft, { part, to }: PlannedSlide): string =>
+  `slide ${partName(craft, part)} to ${say(to, 'length')}`;
+
+export const toldSlides = ({ slides }: PlanFound): PlannedSlide[] =>
+  slides.filter(({ from, to }) => Math.abs(to - from) >= LEAST_MOVE);
+
+/** "hang Camera at the chin instead of at 0.30 m", "leave Logger ashore"; null when it stays as it is. */
+export function loadWords(craft: Craft, { load, place, hardpoint, placeToday }: PlannedLoad): string | null {
+  const name = loadName(craft, load);
+  if (!place) return placeToday ? `leave ${name} ashore` : null;
+  if (placeToday && isSame(place, placeToday)) return null;
+  const instead = placeToday ? ` instead of at ${say(stationOf(placeToday), 'length')}` : '';
+  return `hang ${name} at ${hardpoint ? `the ${spotName(craft, hardpoint)}` : say(stationOf(place), 'length')}${instead}`;
+}
+
+const isSame = (a: Place, b: Place): boolean =>
+  a.kind === b.kind && Math.abs(stationOf(a) - stationOf(b)) < LEAST_MOVE;
+
+/** "two 5.0 g pieces and one 1.0 g piece at the nose", "11.2 g at the nose" */
+export function weightWords(craft: Craft, { hardpoint, mass, pieces }: PlannedWeight): string {
+  const at = `at the ${spotName(craft, hardpoint)}`;
+  if (pieces.length === 0) return `${say(mass, 'mass')} ${at}`;
+  const counted = pieces.map(
+    (piece) => `${countWord(piece.count)} ${say(piece.mass, 'mass')} piece${piece.count === 1 ? '' : 's'}`,
+  );
+  return `${joined(counted)} ${at}`;
+}
+
+/** The plan as one or two sentences. `leadToday`: what levels the craft as it is, at the chosen hardpoint, where that can be done, kg. */
+export function planHeadline(craft: Craft, plan: PlanFound, leadToday: number | null): string {
+  const moves = [
+    ...toldSlides(plan).map((slide) => slideWords(craft, slide)),
+    ...plan.loads.flatMap((load) => loadWords(craft, load) ?? []),
+  ];
+  return [before(plan, leadToday), capital(outcome(craft, plan, moves))].filter(Boolean).join(' ');
+}
+
+function before({ deadBallast, deadBallastToday }: PlanFound, leadToday: number | null): string {
+  const needed = Math.max(deadBallastToday, leadToday ?? 0);
+  if (needed <= deadBallast + 1e-4) return '';
+  return `You do not need ${say(needed, 'mass')} of lead.`;
+}
+
+function outcome(
+  craft: Craft,
+  { weights, deadBallast, deadBallastFixed, deadBallastToday }: PlanFound,
+  moves: string[],
+): string {
+  const fixed =
+    deadBallastFixed > 0 ? `, besides the ${say(deadBallastFixed, 'mass')} that stay where they are` : '';
+  const planned = deadBallast - deadBallastFixed;
+  const hung = joined(weights.map((weight) => weightWords(craft, weight)));
+  if (planned <= 0) {
+    const none = deadBallastToday > deadBallastFixed ? 'no lead is needed any more' : 'no lead is needed';
+    return moves.length > 0 ? `${joined(moves)}: then ${none}${fixed}.` : `${none}${fixed}.`;
+  }
+  const many = weights.length > 1 || (weights[0]?.pieces.length ?? 0) > 0;
+  const does = many ? `${say(planned, 'mass')} of lead does it: ${hung}` : `${hung} does it`;
+  return moves.length > 0 ? `${joined(moves)}, and ${does}${fixed}.` : `${does}${fixed}.`;
+}
+
+const capital = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1);
+
+/** Why there is no plan with less, or what is left open. */
+export function planProof(craft: Craft, plan: PlanFound): string {
+  const every = plan.robust ? ' It holds for every mass within its tolerance.' : '';
+  return proofOf(craft, plan) + every;
+}
+
+function proofOf(craft: Craft, plan: PlanFound): string {
+  if (plan.status === 'stopped') {
+    return `It keeps every target, but the search was stopped: one with as little as ${say(plan.bound, 'mass')} may exist.`;
+  }
+  const [first] = plan.binding;
+  if (plan.deadBallast <= plan.deadBallastFixed) return 'Less than none there cannot be.';
+  if (!first) return 'It cannot be done with less.';
+  const { limit, now, step, saving } = first;
+  return `It cannot be done with less: ${limitStands(craft, limit, now)}, and ${stepSaves(limit, step, saving)}.`;
+}
