@@ -2,7 +2,7 @@
  * The plan as a linear program, linearised about a point: ballast at each hardpoint, the station of each slide, 1 or 0
  * for each place of a load, and the limits as rows. What each column means is told by where its number stands here.
  */
-import type { LinearProblem } from '../../numeric/linearProgram/problem.ts';
+import type { Column, LinearProblem } from '../../numeric/linearProgram/problem.ts';
 import { Draft, GRAMS } from './draft.ts';
 import type { Exact } from './exact.ts';
 import { limitRows } from './limitRows.ts';
@@ -80,15 +80,21 @@ function trialColumn(draft: Draft, setting: Setting): number | null {
 /** Ballast of less than some micrograms is what closing objectives left open, g. */
 const NOTHING = 5e-6;
 
+/** A station so near an end of its stretch is there, m. */
+const AT_END = 5e-8;
+
+const snapped = (station: number, { lower, upper }: Column): number =>
+  station < lower + AT_END ? lower : station > upper - AT_END ? upper : station;
+
 /** The point that a solution stands for; stations that play no part stay as in `before`. */
-export const pointOf = ({ columns }: Program, x: readonly number[], before: Point): Point => ({
+export const pointOf = ({ problem, columns }: Program, x: readonly number[], before: Point): Point => ({
   weights: columns.weights.map((column) =>
     column !== null && x[column]! > NOTHING ? x[column]! / GRAMS : 0,
   ),
   counts: columns.counts.map((each, h) =>
     each.length > 0 ? each.map((column) => Math.round(x[column]!)) : before.counts[h]!.map(() => 0),
   ),
-  slides: columns.slides.map((column) => x[column]!),
+  slides: columns.slides.map((column) => snapped(x[column]!, problem.columns[column]!)),
   options: columns.loads.map(({ taken }) => {
     const at = taken.findIndex((column) => x[column]! > 0.5);
     return at < 0 ? null : at;
