@@ -39,7 +39,7 @@ function spotsOf(node: Node): Spot[] {
 const numbersOf = (file: Node): Spot[] => spotsOf(file).filter((spot) => typeof get(spot) === 'number');
 
 /** Values at the edges of what fields allow, and past them. */
-const NUMBERS = [
+const NUMBERS: readonly unknown[] = [
   0,
   -0,
   1,
@@ -68,7 +68,7 @@ const NUMBERS = [
   20_000,
   -500,
 ];
-const OTHERS = [
+const OTHERS: readonly unknown[] = [
   null,
   true,
   false,

@@ -1,0 +1,44 @@
+/** The report of a craft for reading at a terminal. */
+import type { Craft } from '../craft/craft.ts';
+import type { Assessment } from '../report/assessment.ts';
+import type { Verdict } from '../report/verdict.ts';
+import type { UnitSystem } from '../units/units.ts';
+import { beamTable } from './beamTable.ts';
+import { figures } from './figures.ts';
+import { hazards } from './hazards.ts';
+import { left, oneLine, wrapped } from './layout.ts';
+import { quantityText, rowText } from './rowText.ts';
+
+export function reportText(craft: Craft, report: Assessment, units: UnitSystem): string {
+  const { headline, verdicts, rows, geometry, cautions } = report;
+  const beam = geometry.status === 'solved' ? [...beamTable(geometry, units), ''] : [];
+  const lines = [
+    ...wrapped(craft.name || 'Craft without a name'),
+    ...wrapped(headline),
+    '',
+    'Verdicts',
+    ...verdicts.flatMap((verdict) => verdictLines(verdict, units)),
+    '',
+    ...figures(rows, units),
+    ...beam,
+    'Cautions',
+    ...[...cautions, ...hazards(craft)].flatMap(bullet),
+  ];
+  return `${lines.join('\n')}\n`;
+}
+
+const bullet = (sentence: string): string[] =>
+  wrapped(sentence, 4).map((line, i) => (i === 0 ? `  - ${line.slice(4)}` : line));
+
+function verdictLines(verdict: Verdict, units: UnitSystem): string[] {
+  const { state, title, word, row, target, margin } = verdict;
+  const cells = [left(state, 8), left(title, 20), left(word, 16), rowText(row, units)];
+  const by = margin === null ? '' : `: ${marginText(margin, row.quantity, units)}`;
+  return [oneLine(`  ${cells.join('')}`), ...wrapped(`wanted ${target}${by}`, 10), ...reason(verdict)];
+}
+
+const reason = ({ state, row: { status, why } }: Verdict): string[] =>
+  status === 'solved' || state === 'met' ? [] : wrapped(why, 10);
+
+const marginText = (margin: number, quantity: Verdict['row']['quantity'], units: UnitSystem): string =>
+  `${quantityText(Math.abs(margin), quantity, units)} ${margin < 0 ? 'outside' : 'inside'}`;
