@@ -14,8 +14,8 @@ interface WorkspaceProps {
   readonly palette: Palette;
 }
 
-const COLUMN = { least: 260, usual: 348 };
-const LEDGER = { least: 96, usual: 236 };
+const COLUMN = { least: 260, usual: innerWidth < 1200 ? 312 : 348 };
+const LEDGER = { least: 96, usual: innerHeight < 820 ? 184 : 244 };
 
 export function Workspace({ store, editor, palette }: WorkspaceProps) {
   const [column, setColumn] = useState(COLUMN.usual);

@@ -9,6 +9,7 @@ import { settingsFrom } from './settings.ts';
 import { Store } from './store.ts';
 import './base.css';
 import './layout.css';
+import './panels.css';
 
 const keep = await openKeep();
 const [{ opening, refusal }, settings] = await Promise.all([
@@ -25,6 +26,7 @@ if (!keep.lasting) {
 }
 listenForKeys(store);
 keepOnLeaving(store);
+if (import.meta.env.PROD) void keepPageOffline();
 
 createRoot(document.getElementById('root')!).render(
   <ErrorBoundary store={store}>
@@ -40,4 +42,9 @@ function keepOnLeaving({ session, keepNow }: Store): void {
   addEventListener('beforeunload', (event) => {
     if (!keep.lasting && session.getState().undoLabel) event.preventDefault();
   });
+}
+
+/** Where the browser allows it, the page itself opens again without a network. */
+async function keepPageOffline(): Promise<void> {
+  await navigator.serviceWorker?.register('./sw.js').catch(() => null);
 }
