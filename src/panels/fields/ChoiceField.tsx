@@ -3,6 +3,7 @@ import { useState } from 'react';
 import type { Problem } from '../../craft/problem.ts';
 import type { Choice } from '../words.ts';
 import { FieldFrame } from './FieldFrame.tsx';
+import type { Leave } from './useDraft.ts';
 
 export interface ChoiceFieldProps<T extends string> {
   readonly label: string;
@@ -15,7 +16,7 @@ export interface ChoiceFieldProps<T extends string> {
   readonly bare?: boolean | undefined;
   readonly hint?: string | undefined;
   readonly autoFocus?: boolean | undefined;
-  readonly onLeave?: (() => void) | undefined;
+  readonly onLeave?: ((how: Leave) => void) | undefined;
 }
 
 export function ChoiceField<T extends string>(props: ChoiceFieldProps<T>) {
@@ -36,12 +37,12 @@ export function ChoiceField<T extends string>(props: ChoiceFieldProps<T>) {
           // biome-ignore lint/a11y/noAutofocus: only where the builder just opened this cell
           autoFocus={props.autoFocus}
           onChange={(event) => choose(event.currentTarget.value)}
-          onBlur={onLeave}
+          onBlur={() => onLeave?.('blur')}
           onKeyDown={(event) => {
             if (onLeave && (event.key === 'Enter' || event.key === 'Escape')) {
               event.preventDefault();
               event.stopPropagation();
-              onLeave();
+              onLeave(event.key === 'Enter' ? 'enter' : 'escape');
             }
           }}
         >

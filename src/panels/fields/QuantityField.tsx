@@ -57,6 +57,7 @@ export function QuantityField(props: QuantityFieldProps) {
       {(aria) => (
         <input
           {...aria}
+          ref={draft.hold}
           type="text"
           inputMode="decimal"
           autoComplete="off"

@@ -26,6 +26,8 @@ export interface Draft<T> {
   readonly set: (text: string) => void;
   /** Puts text and its value in place and commits at once, as an arrow key does. */
   readonly replace: (text: string, value: T) => void;
+  /** Ref of the input: a form around it is not sent while the text is at fault. */
+  readonly hold: (input: HTMLInputElement | null) => void;
   readonly onBlur: () => void;
   readonly onKeyDown: (event: KeyboardEvent) => void;
 }
@@ -50,11 +52,13 @@ export function useDraft<T>(rules: DraftRules<T>): Draft<T> {
       setDraft(text);
       settle(rules.commit(value, text));
     },
+    hold: (input) => input?.setCustomValidity(error ?? ''),
     onBlur: () => leave('blur'),
     onKeyDown: (event) => {
       if (event.key !== 'Enter' && event.key !== 'Escape') return;
       if (event.key === 'Escape' && draft === null && !rules.onLeave) return;
-      event.preventDefault();
+      // In a form Enter goes on to send it.
+      if (event.key === 'Escape' || !(event.target as HTMLInputElement).form) event.preventDefault();
       event.stopPropagation();
       leave(event.key === 'Enter' ? 'enter' : 'escape');
     },

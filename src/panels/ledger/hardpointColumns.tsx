@@ -1,0 +1,74 @@
+/** The columns of the hardpoints. */
+import type { Hardpoint } from '../../craft/schema.ts';
+import { moveHardpoint, renameHardpoint, setLeadAt } from '../../edit/edits/hardpoints.ts';
+import { stationOf, withStation } from '../../edit/place.ts';
+import { formatQuantity } from '../../units/format.ts';
+import { QuantityField } from '../fields/QuantityField.tsx';
+import { TextField } from '../fields/TextField.tsx';
+import { PLACE_WORDS } from '../words.ts';
+import type { GridColumn, GridItem } from './gridColumn.ts';
+
+export interface HardpointRow extends GridItem {
+  readonly hardpoint: Hardpoint;
+  /** Whether the lead is worked out here. */
+  readonly lead: boolean;
+}
+
+export const HARDPOINT_GRID: readonly GridColumn<HardpointRow>[] = [
+  {
+    key: 'name',
+    title: 'Name',
+    sortBy: ({ hardpoint }) => hardpoint.name,
+    text: ({ hardpoint }) => hardpoint.name,
+    field: ({ row, commit, startWith, onLeave }) => (
+      <TextField
+        bare
+        autoFocus
+        label={`Name of ${row.name}`}
+        value={row.hardpoint.name}
+        startWith={startWith}
+        onCommit={(name) => commit(renameHardpoint(row.id, name))}
+        onLeave={onLeave}
+      />
+    ),
+  },
+  {
+    key: 'place',
+    title: 'Place',
+    sortBy: ({ hardpoint }) => PLACE_WORDS[hardpoint.place.kind],
+    text: ({ hardpoint }) => PLACE_WORDS[hardpoint.place.kind],
+  },
+  {
+    key: 'station',
+    title: 'Station',
+    numeric: true,
+    sortBy: ({ hardpoint }) => stationOf(hardpoint.place),
+    text: ({ hardpoint }, units) => formatQuantity(stationOf(hardpoint.place), 'length', units),
+    field: ({ row, units, commit, startWith, onLeave }) => (
+      <QuantityField
+        bare
+        autoFocus
+        label={`Station of ${row.name}`}
+        value={stationOf(row.hardpoint.place)}
+        quantity="length"
+        units={units}
+        startWith={startWith}
+        onCommit={(station) => commit(moveHardpoint(row.id, withStation(row.hardpoint.place, station)))}
+        onLeave={onLeave}
+      />
+    ),
+  },
+  {
+    key: 'lead',
+    title: 'Lead',
+    sortBy: ({ lead }) => (lead ? 0 : 1),
+    text: ({ lead }) => (lead ? 'Lead here' : 'No lead'),
+    press: {
+      label: ({ name }) => `Work out the lead at ${name}`,
+      pressed: ({ lead }) => lead,
+      run: ({ id }, commit) => {
+        commit(setLeadAt(id));
+      },
+    },
+  },
+];
