@@ -4,7 +4,9 @@ import { run } from './run.ts';
 
 // Whoever reads the output may stop early, as `head` does; that is no fault of ours.
 for (const stream of [process.stdout, process.stderr]) {
-  stream.on('error', (error: NodeJS.ErrnoException) => process.exit(error.code === 'EPIPE' ? 0 : 2));
+  stream.on('error', (error: NodeJS.ErrnoException) =>
+    process.exit(error.code === 'EPIPE' ? process.exitCode : 2),
+  );
 }
 
 const manifest = new URL('../../package.json', import.meta.url);

@@ -5,7 +5,7 @@ import { serialize } from '../../src/craft/serialize.ts';
 import { assess } from '../../src/report/assess.ts';
 import { notFinite } from '../samples/finite.ts';
 import { samples } from '../samples/readSamples.ts';
-import { damaged, seeded } from './mutator.ts';
+import { damaged, seeded, stretched } from './mutator.ts';
 
 const RUNS = 10_000;
 
@@ -47,4 +47,20 @@ test(`${RUNS} damaged files: no throw, no partial load, no NaN`, { timeout: 120_
   expect(tally.loaded).toBeGreaterThan(RUNS / 5);
   expect(tally.refused).toBeGreaterThan(RUNS / 3);
   expect(tally.hulls).toBeGreaterThan(RUNS / 5);
+});
+
+test('1,500 files with numbers at the extremes the gate allows: figures or reasons, no NaN', {
+  timeout: 120_000,
+}, () => {
+  const random = seeded(2);
+  const tally: Tally = { loaded: 0, refused: 0, hulls: 0 };
+  const faults: string[] = [];
+  for (let run = 0; run < 1500; run++) {
+    const { name, text } = samples[run % samples.length]!;
+    const file = stretched(random, text, (each) => parse(each).ok);
+    faults.push(...judge(file, tally).map((fault) => `run ${run}, ${name}: ${fault}`));
+  }
+  expect(faults.slice(0, 20)).toEqual([]);
+  expect(tally.refused).toBe(0);
+  expect(tally.hulls).toBeGreaterThan(900);
 });
