@@ -77,6 +77,9 @@ const PER_ODD = Float64Array.from({ length: MOST_TERMS }, (_, k) => 1 / (2 * k +
 
 /** ∫₋₁^ξ Σ cₖ Pₖ. */
 export function integralTo(c: Float64Array, xi: number): number {
+  // Exact at the ends, so that tips and joints come out as what they are.
+  if (xi <= -1) return 0;
+  if (xi >= 1) return 2 * c[0]!;
   let before = 1;
   let p = xi;
   let sum = c[0]! * (xi + 1);
@@ -91,6 +94,11 @@ export function integralTo(c: Float64Array, xi: number): number {
 
 /** The same for several series of equal length at one ξ, added to `sums`. */
 export function addIntegralsTo(series: readonly Float64Array[], xi: number, sums: Float64Array): void {
+  if (xi <= -1) return;
+  if (xi >= 1) {
+    for (let j = 0; j < series.length; j += 1) sums[j]! += 2 * series[j]![0]!;
+    return;
+  }
   const n = series[0]!.length;
   let before = 1;
   let p = xi;
