@@ -152,13 +152,13 @@ function DeleteButton({ name, disabled, onDelete }: DeleteButtonProps) {
     );
   }
   return (
-    <span className="confirm" role="group" aria-label={`Delete ${name}?`}>
+    <fieldset className="confirm" aria-label={`Delete ${name}?`}>
       <button type="button" className="danger" onClick={onDelete}>
         Delete for good
       </button>
       <button type="button" onClick={() => setAsked(false)}>
         Keep it
       </button>
-    </span>
+    </fieldset>
   );
 }

@@ -1,5 +1,6 @@
 /** A modal dialog: the browser's own, so that focus, Escape and the backdrop are its business. */
 import { type ReactNode, useEffect, useId, useRef } from 'react';
+import './dialogs.css';
 
 export interface DialogFrameProps {
   readonly title: string;

@@ -8,6 +8,7 @@ import { WireTable } from './ledger/WireTable.tsx';
 import { PasteRowsDialog } from './PasteRowsDialog.tsx';
 import { type Tab, Tabs } from './Tabs.tsx';
 import { WeighDialog } from './WeighDialog.tsx';
+import './ledger/ledger.css';
 
 type TabId = 'parts' | 'wires' | 'hardpoints';
 
@@ -22,7 +23,7 @@ export function Ledger() {
   ];
   return (
     <section className="ledger" aria-label="Ledger">
-      <Tabs label="Ledger" tabs={tabs} front={front} onFront={setFront}>
+      <Tabs<TabId> label="Ledger" tabs={tabs} front={front} onFront={setFront}>
         {front === 'parts' && <PartTable onDialog={setDialog} />}
         {front === 'wires' && <WireTable />}
         {front === 'hardpoints' && <HardpointTable />}

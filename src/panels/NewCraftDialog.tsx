@@ -50,7 +50,12 @@ export function NewCraftDialog({ onCreate, onClose }: NewCraftDialogProps) {
           units={units}
           onCommit={kept(setDiameter)}
         />
-        <ChoiceField label="Shape" value={shape} choices={SHAPE_CHOICES} onCommit={kept(setShape)} />
+        <ChoiceField<ShapeKind>
+          label="Shape"
+          value={shape}
+          choices={SHAPE_CHOICES}
+          onCommit={kept(setShape)}
+        />
         <FirstPartFields part={part} onPart={setPart} />
         {problems.length > 0 && <ProblemsList title="This craft cannot be made" problems={problems} />}
         <p className="aside">

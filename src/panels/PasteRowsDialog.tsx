@@ -56,7 +56,7 @@ function ReadingReport({ reading: { good, rows, problems, ignored } }: { reading
 
 function ProblemTable({ problems }: { problems: readonly CellProblem[] }) {
   return (
-    <table className="figures">
+    <table className="problem-table">
       <caption>Problems</caption>
       <thead>
         <tr>

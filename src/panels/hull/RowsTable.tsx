@@ -1,5 +1,5 @@
 /** The rows of a hull given by measured offsets or by a flat pattern. */
-import { useState } from 'react';
+import { useId, useState } from 'react';
 import type { Problem } from '../../craft/problem.ts';
 import { setShape } from '../../edit/edits/craft.ts';
 import { withRowAfter } from '../../edit/shapeAs.ts';
@@ -84,6 +84,7 @@ interface PasteRowsProps {
 /** Two columns pasted from a spreadsheet take the place of the table. */
 function PasteRows({ columns, onRows }: PasteRowsProps) {
   const { units } = useEditor();
+  const id = useId();
   const [text, setText] = useState('');
   const [messages, setMessages] = useState<readonly string[]>([]);
   const take = () => {

@@ -27,7 +27,7 @@ export function HardpointTable() {
     <>
       <div className="toolbar" role="toolbar" aria-label="Hardpoints">
         <button type="button" onClick={() => add(addHardpoint('New hardpoint', defaultPlace(assessment)))}>
-          Add a hardpoint
+          Add hardpoint
         </button>
         <button type="button" disabled={ids.length === 0} onClick={() => add(duplicate)}>
           Duplicate

@@ -58,10 +58,10 @@ function AddButtons({ onDialog }: PartTableProps) {
   return (
     <>
       <button type="button" disabled={full} onClick={() => add(addPart(blankPart(defaultPlace(assessment))))}>
-        Add a part
+        Add part
       </button>
       <button type="button" disabled={full} onClick={() => onDialog({ kind: 'catalogue' })}>
-        Add from the catalogue…
+        From catalogue…
       </button>
     </>
   );
@@ -98,7 +98,7 @@ function SelectedButtons({ onDialog }: PartTableProps) {
         disabled={ids.length !== 1}
         onClick={() => onDialog({ kind: 'weigh', id: ids[0]! })}
       >
-        Mark weighed…
+        Weighed…
       </button>
     </>
   );

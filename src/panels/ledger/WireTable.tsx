@@ -20,7 +20,7 @@ export function WireTable() {
     <>
       <div className="toolbar" role="toolbar" aria-label="Wire runs">
         <button type="button" onClick={addBlank}>
-          Add a wire run
+          Add wire run
         </button>
         <button
           type="button"
