@@ -98,11 +98,11 @@ function PasteRows({ columns, onRows }: PasteRowsProps) {
   return (
     <details className="paste">
       <summary>Paste rows from a spreadsheet</summary>
-      <label>
+      <label htmlFor={id}>
         {columns.map(({ label }) => label).join(' and ')}, one row a line; units in the heads if not the usual
         ones
-        <textarea rows={5} value={text} onChange={(event) => setText(event.currentTarget.value)} />
       </label>
+      <textarea id={id} rows={5} value={text} onChange={(event) => setText(event.currentTarget.value)} />
       <button type="button" disabled={text.trim() === ''} onClick={take}>
         Replace the rows
       </button>
