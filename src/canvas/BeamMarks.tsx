@@ -6,7 +6,7 @@ import type { BarOnPage, BeamOnPage } from '../scene/beamLayout.ts';
 import type { Palette } from '../scene/palette.ts';
 import type { UnitSystem } from '../scene/subject.ts';
 import { leadBarWords, momentAmount } from '../scene/words.ts';
-import { fontOf, textWidth, traceOnScreen, writeOn } from './paint.ts';
+import { fontOf, shortened, textWidth, traceOnScreen, writeOn } from './paint.ts';
 import type { Size } from './useSize.ts';
 
 export interface BeamMarksProps {
@@ -103,13 +103,14 @@ function barText(
 ): void {
   const { palette, units } = props;
   const room = right - left - 8;
-  if (textWidth(bar.name, fontOf(12, 600)) > room) return;
+  const name = shortened(bar.name, fontOf(12, 600), room);
+  if (name === null) return;
   const middle = (left + right) / 2;
   context.textAlign = 'center';
   context.textBaseline = 'middle';
   context.fillStyle = palette.paper;
   context.font = fontOf(12, 600);
-  context.fillText(bar.name, middle, top + 13);
+  context.fillText(name, middle, top + 13);
   const amount = momentAmount(bar.moment, units);
   context.font = fontOf(11);
   if (textWidth(amount, fontOf(11)) <= room) context.fillText(amount, middle, top + 27);
@@ -120,7 +121,6 @@ function gap(context: Context, { beam, page, palette, units }: BeamMarksProps, t
   const { left, right } = page.gap;
   if (right - left < 0.5) return;
   hatch(context, left, right, top, palette);
-  const text = page.lead ? leadBarWords(page.lead.bar, units) : netWords(beam.net, units);
   context.save();
   context.setLineDash(page.lead ? [5, 3] : []);
   context.strokeStyle = page.lead ? palette.lead : palette.bad;
@@ -128,7 +128,9 @@ function gap(context: Context, { beam, page, palette, units }: BeamMarksProps, t
   context.strokeRect(left, top + 0.75, right - left, BAR - 1.5);
   context.restore();
   const font = fontOf(12, 600);
-  if (textWidth(text, font) > right - left - 10) return;
+  const words = page.lead ? leadBarWords(page.lead.bar, units) : [netWords(beam.net, units)];
+  const text = words.find((each) => textWidth(each, font) <= right - left - 10);
+  if (text === undefined) return;
   context.font = font;
   context.textAlign = 'center';
   context.textBaseline = 'middle';

@@ -5,7 +5,10 @@ import { FONT } from './paint.ts';
 import type { Size } from './useSize.ts';
 
 const LINE = 17;
-const OFF = 22;
+/** Mean width of a letter, to guess where lines wrap. */
+const LETTER = 6.6;
+/** How far from the hand it stands, px. */
+export const BESIDE = 22;
 
 export interface BubbleProps {
   readonly at: ScreenPoint;
@@ -16,10 +19,11 @@ export interface BubbleProps {
 }
 
 export function Bubble({ at, lines, size, palette, width = 290 }: BubbleProps) {
-  const height = lines.length * LINE + 12;
-  const left = Math.max(4, Math.min(at.x + OFF, size.width - width - 4));
-  const below = at.y + OFF + height < size.height;
-  const top = Math.max(4, below ? at.y + OFF : at.y - OFF - height);
+  const rows = lines.reduce((sum, line) => sum + Math.ceil((line.length * LETTER) / (width - 18)), 0);
+  const height = rows * LINE + 12;
+  const left = Math.max(4, Math.min(at.x + BESIDE, size.width - width - 4));
+  const below = at.y + BESIDE + height < size.height;
+  const top = Math.max(4, below ? at.y + BESIDE : at.y - BESIDE - height);
   return (
     <div
       style={{

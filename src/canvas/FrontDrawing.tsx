@@ -124,9 +124,9 @@ function tick(context: Context, view: View, palette: Palette, radius: number, de
   const at = (px: number) => toScreen(view, onSection(clock, radius + px / view.scale));
   context.strokeStyle = palette.inkSoft;
   context.lineWidth = 1;
-  traceOnScreen(context, [at(3), at(name ? 9 : 6)], false);
+  traceOnScreen(context, [at(name ? -8 : -5), at(0)], false);
   context.stroke();
-  if (name) writeOn(context, name, at(21), palette.inkSoft, palette.paper);
+  if (name) writeOn(context, name, at(-20), palette.inkSoft, palette.gas);
 }
 
 function guideShown(view: View, { guide }: Overlay, radius: number): HandMarksProps['guide'] {

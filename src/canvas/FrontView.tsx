@@ -6,11 +6,11 @@ import { fromAstern, hardpointPoints, wireLines } from '../scene/flatten.ts';
 import { sameGrip } from '../scene/grip.ts';
 import { FigureCache } from '../scene/keepSame.ts';
 import { onSection, sectionOutline, widestStation } from '../scene/outline.ts';
-import { readoutOf } from '../scene/readout.ts';
+import { frontReadout } from '../scene/readout.ts';
 import type { Geometry } from '../scene/subject.ts';
-import { type PlanePoint, toScreen, type View } from '../scene/view.ts';
+import type { PlanePoint, View } from '../scene/view.ts';
 import { frontInWords } from '../scene/words.ts';
-import { Bubble } from './Bubble.tsx';
+import { BESIDE, Bubble } from './Bubble.tsx';
 import { Frame } from './Frame.tsx';
 import { FrontDrawing } from './FrontDrawing.tsx';
 import type { Hand } from './gestures/gesture.ts';
@@ -27,7 +27,7 @@ import { useLie } from './useSideScene.ts';
 import { useSize } from './useSize.ts';
 import { useView } from './useView.ts';
 
-const MARGINS = { left: 34, right: 34, top: 34, bottom: 34 };
+const MARGINS = { left: 26, right: 26, top: 26, bottom: 26 };
 
 const KEYS =
   'Left and right arrows turn what is selected round the hull, up and down move it out and in. Square brackets select the part before or after.';
@@ -84,7 +84,7 @@ function FrontFrame(props: CanvasProps & DrawnProps) {
     return takeInFront(on, hand);
   };
   const gestures = useGestures(frame, ground, take, hover);
-  const readout = overlay.held && readoutOf(scene, overlay.held, fromAstern, view.scale);
+  const lines = overlay.held ? frontReadout(scene, overlay.held) : overlay.hint ? [overlay.hint] : [];
   return (
     <Frame
       frame={frame}
@@ -102,17 +102,8 @@ function FrontFrame(props: CanvasProps & DrawnProps) {
       leave={() => hover(null)}
     >
       <FrontDrawing scene={scene} selection={selection} overlay={overlay} {...outlines} />
-      {readout && (
-        <Bubble
-          at={toScreen(view, readout.at)}
-          lines={readout.lines}
-          size={size}
-          palette={palette}
-          width={220}
-        />
-      )}
-      {overlay.hint && (
-        <Bubble at={{ x: 0, y: 0 }} lines={[overlay.hint]} size={size} palette={palette} width={220} />
+      {lines.length > 0 && (
+        <Bubble at={{ x: -BESIDE, y: size.height }} lines={lines} size={size} palette={palette} width={220} />
       )}
     </Frame>
   );

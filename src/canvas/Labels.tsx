@@ -60,16 +60,19 @@ export function useLabels(wanted: readonly Wanted[], taken: readonly Rect[], fra
 export interface LabelsProps {
   readonly labels: readonly Label[];
   readonly palette: Palette;
-  readonly bold?: boolean;
+  /** Whether gas, not paper, lies under a label. */
+  onGas(at: Label): boolean;
 }
 
-export const Labels = memo(({ labels, palette, bold = false }: LabelsProps) => (
+export const Labels = memo(({ labels, palette, onGas }: LabelsProps) => (
   <Shape
     sceneFunc={(context) => {
-      context.font = fontOf(SIZE, bold ? 600 : 400);
+      context.font = fontOf(SIZE);
       context.textAlign = 'left';
       context.textBaseline = 'middle';
-      for (const { text, x, y } of labels) writeOn(context, text, { x, y }, palette.ink, palette.paper);
+      for (const label of labels) {
+        writeOn(context, label.text, label, palette.ink, onGas(label) ? palette.gas : palette.paper);
+      }
     }}
   />
 ));

@@ -75,6 +75,7 @@ function ghost(context: Context, { x, y }: ScreenPoint, text: string, palette: P
   context.font = fontOf(12, 600);
   context.textBaseline = 'middle';
   context.textAlign = 'center';
+  if (x < -10) return;
   const middle = Math.max(x, 50);
   writeOn(context, text, { x: middle, y: top + 30 }, palette.lead, palette.paper);
 }

@@ -1,4 +1,4 @@
-/** The two rulers: stations along the foot of the view (along the axis when it is tilted), tape distance along the top of the skin. */
+/** The rulers: stations along the foot of the view, or along the axis when it is tilted; tape distance along the top of the skin. */
 import type { Context } from 'konva/lib/Context.js';
 import { memo } from 'react';
 import { Shape } from 'react-konva/es/ReactKonvaCore.js';
@@ -20,22 +20,27 @@ const LARGE = 9;
 const SMALL = 4;
 const LABEL = 18;
 
-export const Rulers = memo(({ hull, view, palette, units }: RulersProps) => (
-  <>
-    <Shape
-      sceneFunc={(context) => {
-        prepare(context, palette);
-        tapeRuler(context, hull, view, palette, units);
-      }}
-    />
-    <Shape
-      sceneFunc={(context) => {
-        prepare(context, palette);
-        if (view.tilt === 0) footRuler(context, view, palette, units);
-        else axisRuler(context, hull, view, palette, units);
-      }}
-    />
-  </>
+/** Those on the hull itself. */
+export const HullRulers = memo(({ hull, view, palette, units }: RulersProps) => (
+  <Shape
+    sceneFunc={(context) => {
+      prepare(context, palette);
+      tapeRuler(context, hull, view, palette, units);
+      if (view.tilt !== 0) axisRuler(context, hull, view, palette, units);
+    }}
+  />
+));
+
+/** The one along the foot, on a strip of its own. */
+export const FootRuler = memo(({ view, palette, units }: Omit<RulersProps, 'hull'>) => (
+  <Shape
+    sceneFunc={(context) => {
+      prepare(context, palette);
+      context.fillStyle = palette.paper;
+      context.fillRect(0, view.height - FOOT, view.width, FOOT);
+      footRuler(context, view, palette, units);
+    }}
+  />
 ));
 
 function prepare(context: Context, palette: Palette): void {
@@ -54,10 +59,10 @@ function footRuler(context: Context, view: View, palette: Palette, units: UnitSy
   for (const { at, label } of stationTicks(from, to, view.scale, units)) {
     const x = Math.round(toScreen(view, { u: at, z: 0 }).x) + 0.5;
     line(context, { x, y }, { x, y: y + (label ? LARGE - 2 : SMALL) });
-    if (label && x > 76 && x < view.width - 12) write(context, label, { x, y: y + 15 }, palette);
+    if (label && x > 8 && x < view.width - 8) write(context, label, { x, y: y + 15 }, palette);
   }
   context.textAlign = 'left';
-  write(context, `station, ${rulerUnit(units)}`, { x: 6, y: y + 14 }, palette);
+  write(context, `station, ${rulerUnit(units)}`, { x: 6, y: y - 10 }, palette);
 }
 
 function axisRuler(

@@ -1,10 +1,11 @@
 /** The side view on its three layers: the ground that rarely changes, what stands still on it, and what moves. */
+import { useCallback } from 'react';
 import { Group, Layer, Stage } from 'react-konva/es/ReactKonvaCore.js';
 import { idsOf, isSelected, type Selection } from '../edit/selection.ts';
 import { handlesOf, wireEnds } from '../scene/grip.ts';
 import type { Rect } from '../scene/labels.ts';
 import { type BalanceMarks, sideMarks } from '../scene/marks.ts';
-import { type ScreenPoint, toScreen, type View } from '../scene/view.ts';
+import { type ScreenPoint, toScreen, toWorld, type View } from '../scene/view.ts';
 import { leadWords, pitchAngle } from '../scene/words.ts';
 import { BalanceMark } from './BalanceMark.tsx';
 import { type Handle, HandMarks, type HandMarksProps, Outlines } from './HandMarks.tsx';
@@ -14,7 +15,7 @@ import type { Overlay } from './overlay.ts';
 import { PartMarks } from './PartMarks.tsx';
 import { PointMarks, type PointMarksProps } from './PointMarks.tsx';
 import { worldTransform } from './paint.ts';
-import { Rulers } from './Rulers.tsx';
+import { FootRuler, HullRulers } from './Rulers.tsx';
 import type { SideScene } from './useSideScene.ts';
 import { WireMarks } from './WireMarks.tsx';
 
@@ -34,7 +35,16 @@ export function SideDrawing({ scene, selection, overlay, faded }: SideDrawingPro
   const { hover } = overlay;
   const named = new Set([...idsOf(selection, 'part'), ...(hover?.kind === 'part' ? [hover.id] : [])]);
   const frame: Rect = { left: 2, top: 2, right: view.width - 2, bottom: view.height - 30 };
-  const labels = useLabels(wantedLabels(craft, scene.still, view, named), takenBy(marks), frame);
+  const points = pointsOf(scene, selection);
+  const labels = useLabels(wantedLabels(craft, scene.still, view, named), takenBy(marks, points), frame);
+  const { hull } = geometry;
+  const onGas = useCallback(
+    ({ x, y }: ScreenPoint) => {
+      const { u, z } = toWorld(view, { x: x + 8, y });
+      return Math.abs(z) < hull.radius(u, 0);
+    },
+    [view, hull],
+  );
   const isHovered = (id: string) => (hover?.kind === 'part' && hover.id === id) || overlay.join === id;
   const selectedWires = idsOf(selection, 'wire');
   const hoverWire = hover?.kind === 'wire' ? hover.id : null;
@@ -44,14 +54,15 @@ export function SideDrawing({ scene, selection, overlay, faded }: SideDrawingPro
         <Group {...world}>
           <HullMarks hull={geometry.hull} palette={palette} px={px} />
         </Group>
-        <Rulers hull={geometry.hull} view={view} palette={palette} units={units} />
+        <HullRulers hull={geometry.hull} view={view} palette={palette} units={units} />
       </Layer>
       <Layer listening={false}>
         <Group {...world}>
           <WireMarks lines={scene.stillLines} ink={palette.wire} px={px} />
           <PartMarks figures={scene.still} palette={palette} px={px} />
         </Group>
-        <Labels labels={labels} palette={palette} />
+        <Labels labels={labels} palette={palette} onGas={onGas} />
+        {view.tilt === 0 && <FootRuler view={view} palette={palette} units={units} />}
       </Layer>
       <Layer listening={false}>
         <Group {...world}>
@@ -65,7 +76,7 @@ export function SideDrawing({ scene, selection, overlay, faded }: SideDrawingPro
             px={px}
           />
         </Group>
-        <PointMarks {...pointsOf(scene, selection)} palette={palette} />
+        <PointMarks {...points} palette={palette} />
         <BalanceMark marks={marks} palette={palette} angle={pitchAngle(scene)} />
         <HandMarks
           handles={handlesShown(scene, overlay)}
@@ -86,12 +97,20 @@ const around = ({ x, y }: ScreenPoint, reach: number): Rect => ({
   bottom: y + reach,
 });
 
-const takenBy = ({ ring, bob }: BalanceMarks): Rect[] => [
+type Points = Omit<PointMarksProps, 'palette'>;
+
+/** What labels keep clear of: the marks of balance, the ghost of the lead, the support, the eyelets. */
+const takenBy = ({ ring, bob }: BalanceMarks, { lead, support, eyelets }: Points): Rect[] => [
   around(ring, 20),
   ...(bob ? [around(bob, 20)] : []),
+  ...(lead ? [{ left: lead.at.x - 48, right: lead.at.x + 48, top: lead.at.y, bottom: lead.at.y + 54 }] : []),
+  ...(support
+    ? [{ left: support.x - 9, right: support.x + 64, top: support.y, bottom: support.y + 16 }]
+    : []),
+  ...eyelets.map(({ at }) => around(at, 6)),
 ];
 
-function pointsOf(scene: SideScene, selection: Selection): Omit<PointMarksProps, 'palette'> {
+function pointsOf(scene: SideScene, selection: Selection): Points {
   const { view, geometry, hardpoints } = scene;
   const screen = hardpoints.map(({ id, at }) => ({
     id,

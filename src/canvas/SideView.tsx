@@ -3,7 +3,7 @@ import { useMemo, useRef } from 'react';
 import { idsOf } from '../edit/selection.ts';
 import { fromSide } from '../scene/flatten.ts';
 import { sameGrip } from '../scene/grip.ts';
-import { readoutOf } from '../scene/readout.ts';
+import { sideReadout } from '../scene/readout.ts';
 import { toScreen, type View } from '../scene/view.ts';
 import { selectionInWords, sideInWords } from '../scene/words.ts';
 import { Bubble } from './Bubble.tsx';
@@ -64,7 +64,7 @@ function SideFrame(props: SharedProps & DrawnProps & { stale: string | null }) {
   const onDoubleClick = () => {
     if (!overlay.hover) ground.fit();
   };
-  const readout = overlay.held && readoutOf(scene, overlay.held, fromSide, view.scale);
+  const readout = overlay.held && sideReadout(scene, overlay.held, fromSide, view.scale);
   const hint = overlay.hint ?? stale;
   return (
     <Frame

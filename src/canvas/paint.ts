@@ -71,6 +71,16 @@ export function writeOn(context: Context, text: string, at: ScreenPoint, ink: st
   context.fillText(text, at.x, at.y);
 }
 
+/** The text, shortened with an ellipsis to a width in px; null when not even a few letters fit. */
+export function shortened(text: string, font: string, room: number): string | null {
+  if (textWidth(text, font) <= room) return text;
+  for (let letters = text.length - 1; letters >= 3; letters--) {
+    const cut = `${text.slice(0, letters).trimEnd()}…`;
+    if (textWidth(cut, font) <= room) return cut;
+  }
+  return null;
+}
+
 let measuring: CanvasRenderingContext2D | null = null;
 
 /** Width of a text, px. */

@@ -3,9 +3,9 @@ import type { Place } from '../craft/placeSchema.ts';
 import { formatQuantity } from '../units/format.ts';
 import type { Flatten } from './flatten.ts';
 import { type Grip, handlesOf, wireEnds } from './grip.ts';
-import { type Geometry, geometryOf, rowValue, type Subject } from './subject.ts';
+import { type Geometry, geometryOf, rowValue, type Subject, type UnitSystem } from './subject.ts';
 import type { PlanePoint } from './view.ts';
-import { floatWords, momentWords } from './words.ts';
+import { floatWords, heelWords, momentWords } from './words.ts';
 
 export interface Readout {
   readonly at: PlanePoint;
@@ -14,8 +14,8 @@ export interface Readout {
 
 const KEEL = Math.PI;
 
-/** `scale` px/m. Null when what is held is nowhere. */
-export function readoutOf(subject: Subject, held: Grip, flatten: Flatten, scale: number): Readout | null {
+/** In the side view; `scale` px/m. Null when what is held is nowhere. */
+export function sideReadout(subject: Subject, held: Grip, flatten: Flatten, scale: number): Readout | null {
   const geometry = geometryOf(subject.assessment);
   if (!geometry) return null;
   const about = aboutHeld(subject, geometry, held, flatten, scale);
@@ -54,23 +54,21 @@ function aboutPart(
   const part = craft.parts.byId[id];
   if (!piece || !part) return null;
   const bar = beam.find((each) => each.kind === 'part' && each.id === id);
-  const where = whereWords({ units }, hull, part.place, piece.middle[0]);
   const moment = bar ? [momentWords(bar.mass, bar.station - cb[0], units)] : [];
-  return { at: flatten(piece.middle), lines: [where, ...moment] };
+  return {
+    at: flatten(piece.middle),
+    lines: [...whereWords(units, hull, part.place, piece.middle[0]), ...moment],
+  };
 }
 
-function whereWords(
-  { units }: Pick<Subject, 'units'>,
-  hull: Geometry['hull'],
-  place: Place,
-  station: number,
-): string {
+function whereWords(units: UnitSystem, hull: Geometry['hull'], place: Place, station: number): string[] {
   const length = (value: number) => formatQuantity(value, 'length', units);
   const clock = place.kind === 'skin' ? place.clock : KEEL;
-  const parts = [`station ${length(station)}`, `tape ${length(hull.tapeAt(station, clock))}`];
-  if (place.kind === 'keel') parts.push(`${formatQuantity(place.drop, 'smallLength', units)} below the keel`);
-  if (place.kind === 'skin') parts.push(`clock ${formatQuantity(place.clock, 'angle', units)}`);
-  return parts.join(' · ');
+  const along = `station ${length(station)} · tape ${length(hull.tapeAt(station, clock))}`;
+  if (place.kind === 'keel')
+    return [along, `${formatQuantity(place.drop, 'smallLength', units)} below the keel`];
+  if (place.kind === 'skin') return [along, `clock angle ${formatQuantity(place.clock, 'angle', units)}`];
+  return [along];
 }
 
 function aboutHardpoint(
@@ -84,7 +82,7 @@ function aboutHardpoint(
   if (!at || !hardpoint) return null;
   const lead = craft.leadAt === id ? rowValue(assessment, 'lead.mass') : null;
   const leadWords = lead === null ? [] : [`${formatQuantity(lead, 'mass', units)} of lead here levels it`];
-  return { at: flatten(at), lines: [whereWords({ units }, hull, hardpoint.place, at[0]), ...leadWords] };
+  return { at: flatten(at), lines: [...whereWords(units, hull, hardpoint.place, at[0]), ...leadWords] };
 }
 
 function aboutWire(
@@ -106,4 +104,33 @@ function aboutHull({ assessment, units }: Subject, { hull }: Geometry, at: Plane
   const size = `${length(hull.length)} long · ${length(hull.height)} across`;
   const lift = rowValue(assessment, 'lift.gross');
   return { at, lines: [size, ...(lift === null ? [] : [`lifts ${formatQuantity(lift, 'mass', units)}`])] };
+}
+
+/** In the front view: the side of it that can be seen there, and the heel. */
+export function frontReadout({ craft, assessment, units }: Subject, held: Grip): string[] {
+  const place = placeOf(craft, held);
+  const heel = heelWords(rowValue(assessment, 'float.heel'), units);
+  return place ? [...acrossWords(units, place), heel === 'even' ? 'floats even' : `heels ${heel}`] : [];
+}
+
+function placeOf({ parts, hardpoints }: Subject['craft'], held: Grip): Place | null {
+  if (held.kind === 'part') return parts.byId[held.id]?.place ?? null;
+  return held.kind === 'hardpoint' ? (hardpoints.byId[held.id]?.place ?? null) : null;
+}
+
+function acrossWords(units: UnitSystem, place: Place): string[] {
+  const small = (value: number) => formatQuantity(Math.abs(value), 'smallLength', units);
+  switch (place.kind) {
+    case 'skin':
+      return [`clock angle ${formatQuantity(place.clock, 'angle', units)}`];
+    case 'keel':
+      return [`${small(place.drop)} below the keel`];
+    case 'axis':
+      return ['on the axis'];
+    case 'free':
+      return [
+        `${small(place.y)} to ${place.y < 0 ? 'port' : 'starboard'}`,
+        `${small(place.z)} ${place.z < 0 ? 'below' : 'above'} the axis`,
+      ];
+  }
 }

@@ -100,17 +100,24 @@ const ballast: Shape = (l, h) => [
   polygon([p(-0.5 * l, -0.5 * h), p(0.5 * l, -0.5 * h), p(0.28 * l, 0.28 * h), p(-0.28 * l, 0.28 * h)]),
 ];
 
-const fitting: Shape = (l, h) => [
-  polygon([
-    p(-0.5 * l, 0),
-    p(-0.2 * l, 0.5 * h),
-    p(0.2 * l, 0.5 * h),
-    p(0.5 * l, 0),
-    p(0.2 * l, -0.5 * h),
-    p(-0.2 * l, -0.5 * h),
-  ]),
-  ellipse(0, 0, 0.14 * l, 0.18 * h, 'dark', 14),
-];
+/** A plate with its corners cut and a hole at its middle. */
+const fitting: Shape = (l, h) => {
+  const cut = 0.35 * Math.min(l, h);
+  const [a, b] = [l / 2, h / 2];
+  return [
+    polygon([
+      p(-a, b - cut),
+      p(-a + cut, b),
+      p(a - cut, b),
+      p(a, b - cut),
+      p(a, -b + cut),
+      p(a - cut, -b),
+      p(-a + cut, -b),
+      p(-a, -b + cut),
+    ]),
+    ellipse(0, 0, 0.18 * Math.min(l, h), 0.18 * Math.min(l, h), 'dark', 14),
+  ];
+};
 
 export const SIDE_SHAPES: Readonly<Record<PartKind, Shape>> = {
   thruster,

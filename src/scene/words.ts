@@ -28,11 +28,11 @@ export const pitchWords = (pitch: number | null, units: UnitSystem): string =>
 export const heelWords = (heel: number | null, units: UnitSystem): string =>
   turnWords(heel, units, 'starboard down', 'port down', 'even');
 
-/** "172 g × 0.21 m aft = 36.1 g·m". */
+/** "172 g × 0.210 m = 36.12 g·m aft". */
 export function momentWords(mass: number, arm: number, units: UnitSystem): string {
   const way = arm < 0 ? 'forward' : 'aft';
-  const arms = `${formatQuantity(Math.abs(arm), 'length', units)} ${way}`;
-  return `${formatQuantity(mass, 'mass', units)} × ${arms} = ${formatQuantity(mass * arm, 'momentMass', units)}`;
+  const arms = formatQuantity(Math.abs(arm), 'length', units);
+  return `${formatQuantity(mass, 'mass', units)} × ${arms} = ${momentAmount(mass * arm, units)} ${way}`;
 }
 
 export const floatWords = (assessment: Subject['assessment'], units: UnitSystem): string =>
@@ -96,9 +96,11 @@ export function heelAngle({ assessment, units }: Subject): string | null {
 export const momentAmount = (moment: number, units: UnitSystem): string =>
   formatQuantity(Math.abs(moment), 'momentMass', units);
 
-/** "148.0 g of lead at Nose". */
-export const leadBarWords = ({ mass, name }: BeamBar, units: UnitSystem): string =>
-  `${formatQuantity(mass, 'mass', units)} of lead at ${name || 'the hardpoint'}`;
+/** "148.0 g of lead at Nose", and shorter where there is less room. */
+export function leadBarWords({ mass, name }: BeamBar, units: UnitSystem): string[] {
+  const grams = formatQuantity(mass, 'mass', units);
+  return [`${grams} of lead at ${name || 'the hardpoint'}`, `${grams} of lead`, grams];
+}
 
 /** The beam in words: the sums of both sides, the longest bars, and what is left. */
 export function beamInWords(beam: Beam, units: UnitSystem): string {
