@@ -44,7 +44,7 @@ export const PATH_TERMS: readonly { readonly x: number; readonly r: number }[] =
 const RESOLVED = 1e-13;
 const DEEPEST = 44;
 
-export interface Scale {
+interface Scale {
   readonly tape: number;
   readonly radius: number;
 }

@@ -114,3 +114,16 @@ test('rows read from the other end give the mirrored hull', () => {
     near(back.length, hull.length, 1e-10);
   }
 });
+
+// A ball of radius 1: r = sin s, of which the rows at the tips alone tell the circle.
+test('tips that the rows allow are round, not flat: a ball by tape', () => {
+  const rows = Array.from({ length: 13 }, (_, i) =>
+    row((Math.PI * i) / 12, i === 12 ? 0 : 2 * Math.sin((Math.PI * i) / 12)),
+  );
+  const hull = built(along('tape', rows));
+  near(hull.tapeAt(0, 0), 0);
+  expect(Math.abs(hull.length - 2)).toBeLessThan(1e-3);
+  near(hull.radius(0.002, 0), Math.sqrt(0.002 * 1.998), 1e-2);
+  near(hull.volume, (4 / 3) * Math.PI, 1e-4);
+  near(hull.area, 4 * Math.PI, 1e-4);
+});
