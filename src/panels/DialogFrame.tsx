@@ -14,6 +14,8 @@ export function DialogFrame({ title, onClose, children }: DialogFrameProps) {
   useEffect(() => {
     const dialog = ref.current!;
     dialog.showModal();
+    // What is to be typed comes first; without such a field the browser's own choice stands.
+    dialog.querySelector<HTMLElement>('form input, textarea, [type=search]')?.focus();
     return () => dialog.close();
   }, []);
   return (

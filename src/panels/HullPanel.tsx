@@ -13,6 +13,7 @@ import { ShapeFields } from './hull/ShapeFields.tsx';
 import { hasRows } from './hull/shapeFields.ts';
 import { RowList } from './RowList.tsx';
 import { SHAPE_CHOICES } from './words.ts';
+import './hull/hull.css';
 
 const HULL_ROWS = [
   'hull.length',

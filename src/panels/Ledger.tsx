@@ -23,11 +23,13 @@ export function Ledger() {
   ];
   return (
     <section className="ledger" aria-label="Ledger">
-      <Tabs<TabId> label="Ledger" tabs={tabs} front={front} onFront={setFront}>
-        {front === 'parts' && <PartTable onDialog={setDialog} />}
-        {front === 'wires' && <WireTable />}
-        {front === 'hardpoints' && <HardpointTable />}
-      </Tabs>
+      <div className="ledger-frame">
+        <Tabs<TabId> label="Ledger" tabs={tabs} front={front} onFront={setFront}>
+          {front === 'parts' && <PartTable onDialog={setDialog} />}
+          {front === 'wires' && <WireTable />}
+          {front === 'hardpoints' && <HardpointTable />}
+        </Tabs>
+      </div>
       {dialog && <OpenDialog dialog={dialog} onClose={() => setDialog(null)} />}
     </section>
   );

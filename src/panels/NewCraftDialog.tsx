@@ -35,7 +35,7 @@ export function NewCraftDialog({ onCreate, onClose }: NewCraftDialogProps) {
   return (
     <DialogFrame title="New craft" onClose={onClose}>
       <form onSubmit={create}>
-        <TextField label="Craft name" value={name} autoFocus onCommit={kept(setName)} />
+        <TextField label="Craft name" value={name} onCommit={kept(setName)} />
         <QuantityField
           label="Length"
           value={length}

@@ -1,7 +1,7 @@
 /** Rows of a spreadsheet or a CSV file, looked at before anything is added. */
 import { useId, useMemo, useState } from 'react';
 import { LIMITS } from '../craft/quantities.ts';
-import { addParts, hasRoom } from '../edit/edits/parts.ts';
+import { addPart, addParts, hasRoom } from '../edit/edits/parts.ts';
 import { type CellProblem, type PartsReading, readParts } from './csv/readParts.ts';
 import { DialogFrame } from './DialogFrame.tsx';
 import { defaultPlace } from './defaults.ts';
@@ -91,7 +91,8 @@ function AddRowsButtons({
   const add = useAdding('part');
   const room = hasRoom(craft, good.length);
   const addGood = () => {
-    if (add(addParts(good))) onClose();
+    const [first] = good;
+    if (first && add(good.length === 1 ? addPart(first) : addParts(good))) onClose();
   };
   return (
     <div className="dialog-actions">

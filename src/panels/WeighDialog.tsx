@@ -32,7 +32,6 @@ export function WeighDialog({ id, onClose }: WeighDialogProps) {
           quantity="mass"
           units={units}
           hint="Of one piece"
-          autoFocus
           onCommit={(next) => keep(next, setMass)}
         />
         <QuantityField

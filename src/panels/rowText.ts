@@ -6,9 +6,16 @@ import { type Quantity, type UnitSystem, unitOf } from '../units/units.ts';
 /** "157.1 g", "157.1 ± 2.4 g"; "none" where there is no value. */
 export function rowText(row: Row, units: UnitSystem): string {
   if (row.value === null) return 'none';
-  if (!row.uncertainty) return formatQuantity(row.value, row.quantity, units);
-  return uncertainText(row.value, row.uncertainty, row.quantity, units);
+  return row.uncertainty && !isDust(row.uncertainty, row.quantity, units)
+    ? uncertainText(row.value, row.uncertainty, row.quantity, units)
+    : formatQuantity(row.value, row.quantity, units);
 }
+
+/** Below a thousandth of the last digit usually shown it is rounding of the arithmetic, as for the side of a craft that is alike on both. */
+const isDust = (uncertainty: number, quantity: Quantity, units: UnitSystem): boolean => {
+  const { si, digits } = unitOf(quantity, units);
+  return uncertainty / si < 10 ** -(digits + 3);
+};
 
 function uncertainText(value: number, uncertainty: number, quantity: Quantity, units: UnitSystem): string {
   const unit = unitOf(quantity, units);

@@ -16,6 +16,10 @@ test('with an uncertainty both are shown to two digits of it', () => {
   expect(rowText(pitch, 'imperial')).toBe('10.0° ± 1.0°');
 });
 
+test('an uncertainty that is only rounding of the arithmetic is not shown', () => {
+  expect(rowText({ ...ROW, value: 1e-17, quantity: 'length', uncertainty: 3e-18 }, 'metric')).toBe('0.000 m');
+});
+
 test('no value is a word, not a number', () => {
   expect(rowText({ ...ROW, value: null, status: 'infeasible' }, 'metric')).toBe('none');
 });

@@ -47,7 +47,11 @@ export function useDraft<T>(rules: DraftRules<T>): Draft<T> {
   return {
     text: draft ?? rules.shown,
     error,
-    set: setDraft,
+    set: (text) => {
+      setDraft(text);
+      // At once and not when the field is left: a sentence that goes while a button is pressed would move the button away.
+      setError(null);
+    },
     replace: (text, value) => {
       setDraft(text);
       settle(rules.commit(value, text));

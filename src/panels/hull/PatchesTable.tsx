@@ -3,7 +3,7 @@ import type { HullSpec } from '../../craft/hullSchema.ts';
 import type { Problem } from '../../craft/problem.ts';
 import { setHull } from '../../edit/edits/craft.ts';
 import { stationOf } from '../../edit/place.ts';
-import type { Quantity } from '../../units/units.ts';
+import { type Quantity, unitOf } from '../../units/units.ts';
 import { useCommit } from '../commit.ts';
 import { defaultPlace } from '../defaults.ts';
 import { useEditor } from '../editor.ts';
@@ -19,7 +19,7 @@ const NUMBERS: readonly { key: 'mass' | 'station' | 'clock'; label: string; quan
 ];
 
 export function PatchesTable({ patches }: { patches: readonly Patch[] }) {
-  const { assessment } = useEditor();
+  const { assessment, units } = useEditor();
   const commit = useCommit();
   const set = (field: string, next: readonly Patch[]): Problem | null =>
     commit(setHull(field, { patches: [...next] }));
@@ -30,14 +30,14 @@ export function PatchesTable({ patches }: { patches: readonly Patch[] }) {
   return (
     <>
       {patches.length > 0 && (
-        <table className="rows-table">
+        <table className="rows-table patches">
           <caption>Patches</caption>
           <thead>
             <tr>
               <th scope="col">Patch</th>
-              {NUMBERS.map(({ key, label }) => (
+              {NUMBERS.map(({ key, label, quantity }) => (
                 <th scope="col" key={key}>
-                  {label}
+                  {label}, {unitOf(quantity, units).symbol}
                 </th>
               ))}
               <th scope="col">

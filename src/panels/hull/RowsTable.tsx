@@ -3,6 +3,7 @@ import { useId, useState } from 'react';
 import type { Problem } from '../../craft/problem.ts';
 import { setShape } from '../../edit/edits/craft.ts';
 import { withRowAfter } from '../../edit/shapeAs.ts';
+import { unitOf } from '../../units/units.ts';
 import { useCommit } from '../commit.ts';
 import { readNumberRows } from '../csv/numberRows.ts';
 import { useEditor } from '../editor.ts';
@@ -13,6 +14,7 @@ export function RowsTable({ shape }: { shape: RowShape }) {
   const { units } = useEditor();
   const commit = useCommit();
   const columns = columnsOf(shape);
+  const unit = unitOf('length', units).symbol;
   const rows: readonly HullRow[] = shape.rows;
   const set = (next: readonly HullRow[]): Problem | null =>
     commit(setShape('rows', { ...shape, rows: next } as RowShape));
@@ -25,7 +27,7 @@ export function RowsTable({ shape }: { shape: RowShape }) {
             <th scope="col">Row</th>
             {columns.map(({ key, label }) => (
               <th scope="col" key={key}>
-                {label}
+                {label}, {unit}
               </th>
             ))}
             <th scope="col">

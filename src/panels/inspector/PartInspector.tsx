@@ -116,8 +116,8 @@ function PartFacts({ id, geometry }: { id: string; geometry: Geometry }) {
             ]
           : []),
         ...pieces.map(({ cg: [x, y, z], copy }) => ({
-          label: pieces.length > 1 ? `CG of piece ${copy + 1}` : 'CG of the piece',
-          text: `station ${place(x)}, side ${place(y)}, height ${place(z)}`,
+          label: pieces.length > 1 ? `CG of piece ${copy + 1}` : 'CG station, side, height',
+          text: [x, y, z].map(place).join(', '),
         })),
       ]}
     />

@@ -91,14 +91,16 @@ function cellContent<R extends GridItem>(
   press: () => void,
 ): ReactNode {
   if (!column.press) return column.text(row, units);
+  const pressed = column.press.pressed(row);
   return (
     <button
       type="button"
       tabIndex={-1}
       aria-label={column.press.label(row)}
-      aria-pressed={column.press.pressed(row)}
+      aria-pressed={pressed}
       onClick={press}
     >
+      {pressed && <span aria-hidden="true">✓ </span>}
       {column.text(row, units)}
     </button>
   );

@@ -61,7 +61,7 @@ function AddButtons({ onDialog }: PartTableProps) {
         Add part
       </button>
       <button type="button" disabled={full} onClick={() => onDialog({ kind: 'catalogue' })}>
-        From catalogue…
+        Catalogue…
       </button>
     </>
   );

@@ -62,9 +62,9 @@ export const HARDPOINT_GRID: readonly GridColumn<HardpointRow>[] = [
     key: 'lead',
     title: 'Lead',
     sortBy: ({ lead }) => (lead ? 0 : 1),
-    text: ({ lead }) => (lead ? 'Lead here' : 'No lead'),
+    text: () => 'Lead',
     press: {
-      label: ({ name }) => `Work out the lead at ${name}`,
+      label: ({ name }) => `Lead at ${name}`,
       pressed: ({ lead }) => lead,
       run: ({ id }, commit) => {
         commit(setLeadAt(id));

@@ -222,7 +222,7 @@ export const PART_GRID: readonly GridColumn<PartRow>[] = [
     key: 'locked',
     title: 'Lock',
     sortBy: ({ part }) => (part.locked ? 0 : 1),
-    text: ({ part }) => (part.locked ? 'Locked' : 'Free'),
+    text: () => 'Lock',
     press: {
       label: ({ name }) => `Lock ${name}`,
       pressed: ({ part }) => part.locked,

@@ -118,7 +118,7 @@ test('every bad cell is named by row and column with what is allowed; the good r
     `one of ${PART_KINDS.join(', ')}`,
     'a whole number, pair, or ring and a whole number',
     'a mass',
-    'at least 0.0 g',
+    'at least 0 g',
     'at most 64',
   ]);
 });
