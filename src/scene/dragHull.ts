@@ -10,15 +10,17 @@ type ShapeOf<K extends HullShape['kind']> = Extract<HullShape, { kind: K }>;
 
 const LEAST_LENGTH = 0.1;
 const LEAST_DIAMETER = 0.05;
-const GREATEST = 50;
+/** Well inside what the craft file holds, so that tape lengths, girths and flat widths stay inside it too. */
+const GREATEST_LENGTH = 30;
+const GREATEST_DIAMETER = 15;
 const LEAST_PIECE = 0.02;
 
 const tidy = (value: number): number => Math.round(value * 1e9) / 1e9;
-const clamp = (value: number, low: number): number => Math.min(GREATEST, Math.max(low, value));
+const clamp = (value: number, low: number, high: number): number => Math.min(high, Math.max(low, value));
 
 /** The shape at a wanted length, given the length it has now, m. */
 export function withLength(shape: HullShape, now: number, wanted: number): HullShape {
-  const length = clamp(wanted, LEAST_LENGTH);
+  const length = clamp(wanted, LEAST_LENGTH, GREATEST_LENGTH);
   const ratio = length / now;
   switch (shape.kind) {
     case 'spheroid':
@@ -43,7 +45,7 @@ export function withLength(shape: HullShape, now: number, wanted: number): HullS
 
 /** The shape at a wanted greatest diameter (height), given the one it has now, m. */
 export function withDiameter(shape: HullShape, now: number, wanted: number): HullShape {
-  const diameter = clamp(wanted, LEAST_DIAMETER);
+  const diameter = clamp(wanted, LEAST_DIAMETER, GREATEST_DIAMETER);
   const ratio = diameter / now;
   switch (shape.kind) {
     case 'offsets':

@@ -37,7 +37,7 @@ export interface Margins {
   readonly bottom: number;
 }
 
-export const LEAST_SCALE = 8;
+export const LEAST_SCALE = 2;
 export const GREATEST_SCALE = 20_000;
 
 const clamp = (value: number, low: number, high: number): number => Math.min(high, Math.max(low, value));
@@ -58,13 +58,6 @@ export function toScreen(view: View, point: PlanePoint): ScreenPoint {
 export function toWorld(view: View, { x, y }: ScreenPoint): PlanePoint {
   const turned = { u: (x - view.originX) / view.scale, z: (view.originY - y) / view.scale };
   return turnedBy({ tilt: -view.tilt, pivot: view.pivot }, turned);
-}
-
-/** A step on the screen, px, as a step in the plane, m. */
-export function stepToWorld(view: View, dx: number, dy: number): { du: number; dz: number } {
-  const from = toWorld(view, { x: 0, y: 0 });
-  const to = toWorld(view, { x: dx, y: dy });
-  return { du: to.u - from.u, dz: to.z - from.z };
 }
 
 export const panned = (view: View, dx: number, dy: number): View => ({
