@@ -104,7 +104,7 @@ function AddRowsButtons({
       )}
       {problems.length > 0 && (
         <button type="button" disabled={good.length === 0 || !room} onClick={addGood}>
-          Add the {good.length} good ones
+          {good.length === 1 ? 'Add the good one' : `Add the ${good.length} good ones`}
         </button>
       )}
       <button

@@ -1,5 +1,5 @@
 /** The one sentence, and the five verdicts, each opening into its working. */
-import { useId, useState } from 'react';
+import { type KeyboardEvent, useId, useState } from 'react';
 import type { Verdict } from '../report/verdict.ts';
 import type { UnitSystem } from '../units/units.ts';
 import { useEditor } from './editor.ts';
@@ -39,6 +39,11 @@ function VerdictCard({ verdict, units }: { verdict: Verdict; units: UnitSystem }
   const [open, setOpen] = useState(false);
   const id = useId();
   const { row, state } = verdict;
+  const onKeyDown = (event: KeyboardEvent) => {
+    if (!open || event.key !== 'Escape') return;
+    event.stopPropagation();
+    setOpen(false);
+  };
   return (
     <div className="verdict" data-state={state} data-verdict={verdict.key}>
       <button
@@ -47,6 +52,7 @@ function VerdictCard({ verdict, units }: { verdict: Verdict; units: UnitSystem }
         aria-expanded={open}
         aria-controls={id}
         onClick={() => setOpen(!open)}
+        onKeyDown={onKeyDown}
       >
         <span className="verdict-title">{verdict.title}</span>
         <span className="verdict-word">{verdict.word}</span>

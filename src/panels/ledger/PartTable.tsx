@@ -98,7 +98,7 @@ function SelectedButtons({ onDialog }: PartTableProps) {
         disabled={ids.length !== 1}
         onClick={() => onDialog({ kind: 'weigh', id: ids[0]! })}
       >
-        Weighed…
+        Weigh…
       </button>
     </>
   );
@@ -118,7 +118,7 @@ function CsvButtons({ onDialog }: PartTableProps) {
   return (
     <>
       <button type="button" onClick={() => onDialog({ kind: 'paste', text: '' })}>
-        Paste rows…
+        Paste…
       </button>
       <button
         type="button"
