@@ -1,8 +1,8 @@
 /** The beam as a table: every mass with its station and its moment about the CB, drawn as a bar to nose or tail. */
 import type { BeamBar, Geometry } from '../report/assessment.ts';
+import { formatQuantity } from '../units/format.ts';
 import type { UnitSystem } from '../units/units.ts';
 import { left, oneLine, right } from './layout.ts';
-import { quantityText } from './rowText.ts';
 
 const HALF = 9;
 
@@ -11,7 +11,7 @@ export function beamTable({ beam, lead, cb }: Geometry, units: UnitSystem): stri
   const line = (bar: BeamBar) => barLine(bar, longest, units);
   const heaviest = [...beam].sort((a, b) => Math.abs(b.moment) - Math.abs(a.moment));
   return [
-    `Beam: moments about the CB at ${quantityText(cb[0], 'length', units)}, + tail-heavy`,
+    `Beam: moments about the CB at ${formatQuantity(cb[0], 'length', units)}, + tail-heavy`,
     columns('', 'mass', 'station', 'moment', `${right('nose', HALF)}|${left('tail', HALF)}`),
     ...heaviest.map(line),
     totalLine(beam, units),
@@ -28,9 +28,9 @@ function barLine(bar: BeamBar, longest: number, units: UnitSystem): string {
   const { name, mass, station, moment } = bar;
   return columns(
     name,
-    quantityText(mass, 'mass', units),
-    quantityText(station, 'length', units),
-    quantityText(moment, 'momentMass', units),
+    formatQuantity(mass, 'mass', units),
+    formatQuantity(station, 'length', units),
+    formatQuantity(moment, 'momentMass', units),
     drawn(moment, longest),
   );
 }
@@ -44,5 +44,11 @@ function drawn(moment: number, longest: number): string {
 function totalLine(beam: readonly BeamBar[], units: UnitSystem): string {
   const mass = beam.reduce((sum, bar) => sum + bar.mass, 0);
   const moment = beam.reduce((sum, bar) => sum + bar.moment, 0);
-  return columns('Sum', quantityText(mass, 'mass', units), '', quantityText(moment, 'momentMass', units), '');
+  return columns(
+    'Sum',
+    formatQuantity(mass, 'mass', units),
+    '',
+    formatQuantity(moment, 'momentMass', units),
+    '',
+  );
 }

@@ -1,8 +1,8 @@
 /** Every figure of the report, in groups. */
 import type { Row } from '../report/row.ts';
+import { rowText } from '../report/rowText.ts';
 import type { UnitSystem } from '../units/units.ts';
 import { COLUMNS, left, oneLine, wrapped } from './layout.ts';
-import { rowText } from './rowText.ts';
 
 /** The group of a row, by the first word of its key. */
 const GROUPS: Readonly<Record<string, string>> = {

@@ -1,13 +1,13 @@
 /** The report of a craft for reading at a terminal. */
 import type { Craft } from '../craft/craft.ts';
 import type { Assessment } from '../report/assessment.ts';
+import { hazardsOf } from '../report/hazards.ts';
+import { marginText, rowText } from '../report/rowText.ts';
 import type { Verdict } from '../report/verdict.ts';
 import type { UnitSystem } from '../units/units.ts';
 import { beamTable } from './beamTable.ts';
 import { figures } from './figures.ts';
-import { hazards } from './hazards.ts';
 import { left, oneLine, wrapped } from './layout.ts';
-import { quantityText, rowText } from './rowText.ts';
 
 export function reportText(craft: Craft, report: Assessment, units: UnitSystem): string {
   const { headline, verdicts, rows, geometry, cautions } = report;
@@ -22,7 +22,7 @@ export function reportText(craft: Craft, report: Assessment, units: UnitSystem):
     ...figures(rows, units),
     ...beam,
     'Cautions',
-    ...[...cautions, ...hazards(craft)].flatMap(bullet),
+    ...[...cautions, ...hazardsOf(craft)].flatMap(bullet),
   ];
   return `${lines.join('\n')}\n`;
 }
@@ -39,6 +39,3 @@ function verdictLines(verdict: Verdict, units: UnitSystem): string[] {
 
 const reason = ({ state, row: { status, why } }: Verdict): string[] =>
   status === 'solved' || state === 'met' ? [] : wrapped(why, 10);
-
-const marginText = (margin: number, quantity: Verdict['row']['quantity'], units: UnitSystem): string =>
-  `${quantityText(Math.abs(margin), quantity, units)} ${margin < 0 ? 'outside' : 'inside'}`;

@@ -1,9 +1,9 @@
 /** Every figure of the report, with what stands behind those that need a word. */
 import type { Row, RowStatus } from '../report/row.ts';
+import { rowText } from '../report/rowText.ts';
 import type { UnitSystem } from '../units/units.ts';
 import { useEditor } from './editor.ts';
 import { figureGroups } from './figureGroups.ts';
-import { rowText } from './rowText.ts';
 
 const STATUS_WORDS: Readonly<Record<RowStatus, string>> = {
   solved: '',

@@ -2,6 +2,7 @@
 import { catalogue } from '../catalogue/catalogue.ts';
 import type { Gas } from '../craft/schema.ts';
 import { setGas } from '../edit/edits/craft.ts';
+import { HAZARDS } from '../report/hazards.ts';
 import { Caution } from './Caution.tsx';
 import { useCommit } from './commit.ts';
 import { useEditor } from './editor.ts';
@@ -46,7 +47,7 @@ export function GasPanel() {
         choices={LIFTING_CHOICES}
         onCommit={(next) => set('lifting gas', { lifting: next })}
       />
-      <GasCaution lifting={lifting} />
+      <Caution>{HAZARDS[lifting]}</Caution>
       <QuantityField
         label="Purity"
         value={purity}
@@ -71,25 +72,8 @@ export function GasPanel() {
         hint="Gas pressure above the air outside."
         onCommit={(next) => set('gauge pressure', { gaugePressure: next })}
       />
-      <Caution>
-        A closed envelope in the sun gains pressure and can burst. Vent it, watch the gauge, and keep to the
-        film maker’s limits.
-      </Caution>
+      <Caution>{HAZARDS.pressure}</Caution>
       <RowList rows={rows} units={units} />
     </section>
-  );
-}
-
-function GasCaution({ lifting }: { lifting: Gas['lifting'] }) {
-  return lifting === 'helium' ? (
-    <Caution>
-      Helium displaces the air one breathes, and whoever breathes it has no warning before fainting. Fill and
-      vent only where air moves freely, never inhale it, and follow the supplier’s sheet.
-    </Caution>
-  ) : (
-    <Caution>
-      Hydrogen burns with a flame one hardly sees, and mixed with air it explodes. Many sites forbid it. Use
-      it only where local rules allow it and with people trained for it.
-    </Caution>
   );
 }

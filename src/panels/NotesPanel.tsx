@@ -1,5 +1,6 @@
 /** The craft's name and the builder's notes. */
 import { setName, setNotes } from '../edit/edits/craft.ts';
+import { HAZARDS } from '../report/hazards.ts';
 import { Caution } from './Caution.tsx';
 import { useCommit } from './commit.ts';
 import { useEditor } from './editor.ts';
@@ -19,11 +20,4 @@ export function NotesPanel() {
 }
 
 /** What to mind before it flies. */
-export function FlightCaution() {
-  return (
-    <Caution>
-      Flying near people can hurt them, and a light craft drifts in any draught. Fly by the rules of the local
-      aviation authority and of the site; these figures stand in for no inspection, licence or makers’ sheet.
-    </Caution>
-  );
-}
+export const FlightCaution = () => <Caution>{HAZARDS.people}</Caution>;

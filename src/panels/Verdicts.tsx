@@ -1,10 +1,10 @@
 /** The one sentence, and the five verdicts, each opening into its working. */
 import { type KeyboardEvent, useId, useState } from 'react';
+import { marginText, rowText } from '../report/rowText.ts';
 import type { Verdict } from '../report/verdict.ts';
 import type { UnitSystem } from '../units/units.ts';
 import { useEditor } from './editor.ts';
 import { RowList } from './RowList.tsx';
-import { marginText, rowText } from './rowText.ts';
 
 export function Verdicts() {
   const { assessment, units } = useEditor();

@@ -1,7 +1,8 @@
 /** Rows of the report as text in the builder's units. */
-import type { Row } from '../report/row.ts';
+
 import { decimalsFor, formatNumber, formatQuantity } from '../units/format.ts';
 import { type Quantity, type UnitSystem, unitOf } from '../units/units.ts';
+import type { Row } from './row.ts';
 
 /** "157.1 g", "157.1 ± 2.4 g"; "none" where there is no value. */
 export function rowText(row: Row, units: UnitSystem): string {
@@ -11,7 +12,10 @@ export function rowText(row: Row, units: UnitSystem): string {
     : formatQuantity(row.value, row.quantity, units);
 }
 
-/** Below a thousandth of the last digit usually shown it is rounding of the arithmetic, as for the side of a craft that is alike on both. */
+/**
+ * Below a thousandth of the last digit usually shown it is rounding of the arithmetic, as for the side of a craft that
+ * is alike on both.
+ */
 const isDust = (uncertainty: number, quantity: Quantity, units: UnitSystem): boolean => {
   const { si, digits } = unitOf(quantity, units);
   return uncertainty / si < 10 ** -(digits + 3);
@@ -19,17 +23,17 @@ const isDust = (uncertainty: number, quantity: Quantity, units: UnitSystem): boo
 
 function uncertainText(value: number, uncertainty: number, quantity: Quantity, units: UnitSystem): string {
   const unit = unitOf(quantity, units);
-  const spread = uncertainty / unit.si;
-  const decimals = decimalsFor(spread, unit.digits);
+  const decimals = decimalsFor(uncertainty / unit.si, unit.digits);
   const number = formatNumber(unit.toDisplay(value), decimals);
-  const band = `${number} ± ${formatNumber(spread, decimals)}`;
-  if (unit.symbol === '°') return `${number}° ± ${formatNumber(spread, decimals)}°`;
-  return unit.symbol ? `${band} ${unit.symbol}` : band;
+  const spread = formatNumber(uncertainty / unit.si, decimals);
+  if (unit.symbol === '°') return `${number}° ± ${spread}°`;
+  return `${number} ± ${spread} ${unit.symbol}`.trimEnd();
 }
 
-/** "1.2° inside", "0.4° outside", "on the limit"; empty where there is no margin. */
+/** "inside by 1.2°", "outside by 0.4°", "on the limit"; empty where there is no margin. */
 export function marginText(margin: number | null, quantity: Quantity, units: UnitSystem): string {
   if (margin === null) return '';
-  const side = margin < 0 ? 'outside' : 'inside';
-  return `${formatQuantity(Math.abs(margin), quantity, units)} ${side}`;
+  const size = formatQuantity(Math.abs(margin), quantity, units);
+  if (size === formatQuantity(0, quantity, units)) return 'on the limit';
+  return margin < 0 ? `outside by ${size}` : `inside by ${size}`;
 }

@@ -1,6 +1,6 @@
 import { expect, test } from 'vitest';
-import { marginText, rowText } from '../../src/panels/rowText.ts';
 import type { Row } from '../../src/report/row.ts';
+import { marginText, rowText } from '../../src/report/rowText.ts';
 
 const ROW: Row = { label: 'Lead', quantity: 'mass', value: 0.157117, unit: 'kg', status: 'solved', why: '' };
 
@@ -25,7 +25,8 @@ test('no value is a word, not a number', () => {
 });
 
 test('a margin says which side of the target it is on', () => {
-  expect(marginText(0.0123, 'mass', 'metric')).toBe('12.3 g inside');
-  expect(marginText(-0.0123, 'mass', 'metric')).toBe('12.3 g outside');
+  expect(marginText(0.0123, 'mass', 'metric')).toBe('inside by 12.3 g');
+  expect(marginText(-0.0123, 'mass', 'metric')).toBe('outside by 12.3 g');
+  expect(marginText(1e-9, 'mass', 'metric')).toBe('on the limit');
   expect(marginText(null, 'mass', 'metric')).toBe('');
 });
