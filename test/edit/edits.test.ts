@@ -1,5 +1,6 @@
 import { expect, test } from 'vitest';
 import { listed } from '../../src/craft/craft.ts';
+import type { Place } from '../../src/craft/placeSchema.ts';
 import { step } from '../../src/edit/edit.ts';
 import * as whole from '../../src/edit/edits/craft.ts';
 import * as hardpoints from '../../src/edit/edits/hardpoints.ts';
@@ -9,6 +10,7 @@ import { fixtureCraft, partOf, wireOf } from './craftFixture.ts';
 import { testEdit } from './testEdit.ts';
 
 const craft = fixtureCraft();
+const move = (id: string, place: Place) => step('Move', parts.placePart(id, place));
 const { id: _, ...fields } = partOf('spare', { name: 'Spare' });
 
 test('a part is added at the end under an id from its name, never one that is taken', () => {
@@ -61,19 +63,16 @@ test('parts are put in another order', () => {
 });
 
 test('moved to another place; back again is no change', () => {
-  const moved = testEdit(craft, parts.movePart('battery', { kind: 'keel', station: 0.6, drop: 0.03 }));
+  const moved = testEdit(craft, move('battery', { kind: 'keel', station: 0.6, drop: 0.03 }));
   expect(moved.parts.byId.battery!.place).toEqual({ kind: 'keel', station: 0.6, drop: 0.03 });
-  expect(testEdit(craft, parts.movePart('battery', { ...craft.parts.byId.battery!.place }))).toBe(craft);
+  expect(testEdit(craft, move('battery', { ...craft.parts.byId.battery!.place }))).toBe(craft);
 });
 
 test('a place out of all bounds is brought back in, a clock angle into one turn', () => {
-  const far = testEdit(
-    craft,
-    parts.movePart('fins', { kind: 'skin', station: 1e9, clock: -Math.PI / 2, standoff: 0 }),
-  );
+  const far = testEdit(craft, move('fins', { kind: 'skin', station: 1e9, clock: -Math.PI / 2, standoff: 0 }));
   expect(far.parts.byId.fins!.place).toMatchObject({ station: 50 });
   expect((far.parts.byId.fins!.place as { clock: number }).clock).toBeCloseTo(1.5 * Math.PI, 8);
-  const up = testEdit(craft, parts.movePart('battery', { kind: 'keel', station: 1, drop: -3 }));
+  const up = testEdit(craft, move('battery', { kind: 'keel', station: 1, drop: -3 }));
   expect(up.parts.byId.battery!.place).toEqual({ kind: 'keel', station: 1, drop: 0 });
 });
 
@@ -106,8 +105,13 @@ test('hardpoints come, change and go; the lead always has one', () => {
   const chosen = testEdit(added, hardpoints.setLeadAt('tail'));
   expect(testEdit(chosen, hardpoints.removeHardpoints(['tail'])).leadAt).toBe('nose');
   expect(testEdit(craft, hardpoints.removeHardpoints(['nose', 'chin']))).toBe(craft);
-  expect(testEdit(craft, hardpoints.renameHardpoint('nose', 'Bow')).hardpoints.byId.nose!.name).toBe('Bow');
-  const moved = testEdit(craft, hardpoints.moveHardpoint('nose', { kind: 'axis', station: 0.1 }));
+  expect(
+    testEdit(craft, hardpoints.setHardpoint('nose', 'name', { name: 'Bow' })).hardpoints.byId.nose!.name,
+  ).toBe('Bow');
+  const moved = testEdit(
+    craft,
+    step('Move', hardpoints.placeHardpoint('nose', { kind: 'axis', station: 0.1 })),
+  );
   expect(moved.hardpoints.byId.nose!.place).toEqual({ kind: 'axis', station: 0.1 });
   const nudged = testEdit(craft, hardpoints.nudgeHardpoints(['nose', 'chin'], 0.01));
   expect(nudged.hardpoints.byId.chin!.place).toEqual({ kind: 'keel', station: 0.61, drop: 0 });

@@ -2,17 +2,10 @@ import fc from 'fast-check';
 import { expect, test } from 'vitest';
 import { parse } from '../../src/craft/parse.ts';
 import { serialize } from '../../src/craft/serialize.ts';
-import type { Edit } from '../../src/edit/edit.ts';
+import { type Edit, step } from '../../src/edit/edit.ts';
 import { setGas, setName, setShape } from '../../src/edit/edits/craft.ts';
 import { addHardpoint, removeHardpoints, setLeadAt } from '../../src/edit/edits/hardpoints.ts';
-import {
-  duplicateParts,
-  movePart,
-  nudgeParts,
-  placePart,
-  removeParts,
-  setPart,
-} from '../../src/edit/edits/parts.ts';
+import { duplicateParts, nudgeParts, placePart, removeParts, setPart } from '../../src/edit/edits/parts.ts';
 import { removeWires } from '../../src/edit/edits/wires.ts';
 import { Session } from '../../src/edit/session.ts';
 import { fixtureCraft } from './craftFixture.ts';
@@ -119,7 +112,7 @@ test('listeners hear every change and can leave', () => {
 const anyEdit: fc.Arbitrary<Edit> = fc.oneof(
   fc
     .double({ min: 0, max: 3, noNaN: true })
-    .map((at) => movePart('battery', { kind: 'keel', station: at, drop: 0 })),
+    .map((at) => step('Move', placePart('battery', { kind: 'keel', station: at, drop: 0 }))),
   fc.constantFrom('thruster', 'battery', 'fins', 'lights').map((id) => removeParts([id])),
   fc.constantFrom('thruster', 'battery', 'fins', 'lights').map((id) => duplicateParts([id])),
   fc.double({ min: 0, max: 2, noNaN: true }).map((mass) => setPart('fins', 'mass', { mass })),

@@ -1,6 +1,6 @@
 import { expect, test } from 'vitest';
 import { type Craft, keyed, listed } from '../../src/craft/craft.ts';
-import { movePart } from '../../src/edit/edits/parts.ts';
+import { placePart } from '../../src/edit/edits/parts.ts';
 import { run } from '../../src/edit/history.ts';
 import { assess } from '../../src/report/assess.ts';
 import type { VerdictKey } from '../../src/report/verdict.ts';
@@ -51,7 +51,7 @@ test('a battery that can slide is offered, and sliding it there levels the craft
   };
   const { headline } = assess(heavier);
   const station = Number(/slide Battery forward to ([\d.]+) m/.exec(headline)![1]);
-  const slid = run(heavier, movePart('battery', { kind: 'keel', station, drop: 0.03 }).recipe).craft;
+  const slid = run(heavier, placePart('battery', { kind: 'keel', station, drop: 0.03 })).craft;
   expect(verdict(slid, 'level').state).toBe('met');
 });
 

@@ -1,5 +1,6 @@
 /** Edits of hardpoints and of the point that carries the heaviness. */
 import type { Place } from '../../craft/placeSchema.ts';
+import type { Hardpoint } from '../../craft/schema.ts';
 import { type Edit, type Recipe, runOf, step } from '../edit.ts';
 import { freeId } from '../ids.ts';
 import { placed, shifted } from '../place.ts';
@@ -21,20 +22,19 @@ export const removeHardpoints = (ids: readonly string[]): Edit =>
     if (ids.includes(craft.leadAt)) craft.leadAt = left[0]!;
   });
 
-export const renameHardpoint = (id: string, name: string): Edit =>
-  runOf(`hardpoint ${id} name`, 'Change name', (craft) => {
-    craft.hardpoints.byId[id]!.name = name;
+/** Sets fields of one hardpoint, as typed: a place out of bounds is refused, not brought back in. */
+export const setHardpoint = (id: string, field: string, change: Partial<Omit<Hardpoint, 'id'>>): Edit =>
+  runOf(`hardpoint ${id} ${field}`, `Change ${field}`, (craft) => {
+    Object.assign(craft.hardpoints.byId[id]!, change);
   });
 
+/** Puts a hardpoint at a place. For drags: pass the recipe to `Drag.move`. */
 export const placeHardpoint =
   (id: string, place: Place): Recipe =>
   (craft) => {
     const hardpoint = craft.hardpoints.byId[id]!;
     hardpoint.place = placed(hardpoint.place, place);
   };
-
-export const moveHardpoint = (id: string, place: Place): Edit =>
-  runOf(`hardpoint ${id} place`, 'Move hardpoint', placeHardpoint(id, place));
 
 export const nudgeHardpoints = (ids: readonly string[], by: number): Edit =>
   runOf(`nudge ${ids.join(' ')}`, 'Nudge hardpoint', (craft) => {

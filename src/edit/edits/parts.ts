@@ -88,9 +88,6 @@ export const placePart =
     part.place = placed(part.place, place);
   };
 
-export const movePart = (id: string, place: Place): Edit =>
-  runOf(`part ${id} place`, 'Move part', placePart(id, place));
-
 /** Shifts parts along the hull, keeping their kind of place; locked ones stay. */
 export const shiftParts =
   (ids: readonly string[], by: number): Recipe =>

@@ -1,6 +1,6 @@
 /** The columns of the hardpoints. */
 import type { Hardpoint } from '../../craft/schema.ts';
-import { moveHardpoint, renameHardpoint, setLeadAt } from '../../edit/edits/hardpoints.ts';
+import { setHardpoint, setLeadAt } from '../../edit/edits/hardpoints.ts';
 import { stationOf, withStation } from '../../edit/place.ts';
 import { formatQuantity } from '../../units/format.ts';
 import { QuantityField } from '../fields/QuantityField.tsx';
@@ -27,7 +27,7 @@ export const HARDPOINT_GRID: readonly GridColumn<HardpointRow>[] = [
         label={`Name of ${row.name}`}
         value={row.hardpoint.name}
         startWith={startWith}
-        onCommit={(name) => commit(renameHardpoint(row.id, name))}
+        onCommit={(name) => commit(setHardpoint(row.id, 'name', { name }))}
         onLeave={onLeave}
       />
     ),
@@ -53,7 +53,9 @@ export const HARDPOINT_GRID: readonly GridColumn<HardpointRow>[] = [
         quantity="length"
         units={units}
         startWith={startWith}
-        onCommit={(station) => commit(moveHardpoint(row.id, withStation(row.hardpoint.place, station)))}
+        onCommit={(station) =>
+          commit(setHardpoint(row.id, 'station', { place: withStation(row.hardpoint.place, station) }))
+        }
         onLeave={onLeave}
       />
     ),
