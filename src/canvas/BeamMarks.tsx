@@ -23,6 +23,8 @@ export interface BeamMarksProps {
 const BAR = 38;
 /** Lines to stations are drawn for so many of the longest bars. */
 const LEADERS = 14;
+/** Amounts change with every move: they are measured only where one may fit, px. */
+const AMOUNT_ROOM = 36;
 /** Room under the beam for the sums of both sides. */
 const FOOT = 46;
 
@@ -113,7 +115,7 @@ function barText(
   context.fillText(name, middle, top + 13);
   const amount = momentAmount(bar.moment, units);
   context.font = fontOf(11);
-  if (textWidth(amount, fontOf(11)) <= room) context.fillText(amount, middle, top + 27);
+  if (room > AMOUNT_ROOM && textWidth(amount, fontOf(11)) <= room) context.fillText(amount, middle, top + 27);
 }
 
 /** What one side falls short of the other, hatched, with the lead that would close it. */
@@ -147,17 +149,12 @@ function hatch(context: Context, left: number, right: number, top: number, palet
   context.fillRect(left, top, right - left, BAR);
   context.strokeStyle = palette.line;
   context.lineWidth = 1;
+  context.beginPath();
   for (let x = left - BAR; x < right; x += 7) {
-    traceOnScreen(
-      context,
-      [
-        { x, y: top + BAR },
-        { x: x + BAR, y: top },
-      ],
-      false,
-    );
-    context.stroke();
+    context.moveTo(x, top + BAR);
+    context.lineTo(x + BAR, top);
   }
+  context.stroke();
   context.restore();
 }
 

@@ -1,5 +1,6 @@
 /** The front view on two layers: sections, clock and parts; and what shows the hand what it does. */
 import type { Context } from 'konva/lib/Context.js';
+import { memo } from 'react';
 import { Group, Layer, Shape, Stage } from 'react-konva/es/ReactKonvaCore.js';
 import { isSelected, type Selection } from '../edit/selection.ts';
 import { frontMarks } from '../scene/marks.ts';
@@ -14,10 +15,11 @@ import type { Overlay } from './overlay.ts';
 import { PartMarks } from './PartMarks.tsx';
 import { PointMarks } from './PointMarks.tsx';
 import { fontOf, trace, traceOnScreen, worldTransform, writeOn } from './paint.ts';
+import type { Movers } from './useMovers.ts';
 import { WireMarks } from './WireMarks.tsx';
 
 export interface FrontDrawingProps {
-  readonly scene: Scene;
+  readonly scene: Scene & Movers;
   readonly selection: Selection;
   readonly overlay: Overlay;
   readonly greatest: readonly PlanePoint[];
@@ -26,7 +28,7 @@ export interface FrontDrawingProps {
 }
 
 export function FrontDrawing({ scene, selection, overlay, greatest, section }: FrontDrawingProps) {
-  const { view, palette, geometry, figures, lines } = scene;
+  const { view, palette, geometry, figures, still, moving, lines } = scene;
   const px = 1 / view.scale;
   const world = worldTransform(view);
   const { hover } = overlay;
@@ -39,14 +41,16 @@ export function FrontDrawing({ scene, selection, overlay, greatest, section }: F
     <Stage width={view.width} height={view.height} listening={false}>
       <Layer listening={false}>
         <Group {...world}>
-          <Sections greatest={greatest} section={section} palette={palette} px={px} />
-          <WireMarks lines={lines} ink={palette.wire} px={px} />
-          <PartMarks figures={figures} palette={palette} px={px} />
+          <Greatest outline={greatest} palette={palette} px={px} />
+          <PartMarks figures={still} palette={palette} px={px} />
         </Group>
         <Clock view={view} palette={palette} radius={reachOf(greatest)} />
       </Layer>
       <Layer listening={false}>
         <Group {...world}>
+          {section && <Section outline={section} palette={palette} px={px} />}
+          <WireMarks lines={lines} ink={palette.wire} px={px} />
+          <PartMarks figures={moving} palette={palette} px={px} />
           <Outlines
             selected={figures.filter(({ part }) => isSelected(selection, { kind: 'part', id: part }))}
             hovered={figures.filter(({ part }) => hover?.kind === 'part' && hover.id === part)}
@@ -72,55 +76,60 @@ export function FrontDrawing({ scene, selection, overlay, greatest, section }: F
 const reachOf = (outline: readonly PlanePoint[]): number =>
   Math.max(...outline.map(({ u, z }) => Math.hypot(u, z)));
 
-interface SectionsProps {
-  readonly greatest: readonly PlanePoint[];
-  readonly section: readonly PlanePoint[] | null;
+interface SectionProps {
+  readonly outline: readonly PlanePoint[];
   readonly palette: Palette;
   readonly px: number;
 }
 
-const Sections = ({ greatest, section, palette, px }: SectionsProps) => (
+const Greatest = memo(({ outline, palette, px }: SectionProps) => (
   <Shape
     sceneFunc={(context) => {
-      trace(context, greatest, true);
+      trace(context, outline, true);
       context.fillStyle = palette.gas;
       context.fill();
       context.strokeStyle = palette.skin;
       context.lineWidth = 1.5 * px;
       context.stroke();
-      if (!section) return;
-      trace(context, section, true);
+    }}
+  />
+));
+
+/** The section at the part selected. */
+const Section = memo(({ outline, palette, px }: SectionProps) => (
+  <Shape
+    sceneFunc={(context) => {
+      trace(context, outline, true);
       context.strokeStyle = palette.brass;
       context.lineWidth = 1.2 * px;
       context.setLineDash([5 * px, 3 * px]);
       context.stroke();
     }}
   />
-);
+));
 
 const STEP = 15;
 
 /** Ticks every 15° round the section, clockwise from the top as seen from astern, named every 90°. */
-function Clock({ view, palette, radius }: { view: View; palette: Palette; radius: number }) {
-  return (
-    <Shape
-      sceneFunc={(context) => {
-        context.font = fontOf(11);
-        context.textAlign = 'center';
-        context.textBaseline = 'middle';
-        for (let degrees = 0; degrees < 360; degrees += STEP) tick(context, view, palette, radius, degrees);
-        context.textAlign = 'left';
-        writeOn(context, 'from astern', { x: 6, y: 11 }, palette.inkSoft, palette.paper);
-      }}
-    />
-  );
-}
+const Clock = memo(({ view, palette, radius }: { view: View; palette: Palette; radius: number }) => (
+  <Shape
+    sceneFunc={(context) => {
+      context.font = fontOf(11);
+      context.textAlign = 'center';
+      context.textBaseline = 'middle';
+      for (let degrees = 0; degrees < 360; degrees += STEP) tick(context, view, palette, radius, degrees);
+      context.textAlign = 'left';
+      writeOn(context, 'from astern', { x: 6, y: 11 }, palette.inkSoft, palette.paper);
+    }}
+  />
+));
 
 const NAMES: Readonly<Record<number, string>> = { 0: '0°', 90: '90°', 180: '180°', 270: '270°' };
 
 function tick(context: Context, view: View, palette: Palette, radius: number, degrees: number): void {
   const clock = (degrees * Math.PI) / 180;
-  const name = NAMES[degrees];
+  // On a small section the names would lie on each other.
+  const name = radius * view.scale > 62 ? NAMES[degrees] : undefined;
   const at = (px: number) => toScreen(view, onSection(clock, radius + px / view.scale));
   context.strokeStyle = palette.inkSoft;
   context.lineWidth = 1;

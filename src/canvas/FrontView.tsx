@@ -23,6 +23,7 @@ import { useFit } from './useFit.ts';
 import { useGeometry } from './useGeometry.ts';
 import { useGestures } from './useGestures.ts';
 import { useGround, useOverlay } from './useGround.ts';
+import { useMovers } from './useMovers.ts';
 import { useLie } from './useSideScene.ts';
 import { useSize } from './useSize.ts';
 import { useView } from './useView.ts';
@@ -63,9 +64,12 @@ function FrontFrame(props: CanvasProps & DrawnProps) {
     [scale, originX, originY, tilt, size],
   );
   const [cache] = useState(() => new FigureCache(frontFigure));
+  const figures = cache.figures(craft, geometry, 1 / view.scale);
+  const movers = useMovers(figures, session.getState().dragging);
   const scene = {
+    ...movers,
+    figures,
     ...{ craft, assessment, units, palette, view, geometry },
-    figures: cache.figures(craft, geometry, 1 / view.scale),
     lines: wireLines(geometry.wires, fromAstern),
     hardpoints: hardpointPoints(geometry, fromAstern),
   };

@@ -46,14 +46,21 @@ const sameRect = (a: Rect, b: Rect): boolean =>
 const sameWanted = (a: Wanted, b: Wanted): boolean =>
   a.id === b.id && a.text === b.text && sameRect(a.box, b.box);
 
-/** Placed anew only when something to be named changed. */
-export function useLabels(wanted: readonly Wanted[], taken: readonly Rect[], frame: Rect): readonly Label[] {
+/** Placed anew only when something to be named changed; while a hand is at work, not for what moves among them. */
+export function useLabels(
+  wanted: readonly Wanted[],
+  taken: readonly Rect[],
+  frame: Rect,
+  busy: boolean,
+): readonly Label[] {
   const last = useRef<readonly Wanted[]>([]);
   const still = keepSame(last.current, wanted, sameWanted);
   last.current = still;
   const lastTaken = useRef<readonly Rect[]>([]);
-  const clear = keepSame(lastTaken.current, [...taken, frame], sameRect);
-  lastTaken.current = clear;
+  if (!busy || lastTaken.current.length === 0) {
+    lastTaken.current = keepSame(lastTaken.current, [...taken, frame], sameRect);
+  }
+  const clear = lastTaken.current;
   return useMemo(() => placeLabels(still, clear.slice(0, -1), clear.at(-1)!), [still, clear]);
 }
 

@@ -36,7 +36,9 @@ export function SideDrawing({ scene, selection, overlay, faded }: SideDrawingPro
   const named = new Set([...idsOf(selection, 'part'), ...(hover?.kind === 'part' ? [hover.id] : [])]);
   const frame: Rect = { left: 2, top: 2, right: view.width - 2, bottom: view.height - 30 };
   const points = pointsOf(scene, selection);
-  const labels = useLabels(wantedLabels(craft, scene.still, view, named), takenBy(marks, points), frame);
+  const handles = handlesShown(scene, overlay);
+  const wanted = wantedLabels(craft, scene.still, view, named);
+  const labels = useLabels(wanted, takenBy(marks, points, handles), frame, overlay.held !== null);
   const { hull } = geometry;
   const onGas = useCallback(
     ({ x, y }: ScreenPoint) => {
@@ -79,7 +81,7 @@ export function SideDrawing({ scene, selection, overlay, faded }: SideDrawingPro
         <PointMarks {...points} palette={palette} />
         <BalanceMark marks={marks} palette={palette} angle={pitchAngle(scene)} />
         <HandMarks
-          handles={handlesShown(scene, overlay)}
+          handles={handles}
           wireEnds={endsShown(scene, selectedWires)}
           guide={guideShown(scene, overlay)}
           marquee={overlay.marquee}
@@ -99,10 +101,15 @@ const around = ({ x, y }: ScreenPoint, reach: number): Rect => ({
 
 type Points = Omit<PointMarksProps, 'palette'>;
 
-/** What labels keep clear of: the marks of balance, the ghost of the lead, the support, the eyelets. */
-const takenBy = ({ ring, bob }: BalanceMarks, { lead, support, eyelets }: Points): Rect[] => [
-  around(ring, 20),
-  ...(bob ? [around(bob, 20)] : []),
+/** What labels keep clear of: the marks of balance with their names, handles, the ghost of the lead, the support, the eyelets. */
+const takenBy = (
+  { ring, bob, lean }: BalanceMarks,
+  { lead, support, eyelets }: Points,
+  handles: readonly Handle[],
+): Rect[] => [
+  { ...around(ring, 14), left: ring.x - 38, top: ring.y - 20 },
+  ...(bob ? [{ ...around(bob, 18), [lean > 0 ? 'right' : 'left']: bob.x + (lean > 0 ? 42 : -42) }] : []),
+  ...handles.map(({ at }) => around(at, 14)),
   ...(lead ? [{ left: lead.at.x - 48, right: lead.at.x + 48, top: lead.at.y, bottom: lead.at.y + 54 }] : []),
   ...(support
     ? [{ left: support.x - 9, right: support.x + 64, top: support.y, bottom: support.y + 16 }]

@@ -71,8 +71,12 @@ export function writeOn(context: Context, text: string, at: ScreenPoint, ink: st
   context.fillText(text, at.x, at.y);
 }
 
+/** Less than this holds no three letters, px. */
+const LEAST_ROOM = 20;
+
 /** The text, shortened with an ellipsis to a width in px; null when not even a few letters fit. */
 export function shortened(text: string, font: string, room: number): string | null {
+  if (room < LEAST_ROOM) return null;
   if (textWidth(text, font) <= room) return text;
   for (let letters = text.length - 1; letters >= 3; letters--) {
     const cut = `${text.slice(0, letters).trimEnd()}…`;
@@ -82,11 +86,18 @@ export function shortened(text: string, font: string, room: number): string | nu
 }
 
 let measuring: CanvasRenderingContext2D | null = null;
+const widths = new Map<string, number>();
+const MOST_WIDTHS = 5000;
 
 /** Width of a text, px. */
 export function textWidth(text: string, font: string): number {
-  measuring ??= document.createElement('canvas').getContext('2d');
-  if (!measuring) return text.length * 7;
+  const key = `${font} ${text}`;
+  const known = widths.get(key);
+  if (known !== undefined) return known;
+  measuring ??= document.createElement('canvas').getContext('2d')!;
   measuring.font = font;
-  return measuring.measureText(text).width;
+  const { width } = measuring.measureText(text);
+  if (widths.size >= MOST_WIDTHS) widths.clear();
+  widths.set(key, width);
+  return width;
 }
