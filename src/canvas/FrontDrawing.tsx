@@ -44,7 +44,7 @@ export function FrontDrawing({ scene, selection, overlay, greatest, section }: F
           <Greatest outline={greatest} palette={palette} px={px} />
           <PartMarks figures={still} palette={palette} px={px} />
         </Group>
-        <Clock view={view} palette={palette} radius={reachOf(greatest)} />
+        <Clock view={view} palette={palette} outline={greatest} />
       </Layer>
       <Layer listening={false}>
         <Group {...world}>
@@ -110,14 +110,21 @@ const Section = memo(({ outline, palette, px }: SectionProps) => (
 
 const STEP = 15;
 
+interface ClockProps {
+  readonly view: View;
+  readonly palette: Palette;
+  /** Clockwise from the top, evenly. */
+  readonly outline: readonly PlanePoint[];
+}
+
 /** Ticks every 15° round the section, clockwise from the top as seen from astern, named every 90°. */
-const Clock = memo(({ view, palette, radius }: { view: View; palette: Palette; radius: number }) => (
+const Clock = memo(({ view, palette, outline }: ClockProps) => (
   <Shape
     sceneFunc={(context) => {
       context.font = fontOf(11);
       context.textAlign = 'center';
       context.textBaseline = 'middle';
-      for (let degrees = 0; degrees < 360; degrees += STEP) tick(context, view, palette, radius, degrees);
+      for (let degrees = 0; degrees < 360; degrees += STEP) tick(context, view, palette, outline, degrees);
       context.textAlign = 'left';
       writeOn(context, 'from astern', { x: 6, y: 11 }, palette.inkSoft, palette.paper);
     }}
@@ -126,7 +133,15 @@ const Clock = memo(({ view, palette, radius }: { view: View; palette: Palette; r
 
 const NAMES: Readonly<Record<number, string>> = { 0: '0°', 90: '90°', 180: '180°', 270: '270°' };
 
-function tick(context: Context, view: View, palette: Palette, radius: number, degrees: number): void {
+function tick(
+  context: Context,
+  view: View,
+  palette: Palette,
+  outline: readonly PlanePoint[],
+  degrees: number,
+): void {
+  const { u, z } = outline[Math.round((outline.length * degrees) / 360)]!;
+  const radius = Math.hypot(u, z);
   const clock = (degrees * Math.PI) / 180;
   // On a small section the names would lie on each other.
   const name = radius * view.scale > 62 ? NAMES[degrees] : undefined;

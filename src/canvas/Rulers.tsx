@@ -19,6 +19,8 @@ const FOOT = 24;
 const LARGE = 9;
 const SMALL = 4;
 const LABEL = 18;
+/** Beyond this a label stands beside its tick, not centred on it. */
+const STEEP = 0.4;
 
 /** Those on the hull itself. */
 export const HullRulers = memo(({ hull, view, palette, units }: RulersProps) => (
@@ -117,7 +119,10 @@ function tickAlong(
   context.strokeStyle = palette.inkSoft;
   context.lineWidth = 1;
   line(context, foot, { x: foot.x + way.x * reach, y: foot.y + way.y * reach });
-  if (label) write(context, label, { x: foot.x + way.x * LABEL, y: foot.y + way.y * LABEL }, palette);
+  if (!label) return;
+  context.textAlign = way.x < -STEEP ? 'right' : way.x > STEEP ? 'left' : 'center';
+  const far = context.textAlign === 'center' ? LABEL : LARGE + 4;
+  write(context, label, { x: foot.x + way.x * far, y: foot.y + way.y * far }, palette);
 }
 
 function line(context: Context, a: ScreenPoint, b: ScreenPoint): void {

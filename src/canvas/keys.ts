@@ -10,6 +10,7 @@ const ZOOM = 1.25;
 export interface KeyHandlers {
   onKeyDown(event: KeyboardEvent): void;
   onKeyUp(event: KeyboardEvent): void;
+  onBlur(): void;
 }
 
 export function keysOf(ground: Ground, gestures: Gestures, facing: Facing): KeyHandlers {
@@ -18,6 +19,9 @@ export function keysOf(ground: Ground, gestures: Gestures, facing: Facing): KeyH
       if (event.ctrlKey || event.metaKey || event.altKey) return;
       if (event.key === ' ') gestures.space.current = true;
       if (event.key === ' ' || act(ground, gestures, facing, event)) event.preventDefault();
+    },
+    onBlur: () => {
+      gestures.space.current = false;
     },
     onKeyUp: (event) => {
       if (event.key === ' ') gestures.space.current = false;
