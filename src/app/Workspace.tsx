@@ -15,7 +15,7 @@ interface WorkspaceProps {
 }
 
 const COLUMN = { least: 260, usual: innerWidth < 1200 ? 312 : 348 };
-const LEDGER = { least: 96, usual: innerHeight < 820 ? 184 : 244 };
+const LEDGER = { least: 96, usual: innerHeight < 820 ? 160 : 208 };
 
 export function Workspace({ store, editor, palette }: WorkspaceProps) {
   const [column, setColumn] = useState(COLUMN.usual);

@@ -2,9 +2,9 @@
 import { createRoot } from 'react-dom/client';
 import { App } from './App.tsx';
 import { ErrorBoundary } from './ErrorBoundary.tsx';
-import { openKeep } from './keep.ts';
 import { listenForKeys } from './keyboard.ts';
 import { firstOpening } from './openings.ts';
+import { openKeep } from './openKeep.ts';
 import { settingsFrom } from './settings.ts';
 import { Store } from './store.ts';
 import './base.css';
@@ -34,10 +34,13 @@ createRoot(document.getElementById('root')!).render(
   </ErrorBoundary>,
 );
 
-/** A page that is hidden may never be shown again; where nothing lasts, leaving is asked about. */
+/** A page that goes takes in what is still being typed; where nothing lasts, leaving is asked about. */
 function keepOnLeaving({ session, keepNow }: Store): void {
   document.addEventListener('visibilitychange', () => {
     if (document.visibilityState === 'hidden') keepNow();
+  });
+  addEventListener('pagehide', () => {
+    if (document.activeElement instanceof HTMLElement) document.activeElement.blur();
   });
   addEventListener('beforeunload', (event) => {
     if (!keep.lasting && session.getState().undoLabel) event.preventDefault();

@@ -2,7 +2,7 @@ import { expect, test } from 'vitest';
 import { COMMANDS } from '../../src/app/commands.ts';
 import { dropKind } from '../../src/app/drops.ts';
 import { fileName } from '../../src/app/files.ts';
-import { openKeep } from '../../src/app/keep.ts';
+import { openKeep } from '../../src/app/openKeep.ts';
 import { DEFAULTS } from '../../src/app/settings.ts';
 import { FIRST_VIEW, Store } from '../../src/app/store.ts';
 import { isDark, propertyName } from '../../src/app/theme.ts';
