@@ -2,7 +2,7 @@
 import type { Craft } from '../craft/craft.ts';
 import type { Assessment } from '../report/assessment.ts';
 import { hazardsOf } from '../report/hazards.ts';
-import { marginText, rowText } from '../report/rowText.ts';
+import { rowText } from '../report/rowText.ts';
 import type { Verdict } from '../report/verdict.ts';
 import type { UnitSystem } from '../units/units.ts';
 import { beamTable } from './beamTable.ts';
@@ -31,9 +31,9 @@ const bullet = (sentence: string): string[] =>
   wrapped(sentence, 4).map((line, i) => (i === 0 ? `  - ${line.slice(4)}` : line));
 
 function verdictLines(verdict: Verdict, units: UnitSystem): string[] {
-  const { state, title, word, row, target, margin } = verdict;
+  const { state, title, word, row, target, marginWords } = verdict;
   const cells = [left(state, 8), left(title, 20), left(word, 16), rowText(row, units)];
-  const by = margin === null ? '' : `: ${marginText(margin, row.quantity, units)}`;
+  const by = marginWords && `: ${marginWords}`;
   return [oneLine(`  ${cells.join('')}`), ...wrapped(`wanted ${target}${by}`, 10), ...reason(verdict)];
 }
 

@@ -1,6 +1,6 @@
 /** The one sentence, and the five verdicts, each opening into its working. */
 import { type KeyboardEvent, useId, useState } from 'react';
-import { marginText, rowText } from '../report/rowText.ts';
+import { rowText } from '../report/rowText.ts';
 import type { Verdict } from '../report/verdict.ts';
 import type { UnitSystem } from '../units/units.ts';
 import { useEditor } from './editor.ts';
@@ -32,7 +32,7 @@ export function Verdicts() {
 const STATE_WORDS: Readonly<Record<Verdict['state'], string>> = {
   met: 'meets its target',
   missed: 'misses its target',
-  open: 'cannot be told',
+  open: 'is open',
 };
 
 function VerdictCard({ verdict, units }: { verdict: Verdict; units: UnitSystem }) {
@@ -57,7 +57,7 @@ function VerdictCard({ verdict, units }: { verdict: Verdict; units: UnitSystem }
         <span className="verdict-title">{verdict.title}</span>
         <span className="verdict-word">{verdict.word}</span>
         <span className="verdict-number number">{rowText(row, units)}</span>
-        <span className="verdict-margin">{marginText(verdict.margin, row.quantity, units)}</span>
+        <span className="verdict-margin">{verdict.marginWords}</span>
         <span className="verdict-state">{STATE_WORDS[state]}</span>
       </button>
       <div id={id} className="verdict-working" hidden={!open}>

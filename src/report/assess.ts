@@ -54,6 +54,7 @@ function assessState(state: CraftState, units: UnitSystem): Assessment {
     ...verdict,
     row: readRow(verdict.row),
     target: read(verdict.target),
+    marginWords: read(verdict.marginWords),
     working: { ...verdict.working, inputs: verdict.working.inputs.map(readRow) },
   });
   return {

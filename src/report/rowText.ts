@@ -29,11 +29,3 @@ function uncertainText(value: number, uncertainty: number, quantity: Quantity, u
   if (unit.symbol === '°') return `${number}° ± ${spread}°`;
   return `${number} ± ${spread} ${unit.symbol}`.trimEnd();
 }
-
-/** "inside by 1.2°", "outside by 0.4°", "on the limit"; empty where there is no margin. */
-export function marginText(margin: number | null, quantity: Quantity, units: UnitSystem): string {
-  if (margin === null) return '';
-  const size = formatQuantity(Math.abs(margin), quantity, units);
-  if (size === formatQuantity(0, quantity, units)) return 'on the limit';
-  return margin < 0 ? `outside by ${size}` : `inside by ${size}`;
-}

@@ -18,6 +18,8 @@ export interface Verdict {
   readonly target: string;
   /** How far inside (+) or outside (−) the target, in the row's quantity; null where there is no such number. */
   readonly margin: number | null;
+  /** The margin in words: "256 mm to spare", "off by 13.8°"; empty where there is none. */
+  readonly marginWords: string;
   readonly working: Working;
 }
 

@@ -3,6 +3,7 @@ import { leadHardpoint } from '../craft/craft.ts';
 import type { Targets } from '../craft/schema.ts';
 import type { CraftState } from '../physics/craftState.ts';
 import { say } from '../units/sentence.ts';
+import type { Quantity } from '../units/units.ts';
 import type { Row } from './row.ts';
 import type { Rows } from './rows.ts';
 import type { Verdict } from './verdict.ts';
@@ -23,6 +24,12 @@ export const meetsTargets = (verdicts: readonly Verdict[]): boolean =>
   verdicts.every(({ key, state }) => key === 'lead' || state === 'met');
 
 const inputs = (rows: Rows, ...keys: string[]): Row[] => keys.flatMap((key) => rows[key] ?? []);
+/** To spare, off by, or just on the limit. */
+function marginWords(margin: number | null, quantity: Quantity): string {
+  if (margin === null) return '';
+  return margin < 0 ? `off by ${say(-margin, quantity)}` : `${say(margin, quantity)} to spare`;
+}
+
 const stateOf = (margin: number | null): Verdict['state'] =>
   margin === null ? 'open' : margin >= 0 ? 'met' : 'missed';
 
@@ -39,6 +46,7 @@ function floats({ heaviness: { least, most } }: Targets, rows: Rows): Verdict {
     row,
     target: `${say(least, 'mass')} to ${say(most, 'mass')}`,
     margin,
+    marginWords: marginWords(margin, row.quantity),
     working: {
       formula: 'heaviness = solid mass − (air density − gas density) × gas volume',
       inputs: inputs(rows, 'mass.solid', 'air.density', 'gas.density', 'hull.volume', 'lift.gross'),
@@ -59,6 +67,7 @@ function level({ pitchTolerance }: Targets, rows: Rows): Verdict {
     row,
     target: `within ±${say(pitchTolerance, 'angle')}`,
     margin,
+    marginWords: marginWords(margin, row.quantity),
     working: {
       formula: 'pitch = atan2(CG station − CB station, CB height − CG height), + nose-up',
       inputs: inputs(rows, 'cg.station', 'hull.cbStation', 'cg.height', 'float.pitch'),
@@ -80,6 +89,7 @@ function upright({ leastPendulumDepth }: Targets, rows: Rows): Verdict {
     row,
     target: `at least ${say(leastPendulumDepth, 'smallLength')}`,
     margin,
+    marginWords: marginWords(margin, row.quantity),
     working: {
       formula: 'pendulum depth = CB height − CG height; righting moment = solid mass × g × depth',
       inputs: inputs(rows, 'cg.height', 'mass.solid', 'float.rightingMoment', 'float.swingPeriod'),
@@ -100,6 +110,7 @@ function even({ heelTolerance }: Targets, rows: Rows): Verdict {
     row,
     target: `within ±${say(heelTolerance, 'angle')}`,
     margin,
+    marginWords: marginWords(margin, row.quantity),
     working: {
       formula: 'heel = atan2(CG side, CB height − CG height), + starboard down',
       inputs: inputs(rows, 'cg.side', 'cg.height', 'float.heel'),
@@ -107,6 +118,13 @@ function even({ heelTolerance }: Targets, rows: Rows): Verdict {
     },
   };
 }
+
+const liftWords = (heavinessAfter: number | null): string => {
+  if (heavinessAfter === null) return '';
+  return heavinessAfter > 0
+    ? `${say(heavinessAfter, 'mass')} more than the lift left`
+    : `leaves ${say(-heavinessAfter, 'mass')} of lift`;
+};
 
 function lead({ craft }: CraftState, rows: Rows): Verdict {
   const exact = rows['lead.mass']!;
@@ -116,12 +134,13 @@ function lead({ craft }: CraftState, rows: Rows): Verdict {
   const impossible = exact.status !== 'solved' && !none;
   return {
     key: 'lead',
-    title: `Lead on ${leadHardpoint(craft).name.toLowerCase() || 'the hardpoint'}`,
+    title: `Lead on the ${leadHardpoint(craft).name.toLowerCase() || 'hardpoint'}`,
     state: none ? 'met' : impossible ? 'missed' : 'open',
     word: none ? 'none needed' : impossible ? 'does not do it' : 'levels it',
     row: exact,
     target: 'within the lift left',
     margin: after.value === null ? null : -after.value,
+    marginWords: liftWords(after.value),
     working: {
       formula:
         'lead = moment to cancel ÷ arm = solid mass × (CG station − CB station) ÷ (CB station − lead station)',

@@ -1,6 +1,6 @@
 import { expect, test } from 'vitest';
 import type { Row } from '../../src/report/row.ts';
-import { marginText, rowText } from '../../src/report/rowText.ts';
+import { rowText } from '../../src/report/rowText.ts';
 
 const ROW: Row = { label: 'Lead', quantity: 'mass', value: 0.157117, unit: 'kg', status: 'solved', why: '' };
 
@@ -22,11 +22,4 @@ test('an uncertainty that is only rounding of the arithmetic is not shown', () =
 
 test('no value is a word, not a number', () => {
   expect(rowText({ ...ROW, value: null, status: 'infeasible' }, 'metric')).toBe('none');
-});
-
-test('a margin says which side of the target it is on', () => {
-  expect(marginText(0.0123, 'mass', 'metric')).toBe('inside by 12.3 g');
-  expect(marginText(-0.0123, 'mass', 'metric')).toBe('outside by 12.3 g');
-  expect(marginText(1e-9, 'mass', 'metric')).toBe('on the limit');
-  expect(marginText(null, 'mass', 'metric')).toBe('');
 });

@@ -64,6 +64,9 @@ test('leaded and loaded it meets its targets', () => {
 
 test('margins: inside positive, outside negative, zero on the edge', () => {
   const level = verdict(workedExample(), 'level');
+  expect(level.marginWords).toBe('off by 51.9°');
+  expect(verdict(workedExample(), 'even').marginWords).toBe('2.0° to spare');
+  expect(verdict(workedExample(), 'lead').marginWords).toBe('leaves 567.2 g of lift');
   expect(level.margin).toBeCloseTo(workedExample().targets.pitchTolerance - Math.abs(level.row.value!), 12);
   const edge: Craft = {
     ...trimmed(),
