@@ -128,7 +128,7 @@ test('each verdict is a word, a number and a margin, and its state is said in wo
     expect(text).toContain(word);
     expect(text).toContain({ met: 'meets', missed: 'misses', open: 'is open' }[state]);
   }
-  expect(text).toMatch(/(inside|outside)/);
+  expect(text).toMatch(/(to spare|off by)/);
 });
 
 test('every figure of the report stands in the figures panel once', () => {
