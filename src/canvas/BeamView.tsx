@@ -47,7 +47,18 @@ function BeamFrame(props: SharedProps & DrawnProps) {
   );
   const beam = useMemo(() => beamOf(geometry.beam, geometry.lead), [geometry.beam, geometry.lead]);
   const page = layBeam(beam, view);
-  const scene = { craft, assessment, units, palette, view, geometry, figures: [], lines: [], hardpoints: [] };
+  const scene = {
+    craft,
+    assessment,
+    units,
+    palette,
+    view,
+    geometry,
+    figures: [],
+    lines: [],
+    hardpoints: [],
+    support: null,
+  };
   const ground = useGround(session, scene, useOverlay(), viewState);
 
   const under = ({ x, y, touch }: Hand) => (onBeam(y, size) ? barAt(page, x, touch ? TOUCH_SLOP : 0) : null);

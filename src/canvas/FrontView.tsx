@@ -72,6 +72,7 @@ function FrontFrame(props: CanvasProps & DrawnProps) {
     ...{ craft, assessment, units, palette, view, geometry },
     lines: wireLines(geometry.wires, fromAstern),
     hardpoints: hardpointPoints(geometry, fromAstern),
+    support: null,
   };
   const ground = useGround(session, scene, overlays, viewState);
   const { height, breadth } = geometry.hull;

@@ -34,6 +34,7 @@ export function useSideScene(props: DrawnProps, view: View, { moving }: Overlay)
     moving: figures.filter(isMoving),
     lines: [...stillLines, ...movingLines],
     hardpoints: hardpointPoints(geometry, fromSide),
+    support: geometry.support && fromSide(geometry.support),
   };
 }
 

@@ -10,6 +10,7 @@ export type Grip =
   | { readonly kind: 'wire'; readonly id: string }
   | { readonly kind: 'wireEnd'; readonly id: string; readonly side: 'from' | 'to' }
   | { readonly kind: 'hardpoint'; readonly id: string }
+  | { readonly kind: 'support' }
   | { readonly kind: 'hull'; readonly end: 'tail' | 'waist' };
 
 /** Parts, wire runs and hardpoints each have ids of their own; the key tells them apart. */
@@ -25,6 +26,8 @@ export interface Reachable {
   readonly figures: readonly Figure[];
   readonly lines: readonly Line[];
   readonly hardpoints: readonly { readonly id: string; readonly at: PlanePoint }[];
+  /** Where the view shows the support point; null where it does not. */
+  readonly support: PlanePoint | null;
   /** Wire runs whose ends can be taken. */
   readonly selectedWires: readonly string[];
 }
@@ -50,6 +53,7 @@ export function gripAt(things: Reachable, point: PlanePoint, scale: number, slop
     wireEndAt(things, point, (slop + 4) / scale) ??
     partAt(things, point, near) ??
     hardpointAt(things, point, near) ??
+    supportAt(things, point, near) ??
     handleAt(things, point, scale) ??
     wireAt(things, point, near)
   );
@@ -64,6 +68,9 @@ const hardpointAt = ({ hardpoints }: Reachable, point: PlanePoint, near: number)
   const id = pointAt(hardpoints, point, Math.max(near, 0));
   return id === null ? null : { kind: 'hardpoint', id };
 };
+
+const supportAt = ({ support }: Reachable, point: PlanePoint, near: number): Grip | null =>
+  support && pointAt([{ id: 'support', at: support }], point, near) ? { kind: 'support' } : null;
 
 const wireAt = ({ lines }: Reachable, point: PlanePoint, near: number): Grip | null => {
   const id = lineAt(lines, point, near);

@@ -5,7 +5,7 @@ import type { Flatten } from './flatten.ts';
 import { type Grip, handlesOf, wireEnds } from './grip.ts';
 import { type Geometry, geometryOf, rowValue, type Subject, type UnitSystem } from './subject.ts';
 import type { PlanePoint } from './view.ts';
-import { floatWords, heelWords, momentWords } from './words.ts';
+import { floatWords, heelWords, momentWords, pitchWords } from './words.ts';
 
 export interface Readout {
   readonly at: PlanePoint;
@@ -34,6 +34,8 @@ function aboutHeld(
       return aboutPart(subject, geometry, held.id, held.copy, flatten);
     case 'hardpoint':
       return aboutHardpoint(subject, geometry, held.id, flatten);
+    case 'support':
+      return aboutSupport(subject, geometry, flatten);
     case 'wire':
       return null;
     case 'wireEnd':
@@ -83,6 +85,17 @@ function aboutHardpoint(
   const lead = craft.leadAt === id ? rowValue(assessment, 'lead.mass') : null;
   const leadWords = lead === null ? [] : [`${formatQuantity(lead, 'mass', units)} of lead here levels it`];
   return { at: flatten(at), lines: [...whereWords(units, hull, hardpoint.place, at[0]), ...leadWords] };
+}
+
+function aboutSupport(
+  { craft, units, assessment }: Subject,
+  { hull, support }: Geometry,
+  flatten: Flatten,
+): Readout | null {
+  if (!support || !craft.support) return null;
+  const pitch = rowValue(assessment, 'support.pitch');
+  const held = pitch === null ? [] : [`held here: ${pitchWords(pitch, units)}`];
+  return { at: flatten(support), lines: [...whereWords(units, hull, craft.support, support[0]), ...held] };
 }
 
 function aboutWire(

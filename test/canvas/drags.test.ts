@@ -162,3 +162,13 @@ test('in the front view what sits on the axis stays and says why', () => {
   expect(ground.overlay().hint).toContain('motor sits on the hull axis');
   expect(placeOf(ground, 'motor')).toEqual({ kind: 'axis', station: 2 });
 });
+
+test('the support point is dragged in its kind of place, in one step', () => {
+  const ground = sideGround({ ...craft(), support: { kind: 'keel', station: 2.2, drop: 0.2 } });
+  const at = ground.scene().support!;
+  const gesture = takeInSide(ground, ground.at(at));
+  gesture.move(ground.at(by(at, -0.4), { alt: true }));
+  gesture.end(ground.at(by(at, -0.4)), true);
+  expect(ground.craft().support).toEqual({ kind: 'keel', station: 1.8, drop: 0.2 });
+  expect(ground.session.getState().undoLabel).toBe('Move the support point');
+});

@@ -34,6 +34,7 @@ function groundOf(start: Craft, flatten: Flatten, make: FigureMaker, first: View
       figures: new FigureCache(make).figures(craft, drawn, 1 / view.scale),
       lines: wireLines(drawn.wires, flatten),
       hardpoints: hardpointPoints(drawn, flatten),
+      support: flatten === fromSide && drawn.support ? fromSide(drawn.support) : null,
     };
   };
   return {

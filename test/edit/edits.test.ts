@@ -120,6 +120,9 @@ test('hardpoints come, change and go; the lead always has one', () => {
 test('the support point is set and taken away', () => {
   const set = testEdit(craft, hardpoints.setSupport({ kind: 'keel', station: 1.4, drop: 0.1 }));
   expect(set.support).toEqual({ kind: 'keel', station: 1.4, drop: 0.1 });
+  const placed = step('Move', hardpoints.placeSupport({ kind: 'keel', station: 1.5, drop: 0.1 }));
+  expect(testEdit(set, placed).support).toEqual({ kind: 'keel', station: 1.5, drop: 0.1 });
+  expect(testEdit(craft, placed)).toBe(craft);
   expect(testEdit(set, hardpoints.setSupport(null)).support).toBeNull();
 });
 

@@ -23,6 +23,7 @@ const things = (selectedWires: string[] = []): Reachable => ({
   figures,
   lines,
   hardpoints: hardpointPoints(drawn, fromSide),
+  support: { u: 2.4, z: -0.7 },
   selectedWires,
 });
 const middleOf = (id: string) => figures.find(({ part }) => part === id)!.middle;
@@ -35,6 +36,7 @@ test('each thing can be taken where it is drawn', () => {
   expect(at(handlesOf(drawn, SCALE).waist)).toEqual({ kind: 'hull', end: 'waist' });
   const along = lines[0]!.at.find(({ u }) => u > 2 && u < 2.2)!;
   expect(at(along)).toEqual({ kind: 'wire', id: 'power' });
+  expect(at({ u: 2.4, z: -0.69 })).toEqual({ kind: 'support' });
   expect(at({ u: 1.2, z: 0.2 })).toBeNull();
 });
 

@@ -34,6 +34,8 @@ export interface Scene extends Subject {
   readonly figures: readonly Figure[];
   readonly lines: readonly Line[];
   readonly hardpoints: readonly { readonly id: string; readonly at: PlanePoint }[];
+  /** Where the view shows the support point; null where it does not. */
+  readonly support: PlanePoint | null;
 }
 
 /** What gestures work on. */

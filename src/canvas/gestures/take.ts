@@ -9,6 +9,7 @@ import { dragHullDiameter } from './dragHullDiameter.ts';
 import { dragHullLength } from './dragHullLength.ts';
 import { dragHardpointInFront, dragPartInFront } from './dragInFront.ts';
 import { dragPart } from './dragPart.ts';
+import { dragSupport } from './dragSupport.ts';
 import { dragWireEnd } from './dragWireEnd.ts';
 import type { Gesture, Ground, Hand } from './gesture.ts';
 import { pan } from './pan.ts';
@@ -46,6 +47,8 @@ export const takeInSide: Take = (ground, hand) => {
       return dragPart(ground, hand, grip);
     case 'hardpoint':
       return dragHardpoint(ground, hand, grip);
+    case 'support':
+      return dragSupport(ground, hand);
     case 'wire':
       return onWire(ground, hand, grip.id);
     case 'wireEnd':

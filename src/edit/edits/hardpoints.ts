@@ -46,6 +46,13 @@ export const setLeadAt = (id: string): Edit =>
     craft.leadAt = id;
   });
 
+/** Moves the support point. For drags: pass the recipe to `Drag.move`. */
+export const placeSupport =
+  (place: Place): Recipe =>
+  (craft) => {
+    if (craft.support) craft.support = placed(craft.support, place);
+  };
+
 export const setSupport = (support: Place | null): Edit =>
   runOf('support', support ? 'Set the support point' : 'Remove the support point', (craft) => {
     craft.support = support;
