@@ -2,26 +2,37 @@
 import { type Browser, type BrowserContextOptions, chromium, type Page } from 'playwright-core';
 import { test as base, expect, inject } from 'vitest';
 
-export type Visit = (options?: BrowserContextOptions) => Promise<Page>;
+/** `prepare` runs in the page before anything of it does. */
+export type Visit = (options?: BrowserContextOptions, prepare?: () => void) => Promise<Page>;
 
 const LAPTOP = { width: 1440, height: 900 };
 
 interface Fixtures {
+  /** Requests beyond this machine and errors in the page so far; none may be left at the end. */
+  faults: string[];
   /** Opens the page in a context of its own, as a first visit. */
   visit: Visit;
 }
 
 export const test = base.extend<Fixtures>({
-  visit: async ({ task: _ }, use) => {
-    const browser = await chromium.connect(inject('browser'));
+  faults: async ({ task: _ }, use) => {
     const faults: string[] = [];
-    await use((options = {}) => firstVisit(browser, options, faults));
-    await browser.close();
+    await use(faults);
     expect(faults).toEqual([]);
+  },
+  visit: async ({ faults }, use) => {
+    const browser = await chromium.connect(inject('browser'));
+    await use((options = {}, prepare = () => {}) => firstVisit(browser, options, prepare, faults));
+    await browser.close();
   },
 });
 
-async function firstVisit(browser: Browser, options: BrowserContextOptions, faults: string[]): Promise<Page> {
+async function firstVisit(
+  browser: Browser,
+  options: BrowserContextOptions,
+  prepare: () => void,
+  faults: string[],
+): Promise<Page> {
   const context = await browser.newContext({ viewport: LAPTOP, serviceWorkers: 'block', ...options });
   context.on('request', (request) => {
     const { protocol, hostname } = new URL(request.url());
@@ -31,6 +42,7 @@ async function firstVisit(browser: Browser, options: BrowserContextOptions, faul
   context.on('console', (message) => {
     if (message.type() === 'error') faults.push(message.text());
   });
+  await context.addInitScript(prepare);
   const page = await context.newPage();
   await open(page);
   return page;
