@@ -18,7 +18,7 @@ interface WorkspaceProps {
 const COLUMN = { least: 260, usual: innerWidth < 1200 ? 320 : 348 };
 const LEDGER = {
   least: 96,
-  usual: Math.round(innerHeight * (matchMedia('(pointer: coarse)').matches ? 0.29 : 0.23)),
+  usual: Math.round(innerHeight * (matchMedia('(pointer: coarse)').matches ? 0.25 : 0.23)),
 };
 
 export function Workspace({ store, editor, palette }: WorkspaceProps) {

@@ -24,7 +24,7 @@ export function Ledger() {
   return (
     <section className="ledger" aria-label="Ledger">
       <div className="ledger-frame">
-        <Tabs<TabId> label="Ledger" tabs={tabs} front={front} onFront={setFront}>
+        <Tabs<TabId> label="Ledger" body="ledger-body" tabs={tabs} front={front} onFront={setFront}>
           {front === 'parts' && <PartTable onDialog={setDialog} />}
           {front === 'wires' && <WireTable />}
           {front === 'hardpoints' && <HardpointTable />}

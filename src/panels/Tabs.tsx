@@ -11,10 +11,15 @@ export interface TabsProps<T extends string> {
   readonly tabs: readonly Tab<T>[];
   readonly front: T;
   onFront(id: T): void;
+  /** Class of what stands under the tabs. */
+  readonly body: string;
+  /** Whether that scrolls and holds text to read, so that the keys must reach it. */
+  readonly focusable?: boolean;
   readonly children: ReactNode;
 }
 
-export function Tabs<T extends string>({ label, tabs, front, onFront, children }: TabsProps<T>) {
+export function Tabs<T extends string>(props: TabsProps<T>) {
+  const { label, tabs, front, onFront, body, focusable, children } = props;
   const base = useId();
   const onKeyDown = (event: KeyboardEvent) => {
     const next = tabFrom(tabs, front, event.key);
@@ -42,7 +47,13 @@ export function Tabs<T extends string>({ label, tabs, front, onFront, children }
           </button>
         ))}
       </div>
-      <div className="ledger-body" role="tabpanel" id={`${base}-panel`} aria-labelledby={`${base}-${front}`}>
+      <div
+        className={body}
+        role="tabpanel"
+        id={`${base}-panel`}
+        aria-labelledby={`${base}-${front}`}
+        tabIndex={focusable ? 0 : undefined}
+      >
         {children}
       </div>
     </>
