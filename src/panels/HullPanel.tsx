@@ -2,6 +2,7 @@
 import type { HullSpec } from '../craft/hullSchema.ts';
 import { chooseShape, setHull } from '../edit/edits/craft.ts';
 import { shapeAs } from '../edit/shapeAs.ts';
+import { keelOutline } from '../report/outline.ts';
 import { useCommit } from './commit.ts';
 import { useEditor } from './editor.ts';
 import { ChoiceField } from './fields/ChoiceField.tsx';
@@ -33,13 +34,14 @@ export function HullPanel() {
   const commit = useCommit();
   const { shape, seams, patches } = craft.hull;
   const { geometry, rows } = assessment;
+  const outline = geometry.status === 'solved' ? keelOutline(geometry.hull) : null;
   return (
     <section className="panel" aria-label="Hull">
       <ChoiceField
         label="Shape"
         value={shape.kind}
         choices={SHAPE_CHOICES}
-        onCommit={(kind) => commit(chooseShape(shapeAs(kind, shape)))}
+        onCommit={(kind) => commit(chooseShape(shapeAs(kind, shape, outline)))}
       />
       <ShapeFields shape={shape} />
       {hasRows(shape) && <RowsTable shape={shape} />}

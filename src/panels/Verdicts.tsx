@@ -73,7 +73,7 @@ function WorkingText({ verdict: { row, target, working }, units }: { verdict: Ve
       <p>
         <strong>Wanted:</strong> {target}.
       </p>
-      {row.why && <p>{row.why}</p>}
+      {row.status !== 'solved' && <p>{row.why}</p>}
       <p className="formula">{working.formula}</p>
       <RowList rows={working.inputs} units={units} />
       <p className="source">
