@@ -57,7 +57,6 @@ test('weighed: mass, tolerance and source together', () => {
 });
 
 test('parts are put in another order', () => {
-  expect(testEdit(craft, parts.reorderPart('lights', 0)).parts.order[0]).toBe('lights');
   const order = [...craft.parts.order].reverse();
   expect(testEdit(craft, parts.sortParts(order)).parts.order).toEqual(order);
 });
@@ -76,9 +75,9 @@ test('a place out of all bounds is brought back in, a clock angle into one turn'
   expect(up.parts.byId.battery!.place).toEqual({ kind: 'keel', station: 1, drop: 0 });
 });
 
-test('nudged along the hull, each in its kind of place; locked ones stay', () => {
+test('shifted along the hull, each in its kind of place; locked ones stay', () => {
   const locked = testEdit(craft, parts.setParts(['thruster'], 'Lock', { locked: true }));
-  const result = testEdit(locked, parts.nudgeParts(['thruster', 'battery', 'lights'], 0.001));
+  const result = testEdit(locked, step('Shift', parts.shiftParts(['thruster', 'battery', 'lights'], 0.001)));
   expect(result.parts.byId.thruster!.place).toEqual({ kind: 'axis', station: 2.97 });
   expect(result.parts.byId.battery!.place).toEqual({ kind: 'keel', station: 1.301, drop: 0.03 });
   expect(result.parts.byId.lights!.place).toEqual({ kind: 'free', x: 1.201, y: 0.3, z: -0.3 });
@@ -113,8 +112,6 @@ test('hardpoints come, change and go; the lead always has one', () => {
     step('Move', hardpoints.placeHardpoint('nose', { kind: 'axis', station: 0.1 })),
   );
   expect(moved.hardpoints.byId.nose!.place).toEqual({ kind: 'axis', station: 0.1 });
-  const nudged = testEdit(craft, hardpoints.nudgeHardpoints(['nose', 'chin'], 0.01));
-  expect(nudged.hardpoints.byId.chin!.place).toEqual({ kind: 'keel', station: 0.61, drop: 0 });
 });
 
 test('the support point is set and taken away', () => {

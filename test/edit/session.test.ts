@@ -2,10 +2,10 @@ import fc from 'fast-check';
 import { expect, test } from 'vitest';
 import { parse } from '../../src/craft/parse.ts';
 import { serialize } from '../../src/craft/serialize.ts';
-import { type Edit, step } from '../../src/edit/edit.ts';
+import { type Edit, runOf, step } from '../../src/edit/edit.ts';
 import { setGas, setName, setShape } from '../../src/edit/edits/craft.ts';
 import { addHardpoint, removeHardpoints, setLeadAt } from '../../src/edit/edits/hardpoints.ts';
-import { duplicateParts, nudgeParts, placePart, removeParts, setPart } from '../../src/edit/edits/parts.ts';
+import { duplicateParts, placePart, removeParts, setPart, shiftParts } from '../../src/edit/edits/parts.ts';
 import { removeWires } from '../../src/edit/edits/wires.ts';
 import { Session } from '../../src/edit/session.ts';
 import { fixtureCraft } from './craftFixture.ts';
@@ -14,6 +14,7 @@ const station = (session: Session) => {
   const { place } = session.getState().craft.parts.byId.battery!;
   return place.kind === 'keel' ? place.station : Number.NaN;
 };
+const nudge = (id: string, by: number) => runOf(`nudge ${id}`, 'Nudge part', shiftParts([id], by));
 const toStation = (at: number) => placePart('battery', { kind: 'keel', station: at, drop: 0.03 });
 
 test('a drag is one step: each move starts from the start, release enters history once', () => {
@@ -69,9 +70,9 @@ test('undo in the middle of a drag drops the drag first', () => {
 
 test('a run of nudges is one step; choosing something ends the run', () => {
   const session = new Session(fixtureCraft());
-  for (let i = 0; i < 5; i++) session.apply(nudgeParts(['battery'], 0.001));
+  for (let i = 0; i < 5; i++) session.apply(nudge('battery', 0.001));
   session.select([{ kind: 'part', id: 'fins' }]);
-  session.apply(nudgeParts(['battery'], 0.001));
+  session.apply(nudge('battery', 0.001));
   expect(station(session)).toBeCloseTo(1.306, 12);
   session.undo();
   expect(station(session)).toBeCloseTo(1.305, 12);
@@ -116,7 +117,7 @@ const anyEdit: fc.Arbitrary<Edit> = fc.oneof(
   fc.constantFrom('thruster', 'battery', 'fins', 'lights').map((id) => removeParts([id])),
   fc.constantFrom('thruster', 'battery', 'fins', 'lights').map((id) => duplicateParts([id])),
   fc.double({ min: 0, max: 2, noNaN: true }).map((mass) => setPart('fins', 'mass', { mass })),
-  fc.double({ min: -0.01, max: 0.01, noNaN: true }).map((by) => nudgeParts(['lights'], by)),
+  fc.double({ min: -0.01, max: 0.01, noNaN: true }).map((by) => nudge('lights', by)),
   fc.string({ maxLength: 20 }).map(setName),
   fc
     .double({ min: 0.5, max: 6, noNaN: true })

@@ -3,7 +3,7 @@ import type { Place } from '../../craft/placeSchema.ts';
 import type { Hardpoint } from '../../craft/schema.ts';
 import { type Edit, type Recipe, runOf, step } from '../edit.ts';
 import { freeId } from '../ids.ts';
-import { placed, shifted } from '../place.ts';
+import { placed } from '../place.ts';
 
 export const addHardpoint = (name: string, place: Place): Edit =>
   step(`Add ${name || 'hardpoint'}`, (craft) => {
@@ -35,11 +35,6 @@ export const placeHardpoint =
     const hardpoint = craft.hardpoints.byId[id]!;
     hardpoint.place = placed(hardpoint.place, place);
   };
-
-export const nudgeHardpoints = (ids: readonly string[], by: number): Edit =>
-  runOf(`nudge ${ids.join(' ')}`, 'Nudge hardpoint', (craft) => {
-    for (const id of ids) placeHardpoint(id, shifted(craft.hardpoints.byId[id]!.place, by))(craft);
-  });
 
 export const setLeadAt = (id: string): Edit =>
   step('Choose hardpoint', (craft) => {

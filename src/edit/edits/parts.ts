@@ -68,13 +68,7 @@ export const markWeighed = (id: string, mass: number, massTolerance: number): Ed
     Object.assign(craft.parts.byId[id]!, { mass, massTolerance, massSource: 'weighed' });
   });
 
-/** Moves a part in the list. */
-export const reorderPart = (id: string, index: number): Edit =>
-  step('Reorder parts', (craft) => {
-    craft.parts.order = craft.parts.order.filter((each) => each !== id);
-    craft.parts.order.splice(index, 0, id);
-  });
-
+/** Puts the list in another order. */
 export const sortParts = (order: readonly string[]): Edit =>
   step('Sort parts', (craft) => {
     craft.parts.order = [...order];
@@ -97,10 +91,6 @@ export const shiftParts =
       if (!part.locked) part.place = placed(part.place, shifted(part.place, by));
     }
   };
-
-/** The arrow keys: `by` metres aft. */
-export const nudgeParts = (ids: readonly string[], by: number): Edit =>
-  runOf(`nudge ${ids.join(' ')}`, ids.length === 1 ? 'Nudge part' : 'Nudge parts', shiftParts(ids, by));
 
 /** Whether there is room for so many more parts. */
 export const hasRoom = (craft: Craft, more: number): boolean =>

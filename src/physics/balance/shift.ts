@@ -8,6 +8,3 @@
 
 /** How far a weight must move aft (+) or forward (−) to take out the moment `qx`, m. Null for a weight of nothing. */
 export const levellingShift = (qx: number, mass: number): number | null => (mass > 0 ? -qx / mass : null);
-
-/** How far the CG of everything moves when `mass` of `total` moves by `distance`, m. */
-export const cgShift = (mass: number, distance: number, total: number): number => (mass * distance) / total;

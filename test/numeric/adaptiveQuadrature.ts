@@ -5,8 +5,8 @@
  * Source: Kronrod 1965; strategy of Piessens, de Doncker-Kapenga, Überhuber & Kahaner, QUADPACK, 1983 (QAG). Nodes
  * and weights from there, from memory; the tests hold them to exactness at degree 22.
  */
-import { infeasible, type Outcome, solved } from './outcome.ts';
-import { gaussLegendre } from './quadrature.ts';
+import { infeasible, type Outcome, solved } from '../../src/numeric/outcome.ts';
+import { gaussLegendre } from '../../src/numeric/quadrature.ts';
 
 export interface Integral {
   readonly value: number;
