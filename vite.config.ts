@@ -33,7 +33,8 @@ export default defineConfig({
     reportCompressedSize: false,
     chunkSizeWarningLimit: 1000,
   },
-  preview: { host: '127.0.0.1', port: 4173 },
+  // A port of its own: the work is kept by address, and other programs are served on the usual one.
+  preview: { host: '127.0.0.1', port: 4793 },
   server: { host: '127.0.0.1' },
   test: {
     root: import.meta.dirname,

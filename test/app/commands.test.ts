@@ -3,6 +3,7 @@ import { COMMANDS } from '../../src/app/commands.ts';
 import { dropKind } from '../../src/app/drops.ts';
 import { fileName } from '../../src/app/files.ts';
 import { openKeep } from '../../src/app/openKeep.ts';
+import { firstSentence } from '../../src/app/samples.ts';
 import { DEFAULTS } from '../../src/app/settings.ts';
 import { FIRST_VIEW, Store } from '../../src/app/store.ts';
 import { isDark, propertyName } from '../../src/app/theme.ts';
@@ -112,4 +113,13 @@ test('the theme follows the system only when asked to', () => {
   expect(isDark('light', true)).toBe(false);
   expect(isDark('dark', false)).toBe(true);
   expect(propertyName('inkSoft')).toBe('--ink-soft');
+});
+
+test.each([
+  ['One. Two.', 'One.'],
+  ['A hull of 1.5 m, held up! More', 'A hull of 1.5 m, held up!'],
+  ['No end', 'No end'],
+  ['', ''],
+])('of the notes %j the samples list shows %j', (notes, sentence) => {
+  expect(firstSentence(notes)).toBe(sentence);
 });
