@@ -1,5 +1,5 @@
 /** A table of parts, wire runs or hardpoints: sort by head, pick rows, edit in place, all of it by keyboard too. */
-import { type KeyboardEvent, useCallback, useEffect, useRef, useState } from 'react';
+import { type CSSProperties, type KeyboardEvent, useCallback, useEffect, useRef, useState } from 'react';
 import { isSelected, type Selectable } from '../../edit/selection.ts';
 import { useCommit } from '../commit.ts';
 import { useEditor } from '../editor.ts';
@@ -28,7 +28,7 @@ export function Grid<R extends GridItem>({ label, kind, rows, columns, empty, on
   const commit = useCommit();
   const [sort, setSort] = useState<Sort | null>(null);
   const [focus, setFocus] = useState<CellAt | null>(null);
-  const table = useRef<HTMLTableElement>(null);
+  const table = useRef<HTMLDivElement>(null);
   const order = useOrder(sortedIds(rows, columns, sort), dragging);
   const shown = useRef(order);
   shown.current = order;
@@ -46,7 +46,7 @@ export function Grid<R extends GridItem>({ label, kind, rows, columns, empty, on
       : order[0] === undefined
         ? null
         : { id: order[0], key: columns[0]!.key };
-  const onKeyDown = (event: KeyboardEvent<HTMLTableElement>) => {
+  const onKeyDown = (event: KeyboardEvent<HTMLDivElement>) => {
     const at = cellOf(event.target);
     if (!at || event.altKey) return;
     const keys = { toggle: event.ctrlKey || event.metaKey, extend: event.shiftKey };
@@ -74,17 +74,17 @@ export function Grid<R extends GridItem>({ label, kind, rows, columns, empty, on
           </button>
         </p>
       )}
-      <table
+      <div
         className="grid"
-        // biome-ignore lint/a11y/noNoninteractiveElementToInteractiveRole: a table whose cells take the keys is a grid
         role="grid"
         aria-label={label}
         aria-multiselectable
+        style={{ '--columns': tracks(columns), minWidth: `${width(columns)}em` } as CSSProperties}
         ref={table}
         onKeyDown={onKeyDown}
       >
         <GridHead columns={columns} sort={sort} onSort={(key) => setSort(nextSort(sort, key))} />
-        <tbody>
+        <div role="rowgroup">
           {order.map((id) => (
             <GridRow
               key={id}
@@ -98,12 +98,19 @@ export function Grid<R extends GridItem>({ label, kind, rows, columns, empty, on
               onCellFocus={onCellFocus}
             />
           ))}
-        </tbody>
-      </table>
+        </div>
+      </div>
       {order.length === 0 && <p className="aside">{empty}</p>}
     </>
   );
 }
+
+/** Columns as CSS grid tracks: each at least its width, and wider in proportion where there is room. */
+const tracks = <R extends GridItem>(columns: readonly GridColumn<R>[]): string =>
+  columns.map(({ width }) => `minmax(${width}em, ${width}fr)`).join(' ');
+
+const width = <R extends GridItem>(columns: readonly GridColumn<R>[]): number =>
+  columns.reduce((sum, each) => sum + each.width, 0);
 
 /** While something is dragged rows keep their places, so that none jumps about under the eye. */
 function useOrder(ids: readonly string[], dragging: boolean): readonly string[] {
@@ -114,10 +121,7 @@ function useOrder(ids: readonly string[], dragging: boolean): readonly string[] 
 }
 
 /** What is picked in the drawing comes into view here. */
-function useSelectedInView(
-  table: { readonly current: HTMLTableElement | null },
-  kind: Selectable['kind'],
-): void {
+function useSelectedInView(table: { readonly current: HTMLElement | null }, kind: Selectable['kind']): void {
   const { selection } = useEditor();
   const last = selection.at(-1);
   const id = last?.kind === kind ? last.id : null;
@@ -133,5 +137,5 @@ function cellOf(target: EventTarget): CellAt | null {
   return cell === undefined || id === undefined ? null : { id, key: cell };
 }
 
-const focusCell = (table: HTMLTableElement | null, { id, key }: CellAt): void =>
+const focusCell = (table: HTMLElement | null, { id, key }: CellAt): void =>
   table?.querySelector<HTMLElement>(`[data-row="${id}"] > [data-cell="${key}"]`)?.focus();

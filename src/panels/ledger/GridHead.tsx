@@ -10,12 +10,12 @@ export interface GridHeadProps<R extends GridItem> {
 
 export function GridHead<R extends GridItem>({ columns, sort, onSort }: GridHeadProps<R>) {
   return (
-    <thead>
-      <tr>
+    <div role="rowgroup" className="grid-head">
+      <div role="row">
         {columns.map(({ key, title, numeric }) => (
-          <th
+          <div
             key={key}
-            scope="col"
+            role="columnheader"
             className={numeric ? 'number' : undefined}
             aria-sort={sort?.key === key ? (sort.descending ? 'descending' : 'ascending') : 'none'}
           >
@@ -23,9 +23,9 @@ export function GridHead<R extends GridItem>({ columns, sort, onSort }: GridHead
               {title}
               <span aria-hidden="true">{sort?.key === key ? (sort.descending ? ' ↓' : ' ↑') : ''}</span>
             </button>
-          </th>
+          </div>
         ))}
-      </tr>
-    </thead>
+      </div>
+    </div>
   );
 }

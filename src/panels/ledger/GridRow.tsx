@@ -31,7 +31,7 @@ function PlainGridRow<R extends GridItem>(props: GridRowProps<R>) {
     if (ready.current === key && !keys.toggle && !keys.extend) open(key);
     else props.onPick(row.id, keys);
   };
-  const onKeyDown = (event: KeyboardEvent<HTMLTableRowElement>) => {
+  const onKeyDown = (event: KeyboardEvent<HTMLDivElement>) => {
     if (event.key === 'Tab') return onTab(event);
     const key = cellAt(event.target);
     const startWith = openingText(event);
@@ -41,7 +41,8 @@ function PlainGridRow<R extends GridItem>(props: GridRowProps<R>) {
     open(key, startWith);
   };
   return (
-    <tr
+    <div
+      role="row"
       ref={line}
       data-row={row.id}
       aria-selected={selected}
@@ -52,7 +53,7 @@ function PlainGridRow<R extends GridItem>(props: GridRowProps<R>) {
       onKeyDown={onKeyDown}
     >
       {columns.map((column, index) => (
-        <td
+        <div
           key={column.key}
           role={index === 0 ? 'rowheader' : 'gridcell'}
           data-cell={column.key}
@@ -69,9 +70,9 @@ function PlainGridRow<R extends GridItem>(props: GridRowProps<R>) {
                 onLeave: (how) => leave(column.key, how),
               })
             : cellContent(column, row, units, () => open(column.key))}
-        </td>
+        </div>
       ))}
-    </tr>
+    </div>
   );
 }
 

@@ -23,6 +23,8 @@ export interface CellProps<R> {
 export interface GridColumn<R extends GridItem> {
   readonly key: string;
   readonly title: string;
+  /** em; all columns widen alike where there is room. */
+  readonly width: number;
   readonly numeric?: boolean;
   sortBy(row: R): string | number;
   text(row: R, units: UnitSystem): string;

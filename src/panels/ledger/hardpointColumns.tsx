@@ -18,6 +18,7 @@ export const HARDPOINT_GRID: readonly GridColumn<HardpointRow>[] = [
   {
     key: 'name',
     title: 'Name',
+    width: 17,
     sortBy: ({ hardpoint }) => hardpoint.name,
     text: ({ hardpoint }) => hardpoint.name,
     field: ({ row, commit, startWith, onLeave }) => (
@@ -35,12 +36,14 @@ export const HARDPOINT_GRID: readonly GridColumn<HardpointRow>[] = [
   {
     key: 'place',
     title: 'Place',
+    width: 9.5,
     sortBy: ({ hardpoint }) => PLACE_WORDS[hardpoint.place.kind],
     text: ({ hardpoint }) => PLACE_WORDS[hardpoint.place.kind],
   },
   {
     key: 'station',
     title: 'Station',
+    width: 7,
     numeric: true,
     sortBy: ({ hardpoint }) => stationOf(hardpoint.place),
     text: ({ hardpoint }, units) => formatQuantity(stationOf(hardpoint.place), 'length', units),
@@ -63,6 +66,7 @@ export const HARDPOINT_GRID: readonly GridColumn<HardpointRow>[] = [
   {
     key: 'lead',
     title: 'Lead',
+    width: 9,
     sortBy: ({ lead }) => (lead ? 0 : 1),
     text: () => 'Lead',
     press: {

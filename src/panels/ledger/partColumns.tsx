@@ -144,6 +144,7 @@ export const PART_GRID: readonly GridColumn<PartRow>[] = [
   {
     key: 'name',
     title: 'Name',
+    width: 17,
     sortBy: ({ part }) => part.name,
     text: ({ part }) => part.name,
     field: (cell) => <NameCell {...cell} />,
@@ -151,6 +152,7 @@ export const PART_GRID: readonly GridColumn<PartRow>[] = [
   {
     key: 'kind',
     title: 'Kind',
+    width: 8.5,
     sortBy: ({ part }) => PART_WORDS[part.kind],
     text: ({ part }) => PART_WORDS[part.kind],
     field: choiceCell<PartKind>(
@@ -163,6 +165,7 @@ export const PART_GRID: readonly GridColumn<PartRow>[] = [
   {
     key: 'mass',
     title: 'Mass',
+    width: 7,
     numeric: true,
     sortBy: ({ part }) => part.mass,
     text: ({ part }, units) => formatQuantity(part.mass, 'mass', units),
@@ -171,6 +174,7 @@ export const PART_GRID: readonly GridColumn<PartRow>[] = [
   {
     key: 'tolerance',
     title: '±',
+    width: 5.5,
     numeric: true,
     sortBy: ({ part }) => part.massTolerance,
     text: ({ part }, units) =>
@@ -180,6 +184,7 @@ export const PART_GRID: readonly GridColumn<PartRow>[] = [
   {
     key: 'source',
     title: 'Source',
+    width: 8,
     sortBy: ({ part }) => SOURCE_WORDS[part.massSource],
     text: ({ part }) => SOURCE_WORDS[part.massSource],
     field: choiceCell<MassSource>(
@@ -192,6 +197,7 @@ export const PART_GRID: readonly GridColumn<PartRow>[] = [
   {
     key: 'place',
     title: 'Place',
+    width: 9.5,
     sortBy: ({ part }) => PLACE_WORDS[part.place.kind],
     text: ({ part }) => PLACE_WORDS[part.place.kind],
     field: (cell) => <PlaceCell {...cell} />,
@@ -199,6 +205,7 @@ export const PART_GRID: readonly GridColumn<PartRow>[] = [
   {
     key: 'station',
     title: 'Station',
+    width: 7,
     numeric: true,
     sortBy: ({ part }) => stationOf(part.place),
     text: ({ part }, units) => formatQuantity(stationOf(part.place), 'length', units),
@@ -207,6 +214,7 @@ export const PART_GRID: readonly GridColumn<PartRow>[] = [
   {
     key: 'copies',
     title: 'Copies',
+    width: 6.5,
     sortBy: ({ part }) => copiesText(part.copies),
     text: ({ part }) => copiesText(part.copies),
     field: (cell) => <CopiesCell {...cell} />,
@@ -214,6 +222,7 @@ export const PART_GRID: readonly GridColumn<PartRow>[] = [
   {
     key: 'moment',
     title: 'Moment',
+    width: 8.5,
     numeric: true,
     sortBy: ({ moment }) => moment ?? 0,
     text: ({ moment }, units) => (moment === null ? '–' : formatQuantity(moment, 'momentMass', units)),
@@ -221,6 +230,7 @@ export const PART_GRID: readonly GridColumn<PartRow>[] = [
   {
     key: 'locked',
     title: 'Lock',
+    width: 5.5,
     sortBy: ({ part }) => (part.locked ? 0 : 1),
     text: () => 'Lock',
     press: {

@@ -50,6 +50,7 @@ const figure = (
 ): GridColumn<WireRow> => ({
   key,
   title,
+  width: 8,
   numeric: true,
   sortBy: (row) => row[key] ?? 0,
   text: (row, units) => shown(row[key], quantity, units),
@@ -58,6 +59,7 @@ const figure = (
 const words = (key: 'from' | 'to', title: string): GridColumn<WireRow> => ({
   key,
   title,
+  width: 12,
   sortBy: (row) => row[key],
   text: (row) => row[key],
 });
@@ -66,6 +68,7 @@ export const WIRE_GRID: readonly GridColumn<WireRow>[] = [
   {
     key: 'name',
     title: 'Name',
+    width: 17,
     sortBy: ({ wire }) => wire.name,
     text: ({ wire }) => wire.name,
     field: (cell) => (
@@ -85,6 +88,7 @@ export const WIRE_GRID: readonly GridColumn<WireRow>[] = [
   {
     key: 'path',
     title: 'Path',
+    width: 11,
     sortBy: ({ wire }) => wire.path.kind,
     text: ({ wire: { path } }, units) =>
       path.kind === 'straight' ? 'Straight' : `Skin, ${formatQuantity(path.clock, 'angle', units)}`,
@@ -92,6 +96,7 @@ export const WIRE_GRID: readonly GridColumn<WireRow>[] = [
   {
     key: 'massPerMetre',
     title: 'Mass per length',
+    width: 10,
     numeric: true,
     sortBy: ({ wire }) => wire.massPerMetre,
     text: ({ wire }, units) => formatQuantity(wire.massPerMetre, 'massPerMetre', units),
@@ -100,6 +105,7 @@ export const WIRE_GRID: readonly GridColumn<WireRow>[] = [
   {
     key: 'conductors',
     title: 'Conductors',
+    width: 8,
     numeric: true,
     sortBy: ({ wire }) => wire.conductors,
     text: ({ wire }) => String(wire.conductors),
@@ -118,6 +124,7 @@ export const WIRE_GRID: readonly GridColumn<WireRow>[] = [
   {
     key: 'slack',
     title: 'Slack',
+    width: 6,
     numeric: true,
     sortBy: ({ wire }) => wire.slack,
     text: ({ wire }, units) => formatQuantity(wire.slack, 'fraction', units),

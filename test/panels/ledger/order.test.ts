@@ -7,8 +7,8 @@ interface Item extends GridItem {
   readonly mass: number;
 }
 const COLUMNS: readonly GridColumn<Item>[] = [
-  { key: 'name', title: 'Name', sortBy: ({ name }) => name, text: ({ name }) => name },
-  { key: 'mass', title: 'Mass', sortBy: ({ mass }) => mass, text: ({ mass }) => String(mass) },
+  { key: 'name', title: 'Name', width: 8, sortBy: ({ name }) => name, text: ({ name }) => name },
+  { key: 'mass', title: 'Mass', width: 8, sortBy: ({ mass }) => mass, text: ({ mass }) => String(mass) },
 ];
 const items = fc
   .array(fc.record({ name: fc.string(), mass: fc.integer({ min: 0, max: 5 }) }), { maxLength: 30 })
