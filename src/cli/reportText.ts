@@ -2,7 +2,6 @@
 import type { Craft } from '../craft/craft.ts';
 import type { Assessment } from '../report/assessment.ts';
 import { hazardsOf } from '../report/hazards.ts';
-import { rowText } from '../report/rowText.ts';
 import type { Verdict } from '../report/verdict.ts';
 import type { UnitSystem } from '../units/units.ts';
 import { beamTable } from './beamTable.ts';
@@ -17,7 +16,7 @@ export function reportText(craft: Craft, report: Assessment, units: UnitSystem):
     ...wrapped(headline),
     '',
     'Verdicts',
-    ...verdicts.flatMap((verdict) => verdictLines(verdict, units)),
+    ...verdicts.flatMap(verdictLines),
     '',
     ...figures(rows, units),
     ...beam,
@@ -30,9 +29,9 @@ export function reportText(craft: Craft, report: Assessment, units: UnitSystem):
 const bullet = (sentence: string): string[] =>
   wrapped(sentence, 4).map((line, i) => (i === 0 ? `  - ${line.slice(4)}` : line));
 
-function verdictLines(verdict: Verdict, units: UnitSystem): string[] {
-  const { state, title, word, row, target, marginWords } = verdict;
-  const cells = [left(state, 8), left(title, 20), left(word, 16), rowText(row, units)];
+function verdictLines(verdict: Verdict): string[] {
+  const { state, title, word, figure, target, marginWords } = verdict;
+  const cells = [left(state, 8), `${left(title, 19)} `, left(word, 16), figure];
   const by = marginWords && `: ${marginWords}`;
   return [oneLine(`  ${cells.join('')}`), ...wrapped(`wanted ${target}${by}`, 10), ...reason(verdict)];
 }

@@ -3,6 +3,7 @@
 import { decimalsFor, formatNumber, formatQuantity } from '../units/format.ts';
 import { type Quantity, type UnitSystem, unitOf } from '../units/units.ts';
 import type { Row } from './row.ts';
+import { insignificant } from './rows.ts';
 
 /** "157.1 g", "157.1 ± 2.4 g"; "none" where there is no value. */
 export function rowText(row: Row, units: UnitSystem): string {
@@ -28,4 +29,12 @@ function uncertainText(value: number, uncertainty: number, quantity: Quantity, u
   const spread = formatNumber(uncertainty / unit.si, decimals);
   if (unit.symbol === '°') return `${number}° ± ${spread}°`;
   return `${number} ± ${spread} ${unit.symbol}`.trimEnd();
+}
+
+/** A figure as one says it: its size, and the word for its side where it has one; none for as good as zero. */
+export function figureText(row: Row, [below, above]: readonly [string, string], units: UnitSystem): string {
+  if (row.value === null) return rowText(row, units);
+  if (!below && !above) return rowText(row, units);
+  const size = rowText({ ...row, value: Math.abs(row.value) }, units);
+  return insignificant(row.value, row.quantity) ? size : `${size} ${row.value < 0 ? below : above}`;
 }

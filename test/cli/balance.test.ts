@@ -85,7 +85,7 @@ test('the report opens with name and headline and has verdicts, figures, beam an
   ]) {
     expect(out).toMatch(new RegExp(`^${title}`, 'm'));
   }
-  expect(out).toMatch(/^ {2}missed {2}Level +tail-heavy +15\.\d+° ± 0\.\d+°$/m);
+  expect(out).toMatch(/^ {2}missed {2}Level +tail-heavy +15\.\d+° ± 0\.\d+° nose-up$/m);
   expect(out).toMatch(/^ {2}Solid mass +3155 ± 50 g$/m);
 });
 

@@ -42,6 +42,20 @@ test('in imperial units the same sentence', () => {
   );
 });
 
+test('advice can be carried out: the lead levels, the load fills the lift and levels', () => {
+  const { advice } = assess(workedExample());
+  const lead = advice.find((each) => each.kind === 'lead')!;
+  const leaded = withPart(workedExample(), 'lead', { mass: lead.mass, place: lead.place });
+  expect(verdict(leaded, 'level').state).toBe('met');
+  const load = advice.find((each) => each.kind === 'load')!;
+  const loaded = withPart(workedExample(), 'load', { mass: load.mass, place: load.place });
+  expect(assess(loaded).met).toBe(true);
+});
+
+test('a craft that needs nothing gets no lead and no slide offered', () => {
+  expect(assess(trimmed()).advice.map(({ kind }) => kind)).toEqual(['load']);
+});
+
 test('a battery that can slide is offered, and sliding it there levels the craft', () => {
   const craft = workedExample();
   const battery = { ...craft.parts.byId.battery!, kind: 'battery' as const, name: 'Battery', mass: 0.3 };
@@ -82,8 +96,33 @@ test('too heavy: says by how much and what hull would carry it', () => {
   const heavy = withPart(trimmed(), 'safe', { mass: 0.1, place: { kind: 'keel', station: 1.5, drop: 0 } });
   expect(verdict(heavy, 'floats')).toMatchObject({ state: 'missed', word: 'too heavy' });
   expect(assess(heavy).headline).toMatch(
-    /^Too heavy: 97\.\d g more than it lifts\. .*m³ more hull would carry it\.$/,
+    /^Too heavy: 97\.\d g heavy, and at most 20\.0 g heavy is wanted\. Take 77\.\d g out, or 0\.0\d+ m³ more hull would carry it\.$/,
   );
+});
+
+test('a hair over the limit is said to be just that', () => {
+  const craft = trimmed();
+  const { value } = assess(craft).rows.heaviness!;
+  const band = { least: -1, most: value! - 1e-5 };
+  const over = { ...craft, targets: { ...craft.targets, heaviness: band } };
+  expect(verdict(over, 'floats')).toMatchObject({ state: 'missed', marginWords: 'just outside' });
+  expect(assess(over).headline).toContain('A trace less would do.');
+});
+
+test('figures are said without signs', () => {
+  expect(verdict(workedExample(), 'floats').figure).toBe('724.4 g light');
+  expect(verdict(workedExample(), 'level').figure).toBe('53.9° nose-up');
+  expect(verdict(workedExample(), 'even').figure).toBe('0.0°');
+  expect(verdict(workedExample(), 'floats').target).toBe('10.0 g light to 20.0 g heavy');
+});
+
+test('level within the tolerance on the far side: no lead, and why not more', () => {
+  const nose = withPart(trimmed(), 'bell', { mass: 0.004, place: { kind: 'axis', station: 0.2 } });
+  const { rows } = assess(nose);
+  expect(rows['float.pitch']!.value).toBeLessThan(0);
+  expect(rows['lead.mass']).toMatchObject({ value: 0, status: 'solved' });
+  expect(rows['lead.mass']!.why).toContain('None is needed within the tolerance.');
+  expect(verdict(nose, 'lead')).toMatchObject({ state: 'met', word: 'none needed' });
 });
 
 test('heeled: which side is low, and how much to bring over', () => {
