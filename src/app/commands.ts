@@ -5,7 +5,9 @@ import { step } from '../edit/edit.ts';
 import { removeHardpoints } from '../edit/edits/hardpoints.ts';
 import { duplicateParts, hasRoom, removeParts } from '../edit/edits/parts.ts';
 import { removeWires } from '../edit/edits/wires.ts';
-import { idsOf, type Selectable } from '../edit/selection.ts';
+import { called, idsOf, type Selectable } from '../edit/selection.ts';
+import { hullLengthOf } from '../panels/defaults.ts';
+import { assessed } from './assessed.ts';
 import { chooseFile, type Saved, saveCraft } from './files.ts';
 import { openText } from './openings.ts';
 import { nextTheme, otherUnits } from './settings.ts';
@@ -66,24 +68,25 @@ function duplicate(store: Store): void {
     return;
   }
   const before = new Set(craft.parts.order);
-  if (!store.apply(duplicateParts(ids))) return;
+  const hullLength = hullLengthOf(assessed(craft, store.settings.get().units));
+  if (!store.apply(duplicateParts(ids, called(craft, 'part', ids), hullLength))) return;
   const added = store.session.getState().craft.parts.order.filter((id) => !before.has(id));
   store.session.select(added.map((id) => ({ kind: 'part', id })));
 }
 
 /** Takes away what is selected, as one step. */
 function removeSelected(store: Store): void {
-  const { selection } = store.session.getState();
+  const { craft, selection } = store.session.getState();
   const removals = REMOVALS.flatMap(([kind, removal]) => {
     const ids = idsOf(selection, kind);
-    return ids.length ? [removal(ids)] : [];
+    return ids.length ? [removal(ids, called(craft, kind, ids))] : [];
   });
   const [first] = removals;
   if (!first) return;
   const label = removals.length === 1 ? first.label : `Remove ${selection.length} things`;
   store.apply(
-    step(label, (craft) => {
-      for (const { recipe } of removals) recipe(craft);
+    step(label, (draft) => {
+      for (const { recipe } of removals) recipe(draft);
     }),
   );
 }

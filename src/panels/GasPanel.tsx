@@ -20,7 +20,7 @@ export function GasPanel() {
   const { craft, assessment, units } = useEditor();
   const commit = useCommit();
   const { lifting, purity, superheat, gaugePressure } = craft.gas;
-  const set = (field: string, change: Partial<Gas>) => commit(setGas(field, change));
+  const set = (field: string, change: Partial<Gas>, run?: string) => commit(setGas(field, change), run);
   const known = catalogue.gases.find((gas) => gas.lifting === lifting && gas.purity === purity);
   const choose = (id: string) => {
     const gas = catalogue.gases.find((each) => each.id === id)!;
@@ -54,7 +54,7 @@ export function GasPanel() {
         quantity="fraction"
         units={units}
         hint="Share by volume; the rest is taken as air."
-        onCommit={(next) => set('purity', { purity: next })}
+        onCommit={(next, run) => set('purity', { purity: next }, run)}
       />
       <QuantityField
         label="Superheat"
@@ -62,7 +62,7 @@ export function GasPanel() {
         quantity="temperatureDifference"
         units={units}
         hint="How much warmer the gas is than the air."
-        onCommit={(next) => set('superheat', { superheat: next })}
+        onCommit={(next, run) => set('superheat', { superheat: next }, run)}
       />
       <QuantityField
         label="Gauge pressure"
@@ -70,7 +70,7 @@ export function GasPanel() {
         quantity="gaugePressure"
         units={units}
         hint="Gas pressure above the air outside."
-        onCommit={(next) => set('gauge pressure', { gaugePressure: next })}
+        onCommit={(next, run) => set('gauge pressure', { gaugePressure: next }, run)}
       />
       <Caution>{HAZARDS.pressure}</Caution>
       <RowList rows={rows} units={units} />

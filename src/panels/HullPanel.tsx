@@ -69,7 +69,9 @@ function SeamFields({ seams, counted }: { seams: HullSpec['seams']; counted: boo
         quantity="massPerMetre"
         units={units}
         hint="Tape, overlap, weld"
-        onCommit={(massPerMetre) => commit(setHull('seam mass', { seams: { ...seams, massPerMetre } }))}
+        onCommit={(massPerMetre, run) =>
+          commit(setHull('seam mass', { seams: { ...seams, massPerMetre } }), run)
+        }
       />
       {counted && (
         <CountField

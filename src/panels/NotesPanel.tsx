@@ -13,7 +13,12 @@ export function NotesPanel() {
   return (
     <section className="panel" aria-label="Notes">
       <TextField label="Craft name" value={craft.name} onCommit={(name) => commit(setName(name))} />
-      <NotesField label="Notes" rows={14} value={craft.notes} onCommit={(notes) => commit(setNotes(notes))} />
+      <NotesField
+        label="Notes"
+        rows={14}
+        value={craft.notes}
+        onCommit={(notes, run) => commit(setNotes(notes), run)}
+      />
       <FlightCaution />
     </section>
   );

@@ -23,7 +23,7 @@ export function WeighDialog({ id, onClose }: WeighDialogProps) {
       <form
         onSubmit={(event) => {
           event.preventDefault();
-          if (mass !== null && apply(markWeighed(id, mass, tolerance))) onClose();
+          if (mass !== null && apply(markWeighed(part, mass, tolerance))) onClose();
         }}
       >
         <QuantityField

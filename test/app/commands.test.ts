@@ -44,8 +44,8 @@ test('all parts are selected, duplicated, and the copies are then selected', asy
   const store = await withParts();
   COMMANDS.selectAll(store);
   COMMANDS.duplicate(store);
-  expect(names(store)).toEqual(['One', 'One', 'Two', 'Two']);
-  expect(store.session.getState().selection.map(({ id }) => id)).toEqual(['one-2', 'two-2']);
+  expect(names(store)).toEqual(['One', 'One copy', 'Two', 'Two copy']);
+  expect(store.session.getState().selection.map(({ id }) => id)).toEqual(['one-copy', 'two-copy']);
 });
 
 test('removing parts and a hardpoint together is one step, and the last hardpoint stays', async () => {

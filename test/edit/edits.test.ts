@@ -28,31 +28,42 @@ test('several parts are added at once', () => {
   expect(more.parts.order.slice(-3)).toEqual(['spare', 'volt-big', 'fitting']);
 });
 
-test('a duplicate follows its original, unlocked', () => {
+test('a duplicate follows its original, unlocked, named a copy and a little aft of it', () => {
   const locked = testEdit(craft, parts.setParts(['battery'], 'Lock', { locked: true }));
-  const result = testEdit(locked, parts.duplicateParts(['battery']));
-  expect(result.parts.order.slice(1, 3)).toEqual(['battery', 'battery-2']);
-  expect(result.parts.byId['battery-2']).toEqual({
-    ...locked.parts.byId.battery,
-    id: 'battery-2',
+  const result = testEdit(locked, parts.duplicateParts(['battery'], 'Battery', 3));
+  expect(result.parts.order.slice(1, 3)).toEqual(['battery', 'battery-copy']);
+  const original = locked.parts.byId.battery!;
+  expect(result.parts.byId['battery-copy']).toEqual({
+    ...original,
+    id: 'battery-copy',
+    name: `${original.name} copy`,
+    place: { kind: 'keel', station: 1.32, drop: 0.03 },
     locked: false,
   });
 });
 
+test('a duplicate stays on the hull, and copies of copies are numbered', () => {
+  const once = testEdit(craft, parts.duplicateParts(['battery'], 'Battery', 1.31));
+  const [original, copy] = [craft.parts.byId.battery!, once.parts.byId['battery-copy']!];
+  expect(copy.place).toEqual(original.place);
+  const twice = testEdit(once, parts.duplicateParts(['battery-copy'], copy.name, null));
+  expect(listed(twice.parts).map(({ name }) => name)).toContain(`${original.name} copy 2`);
+});
+
 test('removing a part leaves its wire loose where it was', () => {
-  const result = testEdit(craft, parts.removeParts(['battery', 'fins']));
+  const result = testEdit(craft, parts.removeParts(['battery', 'fins'], '2 parts'));
   expect(result.parts.order).toEqual(['thruster', 'lights']);
   expect(result.wires.byId.power!.from).toEqual({ kind: 'loose', place: craft.parts.byId.battery!.place });
   expect(result.wires.byId.power!.to).toEqual({ kind: 'part', part: 'thruster' });
 });
 
 test('fields of a part are set', () => {
-  const result = testEdit(craft, parts.setPart('battery', 'mass', { mass: 0.2 }));
+  const result = testEdit(craft, parts.setPart(craft.parts.byId.battery!, 'mass', { mass: 0.2 }));
   expect(result.parts.byId.battery!.mass).toBe(0.2);
 });
 
 test('weighed: mass, tolerance and source together', () => {
-  const { battery } = testEdit(craft, parts.markWeighed('battery', 0.172, 0.0005)).parts.byId;
+  const { battery } = testEdit(craft, parts.markWeighed(craft.parts.byId.battery!, 0.172, 0.0005)).parts.byId;
   expect(battery).toMatchObject({ mass: 0.172, massTolerance: 0.0005, massSource: 'weighed' });
 });
 
@@ -87,25 +98,29 @@ test('wire runs come, change and go', () => {
   const { id: __, ...wire } = wireOf('x', { name: 'Signal', path: { kind: 'straight' } });
   const added = testEdit(craft, wires.addWire(wire));
   expect(added.wires.order).toEqual(['power', 'signal']);
-  expect(testEdit(added, wires.setWire('signal', 'slack', { slack: 0.1 })).wires.byId.signal!.slack).toBe(
-    0.1,
-  );
+  expect(
+    testEdit(added, wires.setWire(added.wires.byId.signal!, 'slack', { slack: 0.1 })).wires.byId.signal!
+      .slack,
+  ).toBe(0.1);
   const joined = testEdit(
     added,
     step('Join', wires.joinWire('signal', 'to', { kind: 'part', part: 'fins' })),
   );
   expect(joined.wires.byId.signal!.to).toEqual({ kind: 'part', part: 'fins' });
-  expect(listed(testEdit(added, wires.removeWires(['power'])).wires).map(({ id }) => id)).toEqual(['signal']);
+  expect(listed(testEdit(added, wires.removeWires(['power'], 'Power')).wires).map(({ id }) => id)).toEqual([
+    'signal',
+  ]);
 });
 
 test('hardpoints come, change and go; the lead always has one', () => {
   const added = testEdit(craft, hardpoints.addHardpoint('Tail', { kind: 'axis', station: 2.9 }));
   expect(added.hardpoints.order).toEqual(['nose', 'chin', 'tail']);
   const chosen = testEdit(added, hardpoints.setLeadAt('tail'));
-  expect(testEdit(chosen, hardpoints.removeHardpoints(['tail'])).leadAt).toBe('nose');
-  expect(testEdit(craft, hardpoints.removeHardpoints(['nose', 'chin']))).toBe(craft);
+  expect(testEdit(chosen, hardpoints.removeHardpoints(['tail'], 'Tail')).leadAt).toBe('nose');
+  expect(testEdit(craft, hardpoints.removeHardpoints(['nose', 'chin'], 'both'))).toBe(craft);
   expect(
-    testEdit(craft, hardpoints.setHardpoint('nose', 'name', { name: 'Bow' })).hardpoints.byId.nose!.name,
+    testEdit(craft, hardpoints.setHardpoint(craft.hardpoints.byId.nose!, 'name', { name: 'Bow' })).hardpoints
+      .byId.nose!.name,
   ).toBe('Bow');
   const moved = testEdit(
     craft,

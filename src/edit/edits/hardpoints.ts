@@ -1,7 +1,7 @@
 /** Edits of hardpoints and of the point that carries the heaviness. */
 import type { Place } from '../../craft/placeSchema.ts';
 import type { Hardpoint } from '../../craft/schema.ts';
-import { type Edit, type Recipe, runOf, step } from '../edit.ts';
+import { type Edit, type Recipe, step } from '../edit.ts';
 import { freeId } from '../ids.ts';
 import { placed } from '../place.ts';
 
@@ -13,8 +13,8 @@ export const addHardpoint = (name: string, place: Place): Edit =>
   });
 
 /** Takes hardpoints away; the last one stays, and the lead goes to the first left when its own goes. */
-export const removeHardpoints = (ids: readonly string[]): Edit =>
-  step(ids.length === 1 ? 'Remove hardpoint' : `Remove ${ids.length} hardpoints`, (craft) => {
+export const removeHardpoints = (ids: readonly string[], what: string): Edit =>
+  step(`Remove ${what}`, (craft) => {
     const left = craft.hardpoints.order.filter((id) => !ids.includes(id));
     if (left.length === 0) return;
     for (const id of craft.hardpoints.order) if (ids.includes(id)) delete craft.hardpoints.byId[id];
@@ -23,8 +23,12 @@ export const removeHardpoints = (ids: readonly string[]): Edit =>
   });
 
 /** Sets fields of one hardpoint, as typed: a place out of bounds is refused, not brought back in. */
-export const setHardpoint = (id: string, field: string, change: Partial<Omit<Hardpoint, 'id'>>): Edit =>
-  runOf(`hardpoint ${id} ${field}`, `Change ${field}`, (craft) => {
+export const setHardpoint = (
+  { id, name }: Pick<Hardpoint, 'id' | 'name'>,
+  field: string,
+  change: Partial<Omit<Hardpoint, 'id'>>,
+): Edit =>
+  step(`Change ${field} of ${name || 'hardpoint'}`, (craft) => {
     Object.assign(craft.hardpoints.byId[id]!, change);
   });
 
@@ -49,6 +53,6 @@ export const placeSupport =
   };
 
 export const setSupport = (support: Place | null): Edit =>
-  runOf('support', support ? 'Set the support point' : 'Remove the support point', (craft) => {
+  step(support ? 'Set the support point' : 'Remove the support point', (craft) => {
     craft.support = support;
   });

@@ -1,5 +1,5 @@
 /** One of a few. */
-import { useState } from 'react';
+import { useRef, useState } from 'react';
 import type { Problem } from '../../craft/problem.ts';
 import type { Choice } from '../words.ts';
 import { FieldFrame } from './FieldFrame.tsx';
@@ -22,6 +22,8 @@ export interface ChoiceFieldProps<T extends string> {
 export function ChoiceField<T extends string>(props: ChoiceFieldProps<T>) {
   const { label, value, choices, onCommit, none = 'Choose…', bare, hint, onLeave } = props;
   const [error, setError] = useState<string | null>(null);
+  /** What Escape goes back to: an arrow key in a closed list chooses at once. */
+  const first = useRef(value);
   const choose = (text: string) => {
     const chosen = choices.find((choice) => choice.value === text);
     if (!chosen || chosen.value === value) return;
@@ -42,6 +44,7 @@ export function ChoiceField<T extends string>(props: ChoiceFieldProps<T>) {
             if (onLeave && (event.key === 'Enter' || event.key === 'Escape')) {
               event.preventDefault();
               event.stopPropagation();
+              if (event.key === 'Escape' && first.current !== null) choose(first.current);
               onLeave(event.key === 'Enter' ? 'enter' : 'escape');
             }
           }}

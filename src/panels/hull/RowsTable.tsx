@@ -16,8 +16,8 @@ export function RowsTable({ shape }: { shape: RowShape }) {
   const columns = columnsOf(shape);
   const unit = unitOf('length', units).symbol;
   const rows: readonly HullRow[] = shape.rows;
-  const set = (next: readonly HullRow[]): Problem | null =>
-    commit(setShape('rows', { ...shape, rows: next } as RowShape));
+  const set = (next: readonly HullRow[], run?: string): Problem | null =>
+    commit(setShape('rows', { ...shape, rows: next } as RowShape), run);
   return (
     <>
       <table className="rows-table">
@@ -48,7 +48,7 @@ export function RowsTable({ shape }: { shape: RowShape }) {
                     value={row[key]!}
                     quantity="length"
                     units={units}
-                    onCommit={(value) => set(rows.with(index, { ...row, [key]: value }))}
+                    onCommit={(value, run) => set(rows.with(index, { ...row, [key]: value }), run)}
                   />
                 </td>
               ))}
@@ -73,7 +73,7 @@ export function RowsTable({ shape }: { shape: RowShape }) {
           ))}
         </tbody>
       </table>
-      <PasteRows columns={columns.map(({ key, label }) => ({ key, label }))} onRows={set} />
+      <PasteRows columns={columns.map(({ key, label }) => ({ key, label }))} onRows={(next) => set(next)} />
     </>
   );
 }

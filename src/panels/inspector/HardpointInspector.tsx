@@ -23,12 +23,12 @@ export function HardpointInspector({ hardpoint }: { hardpoint: Hardpoint }) {
       <TextField
         label="Name"
         value={hardpoint.name}
-        onCommit={(name) => commit(setHardpoint(hardpoint.id, 'name', { name }))}
+        onCommit={(name) => commit(setHardpoint(hardpoint, 'name', { name }))}
       />
       <PlaceFields
         place={hardpoint.place}
         at={view?.at ?? null}
-        onPlace={(place) => commit(setHardpoint(hardpoint.id, 'place', { place }))}
+        onPlace={(place, field, run) => commit(setHardpoint(hardpoint, field, { place }), run)}
       />
       <button
         type="button"

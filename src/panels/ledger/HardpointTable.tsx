@@ -1,7 +1,7 @@
 /** The hardpoints, and what can be done to them. */
 import { step } from '../../edit/edit.ts';
 import { addHardpoint, removeHardpoints } from '../../edit/edits/hardpoints.ts';
-import { idsOf } from '../../edit/selection.ts';
+import { called, idsOf } from '../../edit/selection.ts';
 import { defaultPlace } from '../defaults.ts';
 import { useEditor } from '../editor.ts';
 import { useAdding } from './adding.ts';
@@ -14,15 +14,13 @@ export function HardpointTable() {
   const add = useAdding('hardpoint');
   const ids = idsOf(selection, 'hardpoint');
   const all = ids.length === craft.hardpoints.order.length;
-  const duplicate = step(
-    ids.length === 1 ? 'Duplicate hardpoint' : `Duplicate ${ids.length} hardpoints`,
-    (draft) => {
-      for (const id of ids) {
-        const { name, place } = craft.hardpoints.byId[id]!;
-        addHardpoint(name, { ...place }).recipe(draft);
-      }
-    },
-  );
+  const what = called(craft, 'hardpoint', ids);
+  const duplicate = step(`Duplicate ${what}`, (draft) => {
+    for (const id of ids) {
+      const { name, place } = craft.hardpoints.byId[id]!;
+      addHardpoint(name, { ...place }).recipe(draft);
+    }
+  });
   return (
     <>
       <div className="toolbar" role="toolbar" aria-label="Hardpoints">
@@ -36,7 +34,7 @@ export function HardpointTable() {
           type="button"
           disabled={ids.length === 0 || all}
           title={all ? 'A craft keeps one hardpoint at least' : undefined}
-          onClick={() => apply(removeHardpoints(ids))}
+          onClick={() => apply(removeHardpoints(ids, what))}
         >
           Remove
         </button>

@@ -9,9 +9,9 @@ import {
   setParts,
   sortParts,
 } from '../../edit/edits/parts.ts';
-import { idsOf } from '../../edit/selection.ts';
+import { called, idsOf } from '../../edit/selection.ts';
 import { partsCsv } from '../csv/writeParts.ts';
-import { blankPart, defaultPlace } from '../defaults.ts';
+import { blankPart, defaultPlace, hullLengthOf } from '../defaults.ts';
 import { useEditor } from '../editor.ts';
 import { useAdding } from './adding.ts';
 import { download, fileName } from './download.ts';
@@ -69,9 +69,10 @@ function AddButtons({ onDialog }: PartTableProps) {
 
 /** What can be done to the parts that are selected. */
 function SelectedButtons({ onDialog }: PartTableProps) {
-  const { craft, selection, apply } = useEditor();
+  const { craft, assessment, selection, apply } = useEditor();
   const add = useAdding('part');
   const ids = idsOf(selection, 'part');
+  const what = called(craft, 'part', ids);
   const none = ids.length === 0;
   const locked = !none && ids.every((id) => craft.parts.byId[id]?.locked);
   return (
@@ -79,17 +80,17 @@ function SelectedButtons({ onDialog }: PartTableProps) {
       <button
         type="button"
         disabled={none || !hasRoom(craft, ids.length)}
-        onClick={() => add(duplicateParts(ids))}
+        onClick={() => add(duplicateParts(ids, what, hullLengthOf(assessment)))}
       >
         Duplicate
       </button>
-      <button type="button" disabled={none} onClick={() => apply(removeParts(ids))}>
+      <button type="button" disabled={none} onClick={() => apply(removeParts(ids, what))}>
         Remove
       </button>
       <button
         type="button"
         disabled={none}
-        onClick={() => apply(setParts(ids, locked ? 'Unlock parts' : 'Lock parts', { locked: !locked }))}
+        onClick={() => apply(setParts(ids, `${locked ? 'Unlock' : 'Lock'} ${what}`, { locked: !locked }))}
       >
         {locked ? 'Unlock' : 'Lock'}
       </button>

@@ -2,7 +2,7 @@
 import { catalogue } from '../../catalogue/catalogue.ts';
 import { step } from '../../edit/edit.ts';
 import { addWire, removeWires, type WireFields } from '../../edit/edits/wires.ts';
-import { idsOf } from '../../edit/selection.ts';
+import { called, idsOf } from '../../edit/selection.ts';
 import { blankWire, defaultPlace } from '../defaults.ts';
 import { useEditor } from '../editor.ts';
 import { useAdding } from './adding.ts';
@@ -14,6 +14,7 @@ export function WireTable() {
   const { craft, assessment, selection, apply } = useEditor();
   const add = useAdding('wire');
   const ids = idsOf(selection, 'wire');
+  const what = called(craft, 'wire', ids);
   const addBlank = () =>
     add(addWire(blankWire(defaultPlace(assessment), catalogue.conductors[0]?.massPerMetre ?? 0)));
   return (
@@ -25,11 +26,18 @@ export function WireTable() {
         <button
           type="button"
           disabled={ids.length === 0}
-          onClick={() => add(duplicateWires(ids.map((id) => craft.wires.byId[id]!)))}
+          onClick={() =>
+            add(
+              duplicateWires(
+                ids.map((id) => craft.wires.byId[id]!),
+                what,
+              ),
+            )
+          }
         >
           Duplicate
         </button>
-        <button type="button" disabled={ids.length === 0} onClick={() => apply(removeWires(ids))}>
+        <button type="button" disabled={ids.length === 0} onClick={() => apply(removeWires(ids, what))}>
           Remove
         </button>
       </div>
@@ -47,7 +55,7 @@ export function WireTable() {
 }
 
 /** All copies as one step of the history. */
-const duplicateWires = (wires: readonly (WireFields & { id: string })[]) =>
-  step(wires.length === 1 ? 'Duplicate wire run' : `Duplicate ${wires.length} wire runs`, (craft) => {
+const duplicateWires = (wires: readonly (WireFields & { id: string })[], what: string) =>
+  step(`Duplicate ${what}`, (craft) => {
     for (const { id: _, ...fields } of wires) addWire(structuredClone(fields)).recipe(craft);
   });

@@ -28,7 +28,7 @@ export const HARDPOINT_GRID: readonly GridColumn<HardpointRow>[] = [
         label={`Name of ${row.name}`}
         value={row.hardpoint.name}
         startWith={startWith}
-        onCommit={(name) => commit(setHardpoint(row.id, 'name', { name }))}
+        onCommit={(name) => commit(setHardpoint(row.hardpoint, 'name', { name }))}
         onLeave={onLeave}
       />
     ),
@@ -56,8 +56,11 @@ export const HARDPOINT_GRID: readonly GridColumn<HardpointRow>[] = [
         quantity="length"
         units={units}
         startWith={startWith}
-        onCommit={(station) =>
-          commit(setHardpoint(row.id, 'station', { place: withStation(row.hardpoint.place, station) }))
+        onCommit={(station, run) =>
+          commit(
+            setHardpoint(row.hardpoint, 'station', { place: withStation(row.hardpoint.place, station) }),
+            run,
+          )
         }
         onLeave={onLeave}
       />

@@ -30,8 +30,12 @@ export interface PartRow extends GridItem {
 
 type Cell = CellProps<PartRow>;
 
-const set = ({ row, commit }: Cell, field: string, change: Partial<PartFields>): Problem | null =>
-  commit(setPart(row.id, field, change));
+const set = (
+  { row, commit }: Cell,
+  field: string,
+  change: Partial<PartFields>,
+  run?: string,
+): Problem | null => commit(setPart(row.part, field, change), run);
 
 const choiceCell =
   <T extends string>(
@@ -61,7 +65,7 @@ const massCell = (label: string, key: 'mass' | 'massTolerance') => (cell: Cell) 
     quantity="mass"
     units={cell.units}
     startWith={cell.startWith}
-    onCommit={(next) => set(cell, label.toLowerCase(), { [key]: next })}
+    onCommit={(next, run) => set(cell, label.toLowerCase(), { [key]: next }, run)}
     onLeave={cell.onLeave}
   />
 );
@@ -114,7 +118,7 @@ function StationCell(cell: Cell) {
       quantity="length"
       units={cell.units}
       startWith={cell.startWith}
-      onCommit={(station) => set(cell, 'station', { place: withStation(place, station) })}
+      onCommit={(station, run) => set(cell, 'station', { place: withStation(place, station) }, run)}
       onLeave={cell.onLeave}
     />
   );
@@ -236,8 +240,8 @@ export const PART_GRID: readonly GridColumn<PartRow>[] = [
     press: {
       label: ({ name }) => `Lock ${name}`,
       pressed: ({ part }) => part.locked,
-      run: ({ id, part }, commit) => {
-        commit(setPart(id, 'lock', { locked: !part.locked }));
+      run: ({ part }, commit) => {
+        commit(setPart(part, 'lock', { locked: !part.locked }));
       },
     },
   },

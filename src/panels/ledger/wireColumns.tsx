@@ -22,8 +22,12 @@ export interface WireRow extends GridItem {
 
 type Cell = CellProps<WireRow>;
 
-const set = ({ row, commit }: Cell, field: string, change: Partial<WireFields>): Problem | null =>
-  commit(setWire(row.id, field, change));
+const set = (
+  { row, commit }: Cell,
+  field: string,
+  change: Partial<WireFields>,
+  run?: string,
+): Problem | null => commit(setWire(row.wire, field, change), run);
 
 const quantityCell = (label: string, key: 'massPerMetre' | 'slack', quantity: Quantity) => (cell: Cell) => (
   <QuantityField
@@ -34,7 +38,7 @@ const quantityCell = (label: string, key: 'massPerMetre' | 'slack', quantity: Qu
     quantity={quantity}
     units={cell.units}
     startWith={cell.startWith}
-    onCommit={(next) => set(cell, label.toLowerCase(), { [key]: next })}
+    onCommit={(next, run) => set(cell, label.toLowerCase(), { [key]: next }, run)}
     onLeave={cell.onLeave}
   />
 );
