@@ -31,6 +31,7 @@ export function leadRows(state: CraftState): Rows {
     'lead.mass': rowOf(lead, 'Lead to level exactly', 'mass', {
       uncertainty,
       caution: leadCaution(state, lead, after),
+      why: none ? `None is needed within the tolerance. ${exact.why}` : '',
     }),
     'lead.massWithinTolerance': rowOf(within, 'Least lead within the pitch tolerance', 'mass'),
     'lead.station': row({ label: 'Lead station', quantity: 'length', value: at[0] }),

@@ -174,7 +174,7 @@ test('a broken file is exit 2, a line a problem, nothing on standard output', ()
   expect({ code, out }).toEqual({ code: 2, out: '' });
   expect(errors).toEqual([
     'bad.json: gas.purity: found 7; allowed: at most 1',
-    'bad.json: parts[1].mass: found "heavy"; allowed: a finite number',
+    'bad.json: parts[1].mass (“Fins”): found "heavy"; allowed: a finite number',
     expect.stringMatching(/^bad\.json: od d: found an unknown field/),
   ]);
 });
