@@ -2,11 +2,13 @@
 import { useId, useMemo, useState } from 'react';
 import { LIMITS } from '../craft/quantities.ts';
 import { addPart, addParts, hasRoom } from '../edit/edits/parts.ts';
+import { unitOf } from '../units/units.ts';
 import { type CellProblem, type PartsReading, readParts } from './csv/readParts.ts';
 import { DialogFrame } from './DialogFrame.tsx';
 import { defaultPlace } from './defaults.ts';
 import { useEditor } from './editor.ts';
 import { useAdding } from './ledger/adding.ts';
+import { PastePreview } from './PastePreview.tsx';
 
 export interface PasteRowsDialogProps {
   /** What to begin with: the text of a file, or nothing. */
@@ -24,13 +26,14 @@ export function PasteRowsDialog({ text: first, onClose }: PasteRowsDialogProps) 
   return (
     <DialogFrame title="Add rows of parts" onClose={onClose}>
       <label htmlFor={id}>
-        Rows from a spreadsheet. With heads (name, mass g, station mm, kind and the others of “CSV out”), or
-        without: name, mass, station, kind.
+        Rows from a spreadsheet. With heads (name, mass {unitOf('mass', units).symbol}, station{' '}
+        {unitOf('length', units).symbol}, kind and the others of “CSV out”), or without: name, mass, station,
+        kind. A head without a unit has the one the ledger shows.
       </label>
       <textarea
         id={id}
         className="table-text"
-        rows={10}
+        rows={6}
         value={text}
         spellCheck={false}
         onChange={(event) => setText(event.currentTarget.value)}
@@ -41,7 +44,7 @@ export function PasteRowsDialog({ text: first, onClose }: PasteRowsDialogProps) 
   );
 }
 
-function ReadingReport({ reading: { good, rows, problems, ignored } }: { reading: PartsReading }) {
+function ReadingReport({ reading: { good, rows, problems, ignored, assumed } }: { reading: PartsReading }) {
   return (
     <div role="status">
       <p>
@@ -50,6 +53,7 @@ function ReadingReport({ reading: { good, rows, problems, ignored } }: { reading
       </p>
       {ignored.length > 0 && <p className="aside">Not used: {ignored.join(', ')}.</p>}
       {problems.length > 0 && <ProblemTable problems={problems.slice(0, 100)} />}
+      {good.length > 0 && <PastePreview parts={good} assumed={assumed} />}
     </div>
   );
 }
@@ -102,19 +106,16 @@ function AddRowsButtons({
           {craft.parts.order.length}.
         </p>
       )}
-      {problems.length > 0 && (
-        <button type="button" disabled={good.length === 0 || !room} onClick={addGood}>
-          {good.length === 1 ? 'Add the good one' : `Add the ${good.length} good ones`}
-        </button>
-      )}
-      <button
-        type="button"
-        className="primary"
-        disabled={good.length === 0 || problems.length > 0 || !room}
-        onClick={addGood}
-      >
-        Add {good.length === 1 ? 'the part' : `all ${good.length} parts`}
+      <button type="button" className="primary" disabled={good.length === 0 || !room} onClick={addGood}>
+        {addWords(good.length, problems.length > 0)}
       </button>
     </div>
   );
+}
+
+/** With bad rows about, only the good ones can be added, and the button says so. */
+function addWords(good: number, some: boolean): string {
+  if (good === 0) return 'Nothing to add yet';
+  if (some) return good === 1 ? 'Add the good one' : `Add the ${good} good ones`;
+  return good === 1 ? 'Add the part' : `Add all ${good} parts`;
 }

@@ -9,8 +9,8 @@ const cell = (page: Page, row: string, column: string) =>
 
 const focused = (page: Page) =>
   page.evaluate(() => {
-    const { row } = (document.activeElement?.parentElement as HTMLElement).dataset;
-    return [row, (document.activeElement as HTMLElement).dataset.cell];
+    const active = document.activeElement as HTMLElement;
+    return [active.parentElement?.dataset.row, active.dataset.cell];
   });
 
 const undoable = (page: Page) => page.getByRole('button', { name: 'Undo' }).isEnabled();

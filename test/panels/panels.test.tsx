@@ -173,6 +173,20 @@ test('a hull that cannot be formed leaves panels that say why', () => {
   }
 });
 
+test('rows to be pasted are shown as the ledger would show them, with the units that were assumed', () => {
+  const text = 'name,mass,station\nCamera,34,0.7\nLamp,12,2.1\nBad,heavy,1';
+  const shown = seen(render(PasteRowsDialog, { text, onClose: nothing }, worked));
+  expect(shown).toContain('mass in g, station in m');
+  expect(shown).toContain('Camera Useful load 34.0 g Below the keel 0.700 m 1');
+  expect(shown).toContain('Add the 2 good ones');
+  expect(shown).not.toContain('Add all');
+  expect(shown).not.toContain('Mind the stations');
+  const wrong = seen(
+    render(PasteRowsDialog, { text: text.replace('station', 'station mm'), onClose: nothing }, worked),
+  );
+  expect(wrong).toMatch(/Mind the stations: All of them sit within a hundredth.*3\.000 m/);
+});
+
 test('a problem of the loading gate is shown with its field, what was found and what is allowed', () => {
   const problems = [{ path: 'parts[2].mass', found: '-1', allowed: 'at least 0' }];
   expect(seen(render(ProblemsList, { title: 'Not opened', problems }, worked))).toContain(
