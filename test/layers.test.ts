@@ -32,7 +32,7 @@ const PACKAGES: Readonly<Record<string, readonly string[]>> = {
   canvas: ['react', 'konva', 'react-konva'],
   panels: ['react', 'react-dom', 'papaparse'],
   app: ['react', 'react-dom', 'idb'],
-  cli: ['@sparticuz/chromium'],
+  cli: ['@sparticuz/chromium', 'vite'],
 };
 
 interface Import {

@@ -71,7 +71,7 @@ function HistoryCommands({ store }: { store: Store }) {
       <CommandButton
         store={store}
         command="undo"
-        words={undoLabel ?? 'Undo'}
+        words={undoLabel ? `Undo: ${undoLabel}` : 'Undo'}
         name={undoLabel ? `Undo: ${undoLabel}` : 'Undo'}
         disabled={undoLabel === null}
       />

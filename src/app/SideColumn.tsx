@@ -1,5 +1,5 @@
 /** The column of panels, one in front at a time. */
-import { type KeyboardEvent, type ReactNode, useEffect } from 'react';
+import { type ReactNode, useEffect } from 'react';
 import { DayPanel } from '../panels/DayPanel.tsx';
 import { FiguresPanel } from '../panels/FiguresPanel.tsx';
 import { FilmPanel } from '../panels/FilmPanel.tsx';
@@ -7,61 +7,41 @@ import { GasPanel } from '../panels/GasPanel.tsx';
 import { HullPanel } from '../panels/HullPanel.tsx';
 import { Inspector } from '../panels/Inspector.tsx';
 import { NotesPanel } from '../panels/NotesPanel.tsx';
+import { type Tab, Tabs } from '../panels/Tabs.tsx';
 import { TargetsPanel } from '../panels/TargetsPanel.tsx';
 import { useCell } from './cell.ts';
 import type { Store } from './store.ts';
 
-interface Tab {
-  readonly id: string;
-  readonly title: string;
-  readonly panel: ReactNode;
-}
+type TabId = 'selected' | 'hull' | 'gas' | 'targets' | 'figures' | 'notes';
 
-const TABS: readonly Tab[] = [
-  { id: 'selected', title: 'Selected', panel: <Inspector /> },
-  {
-    id: 'hull',
-    title: 'Hull',
-    panel: (
-      <>
-        <HullPanel />
-        <FilmPanel />
-      </>
-    ),
-  },
-  {
-    id: 'gas',
-    title: 'Gas, day',
-    panel: (
-      <>
-        <GasPanel />
-        <DayPanel />
-      </>
-    ),
-  },
-  { id: 'targets', title: 'Targets', panel: <TargetsPanel /> },
-  { id: 'figures', title: 'Figures', panel: <FiguresPanel /> },
-  { id: 'notes', title: 'Notes', panel: <NotesPanel /> },
+const TABS: readonly Tab<TabId>[] = [
+  { id: 'selected', title: 'Selected' },
+  { id: 'hull', title: 'Hull' },
+  { id: 'gas', title: 'Gas, day' },
+  { id: 'targets', title: 'Targets' },
+  { id: 'figures', title: 'Figures' },
+  { id: 'notes', title: 'Notes' },
 ];
+
+const PANELS: Readonly<Record<TabId, readonly ReactNode[]>> = {
+  selected: [<Inspector key="inspector" />],
+  hull: [<HullPanel key="hull" />, <FilmPanel key="film" />],
+  gas: [<GasPanel key="gas" />, <DayPanel key="day" />],
+  targets: [<TargetsPanel key="targets" />],
+  figures: [<FiguresPanel key="figures" />],
+  notes: [<NotesPanel key="notes" />],
+};
 
 export function SideColumn({ store, hidden }: { store: Store; hidden: boolean }) {
   const { tab } = useCell(store.view);
-  const front = TABS.find(({ id }) => id === tab) ?? TABS[0]!;
-  const show = (id: string) => store.view.set({ ...store.view.get(), tab: id });
+  const front = TABS.find(({ id }) => id === tab)?.id ?? 'hull';
+  const show = (id: TabId) => store.view.set({ ...store.view.get(), tab: id });
   useSelectionInFront(store);
   return (
     <aside className="column" aria-label="Panels" hidden={hidden}>
-      <TabList front={front.id} show={show} />
-      <div
-        className="tab-panel"
-        role="tabpanel"
-        id="tab-panel"
-        aria-labelledby={`tab-${front.id}`}
-        // biome-ignore lint/a11y/noNoninteractiveTabindex: it scrolls, so keys must reach it.
-        tabIndex={0}
-      >
-        {front.panel}
-      </div>
+      <Tabs<TabId> label="Panels" tabs={TABS} front={front} onFront={show} body="tab-panel" focusable>
+        {PANELS[front]}
+      </Tabs>
     </aside>
   );
 }
@@ -77,45 +57,4 @@ function useSelectionInFront({ session, view }: Store): void {
       if (fresh && view.get().tab !== 'figures') view.set({ ...view.get(), tab: 'selected' });
     });
   }, [session, view]);
-}
-
-function TabList({ front, show }: { front: string; show: (id: string) => void }) {
-  const onKeyDown = (event: KeyboardEvent<HTMLDivElement>) => {
-    const next = neighbour(front, event.key);
-    if (!next) return;
-    event.preventDefault();
-    show(next);
-    document.getElementById(`tab-${next}`)?.focus();
-  };
-  return (
-    <div className="tabs" role="tablist" aria-label="Panels" onKeyDown={onKeyDown}>
-      {TABS.map(({ id, title }) => (
-        <button
-          key={id}
-          type="button"
-          role="tab"
-          id={`tab-${id}`}
-          aria-selected={id === front}
-          aria-controls="tab-panel"
-          tabIndex={id === front ? 0 : -1}
-          onClick={() => show(id)}
-        >
-          {title}
-        </button>
-      ))}
-    </div>
-  );
-}
-
-/** The tab to which an arrow key leads, or Home and End; undefined for other keys. */
-function neighbour(front: string, key: string): string | undefined {
-  const at = TABS.findIndex(({ id }) => id === front);
-  const steps: Readonly<Record<string, number>> = {
-    ArrowLeft: at - 1,
-    ArrowRight: at + 1,
-    Home: 0,
-    End: -1,
-  };
-  const to = steps[key];
-  return to === undefined ? undefined : TABS.at(to % TABS.length)?.id;
 }

@@ -1,6 +1,7 @@
 /** The drawing with the beam under it, the ledger below, and one column of panels; the bars between can be moved. */
 import { useState } from 'react';
 import type { Editor } from '../panels/editor.ts';
+import { Ledger } from '../panels/Ledger.tsx';
 import { Verdicts } from '../panels/Verdicts.tsx';
 import type { Palette } from '../scene/palette.ts';
 import { Drawing } from './Drawing.tsx';
@@ -14,8 +15,11 @@ interface WorkspaceProps {
   readonly palette: Palette;
 }
 
-const COLUMN = { least: 260, usual: 348 };
-const LEDGER = { least: 96, usual: 236 };
+const COLUMN = { least: 260, usual: innerWidth < 1200 ? 320 : 348 };
+const LEDGER = {
+  least: 96,
+  usual: Math.round(innerHeight * (matchMedia('(pointer: coarse)').matches ? 0.25 : 0.23)),
+};
 
 export function Workspace({ store, editor, palette }: WorkspaceProps) {
   const [column, setColumn] = useState(COLUMN.usual);
@@ -33,7 +37,9 @@ export function Workspace({ store, editor, palette }: WorkspaceProps) {
           {...LEDGER}
           onSize={setLedger}
         />
-        <div className="ledger-pane" hidden={ledger === 0} />
+        <div className="ledger-pane" hidden={ledger === 0}>
+          <Ledger />
+        </div>
       </div>
       <Splitter
         label="Width of the panels"

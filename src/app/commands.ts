@@ -1,11 +1,14 @@
 /** What can be asked of the page, by button or by key. Each command is one small function on the store. */
+
+import { nudgeEdit, nudgeFor } from '../canvas/gestures/nudge.ts';
 import { step } from '../edit/edit.ts';
 import { removeHardpoints } from '../edit/edits/hardpoints.ts';
 import { duplicateParts, hasRoom, removeParts } from '../edit/edits/parts.ts';
 import { removeWires } from '../edit/edits/wires.ts';
-import { idsOf, type Selectable } from '../edit/selection.ts';
+import { called, idsOf, type Selectable } from '../edit/selection.ts';
+import { hullLengthOf } from '../panels/defaults.ts';
+import { assessed } from './assessed.ts';
 import { chooseFile, type Saved, saveCraft } from './files.ts';
-import { along, LEAP, NUDGE, type Nudge, nudge, up } from './nudge.ts';
 import { openText } from './openings.ts';
 import { nextTheme, otherUnits } from './settings.ts';
 import type { Store } from './store.ts';
@@ -13,9 +16,9 @@ import type { Store } from './store.ts';
 type Command = (store: Store) => void;
 
 const nudging =
-  (move: Nudge): Command =>
+  (key: string, shift = false): Command =>
   (store) => {
-    const edit = nudge(store.session.getState().selection, move);
+    const edit = nudgeEdit(store.session.getState().selection, nudgeFor(key, shift, 'side')!);
     if (edit) store.apply(edit);
   };
 
@@ -36,14 +39,14 @@ const COMMAND_TABLE = {
   selectAll: (store) => store.session.select(allParts(store)),
   duplicate: (store) => duplicate(store),
   remove: (store) => removeSelected(store),
-  nudgeFore: nudging(along(-NUDGE)),
-  nudgeAft: nudging(along(NUDGE)),
-  nudgeUp: nudging(up(NUDGE)),
-  nudgeDown: nudging(up(-NUDGE)),
-  leapFore: nudging(along(-LEAP)),
-  leapAft: nudging(along(LEAP)),
-  leapUp: nudging(up(LEAP)),
-  leapDown: nudging(up(-LEAP)),
+  nudgeFore: nudging('ArrowLeft'),
+  nudgeAft: nudging('ArrowRight'),
+  nudgeUp: nudging('ArrowUp'),
+  nudgeDown: nudging('ArrowDown'),
+  leapFore: nudging('ArrowLeft', true),
+  leapAft: nudging('ArrowRight', true),
+  leapUp: nudging('ArrowUp', true),
+  leapDown: nudging('ArrowDown', true),
   escape: (store) => {
     if (!store.session.cancelDrag()) store.session.select([]);
   },
@@ -65,24 +68,25 @@ function duplicate(store: Store): void {
     return;
   }
   const before = new Set(craft.parts.order);
-  if (!store.apply(duplicateParts(ids))) return;
+  const hullLength = hullLengthOf(assessed(craft, store.settings.get().units));
+  if (!store.apply(duplicateParts(ids, called(craft, 'part', ids), hullLength))) return;
   const added = store.session.getState().craft.parts.order.filter((id) => !before.has(id));
   store.session.select(added.map((id) => ({ kind: 'part', id })));
 }
 
 /** Takes away what is selected, as one step. */
 function removeSelected(store: Store): void {
-  const { selection } = store.session.getState();
+  const { craft, selection } = store.session.getState();
   const removals = REMOVALS.flatMap(([kind, removal]) => {
     const ids = idsOf(selection, kind);
-    return ids.length ? [removal(ids)] : [];
+    return ids.length ? [removal(ids, called(craft, kind, ids))] : [];
   });
   const [first] = removals;
   if (!first) return;
   const label = removals.length === 1 ? first.label : `Remove ${selection.length} things`;
   store.apply(
-    step(label, (craft) => {
-      for (const { recipe } of removals) recipe(craft);
+    step(label, (draft) => {
+      for (const { recipe } of removals) recipe(draft);
     }),
   );
 }

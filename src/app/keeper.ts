@@ -19,7 +19,7 @@ export class Keeper {
   #working: Promise<void> | null = null;
 
   constructor(
-    private readonly keep: Pick<Keep, 'put'>,
+    private readonly keep: Pick<Keep, 'put' | 'jot' | 'unjot'>,
     private readonly reports: KeeperReports,
   ) {}
 
@@ -29,6 +29,7 @@ export class Keeper {
   }
 
   put(craft: KeptCraft): void {
+    this.keep.jot({ craft, known: this.#knownOf(craft) });
     this.#waiting.set(craft.id, craft);
     this.#working ??= this.#work();
   }
@@ -41,15 +42,22 @@ export class Keeper {
   async #work(): Promise<void> {
     for (let craft = this.#next(); craft; craft = this.#next()) {
       try {
-        const { displaced } = await this.keep.put(craft, this.#known.get(craft.id) ?? null);
-        this.knows(craft.id, craft.text);
-        if (displaced) this.reports.displaced(craft);
+        await this.#write(craft);
       } catch (error) {
         this.reports.failed(error);
       }
     }
     this.#working = null;
   }
+
+  async #write(craft: KeptCraft): Promise<void> {
+    const { displaced } = await this.keep.put(craft, this.#knownOf(craft));
+    this.knows(craft.id, craft.text);
+    if (displaced) this.reports.displaced(craft);
+    if (!this.#waiting.has(craft.id)) await this.keep.unjot(craft);
+  }
+
+  #knownOf = ({ id }: KeptCraft): string | null => this.#known.get(id) ?? null;
 
   #next(): KeptCraft | undefined {
     const [next] = this.#waiting.values();

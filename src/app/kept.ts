@@ -70,3 +70,6 @@ const versionOf = ({ name, changedAt, text, writer }: KeptCraft): KeptVersion =>
   text,
   writer,
 });
+
+export const newestFirst = (crafts: readonly KeptCraft[]): readonly KeptCraft[] =>
+  [...crafts].sort((a, b) => b.changedAt - a.changedAt);

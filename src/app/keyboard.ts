@@ -21,22 +21,24 @@ export function listenForKeys(store: Store): () => void {
   const onFocusOut = () => {
     drafted = null;
   };
+  // Fields keep these keys to themselves, so they are seen on their way down.
+  const onSettle = ({ key }: KeyboardEvent) => {
+    if (key === 'Enter' || key === 'Escape') drafted = null;
+  };
   const onKey = (event: KeyboardEvent) => {
-    if (event.key === 'Enter' || event.key === 'Escape') drafted = null;
     if (event.defaultPrevented || event.isComposing) return;
     const command = commandFor(event, closest(event.target, TYPED_IN));
     if (!command || !allowed(command, event, drafted)) return;
     event.preventDefault();
     COMMANDS[command](store);
   };
-  document.addEventListener('input', onInput);
-  document.addEventListener('focusout', onFocusOut);
-  document.addEventListener('keydown', onKey);
-  return () => {
-    document.removeEventListener('input', onInput);
-    document.removeEventListener('focusout', onFocusOut);
-    document.removeEventListener('keydown', onKey);
-  };
+  const stop = new AbortController();
+  const { signal } = stop;
+  document.addEventListener('input', onInput, { signal });
+  document.addEventListener('focusout', onFocusOut, { signal });
+  document.addEventListener('keydown', onSettle, { signal, capture: true });
+  document.addEventListener('keydown', onKey, { signal });
+  return () => stop.abort();
 }
 
 function allowed(command: string, { target, key }: KeyboardEvent, drafted: EventTarget | null): boolean {

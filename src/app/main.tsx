@@ -2,13 +2,14 @@
 import { createRoot } from 'react-dom/client';
 import { App } from './App.tsx';
 import { ErrorBoundary } from './ErrorBoundary.tsx';
-import { openKeep } from './keep.ts';
 import { listenForKeys } from './keyboard.ts';
 import { firstOpening } from './openings.ts';
+import { openKeep } from './openKeep.ts';
 import { settingsFrom } from './settings.ts';
 import { Store } from './store.ts';
 import './base.css';
 import './layout.css';
+import './panels.css';
 
 const keep = await openKeep();
 const [{ opening, refusal }, settings] = await Promise.all([
@@ -25,6 +26,7 @@ if (!keep.lasting) {
 }
 listenForKeys(store);
 keepOnLeaving(store);
+if (import.meta.env.PROD) void keepPageOffline();
 
 createRoot(document.getElementById('root')!).render(
   <ErrorBoundary store={store}>
@@ -32,12 +34,20 @@ createRoot(document.getElementById('root')!).render(
   </ErrorBoundary>,
 );
 
-/** A page that is hidden may never be shown again; where nothing lasts, leaving is asked about. */
+/** A page that goes takes in what is still being typed; where nothing lasts, leaving is asked about. */
 function keepOnLeaving({ session, keepNow }: Store): void {
   document.addEventListener('visibilitychange', () => {
     if (document.visibilityState === 'hidden') keepNow();
   });
+  addEventListener('pagehide', () => {
+    if (document.activeElement instanceof HTMLElement) document.activeElement.blur();
+  });
   addEventListener('beforeunload', (event) => {
     if (!keep.lasting && session.getState().undoLabel) event.preventDefault();
   });
+}
+
+/** Where the browser allows it, the page itself opens again without a network. */
+async function keepPageOffline(): Promise<void> {
+  await navigator.serviceWorker?.register('./sw.js').catch(() => null);
 }

@@ -2,23 +2,35 @@
 import { blankCraft } from '../craft/blank.ts';
 import type { Craft } from '../craft/craft.ts';
 import { parse } from '../craft/parse.ts';
+import type { SampleEntry } from '../panels/CraftsDialog.tsx';
 
 const files = import.meta.glob<string>('../../samples/*.json', { query: '?raw', import: 'default' });
 
 /** The craft that a first visit opens on. */
 const FIRST = 'museum-atrium';
 
-/** "museum-atrium", … in the order of the alphabet. */
-export const sampleNames: readonly string[] = Object.keys(files).map((path) =>
+const nameIn = (path: string): string =>
   path
     .split('/')
     .at(-1)!
-    .replace(/\.json$/, ''),
-);
+    .replace(/\.json$/, '');
 
 /** The text of a sample's craft file. */
 export const sampleText = (name: string): Promise<string> =>
   files[`../../samples/${name}.json`]?.() ?? Promise.reject(new Error(`There is no sample ${name}.`));
+
+/** Every sample with the first sentence of its notes. */
+export async function sampleEntries(): Promise<SampleEntry[]> {
+  const entries = await Promise.all(Object.keys(files).map((path) => sampleEntry(nameIn(path))));
+  return entries.flat();
+}
+
+async function sampleEntry(id: string): Promise<SampleEntry[]> {
+  const parsed = await sampleText(id).then(parse, () => null);
+  return parsed?.ok ? [{ id, name: parsed.craft.name, note: firstSentence(parsed.craft.notes) }] : [];
+}
+
+export const firstSentence = (text: string): string => /^.*?[.!?](?=\s|$)/s.exec(text)?.[0] ?? text;
 
 /** Without its sample, a first visit opens on an empty hull. */
 export async function firstSample(): Promise<Craft> {

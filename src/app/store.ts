@@ -16,7 +16,7 @@ import { freshId, rememberForTab } from './names.ts';
 import { Notices } from './notices.ts';
 import type { Settings } from './settings.ts';
 
-export type DialogId = 'crafts' | 'newCraft' | 'keys' | 'catalogue';
+export type DialogId = 'crafts' | 'newCraft' | 'keys';
 
 /** A craft about to be edited, and under which id it is kept. `known`: its text in the keep, if it is there. */
 export interface Opening {
@@ -32,7 +32,7 @@ export interface Refusal {
   readonly problems: readonly Problem[];
 }
 
-export const FIRST_VIEW: KeptView = { tilted: false, tab: 'selected' };
+export const FIRST_VIEW: KeptView = { tilted: false, tab: 'hull' };
 
 export class Store {
   readonly session: Session;

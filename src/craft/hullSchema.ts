@@ -62,10 +62,10 @@ const cylinder = z.strictObject({
   kind: z.literal('cylinder'),
   diameter,
   noseEnd: endKind.meta({ description: 'Shape of the nose' }),
-  noseLength: distance('Length of the nose'),
+  noseLength: distance('Length of the nose; a flat end does not use it'),
   middleLength: distance('Length of the cylinder between the ends'),
   tailEnd: endKind.meta({ description: 'Shape of the tail' }),
-  tailLength: distance('Length of the tail'),
+  tailLength: distance('Length of the tail; a flat end does not use it'),
 });
 
 const offsets = z.strictObject({
@@ -78,14 +78,17 @@ const offsets = z.strictObject({
     .array(z.strictObject({ at: distance('Station or tape distance'), size: distance('Diameter or girth') }))
     .min(3)
     .max(LIMITS.rows)
-    .meta({ description: 'Measured on the inflated hull, nose to tail, each farther aft than the last' }),
+    .meta({
+      description:
+        'Measured on the inflated hull, nose to tail, the first at 0, each farther aft than the last; size 0 at a pointed or rounded end, close rows where it is round',
+    }),
 });
 
 const patternRows = (width: string) =>
   z
     .array(
       z.strictObject({
-        tape: distance('Along the flat centre line from its nose end'),
+        tape: distance('Along the flat centre line from its nose end, the first at 0'),
         width: distance(width),
       }),
     )

@@ -12,6 +12,7 @@ export type Parsed =
 
 const MOST_CHARACTERS = 8_000_000;
 const MOST_PROBLEMS = 100;
+const LONGEST_NAME = 60;
 
 /** A craft from the text of a craft file. Never throws. */
 export function parse(text: string): Parsed {
@@ -38,12 +39,17 @@ export function parseJson(json: unknown): Parsed {
   if (!checked.success) {
     return {
       ok: false,
-      problems: limited(checked.error.issues.flatMap((issue) => problemsOf(issue, stepped.file))),
+      problems: limited(
+        named(
+          checked.error.issues.flatMap((issue) => problemsOf(issue, stepped.file)),
+          stepped.file,
+        ),
+      ),
     };
   }
   const problems = referenceProblems(checked.data);
   return problems.length
-    ? { ok: false, problems: limited(problems) }
+    ? { ok: false, problems: limited(named(problems, stepped.file)) }
     : { ok: true, craft: craftOf(checked.data) };
 }
 
@@ -51,6 +57,14 @@ const refuse = (path: string, found: string, allowed: string): Parsed => ({
   ok: false,
   problems: [{ path, found, allowed }],
 });
+
+/** Each problem with the name of the part, run or hardpoint it is in: a builder knows those, not their place in a list. */
+const named = (problems: Problem[], file: Record<string, unknown>): Problem[] =>
+  problems.map((problem) => {
+    const [, list, index] = /^(\w+)\[(\d+)\]/.exec(problem.path) ?? [];
+    const name = list && valueAt(file, [list, Number(index), 'name']);
+    return typeof name === 'string' && name ? { name: name.slice(0, LONGEST_NAME), ...problem } : problem;
+  });
 
 function limited(problems: Problem[]): Problem[] {
   if (problems.length <= MOST_PROBLEMS) return problems;

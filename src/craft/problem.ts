@@ -1,5 +1,7 @@
 /** What the loading gate says of one thing that is wrong with a file. */
 export interface Problem {
+  /** What the thing at fault is called, when the file says so: “Gondola”. */
+  readonly name?: string;
   /** Path of the field, as `parts[2].place.station`; empty for the file as a whole. */
   readonly path: string;
   /** The value found, as short text. */
@@ -8,8 +10,8 @@ export interface Problem {
   readonly allowed: string;
 }
 
-export const problemText = ({ path, found, allowed }: Problem): string =>
-  `${path || 'file'}: found ${found}; allowed: ${allowed}`;
+export const problemText = ({ name, path, found, allowed }: Problem): string =>
+  `${path || 'file'}${name ? ` (“${name}”)` : ''}: found ${found}; allowed: ${allowed}`;
 
 /** A path of keys and indices as it would be written in code. */
 export const pathText = (path: readonly PropertyKey[]): string =>

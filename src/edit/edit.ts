@@ -22,8 +22,7 @@ export interface Edit {
 
 export const step = (label: string, recipe: Recipe): Edit => ({ label, history: 'step', recipe });
 
-export const runOf = (run: string, label: string, recipe: Recipe): Edit => ({
-  label,
-  history: { run },
-  recipe,
-});
+export const runOf = (run: string, label: string, recipe: Recipe): Edit => inRun(step(label, recipe), run);
+
+/** The same edit as one of a burst: keystrokes in notes, arrow keys in a field. */
+export const inRun = (edit: Edit, run: string): Edit => ({ ...edit, history: { run } });

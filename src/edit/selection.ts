@@ -21,6 +21,15 @@ export const toggled = (selection: Selection, thing: Selectable): Selection =>
 export const idsOf = (selection: Selection, kind: Selectable['kind']): string[] =>
   selection.filter((each) => each.kind === kind).map((each) => each.id);
 
+const WORDS = { part: 'part', wire: 'wire run', hardpoint: 'hardpoint' } as const;
+
+/** "Camera" of one thing, "3 parts" of several: for labels. */
+export function called(craft: Craft, kind: Selectable['kind'], ids: readonly string[]): string {
+  const [only] = ids;
+  if (only === undefined || ids.length > 1) return `${ids.length} ${WORDS[kind]}s`;
+  return craft[`${kind}s`].byId[only]?.name || WORDS[kind];
+}
+
 /** Without what the craft no longer has. */
 export function pruned(selection: Selection, craft: Craft): Selection {
   const kept = selection.filter(({ kind, id }) => Object.hasOwn(craft[`${kind}s`].byId, id));

@@ -2,8 +2,9 @@
  * One hull form turned into another: length and greatest diameter are kept as far as both forms have them, so that
  * trying a form does not lose the hull.
  *
- *   Forms given by rows begin as the spheroid of that length and diameter. What a flat pattern is when inflated is
- *   taken here from its outline alone: r = girth / 2π, dx = √(ds² − dr²); a first guess, which the builder then mends.
+ *   Forms given by rows trace the outline of the hull as it is; without one, the spheroid of that length and diameter.
+ *   What a flat pattern is when inflated is taken here from its rows alone: r = girth / 2π, dx = √(ds² − dr²); a first
+ *   guess, which the builder then mends.
  *   Round two-sheet balloon: inflated diameter 0.7627 of the flat one (Paulsen 1994, The American Mathematical Monthly
  *   101, 953; the figure from memory).
  */
@@ -17,6 +18,14 @@ export interface Extent {
   readonly diameter: number;
 }
 
+/** The outline of a hull along its keel, m. */
+export interface Outline {
+  /** Tape distance of the tail tip. */
+  readonly tape: number;
+  radius(station: number): number;
+  stationAt(tape: number): number;
+}
+
 const ROUND_SHRINK = 0.7627;
 const ROWS = 21;
 const GORES = 8;
@@ -26,13 +35,14 @@ const clamp = (value: number, least: number, most: number): number => Math.min(m
 const tidy = (value: number): number => Math.round(value * 1e5) / 1e5 + 0;
 
 /** `previous` itself when it already is of that kind. */
-export function shapeAs(kind: ShapeKind, previous: HullShape): HullShape {
+export function shapeAs(kind: ShapeKind, previous: HullShape, outline: Outline | null = null): HullShape {
   if (previous.kind === kind) return previous;
-  const { length, diameter } = extentOf(previous);
-  return FORMS[kind]({
-    length: tidy(clamp(length, 0.05, LIMITS.length)),
-    diameter: tidy(clamp(diameter, 0.02, LIMITS.length)),
-  });
+  const found = extentOf(previous);
+  const extent = {
+    length: tidy(clamp(found.length, 0.05, LIMITS.length)),
+    diameter: tidy(clamp(found.diameter, 0.02, LIMITS.length)),
+  };
+  return FORMS[kind](extent, outline ? traced(outline) : spheroidSections(extent));
 }
 
 /** Length and greatest diameter of a form, m; of flat patterns roughly, see above. */
@@ -91,7 +101,7 @@ function outlineExtent(rows: readonly PatternRow[], diameterPerWidth: number): E
   return { length, diameter: diameterPerWidth * Math.max(...rows.map(({ width }) => width)) };
 }
 
-const FORMS: Readonly<Record<ShapeKind, (extent: Extent) => HullShape>> = {
+const FORMS: Readonly<Record<ShapeKind, (extent: Extent, sections: readonly Section[]) => HullShape>> = {
   spheroid: (extent) => ({ kind: 'spheroid', ...extent }),
   twoSpheroid: ({ length, diameter }) => ({
     kind: 'twoSpheroid',
@@ -133,14 +143,14 @@ const FORMS: Readonly<Record<ShapeKind, (extent: Extent) => HullShape>> = {
       tailLength: end,
     };
   },
-  offsets: (extent) => ({
+  offsets: (_, sections) => ({
     kind: 'offsets',
     along: 'station',
     across: 'diameter',
-    rows: spheroidRows(extent).map(({ station, diameter }) => ({ at: tidy(station), size: tidy(diameter) })),
+    rows: sections.map(({ station, diameter }) => ({ at: tidy(station), size: tidy(diameter) })),
   }),
-  gores: (extent) => ({ kind: 'gores', count: GORES, rows: pattern(extent, GORES) }),
-  twoSheet: (extent) => ({ kind: 'twoSheet', rows: pattern(extent, 2) }),
+  gores: (_, sections) => ({ kind: 'gores', count: GORES, rows: pattern(sections, GORES) }),
+  twoSheet: (_, sections) => ({ kind: 'twoSheet', rows: pattern(sections, 2) }),
   roundTwoSheet: ({ length }) => ({
     kind: 'roundTwoSheet',
     flatDiameter: tidy(clamp(length / ROUND_SHRINK, 0.05, LIMITS.length)),
@@ -148,23 +158,37 @@ const FORMS: Readonly<Record<ShapeKind, (extent: Extent) => HullShape>> = {
   }),
 };
 
-/** A spheroid's section by section, closer together towards the tips. */
-const spheroidRows = ({ length, diameter }: Extent) =>
-  Array.from({ length: ROWS }, (_, i) => {
-    const turn = (Math.PI * i) / (ROWS - 1);
-    const edge = i === 0 || i === ROWS - 1;
-    return { station: (length * (1 - Math.cos(turn))) / 2, diameter: edge ? 0 : diameter * Math.sin(turn) };
+interface Section {
+  readonly station: number;
+  readonly tape: number;
+  readonly diameter: number;
+}
+
+/** From 0 to 1, closer together towards the ends, where outlines bend. */
+const SPACING = Array.from({ length: ROWS }, (_, i) => (1 - Math.cos((Math.PI * i) / (ROWS - 1))) / 2);
+
+const traced = ({ tape, radius, stationAt }: Outline): Section[] =>
+  SPACING.map((share) => {
+    const station = stationAt(share * tape);
+    const tip = share === 0 || share === 1;
+    return { station, tape: share * tape, diameter: tip ? 0 : 2 * radius(station) };
   });
 
-/** The flat pattern of that spheroid in so many equal pieces, each as wide as its share of the girth; smaller where it would not fit in a craft file. */
-function pattern(extent: Extent, pieces: number): PatternRow[] {
-  let tape = 0;
-  const rows = spheroidRows(extent).map((row, i, all) => {
-    const before = all[i - 1] ?? row;
-    tape += Math.hypot(row.station - before.station, (row.diameter - before.diameter) / 2);
-    return { tape, width: (Math.PI * row.diameter) / pieces };
+function spheroidSections({ length, diameter }: Extent): Section[] {
+  let [tape, x, r] = [0, 0, 0];
+  return SPACING.map((share) => {
+    const station = share * length;
+    const radius = diameter * Math.sqrt(share * (1 - share));
+    tape += Math.hypot(station - x, radius - r);
+    [x, r] = [station, radius];
+    return { station, tape, diameter: 2 * radius };
   });
-  const scale = Math.min(1, LIMITS.length / Math.max(tape, ...rows.map(({ width }) => width)));
+}
+
+/** The flat pattern in so many equal pieces, each as wide as its share of the girth; smaller where it would not fit in a craft file. */
+function pattern(sections: readonly Section[], pieces: number): PatternRow[] {
+  const rows = sections.map(({ tape, diameter }) => ({ tape, width: (Math.PI * diameter) / pieces }));
+  const scale = Math.min(1, LIMITS.length / Math.max(...rows.flatMap(({ tape, width }) => [tape, width])));
   return rows.map((row) => ({ tape: tidy(scale * row.tape), width: tidy(scale * row.width) }));
 }
 

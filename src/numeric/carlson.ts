@@ -1,12 +1,11 @@
 /**
- * Carlson's symmetric elliptic integrals
+ * Carlson's symmetric elliptic integral
  *
- *   R_F(x, y, z) = ½ ∫₀^∞ dt / √((t+x)(t+y)(t+z))
  *   R_D(x, y, z) = 3/2 ∫₀^∞ dt / ((t+z) √((t+x)(t+y)(t+z)))
  *
  * by duplication: each step replaces x by (x + λ)/4, λ = √x√y + √y√z + √z√x, until the three are nearly equal, then
  * a series to fifth order. Source: B. C. Carlson, Numerical computation of real or complex elliptic integrals,
- * Numer. Algorithms 10 (1995); DLMF 19.36.1 and 19.36.2.
+ * Numer. Algorithms 10 (1995); DLMF 19.36.2.
  */
 
 /** Largest departure from equality, to the sixth power, that the series leaves behind. */
@@ -18,27 +17,10 @@ interface Triplet {
   z: number;
 }
 
-/** x, y, z ≥ 0, at most one of them 0; a RangeError otherwise, since that is a mistake in the caller. */
-export function carlsonRF(x: number, y: number, z: number): number {
-  requireDomain(x + y > 0 && y + z > 0 && z + x > 0 && Math.min(x, y, z) >= 0, 'R_F');
-  const now = { x, y, z };
-  const mean = (x + y + z) / 3;
-  const reach = farthest(now, mean) / (3 * ROUNDING) ** (1 / 6);
-  let scale = 1;
-  let a = mean;
-  while (reach * scale > a) {
-    a = (a + duplicate(now)) / 4;
-    scale /= 4;
-  }
-  const dx = ((mean - x) * scale) / a;
-  const dy = ((mean - y) * scale) / a;
-  const dz = -dx - dy;
-  return seriesRF(dx * dy - dz * dz, dx * dy * dz) / Math.sqrt(a);
-}
-
 /** x, y ≥ 0, not both 0; z > 0; a RangeError otherwise. */
 export function carlsonRD(x: number, y: number, z: number): number {
-  requireDomain(Math.min(x, y) >= 0 && x + y > 0 && z > 0, 'R_D');
+  const fits = Math.min(x, y) >= 0 && x + y > 0 && z > 0;
+  if (!fits) throw new RangeError('R_D has no value here');
   const now = { x, y, z };
   const mean = (x + y + 3 * z) / 5;
   const reach = farthest(now, mean) / (ROUNDING / 4) ** (1 / 6);
@@ -58,10 +40,6 @@ export function carlsonRD(x: number, y: number, z: number): number {
   return (scale * seriesRD(dx, dy)) / (a * Math.sqrt(a)) + 3 * sum;
 }
 
-function requireDomain(fits: boolean, name: string): void {
-  if (!fits) throw new RangeError(`${name} has no value here`);
-}
-
 const farthest = ({ x, y, z }: Triplet, mean: number): number =>
   Math.max(Math.abs(mean - x), Math.abs(mean - y), Math.abs(mean - z));
 
@@ -74,9 +52,6 @@ function duplicate(now: Triplet): number {
   now.z = (now.z + lambda) / 4;
   return lambda;
 }
-
-const seriesRF = (e2: number, e3: number): number =>
-  1 - e2 / 10 + e3 / 14 + (e2 * e2) / 24 - (3 * e2 * e3) / 44;
 
 function seriesRD(dx: number, dy: number): number {
   const dz = -(dx + dy) / 3;

@@ -73,29 +73,3 @@ export function integrateFixed(f: (x: number) => number, a: number, b: number, n
   }
   return sum * half;
 }
-
-/**
- * Several integrals over [a, b] at once, for integrands that share their work: `f` adds nothing itself, it
- * writes its components into `out` (length `size`), which is reused between calls.
- */
-export function integrateVector(
-  f: (x: number, out: number[]) => void,
-  size: number,
-  a: number,
-  b: number,
-  n = 16,
-  panels = 1,
-): number[] {
-  const { nodes, weights } = gaussLegendre(n);
-  const half = (b - a) / (2 * panels);
-  const sums = new Array<number>(size).fill(0);
-  const out = new Array<number>(size).fill(0);
-  for (let panel = 0; panel < panels; panel += 1) {
-    const middle = a + (2 * panel + 1) * half;
-    for (let i = 0; i < n; i += 1) {
-      f(middle + half * nodes[i]!, out);
-      for (let k = 0; k < size; k += 1) sums[k]! += weights[i]! * half * out[k]!;
-    }
-  }
-  return sums;
-}

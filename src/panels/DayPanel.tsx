@@ -38,7 +38,7 @@ function DayFields({ day }: { day: Day }) {
       return (
         <>
           <DayField day={day} field="temperature" label="Temperature" quantity="temperature" />
-          <DayField day={day} field="pressure" label="Station pressure" quantity="pressure" />
+          <DayField day={day} field="pressure" label="Air pressure on site" quantity="pressure" />
           <DayField day={day} field="humidity" label="Humidity" quantity="fraction" />
         </>
       );
@@ -72,7 +72,7 @@ function DayField<D extends Day>({ day, field, label, quantity }: DayFieldProps<
       value={day[field] as number}
       quantity={quantity}
       units={units}
-      onCommit={(next) => commit(setDay(label.toLowerCase(), { ...day, [field]: next }))}
+      onCommit={(next, run) => commit(setDay(label.toLowerCase(), { ...day, [field]: next }), run)}
     />
   );
 }

@@ -50,14 +50,16 @@ export function FilmPanel() {
         quantity="arealDensity"
         units={units}
         hint="Weigh a cut square, or take the maker’s sheet."
-        onCommit={(next) => commit(setFilm('areal density', { arealDensity: next }))}
+        onCommit={(next, run) => commit(setFilm('areal density', { arealDensity: next }), run)}
       />
       <QuantityField
         label="± areal density"
         value={arealDensityTolerance}
         quantity="arealDensity"
         units={units}
-        onCommit={(next) => commit(setFilm('areal density tolerance', { arealDensityTolerance: next }))}
+        onCommit={(next, run) =>
+          commit(setFilm('areal density tolerance', { arealDensityTolerance: next }), run)
+        }
       />
       <RowList rows={[assessment.rows['hull.filmArea'], assessment.rows['hull.filmMass']]} units={units} />
     </section>

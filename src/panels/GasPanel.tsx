@@ -2,6 +2,7 @@
 import { catalogue } from '../catalogue/catalogue.ts';
 import type { Gas } from '../craft/schema.ts';
 import { setGas } from '../edit/edits/craft.ts';
+import { HAZARDS } from '../report/hazards.ts';
 import { Caution } from './Caution.tsx';
 import { useCommit } from './commit.ts';
 import { useEditor } from './editor.ts';
@@ -19,7 +20,7 @@ export function GasPanel() {
   const { craft, assessment, units } = useEditor();
   const commit = useCommit();
   const { lifting, purity, superheat, gaugePressure } = craft.gas;
-  const set = (field: string, change: Partial<Gas>) => commit(setGas(field, change));
+  const set = (field: string, change: Partial<Gas>, run?: string) => commit(setGas(field, change), run);
   const known = catalogue.gases.find((gas) => gas.lifting === lifting && gas.purity === purity);
   const choose = (id: string) => {
     const gas = catalogue.gases.find((each) => each.id === id)!;
@@ -46,14 +47,14 @@ export function GasPanel() {
         choices={LIFTING_CHOICES}
         onCommit={(next) => set('lifting gas', { lifting: next })}
       />
-      <GasCaution lifting={lifting} />
+      <Caution>{HAZARDS[lifting]}</Caution>
       <QuantityField
         label="Purity"
         value={purity}
         quantity="fraction"
         units={units}
         hint="Share by volume; the rest is taken as air."
-        onCommit={(next) => set('purity', { purity: next })}
+        onCommit={(next, run) => set('purity', { purity: next }, run)}
       />
       <QuantityField
         label="Superheat"
@@ -61,7 +62,7 @@ export function GasPanel() {
         quantity="temperatureDifference"
         units={units}
         hint="How much warmer the gas is than the air."
-        onCommit={(next) => set('superheat', { superheat: next })}
+        onCommit={(next, run) => set('superheat', { superheat: next }, run)}
       />
       <QuantityField
         label="Gauge pressure"
@@ -69,27 +70,10 @@ export function GasPanel() {
         quantity="gaugePressure"
         units={units}
         hint="Gas pressure above the air outside."
-        onCommit={(next) => set('gauge pressure', { gaugePressure: next })}
+        onCommit={(next, run) => set('gauge pressure', { gaugePressure: next }, run)}
       />
-      <Caution>
-        A closed envelope in the sun gains pressure and can burst. Vent it, watch the gauge, and keep to the
-        film maker’s limits.
-      </Caution>
+      <Caution>{HAZARDS.pressure}</Caution>
       <RowList rows={rows} units={units} />
     </section>
-  );
-}
-
-function GasCaution({ lifting }: { lifting: Gas['lifting'] }) {
-  return lifting === 'helium' ? (
-    <Caution>
-      Helium displaces the air one breathes, and whoever breathes it has no warning before fainting. Fill and
-      vent only where air moves freely, never inhale it, and follow the supplier’s sheet.
-    </Caution>
-  ) : (
-    <Caution>
-      Hydrogen burns with a flame one hardly sees, and mixed with air it explodes. Many sites forbid it. Use
-      it only where local rules allow it and with people trained for it.
-    </Caution>
   );
 }

@@ -2,6 +2,7 @@
 import type { HullSpec } from '../craft/hullSchema.ts';
 import { chooseShape, setHull } from '../edit/edits/craft.ts';
 import { shapeAs } from '../edit/shapeAs.ts';
+import { keelOutline } from '../report/outline.ts';
 import { useCommit } from './commit.ts';
 import { useEditor } from './editor.ts';
 import { ChoiceField } from './fields/ChoiceField.tsx';
@@ -13,6 +14,7 @@ import { ShapeFields } from './hull/ShapeFields.tsx';
 import { hasRows } from './hull/shapeFields.ts';
 import { RowList } from './RowList.tsx';
 import { SHAPE_CHOICES } from './words.ts';
+import './hull/hull.css';
 
 const HULL_ROWS = [
   'hull.length',
@@ -32,13 +34,14 @@ export function HullPanel() {
   const commit = useCommit();
   const { shape, seams, patches } = craft.hull;
   const { geometry, rows } = assessment;
+  const outline = geometry.status === 'solved' ? keelOutline(geometry.hull) : null;
   return (
     <section className="panel" aria-label="Hull">
       <ChoiceField
         label="Shape"
         value={shape.kind}
         choices={SHAPE_CHOICES}
-        onCommit={(kind) => commit(chooseShape(shapeAs(kind, shape)))}
+        onCommit={(kind) => commit(chooseShape(shapeAs(kind, shape, outline)))}
       />
       <ShapeFields shape={shape} />
       {hasRows(shape) && <RowsTable shape={shape} />}
@@ -66,7 +69,9 @@ function SeamFields({ seams, counted }: { seams: HullSpec['seams']; counted: boo
         quantity="massPerMetre"
         units={units}
         hint="Tape, overlap, weld"
-        onCommit={(massPerMetre) => commit(setHull('seam mass', { seams: { ...seams, massPerMetre } }))}
+        onCommit={(massPerMetre, run) =>
+          commit(setHull('seam mass', { seams: { ...seams, massPerMetre } }), run)
+        }
       />
       {counted && (
         <CountField

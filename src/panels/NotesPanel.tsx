@@ -1,5 +1,6 @@
 /** The craft's name and the builder's notes. */
 import { setName, setNotes } from '../edit/edits/craft.ts';
+import { HAZARDS } from '../report/hazards.ts';
 import { Caution } from './Caution.tsx';
 import { useCommit } from './commit.ts';
 import { useEditor } from './editor.ts';
@@ -12,18 +13,16 @@ export function NotesPanel() {
   return (
     <section className="panel" aria-label="Notes">
       <TextField label="Craft name" value={craft.name} onCommit={(name) => commit(setName(name))} />
-      <NotesField label="Notes" rows={14} value={craft.notes} onCommit={(notes) => commit(setNotes(notes))} />
+      <NotesField
+        label="Notes"
+        rows={14}
+        value={craft.notes}
+        onCommit={(notes, run) => commit(setNotes(notes), run)}
+      />
       <FlightCaution />
     </section>
   );
 }
 
 /** What to mind before it flies. */
-export function FlightCaution() {
-  return (
-    <Caution>
-      Flying near people can hurt them, and a light craft drifts in any draught. Fly by the rules of the local
-      aviation authority and of the site; these figures stand in for no inspection, licence or makers’ sheet.
-    </Caution>
-  );
-}
+export const FlightCaution = () => <Caution>{HAZARDS.people}</Caution>;

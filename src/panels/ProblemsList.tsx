@@ -13,6 +13,7 @@ export function ProblemsList({ title, problems }: ProblemsListProps) {
       <ul>
         {problems.map((problem) => (
           <li key={problemText(problem)}>
+            {problem.name && <strong>{problem.name} </strong>}
             <code>{problem.path || 'file'}</code>: found {problem.found}; allowed: {problem.allowed}.
           </li>
         ))}

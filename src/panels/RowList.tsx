@@ -1,7 +1,7 @@
 /** A few rows of the report: name, figure, and what to mind. */
 import type { Row } from '../report/row.ts';
+import { rowText } from '../report/rowText.ts';
 import type { UnitSystem } from '../units/units.ts';
-import { rowText } from './rowText.ts';
 
 export function RowList({ rows, units }: { rows: readonly (Row | undefined)[]; units: UnitSystem }) {
   return (

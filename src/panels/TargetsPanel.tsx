@@ -36,7 +36,8 @@ function TargetFields() {
   const { craft, units } = useEditor();
   const commit = useCommit();
   const { heaviness, pitchTolerance, heelTolerance, leastPendulumDepth } = craft.targets;
-  const set = (field: string, change: Partial<Targets>) => commit(setTargets(field, change));
+  const set = (field: string, change: Partial<Targets>, run?: string) =>
+    commit(setTargets(field, change), run);
   return (
     <>
       <QuantityField
@@ -45,14 +46,14 @@ function TargetFields() {
         quantity="mass"
         units={units}
         hint="Negative is light"
-        onCommit={(least) => set('least heaviness', { heaviness: { ...heaviness, least } })}
+        onCommit={(least, run) => set('least heaviness', { heaviness: { ...heaviness, least } }, run)}
       />
       <QuantityField
         label="Greatest heaviness"
         value={heaviness.most}
         quantity="mass"
         units={units}
-        onCommit={(most) => set('greatest heaviness', { heaviness: { ...heaviness, most } })}
+        onCommit={(most, run) => set('greatest heaviness', { heaviness: { ...heaviness, most } }, run)}
       />
       <QuantityField
         label="Pitch tolerance"
@@ -60,7 +61,7 @@ function TargetFields() {
         quantity="angle"
         units={units}
         hint="Either way, still level"
-        onCommit={(next) => set('pitch tolerance', { pitchTolerance: next })}
+        onCommit={(next, run) => set('pitch tolerance', { pitchTolerance: next }, run)}
       />
       <QuantityField
         label="Heel tolerance"
@@ -68,7 +69,7 @@ function TargetFields() {
         quantity="angle"
         units={units}
         hint="Either way, still even"
-        onCommit={(next) => set('heel tolerance', { heelTolerance: next })}
+        onCommit={(next, run) => set('heel tolerance', { heelTolerance: next }, run)}
       />
       <QuantityField
         label="Least pendulum depth"
@@ -76,7 +77,7 @@ function TargetFields() {
         quantity="smallLength"
         units={units}
         hint="CB above CG"
-        onCommit={(next) => set('least pendulum depth', { leastPendulumDepth: next })}
+        onCommit={(next, run) => set('least pendulum depth', { leastPendulumDepth: next }, run)}
       />
     </>
   );
@@ -103,7 +104,7 @@ function SupportFields() {
           prefix="Support"
           place={support}
           at={at}
-          onPlace={(place) => commit(setSupport(place))}
+          onPlace={(place, _, run) => commit(setSupport(place), run)}
         />
       )}
       {support && <RowList rows={SUPPORT_ROWS.map((key) => assessment.rows[key])} units={units} />}

@@ -1,10 +1,10 @@
 /** The one sentence, and the five verdicts, each opening into its working. */
-import { useId, useState } from 'react';
+import { type KeyboardEvent, useId, useState } from 'react';
+import { rowText } from '../report/rowText.ts';
 import type { Verdict } from '../report/verdict.ts';
 import type { UnitSystem } from '../units/units.ts';
 import { useEditor } from './editor.ts';
 import { RowList } from './RowList.tsx';
-import { marginText, rowText } from './rowText.ts';
 
 export function Verdicts() {
   const { assessment, units } = useEditor();
@@ -32,13 +32,18 @@ export function Verdicts() {
 const STATE_WORDS: Readonly<Record<Verdict['state'], string>> = {
   met: 'meets its target',
   missed: 'misses its target',
-  open: 'cannot be told',
+  open: 'is open',
 };
 
 function VerdictCard({ verdict, units }: { verdict: Verdict; units: UnitSystem }) {
   const [open, setOpen] = useState(false);
   const id = useId();
   const { row, state } = verdict;
+  const onKeyDown = (event: KeyboardEvent) => {
+    if (!open || event.key !== 'Escape') return;
+    event.stopPropagation();
+    setOpen(false);
+  };
   return (
     <div className="verdict" data-state={state} data-verdict={verdict.key}>
       <button
@@ -47,11 +52,12 @@ function VerdictCard({ verdict, units }: { verdict: Verdict; units: UnitSystem }
         aria-expanded={open}
         aria-controls={id}
         onClick={() => setOpen(!open)}
+        onKeyDown={onKeyDown}
       >
         <span className="verdict-title">{verdict.title}</span>
         <span className="verdict-word">{verdict.word}</span>
         <span className="verdict-number number">{rowText(row, units)}</span>
-        <span className="verdict-margin">{marginText(verdict.margin, row.quantity, units)}</span>
+        <span className="verdict-margin">{verdict.marginWords}</span>
         <span className="verdict-state">{STATE_WORDS[state]}</span>
       </button>
       <div id={id} className="verdict-working" hidden={!open}>
@@ -67,7 +73,7 @@ function WorkingText({ verdict: { row, target, working }, units }: { verdict: Ve
       <p>
         <strong>Wanted:</strong> {target}.
       </p>
-      {row.why && <p>{row.why}</p>}
+      {row.status !== 'solved' && <p>{row.why}</p>}
       <p className="formula">{working.formula}</p>
       <RowList rows={working.inputs} units={units} />
       <p className="source">

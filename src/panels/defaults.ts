@@ -12,6 +12,10 @@ export const defaultPlace = ({ geometry }: Assessment): Place => ({
   drop: 0,
 });
 
+/** m; null while the hull cannot be formed. */
+export const hullLengthOf = ({ geometry }: Assessment): number | null =>
+  geometry.status === 'solved' ? geometry.hull.length : null;
+
 export const blankPart = (place: Place): PartFields => ({
   kind: 'load',
   name: 'New part',

@@ -1,7 +1,7 @@
 /** A craft with everything computed that more than one question needs: hull, air, where each mass is, how it loads. */
 import { type Craft, listed } from '../craft/craft.ts';
 import type { Place } from '../craft/placeSchema.ts';
-import type { Copies, WireEnd } from '../craft/schema.ts';
+import type { Copies, WireEnd, WireRun } from '../craft/schema.ts';
 import { kept } from '../numeric/kept.ts';
 import { type Outcome, solved } from '../numeric/outcome.ts';
 import { type Air, airOf } from './air/day.ts';
@@ -56,12 +56,8 @@ function stateOn(craft: Craft, hull: Hull): CraftState {
   const skin = skinMassOf(craft.hull, hull, craft.film);
   const parts = listed(craft.parts);
   const pieces = Object.fromEntries(parts.map((part) => [part.id, piecesOfPart(part, hull)]));
-  const endOf = (end: WireEnd): RunEnd =>
-    end.kind === 'part'
-      ? endOfPieces(pieces[end.part]!, craft.parts.byId[end.part]!.copies.kind)
-      : looseEnd(end.place, hull);
   const branches = Object.fromEntries(
-    listed(craft.wires).map((wire) => [wire.id, branchesOfRun(wire, endOf(wire.from), endOf(wire.to), hull)]),
+    listed(craft.wires).map((wire) => [wire.id, branchesBetween(craft, wire, pieces, hull)]),
   );
   const film = bodyOnAxis(skin.film);
   const seams = bodyOnAxis(skin.seams);
@@ -101,6 +97,20 @@ function stateOn(craft: Craft, hull: Hull): CraftState {
     },
     covariance: covarianceOf(uncertain),
   };
+}
+
+/** The branches of a run of the craft, its ends where the pieces are. */
+export function branchesBetween(
+  craft: Craft,
+  wire: WireRun,
+  pieces: CraftState['pieces'],
+  hull: Hull,
+): readonly Branch[] {
+  const endOf = (end: WireEnd): RunEnd =>
+    end.kind === 'part'
+      ? endOfPieces(pieces[end.part]!, craft.parts.byId[end.part]!.copies.kind)
+      : looseEnd(end.place, hull);
+  return branchesOfRun(wire, endOf(wire.from), endOf(wire.to), hull);
 }
 
 /** A part of several pieces at one place is one end of a run; a pair or a ring has an end at each piece. */

@@ -9,6 +9,7 @@ import { positionOf } from '../physics/mass/position.ts';
 import { type Branch, drawnBranch } from '../physics/mass/wirePath.ts';
 import { inUnits } from '../units/sentence.ts';
 import type { UnitSystem } from '../units/units.ts';
+import { adviceOf } from './advice.ts';
 import type { Assessment, Geometry } from './assessment.ts';
 import { beamOf, leadBar } from './beam.ts';
 import { cautionsOf } from './cautions.ts';
@@ -18,8 +19,9 @@ import { hullRows, massRows } from './hullRows.ts';
 import { leadRows, oneWeightRows } from './leadRows.ts';
 import type { Row } from './row.ts';
 import { noRow, type Rows } from './rows.ts';
+import { figureText } from './rowText.ts';
 import type { Verdict } from './verdict.ts';
-import { meetsTargets, verdictsOf } from './verdicts.ts';
+import { meetsTargets, type PlainVerdict, verdictsOf } from './verdicts.ts';
 
 /** Sentences come in the units asked for; values are SI always. Never throws for a craft from the loading gate. */
 export function assess(craft: Craft, units: UnitSystem = 'metric'): Assessment {
@@ -31,6 +33,7 @@ export function assess(craft: Craft, units: UnitSystem = 'metric'): Assessment {
       verdicts: [],
       met: false,
       headline: sentence,
+      advice: [],
       geometry: state,
       cautions: [],
     };
@@ -48,19 +51,23 @@ function assessState(state: CraftState, units: UnitSystem): Assessment {
     ...supportRows(state),
   };
   const verdicts = verdictsOf(state, rows);
+  const advice = adviceOf(state, rows);
   const read = (sentence: string) => inUnits(sentence, units);
   const readRow = (row: Row): Row => (row.why.includes('{') ? { ...row, why: read(row.why) } : row);
-  const readVerdict = (verdict: Verdict): Verdict => ({
+  const readVerdict = ({ sides, ...verdict }: PlainVerdict): Verdict => ({
     ...verdict,
+    figure: figureText(verdict.row, sides, units),
     row: readRow(verdict.row),
     target: read(verdict.target),
+    marginWords: read(verdict.marginWords),
     working: { ...verdict.working, inputs: verdict.working.inputs.map(readRow) },
   });
   return {
     rows: Object.fromEntries(Object.entries(rows).map(([key, row]) => [key, readRow(row)])),
     verdicts: verdicts.map(readVerdict),
     met: meetsTargets(verdicts),
-    headline: read(headlineOf(state, rows, verdicts)),
+    headline: read(headlineOf(state, rows, verdicts, advice)),
+    advice,
     geometry: geometryOf(state, rows),
     cautions: cautionsOf(state).map(read),
   };

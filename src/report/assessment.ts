@@ -2,6 +2,7 @@
 import type { Infeasible } from '../numeric/outcome.ts';
 import type { Vec3 } from '../numeric/vector.ts';
 import type { Hull } from '../physics/hull/hull.ts';
+import type { Advice } from './advice.ts';
 import type { Row } from './row.ts';
 import type { Verdict } from './verdict.ts';
 
@@ -51,6 +52,8 @@ export interface Assessment {
   readonly met: boolean;
   /** The one sentence that says what is wrong, or that nothing is. */
   readonly headline: string;
+  /** What could be done, ready to be carried out. */
+  readonly advice: readonly Advice[];
   readonly geometry: Geometry | Infeasible;
   /** Things to mind that belong to no single row: a part beyond the hull, air outside the formula's range. */
   readonly cautions: readonly string[];

@@ -44,7 +44,7 @@ export function massRows(state: CraftState): Rows {
       value: air.density,
       caution: air.cautions.join(' '),
     }),
-    'air.pressure': row({ label: 'Station pressure', quantity: 'pressure', value: air.pressure }),
+    'air.pressure': row({ label: 'Air pressure on site', quantity: 'pressure', value: air.pressure }),
     'gas.density': row({ label: 'Gas density', quantity: 'density', value: gasDensity }),
     'gas.mass': row({ label: 'Gas mass', quantity: 'mass', value: gasDensity * hull.volume }),
     'lift.gross': row({

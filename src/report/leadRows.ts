@@ -19,20 +19,21 @@ export const leadPosition = ({ craft, hull }: CraftState): Vec3 =>
 export function leadRows(state: CraftState): Rows {
   const { craft, loading } = state;
   const at = leadPosition(state);
-  const lead = levellingWeight(loading, at);
+  const exact = levellingWeight(loading, at);
+  const within = levellingWithin(loading, at, craft.targets.pitchTolerance);
+  // Level within the tolerance, and only weight on the other side would better it: then none is needed.
+  const none = exact.status === 'infeasible' && within.status === 'solved' && within.value === 0;
+  const lead = none ? within : exact;
   const after = lead.status === 'solved' ? solved(withWeight(loading, lead.value, at)) : lead;
   const leadOf = (each: Loading) => valueOrNull(levellingWeight(each, at));
   const uncertainty = lead.status === 'solved' && lead.value > 0 ? spread(state, leadOf) : null;
   return {
     'lead.mass': rowOf(lead, 'Lead to level exactly', 'mass', {
       uncertainty,
-      caution: leadCaution(state, after),
+      caution: leadCaution(state, lead, after),
+      why: none ? `None is needed within the tolerance. ${exact.why}` : '',
     }),
-    'lead.massWithinTolerance': rowOf(
-      levellingWithin(loading, at, craft.targets.pitchTolerance),
-      'Least lead within the pitch tolerance',
-      'mass',
-    ),
+    'lead.massWithinTolerance': rowOf(within, 'Least lead within the pitch tolerance', 'mass'),
     'lead.station': row({ label: 'Lead station', quantity: 'length', value: at[0] }),
     'lead.degreesPerGram': rowOf(pitchPerMass(loading, at), 'Turn per mass there', 'anglePerMass', {
       why: '+ nose-up; for the first of the lead, as the craft is now.',
@@ -55,8 +56,12 @@ const afterRow = (
 ): Row => rowOf(after.status === 'solved' ? solved(figure(after.value)) : after, label, quantity);
 
 /** What is wrong with the craft that has its lead, or null. */
-function leadCaution({ air, gasDensity }: CraftState, after: Outcome<Loading>): string | null {
-  if (after.status === 'infeasible') return null;
+function leadCaution(
+  { air, gasDensity }: CraftState,
+  lead: Outcome<number>,
+  after: Outcome<Loading>,
+): string | null {
+  if (lead.status === 'infeasible' || lead.value === 0 || after.status === 'infeasible') return null;
   const depth = pendulumDepthOf(after.value);
   if (depth !== null && depth <= 0) {
     return `With it the CG still stands ${say(-depth, 'smallLength')} above the CB, so the craft turns over. Hang the heavy parts lower.`;

@@ -1,6 +1,6 @@
 /** How rows are made: one place that keeps "no bare NaN" and gives every figure its unit. */
 import type { Outcome } from '../numeric/outcome.ts';
-import { type Quantity, siSymbolOf } from '../units/units.ts';
+import { type Quantity, siSymbolOf, unitOf } from '../units/units.ts';
 import type { Row, RowStatus } from './row.ts';
 
 export interface RowSpec {
@@ -50,5 +50,11 @@ export const rowOf = (
 
 /** The SI unit as JSON gives it; 1 for plain numbers, as the SI Brochure writes it. */
 const unitText = (quantity: Quantity): string => siSymbolOf(quantity) || '1';
+
+/** Whether it is less than half of the last digit that is usually shown. */
+export function insignificant(si: number, quantity: Quantity): boolean {
+  const unit = unitOf(quantity, 'metric');
+  return Math.abs(si) < (unit.si * 10 ** -unit.digits) / 2;
+}
 
 export type Rows = Readonly<Record<string, Row>>;

@@ -14,10 +14,14 @@ export interface Verdict {
   readonly word: string;
   /** The figure it rests on. */
   readonly row: Row;
+  /** That figure as one says it, without a sign: "188 ± 50 g light", "15.8° nose-up". */
+  readonly figure: string;
   /** The target in words: "within ±2.0°". */
   readonly target: string;
   /** How far inside (+) or outside (−) the target, in the row's quantity; null where there is no such number. */
   readonly margin: number | null;
+  /** The margin in words: "256 mm to spare", "off by 13.8°"; empty where there is none. */
+  readonly marginWords: string;
   readonly working: Working;
 }
 

@@ -60,8 +60,8 @@ export const LIGHT: Palette = {
   lead: '#454a66',
   bob: '#8a3b12',
   ring: '#0f5e73',
-  fore: '#3f7f93',
-  aft: '#b9653a',
+  fore: '#34728a',
+  aft: '#a9552c',
 };
 
 export const DARK: Palette = {

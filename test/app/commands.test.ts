@@ -2,7 +2,8 @@ import { expect, test } from 'vitest';
 import { COMMANDS } from '../../src/app/commands.ts';
 import { dropKind } from '../../src/app/drops.ts';
 import { fileName } from '../../src/app/files.ts';
-import { openKeep } from '../../src/app/keep.ts';
+import { openKeep } from '../../src/app/openKeep.ts';
+import { firstSentence } from '../../src/app/samples.ts';
 import { DEFAULTS } from '../../src/app/settings.ts';
 import { FIRST_VIEW, Store } from '../../src/app/store.ts';
 import { isDark, propertyName } from '../../src/app/theme.ts';
@@ -44,8 +45,8 @@ test('all parts are selected, duplicated, and the copies are then selected', asy
   const store = await withParts();
   COMMANDS.selectAll(store);
   COMMANDS.duplicate(store);
-  expect(names(store)).toEqual(['One', 'One', 'Two', 'Two']);
-  expect(store.session.getState().selection.map(({ id }) => id)).toEqual(['one-2', 'two-2']);
+  expect(names(store)).toEqual(['One', 'One copy', 'Two', 'Two copy']);
+  expect(store.session.getState().selection.map(({ id }) => id)).toEqual(['one-copy', 'two-copy']);
 });
 
 test('removing parts and a hardpoint together is one step, and the last hardpoint stays', async () => {
@@ -113,4 +114,13 @@ test('the theme follows the system only when asked to', () => {
   expect(isDark('light', true)).toBe(false);
   expect(isDark('dark', false)).toBe(true);
   expect(propertyName('inkSoft')).toBe('--ink-soft');
+});
+
+test.each([
+  ['One. Two.', 'One.'],
+  ['A hull of 1.5 m, held up! More', 'A hull of 1.5 m, held up!'],
+  ['No end', 'No end'],
+  ['', ''],
+])('of the notes %j the samples list shows %j', (notes, sentence) => {
+  expect(firstSentence(notes)).toBe(sentence);
 });

@@ -1,8 +1,8 @@
 import { IDBFactory } from 'fake-indexeddb';
 import { afterEach, beforeEach, expect, test, vi } from 'vitest';
 import 'fake-indexeddb/auto';
-import { openKeep } from '../../src/app/keep.ts';
 import type { KeptCraft } from '../../src/app/kept.ts';
+import { openKeep } from '../../src/app/openKeep.ts';
 
 beforeEach(() => vi.stubGlobal('indexedDB', new IDBFactory()));
 afterEach(() => vi.unstubAllGlobals());
@@ -50,6 +50,18 @@ test('two pages writing one craft at the same time lose neither text', async () 
   const texts = (await two.versions('a')).map(({ text }) => text);
   expect((await one.craft('a'))?.text).toBe('from two');
   expect(texts).toContain('from one');
+});
+
+test('what an ended page had only jotted down comes into the keep, unless that has something newer', async () => {
+  const first = await openKeep();
+  await first.put(kept('a', 'old', 1), null);
+  first.jot({ craft: kept('a', 'new', 2), known: 'old' });
+  await first.put(kept('b', 'newer', 4), null);
+  first.jot({ craft: kept('b', 'stale', 3), known: null });
+  const second = await openKeep();
+  expect((await second.craft('a'))?.text).toBe('new');
+  expect((await second.craft('b'))?.text).toBe('newer');
+  expect(await second.jotted()).toEqual([]);
 });
 
 test.each([

@@ -25,7 +25,7 @@ function slowKeep() {
       const end = (displaced = false) => resolve({ displaced });
       writes.push({ text: craft.text, known, end, fail: () => reject(new Error('full')) });
     });
-  return { keep: { put }, writes };
+  return { keep: { put, jot: vi.fn(), unjot: vi.fn(async () => {}) }, writes };
 }
 
 const turn = () => new Promise((resolve) => setTimeout(resolve));
@@ -44,6 +44,8 @@ test('the first change is written at once; those during a write become one write
   ]);
   writes[1]!.end();
   await keeper.settled();
+  expect(keep.jot).toHaveBeenCalledTimes(3);
+  expect(keep.unjot).toHaveBeenCalledOnce();
   keeper.put(kept('4'));
   expect(writes.at(-1)).toMatchObject({ text: '4', known: '3' });
 });
@@ -75,4 +77,11 @@ test('a failed write is reported, and the next one still happens', async () => {
   writes[1]!.end(true);
   await keeper.settled();
   expect(displaced).toHaveBeenCalledOnce();
+  expect(keep.unjot).toHaveBeenCalledOnce();
+  keeper.put(kept('3'));
+  writes[2]!.fail();
+  await keeper.settled();
+  expect(failed).toHaveBeenCalledTimes(2);
+  // What could not be put stays jotted down for the next page.
+  expect(keep.unjot).toHaveBeenCalledOnce();
 });

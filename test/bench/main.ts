@@ -2,7 +2,7 @@
 import { loadavg } from 'node:os';
 import type { Craft } from '../../src/craft/craft.ts';
 import type { HullShape } from '../../src/craft/hullSchema.ts';
-import { movePart } from '../../src/edit/edits/parts.ts';
+import { placePart } from '../../src/edit/edits/parts.ts';
 import { run } from '../../src/edit/history.ts';
 import { hullOf } from '../../src/physics/hull/hullOf.ts';
 import { assess } from '../../src/report/assess.ts';
@@ -31,7 +31,7 @@ const print = (label: string, ...figures: string[]): void =>
 const dragFrames = (craft: Craft, frames: number): Craft[] =>
   Array.from({ length: frames }, (_, i) => {
     const id = craft.parts.order[i % craft.parts.order.length]!;
-    return run(craft, movePart(id, { kind: 'keel', station: 1 + 0.001 * i, drop: 0.03 }).recipe).craft;
+    return run(craft, placePart(id, { kind: 'keel', station: 1 + 0.001 * i, drop: 0.03 })).craft;
   });
 
 /** The same craft read anew, so that nothing is remembered of it but the hull. */

@@ -39,7 +39,7 @@ function spotsOf(node: Node): Spot[] {
 const numbersOf = (file: Node): Spot[] => spotsOf(file).filter((spot) => typeof get(spot) === 'number');
 
 /** Values at the edges of what fields allow, and past them. */
-const NUMBERS = [
+const NUMBERS: readonly unknown[] = [
   0,
   -0,
   1,
@@ -68,7 +68,7 @@ const NUMBERS = [
   20_000,
   -500,
 ];
-const OTHERS = [
+const OTHERS: readonly unknown[] = [
   null,
   true,
   false,
@@ -185,3 +185,17 @@ export function damagedJson(random: Random, text: string): unknown {
 /** The text of a craft file, damaged as JSON or as text. */
 export const damaged = (random: Random, text: string): string =>
   random() < 0.8 ? JSON.stringify(damagedJson(random, text)) : damagedText(random, text);
+
+/** The craft file with one to eight numbers at extremes, each kept only if the file still passes the gate. */
+export function stretched(random: Random, text: string, passes: (text: string) => boolean): string {
+  const file: Node = JSON.parse(text);
+  const spots = numbersOf(file);
+  const times = 1 + Math.floor(random() * 8);
+  for (let i = 0; i < times; i++) {
+    const spot = pick(random, spots);
+    const before = get(spot);
+    set(spot, random() < 0.7 ? pick(random, NUMBERS) : (before as number) * 3 * random());
+    if (!passes(JSON.stringify(file))) set(spot, before);
+  }
+  return JSON.stringify(file);
+}

@@ -63,7 +63,7 @@ test('a field that is absent is found as nothing', () => {
     delete file.targets;
   });
   expect(problems).toEqual([
-    { path: 'parts[2].mass', found: 'nothing', allowed: 'a finite number' },
+    { name: 'Gondola', path: 'parts[2].mass', found: 'nothing', allowed: 'a finite number' },
     { path: 'targets', found: 'nothing', allowed: 'an object with its fields' },
   ]);
 });
@@ -80,9 +80,9 @@ test('each wrong type is named with what was found and what is allowed', () => {
   expect(problems).toEqual([
     { path: 'name', found: '7', allowed: 'text' },
     { path: 'hull.seams.count', found: '2.5', allowed: 'a whole number' },
-    { path: 'parts[0].mass', found: '"110 g"', allowed: 'a finite number' },
-    { path: 'parts[0].locked', found: '"no"', allowed: 'true or false' },
-    { path: 'parts[1].size', found: 'null', allowed: 'an object with its fields' },
+    { name: 'Tail thruster', path: 'parts[0].mass', found: '"110 g"', allowed: 'a finite number' },
+    { name: 'Tail thruster', path: 'parts[0].locked', found: '"no"', allowed: 'true or false' },
+    { name: 'Fins', path: 'parts[1].size', found: 'null', allowed: 'an object with its fields' },
     { path: 'wires', found: 'an object with run', allowed: 'a list' },
   ]);
 });
@@ -145,11 +145,17 @@ test('an id that stands twice is named with where it stood first', () => {
   });
   expect(problems).toEqual([
     {
+      name: 'Battery',
       path: 'parts[3].id',
       found: '"tail-thruster"',
       allowed: 'an id of its own (parts[0] has this one)',
     },
-    { path: 'hardpoints[1].id', found: '"nose"', allowed: 'an id of its own (hardpoints[0] has this one)' },
+    {
+      name: 'Nose',
+      path: 'hardpoints[1].id',
+      found: '"nose"',
+      allowed: 'an id of its own (hardpoints[0] has this one)',
+    },
   ]);
 });
 

@@ -1,15 +1,16 @@
 import { expect, test } from 'vitest';
+import { step } from '../../src/edit/edit.ts';
 import { setWishes } from '../../src/edit/edits/craft.ts';
-import { moveHardpoint, removeHardpoints, setHardpoint } from '../../src/edit/edits/hardpoints.ts';
+import { placeHardpoint, removeHardpoints, setHardpoint } from '../../src/edit/edits/hardpoints.ts';
 import { addLeadPiece, removeLeadPieces, setLeadPiece } from '../../src/edit/edits/lead.ts';
 import {
   addLoad,
   addLoadOption,
   removeLoadOption,
   removeLoads,
-  reorderLoad,
   setLoad,
   setLoadOption,
+  sortLoads,
 } from '../../src/edit/edits/loads.ts';
 import { addPart, setSlide } from '../../src/edit/edits/parts.ts';
 import { applyPlan } from '../../src/edit/edits/plan.ts';
@@ -19,14 +20,18 @@ import { loadOf, planningCraft } from './planningFixture.ts';
 import { testEdit } from './testEdit.ts';
 
 const craft = planningCraft();
+const logger = craft.loads.byId.logger!;
 
 test('a hardpoint takes a limit and a fill', () => {
-  const result = testEdit(craft, setHardpoint('nose', 'limit', { limit: 0.05, fill: 'pieces' }));
+  const result = testEdit(
+    craft,
+    setHardpoint(craft.hardpoints.byId.nose!, 'limit', { limit: 0.05, fill: 'pieces' }),
+  );
   expect(result.hardpoints.byId.nose).toMatchObject({ limit: 0.05, fill: 'pieces', name: 'Nose' });
 });
 
 test('a hardpoint taken away is no longer a place for loads; other places stay', () => {
-  const result = testEdit(craft, removeHardpoints(['chin']));
+  const result = testEdit(craft, removeHardpoints(['chin'], 'Chin'));
   expect(result.loads.byId.logger!.options.map(({ kind }) => kind)).toEqual(['slide']);
   expect(result.loads.byId.horn).toEqual(craft.loads.byId.horn);
 });
@@ -36,20 +41,23 @@ test('ballast goes along with its hardpoint; locked ballast and other parts ther
   const { id: _, ...weight } = partOf('weight', { kind: 'ballast', place });
   const hung = testEdit(testEdit(craft, addPart(weight)), addPart({ ...weight, locked: true }));
   const to = { kind: 'keel', station: 0.7, drop: 0 } as const;
-  const moved = testEdit(hung, moveHardpoint('chin', to));
+  const moved = testEdit(hung, step('Move', placeHardpoint('chin', to)));
+  expect(testEdit(hung, setHardpoint(hung.hardpoints.byId.chin!, 'place', { place: to }))).toEqual(moved);
   expect(moved.parts.byId.weight!.place).toEqual(to);
   expect(moved.parts.byId['weight-2']!.place).toEqual(place);
 });
 
 test('a slide is given, its ends put in order and within limits, and taken away', () => {
-  const given = testEdit(craft, setSlide('fins', { from: 2.7, to: 2.5 }));
+  const given = testEdit(craft, setSlide(craft.parts.byId.fins!, { from: 2.7, to: 2.5 }));
   expect(given.parts.byId.fins!.slide).toEqual({ from: 2.5, to: 2.7 });
-  expect(testEdit(craft, setSlide('fins', { from: -1e9, to: 1e9 })).parts.byId.fins!.slide).toEqual({
+  expect(
+    testEdit(craft, setSlide(craft.parts.byId.fins!, { from: -1e9, to: 1e9 })).parts.byId.fins!.slide,
+  ).toEqual({
     from: -50,
     to: 50,
   });
-  expect(testEdit(given, setSlide('fins', { from: 2.7, to: 2.5 }))).toBe(given);
-  expect(testEdit(given, setSlide('fins', null)).parts.byId.fins!.slide).toBeNull();
+  expect(testEdit(given, setSlide(craft.parts.byId.fins!, { from: 2.7, to: 2.5 }))).toBe(given);
+  expect(testEdit(given, setSlide(craft.parts.byId.fins!, null)).parts.byId.fins!.slide).toBeNull();
 });
 
 test('pieces of lead come, change and go', () => {
@@ -64,9 +72,11 @@ test('loads come under an id that no part has, change, change order and go', () 
   const { id: _, ...fields } = loadOf('x', { name: 'Battery' });
   const more = testEdit(craft, addLoad(fields));
   expect(more.loads.order).toEqual(['logger', 'horn', 'battery-2']);
-  expect(testEdit(more, setLoad('horn', 'mass', { mass: 0.02 })).loads.byId.horn!.mass).toBe(0.02);
-  expect(testEdit(more, reorderLoad('battery-2', 0)).loads.order).toEqual(['battery-2', 'logger', 'horn']);
-  expect(testEdit(more, removeLoads(['logger', 'horn'])).loads.order).toEqual(['battery-2']);
+  expect(testEdit(more, setLoad(craft.loads.byId.horn!, 'mass', { mass: 0.02 })).loads.byId.horn!.mass).toBe(
+    0.02,
+  );
+  expect(testEdit(more, sortLoads(['battery-2', 'logger', 'horn'])).loads.order[0]).toBe('battery-2');
+  expect(testEdit(more, removeLoads(['logger', 'horn'], '2 loads')).loads.order).toEqual(['battery-2']);
 });
 
 test('a part comes under an id that no load has', () => {
@@ -76,15 +86,15 @@ test('a part comes under an id that no load has', () => {
 
 test('places where a load may go come, change and go', () => {
   const at = { kind: 'hardpoint', hardpoint: 'nose' } as const;
-  const more = testEdit(craft, addLoadOption('logger', at));
+  const more = testEdit(craft, addLoadOption(logger, at));
   expect(more.loads.byId.logger!.options).toHaveLength(3);
   const [, slide] = craft.loads.byId.logger!.options;
   if (slide?.kind !== 'slide') throw new Error('the second option is a slide');
-  const longer = testEdit(craft, setLoadOption('logger', 1, { ...slide, from: 2.5, to: 0.3 }));
+  const longer = testEdit(craft, setLoadOption(logger, 1, { ...slide, from: 2.5, to: 0.3 }));
   expect(longer.loads.byId.logger!.options[1]).toEqual({ ...slide, from: 0.3, to: 2.5 });
-  expect(testEdit(craft, setLoadOption('logger', 1, { ...slide }))).toBe(craft);
-  expect(testEdit(craft, setLoadOption('logger', 1, at)).loads.byId.logger!.options[1]).toEqual(at);
-  expect(testEdit(craft, removeLoadOption('logger', 0)).loads.byId.logger!.options).toEqual([slide]);
+  expect(testEdit(craft, setLoadOption(logger, 1, { ...slide }))).toBe(craft);
+  expect(testEdit(craft, setLoadOption(logger, 1, at)).loads.byId.logger!.options[1]).toEqual(at);
+  expect(testEdit(craft, removeLoadOption(logger, 0)).loads.byId.logger!.options).toEqual([slide]);
 });
 
 test('wishes are put in another order', () => {

@@ -1,26 +1,22 @@
 import fc from 'fast-check';
 import { expect, test } from 'vitest';
 import { parse } from '../../src/craft/parse.ts';
+import type { Part } from '../../src/craft/schema.ts';
 import { serialize } from '../../src/craft/serialize.ts';
-import type { Edit } from '../../src/edit/edit.ts';
-import { setGas, setName, setShape } from '../../src/edit/edits/craft.ts';
+import { type Edit, inRun, runOf, step } from '../../src/edit/edit.ts';
+import { setGas, setName, setNotes, setShape } from '../../src/edit/edits/craft.ts';
 import { addHardpoint, removeHardpoints, setLeadAt } from '../../src/edit/edits/hardpoints.ts';
-import {
-  duplicateParts,
-  movePart,
-  nudgeParts,
-  placePart,
-  removeParts,
-  setPart,
-} from '../../src/edit/edits/parts.ts';
+import { duplicateParts, placePart, removeParts, setPart, shiftParts } from '../../src/edit/edits/parts.ts';
 import { removeWires } from '../../src/edit/edits/wires.ts';
 import { Session } from '../../src/edit/session.ts';
 import { fixtureCraft } from './craftFixture.ts';
 
+const { battery, fins } = fixtureCraft().parts.byId as Record<'battery' | 'fins', Part>;
 const station = (session: Session) => {
   const { place } = session.getState().craft.parts.byId.battery!;
   return place.kind === 'keel' ? place.station : Number.NaN;
 };
+const nudge = (id: string, by: number) => runOf(`nudge ${id}`, 'Nudge part', shiftParts([id], by));
 const toStation = (at: number) => placePart('battery', { kind: 'keel', station: at, drop: 0.03 });
 
 test('a drag is one step: each move starts from the start, release enters history once', () => {
@@ -76,9 +72,9 @@ test('undo in the middle of a drag drops the drag first', () => {
 
 test('a run of nudges is one step; choosing something ends the run', () => {
   const session = new Session(fixtureCraft());
-  for (let i = 0; i < 5; i++) session.apply(nudgeParts(['battery'], 0.001));
+  for (let i = 0; i < 5; i++) session.apply(nudge('battery', 0.001));
   session.select([{ kind: 'part', id: 'fins' }]);
-  session.apply(nudgeParts(['battery'], 0.001));
+  session.apply(nudge('battery', 0.001));
   expect(station(session)).toBeCloseTo(1.306, 12);
   session.undo();
   expect(station(session)).toBeCloseTo(1.305, 12);
@@ -87,13 +83,26 @@ test('a run of nudges is one step; choosing something ends the run', () => {
   expect(session.getState().undoLabel).toBeNull();
 });
 
+test('two edits of one field are two steps, each named after the thing; a burst of them is one', () => {
+  const session = new Session(fixtureCraft());
+  for (const mass of [0.2, 0.3]) session.apply(setPart(battery, 'mass', { mass }));
+  expect(session.getState().undoLabel).toBe('Change mass of battery');
+  session.undo();
+  expect(session.getState().craft.parts.byId.battery!.mass).toBe(0.2);
+  session.undo();
+  expect(session.getState().undoLabel).toBeNull();
+  for (const notes of ['a', 'ab', 'abc']) session.apply(inRun(setNotes(notes), 'notes'));
+  session.undo();
+  expect(session.getState()).toMatchObject({ undoLabel: null, craft: { notes: fixtureCraft().notes } });
+});
+
 test('an edit that the loading gate would refuse is refused, with the field named', () => {
   const session = new Session(fixtureCraft());
   const before = session.getState();
-  const problems = session.apply(setPart('battery', 'mass', { mass: -1 }));
-  expect(problems).toEqual([{ path: 'parts[1].mass', found: '-1', allowed: 'at least 0' }]);
+  const problems = session.apply(setPart(battery, 'mass', { mass: -1 }));
+  expect(problems).toMatchObject([{ path: 'parts[1].mass', found: '-1', allowed: 'at least 0' }]);
   expect(session.getState()).toBe(before);
-  expect(session.apply(setPart('battery', 'mass', { mass: Number.NaN }))).toHaveLength(1);
+  expect(session.apply(setPart(battery, 'mass', { mass: Number.NaN }))).toHaveLength(1);
 });
 
 test('what is removed is no longer selected, and undo does not select it again', () => {
@@ -102,7 +111,7 @@ test('what is removed is no longer selected, and undo does not select it again',
     { kind: 'part', id: 'battery' },
     { kind: 'wire', id: 'power' },
   ]);
-  session.apply(removeParts(['battery']));
+  session.apply(removeParts(['battery'], 'Battery'));
   expect(session.getState().selection).toEqual([{ kind: 'wire', id: 'power' }]);
 });
 
@@ -119,20 +128,20 @@ test('listeners hear every change and can leave', () => {
 const anyEdit: fc.Arbitrary<Edit> = fc.oneof(
   fc
     .double({ min: 0, max: 3, noNaN: true })
-    .map((at) => movePart('battery', { kind: 'keel', station: at, drop: 0 })),
-  fc.constantFrom('thruster', 'battery', 'fins', 'lights').map((id) => removeParts([id])),
-  fc.constantFrom('thruster', 'battery', 'fins', 'lights').map((id) => duplicateParts([id])),
-  fc.double({ min: 0, max: 2, noNaN: true }).map((mass) => setPart('fins', 'mass', { mass })),
-  fc.double({ min: -0.01, max: 0.01, noNaN: true }).map((by) => nudgeParts(['lights'], by)),
+    .map((at) => step('Move', placePart('battery', { kind: 'keel', station: at, drop: 0 }))),
+  fc.constantFrom('thruster', 'battery', 'fins', 'lights').map((id) => removeParts([id], id)),
+  fc.constantFrom('thruster', 'battery', 'fins', 'lights').map((id) => duplicateParts([id], id, 3)),
+  fc.double({ min: 0, max: 2, noNaN: true }).map((mass) => setPart(fins, 'mass', { mass })),
+  fc.double({ min: -0.01, max: 0.01, noNaN: true }).map((by) => nudge('lights', by)),
   fc.string({ maxLength: 20 }).map(setName),
   fc
     .double({ min: 0.5, max: 6, noNaN: true })
     .map((length) => setShape('length', { kind: 'spheroid', length, diameter: 1 })),
   fc.double({ min: 0, max: 1, noNaN: true }).map((purity) => setGas('purity', { purity })),
   fc.constant(addHardpoint('Tail', { kind: 'axis', station: 2.9 })),
-  fc.constantFrom('nose', 'chin').map((id) => removeHardpoints([id])),
+  fc.constantFrom('nose', 'chin').map((id) => removeHardpoints([id], id)),
   fc.constantFrom('nose', 'chin').map(setLeadAt),
-  fc.constant(removeWires(['power'])),
+  fc.constant(removeWires(['power'], 'Power')),
 );
 
 /** Edits of things that are gone cannot come from the page; here they are passed over. */

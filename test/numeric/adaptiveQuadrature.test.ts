@@ -1,7 +1,7 @@
 import fc from 'fast-check';
 import { expect, test } from 'vitest';
-import { integrate, type Tolerance } from '../../src/numeric/adaptiveQuadrature.ts';
 import { integrateFixed } from '../../src/numeric/quadrature.ts';
+import { integrate, type Tolerance } from './adaptiveQuadrature.ts';
 
 const integralOf = (f: (x: number) => number, a: number, b: number, tolerance?: Tolerance): number => {
   const found = integrate(f, a, b, tolerance);

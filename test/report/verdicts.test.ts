@@ -1,7 +1,7 @@
 import { expect, test } from 'vitest';
 import { BLANK_HARDPOINT } from '../../src/craft/blank.ts';
 import { type Craft, keyed, listed } from '../../src/craft/craft.ts';
-import { movePart } from '../../src/edit/edits/parts.ts';
+import { placePart } from '../../src/edit/edits/parts.ts';
 import { run } from '../../src/edit/history.ts';
 import { assess } from '../../src/report/assess.ts';
 import type { VerdictKey } from '../../src/report/verdict.ts';
@@ -43,6 +43,20 @@ test('in imperial units the same sentence', () => {
   );
 });
 
+test('advice can be carried out: the lead levels, the load fills the lift and levels', () => {
+  const { advice } = assess(workedExample());
+  const lead = advice.find((each) => each.kind === 'lead')!;
+  const leaded = withPart(workedExample(), 'lead', { mass: lead.mass, place: lead.place });
+  expect(verdict(leaded, 'level').state).toBe('met');
+  const load = advice.find((each) => each.kind === 'load')!;
+  const loaded = withPart(workedExample(), 'load', { mass: load.mass, place: load.place });
+  expect(assess(loaded).met).toBe(true);
+});
+
+test('a craft that needs nothing gets no lead and no slide offered', () => {
+  expect(assess(trimmed()).advice.map(({ kind }) => kind)).toEqual(['load']);
+});
+
 test('a battery that can slide is offered, and sliding it there levels the craft', () => {
   const craft = workedExample();
   const battery = { ...craft.parts.byId.battery!, kind: 'battery' as const, name: 'Battery', mass: 0.3 };
@@ -52,7 +66,7 @@ test('a battery that can slide is offered, and sliding it there levels the craft
   };
   const { headline } = assess(heavier);
   const station = Number(/slide Battery forward to ([\d.]+) m/.exec(headline)![1]);
-  const slid = run(heavier, movePart('battery', { kind: 'keel', station, drop: 0.03 }).recipe).craft;
+  const slid = run(heavier, placePart('battery', { kind: 'keel', station, drop: 0.03 })).craft;
   expect(verdict(slid, 'level').state).toBe('met');
 });
 
@@ -65,6 +79,9 @@ test('leaded and loaded it meets its targets', () => {
 
 test('margins: inside positive, outside negative, zero on the edge', () => {
   const level = verdict(workedExample(), 'level');
+  expect(level.marginWords).toBe('off by 51.9°');
+  expect(verdict(workedExample(), 'even').marginWords).toBe('2.0° to spare');
+  expect(verdict(workedExample(), 'lead').marginWords).toBe('leaves 567.2 g of lift');
   expect(level.margin).toBeCloseTo(workedExample().targets.pitchTolerance - Math.abs(level.row.value!), 12);
   const edge: Craft = {
     ...trimmed(),
@@ -80,8 +97,33 @@ test('too heavy: says by how much and what hull would carry it', () => {
   const heavy = withPart(trimmed(), 'safe', { mass: 0.1, place: { kind: 'keel', station: 1.5, drop: 0 } });
   expect(verdict(heavy, 'floats')).toMatchObject({ state: 'missed', word: 'too heavy' });
   expect(assess(heavy).headline).toMatch(
-    /^Too heavy: 97\.\d g more than it lifts\. .*m³ more hull would carry it\.$/,
+    /^Too heavy: 97\.\d g heavy, and at most 20\.0 g heavy is wanted\. Take 77\.\d g out, or 0\.0\d+ m³ more hull would carry it\.$/,
   );
+});
+
+test('a hair over the limit is said to be just that', () => {
+  const craft = trimmed();
+  const { value } = assess(craft).rows.heaviness!;
+  const band = { least: -1, most: value! - 1e-5 };
+  const over = { ...craft, targets: { ...craft.targets, heaviness: band } };
+  expect(verdict(over, 'floats')).toMatchObject({ state: 'missed', marginWords: 'just outside' });
+  expect(assess(over).headline).toContain('A trace less would do.');
+});
+
+test('figures are said without signs', () => {
+  expect(verdict(workedExample(), 'floats').figure).toBe('724.4 g light');
+  expect(verdict(workedExample(), 'level').figure).toBe('53.9° nose-up');
+  expect(verdict(workedExample(), 'even').figure).toBe('0.0°');
+  expect(verdict(workedExample(), 'floats').target).toBe('10.0 g light to 20.0 g heavy');
+});
+
+test('level within the tolerance on the far side: no lead, and why not more', () => {
+  const nose = withPart(trimmed(), 'bell', { mass: 0.004, place: { kind: 'axis', station: 0.2 } });
+  const { rows } = assess(nose);
+  expect(rows['float.pitch']!.value).toBeLessThan(0);
+  expect(rows['lead.mass']).toMatchObject({ value: 0, status: 'solved' });
+  expect(rows['lead.mass']!.why).toContain('None is needed within the tolerance.');
+  expect(verdict(nose, 'lead')).toMatchObject({ state: 'met', word: 'none needed' });
 });
 
 test('heeled: which side is low, and how much to bring over', () => {

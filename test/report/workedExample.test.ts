@@ -1,6 +1,6 @@
 // A prolate spheroid 3 × 1 m, worked by hand; each figure to the digits it was worked to.
 import { expect, test } from 'vitest';
-import { movePart } from '../../src/edit/edits/parts.ts';
+import { placePart } from '../../src/edit/edits/parts.ts';
 import { run } from '../../src/edit/history.ts';
 import { assess } from '../../src/report/assess.ts';
 import { workedExample } from './workedExample.ts';
@@ -37,9 +37,6 @@ test('it floats 53.929° nose-up', () => {
 });
 
 test('with the battery at 0.60 m, 74.083 g do', () => {
-  const { craft } = run(
-    workedExample(),
-    movePart('battery', { kind: 'keel', station: 0.6, drop: 0.03 }).recipe,
-  );
+  const { craft } = run(workedExample(), placePart('battery', { kind: 'keel', station: 0.6, drop: 0.03 }));
   expect(assess(craft).rows['lead.mass']!.value).toBeCloseTo(0.074083, 6);
 });

@@ -2,15 +2,15 @@
 import type { HullShape, HullSpec } from '../../craft/hullSchema.ts';
 import type { Wish } from '../../craft/planningSchema.ts';
 import type { Day, Film, Gas, Targets } from '../../craft/schema.ts';
-import { type Edit, type Recipe, runOf, step } from '../edit.ts';
+import { type Edit, type Recipe, step } from '../edit.ts';
 
 export const setName = (name: string): Edit =>
-  runOf('name', 'Change name', (craft) => {
+  step('Change name of the craft', (craft) => {
     craft.name = name;
   });
 
 export const setNotes = (notes: string): Edit =>
-  runOf('notes', 'Change notes', (craft) => {
+  step('Change notes of the craft', (craft) => {
     craft.notes = notes;
   });
 
@@ -21,33 +21,32 @@ export const reshape =
     if (JSON.stringify(shape) !== JSON.stringify(craft.hull.shape)) craft.hull.shape = shape;
   };
 
-export const setShape = (field: string, shape: HullShape): Edit =>
-  runOf(`hull ${field}`, `Change ${field}`, reshape(shape));
+export const setShape = (field: string, shape: HullShape): Edit => step(`Change ${field}`, reshape(shape));
 
 export const chooseShape = (shape: HullShape): Edit => step('Change hull shape', reshape(shape));
 
 export const setHull = (field: string, change: Partial<HullSpec>): Edit =>
-  runOf(`hull ${field}`, `Change ${field}`, (craft) => {
+  step(`Change ${field}`, (craft) => {
     Object.assign(craft.hull, change);
   });
 
 export const setFilm = (field: string, change: Partial<Film>): Edit =>
-  runOf(`film ${field}`, `Change ${field}`, (craft) => {
+  step(`Change ${field}`, (craft) => {
     Object.assign(craft.film, change);
   });
 
 export const setGas = (field: string, change: Partial<Gas>): Edit =>
-  runOf(`gas ${field}`, `Change ${field}`, (craft) => {
+  step(`Change ${field}`, (craft) => {
     Object.assign(craft.gas, change);
   });
 
 export const setDay = (field: string, day: Day): Edit =>
-  runOf(`day ${field}`, `Change ${field}`, (craft) => {
+  step(`Change ${field}`, (craft) => {
     craft.day = day;
   });
 
 export const setTargets = (field: string, change: Partial<Targets>): Edit =>
-  runOf(`targets ${field}`, `Change ${field}`, (craft) => {
+  step(`Change ${field}`, (craft) => {
     Object.assign(craft.targets, change);
   });
 

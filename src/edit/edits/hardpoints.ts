@@ -5,8 +5,8 @@ import { freeId } from '../../craft/ids.ts';
 import type { Place } from '../../craft/placeSchema.ts';
 import type { Hardpoint } from '../../craft/schema.ts';
 import { hungBallast } from '../../craft/stowage.ts';
-import { type Edit, type Recipe, runOf, step } from '../edit.ts';
-import { placed, shifted } from '../place.ts';
+import { type Edit, type Recipe, step } from '../edit.ts';
+import { placed } from '../place.ts';
 
 export const addHardpoint = (name: string, place: Place): Edit =>
   step(`Add ${name || 'hardpoint'}`, (craft) => {
@@ -16,8 +16,8 @@ export const addHardpoint = (name: string, place: Place): Edit =>
   });
 
 /** Takes hardpoints away, as places for loads too; the last one stays, and the lead goes to the first left when its own goes. */
-export const removeHardpoints = (ids: readonly string[]): Edit =>
-  step(ids.length === 1 ? 'Remove hardpoint' : `Remove ${ids.length} hardpoints`, (craft) => {
+export const removeHardpoints = (ids: readonly string[], what: string): Edit =>
+  step(`Remove ${what}`, (craft) => {
     const left = craft.hardpoints.order.filter((id) => !ids.includes(id));
     if (left.length === 0) return;
     for (const id of craft.hardpoints.order) if (ids.includes(id)) delete craft.hardpoints.byId[id];
@@ -29,46 +29,46 @@ export const removeHardpoints = (ids: readonly string[]): Edit =>
     }
   });
 
-export const renameHardpoint = (id: string, name: string): Edit =>
-  runOf(`hardpoint ${id} name`, 'Change name', (craft) => {
-    craft.hardpoints.byId[id]!.name = name;
-  });
-
-/** Sets its limit or whether it takes pieces. `field` names what is typed. */
+/** Sets fields of one hardpoint, as typed: a place out of bounds is refused, not brought back in. Ballast goes along. */
 export const setHardpoint = (
-  id: string,
+  { id, name }: Pick<Hardpoint, 'id' | 'name'>,
   field: string,
-  change: Partial<Pick<Hardpoint, 'limit' | 'fill'>>,
+  change: Partial<Omit<Hardpoint, 'id'>>,
 ): Edit =>
-  runOf(`hardpoint ${id} ${field}`, `Change ${field}`, (craft) => {
+  step(`Change ${field} of ${name || 'hardpoint'}`, (craft) => {
+    if (change.place) takeAlong(craft, id, change.place);
     Object.assign(craft.hardpoints.byId[id]!, change);
   });
 
-/** Moves it; ballast that hangs there goes along. */
+/** Puts a hardpoint at a place; ballast that hangs there goes along. For drags: pass the recipe to `Drag.move`. */
 export const placeHardpoint =
   (id: string, place: Place): Recipe =>
-  (craft: Craft) => {
+  (craft) => {
     const hardpoint = craft.hardpoints.byId[id]!;
     const next = placed(hardpoint.place, place);
     if (next === hardpoint.place) return;
-    for (const part of hungBallast(craft).get(id) ?? []) part.place = { ...next };
+    takeAlong(craft, id, next);
     hardpoint.place = next;
   };
 
-export const moveHardpoint = (id: string, place: Place): Edit =>
-  runOf(`hardpoint ${id} place`, 'Move hardpoint', placeHardpoint(id, place));
-
-export const nudgeHardpoints = (ids: readonly string[], by: number): Edit =>
-  runOf(`nudge ${ids.join(' ')}`, 'Nudge hardpoint', (craft) => {
-    for (const id of ids) placeHardpoint(id, shifted(craft.hardpoints.byId[id]!.place, by))(craft);
-  });
+/** Ballast hangs where its hardpoint is. */
+function takeAlong(craft: Craft, hardpoint: string, to: Place): void {
+  for (const part of hungBallast(craft).get(hardpoint) ?? []) part.place = { ...to };
+}
 
 export const setLeadAt = (id: string): Edit =>
   step('Choose hardpoint', (craft) => {
     craft.leadAt = id;
   });
 
+/** Moves the support point. For drags: pass the recipe to `Drag.move`. */
+export const placeSupport =
+  (place: Place): Recipe =>
+  (craft) => {
+    if (craft.support) craft.support = placed(craft.support, place);
+  };
+
 export const setSupport = (support: Place | null): Edit =>
-  runOf('support', support ? 'Set the support point' : 'Remove the support point', (craft) => {
+  step(support ? 'Set the support point' : 'Remove the support point', (craft) => {
     craft.support = support;
   });

@@ -1,6 +1,6 @@
 /** Edits of the pieces of lead at hand. */
 import type { LeadPiece } from '../../craft/planningSchema.ts';
-import { type Edit, runOf, step } from '../edit.ts';
+import { type Edit, step } from '../edit.ts';
 
 export const addLeadPiece = (piece: LeadPiece): Edit =>
   step('Add pieces of lead', (craft) => {
@@ -8,7 +8,7 @@ export const addLeadPiece = (piece: LeadPiece): Edit =>
   });
 
 export const setLeadPiece = (index: number, field: string, change: Partial<LeadPiece>): Edit =>
-  runOf(`lead ${index} ${field}`, `Change ${field}`, (craft) => {
+  step(`Change ${field} of the lead`, (craft) => {
     Object.assign(craft.pieces[index]!, change);
   });
 

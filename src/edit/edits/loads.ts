@@ -2,39 +2,48 @@
 import { freeId } from '../../craft/ids.ts';
 import type { Load, LoadOption } from '../../craft/planningSchema.ts';
 import { taken } from '../../craft/stowage.ts';
-import { type Edit, type Recipe, runOf, step } from '../edit.ts';
+import { type Edit, type Recipe, step } from '../edit.ts';
 import { placed, stretched } from '../place.ts';
 
 export type LoadFields = Omit<Load, 'id'>;
 
+/** Enough of a load to find it and to call it by its name. */
+export type LoadCalled = Pick<Load, 'id' | 'name'>;
+
+const called = ({ name }: Pick<Load, 'name'>): string => name || 'load';
+
 export const addLoad = (fields: LoadFields): Edit =>
-  step(`Add ${fields.name || 'load'}`, (craft) => {
+  step(`Add ${called(fields)}`, (craft) => {
     const id = freeId(fields.name || 'load', taken(craft));
     craft.loads.byId[id] = { id, ...fields };
     craft.loads.order.push(id);
   });
 
 /** Takes loads off the list. One that is aboard stays aboard, as a part like any other. */
-export const removeLoads = (ids: readonly string[]): Edit =>
-  step(ids.length === 1 ? 'Remove load' : `Remove ${ids.length} loads`, (craft) => {
+export const removeLoads = (ids: readonly string[], what: string): Edit =>
+  step(`Remove ${what}`, (craft) => {
     for (const id of ids) delete craft.loads.byId[id];
     craft.loads.order = craft.loads.order.filter((id) => !ids.includes(id));
   });
 
-export const setLoad = (id: string, field: string, change: Partial<Omit<LoadFields, 'options'>>): Edit =>
-  runOf(`load ${id} ${field}`, `Change ${field}`, (craft) => {
+export const setLoad = (
+  { id, name }: LoadCalled,
+  field: string,
+  change: Partial<Omit<LoadFields, 'options'>>,
+): Edit =>
+  step(`Change ${field} of ${called({ name })}`, (craft) => {
     Object.assign(craft.loads.byId[id]!, change);
   });
 
-export const reorderLoad = (id: string, index: number): Edit =>
-  step('Reorder loads', (craft) => {
-    craft.loads.order = craft.loads.order.filter((each) => each !== id);
-    craft.loads.order.splice(index, 0, id);
+/** Puts the list in another order. */
+export const sortLoads = (order: readonly string[]): Edit =>
+  step('Sort loads', (craft) => {
+    craft.loads.order = [...order];
   });
 
-export const addLoadOption = (id: string, option: LoadOption): Edit =>
-  step('Add a place for the load', (craft) => {
-    craft.loads.byId[id]!.options.push(option);
+export const addLoadOption = (load: LoadCalled, option: LoadOption): Edit =>
+  step(`Add a place for ${called(load)}`, (craft) => {
+    craft.loads.byId[load.id]!.options.push(option);
   });
 
 /** Changes a place where a load may go. For drags of its slide: pass the recipe to `Drag.move`. */
@@ -53,10 +62,10 @@ const slideWithin = (before: LoadOption, option: LoadOption & { kind: 'slide' })
   ...stretched(null, option),
 });
 
-export const setLoadOption = (id: string, index: number, option: LoadOption): Edit =>
-  runOf(`load ${id} option ${index}`, 'Change where the load may go', changeLoadOption(id, index, option));
+export const setLoadOption = (load: LoadCalled, index: number, option: LoadOption): Edit =>
+  step(`Change where ${called(load)} may go`, changeLoadOption(load.id, index, option));
 
-export const removeLoadOption = (id: string, index: number): Edit =>
-  step('Remove a place for the load', (craft) => {
-    craft.loads.byId[id]!.options.splice(index, 1);
+export const removeLoadOption = (load: LoadCalled, index: number): Edit =>
+  step(`Remove a place for ${called(load)}`, (craft) => {
+    craft.loads.byId[load.id]!.options.splice(index, 1);
   });

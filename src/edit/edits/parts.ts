@@ -1,5 +1,5 @@
 /** Edits of parts. Positions that only the hull knows are handed in, so that an edit needs no physics. */
-import type { Craft } from '../../craft/craft.ts';
+import { type Craft, listed } from '../../craft/craft.ts';
 import { freeId } from '../../craft/ids.ts';
 import type { Place } from '../../craft/placeSchema.ts';
 import type { Slide } from '../../craft/planningSchema.ts';
@@ -7,13 +7,18 @@ import { LIMITS } from '../../craft/quantities.ts';
 import type { Part } from '../../craft/schema.ts';
 import { taken } from '../../craft/stowage.ts';
 import { takeOut } from '../../craft/takeOut.ts';
-import { type Edit, type Recipe, runOf, step } from '../edit.ts';
-import { placed, shifted, stretched } from '../place.ts';
+import { type Edit, type Recipe, step } from '../edit.ts';
+import { placed, shifted, stationOf, stretched } from '../place.ts';
 
 export type PartFields = Omit<Part, 'id'>;
 
+/** Enough of a part to find it and to call it by its name. */
+export type PartCalled = Pick<Part, 'id' | 'name' | 'kind'>;
+
+const calledPart = ({ name, kind }: Omit<PartCalled, 'id'>): string => name || kind;
+
 /** Adds a part at the end of the list, under an id made from its name. */
-export const addPart = (fields: PartFields): Edit => addParts([fields], `Add ${fields.name || fields.kind}`);
+export const addPart = (fields: PartFields): Edit => addParts([fields], `Add ${calledPart(fields)}`);
 
 export const addParts = (all: readonly PartFields[], label = `Add ${all.length} parts`): Edit =>
   step(label, (craft) => {
@@ -26,25 +31,49 @@ function insert(craft: Craft, fields: PartFields, index: number): void {
   craft.parts.order.splice(index, 0, id);
 }
 
-/** Copies parts, each right after its original. */
-export const duplicateParts = (ids: readonly string[]): Edit =>
-  step(ids.length === 1 ? 'Duplicate part' : `Duplicate ${ids.length} parts`, (craft) => {
+/** A copy stands this far aft of its original, m, so that it is seen. */
+const APART = 0.02;
+
+/**
+ * Copies parts, each right after its original in the list and a little aft of it in space where the hull still
+ * reaches. `hullLength` in m; null while the hull cannot be formed.
+ */
+export const duplicateParts = (ids: readonly string[], what: string, hullLength: number | null): Edit =>
+  step(`Duplicate ${what}`, (craft) => {
     for (const id of ids) {
-      const { id: _, ...fields } = craft.parts.byId[id]!;
-      insert(craft, { ...structuredCloneOf(fields), locked: false }, craft.parts.order.indexOf(id) + 1);
+      const { id: _, ...original } = craft.parts.byId[id]!;
+      const fields = structuredCloneOf(original);
+      const aft = shifted(fields.place, APART);
+      const place =
+        hullLength !== null && stationOf(aft) <= hullLength ? placed(fields.place, aft) : fields.place;
+      const name = copyName(fields.name, new Set(listed(craft.parts).map((part) => part.name)));
+      insert(craft, { ...fields, name, place, locked: false }, craft.parts.order.indexOf(id) + 1);
     }
   });
+
+/** A name has room for 200 characters. */
+const LONGEST_BASE = 190;
+
+/** "Camera" → "Camera copy" → "Camera copy 2"; a part without a name has none to copy. */
+function copyName(name: string, names: ReadonlySet<string>): string {
+  if (name === '') return '';
+  const base = name.replace(/ copy(?: \d+)?$/, '').slice(0, LONGEST_BASE);
+  for (let n = 1; ; n++) {
+    const copy = n === 1 ? `${base} copy` : `${base} copy ${n}`;
+    if (!names.has(copy)) return copy;
+  }
+}
 
 const structuredCloneOf = <T>(value: T): T => JSON.parse(JSON.stringify(value));
 
 /** Takes parts away. A wire run that ended at one stays, its end loose where the part was. */
-export const removeParts = (ids: readonly string[]): Edit =>
-  step(ids.length === 1 ? 'Remove part' : `Remove ${ids.length} parts`, (craft) => takeOut(craft, ids));
+export const removeParts = (ids: readonly string[], what: string): Edit =>
+  step(`Remove ${what}`, (craft) => takeOut(craft, ids));
 
-/** Sets fields of one part. `field` names what is typed, so that keystrokes in it undo together. */
-export const setPart = (id: string, field: string, change: Partial<PartFields>): Edit =>
-  runOf(`part ${id} ${field}`, `Change ${field}`, (craft) => {
-    Object.assign(craft.parts.byId[id]!, change);
+/** Sets fields of one part. `field` names what is typed, for the undo button. */
+export const setPart = (part: PartCalled, field: string, change: Partial<PartFields>): Edit =>
+  step(`Change ${field} of ${calledPart(part)}`, (craft) => {
+    Object.assign(craft.parts.byId[part.id]!, change);
   });
 
 /** Sets the same fields of several parts: lock, kind, source of mass. */
@@ -54,18 +83,12 @@ export const setParts = (ids: readonly string[], label: string, change: Partial<
   });
 
 /** A weighed mass replaces the planned one; its tolerance becomes the scale's. */
-export const markWeighed = (id: string, mass: number, massTolerance: number): Edit =>
-  step('Mark weighed', (craft) => {
-    Object.assign(craft.parts.byId[id]!, { mass, massTolerance, massSource: 'weighed' });
+export const markWeighed = (part: PartCalled, mass: number, massTolerance: number): Edit =>
+  step(`Weigh ${calledPart(part)}`, (craft) => {
+    Object.assign(craft.parts.byId[part.id]!, { mass, massTolerance, massSource: 'weighed' });
   });
 
-/** Moves a part in the list. */
-export const reorderPart = (id: string, index: number): Edit =>
-  step('Reorder parts', (craft) => {
-    craft.parts.order = craft.parts.order.filter((each) => each !== id);
-    craft.parts.order.splice(index, 0, id);
-  });
-
+/** Puts the list in another order. */
 export const sortParts = (order: readonly string[]): Edit =>
   step('Sort parts', (craft) => {
     craft.parts.order = [...order];
@@ -79,9 +102,6 @@ export const placePart =
     part.place = placed(part.place, place);
   };
 
-export const movePart = (id: string, place: Place): Edit =>
-  runOf(`part ${id} place`, 'Move part', placePart(id, place));
-
 /** Gives a part a slide, or takes it away. For drags of its ends: pass the recipe to `Drag.move`. */
 export const stretchSlide =
   (id: string, slide: Slide | null): Recipe =>
@@ -90,8 +110,8 @@ export const stretchSlide =
     part.slide = slide && stretched(part.slide, slide);
   };
 
-export const setSlide = (id: string, slide: Slide | null): Edit =>
-  runOf(`part ${id} slide`, slide ? 'Change slide' : 'Remove slide', stretchSlide(id, slide));
+export const setSlide = (part: PartCalled, slide: Slide | null): Edit =>
+  step(`${slide ? 'Change' : 'Remove'} the slide of ${calledPart(part)}`, stretchSlide(part.id, slide));
 
 /** Shifts parts along the hull, keeping their kind of place; locked ones stay. */
 export const shiftParts =
@@ -102,10 +122,6 @@ export const shiftParts =
       if (!part.locked) part.place = placed(part.place, shifted(part.place, by));
     }
   };
-
-/** The arrow keys: `by` metres aft. */
-export const nudgeParts = (ids: readonly string[], by: number): Edit =>
-  runOf(`nudge ${ids.join(' ')}`, ids.length === 1 ? 'Nudge part' : 'Nudge parts', shiftParts(ids, by));
 
 /** Whether there is room for so many more parts. */
 export const hasRoom = (craft: Craft, more: number): boolean =>

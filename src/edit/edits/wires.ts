@@ -2,7 +2,7 @@
 
 import { freeId } from '../../craft/ids.ts';
 import type { WireEnd, WireRun } from '../../craft/schema.ts';
-import { type Edit, type Recipe, runOf, step } from '../edit.ts';
+import { type Edit, type Recipe, step } from '../edit.ts';
 
 export type WireFields = Omit<WireRun, 'id'>;
 
@@ -13,14 +13,18 @@ export const addWire = (fields: WireFields): Edit =>
     craft.wires.order.push(id);
   });
 
-export const removeWires = (ids: readonly string[]): Edit =>
-  step(ids.length === 1 ? 'Remove wire run' : `Remove ${ids.length} wire runs`, (craft) => {
+export const removeWires = (ids: readonly string[], what: string): Edit =>
+  step(`Remove ${what}`, (craft) => {
     for (const id of ids) delete craft.wires.byId[id];
     craft.wires.order = craft.wires.order.filter((id) => !ids.includes(id));
   });
 
-export const setWire = (id: string, field: string, change: Partial<WireFields>): Edit =>
-  runOf(`wire ${id} ${field}`, `Change ${field}`, (craft) => {
+export const setWire = (
+  { id, name }: Pick<WireRun, 'id' | 'name'>,
+  field: string,
+  change: Partial<WireFields>,
+): Edit =>
+  step(`Change ${field} of ${name || 'wire run'}`, (craft) => {
     Object.assign(craft.wires.byId[id]!, change);
   });
 

@@ -1,5 +1,6 @@
 /** The columns of a table of parts: how each is headed, and which quantity stands in it. */
 import type { Part } from '../../craft/schema.ts';
+import { stationOf } from '../../edit/place.ts';
 import type { Quantity, UnitSystem } from '../../units/units.ts';
 import { copiesText } from './copiesText.ts';
 import { writeCell } from './quantityCell.ts';
@@ -11,7 +12,7 @@ export interface PartColumn {
   readonly head: string;
   /** What else people call it. */
   readonly also: readonly string[];
-  /** Absent for words. */
+  /** That of the same column or field on screen, so that a bare number means the same here and there. Absent for words. */
   readonly quantity?: Quantity;
   write(part: Part, units: UnitSystem): string;
 }
@@ -61,8 +62,6 @@ const figure = (
   },
 });
 
-const stationOf = ({ place }: Part): number => (place.kind === 'free' ? place.x : place.station);
-
 export const PART_COLUMNS: readonly PartColumn[] = [
   words('name', 'name', ['part', 'part name', 'item', 'component', 'description'], ({ name }) => name),
   words('kind', 'kind', ['type'], ({ kind }) => kind),
@@ -76,7 +75,7 @@ export const PART_COLUMNS: readonly PartColumn[] = [
   ),
   words('massSource', 'source', [], ({ massSource }) => massSource),
   words('place', 'place', [], ({ place }) => place.kind),
-  figure('station', 'station', ['position', 'x'], 'smallLength', stationOf),
+  figure('station', 'station', ['position', 'x'], 'length', ({ place }) => stationOf(place)),
   figure('clock', 'clock angle', ['clock'], 'angle', ({ place }) =>
     place.kind === 'skin' ? place.clock : null,
   ),
@@ -84,8 +83,8 @@ export const PART_COLUMNS: readonly PartColumn[] = [
     place.kind === 'skin' ? place.standoff : null,
   ),
   figure('drop', 'drop', [], 'smallLength', ({ place }) => (place.kind === 'keel' ? place.drop : null)),
-  figure('side', 'side', ['y'], 'smallLength', ({ place }) => (place.kind === 'free' ? place.y : null)),
-  figure('height', 'height', ['z'], 'smallLength', ({ place }) => (place.kind === 'free' ? place.z : null)),
+  figure('side', 'side', ['y'], 'length', ({ place }) => (place.kind === 'free' ? place.y : null)),
+  figure('height', 'height', ['z'], 'length', ({ place }) => (place.kind === 'free' ? place.z : null)),
   words('copies', 'copies', ['count', 'pieces', 'quantity', 'qty'], ({ copies }) => copiesText(copies)),
   figure('sizeLength', 'size length', ['length'], 'smallLength', ({ size }) => size.length),
   figure('sizeWidth', 'size width', ['width'], 'smallLength', ({ size }) => size.width),

@@ -1,7 +1,7 @@
 /** Parts from a table: one written by Steelyard, or pasted from any spreadsheet. Pure; nothing is added here. */
 import type { Place } from '../../craft/placeSchema.ts';
 import type { PartFields } from '../../edit/edits/parts.ts';
-import type { UnitSystem } from '../../units/units.ts';
+import { type UnitSystem, unitOf } from '../../units/units.ts';
 import { type Head, type HeadReading, isHeadRow, readHead, usualHeads } from './heads.ts';
 import { readPartRow } from './readPartRow.ts';
 import { type TableRow, tableOf } from './table.ts';
@@ -15,6 +15,11 @@ export interface CellProblem {
   readonly allowed: string;
 }
 
+export interface AssumedUnit {
+  readonly column: string;
+  readonly unit: string;
+}
+
 export interface PartsReading {
   /** From the rows without a problem. */
   readonly good: readonly PartFields[];
@@ -23,19 +28,21 @@ export interface PartsReading {
   readonly problems: readonly CellProblem[];
   /** Heads of columns that mean nothing here. */
   readonly ignored: readonly string[];
+  /** Columns of numbers that name no unit, and the unit they were taken in. */
+  readonly assumed: readonly AssumedUnit[];
 }
 
 /** `home`: where a part without a place goes. */
 export function readParts(text: string, units: UnitSystem, home: Place): PartsReading {
   const [first, ...rest] = tableOf(text);
-  if (!first) return { good: [], rows: 0, problems: [], ignored: [] };
+  if (!first) return { good: [], rows: 0, problems: [], ignored: [], assumed: [] };
   const readings = first.cells.map(readHead);
   if (!isHeadRow(readings)) return readBody([first, ...rest], usualHeads(), units, home);
   const problems = headProblems(first.number, readings);
   const ignored = readings.flatMap((head) =>
     'column' in head || head.badUnit || head.text === '' ? [] : [head.text],
   );
-  if (problems.length > 0) return { good: [], rows: rest.length, problems, ignored };
+  if (problems.length > 0) return { good: [], rows: rest.length, problems, ignored, assumed: [] };
   const heads = readings.map((head) => ('column' in head ? head : null));
   return { ...readBody(rest, heads, units, home), ignored };
 }
@@ -75,5 +82,19 @@ function readBody(
     rows: rows.length,
     problems: readings.flatMap(({ number, faults }) => faults.map((fault) => ({ row: number, ...fault }))),
     ignored: [],
+    assumed: assumedUnits(rows, heads, units),
   };
 }
+
+/** A cell may still name its own unit, as "700 mm". */
+const assumedUnits = (
+  rows: readonly TableRow[],
+  heads: readonly (Head | null)[],
+  units: UnitSystem,
+): AssumedUnit[] =>
+  heads.flatMap((head, i) => {
+    const bare = rows.some(({ cells }) => /^[^\p{L}°"'″′%]*\d[^\p{L}°"'″′%]*$/u.test(cells[i] ?? ''));
+    return head?.column.quantity && head.unit === '' && bare
+      ? [{ column: head.text, unit: unitOf(head.column.quantity, units).symbol }]
+      : [];
+  });

@@ -1,8 +1,9 @@
 /** One of a few. */
-import { useState } from 'react';
+import { useRef, useState } from 'react';
 import type { Problem } from '../../craft/problem.ts';
 import type { Choice } from '../words.ts';
 import { FieldFrame } from './FieldFrame.tsx';
+import type { Leave } from './useDraft.ts';
 
 export interface ChoiceFieldProps<T extends string> {
   readonly label: string;
@@ -15,12 +16,14 @@ export interface ChoiceFieldProps<T extends string> {
   readonly bare?: boolean | undefined;
   readonly hint?: string | undefined;
   readonly autoFocus?: boolean | undefined;
-  readonly onLeave?: (() => void) | undefined;
+  readonly onLeave?: ((how: Leave) => void) | undefined;
 }
 
 export function ChoiceField<T extends string>(props: ChoiceFieldProps<T>) {
   const { label, value, choices, onCommit, none = 'Choose…', bare, hint, onLeave } = props;
   const [error, setError] = useState<string | null>(null);
+  /** What Escape goes back to: an arrow key in a closed list chooses at once. */
+  const first = useRef(value);
   const choose = (text: string) => {
     const chosen = choices.find((choice) => choice.value === text);
     if (!chosen || chosen.value === value) return;
@@ -36,12 +39,13 @@ export function ChoiceField<T extends string>(props: ChoiceFieldProps<T>) {
           // biome-ignore lint/a11y/noAutofocus: only where the builder just opened this cell
           autoFocus={props.autoFocus}
           onChange={(event) => choose(event.currentTarget.value)}
-          onBlur={onLeave}
+          onBlur={() => onLeave?.('blur')}
           onKeyDown={(event) => {
             if (onLeave && (event.key === 'Enter' || event.key === 'Escape')) {
               event.preventDefault();
               event.stopPropagation();
-              onLeave();
+              if (event.key === 'Escape' && first.current !== null) choose(first.current);
+              onLeave(event.key === 'Enter' ? 'enter' : 'escape');
             }
           }}
         >

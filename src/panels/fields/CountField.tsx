@@ -10,11 +10,13 @@ export interface CountFieldProps {
   onCommit(value: number): Problem | null;
   readonly bare?: boolean | undefined;
   readonly hint?: string | undefined;
+  readonly autoFocus?: boolean | undefined;
   readonly startWith?: string | undefined;
   readonly onLeave?: ((how: Leave) => void) | undefined;
 }
 
-export function CountField({ label, value, onCommit, bare, hint, startWith, onLeave }: CountFieldProps) {
+export function CountField(props: CountFieldProps) {
+  const { label, value, onCommit, bare, hint, autoFocus, startWith, onLeave } = props;
   const draft = useDraft<number>({
     label,
     shown: String(value),
@@ -31,11 +33,15 @@ export function CountField({ label, value, onCommit, bare, hint, startWith, onLe
       {(aria) => (
         <input
           {...aria}
+          ref={draft.hold}
           type="text"
           inputMode="numeric"
           autoComplete="off"
           className="number"
           value={draft.text}
+          // biome-ignore lint/a11y/noAutofocus: only where the builder just opened this cell to type
+          autoFocus={autoFocus}
+          onFocus={(event) => bare && startWith === undefined && event.currentTarget.select()}
           onChange={(event) => draft.set(event.currentTarget.value)}
           onBlur={draft.onBlur}
           onKeyDown={draft.onKeyDown}

@@ -2,19 +2,22 @@
 import { useState } from 'react';
 import type { Problem } from '../../craft/problem.ts';
 import { FieldFrame } from './FieldFrame.tsx';
+import { useBurst } from './useBurst.ts';
 
 export interface NotesFieldProps {
   readonly label: string;
   readonly value: string;
   readonly rows: number;
-  onCommit(value: string): Problem | null;
+  /** `run`: the burst of keystrokes it belongs to. */
+  onCommit(value: string, run: string): Problem | null;
 }
 
 export function NotesField({ label, value, rows, onCommit }: NotesFieldProps) {
   /** Text the craft would not take, with what is allowed. */
   const [refused, setRefused] = useState<{ text: string; allowed: string } | null>(null);
+  const burst = useBurst();
   const change = (text: string) => {
-    const problem = onCommit(text);
+    const problem = onCommit(text, burst.run());
     setRefused(problem && { text, allowed: problem.allowed });
   };
   const error = refused && `${label}: found ${refused.text.length} characters; allowed: ${refused.allowed}.`;
@@ -24,6 +27,7 @@ export function NotesField({ label, value, rows, onCommit }: NotesFieldProps) {
         <textarea
           {...aria}
           rows={rows}
+          onBlur={burst.end}
           value={refused?.text ?? value}
           onChange={(event) => change(event.currentTarget.value)}
         />

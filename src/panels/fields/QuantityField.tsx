@@ -4,6 +4,7 @@ import type { Problem } from '../../craft/problem.ts';
 import { type Quantity, type UnitSystem, unitOf } from '../../units/units.ts';
 import { entryText, problemSentence, readEntry, stepped } from './entry.ts';
 import { FieldFrame } from './FieldFrame.tsx';
+import { useBurst } from './useBurst.ts';
 import { type Leave, useDraft } from './useDraft.ts';
 
 export interface QuantityFieldProps {
@@ -12,7 +13,8 @@ export interface QuantityFieldProps {
   readonly value: number | null;
   readonly quantity: Quantity;
   readonly units: UnitSystem;
-  onCommit(value: number): Problem | null;
+  /** `run`: the burst of arrow keys it belongs to. */
+  onCommit(value: number, run?: string): Problem | null;
   readonly bare?: boolean | undefined;
   readonly hint?: string | undefined;
   readonly disabled?: boolean | undefined;
@@ -23,9 +25,10 @@ export interface QuantityFieldProps {
 
 export function QuantityField(props: QuantityFieldProps) {
   const { label, value, quantity, units, onCommit, startWith, onLeave } = props;
-  const commit = (next: number, text: string): string | null => {
+  const burst = useBurst();
+  const commit = (next: number, text: string, stepped?: boolean): string | null => {
     if (next === value) return null;
-    const problem = onCommit(next);
+    const problem = stepped ? onCommit(next, burst.run()) : onCommit(next);
     return problem && problemSentence(label, text, problem, quantity, units);
   };
   const draft = useDraft({
@@ -57,6 +60,7 @@ export function QuantityField(props: QuantityFieldProps) {
       {(aria) => (
         <input
           {...aria}
+          ref={draft.hold}
           type="text"
           inputMode="decimal"
           autoComplete="off"
@@ -67,7 +71,10 @@ export function QuantityField(props: QuantityFieldProps) {
           autoFocus={props.autoFocus}
           onFocus={(event) => startWith === undefined && event.currentTarget.select()}
           onChange={(event) => draft.set(event.currentTarget.value)}
-          onBlur={draft.onBlur}
+          onBlur={() => {
+            burst.end();
+            draft.onBlur();
+          }}
           onKeyDown={onKeyDown}
         />
       )}

@@ -1,7 +1,6 @@
 /** What fields show, read and say; pure, so that it can be tested without a page. */
 import type { Problem } from '../../craft/problem.ts';
 import { formatEntry, parseQuantity } from '../../units/entry.ts';
-import { formatQuantity } from '../../units/format.ts';
 import { type Quantity, type UnitSystem, unitOf } from '../../units/units.ts';
 
 export type Read<T> =
@@ -50,7 +49,9 @@ const BOUND = /^(at least|at most|more than|less than) (-?[\d.]+(?:e[+-]?\d+)?)$
 export function allowedText(allowed: string, quantity: Quantity | null, units: UnitSystem): string {
   const bound = BOUND.exec(allowed);
   if (!bound || !quantity) return allowed;
-  return `${bound[1]} ${formatQuantity(Number(bound[2]), quantity, units)}`;
+  const { symbol } = unitOf(quantity, units);
+  const number = formatEntry(Number(bound[2]), quantity, units);
+  return `${bound[1]} ${number}${symbol === '°' || symbol === '' ? symbol : ` ${symbol}`}`;
 }
 
 /** One sentence on what the gate refused: names the field, what was typed, what is allowed. */

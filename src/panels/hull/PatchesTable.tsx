@@ -3,7 +3,7 @@ import type { HullSpec } from '../../craft/hullSchema.ts';
 import type { Problem } from '../../craft/problem.ts';
 import { setHull } from '../../edit/edits/craft.ts';
 import { stationOf } from '../../edit/place.ts';
-import type { Quantity } from '../../units/units.ts';
+import { type Quantity, unitOf } from '../../units/units.ts';
 import { useCommit } from '../commit.ts';
 import { defaultPlace } from '../defaults.ts';
 import { useEditor } from '../editor.ts';
@@ -19,10 +19,10 @@ const NUMBERS: readonly { key: 'mass' | 'station' | 'clock'; label: string; quan
 ];
 
 export function PatchesTable({ patches }: { patches: readonly Patch[] }) {
-  const { assessment } = useEditor();
+  const { assessment, units } = useEditor();
   const commit = useCommit();
-  const set = (field: string, next: readonly Patch[]): Problem | null =>
-    commit(setHull(field, { patches: [...next] }));
+  const set = (field: string, next: readonly Patch[], run?: string): Problem | null =>
+    commit(setHull(field, { patches: [...next] }), run);
   const add = () => {
     const station = stationOf(defaultPlace(assessment));
     set('patches', [...patches, { name: 'Patch', mass: 0, station, clock: Math.PI }]);
@@ -30,14 +30,14 @@ export function PatchesTable({ patches }: { patches: readonly Patch[] }) {
   return (
     <>
       {patches.length > 0 && (
-        <table className="rows-table">
+        <table className="rows-table patches">
           <caption>Patches</caption>
           <thead>
             <tr>
               <th scope="col">Patch</th>
-              {NUMBERS.map(({ key, label }) => (
+              {NUMBERS.map(({ key, label, quantity }) => (
                 <th scope="col" key={key}>
-                  {label}
+                  {label}, {unitOf(quantity, units).symbol}
                 </th>
               ))}
               <th scope="col">
@@ -52,7 +52,9 @@ export function PatchesTable({ patches }: { patches: readonly Patch[] }) {
                 key={index}
                 patch={patch}
                 number={index + 1}
-                onPatch={(field, next) => set(`patch ${index + 1} ${field}`, patches.with(index, next))}
+                onPatch={(field, next, run) =>
+                  set(`${field} of patch ${index + 1}`, patches.with(index, next), run)
+                }
                 onRemove={() => set('patches', patches.toSpliced(index, 1))}
               />
             ))}
@@ -69,7 +71,7 @@ export function PatchesTable({ patches }: { patches: readonly Patch[] }) {
 interface PatchRowProps {
   readonly patch: Patch;
   readonly number: number;
-  onPatch(field: string, patch: Patch): Problem | null;
+  onPatch(field: string, patch: Patch, run?: string): Problem | null;
   onRemove(): void;
 }
 
@@ -93,7 +95,7 @@ function PatchRow({ patch, number, onPatch, onRemove }: PatchRowProps) {
             value={patch[key]}
             quantity={quantity}
             units={units}
-            onCommit={(value) => onPatch(label.toLowerCase(), { ...patch, [key]: value })}
+            onCommit={(value, run) => onPatch(label.toLowerCase(), { ...patch, [key]: value }, run)}
           />
         </td>
       ))}

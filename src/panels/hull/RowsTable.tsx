@@ -1,8 +1,9 @@
 /** The rows of a hull given by measured offsets or by a flat pattern. */
-import { useState } from 'react';
+import { useId, useState } from 'react';
 import type { Problem } from '../../craft/problem.ts';
 import { setShape } from '../../edit/edits/craft.ts';
 import { withRowAfter } from '../../edit/shapeAs.ts';
+import { unitOf } from '../../units/units.ts';
 import { useCommit } from '../commit.ts';
 import { readNumberRows } from '../csv/numberRows.ts';
 import { useEditor } from '../editor.ts';
@@ -13,9 +14,10 @@ export function RowsTable({ shape }: { shape: RowShape }) {
   const { units } = useEditor();
   const commit = useCommit();
   const columns = columnsOf(shape);
+  const unit = unitOf('length', units).symbol;
   const rows: readonly HullRow[] = shape.rows;
-  const set = (next: readonly HullRow[]): Problem | null =>
-    commit(setShape('rows', { ...shape, rows: next } as RowShape));
+  const set = (next: readonly HullRow[], run?: string): Problem | null =>
+    commit(setShape('rows', { ...shape, rows: next } as RowShape), run);
   return (
     <>
       <table className="rows-table">
@@ -25,7 +27,7 @@ export function RowsTable({ shape }: { shape: RowShape }) {
             <th scope="col">Row</th>
             {columns.map(({ key, label }) => (
               <th scope="col" key={key}>
-                {label}
+                {label}, {unit}
               </th>
             ))}
             <th scope="col">
@@ -46,7 +48,7 @@ export function RowsTable({ shape }: { shape: RowShape }) {
                     value={row[key]!}
                     quantity="length"
                     units={units}
-                    onCommit={(value) => set(rows.with(index, { ...row, [key]: value }))}
+                    onCommit={(value, run) => set(rows.with(index, { ...row, [key]: value }), run)}
                   />
                 </td>
               ))}
@@ -71,7 +73,7 @@ export function RowsTable({ shape }: { shape: RowShape }) {
           ))}
         </tbody>
       </table>
-      <PasteRows columns={columns.map(({ key, label }) => ({ key, label }))} onRows={set} />
+      <PasteRows columns={columns.map(({ key, label }) => ({ key, label }))} onRows={(next) => set(next)} />
     </>
   );
 }
@@ -84,6 +86,7 @@ interface PasteRowsProps {
 /** Two columns pasted from a spreadsheet take the place of the table. */
 function PasteRows({ columns, onRows }: PasteRowsProps) {
   const { units } = useEditor();
+  const id = useId();
   const [text, setText] = useState('');
   const [messages, setMessages] = useState<readonly string[]>([]);
   const take = () => {
@@ -97,11 +100,11 @@ function PasteRows({ columns, onRows }: PasteRowsProps) {
   return (
     <details className="paste">
       <summary>Paste rows from a spreadsheet</summary>
-      <label>
+      <label htmlFor={id}>
         {columns.map(({ label }) => label).join(' and ')}, one row a line; units in the heads if not the usual
         ones
-        <textarea rows={5} value={text} onChange={(event) => setText(event.currentTarget.value)} />
       </label>
+      <textarea id={id} rows={5} value={text} onChange={(event) => setText(event.currentTarget.value)} />
       <button type="button" disabled={text.trim() === ''} onClick={take}>
         Replace the rows
       </button>

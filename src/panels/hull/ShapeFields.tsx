@@ -20,10 +20,18 @@ function OneField({ shape, field }: { shape: HullShape; field: ShapeField }) {
   const commit = useCommit();
   const { input, label, hint } = field;
   const value = fieldValue(shape, field);
-  const set = (next: number | string) =>
-    commit(setShape(label.toLowerCase(), { ...shape, [field.key]: next } as HullShape));
+  const set = (next: number | string, run?: string) =>
+    commit(setShape(label.toLowerCase(), { ...shape, [field.key]: next } as HullShape), run);
   if (typeof input !== 'string') {
-    return <ChoiceField label={label} value={String(value)} choices={input} hint={hint} onCommit={set} />;
+    return (
+      <ChoiceField
+        label={label}
+        value={String(value)}
+        choices={input}
+        hint={hint}
+        onCommit={(next) => set(next)}
+      />
+    );
   }
   if (input === 'whole') return <CountField label={label} value={Number(value)} hint={hint} onCommit={set} />;
   return (

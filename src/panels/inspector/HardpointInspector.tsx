@@ -1,6 +1,6 @@
 /** Every field of one hardpoint. */
 import type { Hardpoint } from '../../craft/schema.ts';
-import { moveHardpoint, renameHardpoint, setLeadAt } from '../../edit/edits/hardpoints.ts';
+import { setHardpoint, setLeadAt } from '../../edit/edits/hardpoints.ts';
 import { useCommit } from '../commit.ts';
 import { useEditor } from '../editor.ts';
 import { TextField } from '../fields/TextField.tsx';
@@ -23,12 +23,12 @@ export function HardpointInspector({ hardpoint }: { hardpoint: Hardpoint }) {
       <TextField
         label="Name"
         value={hardpoint.name}
-        onCommit={(name) => commit(renameHardpoint(hardpoint.id, name))}
+        onCommit={(name) => commit(setHardpoint(hardpoint, 'name', { name }))}
       />
       <PlaceFields
         place={hardpoint.place}
         at={view?.at ?? null}
-        onPlace={(place) => commit(moveHardpoint(hardpoint.id, place))}
+        onPlace={(place, field, run) => commit(setHardpoint(hardpoint, field, { place }), run)}
       />
       <button
         type="button"

@@ -22,7 +22,8 @@ export function PartInspector({ part }: { part: Part }) {
   const commit = useCommit();
   const geometry = assessment.geometry.status === 'solved' ? assessment.geometry : null;
   const piece = geometry?.pieces.find((each) => each.part === part.id) ?? null;
-  const set = (field: string, change: Partial<PartFields>) => commit(setPart(part.id, field, change));
+  const set = (field: string, change: Partial<PartFields>, run?: string) =>
+    commit(setPart(part, field, change), run);
   const quantity = (
     label: string,
     key: 'mass' | 'massTolerance' | 'cgOffset',
@@ -35,7 +36,7 @@ export function PartInspector({ part }: { part: Part }) {
       quantity={kind}
       units={units}
       hint={hint}
-      onCommit={(next) => set(label.toLowerCase(), { [key]: next })}
+      onCommit={(next, run) => set(label.toLowerCase(), { [key]: next }, run)}
     />
   );
   return (
@@ -59,11 +60,16 @@ export function PartInspector({ part }: { part: Part }) {
       <PlaceFields
         place={part.place}
         at={piece?.middle ?? null}
-        onPlace={(place, field) => set(field, { place })}
+        onPlace={(place, field, run) => set(field, { place }, run)}
       />
       <CopiesField copies={part.copies} onCommit={(copies) => set('copies', { copies })} />
       <SizeFields part={part} />
-      {quantity('CG offset', 'cgOffset', 'smallLength', 'Aft of the middle of its length')}
+      {quantity(
+        'CG offset',
+        'cgOffset',
+        'smallLength',
+        'Where its own CG is: aft of the middle of its length',
+      )}
       <CheckField
         label="Locked in place"
         value={part.locked}
@@ -73,7 +79,7 @@ export function PartInspector({ part }: { part: Part }) {
         label="Part notes"
         rows={3}
         value={part.notes}
-        onCommit={(notes) => set('notes', { notes })}
+        onCommit={(notes, run) => set('notes', { notes }, run)}
       />
       {geometry && <PartFacts id={part.id} geometry={geometry} />}
     </section>
@@ -86,17 +92,19 @@ const SIDES = [
   { key: 'height', label: 'Height' },
 ] as const;
 
-function SizeFields({ part: { id, size } }: { part: Part }) {
+function SizeFields({ part }: { part: Part }) {
   const { units } = useEditor();
   const commit = useCommit();
   return SIDES.map(({ key, label }) => (
     <QuantityField
       key={key}
       label={label}
-      value={size[key]}
+      value={part.size[key]}
       quantity="smallLength"
       units={units}
-      onCommit={(next) => commit(setPart(id, label.toLowerCase(), { size: { ...size, [key]: next } }))}
+      onCommit={(next, run) =>
+        commit(setPart(part, label.toLowerCase(), { size: { ...part.size, [key]: next } }), run)
+      }
     />
   ));
 }
@@ -116,8 +124,8 @@ function PartFacts({ id, geometry }: { id: string; geometry: Geometry }) {
             ]
           : []),
         ...pieces.map(({ cg: [x, y, z], copy }) => ({
-          label: pieces.length > 1 ? `CG of piece ${copy + 1}` : 'CG of the piece',
-          text: `station ${place(x)}, side ${place(y)}, height ${place(z)}`,
+          label: pieces.length > 1 ? `CG of piece ${copy + 1}` : 'CG station, side, height',
+          text: [x, y, z].map(place).join(', '),
         })),
       ]}
     />

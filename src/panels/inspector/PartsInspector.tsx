@@ -19,7 +19,8 @@ export function PartsInspector({ parts }: { parts: readonly Part[] }) {
   const { units } = useEditor();
   const commit = useCommit();
   const ids = parts.map((part) => part.id);
-  const set = (label: string, change: Partial<PartFields>) => commit(setParts(ids, label, change));
+  const set = (what: string, change: Partial<PartFields>, run?: string) =>
+    commit(setParts(ids, `${what} of ${parts.length} parts`, change), run);
   const kinds = PART_KINDS.filter((kind) => parts.some((part) => part.kind === kind));
   return (
     <section className="panel inspector" aria-label="Inspector">
@@ -40,14 +41,14 @@ export function PartsInspector({ parts }: { parts: readonly Part[] }) {
         quantity="mass"
         units={units}
         hint="Of one piece; empty where they differ"
-        onCommit={(mass) => set('Change mass', { mass })}
+        onCommit={(mass, run) => set('Change mass', { mass }, run)}
       />
       <QuantityField
         label="± mass"
         value={shared(parts, (part) => part.massTolerance)}
         quantity="mass"
         units={units}
-        onCommit={(massTolerance) => set('Change mass tolerance', { massTolerance })}
+        onCommit={(massTolerance, run) => set('Change mass tolerance', { massTolerance }, run)}
       />
       <ChoiceField
         label="Source of the mass"
@@ -59,7 +60,7 @@ export function PartsInspector({ parts }: { parts: readonly Part[] }) {
       <CheckField
         label="Locked in place"
         value={shared(parts, (part) => part.locked)}
-        onCommit={(locked) => set(locked ? 'Lock parts' : 'Unlock parts', { locked })}
+        onCommit={(locked) => set('Change lock', { locked })}
       />
     </section>
   );

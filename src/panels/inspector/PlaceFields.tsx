@@ -16,7 +16,7 @@ export interface PlaceFieldsProps {
   /** Before every label, where several places stand on one page: "From ". */
   readonly prefix?: string | undefined;
   /** `field` names what was typed, for the undo list. */
-  onPlace(place: Place, field: string): Problem | null;
+  onPlace(place: Place, field: string, run?: string): Problem | null;
 }
 
 /** Clock angle of the keel. */
@@ -91,7 +91,7 @@ function CoordinateField({ place, field, prefix, onPlace }: CoordinateFieldProps
       quantity={field.quantity}
       units={units}
       hint={field.hint}
-      onCommit={(next) => onPlace({ ...place, [field.key]: next }, field.label.toLowerCase())}
+      onCommit={(next, run) => onPlace({ ...place, [field.key]: next }, field.label.toLowerCase(), run)}
     />
   );
 }
@@ -106,11 +106,11 @@ interface TapeFieldProps extends Pick<PlaceFieldsProps, 'onPlace'> {
 function TapeField({ place, hull, prefix, onPlace }: TapeFieldProps) {
   const { units } = useEditor();
   const clock = place.kind === 'skin' ? place.clock : KEEL;
-  const commit = (tape: number): Problem | null => {
+  const commit = (tape: number, run?: string): Problem | null => {
     const most = hull.tapeAt(hull.length, clock);
     return tape < 0 || tape > most
       ? { path: '', found: String(tape), allowed: tape < 0 ? 'at least 0' : `at most ${most}` }
-      : onPlace({ ...place, station: hull.stationAt(tape, clock) }, 'tape distance');
+      : onPlace({ ...place, station: hull.stationAt(tape, clock) }, 'tape distance', run);
   };
   return (
     <QuantityField

@@ -27,7 +27,8 @@ const KEEL = Math.PI;
 export function WireInspector({ wire }: { wire: WireRun }) {
   const { units } = useEditor();
   const commit = useCommit();
-  const set = (field: string, change: Partial<WireFields>) => commit(setWire(wire.id, field, change));
+  const set = (field: string, change: Partial<WireFields>, run?: string) =>
+    commit(setWire(wire, field, change), run);
   const { path } = wire;
   return (
     <section className="panel inspector" aria-label="Inspector">
@@ -47,7 +48,7 @@ export function WireInspector({ wire }: { wire: WireRun }) {
           quantity="angle"
           units={units}
           hint="0 top, 90 starboard, 180 keel"
-          onCommit={(clock) => set('clock angle', { path: { kind: 'skin', clock } })}
+          onCommit={(clock, run) => set('clock angle', { path: { kind: 'skin', clock } }, run)}
         />
       )}
       <ConductorFields wire={wire} />
@@ -55,7 +56,7 @@ export function WireInspector({ wire }: { wire: WireRun }) {
         label="Wire notes"
         rows={3}
         value={wire.notes}
-        onCommit={(notes) => set('notes', { notes })}
+        onCommit={(notes, run) => set('notes', { notes }, run)}
       />
       <WireFacts id={wire.id} />
     </section>
@@ -65,7 +66,8 @@ export function WireInspector({ wire }: { wire: WireRun }) {
 function ConductorFields({ wire }: { wire: WireRun }) {
   const { units } = useEditor();
   const commit = useCommit();
-  const set = (field: string, change: Partial<WireFields>) => commit(setWire(wire.id, field, change));
+  const set = (field: string, change: Partial<WireFields>, run?: string) =>
+    commit(setWire(wire, field, change), run);
   const known = catalogue.conductors.find(({ massPerMetre }) => massPerMetre === wire.massPerMetre);
   const choose = (id: string) =>
     set('conductor', { massPerMetre: catalogue.conductors.find((each) => each.id === id)!.massPerMetre });
@@ -84,7 +86,7 @@ function ConductorFields({ wire }: { wire: WireRun }) {
         quantity="massPerMetre"
         units={units}
         hint="Of one conductor"
-        onCommit={(massPerMetre) => set('mass per length', { massPerMetre })}
+        onCommit={(massPerMetre, run) => set('mass per length', { massPerMetre }, run)}
       />
       <CountField
         label="Conductors"
@@ -98,7 +100,7 @@ function ConductorFields({ wire }: { wire: WireRun }) {
         quantity="fraction"
         units={units}
         hint="Extra length as a share of the path"
-        onCommit={(slack) => set('slack', { slack })}
+        onCommit={(slack, run) => set('slack', { slack }, run)}
       />
     </>
   );
@@ -114,8 +116,8 @@ function EndFields({ wire, side }: { wire: WireRun; side: 'from' | 'to' }) {
   const at = useEndPoint(wire.id, side);
   const end = wire[side];
   const word = SIDE_WORDS[side];
-  const set = (next: WireEnd, field: string) =>
-    commit(setWire(wire.id, `${side} ${field}`, { [side]: next }));
+  const set = (next: WireEnd, field: string, run?: string) =>
+    commit(setWire(wire, `${side} ${field}`, { [side]: next }), run);
   // A part's id has no colon, so that "loose" can stand beside them.
   const choices = [
     { value: LOOSE, label: 'Loose, at a place' },
@@ -141,7 +143,7 @@ function EndFields({ wire, side }: { wire: WireRun; side: 'from' | 'to' }) {
           prefix={word}
           place={end.place}
           at={at}
-          onPlace={(place, field) => set({ kind: 'loose', place }, field)}
+          onPlace={(place, field, run) => set({ kind: 'loose', place }, field, run)}
         />
       )}
     </>

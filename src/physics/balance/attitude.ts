@@ -29,10 +29,3 @@ export function attitudeOf([x, y, z]: Vec3): Attitude | null {
   if (Math.abs(y) <= ROUNDING * size) return { pitch: Math.atan2(x, -z), heel: 0 };
   return { pitch: Math.atan2(x, Math.hypot(y, z)), heel: Math.atan2(y, -z) };
 }
-
-/** The direction of down in hull axes at an attitude; unit length. */
-export const downAt = ({ pitch, heel }: Attitude): Vec3 => [
-  Math.sin(pitch),
-  Math.cos(pitch) * Math.sin(heel),
-  -Math.cos(pitch) * Math.cos(heel),
-];

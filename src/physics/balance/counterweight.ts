@@ -37,7 +37,7 @@ function wrongSide(qx: number, arm: number): Outcome<number> {
   const [side, other] = qx > 0 ? ['aft', 'forward'] : ['forward', 'aft'];
   return infeasible(
     `The craft is ${heavy}-heavy by ${say(Math.abs(qx), 'momentMass')} and the hardpoint lies ${say(Math.abs(arm), 'smallLength')} ${side} of the CB, so weight there makes it worse.`,
-    `Choose a hardpoint ${other} of the CB, or take ${say(Math.abs(qx / arm), 'mass')} away at this one.`,
+    `Choose a hardpoint ${other} of the CB.`,
   );
 }
 

@@ -14,9 +14,14 @@ export interface OneWeight {
   readonly station: number;
 }
 
+/** Less than this is neutral, kg. */
+const NEUTRAL = 5e-5;
+
 /** `hullLength` bounds the station; `liftPerVolume` is ρ_air − ρ_gas, kg/m³, for saying what would help. */
 export function oneWeight(loading: Loading, hullLength: number, liftPerVolume: number): Outcome<OneWeight> {
   const mass = -heavinessOf(loading);
+  if (Math.abs(mass) < NEUTRAL)
+    return infeasible('The craft is neutral already: no lift is left to hang anything on.');
   if (mass <= 0) return noLiftLeft(-mass, liftPerVolume);
   const station = loading.cb[0] - hangOf(loading)[0] / mass;
   if (station < 0 || station > hullLength) return beyondHull(mass, station, hullLength);

@@ -39,11 +39,14 @@ export function ellipsoidAddedMass(a: number, b: number, c: number): AddedMass {
   };
 }
 
-/** k′ in the plane of the semi-axes a and c; written with κ = (γ₀ − α₀)/(c² − a²) so that it tends to 0 as c → a. */
+/** Semi-axes whose squares differ by less than this share are equal: k′, which goes with its square, is 0 to rounding. */
+const EQUAL = 1e-9;
+
+/** k′ in the plane of the semi-axes a and c, written with κ = (γ₀ − α₀)/(c² − a²), which stays finite as c → a. */
 function turning(a: number, c: number, alpha: number, gamma: number): number {
   const difference = (c - a) * (c + a);
-  if (difference === 0) return 0;
   const sum = a * a + c * c;
+  if (Math.abs(difference) < EQUAL * sum) return 0;
   const kappa = (gamma - alpha) / difference;
   return (-kappa * difference * difference) / (sum * (2 + sum * kappa));
 }

@@ -23,12 +23,12 @@ export const unitRun = (phi: number): number => 1 / Math.sqrt(1 + Math.cos(phi) 
 const riseSeries = seriesOf(unitRise);
 const runSeries = seriesOf(unitRun);
 
-function seriesOf(f: (phi: number) => number): Float64Array {
+function seriesOf(f: (phi: number) => number): number[] {
   const rule = legendreRule(TERMS);
   const half = QUARTER / 2;
   return coefficientsOf(
     rule,
-    Float64Array.from(rule.nodes, (xi) => half * f(half * (1 + xi))),
+    rule.nodes.map((xi) => half * f(half * (1 + xi))),
   );
 }
 

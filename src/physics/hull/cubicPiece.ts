@@ -7,7 +7,7 @@ export interface CubicPiece {
   readonly c: readonly [number, number, number, number];
 }
 
-export function piecesOf({ xs, ys, slopes }: MonotoneCubic): CubicPiece[] {
+export function piecesOf({ xs, ys, slopes }: Pick<MonotoneCubic, 'xs' | 'ys' | 'slopes'>): CubicPiece[] {
   return xs.slice(1).map((to, i) => {
     const h = to - xs[i]!;
     const secant = (ys[i + 1]! - ys[i]!) / h;

@@ -53,7 +53,7 @@ function ogive(length: number, radius: number): Stretch {
     at: (t) => {
       const phi = atTip * (1 - t);
       return {
-        r: radius - 2 * arc * Math.sin(phi / 2) ** 2,
+        r: Math.max(0, radius - 2 * arc * Math.sin(phi / 2) ** 2),
         dx: arc * atTip * Math.cos(phi),
         dr: arc * atTip * Math.sin(phi),
       };

@@ -1,60 +1,67 @@
 /**
  * Stations at which an outline is drawn: evenly spread over a measure that is half tape distance and half turning of
- * the tangent, so that straight stretches get few and round ends many.
+ * the tangent, so that straight stretches get few and round ends many; and every corner.
  */
 import type { Panel } from './panels.ts';
 
 interface Mark {
   readonly x: number;
-  /** Running measure, 0 … 1. */
-  readonly measure: number;
+  readonly r: number;
 }
 
+/** A turn between neighbouring marks beyond this is drawn as a corner, rad. */
+const CORNER = 0.15;
+
+/** Ascending, from 0 to the length, about `count` of them. */
 export function drawStations(panels: readonly Panel[], count: number): number[] {
-  const marks = measured(panels);
-  const wanted = Math.max(2, Math.round(count));
-  const stations = [0];
-  let k = 1;
-  for (let i = 1; i + 1 < wanted; i += 1) {
-    while (marks[k]!.measure < i / (wanted - 1)) k += 1;
-    const station = between(marks[k - 1]!, marks[k]!, i / (wanted - 1));
-    if (station > stations.at(-1)!) stations.push(station);
-  }
+  const marks = outline(panels);
+  const turns = turnsAt(marks);
+  const measure = measured(marks, turns);
+  const corners = marks.filter((_, i) => turns[i]! > CORNER).map(({ x }) => x);
+  const spread = Array.from({ length: Math.max(0, Math.round(count) - 2) }, (_, i) =>
+    placeOf(marks, measure, (i + 1) / (Math.round(count) - 1)),
+  );
   const length = panels.at(-1)!.x1;
-  while (stations.at(-1)! >= length) stations.pop();
-  return [...stations, length];
+  const inside = [...spread, ...corners].filter((x) => x > 0 && x < length);
+  return [...new Set([0, ...inside.sort((a, b) => a - b), length])];
 }
 
-function between(a: Mark, b: Mark, measure: number): number {
-  const share = b.measure > a.measure ? (measure - a.measure) / (b.measure - a.measure) : 1;
-  return a.x + share * (b.x - a.x);
-}
-
-/** Every node of every panel with its share of tape and of turning so far. */
-function measured(panels: readonly Panel[]): Mark[] {
-  const points = outline(panels);
-  const tape = [0];
-  const turn = [0];
-  let heading: number | undefined;
-  for (let i = 1; i < points.length; i += 1) {
-    const dx = points[i]!.x - points[i - 1]!.x;
-    const dr = points[i]!.r - points[i - 1]!.r;
-    const next = dx === 0 && dr === 0 ? (heading ?? 0) : Math.atan2(dr, dx);
-    tape.push(tape.at(-1)! + Math.hypot(dx, dr));
-    turn.push(turn.at(-1)! + Math.abs(next - (heading ?? next)));
-    heading = next;
-  }
-  const wholeTurn = turn.at(-1)! || 1;
-  return points.map(({ x }, i) => ({ x, measure: (tape[i]! / tape.at(-1)! + turn[i]! / wholeTurn) / 2 }));
-}
-
-function outline(panels: readonly Panel[]): { x: number; r: number }[] {
-  const points = [{ x: 0, r: 0 }];
-  for (const { sample, stretch, to, x1 } of panels) {
+/** Every node of every panel, and the ends of the panels. */
+function outline(panels: readonly Panel[]): Mark[] {
+  const marks = [{ x: 0, r: 0 }];
+  for (const { sample, stretch, from, to, x0, x1 } of panels) {
+    marks.push({ x: x0, r: stretch.at(from).r });
     sample.x.forEach((x, i) => {
-      points.push({ x, r: sample.r[i]! });
+      marks.push({ x, r: sample.r[i]! });
     });
-    points.push({ x: x1, r: stretch.at(to).r });
+    marks.push({ x: x1, r: stretch.at(to).r });
   }
-  return points;
+  return marks.filter(({ x, r }, i) => i === 0 || x !== marks[i - 1]!.x || r !== marks[i - 1]!.r);
+}
+
+/** How far the outline turns at each mark, rad. */
+function turnsAt(marks: readonly Mark[]): number[] {
+  const headings = marks.slice(1).map(({ x, r }, i) => Math.atan2(r - marks[i]!.r, x - marks[i]!.x));
+  return marks.map((_, i) => (i > 0 && i < headings.length ? Math.abs(headings[i]! - headings[i - 1]!) : 0));
+}
+
+/** Share of tape and of turning from the nose to each mark, 0 … 1. */
+function measured(marks: readonly Mark[], turns: readonly number[]): number[] {
+  let tape = 0;
+  let turn = 0;
+  const wholeTurn = turns.reduce((sum, angle) => sum + angle, 0) || 1;
+  const sums = marks.map(({ x, r }, i) => {
+    if (i > 0) tape += Math.hypot(x - marks[i - 1]!.x, r - marks[i - 1]!.r);
+    turn += turns[i]! / wholeTurn;
+    return { tape, turn };
+  });
+  return sums.map((sum) => (sum.tape / tape + sum.turn) / 2);
+}
+
+function placeOf(marks: readonly Mark[], measure: readonly number[], wanted: number): number {
+  let k = 1;
+  while (k + 1 < marks.length && measure[k]! < wanted) k += 1;
+  const step = measure[k]! - measure[k - 1]!;
+  const share = step > 0 ? Math.min(1, Math.max(0, (wanted - measure[k - 1]!) / step)) : 1;
+  return marks[k - 1]!.x + share * (marks[k]!.x - marks[k - 1]!.x);
 }

@@ -13,6 +13,7 @@ import { pchip } from '../../numeric/pchip.ts';
 import { say } from '../../units/sentence.ts';
 import { piecesOf } from './cubicPiece.ts';
 import type { Meridian, ShapeOf } from './meridian.ts';
+import { withRoundTips } from './roundTips.ts';
 import { rowsFault } from './rows.ts';
 import { greatestRadius, tapeStretch } from './tapeMeridian.ts';
 import { tautOutline } from './tautOutline.ts';
@@ -32,7 +33,7 @@ function fromWidths(count: number, rows: PatternRows): Outcome<Meridian> {
     rows.map(({ tape }) => tape),
     rows.map(({ width }) => (count * width) / (2 * Math.PI)),
   );
-  const pieces = tautOutline(piecesOf(pattern), 'closed');
+  const pieces = tautOutline(piecesOf(withRoundTips(pattern)), 'closed');
   if (pieces.every((piece) => Math.abs(piece.c[1]) === 1 && piece.slack)) return tooWide(rows, count);
   return solved({
     stretches: pieces.map((piece) => tapeStretch(piece, (s) => 2 * Math.PI * pattern.at(s))),

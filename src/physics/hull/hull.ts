@@ -15,9 +15,9 @@ export interface Hull {
   readonly volume: number;
   /** Wetted area of the inflated hull, m². */
   readonly area: number;
-  /** Area of film it is made from, m²; more than `area` where two flat sheets crumple along their edge. */
+  /** Area of film it is made from, m²; more than `area` where flat film lies in folds: along the rim of two round sheets, at wide tips of a pattern. */
   readonly filmArea: number;
-  /** Length of one meridional seam, nose to tail (the whole edge of a two-sheet hull is two of them), m. */
+  /** Length of one meridional seam, nose tip to tail tip with any flat end faces (the whole edge of a two-sheet hull is two of them), m. */
   readonly seamLength: number;
   /** Greatest section area seen from ahead, m². */
   readonly frontalArea: number;
@@ -31,19 +31,19 @@ export interface Hull {
   readonly volumeInertia: Triple;
   /** The same of the film about its own centroid, per unit areal density, m⁴. */
   readonly skinInertia: Triple;
-  /** The same of one unit of seam mass per metre, all seams together taken as spread evenly round the section, per seam, m³, about the seam centroid; and that centroid's station. */
+  /** The same of one unit of seam mass per metre, all seams together taken as spread evenly round the section (the round two-sheet balloon: along its rim), per seam, m³, about the seam centroid; and that centroid's station. */
   readonly seamInertia: Triple;
   readonly seamStation: number;
 
-  /** Distance from the axis to the skin at a station and clock angle, m; 0 beyond the ends. */
+  /** Distance from the axis to the skin at a station and clock angle, m; at a flat end face its rim; 0 beyond the ends. */
   radius(station: number, clock: number): number;
   /** Section area at a station, m²; 0 beyond the ends. */
   sectionArea(station: number): number;
   /** Girth at a station, m; 0 beyond the ends. */
   girth(station: number): number;
-  /** Tape distance from the nose tip along the skin at a clock angle, m; clamped to the ends. */
+  /** Tape distance from the nose tip along the skin at a clock angle, m; clamped to the ends. At a flat end face: to its rim. */
   tapeAt(station: number, clock: number): number;
-  /** Station reached by a tape from the nose tip along the skin at a clock angle, m; clamped to the ends. */
+  /** Station reached by a tape from the nose tip along the skin at a clock angle, m; clamped to the ends. Anywhere on a flat face it is the station of that face. */
   stationAt(tape: number, clock: number): number;
   /** Length and first moments of the skin path at one clock angle between two stations (order does not matter). */
   skinPath(from: number, to: number, clock: number): SkinPath;

@@ -26,7 +26,10 @@ export function hullOf(shape: HullShape): Outcome<Hull> {
   return tooSmall(hull) ?? solved(hull);
 }
 
-function meridianOf(shape: Exclude<HullShape, ShapeOf<'roundTwoSheet'>>): Outcome<Meridian> {
+/** A form that is a body of revolution about the hull axis. */
+export type RevolvedShape = Exclude<HullShape, ShapeOf<'roundTwoSheet'>>;
+
+export function meridianOf(shape: RevolvedShape): Outcome<Meridian> {
   switch (shape.kind) {
     case 'spheroid':
       return solved(spheroid(shape));

@@ -55,7 +55,7 @@ const integralOf = (k: number, xi: number, p: readonly number[]): number =>
   k === 0 ? xi + 1 : (p[k + 1]! - p[k - 1]!) / (2 * k + 1);
 
 /** Row `row` of an n × n table times the values. */
-export function apply(table: Float64Array, row: number, values: Float64Array): number {
+export function apply(table: Float64Array, row: number, values: readonly number[]): number {
   const n = values.length;
   let sum = 0;
   for (let j = 0; j < n; j += 1) sum += table[row * n + j]! * values[j]!;
@@ -63,9 +63,9 @@ export function apply(table: Float64Array, row: number, values: Float64Array): n
 }
 
 /** Coefficients c₀ … cₙ₋₁ of the values at the nodes. */
-export function coefficientsOf(rule: LegendreRule, values: Float64Array): Float64Array {
-  const c = new Float64Array(rule.n);
-  for (let k = 0; k < rule.n; k += 1) c[k] = apply(rule.project, k, values);
+export function coefficientsOf(rule: LegendreRule, values: readonly number[]): number[] {
+  const c: number[] = [];
+  for (let k = 0; k < rule.n; k += 1) c.push(apply(rule.project, k, values));
   return c;
 }
 
@@ -76,7 +76,10 @@ const FALL = Float64Array.from({ length: MOST_TERMS }, (_, k) => k / (k + 1));
 const PER_ODD = Float64Array.from({ length: MOST_TERMS }, (_, k) => 1 / (2 * k + 1));
 
 /** ∫₋₁^ξ Σ cₖ Pₖ. */
-export function integralTo(c: Float64Array, xi: number): number {
+export function integralTo(c: readonly number[], xi: number): number {
+  // Exact at the ends, so that tips and joints come out as what they are.
+  if (xi <= -1) return 0;
+  if (xi >= 1) return 2 * c[0]!;
   let before = 1;
   let p = xi;
   let sum = c[0]! * (xi + 1);
@@ -90,7 +93,12 @@ export function integralTo(c: Float64Array, xi: number): number {
 }
 
 /** The same for several series of equal length at one ξ, added to `sums`. */
-export function addIntegralsTo(series: readonly Float64Array[], xi: number, sums: Float64Array): void {
+export function addIntegralsTo(series: readonly (readonly number[])[], xi: number, sums: Float64Array): void {
+  if (xi <= -1) return;
+  if (xi >= 1) {
+    for (let j = 0; j < series.length; j += 1) sums[j]! += 2 * series[j]![0]!;
+    return;
+  }
   const n = series[0]!.length;
   let before = 1;
   let p = xi;
@@ -105,7 +113,7 @@ export function addIntegralsTo(series: readonly Float64Array[], xi: number, sums
 }
 
 /** Σ cₖ Pₖ(ξ). */
-export function valueAt(c: Float64Array, xi: number): number {
+export function valueAt(c: readonly number[], xi: number): number {
   let before = 1;
   let p = xi;
   let sum = c[0]! + c[1]! * xi;
@@ -124,7 +132,7 @@ const MOST_STEPS = 80;
  * The ξ in [−1, 1] at which the running integral of a series that is nowhere negative reaches `target`: Newton,
  * with a bisection step wherever Newton would leave the bracket. Clamped to the ends.
  */
-export function invertIntegral(c: Float64Array, target: number): number {
+export function invertIntegral(c: readonly number[], target: number): number {
   const whole = 2 * c[0]!;
   if (target <= 0) return -1;
   if (target >= whole) return 1;

@@ -12,6 +12,7 @@ import { pchip } from '../../numeric/pchip.ts';
 import { say } from '../../units/sentence.ts';
 import { type CubicPiece, piecesOf } from './cubicPiece.ts';
 import { type Meridian, mirrored, type ShapeOf, type Stretch, straight } from './meridian.ts';
+import { withRoundTips } from './roundTips.ts';
 import { type Row, rowsFault } from './rows.ts';
 import { greatestRadius, tapeStretch } from './tapeMeridian.ts';
 import { tautOutline } from './tautOutline.ts';
@@ -78,7 +79,7 @@ function alongTape(radii: readonly Row[]): Outcome<Meridian> {
     radii.map(({ at }) => at),
     radii.map(({ size }) => size),
   );
-  const pieces = tautOutline(piecesOf(curve), 'open');
+  const pieces = tautOutline(piecesOf(withRoundTips(curve)), 'open');
   return solved({
     // Measured girths are those of the taut skin: where the cubic was cut back there is no film in excess.
     stretches: [

@@ -96,10 +96,14 @@ function shellInertia(whole: number, x: number, xx: number, rr: number): Triple 
   return [rr, across, across];
 }
 
+/** A station this share of the length past an end is still on it: lengths add up to rounding only. */
+const ROUNDING = 1e-12;
+
 function lookups(panels: readonly Panel[], table: SkinTable) {
   const { length } = table;
+  const slack = ROUNDING * length;
   const radius = (station: number): number =>
-    station >= 0 && station <= length ? Math.max(0, table.radiusOf(table.spotAtStation(station))) : 0;
+    station >= -slack && station <= length + slack ? table.radiusOf(table.spotAtStation(station)) : 0;
   return {
     length,
     radius,

@@ -27,7 +27,7 @@ import type { Hull, Triple } from './hull.ts';
 import { legendreRule } from './legendreSeries.ts';
 import type { ShapeOf } from './meridian.ts';
 import { type Panel, panelsOf } from './panels.ts';
-import { type SkinTable, skinTable } from './skinTable.ts';
+import { type SkinTable, type Spot, skinTable } from './skinTable.ts';
 
 type Stance = ShapeOf<'roundTwoSheet'>['stance'];
 
@@ -124,6 +124,9 @@ interface ClockTable {
 function lookups(R: number, stance: Stance) {
   const tables = new Map<number, ClockTable>();
   const tableAt = (clock: number): SkinTable => clockTable(clock).table;
+  // The length of a table agrees with 2R to rounding only; the tail is its end.
+  const spotAt = (table: SkinTable, station: number): Spot =>
+    table.spotAtStation(station >= 2 * R ? table.length : station);
   const clockTable = (clock: number): ClockTable => {
     const direction = directionOf(clock, stance);
     const known = tables.get(direction.along);
@@ -140,7 +143,7 @@ function lookups(R: number, stance: Stance) {
     girth: (station: number) => girth(R, station - R),
     tapeAt(station: number, clock: number) {
       const table = tableAt(clock);
-      return table.tapeOf(table.spotAtStation(station));
+      return table.tapeOf(spotAt(table, station));
     },
     stationAt(tape: number, clock: number) {
       const table = tableAt(clock);
@@ -148,7 +151,7 @@ function lookups(R: number, stance: Stance) {
     },
     skinPath(from: number, to: number, clock: number) {
       const table = tableAt(clock);
-      return table.pathBetween(table.spotAtStation(from), table.spotAtStation(to));
+      return table.pathBetween(spotAt(table, from), spotAt(table, to));
     },
     drawStations: (count: number) => drawStations(clockTable(0).panels, count),
   };

@@ -44,6 +44,7 @@ export function skinTable(panels: readonly Panel[]): SkinTable {
     spotAtStation(station) {
       const index = lateral[lastAtOrBelow(lateralStations, station, lateral.length)]!;
       const panel = panels[index]!;
+      if (station >= panel.x1) return { index, xi: 1 };
       return { index, xi: invertIntegral(panel.station, station - panel.x0) };
     },
     spotAtTape(tape) {
@@ -52,9 +53,9 @@ export function skinTable(panels: readonly Panel[]): SkinTable {
     },
     stationOf: ({ index, xi }) => {
       const panel = panels[index]!;
-      return Math.min(panel.x0 + integralTo(panel.station, xi), length);
+      return clamp(panel.x0 + integralTo(panel.station, xi), length);
     },
-    tapeOf: ({ index, xi }) => Math.min(tapes[index]! + integralTo(panels[index]!.path[0]!, xi), tapeLength),
+    tapeOf: ({ index, xi }) => clamp(tapes[index]! + integralTo(panels[index]!.path[0]!, xi), tapeLength),
     radiusOf: ({ index, xi }) => {
       const { stretch, from, to } = panels[index]!;
       return stretch.at(from + ((to - from) * (1 + xi)) / 2).r;
@@ -63,6 +64,9 @@ export function skinTable(panels: readonly Panel[]): SkinTable {
     whole: asPath(starts.at(-1)!),
   };
 }
+
+/** Rounding must not lead past the tips. */
+const clamp = (value: number, whole: number): number => Math.min(Math.max(value, 0), whole);
 
 /** The six path integrals from the nose tip to the start of each panel, and last to the tail tip. */
 function cumulativePaths(panels: readonly Panel[]): Float64Array[] {

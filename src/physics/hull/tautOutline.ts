@@ -64,27 +64,29 @@ const kept = (piece: CubicPiece & { slack?: boolean }, from: number, to: number)
 const rampPiece = ({ s0, r0 }: Ramp, from: number, to: number): OutlinePiece => ({
   from,
   to,
-  c: [r0 + from - s0, 1, 0, 0],
+  c: [r0 + (from - s0), 1, 0, 0],
   slack: true,
 });
 
 /** First place at or after `from` beyond which the piece is steeper than 1. */
-function departure(piece: CubicPiece, from: number): number | undefined {
-  const places = [from, ...placesOfSlope(piece, 1).filter((s) => s > from), piece.to];
-  for (let i = 0; i + 1 < places.length; i += 1)
-    if (slopeAt(piece, (places[i]! + places[i + 1]!) / 2) > 1 + SLOPE_ROUNDING) return places[i];
-  return undefined;
+const departure = (piece: CubicPiece, from: number): number | undefined =>
+  stages(piece, from).find(({ slope }) => slope > 1 + SLOPE_ROUNDING)?.start;
+
+/** First place at or after `from` where the piece is no longer above the ramp: it comes down to it only where flatter. */
+function meeting(piece: CubicPiece, { s0, r0 }: Ramp, from: number): number | undefined {
+  const above = (s: number) => heightAt(piece, s) - (r0 + (s - s0));
+  if (above(from) < 0) return from;
+  const met = stages(piece, from).find(({ slope, end }) => slope < 1 && above(end) <= 0);
+  if (!met) return undefined;
+  const root = findRoot(above, met.start, met.end, 1e-15);
+  return root.status === 'solved' ? root.value : met.start;
 }
 
-/** First place at or after `from` where the piece is no longer above the ramp. */
-function meeting(piece: CubicPiece, { s0, r0 }: Ramp, from: number): number | undefined {
-  const above = (s: number) => heightAt(piece, s) - (r0 + s - s0);
+/** Stretches of the piece from `from` on over which it stays steeper or flatter than 1, with the slope half way. */
+function stages(piece: CubicPiece, from: number) {
   const places = [from, ...placesOfSlope(piece, 1).filter((s) => s > from), piece.to];
-  if (above(from) < 0) return from;
-  for (let i = 1; i < places.length; i += 1) {
-    if (above(places[i]!) > 0) continue;
-    const root = findRoot(above, places[i - 1]!, places[i]!, 1e-15);
-    return root.status === 'solved' ? root.value : places[i];
-  }
-  return undefined;
+  return places.slice(1).map((end, i) => {
+    const start = places[i]!;
+    return { start, end, slope: slopeAt(piece, (start + end) / 2) };
+  });
 }

@@ -5,6 +5,7 @@
  * clock θ: from the hull's own tables of ∫x ds, ∫r ds … with y = r sin θ, z = r cos θ. Round the girth: 8-point
  * Gauss–Legendre over the clock angle, ds = √(r² + r′²) dθ; exact to rounding where the section is a circle.
  */
+import { kept } from '../../numeric/kept.ts';
 import { gaussLegendre } from '../../numeric/quadrature.ts';
 import type { Vec3 } from '../../numeric/vector.ts';
 import type { Hull } from '../hull/hull.ts';
@@ -81,20 +82,39 @@ function arcPerClock(station: number, clock: number, hull: Hull): number {
   return Math.hypot(hull.radius(station, clock), (ahead - behind) / (2 * CLOCK_STEP));
 }
 
-const DRAWN_STEPS = 24;
-
 /** Points to draw the leg through, its ends among them. */
 export function pointsOf(leg: Leg, hull: Hull): Vec3[] {
   if (leg.kind === 'straight') return [leg.a, leg.b];
-  return Array.from({ length: DRAWN_STEPS + 1 }, (_, i) => {
-    const share = i / DRAWN_STEPS;
-    const [station, clock] =
-      leg.kind === 'meridian'
-        ? [leg.from + share * (leg.to - leg.from), leg.clock]
-        : [leg.station, leg.from + share * leg.sweep];
+  return leg.kind === 'meridian' ? meridianPoints(leg, hull) : girthPoints(leg, hull);
+}
+
+const MERIDIAN_STEPS = 64;
+const GIRTH_STEPS = 24;
+
+/** Points of whole meridians, by clock angle: many runs share one. */
+const meridiansOf = kept((_: Hull) => new Map<number, readonly Vec3[]>());
+
+function wholeMeridian(clock: number, hull: Hull): readonly Vec3[] {
+  const known = meridiansOf(hull);
+  const points =
+    known.get(clock) ??
+    hull.drawStations(MERIDIAN_STEPS).map((station) => onClock(station, hull.radius(station, clock), clock));
+  known.set(clock, points);
+  return points;
+}
+
+function meridianPoints({ from, to, clock }: Leg & { kind: 'meridian' }, hull: Hull): Vec3[] {
+  const [low, high] = [Math.min(from, to), Math.max(from, to)];
+  const between = wholeMeridian(clock, hull).filter(([station]) => station > low && station < high);
+  const end = (station: number) => onClock(station, hull.radius(station, clock), clock);
+  return [end(from), ...(from < to ? between : between.toReversed()), end(to)];
+}
+
+const girthPoints = ({ station, from, sweep }: Leg & { kind: 'girth' }, hull: Hull): Vec3[] =>
+  Array.from({ length: GIRTH_STEPS + 1 }, (_, i) => {
+    const clock = from + (sweep * i) / GIRTH_STEPS;
     return onClock(station, hull.radius(station, clock), clock);
   });
-}
 
 /** The same leg walked the other way. */
 export function reversed(leg: Leg): Leg {

@@ -2,6 +2,7 @@ import fc from 'fast-check';
 import { expect, test } from 'vitest';
 import type { Place } from '../../../src/craft/placeSchema.ts';
 import { MASS_SOURCES, PART_KINDS, type Part } from '../../../src/craft/schema.ts';
+import { stationDoubt } from '../../../src/panels/csv/doubt.ts';
 import { readParts } from '../../../src/panels/csv/readParts.ts';
 import { partsCsv } from '../../../src/panels/csv/writeParts.ts';
 
@@ -77,7 +78,7 @@ test('a table says its units itself, whatever units the reader uses', () => {
 });
 
 test('name, mass, station and kind pasted without heads are taken in that order', () => {
-  const { good, problems } = readParts('Camera\t42.5\t310\tcamera\nClip\t3 g', 'metric', HOME);
+  const { good, problems } = readParts('Camera\t42.5\t0.31\tcamera\nClip\t3 g', 'metric', HOME);
   expect(problems).toEqual([]);
   expect(good.map(({ name, mass: m, kind, place: p }) => [name, m, kind, p])).toEqual([
     ['Camera', 0.0425, 'camera', { kind: 'keel', station: 0.31, drop: 0 }],
@@ -94,6 +95,35 @@ test.each([
   const { good, problems } = readParts(table, 'metric', HOME);
   expect(problems).toEqual([]);
   expect(good[0]!.mass).toBeCloseTo(kilograms, 15);
+});
+
+test.each([
+  ['metric', 0.034, 2.9, ['mass in g', 'station in m', '± in g']],
+  // 34 oz and 2.9 in, by the international pound and inch of 1959.
+  ['imperial', 34 * 0.028349523125, 2.9 * 0.0254, ['mass in oz', 'station in in', '± in oz']],
+] as const)(
+  'a head without a unit has the one the %s ledger shows, and says so',
+  (units, mass, station, says) => {
+    const { good, assumed } = readParts('name,mass,station,±\nCamera,34,2.9,1', units, HOME);
+    expect(good[0]!.mass).toBeCloseTo(mass, 12);
+    expect(good[0]!.place).toMatchObject({ kind: 'keel' });
+    expect((good[0]!.place as { station: number }).station).toBeCloseTo(station, 12);
+    expect(assumed.map(({ column, unit }) => `${column} in ${unit}`)).toEqual(says);
+  },
+);
+
+test('a unit in the head or in each cell is not assumed', () => {
+  const { good, assumed } = readParts('name,mass g,station\nA,34,700 mm\nB,12,2 ft', 'metric', HOME);
+  expect(assumed).toEqual([]);
+  expect(good.map(({ place: at }) => (at as { station: number }).station)).toEqual([0.7, 0.6096]);
+});
+
+test('stations that look meant in another unit raise a doubt', () => {
+  const stations = (text: string) => readParts(`name,mass,station ${text}`, 'metric', HOME).good;
+  expect(stationDoubt(stations('m\nA,1,0.2\nB,1,2.9'), 3)).toBeNull();
+  expect(stationDoubt(stations('mm\nA,1,0.2\nB,1,2.9'), 3)).toBe('crowded');
+  expect(stationDoubt(stations('m\nA,1,0.2\nB,1,29'), 3)).toBe('beyond');
+  expect(stationDoubt(stations('m\nNose weight,1,0'), 3)).toBeNull();
 });
 
 test('a column that means nothing here is named, not guessed at', () => {
@@ -119,7 +149,7 @@ test('every bad cell is named by row and column with what is allowed; the good r
     `one of ${PART_KINDS.join(', ')}`,
     'a whole number, pair, or ring and a whole number',
     'a mass',
-    'at least 0.0 g',
+    'at least 0 g',
     'at most 64',
   ]);
 });

@@ -65,8 +65,8 @@ test('a whole number is taken only whole', () => {
 test('what the gate refuses is said with the field, what was typed and the bound in the builder’s unit', () => {
   const problem = { path: 'parts[0].mass', found: '-0.005', allowed: 'at least 0' };
   expect(problemSentence('Mass', '-5 g', problem, 'mass', 'metric')).toBe(
-    'Mass: found “-5 g”; allowed: at least 0.0 g.',
+    'Mass: found “-5 g”; allowed: at least 0 g.',
   );
-  expect(allowedText('at most 6.283185307179586', 'angle', 'imperial')).toBe('at most 360.0°');
+  expect(allowedText('at most 6.283185307179586', 'angle', 'imperial')).toBe('at most 360°');
   expect(allowedText('one of a, b', 'mass', 'metric')).toBe('one of a, b');
 });

@@ -1,6 +1,13 @@
 import fc from 'fast-check';
 import { expect, test } from 'vitest';
-import { attitudeOf, downAt } from '../../../src/physics/balance/attitude.ts';
+import { type Attitude, attitudeOf } from '../../../src/physics/balance/attitude.ts';
+
+/** The direction of down in hull axes, as turned: pitch then heel. */
+const downAt = ({ pitch, heel }: Attitude) => [
+  Math.sin(pitch),
+  Math.cos(pitch) * Math.sin(heel),
+  -Math.cos(pitch) * Math.cos(heel),
+];
 
 const degrees = Math.PI / 180;
 

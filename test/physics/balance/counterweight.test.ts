@@ -5,7 +5,6 @@ import { levellingWeight, levellingWithin } from '../../../src/physics/balance/c
 import { floatOf, pitchPerMass } from '../../../src/physics/balance/float.ts';
 import { hangOf, heavinessOf, type Loading, withWeight } from '../../../src/physics/balance/loading.ts';
 import { oneWeight } from '../../../src/physics/balance/oneWeight.ts';
-import { cgShift, levellingShift } from '../../../src/physics/balance/shift.ts';
 
 const degrees = Math.PI / 180;
 
@@ -77,14 +76,6 @@ test('permanent ballast: FAA-H-8083-1, 1876 lb, CG 32.2, limit 33.0, ballast sta
   };
   const ballast = levellingWeight(loading, [228, 0, 0]);
   expect(ballast.status === 'solved' && ballast.value).toBeCloseTo(7.7, 1);
-});
-
-test('shifting weight: FAA Pilot’s Handbook of Aeronautical Knowledge, ch. 9', () => {
-  expect(77 + cgShift(100, 150 - 30, 8000)).toBeCloseTo(78.5, 9);
-  // 7800 lb, CG 81.5 → 80.5 over 120 in: 65 lb.
-  expect(cgShift(65, -120, 7800)).toBeCloseTo(-1, 9);
-  expect(levellingShift(7800 * 1, 65)).toBeCloseTo(-120, 9);
-  expect(levellingShift(1, 0)).toBeNull();
 });
 
 test('a hardpoint on the CB levels nothing, and says how near it is', () => {

@@ -131,7 +131,7 @@ test('500 random problems of pieces and places: the same least ballast, or none 
         expect(strict).toBe(Number.POSITIVE_INFINITY);
       }
     }),
-    { numRuns: 500, endOnFailure: true },
+    { numRuns: 500, endOnFailure: true, seed: 20 },
   );
   expect(Math.min(...Object.values(seen))).toBeGreaterThan(30);
 });

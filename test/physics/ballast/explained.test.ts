@@ -50,7 +50,7 @@ test.each([
           checked++;
         }
       }),
-      { numRuns, endOnFailure: true },
+      { numRuns, endOnFailure: true, seed: 20 },
     );
     expect(checked).toBeGreaterThan(15);
   },
@@ -107,7 +107,7 @@ test('straight: each marginal is the dual of the linear program', () => {
       kinds.set('all', (kinds.get('all') ?? 0) + plan.binding.length);
       kinds.set('near', (kinds.get('near') ?? 0) + near.length);
     }),
-    { numRuns: 120, endOnFailure: true },
+    { numRuns: 120, endOnFailure: true, seed: 20 },
   );
   expect([...kinds.keys()]).toEqual(
     expect.arrayContaining(['pitchTolerance', 'heelTolerance', 'lightest', 'hardpoint', 'slide']),
@@ -126,7 +126,7 @@ test('pieces: what one step saves is what planning again with it saves', () => {
         checked++;
       }
     }),
-    { numRuns: 25, endOnFailure: true },
+    { numRuns: 25, endOnFailure: true, seed: 20 },
   );
   expect(checked).toBeGreaterThan(5);
 });
@@ -160,7 +160,7 @@ test.each([
           }
         }
       }),
-      { numRuns, endOnFailure: true },
+      { numRuns, endOnFailure: true, seed: 20 },
     );
     expect(followed).toBeGreaterThan(5);
     expect(kinds.size).toBeGreaterThan(2);

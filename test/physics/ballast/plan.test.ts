@@ -53,7 +53,7 @@ test('one hardpoint, nothing to slide: the closed form', () => {
         expect(Math.abs(planned.deadBallast - least.value)).toBeLessThan(1e-6);
       }
     }),
-    { numRuns: 150, endOnFailure: true },
+    { numRuns: 150, endOnFailure: true, seed: 20 },
   );
   expect(compared).toBeGreaterThan(50);
 });
@@ -85,7 +85,7 @@ test.each([
         expect(planned.gap).toBe(0);
         expect(planned.bound).toBeLessThanOrEqual(planned.deadBallast);
       }),
-      { numRuns, endOnFailure: true },
+      { numRuns, endOnFailure: true, seed: 20 },
     );
     expect(seen.get('optimal') ?? 0).toBeGreaterThan(numRuns / 5);
   },
@@ -105,6 +105,6 @@ test('carried out as an edit it gives the very craft, and planning that again ch
         first.loads.map(({ place }) => place !== null),
       );
     }),
-    { numRuns: 60, endOnFailure: true },
+    { numRuns: 60, endOnFailure: true, seed: 20 },
   );
 });

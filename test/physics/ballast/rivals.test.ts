@@ -39,7 +39,7 @@ test.each<[string, Want]>([
         expect(deadBallast(made)).toBeGreaterThan(plan.deadBallast - 1e-6);
       }
     }),
-    { numRuns: 40, endOnFailure: true },
+    { numRuns: 40, endOnFailure: true, seed: 20 },
   );
   expect(kept).toBeGreaterThan(20);
 });
@@ -62,7 +62,7 @@ test('100 continuous problems: yalps finds the same least ballast', () => {
       expect(rival! / 1000).toBeCloseTo(ballastOf(setting.value, found.point), 6);
       compared++;
     }),
-    { numRuns: 100, endOnFailure: true },
+    { numRuns: 100, endOnFailure: true, seed: 20 },
   );
   expect(compared).toBeGreaterThan(40);
 });
@@ -104,7 +104,7 @@ test.each<[string, Want]>([
         expect(plain.deadBallast).toBeLessThanOrEqual(plan.deadBallast + 1e-8);
         if (worst(plain.craft) > 1e-6) plainBroken++;
       }),
-      { numRuns: 60, endOnFailure: true },
+      { numRuns: 60, endOnFailure: true, seed: 20 },
     );
     expect(robust).toBeGreaterThan(10);
     expect(plainBroken).toBeGreaterThan(3);

@@ -1,9 +1,7 @@
 import fc from 'fast-check';
-import { expect, test } from 'vitest';
+import { test } from 'vitest';
 import { built } from './built.ts';
-
-const near = (found: number, wanted: number, relative = 1e-12) =>
-  expect(Math.abs(found - wanted)).toBeLessThanOrEqual(relative * Math.max(Math.abs(wanted), 1e-12));
+import { near } from './near.ts';
 
 const proportions = fc.record({
   length: fc.double({ min: 0.05, max: 50, noNaN: true }),

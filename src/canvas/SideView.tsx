@@ -1,0 +1,88 @@
+/** The side view: hull, parts, wire runs, rulers and marks of balance, and everything a hand does there. */
+import { useMemo, useRef } from 'react';
+import { idsOf } from '../edit/selection.ts';
+import { fromSide } from '../scene/flatten.ts';
+import { sameGrip } from '../scene/grip.ts';
+import { sideReadout } from '../scene/readout.ts';
+import { toScreen, type View } from '../scene/view.ts';
+import { selectionInWords, sideInWords } from '../scene/words.ts';
+import { Bubble } from './Bubble.tsx';
+import { Frame } from './Frame.tsx';
+import type { Hand } from './gestures/gesture.ts';
+import { gripUnder, takeInSide } from './gestures/take.ts';
+import { keysOf } from './keys.ts';
+import { cursorOf } from './overlay.ts';
+import type { DrawnProps, SharedProps } from './props.ts';
+import { SideDrawing } from './SideDrawing.tsx';
+import { Unformed } from './Unformed.tsx';
+import { sidePoints, useFit } from './useFit.ts';
+import { useGeometry } from './useGeometry.ts';
+import { useGestures } from './useGestures.ts';
+import { useGround, useOverlay } from './useGround.ts';
+import { useLie, useSideScene } from './useSideScene.ts';
+import { useSize } from './useSize.ts';
+
+const MARGINS = { left: 46, right: 66, top: 46, bottom: 74 };
+
+const KEYS =
+  'Arrow keys move what is selected by 1 millimetre, with Shift by 10. Square brackets select the part before or after. Plus, minus and 0 zoom and fit. Escape gives up a drag.';
+
+export function SideView(props: SharedProps) {
+  const { geometry, stale } = useGeometry(props);
+  if (!geometry) return <Unformed why={stale ?? ''} palette={props.palette} testId="side-view" />;
+  return <SideFrame {...props} geometry={geometry} stale={stale} />;
+}
+
+function SideFrame(props: SharedProps & DrawnProps & { stale: string | null }) {
+  const { session, selection, palette, viewState, geometry, tilted, stale } = props;
+  const frame = useRef<HTMLDivElement>(null);
+  const size = useSize(frame);
+  const overlays = useOverlay();
+  const { overlay, show } = overlays;
+  const busy = overlay.held !== null;
+  const pitch = tilted ? (geometry.attitude?.pitch ?? 0) : 0;
+  const { tilt, pivot } = useLie({ tilt: pitch, pivot: geometry.cb[0] }, busy);
+  const { scale, originX, originY } = viewState.view;
+  const view: View = useMemo(
+    () => ({ scale, originX, originY, tilt, pivot, ...size }),
+    [scale, originX, originY, tilt, pivot, size],
+  );
+  const scene = useSideScene(props, view, overlay);
+  const ground = useGround(session, scene, overlays, viewState);
+  const { length, height } = geometry.hull;
+  useFit(viewState, view, `${tilted} ${length} ${height}`, busy, () => sidePoints(geometry), MARGINS);
+
+  const hover = (hand: Hand | null) => {
+    const next = hand && gripUnder(ground, hand, selection);
+    if (!sameGrip(next, overlay.hover)) show({ hover: next });
+  };
+  const take: typeof takeInSide = (on, hand) => {
+    show({ hint: null, hover: null });
+    return takeInSide(on, hand);
+  };
+  const gestures = useGestures(frame, ground, take, hover);
+  const onDoubleClick = () => {
+    if (!overlay.hover) ground.fit();
+  };
+  const readout = overlay.held && sideReadout(scene, overlay.held, fromSide, view.scale);
+  const hint = overlay.hint ?? stale;
+  return (
+    <Frame
+      frame={frame}
+      testId="side-view"
+      label="Side view"
+      description={`${sideInWords(scene)} ${KEYS}`}
+      status={hint ?? (busy ? '' : selectionInWords(scene, idsOf(selection, 'part')))}
+      view={view}
+      cursor={cursorOf(overlay)}
+      handlers={{ ...gestures.handlers, ...keysOf(ground, gestures, 'side'), onDoubleClick }}
+      leave={() => hover(null)}
+    >
+      <SideDrawing scene={scene} selection={selection} overlay={overlay} faded={stale !== null} />
+      {readout && (
+        <Bubble at={toScreen(view, readout.at)} lines={readout.lines} size={size} palette={palette} />
+      )}
+      {hint && <Bubble at={{ x: 0, y: 0 }} lines={[hint]} size={size} palette={palette} width={420} />}
+    </Frame>
+  );
+}

@@ -1,0 +1,55 @@
+/** A gesture: what happens between pressing and letting go. Each lives in a file of its own, named for what the hand does. */
+import type { Problem } from '../../craft/problem.ts';
+import type { Session } from '../../edit/session.ts';
+import type { Figure } from '../../scene/figure.ts';
+import type { Line } from '../../scene/grip.ts';
+import type { Geometry, Subject } from '../../scene/subject.ts';
+import type { PlanePoint, View } from '../../scene/view.ts';
+import type { Overlay } from '../overlay.ts';
+
+/** Where the hand is on the view, px, and which keys it holds. */
+export interface Hand {
+  readonly x: number;
+  readonly y: number;
+  readonly shift: boolean;
+  /** Ctrl, or Cmd on a Mac. */
+  readonly ctrl: boolean;
+  readonly alt: boolean;
+  readonly touch: boolean;
+}
+
+export interface Gesture {
+  /** Called once the hand has moved farther than a click does. */
+  move(hand: Hand): void;
+  /** Let go. `moved` is false for a click. */
+  end(hand: Hand, moved: boolean): void;
+  /** Escape, or the pointer was lost: everything as it was. */
+  cancel(): void;
+}
+
+/** The view as drawn now. */
+export interface Scene extends Subject {
+  readonly view: View;
+  readonly geometry: Geometry;
+  readonly figures: readonly Figure[];
+  readonly lines: readonly Line[];
+  readonly hardpoints: readonly { readonly id: string; readonly at: PlanePoint }[];
+  /** Where the view shows the support point; null where it does not. */
+  readonly support: PlanePoint | null;
+}
+
+/** What gestures work on. */
+export interface Ground {
+  readonly session: Session;
+  scene(): Scene;
+  show(change: Partial<Overlay>): void;
+  /** The view was moved by hand. */
+  setView(change: (view: View) => View): void;
+  fit(): void;
+}
+
+/** What a drag that could not be kept says. */
+export const problemHint = (problems: readonly Problem[]): string | null =>
+  problems[0]
+    ? `${problems[0].path} cannot be ${problems[0].found}: allowed is ${problems[0].allowed}`
+    : null;

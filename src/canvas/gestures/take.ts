@@ -1,0 +1,73 @@
+/** Which gesture begins where the hand presses. */
+import type { Selection } from '../../edit/selection.ts';
+import { idsOf } from '../../edit/selection.ts';
+import { type Grip, gripAt } from '../../scene/grip.ts';
+import { MOUSE_SLOP, TOUCH_SLOP } from '../../scene/hit.ts';
+import { toWorld } from '../../scene/view.ts';
+import { dragHardpoint } from './dragHardpoint.ts';
+import { dragHullDiameter } from './dragHullDiameter.ts';
+import { dragHullLength } from './dragHullLength.ts';
+import { dragHardpointInFront, dragPartInFront } from './dragInFront.ts';
+import { dragPart } from './dragPart.ts';
+import { dragSupport } from './dragSupport.ts';
+import { dragWireEnd } from './dragWireEnd.ts';
+import type { Gesture, Ground, Hand } from './gesture.ts';
+import { pan } from './pan.ts';
+import { click, marquee } from './select.ts';
+
+export type Take = (ground: Ground, hand: Hand) => Gesture;
+
+/** What lies under the hand in the view. */
+export function gripUnder(ground: Ground, hand: Hand, selection: Selection): Grip | null {
+  const scene = ground.scene();
+  const slop = hand.touch ? TOUCH_SLOP : MOUSE_SLOP;
+  const things = { ...scene, selectedWires: idsOf(selection, 'wire') };
+  return gripAt(things, toWorld(scene.view, hand), scene.view.scale, slop);
+}
+
+const onEmpty: Take = (ground, hand) => (hand.shift ? marquee(ground, hand) : pan(ground, hand));
+
+/** A wire run is selected by a click; dragging it moves the drawing. */
+function onWire(ground: Ground, hand: Hand, id: string): Gesture {
+  const panning = pan(ground, hand);
+  return {
+    ...panning,
+    end: (at, moved) => {
+      if (!moved) click(ground, { kind: 'wire', id }, at);
+    },
+  };
+}
+
+export const takeInSide: Take = (ground, hand) => {
+  const grip = gripUnder(ground, hand, ground.session.getState().selection);
+  switch (grip?.kind) {
+    case undefined:
+      return onEmpty(ground, hand);
+    case 'part':
+      return dragPart(ground, hand, grip);
+    case 'hardpoint':
+      return dragHardpoint(ground, hand, grip);
+    case 'support':
+      return dragSupport(ground, hand);
+    case 'wire':
+      return onWire(ground, hand, grip.id);
+    case 'wireEnd':
+      return dragWireEnd(ground, hand, grip);
+    case 'hull':
+      return grip.end === 'tail' ? dragHullLength(ground, hand) : dragHullDiameter(ground, hand);
+  }
+};
+
+export const takeInFront: Take = (ground, hand) => {
+  const grip = gripUnder(ground, hand, []);
+  switch (grip?.kind) {
+    case 'part':
+      return dragPartInFront(ground, hand, grip);
+    case 'hardpoint':
+      return dragHardpointInFront(ground, hand, grip);
+    case 'wire':
+      return onWire(ground, hand, grip.id);
+    default:
+      return onEmpty(ground, hand);
+  }
+};

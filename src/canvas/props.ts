@@ -1,0 +1,22 @@
+/** What the page hands to every view. */
+import type { Selection } from '../edit/selection.ts';
+import type { Session } from '../edit/session.ts';
+import type { Geometry, Subject } from '../scene/subject.ts';
+import type { ViewState } from './useView.ts';
+
+export interface CanvasProps extends Subject {
+  readonly session: Session;
+  readonly selection: Selection;
+  /** Drawn in the attitude in which it floats, or level. */
+  readonly tilted: boolean;
+}
+
+/** The side view and the beam share one view state, so that stations lie under each other. */
+export interface SharedProps extends CanvasProps {
+  readonly viewState: ViewState;
+}
+
+/** Once there is a hull to draw. */
+export interface DrawnProps extends CanvasProps {
+  readonly geometry: Geometry;
+}

@@ -1,0 +1,51 @@
+/** Everything the side view draws and gestures reach, each piece kept the same while it is. */
+import { useMemo, useRef, useState } from 'react';
+import { type Figure, sideFigure } from '../scene/figure.ts';
+import { fromSide, hardpointPoints, wireLines } from '../scene/flatten.ts';
+import { keyOf, type Line } from '../scene/grip.ts';
+import { FigureCache, sameWire } from '../scene/keepSame.ts';
+import type { View } from '../scene/view.ts';
+import type { Scene } from './gestures/gesture.ts';
+import type { Overlay } from './overlay.ts';
+import type { DrawnProps } from './props.ts';
+import { useSame } from './useSame.ts';
+
+export interface SideScene extends Scene {
+  /** Drawn on the layer that stands still, and on the one that moves. */
+  readonly still: readonly Figure[];
+  readonly moving: readonly Figure[];
+  readonly stillLines: readonly Line[];
+  readonly movingLines: readonly Line[];
+}
+
+export function useSideScene(props: DrawnProps, view: View, { moving }: Overlay): SideScene {
+  const { craft, assessment, units, palette, geometry } = props;
+  const [cache] = useState(() => new FigureCache(sideFigure));
+  const figures = cache.figures(craft, geometry, 1 / view.scale);
+  const isMoving = ({ part }: Figure) => moving.has(keyOf('part', part));
+  const still = useSame(figures.filter((figure) => !isMoving(figure)));
+  const wires = geometry.wires.filter(({ wire }) => !moving.has(keyOf('wire', wire)));
+  const stillWires = useSame(wires, sameWire);
+  const stillLines = useMemo(() => wireLines(stillWires, fromSide), [stillWires]);
+  const movingWires = geometry.wires.filter(({ wire }) => moving.has(keyOf('wire', wire)));
+  const movingLines = wireLines(movingWires, fromSide);
+  return {
+    ...{ craft, assessment, units, palette, view, geometry, figures, still, stillLines, movingLines },
+    moving: figures.filter(isMoving),
+    lines: [...stillLines, ...movingLines],
+    hardpoints: hardpointPoints(geometry, fromSide),
+    support: geometry.support && fromSide(geometry.support),
+  };
+}
+
+export interface Lie {
+  readonly tilt: number;
+  readonly pivot: number;
+}
+
+/** How the drawing lies; it holds still while a hand is on it, so that nothing slips from under the pointer. */
+export function useLie(wanted: Lie, busy: boolean): Lie {
+  const last = useRef(wanted);
+  if (!busy) last.current = wanted;
+  return last.current;
+}

@@ -1,0 +1,29 @@
+/** `balance FILE`: the whole report, for reading or as JSON. */
+import type { Assessment } from '../report/assessment.ts';
+import type { UnitSystem } from '../units/units.ts';
+import { EXIT, type ExitCode, type Io } from './io.ts';
+import { readCraft } from './readCraft.ts';
+import { reportText } from './reportText.ts';
+
+interface Asked {
+  readonly file: string;
+  readonly json: boolean;
+  readonly units: UnitSystem;
+}
+
+export function balance({ file, json, units }: Asked, io: Io): ExitCode {
+  const read = readCraft(file, units, io);
+  if (!read) return EXIT.bad;
+  const { craft, report } = read;
+  io.write(json ? jsonText(report) : reportText(craft, report, units));
+  return report.met ? EXIT.fine : EXIT.misses;
+}
+
+/** Values in SI whatever the units; these only change the sentences in `why`. */
+function jsonText({ rows }: Assessment): string {
+  const entries = Object.entries(rows).map(([key, { value, unit, uncertainty, status, why }]) => [
+    key,
+    { value, unit, ...(uncertainty === undefined ? {} : { uncertainty }), status, why },
+  ]);
+  return `${JSON.stringify({ rows: Object.fromEntries(entries) }, null, 2)}\n`;
+}

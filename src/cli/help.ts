@@ -1,0 +1,19 @@
+export const HELP = `Steelyard: the balance of a small unmanned blimp.
+
+  npm run -s craft -- balance FILE [--json] [--units metric|imperial]
+      How the craft floats, what is wrong with it, and the least lead that
+      levels it. --json gives one object of rows in SI units instead.
+  npm run -s craft -- check FILE...
+      Whether each file is a craft file whose hull can be formed.
+  npm run -s craft -- help
+  npm run -s craft -- --version
+
+FILE is a craft file; "-" reads it from standard input. Without -s npm prints
+a banner of its own before the report.
+
+Exit codes: 0 fine; 1 the craft does not meet its targets; 2 bad input or use.
+Errors go to standard error, one line a problem.
+
+It is an aid for planning. The aviation authority, the site and the makers of
+film, gas, cells and motors have the last word.
+`;

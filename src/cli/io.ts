@@ -1,0 +1,12 @@
+/** What a command may do to the world outside; the shell hands in the real one, tests their own. */
+export interface Io {
+  /** Of the program. */
+  readonly version: string;
+  /** The text of a file, or of standard input for "-". Throws as node:fs does. */
+  readText(path: string): string;
+  write(text: string): void;
+  error(text: string): void;
+}
+
+export const EXIT = { fine: 0, misses: 1, bad: 2 } as const;
+export type ExitCode = (typeof EXIT)[keyof typeof EXIT];

@@ -1,0 +1,101 @@
+/** The starter catalogue: pick parts to put on the craft. */
+import { useState } from 'react';
+import { catalogue } from '../catalogue/catalogue.ts';
+import type { PartEntry } from '../catalogue/schema.ts';
+import { PART_KINDS, type PartKind } from '../craft/schema.ts';
+import { addPart, hasRoom } from '../edit/edits/parts.ts';
+import { formatQuantity } from '../units/format.ts';
+import type { UnitSystem } from '../units/units.ts';
+import { PartCaution } from './Caution.tsx';
+import { DialogFrame } from './DialogFrame.tsx';
+import { defaultPlace, partFrom } from './defaults.ts';
+import { useEditor } from './editor.ts';
+import { ChoiceField } from './fields/ChoiceField.tsx';
+import { foundParts } from './foundParts.ts';
+import { useAdding } from './ledger/adding.ts';
+import { PART_WORDS } from './words.ts';
+
+type Filter = PartKind | 'all';
+
+const FILTERS = [
+  { value: 'all' as Filter, label: 'All kinds' },
+  ...PART_KINDS.filter((kind) => catalogue.parts.some((entry) => entry.kind === kind)).map((kind) => ({
+    value: kind as Filter,
+    label: PART_WORDS[kind],
+  })),
+];
+
+export function CatalogueDialog({ onClose }: { onClose: () => void }) {
+  const { units } = useEditor();
+  const [search, setSearch] = useState('');
+  const [kind, setKind] = useState<Filter>('all');
+  const [added, setAdded] = useState('');
+  const entries = foundParts(catalogue.parts, search, kind === 'all' ? null : kind);
+  return (
+    <DialogFrame title="Add from the catalogue" onClose={onClose}>
+      <p className="aside">
+        Invented, generic parts to start from. Weigh your own and mark them weighed. Each goes below the keel
+        at the CB; drag it where it belongs.
+      </p>
+      <div className="toolbar">
+        <input
+          type="search"
+          aria-label="Search the catalogue"
+          placeholder="Search"
+          value={search}
+          onChange={(event) => setSearch(event.currentTarget.value)}
+        />
+        <ChoiceField
+          bare
+          label="Kind of part"
+          value={kind}
+          choices={FILTERS}
+          onCommit={(next) => {
+            setKind(next);
+            return null;
+          }}
+        />
+      </div>
+      <p role="status">{added || `${entries.length} parts`}</p>
+      {kind !== 'all' && <PartCaution kind={kind} />}
+      <ul className="catalogue">
+        {entries.map((entry) => (
+          <Entry key={entry.id} entry={entry} units={units} onAdded={setAdded} />
+        ))}
+      </ul>
+    </DialogFrame>
+  );
+}
+
+interface EntryProps {
+  readonly entry: PartEntry;
+  readonly units: UnitSystem;
+  onAdded(message: string): void;
+}
+
+function Entry({ entry, units, onAdded }: EntryProps) {
+  const { craft, assessment } = useEditor();
+  const add = useAdding('part');
+  const { name, kind, mass, massTolerance, note, source } = entry;
+  return (
+    <li>
+      <div>
+        <strong>{name}</strong> {PART_WORDS[kind]}, {formatQuantity(mass, 'mass', units)}
+        {massTolerance > 0 && ` ± ${formatQuantity(massTolerance, 'mass', units)}`}
+        <p className="aside">
+          {note} <cite>{source}</cite>
+        </p>
+      </div>
+      <button
+        type="button"
+        aria-label={`Add ${name}`}
+        disabled={!hasRoom(craft, 1)}
+        onClick={() => {
+          if (add(addPart(partFrom(entry, defaultPlace(assessment))))) onAdded(`Added ${name}.`);
+        }}
+      >
+        Add
+      </button>
+    </li>
+  );
+}

@@ -1,0 +1,131 @@
+/**
+ * One drawn piece of a part: its paths where it is and as large as it is, in the plane of a view, m. A piece that would
+ * shrink to a speck is drawn larger and says so; its middle is always true.
+ */
+import type { Part } from '../craft/schema.ts';
+import type { Hull, PieceView } from '../report/assessment.ts';
+import { keelAt, onSection } from './outline.ts';
+import { carried, type Path, p, polygon, stroke } from './path.ts';
+import { FRONT_SHAPES } from './shapesFront.ts';
+import { SIDE_SHAPES } from './shapesSide.ts';
+import { type Box, boxOf, type PlanePoint } from './view.ts';
+
+export interface Figure {
+  readonly part: string;
+  readonly copy: number;
+  readonly kind: Part['kind'];
+  readonly middle: PlanePoint;
+  readonly paths: readonly Path[];
+  /** Lines by which it hangs from the keel. */
+  readonly struts: readonly (readonly PlanePoint[])[];
+  readonly box: Box;
+  /** Drawn larger than it is. */
+  readonly enlarged: boolean;
+  /** On the side away from the eye. */
+  readonly far: boolean;
+}
+
+/** Least size on screen, px: of the larger and of the smaller dimension. */
+export const LEAST_PX = 15;
+const LEAST_SMALLER_PX = 5;
+
+interface Apparent {
+  readonly across: number;
+  readonly outward: number;
+  readonly enlarged: boolean;
+}
+
+/** Dimensions as drawn, at `px` metres to a pixel. */
+export function apparentSize(across: number, outward: number, px: number): Apparent {
+  const larger = Math.max(across, outward);
+  const enlarged = larger < LEAST_PX * px;
+  if (larger === 0) return { across: LEAST_PX * px, outward: 0.7 * LEAST_PX * px, enlarged };
+  const factor = enlarged ? (LEAST_PX * px) / larger : 1;
+  const least = LEAST_SMALLER_PX * px;
+  return {
+    across: Math.max(across * factor, least),
+    outward: Math.max(outward * factor, least),
+    enlarged,
+  };
+}
+
+/** From the side; `px` is the size of a pixel, m. */
+export function sideFigure(part: Part, piece: PieceView, hull: Hull, px: number): Figure {
+  const { size, kind } = part;
+  const [x, y, z] = piece.middle;
+  const cos = Math.cos(piece.roll);
+  const seen = size.height * Math.abs(cos) + size.width * Math.abs(Math.sin(piece.roll));
+  const { across, outward, enlarged } = apparentSize(size.length, seen, px);
+  const up = cos < -1e-9 ? -1 : 1;
+  const rooted = kind === 'fin' && part.place.kind === 'skin' && size.height > 0;
+  const paths = rooted
+    ? finOnSkin(part, piece, hull)
+    : SIDE_SHAPES[kind](across, outward).map((path) =>
+        carried(path, ({ u, z: out }) => p(x + u, z + up * out)),
+      );
+  const top = z + outward / 2;
+  const struts =
+    part.place.kind === 'keel' ? strutsTo(hull, x, top, kind === 'gondola' ? 0.3 * across : 0) : [];
+  return finish(part, piece, {
+    middle: p(x, z),
+    paths,
+    struts,
+    enlarged: enlarged && !rooted,
+    far: y > 1e-6,
+  });
+}
+
+/** From astern. */
+export function frontFigure(part: Part, piece: PieceView, hull: Hull, px: number): Figure {
+  const { size, kind } = part;
+  const [x, y, z] = piece.middle;
+  const { across, outward, enlarged } = apparentSize(size.width, size.height, px);
+  const cos = Math.cos(piece.roll);
+  const sin = Math.sin(piece.roll);
+  const paths = FRONT_SHAPES[kind](across, outward).map((path) =>
+    carried(path, ({ u, z: out }) => p(y + u * cos + out * sin, z - u * sin + out * cos)),
+  );
+  const struts = part.place.kind === 'keel' ? [[p(0, keelAt(hull, x)), p(y, z + outward / 2)]] : [];
+  const hanging = struts.filter(([keel, end]) => keel!.z > end!.z + 1e-9);
+  return finish(part, piece, { middle: p(y, z), paths, struts: hanging, enlarged, far: false });
+}
+
+type Drawn = Pick<Figure, 'middle' | 'paths' | 'struts' | 'enlarged' | 'far'>;
+
+const finish = (part: Part, piece: PieceView, drawn: Drawn): Figure => ({
+  part: part.id,
+  copy: piece.copy,
+  kind: part.kind,
+  ...drawn,
+  box: boxOf(drawn.paths.flatMap((path) => path.points)),
+});
+
+/** Straight up to the keel: one line, or two `spread` either way of the middle; none where it touches. */
+function strutsTo(hull: Hull, station: number, top: number, spread: number): PlanePoint[][] {
+  const stations = spread > 0 ? [station - spread, station + spread] : [station];
+  return stations.flatMap((u) => {
+    const keel = keelAt(hull, u);
+    return keel > top + 1e-6 ? [[p(u, keel), p(u, top)]] : [];
+  });
+}
+
+const ROOT_STEPS = 8;
+
+/**
+ * A plate standing on the skin: its root follows the skin, its tip lies half the span beyond the middle, and the whole is
+ * seen under its clock angle. The leading edge is swept back, the trailing edge square.
+ */
+function finOnSkin({ size }: Part, { middle: [x, y, z], roll }: PieceView, hull: Hull): Path[] {
+  const tip = Math.hypot(y, z) + size.height / 2;
+  const seen = (station: number, distance: number) => p(station, onSection(roll, distance).z);
+  const root = Array.from({ length: ROOT_STEPS + 1 }, (_, i) => {
+    const station = x + size.length * (i / ROOT_STEPS - 0.5);
+    return seen(station, Math.min(tip, hull.radius(station, roll)));
+  });
+  const aft = x + size.length / 2;
+  const hinge = x + 0.26 * size.length;
+  return [
+    polygon([...root, seen(aft, tip), seen(x - 0.05 * size.length, tip)]),
+    stroke(seen(hinge, Math.min(tip, hull.radius(hinge, roll))), seen(hinge, tip)),
+  ];
+}

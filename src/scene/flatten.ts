@@ -1,0 +1,22 @@
+/** Places in space as points of the side view and the front view. */
+import type { Vec3 } from '../report/assessment.ts';
+import type { Line } from './grip.ts';
+import type { Geometry } from './subject.ts';
+import type { PlanePoint } from './view.ts';
+
+export type Flatten = (at: Vec3) => PlanePoint;
+
+/** Seen from port: the nose to the left. */
+export const fromSide: Flatten = ([x, , z]) => ({ u: x, z });
+
+/** Seen from astern: starboard to the right. */
+export const fromAstern: Flatten = ([, y, z]) => ({ u: y, z });
+
+export const wireLines = (wires: Geometry['wires'], flatten: Flatten): Line[] =>
+  wires.flatMap(({ wire, branches }) => branches.map((branch) => ({ id: wire, at: branch.map(flatten) })));
+
+export const hardpointPoints = (
+  { hardpoints }: Geometry,
+  flatten: Flatten,
+): { id: string; at: PlanePoint }[] =>
+  hardpoints.map(({ hardpoint, at }) => ({ id: hardpoint, at: flatten(at) }));

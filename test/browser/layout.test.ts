@@ -1,0 +1,63 @@
+import type { Page } from 'playwright-core';
+import { expect } from 'vitest';
+import { openSample } from './craftFiles.ts';
+import { test } from './visit.ts';
+
+const SIZES = [
+  { width: 1440, height: 900 },
+  { width: 1280, height: 800 },
+  { width: 1024, height: 768 },
+];
+
+/** How far the page itself can be scrolled, px. */
+const scrollRoom = (page: Page) =>
+  page.evaluate(() => {
+    const { scrollWidth, clientWidth, scrollHeight, clientHeight } = document.documentElement;
+    return { across: scrollWidth - clientWidth, down: scrollHeight - clientHeight };
+  });
+
+/** Buttons whose words do not fit in them, and fields too narrow to read a number in. */
+const clipped = (page: Page) =>
+  page.evaluate(() => {
+    const shown = (element: Element) => element.getClientRects().length > 0;
+    const buttons = [...document.querySelectorAll('.bar button, .tabs button, .toolbar button')]
+      .filter(shown)
+      .filter((button) => button.scrollWidth > button.clientWidth + 1)
+      .map((button) => button.textContent);
+    const fields = [...document.querySelectorAll('.panel input.number')]
+      .filter(shown)
+      .filter((input) => input.clientWidth < 34)
+      .map((input) => input.getAttribute('aria-label') ?? input.id);
+    return [...buttons, ...fields];
+  });
+
+for (const viewport of SIZES) {
+  test(`nothing scrolls the page or is cut off at ${viewport.width} × ${viewport.height}`, async ({
+    visit,
+  }) => {
+    const page = await visit({ viewport });
+    for (const tab of ['Selected', 'Hull', 'Gas, day', 'Targets', 'Figures', 'Notes']) {
+      await page.getByRole('tab', { name: tab, exact: true }).click();
+      expect(await scrollRoom(page)).toEqual({ across: 0, down: 0 });
+      expect(await clipped(page)).toEqual([]);
+      const panel = page.getByRole('tabpanel', { name: tab, exact: true });
+      expect(await panel.evaluate((box) => box.scrollWidth - box.clientWidth)).toBe(0);
+    }
+    const side = (await page.getByTestId('side-view').boundingBox())!;
+    expect(side.width).toBeGreaterThan(viewport.width / 2);
+    expect(side.height).toBeGreaterThan(200);
+  });
+}
+
+test('the beam stands under the side view on the same scale of stations', async ({ visit }) => {
+  const page = await visit();
+  await openSample(page, 'worked-example');
+  const [side, beam] = [page.getByTestId('side-view'), page.getByTestId('beam-view')];
+  const [above, below] = [(await side.boundingBox())!, (await beam.boundingBox())!];
+  expect(below.x).toBe(above.x);
+  expect(below.width).toBe(above.width);
+  expect(below.y).toBeGreaterThanOrEqual(above.y + above.height - 1);
+  for (const name of ['data-scale', 'data-origin-x']) {
+    expect(await beam.getAttribute(name)).toBe(await side.getAttribute(name));
+  }
+});

@@ -1,0 +1,70 @@
+/** A ground for gestures without a page: a real session, a scene worked out anew at each look, and what was shown. */
+
+import type { Ground, Hand, Scene } from '../../src/canvas/gestures/gesture.ts';
+import { CLEAR, type Overlay } from '../../src/canvas/overlay.ts';
+import type { Craft } from '../../src/craft/craft.ts';
+import { Session } from '../../src/edit/session.ts';
+import { frontFigure, sideFigure } from '../../src/scene/figure.ts';
+import { type Flatten, fromAstern, fromSide, hardpointPoints, wireLines } from '../../src/scene/flatten.ts';
+import { FigureCache, type FigureMaker } from '../../src/scene/keepSame.ts';
+import { type PlanePoint, toScreen, type View } from '../../src/scene/view.ts';
+import { craft as fixture, geometry, subject, VIEW } from '../scene/fixture.ts';
+
+export interface TestGround extends Ground {
+  overlay(): Overlay;
+  view(): View;
+  fits(): number;
+  craft(): Craft;
+  /** A hand at a point of the plane. */
+  at(point: PlanePoint, keys?: Partial<Hand>): Hand;
+}
+
+function groundOf(start: Craft, flatten: Flatten, make: FigureMaker, first: View): TestGround {
+  const session = new Session(start);
+  let overlay = CLEAR;
+  let view = first;
+  let fits = 0;
+  const scene = (): Scene => {
+    const { craft } = session.getState();
+    const drawn = geometry(craft);
+    return {
+      ...subject(craft),
+      view,
+      geometry: drawn,
+      figures: new FigureCache(make).figures(craft, drawn, 1 / view.scale),
+      lines: wireLines(drawn.wires, flatten),
+      hardpoints: hardpointPoints(drawn, flatten),
+      support: flatten === fromSide && drawn.support ? fromSide(drawn.support) : null,
+    };
+  };
+  return {
+    session,
+    scene,
+    show: (change) => {
+      overlay = { ...overlay, ...change };
+    },
+    setView: (change) => {
+      view = change(view);
+    },
+    fit: () => {
+      fits++;
+    },
+    overlay: () => overlay,
+    view: () => view,
+    fits: () => fits,
+    craft: () => session.getState().craft,
+    at: (point, keys = {}) => ({ ...OPEN_HAND, ...toScreen(view, point), ...keys }),
+  };
+}
+
+const OPEN_HAND: Hand = { x: 0, y: 0, shift: false, ctrl: false, alt: false, touch: false };
+
+export const sideGround = (start: Craft = fixture()): TestGround =>
+  groundOf(start, fromSide, sideFigure, VIEW);
+
+export const frontGround = (start: Craft = fixture()): TestGround =>
+  groundOf(start, fromAstern, frontFigure, { ...VIEW, originX: 420, pivot: 0 });
+
+/** The middle of a part's first piece as drawn. */
+export const middleOf = (ground: Ground, id: string): PlanePoint =>
+  ground.scene().figures.find(({ part }) => part === id)!.middle;

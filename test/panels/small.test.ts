@@ -1,0 +1,37 @@
+import { expect, test } from 'vitest';
+import { catalogue } from '../../src/catalogue/catalogue.ts';
+import type { Day } from '../../src/craft/schema.ts';
+import { dayAs } from '../../src/panels/dayAs.ts';
+import { foundParts } from '../../src/panels/foundParts.ts';
+import { fileName } from '../../src/panels/ledger/download.ts';
+import { shallowEqual } from '../../src/panels/shallow.ts';
+
+test('a day given another way keeps what both ways have', () => {
+  const measured: Day = { kind: 'measured', temperature: 290, pressure: 98_000, humidity: 0.3 };
+  const qnh = dayAs('qnh', measured, 98_000);
+  expect(qnh).toMatchObject({ kind: 'qnh', temperature: 290, humidity: 0.3 });
+  expect(dayAs('measured', qnh, 97_500)).toEqual({ ...measured, pressure: 97_500 });
+  expect(dayAs('qnh', { kind: 'standard', elevation: 400 }, null)).toMatchObject({ elevation: 400 });
+  expect(dayAs('measured', measured, 1)).toBe(measured);
+});
+
+test('a search finds entries that hold every word, in any order and case', () => {
+  const all = foundParts(catalogue.parts, '', null);
+  expect(all).toHaveLength(catalogue.parts.length);
+  const found = foundParts(catalogue.parts, 'PROPELLER brushless', null);
+  expect(found.length).toBeGreaterThan(0);
+  expect(found.length).toBeLessThan(all.length);
+  for (const { name, note } of found) expect(`${name} ${note}`.toLowerCase()).toMatch(/propeller/);
+  expect(foundParts(catalogue.parts, '', 'battery').every(({ kind }) => kind === 'battery')).toBe(true);
+});
+
+test('a file name has nothing that file systems dislike, and is never empty', () => {
+  expect(fileName('Atrium / camera: 2', 'csv')).toBe('Atrium  camera 2.csv');
+  expect(fileName('***', 'csv')).toBe('craft.csv');
+});
+
+test('rows are alike when every value is', () => {
+  expect(shallowEqual({ a: 1, b: 'x' }, { b: 'x', a: 1 })).toBe(true);
+  expect(shallowEqual({ a: 1 }, { a: 2 })).toBe(false);
+  expect(shallowEqual<{ a: number; b?: number }>({ a: 1 }, { a: 1, b: 1 })).toBe(false);
+});

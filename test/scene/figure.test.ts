@@ -1,0 +1,75 @@
+import { expect, test } from 'vitest';
+import { PART_KINDS } from '../../src/craft/schema.ts';
+import { apparentSize, frontFigure, LEAST_PX, sideFigure } from '../../src/scene/figure.ts';
+import { keelAt } from '../../src/scene/outline.ts';
+import { craft, geometry, part } from './fixture.ts';
+
+const PX = 1 / 400;
+
+const figuresOf = (parts: Parameters<typeof craft>[0], make = sideFigure, px = PX) => {
+  const of = craft(parts, []);
+  const { pieces, hull } = geometry(of);
+  return pieces.map((piece) => make(of.parts.byId[piece.part]!, piece, hull, px));
+};
+
+test.each(PART_KINDS)(
+  'a %s on the axis is drawn at its true size and place, from the side and from astern',
+  (kind) => {
+    const size = { length: 0.2, width: 0.1, height: 0.12 };
+    const one = part('one', { kind: 'axis', station: 1.1 }, { kind, size });
+    const [side] = figuresOf([one]);
+    expect(side!.box.left).toBeCloseTo(1, 9);
+    expect(side!.box.right).toBeCloseTo(1.2, 9);
+    expect(side!.box.top - side!.box.bottom).toBeCloseTo(0.12, 2);
+    expect(side!.enlarged).toBe(false);
+    const [front] = figuresOf([one], frontFigure);
+    expect(front!.box.right - front!.box.left).toBeCloseTo(0.1, 9);
+    expect(front!.box.top).toBeCloseTo(0.06, 9);
+  },
+);
+
+test('a speck is drawn as large as a fingertip can find, says so, and keeps its middle', () => {
+  const speck = part(
+    'speck',
+    { kind: 'axis', station: 1 },
+    { size: { length: 0.001, width: 0.001, height: 0.001 } },
+  );
+  const [figure] = figuresOf([speck]);
+  expect(figure!.enlarged).toBe(true);
+  expect((figure!.box.right - figure!.box.left) / PX).toBeCloseTo(LEAST_PX, 6);
+  expect((figure!.box.left + figure!.box.right) / 2).toBeCloseTo(1, 9);
+  expect(apparentSize(0, 0, PX).across).toBeCloseTo(LEAST_PX * PX, 12);
+});
+
+test('what hangs below the keel is tied to it by an upright line from its top, a gondola by two', () => {
+  const [battery, gondola, touching] = figuresOf([
+    part('battery', { kind: 'keel', station: 1.2, drop: 0.1 }, { kind: 'battery' }),
+    part('gondola', { kind: 'keel', station: 1.5, drop: 0.1 }, { kind: 'gondola' }),
+    part('touching', { kind: 'keel', station: 1.5, drop: 0 }),
+  ]);
+  const { hull } = geometry();
+  expect(battery!.struts).toHaveLength(1);
+  const [keel, top] = battery!.struts[0]!;
+  expect(keel).toEqual({ u: 1.2, z: keelAt(hull, 1.2) });
+  expect(top!.z).toBeCloseTo(battery!.box.top, 9);
+  expect(gondola!.struts).toHaveLength(2);
+  expect(touching!.struts).toEqual([]);
+});
+
+test('a fin stands on the skin: its root on the outline, its tip its span beyond', () => {
+  const size = { length: 0.3, width: 0.004, height: 0.2 };
+  const fin = part('fin', { kind: 'skin', station: 2.4, clock: 0, standoff: 0.1 }, { kind: 'fin', size });
+  const { hull } = geometry();
+  const [plate] = figuresOf([fin])[0]!.paths;
+  const root = plate!.points.slice(0, 9);
+  for (const { u, z } of root) expect(z).toBeCloseTo(hull.radius(u, 0), 9);
+  expect(Math.max(...plate!.points.map(({ z }) => z))).toBeCloseTo(hull.radius(2.4, 0) + 0.2, 9);
+});
+
+test('three fins at 120° are seen under their clock angles, two on one side of the eye', () => {
+  const fins = figuresOf(undefined).filter(({ part: id }) => id === 'fins');
+  expect(fins).toHaveLength(3);
+  const tips = fins.map(({ box }) => Math.max(Math.abs(box.top), Math.abs(box.bottom)));
+  expect(tips[1]! / tips[0]!).toBeCloseTo(0.5, 6);
+  expect(fins.map(({ far }) => far)).toEqual([false, true, false]);
+});

@@ -1,0 +1,115 @@
+import { expect, test } from 'vitest';
+import { sideFigure } from '../../src/scene/figure.ts';
+import { fromSide, hardpointPoints, wireLines } from '../../src/scene/flatten.ts';
+import { gripAt, handlesOf, type Reachable, sameGrip, wireEnds } from '../../src/scene/grip.ts';
+import {
+  distanceToBox,
+  distanceToSegment,
+  figureAt,
+  figuresIn,
+  lineAt,
+  pointAt,
+} from '../../src/scene/hit.ts';
+import { FigureCache } from '../../src/scene/keepSame.ts';
+import { craft, geometry } from './fixture.ts';
+
+const SCALE = 240;
+const of = craft();
+const drawn = geometry(of);
+const figures = new FigureCache(sideFigure).figures(of, drawn, 1 / SCALE);
+const lines = wireLines(drawn.wires, fromSide);
+const things = (selectedWires: string[] = []): Reachable => ({
+  geometry: drawn,
+  figures,
+  lines,
+  hardpoints: hardpointPoints(drawn, fromSide),
+  support: { u: 2.4, z: -0.7 },
+  selectedWires,
+});
+const middleOf = (id: string) => figures.find(({ part }) => part === id)!.middle;
+
+test('each thing can be taken where it is drawn', () => {
+  const at = (point: { u: number; z: number }) => gripAt(things(), point, SCALE, 5);
+  expect(at(middleOf('battery'))).toEqual({ kind: 'part', id: 'battery', copy: 0 });
+  expect(at({ u: 0.06, z: 0 })).toEqual({ kind: 'hardpoint', id: 'nose' });
+  expect(at(handlesOf(drawn, SCALE).tail)).toEqual({ kind: 'hull', end: 'tail' });
+  expect(at(handlesOf(drawn, SCALE).waist)).toEqual({ kind: 'hull', end: 'waist' });
+  const along = lines[0]!.at.find(({ u }) => u > 2 && u < 2.2)!;
+  expect(at(along)).toEqual({ kind: 'wire', id: 'power' });
+  expect(at({ u: 2.4, z: -0.69 })).toEqual({ kind: 'support' });
+  expect(at({ u: 1.2, z: 0.2 })).toBeNull();
+});
+
+test('the end of a selected wire run comes before the part it ends at', () => {
+  const end = wireEnds(lines, 'power')!.from;
+  expect(gripAt(things(), end, SCALE, 5)).toMatchObject({ kind: 'part' });
+  expect(gripAt(things(['power']), end, SCALE, 5)).toEqual({ kind: 'wireEnd', id: 'power', side: 'from' });
+});
+
+test('handles have a target of at least 32 px across', () => {
+  const { tail } = handlesOf(drawn, SCALE);
+  for (const [du, dz] of [
+    [15.9, 0],
+    [0, 15.9],
+    [0, -15.9],
+  ] as const) {
+    expect(gripAt(things(), { u: tail.u + du / SCALE, z: tail.z + dz / SCALE }, SCALE, 5)).toMatchObject({
+      kind: 'hull',
+    });
+  }
+});
+
+test('a fingertip reaches farther than a pointer, and no farther than its slop', () => {
+  const { right, top, bottom } = figures.find(({ part }) => part === 'camera')!.box;
+  const beside = { u: right + 12 / SCALE, z: (top + bottom) / 2 };
+  expect(figureAt(figures, beside, 5 / SCALE)).toBeNull();
+  expect(figureAt(figures, beside, 18 / SCALE)?.part).toBe('camera');
+});
+
+test('of two figures on one spot the smaller is taken', () => {
+  const [big, small] = [
+    figures[0]!,
+    { ...figures[0]!, part: 'small', box: { left: 2.89, right: 2.91, bottom: -0.01, top: 0.01 } },
+  ];
+  for (const order of [
+    [big, small],
+    [small, big],
+  ]) {
+    expect(figureAt(order, { u: 2.9, z: 0 }, 0)?.part).toBe('small');
+  }
+});
+
+test('distances', () => {
+  expect(distanceToBox({ u: 4, z: 5 }, { left: 0, right: 1, bottom: 0, top: 1 })).toBe(5);
+  expect(distanceToSegment({ u: 1, z: 2 }, { u: 0, z: 0 }, { u: 4, z: 0 })).toBe(2);
+  expect(distanceToSegment({ u: -3, z: 4 }, { u: 0, z: 0 }, { u: 4, z: 0 })).toBe(5);
+  expect(pointAt([{ id: 'a', at: { u: 0, z: 0 } }], { u: 1, z: 0 }, 0.5)).toBeNull();
+  expect(
+    lineAt(
+      [
+        {
+          id: 'a',
+          at: [
+            { u: 0, z: 0 },
+            { u: 1, z: 0 },
+          ],
+        },
+      ],
+      { u: 0.5, z: 0.2 },
+      0.3,
+    ),
+  ).toBe('a');
+});
+
+test('a box catches the figures whose middle it holds', () => {
+  const { u, z } = middleOf('battery');
+  const caught = figuresIn(figures, { left: u - 0.01, right: u + 0.01, bottom: z - 0.01, top: z + 0.01 });
+  expect(caught.map(({ part }) => part)).toEqual(['battery']);
+});
+
+test('grips are the same when they take the same', () => {
+  expect(sameGrip({ kind: 'wire', id: 'a' }, { kind: 'wire', id: 'a' })).toBe(true);
+  expect(sameGrip({ kind: 'wire', id: 'a' }, { kind: 'part', id: 'a', copy: 0 })).toBe(false);
+  expect(sameGrip(null, { kind: 'wire', id: 'a' })).toBe(false);
+  expect(sameGrip(null, null)).toBe(true);
+});
