@@ -26,6 +26,7 @@ export default defineConfig({
   root: 'src/app',
   base: './',
   plugins: [react(), offline()],
+  worker: { format: 'es' },
   build: {
     outDir: '../../dist',
     emptyOutDir: true,

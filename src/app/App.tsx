@@ -1,6 +1,7 @@
 /** The page: the drawing is the middle of it, the ledger under it, one panel beside it. */
 import { useEffect, useState } from 'react';
 import { EditorContext } from '../panels/editor.ts';
+import { PlanningContext } from '../panels/plan/planning.ts';
 import { CommandBar } from './CommandBar.tsx';
 import { useCell } from './cell.ts';
 import { openFile } from './commands.ts';
@@ -10,10 +11,12 @@ import { NoticeArea } from './NoticeArea.tsx';
 import type { Store } from './store.ts';
 import { usePalette } from './theme.ts';
 import { useEditorOf } from './useEditorOf.ts';
+import { usePlanningOf } from './usePlanningOf.ts';
 import { Workspace } from './Workspace.tsx';
 
 export function App({ store }: { store: Store }) {
   const editor = useEditorOf(store);
+  const planning = usePlanningOf(store);
   const palette = usePalette(useCell(store.settings).theme);
   const over = useDrops(store);
   const { name } = editor.craft;
@@ -23,7 +26,9 @@ export function App({ store }: { store: Store }) {
   return (
     <EditorContext value={editor}>
       <CommandBar store={store} />
-      <Workspace store={store} editor={editor} palette={palette} />
+      <PlanningContext value={planning}>
+        <Workspace store={store} editor={editor} palette={palette} />
+      </PlanningContext>
       <Dialogs store={store} />
       <NoticeArea notices={store.notices} />
       {over && (

@@ -7,6 +7,7 @@ import { useView } from '../canvas/useView.ts';
 import type { Editor } from '../panels/editor.ts';
 import type { Palette } from '../scene/palette.ts';
 import { useCell } from './cell.ts';
+import { usePlanDrawn } from './planDrawn.ts';
 import type { Store } from './store.ts';
 
 interface DrawingProps {
@@ -17,20 +18,21 @@ interface DrawingProps {
 
 export function Drawing({ store, editor, palette }: DrawingProps) {
   const { session, craft, selection, assessment, units } = editor;
-  const { tilted } = useCell(store.view);
+  const { tilted, tab } = useCell(store.view);
+  const planDrawn = usePlanDrawn(editor, tab === 'plan');
   const viewState = useView();
   useFitOnCommand(store, viewState.fit);
   const shown = { session, craft, selection, assessment, units, palette, tilted };
   return (
     <div className="drawing">
       <div className="side-view">
-        <SideView {...shown} viewState={viewState} />
+        <SideView {...shown} {...planDrawn} viewState={viewState} />
       </div>
       <div className="front-view">
-        <FrontView {...shown} />
+        <FrontView {...shown} {...planDrawn} />
       </div>
       <div className="beam-view">
-        <BeamView {...shown} viewState={viewState} />
+        <BeamView {...shown} {...planDrawn} viewState={viewState} />
       </div>
     </div>
   );

@@ -7,27 +7,33 @@ import { GasPanel } from '../panels/GasPanel.tsx';
 import { HullPanel } from '../panels/HullPanel.tsx';
 import { Inspector } from '../panels/Inspector.tsx';
 import { NotesPanel } from '../panels/NotesPanel.tsx';
+import { PlanPanel } from '../panels/plan/PlanPanel.tsx';
 import { type Tab, Tabs } from '../panels/Tabs.tsx';
 import { TargetsPanel } from '../panels/TargetsPanel.tsx';
 import { useCell } from './cell.ts';
 import type { Store } from './store.ts';
 
-type TabId = 'selected' | 'hull' | 'gas' | 'targets' | 'figures' | 'notes';
+type TabId = 'selected' | 'hull' | 'gas' | 'targets' | 'plan' | 'figures' | 'notes';
 
 const TABS: readonly Tab<TabId>[] = [
   { id: 'selected', title: 'Selected' },
   { id: 'hull', title: 'Hull' },
   { id: 'gas', title: 'Gas, day' },
   { id: 'targets', title: 'Targets' },
+  { id: 'plan', title: 'Plan' },
   { id: 'figures', title: 'Figures' },
   { id: 'notes', title: 'Notes' },
 ];
+
+/** Panels that stay in front while things are picked. */
+const READ: ReadonlySet<string> = new Set<TabId>(['figures', 'plan']);
 
 const PANELS: Readonly<Record<TabId, readonly ReactNode[]>> = {
   selected: [<Inspector key="inspector" />],
   hull: [<HullPanel key="hull" />, <FilmPanel key="film" />],
   gas: [<GasPanel key="gas" />, <DayPanel key="day" />],
   targets: [<TargetsPanel key="targets" />],
+  plan: [<PlanPanel key="plan" />],
   figures: [<FiguresPanel key="figures" />],
   notes: [<NotesPanel key="notes" />],
 };
@@ -46,7 +52,7 @@ export function SideColumn({ store, hidden }: { store: Store; hidden: boolean })
   );
 }
 
-/** What is newly selected comes to the front, unless the builder is reading figures. */
+/** What is newly selected comes to the front, unless the builder is reading figures or the plan. */
 function useSelectionInFront({ session, view }: Store): void {
   useEffect(() => {
     let before = session.getState().selection;
@@ -54,7 +60,7 @@ function useSelectionInFront({ session, view }: Store): void {
       const { selection } = session.getState();
       const fresh = selection !== before && selection.length > 0;
       before = selection;
-      if (fresh && view.get().tab !== 'figures') view.set({ ...view.get(), tab: 'selected' });
+      if (fresh && !READ.has(view.get().tab)) view.set({ ...view.get(), tab: 'selected' });
     });
   }, [session, view]);
 }

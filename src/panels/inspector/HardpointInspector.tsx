@@ -4,6 +4,7 @@ import { setHardpoint, setLeadAt } from '../../edit/edits/hardpoints.ts';
 import { useCommit } from '../commit.ts';
 import { useEditor } from '../editor.ts';
 import { TextField } from '../fields/TextField.tsx';
+import { HardpointPlanFields } from '../plan/HardpointPlanFields.tsx';
 import { RowList } from '../RowList.tsx';
 import { PlaceFields } from './PlaceFields.tsx';
 
@@ -30,6 +31,7 @@ export function HardpointInspector({ hardpoint }: { hardpoint: Hardpoint }) {
         at={view?.at ?? null}
         onPlace={(place, field, run) => commit(setHardpoint(hardpoint, field, { place }), run)}
       />
+      <HardpointPlanFields hardpoint={hardpoint} />
       <button
         type="button"
         aria-pressed={chosen}

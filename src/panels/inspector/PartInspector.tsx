@@ -12,6 +12,7 @@ import { ChoiceField } from '../fields/ChoiceField.tsx';
 import { NotesField } from '../fields/NotesField.tsx';
 import { QuantityField } from '../fields/QuantityField.tsx';
 import { TextField } from '../fields/TextField.tsx';
+import { PartSlideFields } from '../plan/PartSlideFields.tsx';
 import { PART_CHOICES, SOURCE_CHOICES } from '../words.ts';
 import { CopiesField } from './CopiesField.tsx';
 import { FactList } from './FactList.tsx';
@@ -75,6 +76,7 @@ export function PartInspector({ part }: { part: Part }) {
         value={part.locked}
         onCommit={(locked) => set('lock', { locked })}
       />
+      <PartSlideFields part={part} />
       <NotesField
         label="Part notes"
         rows={3}

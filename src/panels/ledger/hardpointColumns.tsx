@@ -5,6 +5,7 @@ import { stationOf, withStation } from '../../edit/place.ts';
 import { formatQuantity } from '../../units/format.ts';
 import { QuantityField } from '../fields/QuantityField.tsx';
 import { TextField } from '../fields/TextField.tsx';
+import { HARDPOINT_PLAN_COLUMNS } from '../plan/hardpointPlanColumns.tsx';
 import { PLACE_WORDS } from '../words.ts';
 import type { GridColumn, GridItem } from './gridColumn.ts';
 
@@ -66,6 +67,7 @@ export const HARDPOINT_GRID: readonly GridColumn<HardpointRow>[] = [
       />
     ),
   },
+  ...HARDPOINT_PLAN_COLUMNS,
   {
     key: 'lead',
     title: 'Lead',

@@ -1,0 +1,153 @@
+/**
+ * The ballast plan of the craft on the page. It is worked out only while somebody looks at it: anew after every change,
+ * and during a drag along with it as far as that goes within the frame. What was asked before and is not answered yet is
+ * dropped.
+ */
+import type { Craft } from '../craft/craft.ts';
+import { type KeptPlan, MOST_KEPT, NO_PLANS, type PlansState } from '../panels/plan/planning.ts';
+import type { Plan, PlanFound, PlanProgress } from '../report/plans.ts';
+import type { Answer, Job, PlanClient } from '../worker/planClient.ts';
+import { Cell } from './cell.ts';
+import type { Store } from './store.ts';
+
+interface Asked {
+  readonly craft: Craft;
+  readonly robust: boolean;
+  /** While it is dragged. */
+  readonly live: boolean;
+}
+
+/** Milliseconds without a further change before a plan is begun, so that a burst of keys begins one. */
+const PAUSE = 120;
+
+export class Plans {
+  readonly state = new Cell<PlansState>(NO_PLANS);
+  readonly #shown: Store['shown'];
+  readonly #client: PlanClient;
+  readonly #pause: number;
+  #looked = false;
+  #asked: Asked | null = null;
+  #job: Job<Plan> | null = null;
+  #timer: ReturnType<typeof setTimeout> | undefined;
+
+  /** The client begins its thread with the first request. */
+  constructor(shown: Store['shown'], client: PlanClient, pause = PAUSE) {
+    this.#shown = shown;
+    this.#client = client;
+    this.#pause = pause;
+    shown.subscribe(this.#look);
+  }
+
+  /** Whether somebody looks at the plan. */
+  readonly lookAt = (looked: boolean): void => {
+    this.#looked = looked;
+    this.#look();
+  };
+
+  readonly setRobust = (robust: boolean): void => {
+    this.#put({ robust });
+    this.#look();
+  };
+
+  readonly again = (): void => {
+    this.#asked = null;
+    this.#look();
+  };
+
+  /** What was found so far stays, as a plan that is not proven. */
+  readonly stop = (): void => {
+    clearTimeout(this.#timer);
+    if (this.#job) this.#job.stop();
+    else this.#put({ busy: false });
+  };
+
+  readonly keep = (plan: PlanFound): void => {
+    const { kept } = this.state.get();
+    if (kept.length >= MOST_KEPT) return;
+    const number = Math.max(0, ...kept.map((each) => each.number)) + 1;
+    this.#put({ kept: [...kept, { number, plan }] });
+  };
+
+  readonly show = (shown: KeptPlan | null): void => this.#put({ shown });
+
+  readonly drop = (dropped: KeptPlan): void => {
+    const { kept, shown } = this.state.get();
+    this.#put({ kept: kept.filter((each) => each !== dropped), shown: shown === dropped ? null : shown });
+  };
+
+  /** Plans belong to one craft: on another it begins with none. */
+  readonly forget = (): void => {
+    this.#dropJob();
+    this.#asked = null;
+    this.state.set({ ...NO_PLANS, robust: this.state.get().robust });
+    this.#look();
+  };
+
+  readonly #look = (): void => {
+    if (!this.#looked) return;
+    const { craft, dragging } = this.#shown.get();
+    const asked = { craft, robust: this.state.get().robust, live: dragging };
+    if (this.#asked && isSame(this.#asked, asked)) return;
+    this.#asked = asked;
+    this.#dropJob();
+    if (dragging) this.#follow(asked);
+    else this.#workOutSoon(asked);
+  };
+
+  /** What runs is no longer wanted, nor what it found. */
+  #dropJob(): void {
+    clearTimeout(this.#timer);
+    const job = this.#job;
+    this.#job = null;
+    job?.stop();
+  }
+
+  #follow({ craft, robust }: Asked): void {
+    this.#put({ busy: false, progress: null });
+    this.#client.follow(craft, robust, (plan) => {
+      if (!this.#asked?.live) return;
+      this.#put(plan ? { answer: { plan, craft }, waiting: false } : { waiting: true });
+    });
+  }
+
+  #workOutSoon(asked: Asked): void {
+    this.#put({ busy: true, progress: null, waiting: false, failure: null });
+    this.#timer = setTimeout(() => this.#workOut(asked), this.#pause);
+  }
+
+  #workOut({ craft, robust }: Asked): void {
+    let best: PlanFound | null = null;
+    const hear = (progress: PlanProgress) => {
+      best = progress.plan ?? best;
+      if (this.#job !== job) return;
+      const done = progress.step === 'explaining' && best;
+      this.#put({ progress, ...(done ? { answer: { plan: best!, craft } } : {}) });
+    };
+    const job = this.#client.plan(craft, { robust }, hear);
+    this.#job = job;
+    void job.answer.then((answer) => {
+      if (this.#job !== job) return;
+      this.#job = null;
+      this.#put({ busy: false, progress: null, ...outcome(answer, craft, best) });
+    });
+  }
+
+  #put(change: Partial<PlansState>): void {
+    this.state.set({ ...this.state.get(), ...change });
+  }
+}
+
+const isSame = (a: Asked, b: Asked): boolean =>
+  a.craft === b.craft && a.robust === b.robust && a.live === b.live;
+
+/** A stopped search leaves the best it found. */
+function outcome(answer: Answer<Plan>, craft: Craft, best: PlanFound | null): Partial<PlansState> {
+  switch (answer.status) {
+    case 'done':
+      return { answer: { plan: answer.value, craft } };
+    case 'failed':
+      return { failure: answer.why };
+    case 'stopped':
+      return best ? { answer: { plan: best, craft } } : { failure: 'Stopped before there was a plan.' };
+  }
+}

@@ -1,0 +1,55 @@
+/** What the plan panel and the drawing are given of the plan, made from the store. */
+import { useEffect, useMemo, useState } from 'react';
+import type { Planning } from '../panels/plan/planning.ts';
+import { PlanClient } from '../worker/planClient.ts';
+import { Carries } from './carries.ts';
+import { useCell } from './cell.ts';
+import { Plans } from './plans.ts';
+import type { Store } from './store.ts';
+
+export function usePlanningOf(store: Store): Planning {
+  const [{ plans, carries }] = useState(() => begin(store));
+  const plansState = useCell(plans.state);
+  const carriesState = useCell(carries.state);
+  const looked = useCell(store.view).tab === 'plan';
+  useEffect(() => {
+    plans.lookAt(looked);
+    carries.lookAt(looked);
+  }, [plans, carries, looked]);
+  return useMemo(
+    () => ({
+      ...plansState,
+      ...carriesState,
+      setRobust: (robust) => {
+        plans.setRobust(robust);
+        carries.setRobust(robust);
+      },
+      again: plans.again,
+      stop: plans.stop,
+      keep: plans.keep,
+      show: plans.show,
+      drop: plans.drop,
+      setLine: carries.setLine,
+      stopCarry: carries.stopCurve,
+      setCarryLoad: carries.setLoad,
+      workOutTable: carries.workOutTable,
+      stopTable: carries.stopTable,
+    }),
+    [plansState, carriesState, plans, carries],
+  );
+}
+
+/** One thread for all of it, begun with the first request; on another craft everything begins afresh. */
+function begin(store: Store): { plans: Plans; carries: Carries } {
+  const client = new PlanClient();
+  const plans = new Plans(store.shown, client);
+  const carries = new Carries(store.shown, client);
+  let { craftId } = store;
+  store.shown.subscribe(() => {
+    if (store.craftId === craftId) return;
+    craftId = store.craftId;
+    plans.forget();
+    carries.forget();
+  });
+  return { plans, carries };
+}
