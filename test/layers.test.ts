@@ -19,7 +19,8 @@ const ALLOWED: Readonly<Record<string, readonly string[]>> = {
   scene: ['units', 'craft', 'report'],
   canvas: ['craft', 'edit', 'scene'],
   panels: ['units', 'craft', 'catalogue', 'report', 'edit'],
-  app: [...CORE, 'edit', 'scene', 'canvas', 'panels'],
+  worker: CORE,
+  app: [...CORE, 'edit', 'scene', 'canvas', 'panels', 'worker'],
   cli: CORE,
 };
 

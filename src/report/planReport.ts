@@ -8,6 +8,7 @@ import { craftStateOf } from '../physics/craftState.ts';
 import { inUnits, say } from '../units/sentence.ts';
 import type { UnitSystem } from '../units/units.ts';
 import { assess } from './assess.ts';
+import { HAZARDS } from './hazards.ts';
 import { limitName, limitStands, relaxationWords, stepSaves } from './limitWords.ts';
 import { loadWords, planHeadline, planProof, slideWords, toldSlides, weightWords } from './planWords.ts';
 import type { Rows } from './rows.ts';
@@ -73,13 +74,9 @@ function foundReport(craft: Craft, plan: PlanFound, units: UnitSystem): PlanRepo
     })),
     remedies: [],
     after: rows,
-    cautions: [...(plan.weights.length > 0 ? [LEAD] : []), ...cautions],
+    cautions: [...(plan.weights.length > 0 ? [HAZARDS.ballast] : []), ...cautions],
   };
 }
-
-/** Common practice, no source. */
-const LEAD =
-  'Lead is poisonous: coat or wrap it, wash your hands after handling it, and keep it from children. Tie every weight twice: one that comes loose falls on whoever is below, and the craft rises.';
 
 function notFoundReport(craft: Craft, plan: PlanNotFound): PlanReport {
   const remedies = plan.remedies.map((remedy) => remedyWords(craft, remedy));

@@ -49,7 +49,7 @@ export function bindingOf(
   const binding: Binding[] = [];
   let complete = true;
   if (ballast < LEAST_SAVING) return { binding, complete };
-  for (const candidate of candidatesOf(setting)) {
+  for (const candidate of candidatesOf(setting, options.units)) {
     if (!mayBind(setting, found, candidate)) continue;
     if (Date.now() >= options.deadline || options.shouldStop?.()) {
       complete = false;

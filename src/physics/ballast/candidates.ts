@@ -6,6 +6,7 @@
 import type { Slide } from '../../craft/planningSchema.ts';
 import { LIMITS } from '../../craft/quantities.ts';
 import type { Relaxation, TargetKey } from '../../craft/relaxation.ts';
+import { type UnitSystem, unitOf } from '../../units/units.ts';
 import { LEAST_DEPTH } from './limits.ts';
 import { loadMass, type Setting } from './setting.ts';
 
@@ -15,7 +16,7 @@ export interface Candidate {
   readonly now: number;
   /** As far as it may go; on the side of more room. */
   readonly furthest: number;
-  /** What a builder reads: 0.1°, 1 mm, 0.1 g, one piece. */
+  /** What a builder reads and types: 0.1°, 1 mm, 0.1 g, one piece. */
   readonly digit: number;
   /** What its marginal value is told for: 1°, 10 mm, 1 g, one piece. */
   readonly step: number;
@@ -23,23 +24,46 @@ export interface Candidate {
   readonly whole: boolean;
 }
 
-const DEGREE = Math.PI / 180;
-const ANGLE = { digit: DEGREE / 10, step: DEGREE, whole: false };
-const LENGTH = { digit: 1e-3, step: 0.01, whole: false };
-const MASS = { digit: 1e-4, step: 1e-3, whole: false };
-const COUNT = { digit: 1, step: 1, whole: true };
+type Scale = Pick<Candidate, 'digit' | 'step' | 'whole'>;
+
+interface Scales {
+  readonly angle: Scale;
+  readonly length: Scale;
+  readonly mass: Scale;
+}
+
+const COUNT: Scale = { digit: 1, step: 1, whole: true };
 /** A tolerance wider than this is no attitude to fly in, rad. */
-const WIDEST = 30 * DEGREE;
+const WIDEST = (30 * Math.PI) / 180;
 
-export const candidatesOf = (setting: Setting): Candidate[] => [
-  ...slideEnds(setting),
-  ...hardpoints(setting),
-  ...pieces(setting),
-  ...targets(setting),
-  ...ashore(setting),
-];
+/** As many units a step: degrees, then millimetres and grams, or inches and ounces. */
+const STEPS = {
+  metric: { angle: 1, length: 0.01, mass: 1 },
+  imperial: { angle: 1, length: 0.5, mass: 0.1 },
+} as const;
 
-function targets({ craft, today }: Setting): Candidate[] {
+const scaleOf = (quantity: keyof Scales, units: UnitSystem): Scale => {
+  const { si, digits } = unitOf(quantity, units);
+  return { digit: si * 10 ** -digits, step: si * STEPS[units][quantity], whole: false };
+};
+
+/** Steps and digits are those of the unit system. */
+export function candidatesOf(setting: Setting, units: UnitSystem): Candidate[] {
+  const scales: Scales = {
+    angle: scaleOf('angle', units),
+    length: scaleOf('length', units),
+    mass: scaleOf('mass', units),
+  };
+  return [
+    ...slideEnds(setting, scales),
+    ...hardpoints(setting, scales),
+    ...pieces(setting),
+    ...targets(setting, scales),
+    ...ashore(setting),
+  ];
+}
+
+function targets({ craft, today }: Setting, { angle, length, mass }: Scales): Candidate[] {
   const { heaviness, pitchTolerance, heelTolerance, leastPendulumDepth } = craft.targets;
   const lift = Math.min(
     Math.max(Math.abs(today.loading.grossLift), today.loading.solid.mass),
@@ -47,21 +71,21 @@ function targets({ craft, today }: Setting): Candidate[] {
   );
   const target = (kind: TargetKey) => (to: number) => ({ kind, to });
   const all: Candidate[] = [
-    { at: target('heaviest'), now: heaviness.most, furthest: heaviness.most + lift, ...MASS },
-    { at: target('lightest'), now: heaviness.least, furthest: heaviness.least - lift, ...MASS },
-    { at: target('pitchTolerance'), now: pitchTolerance, furthest: WIDEST, ...ANGLE },
-    { at: target('heelTolerance'), now: heelTolerance, furthest: WIDEST, ...ANGLE },
-    { at: target('pendulumDepth'), now: leastPendulumDepth, furthest: 0, ...LENGTH },
+    { at: target('heaviest'), now: heaviness.most, furthest: heaviness.most + lift, ...mass },
+    { at: target('lightest'), now: heaviness.least, furthest: heaviness.least - lift, ...mass },
+    { at: target('pitchTolerance'), now: pitchTolerance, furthest: WIDEST, ...angle },
+    { at: target('heelTolerance'), now: heelTolerance, furthest: WIDEST, ...angle },
+    { at: target('pendulumDepth'), now: leastPendulumDepth, furthest: 0, ...length },
   ];
   return all.filter(({ now, furthest }, i) => (i < 2 ? true : i < 4 ? furthest > now : now > LEAST_DEPTH));
 }
 
 /** As far as the hull reaches. */
-function slideEnds(setting: Setting): Candidate[] {
+function slideEnds(setting: Setting, scales: Scales): Candidate[] {
   const { length } = setting.today.hull;
   const ends = (slide: Slide, at: (end: keyof Slide) => Candidate['at']): Candidate[] => [
-    ...(slide.from > 0 ? [{ at: at('from'), now: slide.from, furthest: 0, ...LENGTH }] : []),
-    ...(slide.to < length ? [{ at: at('to'), now: slide.to, furthest: length, ...LENGTH }] : []),
+    ...(slide.from > 0 ? [{ at: at('from'), now: slide.from, furthest: 0, ...scales.length }] : []),
+    ...(slide.to < length ? [{ at: at('to'), now: slide.to, furthest: length, ...scales.length }] : []),
   ];
   return [
     ...setting.slides.flatMap(({ part, from, to }) =>
@@ -77,7 +101,7 @@ function slideEnds(setting: Setting): Candidate[] {
   ];
 }
 
-const hardpoints = ({ hardpoints: all, today }: Setting): Candidate[] =>
+const hardpoints = ({ hardpoints: all, today }: Setting, { mass }: Scales): Candidate[] =>
   all.map(({ id, limit }) => ({
     at: (to) => ({ kind: 'hardpoint', hardpoint: id, to }),
     now: limit,
@@ -85,7 +109,7 @@ const hardpoints = ({ hardpoints: all, today }: Setting): Candidate[] =>
       limit + Math.max(Math.abs(today.loading.grossLift), today.loading.solid.mass),
       LIMITS.mass,
     ),
-    ...MASS,
+    ...mass,
   }));
 
 const pieces = ({ craft, hardpoints: all }: Setting): Candidate[] =>

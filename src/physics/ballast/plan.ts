@@ -8,12 +8,13 @@ import type { Place } from '../../craft/placeSchema.ts';
 import type { LeadPiece } from '../../craft/planningSchema.ts';
 import type { Stowage } from '../../craft/stowage.ts';
 import type { LinearSolver } from '../../numeric/linearProgram/result.ts';
+import type { UnitSystem } from '../../units/units.ts';
 import { attitudeOf } from '../balance/attitude.ts';
 import type { Better, Found, NotFound } from './attempt.ts';
 import { type Binding, bindingOf } from './binding.ts';
-import { exactOf, isKept } from './exact.ts';
+import { type Exact, exactOf, isKept } from './exact.ts';
 import { ballastOf, type Point, stowageOf } from './point.ts';
-import { type Remedy, remediesOf } from './relaxations.ts';
+import { type Remedy, type RemedyOptions, remediesOf } from './relaxations.ts';
 import { search } from './search.ts';
 import { ballastMass, fixedBallast, type Setting, settingOf } from './setting.ts';
 import type { Share } from './share.ts';
@@ -23,6 +24,8 @@ export interface PlanOptions {
   readonly robust?: boolean;
   /** Seconds for the whole of it. Default 20. */
   readonly timeLimit?: number;
+  /** On whose scale limits are moved when it is told what binds and what would help. Default 'metric'. */
+  readonly units?: UnitSystem;
   /** Whether to tell what binds and what would help. Default true. */
   readonly explain?: boolean;
   readonly onProgress?: (progress: PlanProgress) => void;
@@ -34,8 +37,8 @@ export interface PlanProgress {
   /** Dead ballast of the best plan so far, and what no plan goes below, kg; null while there is none. */
   readonly deadBallast: number | null;
   readonly bound: number | null;
-  /** The plan so far, when there is a new one that keeps every limit: where to go on from when one stops. */
-  readonly stowage: Stowage | null;
+  /** The plan so far, when there is a new one that keeps every limit: what is left when one stops. */
+  readonly plan: PlanFound | null;
 }
 
 export type Plan = PlanFound | PlanNotFound;
@@ -106,21 +109,17 @@ export interface PlanNotFound {
 
 /** Never throws for a craft that passed the loading gate. */
 export function planOf(craft: Craft, solver: LinearSolver, options: PlanOptions = {}): Plan {
-  const { robust = false, timeLimit = 20, explain = true, shouldStop } = options;
+  const { robust = false, timeLimit = 20, units = 'metric', explain = true, shouldStop } = options;
   const setting = settingOf(craft, robust);
   if (setting.status === 'infeasible') return noPlan('none', setting.why, robust);
   const deadline = Date.now() + 1000 * timeLimit;
-  const asked = { deadline, ...(shouldStop ? { shouldStop } : {}) };
+  const asked: RemedyOptions = { deadline, units, ...(shouldStop ? { shouldStop } : {}) };
   const found = search(setting.value, solver, { ...asked, ...telling(setting.value, options) });
   if (found.status !== 'found') return notFound(setting.value, solver, found, explain, asked);
   const plan = planFrom(setting.value, found);
   if (!explain) return plan;
-  options.onProgress?.({
-    step: 'explaining',
-    deadBallast: plan.deadBallast,
-    bound: plan.bound,
-    stowage: null,
-  });
+  const { deadBallast, bound } = plan;
+  options.onProgress?.({ step: 'explaining', deadBallast, bound, plan });
   const { binding, complete } = bindingOf(setting.value, found, solver, asked);
   return { ...plan, binding, bindingComplete: complete };
 }
@@ -138,7 +137,7 @@ function notFound(
   solver: LinearSolver,
   { status, why }: NotFound,
   explain: boolean,
-  asked: { deadline: number; shouldStop?: () => boolean },
+  asked: RemedyOptions,
 ): PlanNotFound {
   const homeless = setting.loads.find(({ load, options }) => load.must && options.length === 0);
   const plan = noPlan(
@@ -156,22 +155,38 @@ function telling(setting: Setting, { onProgress }: PlanOptions): { onBetter?: (b
   const fixed = fixedBallast(setting.craft);
   const inKilograms = (grams: number) => (Number.isFinite(grams) ? grams / 1000 + fixed : null);
   return {
-    onBetter: ({ objective, bound, point }) =>
+    onBetter: (better) =>
       onProgress({
         step: 'searching',
-        deadBallast: inKilograms(objective),
-        bound: inKilograms(bound),
-        stowage: point && isKept(exactOf(setting, point)) ? stowageOf(setting, point) : null,
+        deadBallast: inKilograms(better.objective),
+        bound: inKilograms(better.bound),
+        plan: planSoFar(setting, better),
       }),
   };
 }
 
-export function planFrom(setting: Setting, found: Found): PlanFound {
+function planSoFar(setting: Setting, { point, bound, gap }: Better): PlanFound | null {
+  const exact = point && exactOf(setting, point);
+  if (!exact || !isKept(exact)) return null;
+  return planAt(setting, point, exact, exact.share, { status: 'stopped', bound, gap, proven: false });
+}
+
+export const planFrom = (setting: Setting, { point, exact, claimed, ordered }: Found): PlanFound =>
+  planAt(setting, point, exact, claimed, { ...ordered.first, proven: ordered.proven });
+
+interface Proof {
+  readonly status: PlanFound['status'];
+  /** g */
+  readonly bound: number;
+  readonly gap: number;
+  readonly proven: boolean;
+}
+
+function planAt(setting: Setting, point: Point, exact: Exact, claimed: Share, proof: Proof): PlanFound {
   const { craft, robust } = setting;
-  const { point, exact, ordered, claimed } = found;
   const fixed = fixedBallast(craft);
   const planned = ballastOf(setting, point);
-  const { status, bound, gap } = ordered.first;
+  const { status, bound, gap, proven } = proof;
   return {
     status,
     robust,
@@ -187,7 +202,7 @@ export function planFrom(setting: Setting, found: Found): PlanFound {
     loads: loadsOf(setting, point),
     bound: Math.min(Math.max(bound / 1000, 0), planned) + fixed,
     gap,
-    wishesProven: ordered.proven,
+    wishesProven: proven,
     disagreement: disagreementOf(claimed, exact.share, exact.state.loading.cb),
     binding: [],
     bindingComplete: false,

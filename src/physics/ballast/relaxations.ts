@@ -6,6 +6,7 @@
 import type { Craft } from '../../craft/craft.ts';
 import { type Relaxation, relaxed } from '../../craft/relaxation.ts';
 import type { LinearSolver } from '../../numeric/linearProgram/result.ts';
+import type { UnitSystem } from '../../units/units.ts';
 import type { Found } from './attempt.ts';
 import { type Candidate, candidatesOf, digitsOf, valueAt } from './candidates.ts';
 import { isKept } from './exact.ts';
@@ -29,13 +30,15 @@ export interface Remedies {
 
 export interface RemedyOptions {
   readonly deadline: number;
+  /** On whose scale limits are moved. */
+  readonly units: UnitSystem;
   readonly shouldStop?: () => boolean;
 }
 
 export function remediesOf(setting: Setting, solver: LinearSolver, options: RemedyOptions): Remedies {
   const remedies: Remedy[] = [];
   let complete = true;
-  for (const candidate of candidatesOf(setting)) {
+  for (const candidate of candidatesOf(setting, options.units)) {
     if (Date.now() >= options.deadline || options.shouldStop?.()) {
       complete = false;
       break;
@@ -90,7 +93,7 @@ export function planFor(
   robust: boolean,
   solver: LinearSolver,
   anyWillDo: boolean,
-  { deadline, shouldStop }: RemedyOptions,
+  { deadline, shouldStop }: Pick<RemedyOptions, 'deadline' | 'shouldStop'>,
 ): { setting: Setting; found: Found } | null {
   const setting = settingOf(craft, robust);
   if (setting.status === 'infeasible') return null;

@@ -1,8 +1,9 @@
 /** What binds and what would help, against solving again and against the duals of the linear program. */
 import fc from 'fast-check';
 import { expect, test } from 'vitest';
-import type { Craft } from '../../../src/craft/craft.ts';
+import { type Craft, keyed } from '../../../src/craft/craft.ts';
 import { type Relaxation, relaxed } from '../../../src/craft/relaxation.ts';
+import type { Hardpoint } from '../../../src/craft/schema.ts';
 import { applyRelaxation } from '../../../src/edit/edits/plan.ts';
 import { loadHighs } from '../../../src/numeric/linearProgram/highsSolver.ts';
 import type { Found } from '../../../src/physics/ballast/attempt.ts';
@@ -10,7 +11,11 @@ import type { Binding } from '../../../src/physics/ballast/binding.ts';
 import { type PlanFound, planOf } from '../../../src/physics/ballast/plan.ts';
 import { search } from '../../../src/physics/ballast/search.ts';
 import { settingOf } from '../../../src/physics/ballast/setting.ts';
+import { quantityOf } from '../../../src/report/limitWords.ts';
+import { parseQuantity } from '../../../src/units/entry.ts';
+import { formatQuantity } from '../../../src/units/format.ts';
 import { testEdit } from '../../edit/testEdit.ts';
+import { sampleCraft } from '../../samples/readSamples.ts';
 import { missedBy } from './judge.ts';
 import { randomCraft } from './randomCraft.ts';
 
@@ -23,9 +28,9 @@ const movedTo = (limit: Relaxation, to: number): Relaxation => ('to' in limit ? 
 const found = (plan: ReturnType<typeof planOf>): PlanFound | null => ('why' in plan ? null : plan);
 
 test.each([
-  ['straight', { hard: true }, 50],
-  ['curved', { hard: true, curved: true }, 30],
-  ['robust', { hard: true, tolerance: 0.002 }, 25],
+  ['straight', { hard: true }, 35],
+  ['curved', { hard: true, curved: true }, 20],
+  ['robust', { hard: true, tolerance: 0.002 }, 20],
 ] as const)(
   '%s: each marginal is the slope found by moving the limit and planning again',
   (name, want, numRuns) => {
@@ -52,7 +57,7 @@ test.each([
       }),
       { numRuns, endOnFailure: true, seed: 20 },
     );
-    expect(checked).toBeGreaterThan(15);
+    expect(checked).toBeGreaterThan(10);
   },
 );
 
@@ -107,12 +112,33 @@ test('straight: each marginal is the dual of the linear program', () => {
       kinds.set('all', (kinds.get('all') ?? 0) + plan.binding.length);
       kinds.set('near', (kinds.get('near') ?? 0) + near.length);
     }),
-    { numRuns: 120, endOnFailure: true, seed: 20 },
+    { numRuns: 80, endOnFailure: true, seed: 20 },
   );
   expect([...kinds.keys()]).toEqual(
-    expect.arrayContaining(['pitchTolerance', 'heelTolerance', 'lightest', 'hardpoint', 'slide']),
+    expect.arrayContaining(['pitchTolerance', 'heelTolerance', 'lightest', 'slide']),
   );
   expect(kinds.get('near')! / kinds.get('all')!).toBeGreaterThan(0.9);
+});
+
+test('a full hardpoint: a gram more on the longer arm saves the ratio of the arms, less itself', () => {
+  const sample = sampleCraft('worked-example');
+  const spot = (id: string, station: number, limit: number): Hardpoint => ({
+    id,
+    name: id,
+    place: { kind: 'axis', station },
+    limit,
+    fill: 'continuous',
+  });
+  const craft: Craft = {
+    ...sample,
+    hardpoints: keyed([spot('nose', 0.05, 0.02), spot('chin', 0.6, 1)]),
+    targets: { ...sample.targets, heaviness: { least: -1, most: 0 } },
+  };
+  const plan = found(planOf(craft, solver))!;
+  expect(plan.weights.map(({ hardpoint }) => hardpoint)).toEqual(['nose', 'chin']);
+  const nose = plan.binding.find(({ limit }) => limit.kind === 'hardpoint')!;
+  expect(nose).toMatchObject({ limit: { hardpoint: 'nose' }, now: 0.02 });
+  expect(nose.marginal).toBeCloseTo((1.5 - 0.05) / (1.5 - 0.6) - 1, 4);
 });
 
 test('pieces: what one step saves is what planning again with it saves', () => {
@@ -132,8 +158,8 @@ test('pieces: what one step saves is what planning again with it saves', () => {
 });
 
 test.each([
-  ['straight', {}, 40],
-  ['curved with loads', { curved: true, loads: 2 }, 25],
+  ['straight', {}, 30],
+  ['curved with loads', { curved: true, loads: 2 }, 14],
   ['pieces', { pieces: true, loads: 1 }, 20],
 ] as const)(
   '%s: the advice, followed as an edit, gives a plan; a digit less does not',
@@ -172,6 +198,27 @@ function unitOf({ kind }: Relaxation): 'angle' | 'length' | 'mass' | 'count' {
   if (kind === 'slide' || kind === 'loadSlide' || kind === 'pendulumDepth') return 'length';
   return kind === 'pieces' ? 'count' : 'mass';
 }
+
+test('in ounces and inches the advice, typed as it reads, gives a plan', () => {
+  let followed = 0;
+  fc.assert(
+    fc.property(randomCraft({ hard: true }), (craft) => {
+      const plan = planOf(craft, solver, { units: 'imperial' });
+      if (plan.status !== 'infeasible') return;
+      for (const { relaxation } of plan.remedies) {
+        if (!('to' in relaxation)) continue;
+        const quantity = quantityOf(relaxation);
+        const read = formatQuantity(relaxation.to, quantity, 'imperial');
+        const typed = parseQuantity(read, quantity, 'imperial');
+        if (!typed.ok) throw new Error(read);
+        expect(lean(relaxed(craft, movedTo(relaxation, typed.value))).status).toBe('optimal');
+        followed++;
+      }
+    }),
+    { numRuns: 25, endOnFailure: true, seed: 20 },
+  );
+  expect(followed).toBeGreaterThan(10);
+});
 
 test('a load that has to be carried and has nowhere to go is named', () => {
   const craft = fc.sample(randomCraft({}), { numRuns: 1, seed: 1 })[0]!;

@@ -27,10 +27,21 @@ function check(plan: Plan): void {
   expect(Math.abs(plan.disagreement.pitch)).toBeLessThan(2e-4);
 }
 
+/** The small craft of every sort of entry, with targets that it can meet. */
+const base: Craft = {
+  ...planningCraft(),
+  targets: {
+    heaviness: { least: -1.2, most: 0.1 },
+    pitchTolerance: 0.1,
+    heelTolerance: 0.1,
+    leastPendulumDepth: 0.01,
+  },
+};
+
 test('1,000 damaged crafts', () => {
   const random = seeded(77);
   const texts = [
-    serialize(planningCraft()),
+    serialize(base),
     ...['museum-atrium', 'warehouse-stock', 'school-cylinder', 'worked-example'].map(sampleText),
   ];
   const seen = new Map<string, number>();
@@ -47,11 +58,10 @@ test('1,000 damaged crafts', () => {
     check(plan);
     seen.set(plan.status, (seen.get(plan.status) ?? 0) + 1);
   }
-  expect(seen.get('optimal')).toBeGreaterThan(50);
-  expect(seen.get('infeasible')).toBeGreaterThan(50);
+  expect(seen.get('optimal')).toBeGreaterThan(200);
+  expect(seen.get('infeasible')).toBeGreaterThan(200);
 });
 
-const base = planningCraft();
 const eachPart = (change: object): Craft => ({
   ...base,
   parts: keyed(listed(base.parts).map((part) => ({ ...part, ...change }))),
@@ -95,7 +105,8 @@ const degenerate: Record<string, Craft> = {
 };
 
 test.each(Object.entries(degenerate))('%s', (_, craft) => {
-  for (const robust of [false, true]) check(planOf(craft, solver, { timeLimit: 3, robust }));
+  for (const robust of [false, true])
+    check(planOf(craft, solver, { timeLimit: 3, robust, explain: !robust }));
   const live = new LivePlanner(solver);
   const following = live.plan({ ...craft, loads: keyed([]), pieces: [] });
   live.dispose();
@@ -135,7 +146,7 @@ const crowded: Craft = {
 
 /** A hang would run into the test's own time limit. */
 test.each([false, true])('a crowded craft, robust: %s', (robust) => {
-  check(planOf(crowded, solver, { timeLimit: 2, robust }));
+  check(planOf(crowded, solver, { timeLimit: 1, robust }));
 });
 
 test('asked to stop, it stops with what it has', () => {
