@@ -28,7 +28,8 @@ const AMOUNT_ROOM = 36;
 /** Room under the beam for the sums of both sides. */
 const FOOT = 46;
 
-const topOf = ({ height }: Size): number => Math.max(24, Math.min(height - FOOT - BAR, 0.42 * height));
+/** Of the bars. */
+export const topOf = ({ height }: Size): number => Math.max(24, Math.min(height - FOOT - BAR, 0.42 * height));
 
 /** Whether a point at that height lies on the bars. */
 export const onBeam = (y: number, size: Size): boolean => y >= topOf(size) - 2 && y <= topOf(size) + BAR + 2;

@@ -4,9 +4,11 @@ import { Layer, Stage } from 'react-konva/es/ReactKonvaCore.js';
 import { isSelected, type Selectable } from '../edit/selection.ts';
 import { beamOf, type PlacedBar } from '../scene/beam.ts';
 import { barAt, layBeam } from '../scene/beamLayout.ts';
+import { layTwo, planBeamInWords } from '../scene/beamPlan.ts';
 import type { View } from '../scene/view.ts';
 import { beamInWords } from '../scene/words.ts';
-import { BeamMarks, onBeam } from './BeamMarks.tsx';
+import { BeamMarks, onBeam, topOf } from './BeamMarks.tsx';
+import { abovePlan, BeamPlanMarks } from './BeamPlanMarks.tsx';
 import { Frame } from './Frame.tsx';
 import type { Hand } from './gestures/gesture.ts';
 import { pan } from './gestures/pan.ts';
@@ -18,6 +20,7 @@ import { Unformed } from './Unformed.tsx';
 import { useGeometry } from './useGeometry.ts';
 import { useGestures } from './useGestures.ts';
 import { useGround, useOverlay } from './useGround.ts';
+import { usePlanned } from './usePlanned.ts';
 import { useSize } from './useSize.ts';
 
 const TOUCH_SLOP = 10;
@@ -37,7 +40,9 @@ function thingOf({ kind, id }: PlacedBar): Selectable | null {
 function BeamFrame(props: SharedProps & DrawnProps) {
   const { session, selection, palette, viewState, geometry, units, craft, assessment } = props;
   const frame = useRef<HTMLDivElement>(null);
-  const size = useSize(frame);
+  const whole = useSize(frame);
+  const planned = usePlanned(props, geometry);
+  const size = useMemo(() => (planned ? abovePlan(whole) : whole), [planned, whole]);
   const [hovered, setHovered] = useState<string | null>(null);
   const { scale, originX, originY } = viewState.view;
   const pivot = geometry.cb[0];
@@ -46,7 +51,8 @@ function BeamFrame(props: SharedProps & DrawnProps) {
     [scale, originX, originY, pivot, size],
   );
   const beam = useMemo(() => beamOf(geometry.beam, geometry.lead), [geometry.beam, geometry.lead]);
-  const page = layBeam(beam, view);
+  const two = planned && layTwo(beam, planned.after, view);
+  const page = two?.today ?? layBeam(beam, view);
   const scene = {
     craft,
     assessment,
@@ -82,14 +88,16 @@ function BeamFrame(props: SharedProps & DrawnProps) {
       frame={frame}
       testId="beam-view"
       label="Beam of moments about the CB"
-      description={beamInWords(beam, units)}
+      description={[beamInWords(beam, units), ...(two ? [planBeamInWords(two.plan.beam, units)] : [])].join(
+        ' ',
+      )}
       status=""
       view={view}
       cursor={hovered ? 'pointer' : 'default'}
       handlers={{ ...gestures.handlers, ...keysOf(ground, gestures, 'side') }}
       leave={() => setHovered(null)}
     >
-      <Stage width={size.width} height={size.height} listening={false}>
+      <Stage width={whole.width} height={whole.height} listening={false}>
         <Layer listening={false}>
           <BeamMarks
             beam={beam}
@@ -100,6 +108,16 @@ function BeamFrame(props: SharedProps & DrawnProps) {
             isLit={isLit}
             hovered={hovered}
           />
+          {two && (
+            <BeamPlanMarks
+              {...two.plan}
+              today={topOf(size)}
+              size={whole}
+              units={units}
+              palette={palette}
+              isLit={isLit}
+            />
+          )}
         </Layer>
       </Stage>
     </Frame>

@@ -1,4 +1,6 @@
 /** The side view on its three layers: the ground that rarely changes, what stands still on it, and what moves. */
+
+import type { ReactNode } from 'react';
 import { useCallback } from 'react';
 import { Group, Layer, Stage } from 'react-konva/es/ReactKonvaCore.js';
 import { idsOf, isSelected, type Selection } from '../edit/selection.ts';
@@ -25,9 +27,11 @@ export interface SideDrawingProps {
   readonly overlay: Overlay;
   /** Drawn faint, for it is not the craft as it stands. */
   readonly faded: boolean;
+  /** A layer between what stands still and what moves. */
+  children(labels: ReturnType<typeof useLabels>): ReactNode;
 }
 
-export function SideDrawing({ scene, selection, overlay, faded }: SideDrawingProps) {
+export function SideDrawing({ scene, selection, overlay, faded, children }: SideDrawingProps) {
   const { view, palette, units, geometry, craft } = scene;
   const px = 1 / view.scale;
   const world = worldTransform(view);
@@ -66,6 +70,7 @@ export function SideDrawing({ scene, selection, overlay, faded }: SideDrawingPro
         <Labels labels={labels} palette={palette} onGas={onGas} />
         {view.tilt === 0 && <FootRuler view={view} palette={palette} units={units} />}
       </Layer>
+      {children(labels)}
       <Layer listening={false}>
         <Group {...world}>
           <WireMarks lines={scene.movingLines} ink={palette.wire} px={px} />

@@ -3,15 +3,18 @@ import { useMemo, useRef } from 'react';
 import { idsOf } from '../edit/selection.ts';
 import { fromSide } from '../scene/flatten.ts';
 import { sameGrip } from '../scene/grip.ts';
+import { planInWords } from '../scene/planWords.ts';
 import { sideReadout } from '../scene/readout.ts';
 import { toScreen, type View } from '../scene/view.ts';
 import { selectionInWords, sideInWords } from '../scene/words.ts';
 import { Bubble } from './Bubble.tsx';
+import { BelowCarry } from './CarryPlot.tsx';
 import { Frame } from './Frame.tsx';
 import type { Hand } from './gestures/gesture.ts';
 import { gripUnder, takeInSide } from './gestures/take.ts';
 import { keysOf } from './keys.ts';
 import { cursorOf } from './overlay.ts';
+import { PlanLayer } from './PlanLayer.tsx';
 import type { DrawnProps, SharedProps } from './props.ts';
 import { SideDrawing } from './SideDrawing.tsx';
 import { Unformed } from './Unformed.tsx';
@@ -19,7 +22,9 @@ import { sidePoints, useFit } from './useFit.ts';
 import { useGeometry } from './useGeometry.ts';
 import { useGestures } from './useGestures.ts';
 import { useGround, useOverlay } from './useGround.ts';
-import { useLie, useSideScene } from './useSideScene.ts';
+import { usePlanned } from './usePlanned.ts';
+import { useRails } from './useRails.ts';
+import { useLie, useSideScene, withoutLead } from './useSideScene.ts';
 import { useSize } from './useSize.ts';
 
 const MARGINS = { left: 46, right: 66, top: 46, bottom: 74 };
@@ -30,7 +35,11 @@ const KEYS =
 export function SideView(props: SharedProps) {
   const { geometry, stale } = useGeometry(props);
   if (!geometry) return <Unformed why={stale ?? ''} palette={props.palette} testId="side-view" />;
-  return <SideFrame {...props} geometry={geometry} stale={stale} />;
+  return (
+    <BelowCarry {...props} length={geometry.hull.length}>
+      <SideFrame {...props} geometry={geometry} stale={stale} />
+    </BelowCarry>
+  );
 }
 
 function SideFrame(props: SharedProps & DrawnProps & { stale: string | null }) {
@@ -60,7 +69,9 @@ function SideFrame(props: SharedProps & DrawnProps & { stale: string | null }) {
     show({ hint: null, hover: null });
     return takeInSide(on, hand);
   };
-  const gestures = useGestures(frame, ground, take, hover);
+  const planned = usePlanned(props, geometry);
+  const rails = useRails(scene, selection);
+  const gestures = useGestures(frame, ground, rails.take(take), rails.hover(hover));
   const onDoubleClick = () => {
     if (!overlay.hover) ground.fit();
   };
@@ -71,14 +82,21 @@ function SideFrame(props: SharedProps & DrawnProps & { stale: string | null }) {
       frame={frame}
       testId="side-view"
       label="Side view"
-      description={`${sideInWords(scene)} ${KEYS}`}
+      description={[sideInWords(scene), planInWords(scene, props), KEYS].filter(Boolean).join(' ')}
       status={hint ?? (busy ? '' : selectionInWords(scene, idsOf(selection, 'part')))}
       view={view}
-      cursor={cursorOf(overlay)}
+      cursor={rails.cursor ?? cursorOf(overlay)}
       handlers={{ ...gestures.handlers, ...keysOf(ground, gestures, 'side'), onDoubleClick }}
       leave={() => hover(null)}
     >
-      <SideDrawing scene={scene} selection={selection} overlay={overlay} faded={stale !== null} />
+      <SideDrawing
+        scene={planned ? withoutLead(scene) : scene}
+        selection={selection}
+        overlay={overlay}
+        faded={stale !== null}
+      >
+        {(labels) => <PlanLayer {...{ scene, selection, rails, planned, labels }} hover={overlay.hover} />}
+      </SideDrawing>
       {readout && (
         <Bubble at={toScreen(view, readout.at)} lines={readout.lines} size={size} palette={palette} />
       )}

@@ -1,6 +1,7 @@
 /** What the page hands to every view. */
 import type { Selection } from '../edit/selection.ts';
 import type { Session } from '../edit/session.ts';
+import type { CarrySubject, PlanSubject } from '../scene/planned.ts';
 import type { Geometry, Subject } from '../scene/subject.ts';
 import type { ViewState } from './useView.ts';
 
@@ -12,7 +13,7 @@ export interface CanvasProps extends Subject {
 }
 
 /** The side view and the beam share one view state, so that stations lie under each other. */
-export interface SharedProps extends CanvasProps {
+export interface SharedProps extends CanvasProps, PlanSubject, CarrySubject {
   readonly viewState: ViewState;
 }
 

@@ -38,6 +38,12 @@ export function useSideScene(props: DrawnProps, view: View, { moving }: Overlay)
   };
 }
 
+/** The plan says what hangs where; the least lead at one hardpoint would lie over it. */
+export const withoutLead = (scene: SideScene): SideScene => ({
+  ...scene,
+  geometry: { ...scene.geometry, lead: null },
+});
+
 export interface Lie {
   readonly tilt: number;
   readonly pivot: number;

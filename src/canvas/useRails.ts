@@ -1,0 +1,50 @@
+/** Rails in the side view: which are there, which stop is under the pointer, and taking it. */
+import { useMemo, useState } from 'react';
+import { idsOf, type Selection } from '../edit/selection.ts';
+import { isOpen, type Knob, knobAt, knobKey, knobsOfAll, type Rail, railsOf } from '../scene/rails.ts';
+import { dragSlideEnd } from './gestures/dragSlideEnd.ts';
+import type { Ground, Hand, Scene } from './gestures/gesture.ts';
+import type { Take } from './gestures/take.ts';
+
+export interface Rails {
+  readonly rails: readonly Rail[];
+  /** Those whose stops can be taken. */
+  readonly open: readonly Rail[];
+  readonly knobs: readonly Knob[];
+  /** Key of the one under the pointer. */
+  readonly lit: string | null;
+  readonly cursor: string | null;
+  /** A stop under the hand is taken first. */
+  take(otherwise: Take): Take;
+  hover(otherwise: (hand: Hand | null) => void): (hand: Hand | null) => void;
+}
+
+export function useRails(scene: Scene, selection: Selection): Rails {
+  const { craft, geometry, view, figures } = scene;
+  const { parts, loads } = craft;
+  const { hull } = geometry;
+  // biome-ignore lint/correctness/useExhaustiveDependencies: of the craft only parts and loads have slides
+  const rails = useMemo(() => railsOf(craft, hull), [parts, loads, hull]);
+  const [lit, setLit] = useState<string | null>(null);
+  const selected = idsOf(selection, 'part');
+  const open = rails.filter((rail) => isOpen(rail, craft, selected));
+  const knobs = knobsOfAll(open, figures, view.scale);
+  const light = (knob: Knob | null) => setLit(knob && knobKey(knob));
+  return {
+    rails,
+    open,
+    knobs,
+    lit,
+    cursor: lit ? 'ew-resize' : null,
+    take: (otherwise) => (ground: Ground, hand: Hand) => {
+      const knob = knobAt(knobs, view, hand);
+      light(hand.touch ? null : knob);
+      return knob ? dragSlideEnd(ground, hand, knob) : otherwise(ground, hand);
+    },
+    hover: (otherwise) => (hand) => {
+      const knob = hand && knobAt(knobs, view, hand);
+      light(knob);
+      otherwise(knob ? null : hand);
+    },
+  };
+}
