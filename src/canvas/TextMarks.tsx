@@ -1,8 +1,9 @@
 /** Words beside the marks of the plan and the rails, where they cover nothing that has to be seen. Pixels. */
+import type { Context } from 'konva/lib/Context.js';
 import { memo } from 'react';
 import { Shape } from 'react-konva/es/ReactKonvaCore.js';
 import { type Area, type PlacedText, placeTexts } from '../scene/clearTexts.ts';
-import { fontOf, textWidth, writeOn } from './paint.ts';
+import { fontOf, textWidth, traceOnScreen, writeOn } from './paint.ts';
 
 export interface MarkText {
   readonly key: string;
@@ -34,6 +35,7 @@ export const TextMarks = memo(({ texts }: { readonly texts: readonly LaidText[] 
     sceneFunc={(context) => {
       context.textAlign = 'center';
       context.textBaseline = 'middle';
+      for (const { leader, ink } of texts) if (leader) line(context, leader, ink);
       for (const { lines, left, top, width, ink, halo } of texts) {
         lines.forEach((line, i) => {
           context.font = font(i);
@@ -43,3 +45,12 @@ export const TextMarks = memo(({ texts }: { readonly texts: readonly LaidText[] 
     }}
   />
 ));
+
+function line(context: Context, { from, to }: NonNullable<PlacedText['leader']>, ink: string): void {
+  context.globalAlpha = 0.6;
+  context.strokeStyle = ink;
+  context.lineWidth = 1;
+  traceOnScreen(context, [from, to], false);
+  context.stroke();
+  context.globalAlpha = 1;
+}

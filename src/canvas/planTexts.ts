@@ -96,6 +96,12 @@ const weightBox = ({ at: { x, y }, drop }: WeightMark): Area => ({
   bottom: y + drop + WEIGHT_HIGH,
 });
 
+/** The line from ring to bob. */
+const alongLine = (from: ScreenPoint, to: ScreenPoint): Area[] =>
+  Array.from({ length: 12 }, (_, i) =>
+    about({ x: from.x + ((to.x - from.x) * i) / 12, y: from.y + ((to.y - from.y) * i) / 12 }, 5),
+  );
+
 /** So many parts are kept clear of. */
 const MOST = 60;
 
@@ -116,7 +122,8 @@ export function planTaken(
     })),
     { ...about(ring, 12), left: ring.x - 38, top: ring.y - 20 },
     ...(bob ? [{ ...about(bob, 16), left: bob.x - 36, right: bob.x + 36 }] : []),
-    ...(plan?.bob?.bob ? [about(plan.bob.bob, 12)] : []),
+    ...(bob ? alongLine(ring, bob) : []),
+    ...(plan?.bob?.bob ? [about(plan.bob.bob, 12), ...alongLine(ring, plan.bob.bob)] : []),
     ...hardpoints.map(({ at }) => about(toScreen(view, at), 11)),
     ...figures.slice(0, MOST).map((figure) => boxOnScreen(figure, view)),
     ...(plan?.weights.map(weightBox) ?? []),

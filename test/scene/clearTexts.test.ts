@@ -23,10 +23,18 @@ test('words stay in the frame', () => {
 test('below its own when that is free, elsewhere when it is not', () => {
   const own = { left: 290, top: 190, right: 310, bottom: 210 };
   const wanted = [{ key: 'a', width: 60, height: 15, box: own }];
-  expect(placeTexts(wanted, [], FRAME)).toEqual([{ key: 'a', left: 270, top: 214 }]);
+  expect(placeTexts(wanted, [], FRAME)).toEqual([{ key: 'a', left: 270, top: 214, leader: null }]);
   const below = { left: 200, top: 211, right: 400, bottom: 400 };
   const [moved] = placeTexts(wanted, [below, own], FRAME);
   expect(moved!.top + 15).toBeLessThanOrEqual(211);
   const two = placeTexts([...wanted, { ...wanted[0]!, key: 'b' }], [], FRAME);
   expect(two[1]).not.toMatchObject({ left: 270, top: 214 });
+});
+
+test('one that has to stand off points to its own', () => {
+  const own = { left: 290, top: 190, right: 310, bottom: 210 };
+  const around = { left: 215, top: 150, right: 385, bottom: 240 };
+  const [text] = placeTexts([{ key: 'a', width: 60, height: 15, box: own }], [around], FRAME);
+  expect(text!.leader!.to).toMatchObject({ x: 300 });
+  expect(Math.abs(text!.leader!.from.y - 200)).toBeGreaterThan(40);
 });
