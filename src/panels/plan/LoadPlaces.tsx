@@ -3,12 +3,11 @@ import { listed } from '../../craft/craft.ts';
 import type { Load, LoadOption } from '../../craft/planningSchema.ts';
 import { addLoadOption, removeLoadOption, setLoadOption } from '../../edit/edits/loads.ts';
 import { withStation } from '../../edit/place.ts';
-import { pointOf } from '../../report/pointOf.ts';
 import { useCommit } from '../commit.ts';
 import { defaultPlace } from '../defaults.ts';
 import { useEditor } from '../editor.ts';
 import { CheckField } from '../fields/CheckField.tsx';
-import { PlaceFields } from '../inspector/PlaceFields.tsx';
+import { LineFields } from './LineFields.tsx';
 import { SlideEnds } from './SlideEnds.tsx';
 
 type SlideOption = Extract<LoadOption, { kind: 'slide' }>;
@@ -70,7 +69,7 @@ interface SlideFieldsProps {
 }
 
 function SlideFields({ load, option, index, number }: SlideFieldsProps) {
-  const { apply, assessment } = useEditor();
+  const { apply } = useEditor();
   const commit = useCommit();
   const prefix = `Slide ${number}`;
   return (
@@ -83,11 +82,10 @@ function SlideFields({ load, option, index, number }: SlideFieldsProps) {
           return commit(setLoadOption(load, index, { ...option, ...slide, place }), run);
         }}
       />
-      <PlaceFields
+      <LineFields
         prefix={prefix}
         place={option.place}
-        at={pointOf(option.place, assessment)}
-        onPlace={(place, _, run) => commit(setLoadOption(load, index, { ...option, place }), run)}
+        onPlace={(place, run) => commit(setLoadOption(load, index, { ...option, place }), run)}
       />
       <button type="button" onClick={() => apply(removeLoadOption(load, index))}>
         Remove slide {number}

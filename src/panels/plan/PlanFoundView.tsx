@@ -46,6 +46,7 @@ export function PlanFoundView({ plan, report, fresh }: PlanFoundViewProps) {
         >
           Keep this plan
         </button>
+        {kept.length > 0 && <span className="aside">{kept.length} kept below</span>}
       </div>
       <Binding plan={plan} binding={report.binding} />
       {report.cautions.map((caution) => (

@@ -5,6 +5,7 @@ import { useEditor } from '../editor.ts';
 import { CarrySection } from './CarrySection.tsx';
 import { Compared } from './Compared.tsx';
 import { Foldable } from './Foldable.tsx';
+import { Freedoms } from './Freedoms.tsx';
 import { KeptPlans } from './KeptPlans.tsx';
 import { LeadPieces } from './LeadPieces.tsx';
 import { LoadList } from './LoadList.tsx';
@@ -28,6 +29,9 @@ export function PlanPanel() {
         <KeptPlans />
         <Foldable title="Wishes" note={`${craft.wishes.length} in order`}>
           <WishList />
+        </Foldable>
+        <Foldable title="Hardpoints and slides" note="">
+          <Freedoms />
         </Foldable>
         <Foldable title="Useful loads" note={counted(craft.loads.order.length)}>
           <LoadList />

@@ -15,11 +15,12 @@ export function WishList() {
   const { wishes } = craft;
   const list = useRef<HTMLOListElement>(null);
   const off = WISHES.filter((wish) => !wishes.includes(wish));
-  const move = (from: number, to: number) => {
+  const move = (from: number, by: number, control: 'name' | 'arrow') => {
+    const to = from + by;
     const wish = wishes[from];
     if (!wish || to < 0 || to >= wishes.length) return;
     apply(setWishes(wishes.toSpliced(from, 1).toSpliced(to, 0, wish)));
-    list.current?.querySelectorAll<HTMLElement>('[data-wish]')[to]?.focus();
+    focusOn(list.current?.children[to], control, by);
   };
   return (
     <>
@@ -29,11 +30,12 @@ export function WishList() {
       <ol className="wishes" ref={list} aria-label="Wishes in order">
         {wishes.map((wish, at) => (
           <WishItem
-            key={wish}
+            // biome-ignore lint/suspicious/noArrayIndexKey: each rank keeps its buttons, so that the focus can follow a wish to another
+            key={at}
             wish={wish}
             at={at}
             last={at === wishes.length - 1}
-            onMove={(by) => move(at, at + by)}
+            onMove={(by, control) => move(at, by, control)}
             onRemove={() => apply(setWishes(wishes.toSpliced(at, 1)))}
           />
         ))}
@@ -47,11 +49,17 @@ export function WishList() {
   );
 }
 
+/** The same control at the wish's new rank; its name where that control can go no further. */
+function focusOn(item: Element | undefined, control: 'name' | 'arrow', by: number): void {
+  const arrow = item?.querySelector<HTMLButtonElement>(`[data-by="${by}"]:enabled`);
+  (control === 'arrow' && arrow ? arrow : item?.querySelector<HTMLElement>('[data-wish]'))?.focus();
+}
+
 interface WishItemProps {
   readonly wish: Wish;
   readonly at: number;
   readonly last: boolean;
-  onMove(by: number): void;
+  onMove(by: number, control: 'name' | 'arrow'): void;
   onRemove(): void;
 }
 
@@ -61,7 +69,7 @@ function WishItem({ wish, at, last, onMove, onRemove }: WishItemProps) {
     if (by === 0) return;
     event.preventDefault();
     event.stopPropagation();
-    onMove(by);
+    onMove(by, 'name');
   };
   const name = WORDS[wish];
   return (
@@ -76,10 +84,22 @@ function WishItem({ wish, at, last, onMove, onRemove }: WishItemProps) {
         <span aria-hidden="true">{at + 1}.</span> {name}
       </button>
       <span className="row-actions">
-        <button type="button" aria-label={`Raise ${name}`} disabled={at === 0} onClick={() => onMove(-1)}>
+        <button
+          type="button"
+          aria-label={`Raise ${name}`}
+          disabled={at === 0}
+          data-by={-1}
+          onClick={() => onMove(-1, 'arrow')}
+        >
           ↑
         </button>
-        <button type="button" aria-label={`Lower ${name}`} disabled={last} onClick={() => onMove(1)}>
+        <button
+          type="button"
+          aria-label={`Lower ${name}`}
+          disabled={last}
+          data-by={1}
+          onClick={() => onMove(1, 'arrow')}
+        >
           ↓
         </button>
         <button type="button" aria-label={`Leave out ${name}`} onClick={onRemove}>

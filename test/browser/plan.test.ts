@@ -1,0 +1,208 @@
+import { createRequire } from 'node:module';
+import type { AxeResults } from 'axe-core';
+import type { Locator, Page } from 'playwright-core';
+import { expect } from 'vitest';
+import { openSample, sample, savedText } from './craftFiles.ts';
+import { partOnPage, verdictText } from './drawing.ts';
+import { open, test } from './visit.ts';
+
+const axe = createRequire(import.meta.url).resolve('axe-core/axe.min.js');
+
+const planTab = (page: Page): Locator => page.getByRole('tab', { name: 'Plan', exact: true });
+const plan = (page: Page): Locator => page.getByRole('region', { name: 'Ballast plan' });
+const planText = (page: Page): Promise<string | null> => page.locator('.plan-headline').textContent();
+const figure = (page: Page, key: string): Locator =>
+  plan(page).locator(`.compared [data-figure="${key}"] td`);
+const upToDate = (page: Page): Promise<void> => plan(page).getByText('Up to date.').waitFor();
+const unfold = (page: Page, title: string): Promise<void> =>
+  page.locator('.foldable > summary', { hasText: title }).click();
+
+/** Goes on by Tab until the button has the focus. */
+async function tabToButton(page: Page, name: string): Promise<void> {
+  for (let i = 0; i < 60; i++) {
+    const here = await page.evaluate(() => document.activeElement?.textContent);
+    if (here === name) return;
+    await page.keyboard.press('Tab');
+  }
+  throw new Error(`Tab does not lead to ${name}`);
+}
+
+test('by pointer: from the opening craft to an applied plan, and back', async ({ visit }) => {
+  const page = await visit();
+  const before = await savedText(page);
+  await planTab(page).click();
+  await upToDate(page);
+  expect(await planText(page)).toMatch(/^You do not need [\d.]+ g of lead\. .* does it\.$/);
+  const [today, then] = await figure(page, 'usefulLoad').allInnerTexts();
+  expect(Number.parseFloat(then!)).toBeGreaterThan(Number.parseFloat(today!));
+  await page.getByRole('button', { name: 'Apply the plan' }).click();
+  await expect.poll(() => verdictText(page, 'level')).toMatch(/level/);
+  await upToDate(page);
+  const after = JSON.parse(await savedText(page));
+  expect(after.parts.length).toBe(JSON.parse(before).parts.length + 3);
+  expect((await figure(page, 'deadBallast').allInnerTexts()).map(Number.parseFloat)).toEqual(
+    Array(2).fill(expect.closeTo(11.8, 1)),
+  );
+  await page.getByRole('button', { name: /^Undo/ }).click();
+  expect(await savedText(page)).toBe(before);
+});
+
+test('by keyboard: from the opening craft to an applied plan, and back', async ({ visit }) => {
+  const page = await visit();
+  const before = await savedText(page);
+  await page.getByRole('tab', { selected: true }).nth(1).focus();
+  for (let i = 0; i < 12 && !(await planTab(page).getAttribute('aria-selected'))?.includes('true'); i++) {
+    await page.keyboard.press('ArrowRight');
+  }
+  await upToDate(page);
+  await tabToButton(page, 'Apply the plan');
+  await page.keyboard.press('Enter');
+  await expect.poll(() => verdictText(page, 'level')).toMatch(/level/);
+  expect(await page.evaluate(() => document.activeElement?.textContent)).toBe('Apply the plan');
+  await page.keyboard.press('Control+z');
+  expect(await savedText(page)).toBe(before);
+});
+
+test('a craft for which there is no plan is made plannable by the program’s own advice', async ({
+  visit,
+}) => {
+  const page = await visit();
+  await openSample(page, 'cave-mapper');
+  await planTab(page).click();
+  const remedy = page.getByRole('listitem').filter({ hasText: /^Let Battery slide to/ });
+  await remedy.getByRole('button', { name: 'Do this' }).click();
+  await upToDate(page);
+  await page.getByRole('button', { name: 'Apply the plan' }).click();
+  await expect.poll(() => verdictText(page, 'level')).toMatch(/level/);
+  await upToDate(page);
+  expect(await figure(page, 'deadBallast').first().textContent()).toMatch(/^12\.9 g$/);
+  for (let i = 0; i < 2; i++) await page.keyboard.press('Control+z');
+  expect(await savedText(page)).toBe(sample('cave-mapper'));
+});
+
+test('the order of wishes is changed by buttons and by arrow keys, and the plan follows', async ({
+  visit,
+}) => {
+  const page = await visit();
+  await openSample(page, 'orchard-counter');
+  await planTab(page).click();
+  await upToDate(page);
+  await unfold(page, 'Wishes');
+  await page.getByRole('button', { name: 'Lower Most useful load' }).click();
+  expect(JSON.parse(await savedText(page)).wishes).toEqual(['fewestMoved', 'usefulLoad', 'leastWire']);
+  await upToDate(page);
+  await page.locator('[data-wish=usefulLoad]').focus();
+  await page.keyboard.press('ArrowUp');
+  await page.keyboard.press('ArrowDown');
+  await page.keyboard.press('ArrowDown');
+  expect(JSON.parse(await savedText(page)).wishes).toEqual(['fewestMoved', 'leastWire', 'usefulLoad']);
+  expect(await page.evaluate(() => document.activeElement?.getAttribute('data-wish'))).toBe('usefulLoad');
+  for (let i = 0; i < 4; i++) await page.keyboard.press('Control+z');
+  expect(await savedText(page)).toBe(sample('orchard-counter'));
+});
+
+test('while a part is dragged the plan follows before it is let go', async ({ visit }) => {
+  const page = await visit();
+  await openSample(page, 'library-scanner');
+  await planTab(page).click();
+  await upToDate(page);
+  const before = await planText(page);
+  const { x, y } = await partOnPage(page, sample('library-scanner'), 'gondola');
+  await page.mouse.move(x, y);
+  await page.mouse.down();
+  const seen = new Set<string | null>();
+  for (let i = 1; i <= 12; i++) {
+    await page.mouse.move(x - 6 * i, y);
+    await page.waitForTimeout(40);
+    seen.add(await planText(page));
+  }
+  expect(seen.size).toBeGreaterThan(2);
+  await page.keyboard.press('Escape');
+  await page.mouse.up();
+  await expect.poll(() => planText(page)).toBe(before);
+  expect(await savedText(page)).toBe(sample('library-scanner'));
+});
+
+test('plans are kept, compared, shown and dropped; a mistyped load gets a sentence', async ({ visit }) => {
+  const page = await visit();
+  await openSample(page, 'orchard-counter');
+  await planTab(page).click();
+  await upToDate(page);
+  await page.getByRole('button', { name: 'Keep this plan' }).click();
+  await unfold(page, 'Useful loads');
+  await page.locator('.load > summary', { hasText: 'rank 1' }).click();
+  const mass = page.getByRole('textbox', { name: 'Mass', exact: true });
+  await mass.fill('heavy');
+  await page.keyboard.press('Enter');
+  await page.getByText(/^Mass: .*“heavy”/).waitFor();
+  await mass.fill('150');
+  await page.keyboard.press('Enter');
+  await upToDate(page);
+  await page.getByRole('button', { name: 'Keep this plan' }).click();
+  expect(await page.locator('.kept-plans tbody th').allInnerTexts()).toHaveLength(2);
+  await page.getByRole('button', { name: 'Show plan 1' }).click();
+  await page.getByText('The drawing shows kept plan 1.').waitFor();
+  await page.getByRole('button', { name: 'Drop plan 1' }).click();
+  expect(await page.locator('.kept-plans tbody th').allInnerTexts()).toHaveLength(1);
+});
+
+test('loads are compared, and a curve is drawn along the keel', async ({ visit }) => {
+  const page = await visit();
+  await planTab(page).click();
+  await upToDate(page);
+  await unfold(page, 'What can I carry where');
+  await page.getByRole('combobox', { name: 'Curve' }).selectOption('keel');
+  await page.getByRole('progressbar', { name: 'Working out the curve' }).waitFor({ state: 'detached' });
+  await page.getByRole('button', { name: 'Compare the loads' }).click();
+  await page.getByRole('button', { name: 'Compare the loads again' }).waitFor();
+  expect(await page.locator('.carry-table tbody tr').count()).toBe(2);
+  expect(await page.getByText('Best set by the exact plan:').textContent()).toBe(
+    'Best set by the exact plan:',
+  );
+});
+
+test('the solver comes with the plan, not with the page; without a network it is there too', async ({
+  visit,
+}) => {
+  const page = await visit({ serviceWorkers: 'allow' });
+  const names = () =>
+    page.evaluate(() => performance.getEntriesByType('resource').map(({ name }) => name.split('/').at(-1)!));
+  expect((await names()).filter((name) => /planWorker|wasm/.test(name))).toEqual([]);
+  await page.evaluate(() => navigator.serviceWorker.ready);
+  await page.waitForFunction(async () => {
+    const [name] = await caches.keys();
+    const kept = name === undefined ? [] : await (await caches.open(name)).keys();
+    return kept.some(({ url }) => url.endsWith('.wasm'));
+  });
+  await page.context().setOffline(true);
+  await open(page);
+  await planTab(page).click();
+  await upToDate(page);
+});
+
+for (const colorScheme of ['light', 'dark'] as const) {
+  test(`no serious axe-core finding in the plan, ${colorScheme}`, async ({ visit }) => {
+    const page = await visit({ colorScheme });
+    await planTab(page).click();
+    await upToDate(page);
+    await page.getByRole('button', { name: 'Keep this plan' }).click();
+    await page.getByRole('button', { name: 'Show plan 1' }).click();
+    for (const summary of await page.locator('.foldable > summary').all()) await summary.click();
+    for (const summary of await page.locator('.load > summary').all()) await summary.click();
+    expect(await findings(page)).toEqual([]);
+    await openSample(page, 'cave-mapper');
+    await page.getByRole('button', { name: 'Do this' }).first().waitFor();
+    expect(await findings(page)).toEqual([]);
+  });
+}
+
+/** What axe-core 4.14 finds serious or critical, as "rule: where". */
+async function findings(page: Page): Promise<string[]> {
+  await page.addScriptTag({ path: axe });
+  const { violations } = await page.evaluate(() =>
+    (Reflect.get(window, 'axe') as { run(): Promise<AxeResults> }).run(),
+  );
+  return violations
+    .filter(({ impact }) => impact === 'serious' || impact === 'critical')
+    .flatMap(({ id, nodes }) => nodes.map(({ target }) => `${id}: ${target}`));
+}
