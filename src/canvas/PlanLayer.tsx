@@ -10,7 +10,11 @@ import { planTaken, planTexts } from './planTexts.ts';
 import { RailMarks } from './RailMarks.tsx';
 import { layTexts, TextMarks } from './TextMarks.tsx';
 import type { Rails } from './useRails.ts';
+import { useSame } from './useSame.ts';
 import type { SideScene } from './useSideScene.ts';
+
+/** Small things are compared by what they say, so that the layer is drawn again only when one changes. */
+const sameText = (a: unknown, b: unknown): boolean => JSON.stringify(a) === JSON.stringify(b);
 
 export interface PlanLayerProps {
   readonly scene: SideScene;
@@ -26,10 +30,11 @@ export function PlanLayer({ scene, selection, hover, rails, planned, labels }: P
   const { craft, view, palette, units, geometry, hardpoints } = scene;
   const { parts, loads, hardpoints: byId } = craft;
   // biome-ignore lint/correctness/useExhaustiveDependencies: of the craft only what hangs where matters
-  const gauges = useMemo(
+  const found = useMemo(
     () => gaugesOf(craft, planned, hardpoints, view, units),
     [parts, loads, byId, geometry.hull, planned, view, units],
   );
+  const gauges = useSame(found, sameText);
   const plan = useMemo(
     () =>
       planned && {
@@ -40,10 +45,12 @@ export function PlanLayer({ scene, selection, hover, rails, planned, labels }: P
       },
     [planned, geometry, view, units],
   );
-  const told = [...idsOf(selection, 'hardpoint'), ...(hover?.kind === 'hardpoint' ? [hover.id] : [])];
+  const chosen = idsOf(selection, 'hardpoint');
+  const told = useSame([...chosen, ...(hover?.kind === 'hardpoint' ? [hover.id] : [])]);
   const { rails: lines, open, knobs, lit } = rails;
   const frame = { left: 4, top: 4, right: view.width - 4, bottom: view.height - 28 };
-  const texts = layTexts(planTexts(scene, plan, lines), planTaken(scene, plan, knobs, labels), frame);
+  const taken = planTaken(scene, plan, knobs, labels);
+  const texts = useSame(layTexts(planTexts(scene, plan, lines), taken, frame), sameText);
   return (
     <Layer listening={false}>
       {lines.length > 0 && <RailMarks rails={lines} {...{ open, knobs, lit, view, palette, units }} />}

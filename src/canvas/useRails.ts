@@ -1,10 +1,21 @@
 /** Rails in the side view: which are there, which stop is under the pointer, and taking it. */
 import { useMemo, useState } from 'react';
 import { idsOf, type Selection } from '../edit/selection.ts';
-import { isOpen, type Knob, knobAt, knobKey, knobsOfAll, type Rail, railsOf } from '../scene/rails.ts';
+import {
+  isOpen,
+  type Knob,
+  knobAt,
+  knobKey,
+  knobsOfAll,
+  type Rail,
+  railsOf,
+  sameKnob,
+  sameRail,
+} from '../scene/rails.ts';
 import { dragSlideEnd } from './gestures/dragSlideEnd.ts';
 import type { Ground, Hand, Scene } from './gestures/gesture.ts';
 import type { Take } from './gestures/take.ts';
+import { useSame } from './useSame.ts';
 
 export interface Rails {
   readonly rails: readonly Rail[];
@@ -24,11 +35,12 @@ export function useRails(scene: Scene, selection: Selection): Rails {
   const { parts, loads } = craft;
   const { hull } = geometry;
   // biome-ignore lint/correctness/useExhaustiveDependencies: of the craft only parts and loads have slides
-  const rails = useMemo(() => railsOf(craft, hull), [parts, loads, hull]);
+  const found = useMemo(() => railsOf(craft, hull), [parts, loads, hull]);
+  const rails = useSame(found, sameRail);
   const [lit, setLit] = useState<string | null>(null);
   const selected = idsOf(selection, 'part');
-  const open = rails.filter((rail) => isOpen(rail, craft, selected));
-  const knobs = knobsOfAll(open, figures, view.scale);
+  const open = useSame(rails.filter((rail) => isOpen(rail, craft, selected)));
+  const knobs = useSame(knobsOfAll(open, figures, view.scale), sameKnob);
   const light = (knob: Knob | null) => setLit(knob && knobKey(knob));
   return {
     rails,

@@ -39,6 +39,21 @@ export const railsOf = (craft: Craft, hull: Hull): Rail[] =>
     return { ...rest, line: flat, out: middle.z > 1e-9 ? 1 : -1 };
   });
 
+/** Whether two look the same and move the same thing. */
+export const sameRail = (a: Rail, b: Rail): boolean =>
+  a.name === b.name &&
+  a.place === b.place &&
+  a.slide.from === b.slide.from &&
+  a.slide.to === b.slide.to &&
+  JSON.stringify(a.owner) === JSON.stringify(b.owner) &&
+  a.line.length === b.line.length &&
+  a.line.every((point, i) => samePoint(point, b.line[i]!));
+
+export const sameKnob = (a: Knob, b: Knob): boolean =>
+  a.rail === b.rail && a.end === b.end && samePoint(a.at, b.at);
+
+const samePoint = (a: PlanePoint, b: PlanePoint): boolean => a.u === b.u && a.z === b.z;
+
 /** The part that stands for the rail in the drawing: the part itself, or the load aboard. */
 export const partOf = ({ owner }: Pick<Rail, 'owner'>): string => owner.id;
 

@@ -3,7 +3,16 @@ import { keyed } from '../../src/craft/craft.ts';
 import type { Load } from '../../src/craft/planningSchema.ts';
 import { sideFigure } from '../../src/scene/figure.ts';
 import { FigureCache } from '../../src/scene/keepSame.ts';
-import { isOpen, knobAt, knobKey, knobsOf, knobsOfAll, type Rail, railsOf } from '../../src/scene/rails.ts';
+import {
+  isOpen,
+  knobAt,
+  knobKey,
+  knobsOf,
+  knobsOfAll,
+  type Rail,
+  railsOf,
+  sameRail,
+} from '../../src/scene/rails.ts';
 import { toScreen } from '../../src/scene/view.ts';
 import { craft as fixture, geometry, PARTS, VIEW } from './fixture.ts';
 
@@ -68,4 +77,12 @@ test('stops can be taken of what is selected; of a load ashore while no part is'
   expect(isOpen(of('part'), craft, ['battery'])).toBe(true);
   expect(isOpen(of('load'), craft, [])).toBe(true);
   expect(isOpen(of('load'), craft, ['battery'])).toBe(false);
+});
+
+test('a rail found again is the same until its slide, its place or the hull changes', () => {
+  expect(railsOf(craft, hull).every((rail, i) => sameRail(rail, rails[i]!))).toBe(true);
+  const other = (changed: typeof craft) => railsOf(changed, geometry(changed).hull)[0]!;
+  expect(sameRail(of('part'), other(sliding({ from: 0.9, to: 1.61 })))).toBe(false);
+  const wider = { ...craft.hull, shape: { kind: 'spheroid', length: 3, diameter: 1.1 } } as const;
+  expect(sameRail(of('part'), other({ ...craft, hull: wider }))).toBe(false);
 });
