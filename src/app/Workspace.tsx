@@ -15,7 +15,7 @@ interface WorkspaceProps {
   readonly palette: Palette;
 }
 
-const COLUMN = { least: 260, usual: innerWidth < 1200 ? 340 : 384 };
+const COLUMN = { least: 260, usual: innerWidth < 1200 ? 340 : 362 };
 const LEDGER = {
   least: 96,
   usual: Math.round(innerHeight * (matchMedia('(pointer: coarse)').matches ? 0.25 : 0.23)),
