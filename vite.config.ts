@@ -37,6 +37,8 @@ export default defineConfig({
   // A port of its own: the work is kept by address, and other programs are served on the usual one.
   preview: { host: '127.0.0.1', port: 4793 },
   server: { host: '127.0.0.1' },
+  // HiGHS asks for a module of Node when it runs there, so the planning thread is in more than one piece.
+  worker: { format: 'es' },
   test: {
     root: import.meta.dirname,
     testTimeout: 30_000,

@@ -8,6 +8,7 @@ import { hullOf } from '../../src/physics/hull/hullOf.ts';
 import { assess } from '../../src/report/assess.ts';
 import { craftOf } from './craftOf.ts';
 import { benchPage } from './page.ts';
+import { benchPlan } from './plan.ts';
 import { benchShapes } from './shapes.ts';
 
 const quantile = (sorted: readonly number[], share: number): string =>
@@ -74,4 +75,5 @@ console.log(
 benchRecompute(40, '0.3 ms');
 benchRecompute(500, '3 ms');
 for (const [name, shape] of Object.entries(benchShapes)) benchHull(name, shape);
+await benchPlan(print);
 await benchPage(print);

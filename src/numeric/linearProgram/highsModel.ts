@@ -7,7 +7,6 @@ const TOLERANCES = {
   primal_feasibility_tolerance: 1e-9,
   dual_feasibility_tolerance: 1e-9,
   mip_feasibility_tolerance: 1e-8,
-  mip_abs_gap: 1e-6,
 } as const;
 
 export class HighsModel {

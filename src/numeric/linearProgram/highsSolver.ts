@@ -105,7 +105,8 @@ class HighsLiveModel implements LiveModel {
     const { model } = this.#inside;
     this.#inside.hold(problem);
     const integers = hasIntegers(problem);
-    model.options.set({ time_limit: options.timeLimit ?? 60, mip_rel_gap: options.gap ?? 0 });
+    const { timeLimit = 60, gap = 0, absoluteGap = 1e-6 } = options;
+    model.options.set({ time_limit: timeLimit, mip_rel_gap: gap, mip_abs_gap: absoluteGap });
     model.zeroAllClocks();
     if (integers && options.start) model.setSolution({ colValue: options.start });
     return model.run(callbacksOf(this.#highs, options)).modelStatus;

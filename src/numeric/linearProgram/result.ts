@@ -47,6 +47,8 @@ export interface SolveOptions {
   readonly timeLimit?: number;
   /** Relative gap at which a solution with whole numbers counts as the best. Default 0: proven. */
   readonly gap?: number;
+  /** The same as a difference, in the objective's own unit. Default 1e-6. */
+  readonly absoluteGap?: number;
   /** Told now and then while whole numbers are searched for. */
   readonly onProgress?: (progress: Progress) => void;
   /** Asked now and then; true stops with the best so far. */

@@ -123,5 +123,5 @@ function isFull(setting: Setting, point: Point, id: string): boolean {
     return option !== null && choice.options[option]!.hardpoint === id ? loadMass(choice) : 0;
   });
   const hung = loads.reduce((sum, mass) => sum + mass, point.weights[h]!);
-  return hung > setting.hardpoints[h]!.limit - 1e-7;
+  return hung > setting.hardpoints[h]!.room - 1e-7;
 }

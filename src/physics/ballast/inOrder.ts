@@ -10,13 +10,13 @@ import type {
   SolveOptions,
   Stopped,
 } from '../../numeric/linearProgram/result.ts';
-import type { Stage } from './stages.ts';
+import type { Stage, StageKey } from './stages.ts';
 
 export interface Ordered {
   /** The first objective's answer: what is proven of it. */
   readonly first: Optimal | Stopped;
   readonly values: readonly number[];
-  /** Whether every objective was carried to its proof. */
+  /** Whether every objective was carried to its proof; wishes to the tenth of a gram. */
   readonly proven: boolean;
 }
 
@@ -52,7 +52,7 @@ export function solveInOrder(
       caps = caps.with(k, worth(stage, values) + SLACK);
       continue;
     }
-    const result = model.solve(posed, stageOptions(options, k, values));
+    const result = model.solve(posed, stageOptions(options, stage.key, k, values));
     if (!first && (result.status === 'optimal' || (result.status === 'stopped' && result.values)))
       first = result;
     else if (!first) return result as Exclude<LinearResult, Optimal>;
@@ -66,16 +66,27 @@ export function solveInOrder(
 const needsWhole = (asked: boolean, moved: readonly number[], x: readonly number[]): boolean =>
   asked && moved.some((column) => x[column]! > 1e-9 && x[column]! < 1 - 1e-9);
 
-/** Only the first objective stops at a gap and tells of its progress; what comes after only breaks ties. */
+/** Wishes are carried to this, in grams, parts or metres: to prove a sum of loads to the microgram can take all day. */
+const WISH_GAP: Record<StageKey, number> = {
+  trial: 1e-3,
+  ballast: 1e-6,
+  usefulLoad: 0.1,
+  fewestMoved: 1e-6,
+  leastWire: 0.1,
+  distance: 1e-3,
+};
+
+/** Only the first objective stops at a gap that is asked for, and tells of its progress. */
 function stageOptions(
   { deadline, start: _, ...options }: OrderOptions,
+  key: StageKey,
   k: number,
   values: readonly number[],
 ): SolveOptions {
   const timeLimit = Math.max(0.01, (deadline - Date.now()) / 1000);
   const { shouldStop } = options;
   const rest = k === 0 ? options : shouldStop ? { shouldStop } : {};
-  return { ...rest, timeLimit, ...(values.length > 0 ? { start: values } : {}) };
+  return { ...rest, timeLimit, absoluteGap: WISH_GAP[key], ...(values.length > 0 ? { start: values } : {}) };
 }
 
 function posedFor(

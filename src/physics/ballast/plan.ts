@@ -63,7 +63,7 @@ export interface PlanFound {
   readonly bound: number;
   /** (dead ballast − bound) / dead ballast; 0 when proven. */
   readonly gap: number;
-  /** Whether the wishes and ties, too, were carried to their proof. */
+  /** Whether the wishes and ties, too, were carried to their proof, to 0.1 g, one part and 1 mm. */
   readonly wishesProven: boolean;
   /** What the program claims of the craft less what the statics say of it. */
   readonly disagreement: { readonly pitch: number; readonly heel: number; readonly mass: number };

@@ -30,8 +30,9 @@ export interface WeightSpot {
   readonly id: string;
   readonly name: string;
   readonly at: Vec3;
-  /** kg */
+  /** Greatest mass there, and what of it is left beside ballast and loads that no plan may touch, kg. */
   readonly limit: number;
+  readonly room: number;
   readonly fill: Fill;
 }
 
@@ -73,6 +74,7 @@ export function settingOf(craft: Craft, robust: boolean): Outcome<Setting> {
       name,
       at: positionOf(place, hull),
       limit,
+      room: Math.max(0, limit - heldAt(craft, place)),
       fill,
     })),
     slides: slidingParts(craft).map((part) => ({
@@ -92,6 +94,22 @@ export function settingOf(craft: Craft, robust: boolean): Outcome<Setting> {
 export const hasChoices = ({ hardpoints, sizes, loads }: Setting): boolean =>
   (sizes.length > 0 && hardpoints.some(({ fill }) => fill === 'pieces')) ||
   loads.some(({ load, options }) => !load.must || options.length > 1);
+
+/** Ballast and loads at a place that no plan may touch, kg. */
+function heldAt(craft: Craft, place: Place): number {
+  const spot = JSON.stringify(place);
+  const held = listed(craft.parts).filter(
+    (part) =>
+      (part.kind === 'ballast'
+        ? part.locked
+        : part.kind === 'load' && (part.locked || !craft.loads.byId[part.id])) &&
+      JSON.stringify(part.place) === spot,
+  );
+  return held.reduce((sum, part) => sum + massOf(part), 0);
+}
+
+/** All its pieces, kg. */
+const massOf = ({ mass, copies }: Part): number => mass * (copies.kind === 'pair' ? 2 : copies.count);
 
 function loadChoice(craft: Craft, load: Load): LoadChoice {
   const options = load.options.map((option) => siteOf(craft, option));
@@ -126,11 +144,7 @@ export const partAt = (
   );
 
 /** Useful load that it counts as, kg: all its pieces. */
-export function loadMass({ load, aboard }: LoadChoice): number {
-  if (!aboard) return load.mass;
-  const count = aboard.copies.kind === 'pair' ? 2 : aboard.copies.count;
-  return aboard.mass * count;
-}
+export const loadMass = ({ load, aboard }: LoadChoice): number => (aboard ? massOf(aboard) : load.mass);
 
 /** Ballast that no plan may touch: locked, or hanging elsewhere than at a hardpoint. kg */
 export function fixedBallast(craft: Craft): number {
@@ -139,6 +153,4 @@ export function fixedBallast(craft: Craft): number {
 }
 
 export const ballastMass = (parts: readonly Part[]): number =>
-  parts
-    .filter(({ kind }) => kind === 'ballast')
-    .reduce((sum, { mass, copies }) => sum + mass * (copies.kind === 'pair' ? 2 : copies.count), 0);
+  parts.filter(({ kind }) => kind === 'ballast').reduce((sum, part) => sum + massOf(part), 0);

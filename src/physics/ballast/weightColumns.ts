@@ -13,18 +13,18 @@ export interface WeightColumns {
 }
 
 export const weightColumns = (draft: Draft, setting: Setting, linear: Linear): WeightColumns => ({
-  weights: setting.hardpoints.map(({ id, limit, fill }, h) => {
+  weights: setting.hardpoints.map(({ id, room, fill }, h) => {
     if (fill === 'pieces') return null;
-    const column = draft.column(`ballast at ${id}`, 0, limit * GRAMS);
+    const column = draft.column(`ballast at ${id}`, 0, room * GRAMS);
     draft.adds(column, times(linear.weights[h]!, 1 / GRAMS));
     return column;
   }),
-  counts: setting.hardpoints.map(({ id, limit, fill }, h) =>
+  counts: setting.hardpoints.map(({ id, room, fill }, h) =>
     fill === 'continuous'
       ? []
       : setting.sizes.map(({ mass, count }) => {
-          // A piece of the limit's own mass fits, whatever the rounding.
-          const most = Math.min(count, Math.floor(limit / mass + 1e-9));
+          // A piece that just fills the room fits, whatever the rounding.
+          const most = Math.min(count, Math.floor(room / mass + 1e-9));
           const column = draft.column(`pieces of ${mass} kg at ${id}`, 0, most, true);
           draft.adds(column, times(linear.weights[h]!, mass));
           return column;
@@ -45,13 +45,13 @@ export function holdRows(
   columns: WeightColumns,
   choices: readonly (readonly number[])[],
 ): void {
-  setting.hardpoints.forEach(({ id, limit }, h) => {
+  setting.hardpoints.forEach(({ id, room }, h) => {
     const loads = setting.loads.flatMap((choice, l) =>
       choice.options.flatMap(({ hardpoint }, k): Term[] =>
         hardpoint === id ? [[choices[l]![k]!, loadMass(choice) * GRAMS]] : [],
       ),
     );
-    draft.atMost(`limit of ${id}`, [...ballastAt(setting, columns, h), ...loads], limit * GRAMS);
+    draft.atMost(`limit of ${id}`, [...ballastAt(setting, columns, h), ...loads], room * GRAMS);
   });
 }
 

@@ -42,12 +42,14 @@ test('1,000 damaged crafts', () => {
   const random = seeded(77);
   const texts = [
     serialize(base),
-    ...['museum-atrium', 'warehouse-stock', 'school-cylinder', 'worked-example'].map(sampleText),
+    ...['planetarium-moon', 'library-scanner', 'warehouse-stock', 'cave-mapper', 'worked-example'].map(
+      sampleText,
+    ),
   ];
   const seen = new Map<string, number>();
   let planned = 0;
   for (let i = 0; planned < 1000; i++) {
-    const parsed = parseJson(damagedJson(random, texts[i % 2 === 0 ? 0 : i % texts.length]!));
+    const parsed = parseJson(damagedJson(random, texts[i % texts.length]!));
     if (!parsed.ok) continue;
     planned++;
     const plan = planOf(parsed.craft, solver, {
@@ -60,7 +62,7 @@ test('1,000 damaged crafts', () => {
   }
   expect(seen.get('optimal')).toBeGreaterThan(200);
   expect(seen.get('infeasible')).toBeGreaterThan(200);
-});
+}, 120_000);
 
 const eachPart = (change: object): Craft => ({
   ...base,

@@ -6,7 +6,9 @@ import { loadHighs } from '../../../src/numeric/linearProgram/highsSolver.ts';
 import { levellingWithin } from '../../../src/physics/balance/counterweight.ts';
 import { type Plan, type PlanFound, planOf } from '../../../src/physics/ballast/plan.ts';
 import { craftStateOf } from '../../../src/physics/craftState.ts';
+import { partOf } from '../../edit/craftFixture.ts';
 import { testEdit } from '../../edit/testEdit.ts';
+import { sampleCraft } from '../../samples/readSamples.ts';
 import { deadBallast, missedBy } from './judge.ts';
 import { randomCraft } from './randomCraft.ts';
 
@@ -107,4 +109,30 @@ test('carried out as an edit it gives the very craft, and planning that again ch
     }),
     { numRuns: 60, endOnFailure: true, seed: 20 },
   );
+});
+
+test('ballast and loads that no plan may touch take up the room of their hardpoint, and count as dead ballast', () => {
+  const craft = sampleCraft('library-scanner');
+  const { place } = craft.hardpoints.byId.nose!;
+  const weight = partOf('weight', { kind: 'ballast', mass: 0.06, massTolerance: 0, locked: true, place });
+  const laden: Craft = {
+    ...craft,
+    parts: { byId: { ...craft.parts.byId, weight }, order: [...craft.parts.order, 'weight'] },
+    hardpoints: {
+      ...craft.hardpoints,
+      byId: { ...craft.hardpoints.byId, nose: { ...craft.hardpoints.byId.nose!, limit: 0.13 } },
+    },
+  };
+  const [free, held] = [found(craft), found(laden)];
+  expect(held.deadBallastFixed).toBe(0.06);
+  expect(held.deadBallast).toBeCloseTo(free.deadBallast, 6);
+  expect(held.weights[0]).toMatchObject({ hardpoint: 'nose' });
+  expect(held.weights[0]!.mass).toBeLessThanOrEqual(0.07 + 1e-9);
+  expect(held.weights[0]!.mass).toBeCloseTo(free.weights[0]!.mass - 0.06, 6);
+  const full = { ...laden.hardpoints.byId.nose!, limit: 0.1 };
+  const crowded = {
+    ...laden,
+    hardpoints: { ...laden.hardpoints, byId: { ...laden.hardpoints.byId, nose: full } },
+  };
+  expect(plan(crowded).status).toBe('infeasible');
 });
