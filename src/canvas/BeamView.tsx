@@ -35,7 +35,7 @@ function thingOf({ kind, id }: PlacedBar): Selectable | null {
 }
 
 function BeamFrame(props: SharedProps & DrawnProps) {
-  const { session, selection, palette, viewState, geometry, units, craft, assessment } = props;
+  const { selection, palette, viewState, geometry, units, craft, assessment } = props;
   const frame = useRef<HTMLDivElement>(null);
   const size = useSize(frame);
   const [hovered, setHovered] = useState<string | null>(null);
@@ -58,8 +58,9 @@ function BeamFrame(props: SharedProps & DrawnProps) {
     lines: [],
     hardpoints: [],
     support: null,
+    wireHandles: [],
   };
-  const ground = useGround(session, scene, useOverlay(), viewState);
+  const ground = useGround(props, scene, useOverlay(), viewState);
 
   const under = ({ x, y, touch }: Hand) => (onBeam(y, size) ? barAt(page, x, touch ? TOUCH_SLOP : 0) : null);
   const take: Take = (on, down) => {

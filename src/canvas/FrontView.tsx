@@ -5,17 +5,19 @@ import { frontFigure } from '../scene/figure.ts';
 import { fromAstern, hardpointPoints, wireLines } from '../scene/flatten.ts';
 import { sameGrip } from '../scene/grip.ts';
 import { FigureCache } from '../scene/keepSame.ts';
+import { frontMarks } from '../scene/marks.ts';
 import { onSection, sectionOutline, widestStation } from '../scene/outline.ts';
 import { frontReadout } from '../scene/readout.ts';
 import type { Geometry } from '../scene/subject.ts';
 import type { PlanePoint, View } from '../scene/view.ts';
 import { frontInWords } from '../scene/words.ts';
-import { BESIDE, Bubble } from './Bubble.tsx';
 import { Frame } from './Frame.tsx';
 import { FrontDrawing } from './FrontDrawing.tsx';
 import type { Hand } from './gestures/gesture.ts';
 import { gripUnder, type Take, takeInFront } from './gestures/take.ts';
 import { keysOf } from './keys.ts';
+import { Notes } from './Notes.tsx';
+import { inSightOf, thingUnder } from './notesOf.ts';
 import { cursorOf } from './overlay.ts';
 import type { CanvasProps, DrawnProps } from './props.ts';
 import { Unformed } from './Unformed.tsx';
@@ -73,23 +75,23 @@ function FrontFrame(props: CanvasProps & DrawnProps) {
     lines: wireLines(geometry.wires, fromAstern),
     hardpoints: hardpointPoints(geometry, fromAstern),
     support: null,
+    wireHandles: [],
   };
-  const ground = useGround(session, scene, overlays, viewState);
+  const ground = useGround(props, scene, overlays, viewState);
   const { height, breadth } = geometry.hull;
   useFit(viewState, view, `${tilted} ${height} ${breadth}`, busy, () => frontPoints(geometry), MARGINS);
   const outlines = useOutlines(geometry, idsOf(selection, 'part'));
 
   const hover = (hand: Hand | null) => {
-    const next = hand && gripUnder(ground, hand, []);
+    const next = hand && gripUnder(ground, hand);
     const taken = next?.kind === 'hull' ? null : next;
-    if (!sameGrip(taken, overlay.hover)) show({ hover: taken });
+    if (!sameGrip(taken, overlay.hover)) show({ hover: taken, hoverAt: hand });
   };
   const take: Take = (on, hand) => {
     show({ hint: null, hover: null });
     return takeInFront(on, hand);
   };
   const gestures = useGestures(frame, ground, take, hover);
-  const lines = overlay.held ? frontReadout(scene, overlay.held) : overlay.hint ? [overlay.hint] : [];
   return (
     <Frame
       frame={frame}
@@ -107,9 +109,15 @@ function FrontFrame(props: CanvasProps & DrawnProps) {
       leave={() => hover(null)}
     >
       <FrontDrawing scene={scene} selection={selection} overlay={overlay} {...outlines} />
-      {lines.length > 0 && (
-        <Bubble at={{ x: -BESIDE, y: size.height }} lines={lines} size={size} palette={palette} width={220} />
-      )}
+      <Notes
+        hint={overlay.hint}
+        readout={overlay.held && frontReadout(scene, overlay.held)}
+        under={thingUnder(scene, overlay)}
+        inSight={inSightOf(scene, frontMarks(view, geometry), overlay.held)}
+        size={size}
+        palette={palette}
+        most={220}
+      />
     </Frame>
   );
 }

@@ -4,9 +4,10 @@ import { Shape } from 'react-konva/es/ReactKonvaCore.js';
 import type { Craft } from '../craft/craft.ts';
 import type { Figure } from '../scene/figure.ts';
 import { keepSame } from '../scene/keepSame.ts';
-import { type Label, MOST_LABELS, placeLabels, type Rect, type Wanted } from '../scene/labels.ts';
+import { type Label, MOST_LABELS, placeLabels, type Wanted } from '../scene/labels.ts';
 import type { Palette } from '../scene/palette.ts';
-import { toScreen, type View } from '../scene/view.ts';
+import { type Rect, screenBox } from '../scene/rect.ts';
+import type { View } from '../scene/view.ts';
 import { fontOf, textWidth, writeOn } from './paint.ts';
 
 const SIZE = 12;
@@ -26,18 +27,6 @@ export function wantedLabels(
       const text = name || kind;
       return { id: figure.part, text, width: textWidth(text, fontOf(SIZE)), box: screenBox(figure, view) };
     });
-}
-
-function screenBox({ box: { left, right, bottom, top } }: Figure, view: View): Rect {
-  const corners = [
-    { u: left, z: bottom },
-    { u: right, z: bottom },
-    { u: right, z: top },
-    { u: left, z: top },
-  ].map((corner) => toScreen(view, corner));
-  const xs = corners.map(({ x }) => x);
-  const ys = corners.map(({ y }) => y);
-  return { left: Math.min(...xs), right: Math.max(...xs), top: Math.min(...ys), bottom: Math.max(...ys) };
 }
 
 const sameRect = (a: Rect, b: Rect): boolean =>

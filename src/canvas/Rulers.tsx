@@ -15,7 +15,8 @@ export interface RulersProps {
   readonly units: UnitSystem;
 }
 
-const FOOT = 24;
+/** Height of the strip along the foot, px. */
+export const FOOT = 24;
 const LARGE = 9;
 const SMALL = 4;
 const LABEL = 18;

@@ -2,9 +2,9 @@
 import { useCallback } from 'react';
 import { Group, Layer, Stage } from 'react-konva/es/ReactKonvaCore.js';
 import { idsOf, isSelected, type Selection } from '../edit/selection.ts';
-import { handlesOf, wireEnds } from '../scene/grip.ts';
-import type { Rect } from '../scene/labels.ts';
-import { type BalanceMarks, sideMarks } from '../scene/marks.ts';
+import { handlesOf } from '../scene/grip.ts';
+import { type BalanceMarks, marksTaken, sideMarks } from '../scene/marks.ts';
+import { around, type Rect } from '../scene/rect.ts';
 import { type ScreenPoint, toScreen, toWorld, type View } from '../scene/view.ts';
 import { leadWords, pitchAngle } from '../scene/words.ts';
 import { BalanceMark } from './BalanceMark.tsx';
@@ -82,7 +82,7 @@ export function SideDrawing({ scene, selection, overlay, faded }: SideDrawingPro
         <BalanceMark marks={marks} palette={palette} angle={pitchAngle(scene)} />
         <HandMarks
           handles={handles}
-          wireEnds={endsShown(scene, selectedWires)}
+          wireEnds={endsShown(scene)}
           guide={guideShown(scene, overlay)}
           marquee={overlay.marquee}
           palette={palette}
@@ -92,23 +92,15 @@ export function SideDrawing({ scene, selection, overlay, faded }: SideDrawingPro
   );
 }
 
-const around = ({ x, y }: ScreenPoint, reach: number): Rect => ({
-  left: x - reach,
-  right: x + reach,
-  top: y - reach,
-  bottom: y + reach,
-});
-
 type Points = Omit<PointMarksProps, 'palette'>;
 
 /** What labels keep clear of: the marks of balance with their names, handles, the ghost of the lead, the support, the eyelets. */
 const takenBy = (
-  { ring, bob, lean }: BalanceMarks,
+  marks: BalanceMarks,
   { lead, support, eyelets }: Points,
   handles: readonly Handle[],
 ): Rect[] => [
-  { ...around(ring, 14), left: ring.x - 38, top: ring.y - 20 },
-  ...(bob ? [{ ...around(bob, 18), [lean > 0 ? 'right' : 'left']: bob.x + (lean > 0 ? 42 : -42) }] : []),
+  ...marksTaken(marks),
   ...handles.map(({ at }) => around(at, 14)),
   ...(lead ? [{ left: lead.at.x - 48, right: lead.at.x + 48, top: lead.at.y, bottom: lead.at.y + 54 }] : []),
   ...(support
@@ -147,11 +139,8 @@ function handlesShown({ geometry, view }: SideScene, { held, hover }: Overlay): 
   ];
 }
 
-const endsShown = ({ lines, view }: SideScene, wires: readonly string[]): ScreenPoint[] =>
-  wires.flatMap((id) => {
-    const ends = wireEnds(lines, id);
-    return ends ? [toScreen(view, ends.from), toScreen(view, ends.to)] : [];
-  });
+const endsShown = ({ wireHandles, view }: SideScene): HandMarksProps['wireEnds'] =>
+  wireHandles.map(({ at, end }) => ({ at: toScreen(view, at), end: toScreen(view, end) }));
 
 /** Across the whole view at the station snapped to. */
 function guideShown({ view, geometry }: SideScene, { guide }: Overlay): HandMarksProps['guide'] {

@@ -1,18 +1,20 @@
 /** The side view: hull, parts, wire runs, rulers and marks of balance, and everything a hand does there. */
 import { useMemo, useRef } from 'react';
 import { idsOf } from '../edit/selection.ts';
-import { fromSide } from '../scene/flatten.ts';
 import { sameGrip } from '../scene/grip.ts';
+import { sideMarks } from '../scene/marks.ts';
 import { sideReadout } from '../scene/readout.ts';
-import { toScreen, type View } from '../scene/view.ts';
+import type { View } from '../scene/view.ts';
 import { selectionInWords, sideInWords } from '../scene/words.ts';
-import { Bubble } from './Bubble.tsx';
 import { Frame } from './Frame.tsx';
 import type { Hand } from './gestures/gesture.ts';
 import { gripUnder, takeInSide } from './gestures/take.ts';
 import { keysOf } from './keys.ts';
+import { Notes } from './Notes.tsx';
+import { inSightOf, thingUnder } from './notesOf.ts';
 import { cursorOf } from './overlay.ts';
 import type { DrawnProps, SharedProps } from './props.ts';
+import { FOOT } from './Rulers.tsx';
 import { SideDrawing } from './SideDrawing.tsx';
 import { Unformed } from './Unformed.tsx';
 import { sidePoints, useFit } from './useFit.ts';
@@ -34,7 +36,7 @@ export function SideView(props: SharedProps) {
 }
 
 function SideFrame(props: SharedProps & DrawnProps & { stale: string | null }) {
-  const { session, selection, palette, viewState, geometry, tilted, stale } = props;
+  const { selection, palette, viewState, geometry, tilted, stale } = props;
   const frame = useRef<HTMLDivElement>(null);
   const size = useSize(frame);
   const overlays = useOverlay();
@@ -48,13 +50,13 @@ function SideFrame(props: SharedProps & DrawnProps & { stale: string | null }) {
     [scale, originX, originY, tilt, pivot, size],
   );
   const scene = useSideScene(props, view, overlay);
-  const ground = useGround(session, scene, overlays, viewState);
+  const ground = useGround(props, scene, overlays, viewState);
   const { length, height } = geometry.hull;
   useFit(viewState, view, `${tilted} ${length} ${height}`, busy, () => sidePoints(geometry), MARGINS);
 
   const hover = (hand: Hand | null) => {
-    const next = hand && gripUnder(ground, hand, selection);
-    if (!sameGrip(next, overlay.hover)) show({ hover: next });
+    const next = hand && gripUnder(ground, hand);
+    if (!sameGrip(next, overlay.hover)) show({ hover: next, hoverAt: hand });
   };
   const take: typeof takeInSide = (on, hand) => {
     show({ hint: null, hover: null });
@@ -64,7 +66,7 @@ function SideFrame(props: SharedProps & DrawnProps & { stale: string | null }) {
   const onDoubleClick = () => {
     if (!overlay.hover) ground.fit();
   };
-  const readout = overlay.held && sideReadout(scene, overlay.held, fromSide, view.scale);
+  const readout = overlay.held && sideReadout(scene, overlay.held);
   const hint = overlay.hint ?? stale;
   return (
     <Frame
@@ -79,10 +81,14 @@ function SideFrame(props: SharedProps & DrawnProps & { stale: string | null }) {
       leave={() => hover(null)}
     >
       <SideDrawing scene={scene} selection={selection} overlay={overlay} faded={stale !== null} />
-      {readout && (
-        <Bubble at={toScreen(view, readout.at)} lines={readout.lines} size={size} palette={palette} />
-      )}
-      {hint && <Bubble at={{ x: 0, y: 0 }} lines={[hint]} size={size} palette={palette} width={420} />}
+      <Notes
+        hint={hint}
+        readout={readout}
+        under={thingUnder(scene, overlay)}
+        inSight={inSightOf(scene, sideMarks(view, geometry), overlay.held)}
+        size={{ width: size.width, height: size.height - FOOT }}
+        palette={palette}
+      />
     </Frame>
   );
 }

@@ -1,10 +1,5 @@
 /** Names beside parts, placed greedily so that none covers another. px. */
-export interface Rect {
-  readonly left: number;
-  readonly top: number;
-  readonly right: number;
-  readonly bottom: number;
-}
+import { inside, overlaps, type Rect } from './rect.ts';
 
 export interface Wanted {
   readonly id: string;
@@ -26,12 +21,6 @@ export const LABEL_HEIGHT = 15;
 const GAP = 4;
 /** Beyond so many, only what is selected or under the pointer is named. */
 export const MOST_LABELS = 40;
-
-const overlaps = (a: Rect, b: Rect): boolean =>
-  a.left < b.right && b.left < a.right && a.top < b.bottom && b.top < a.bottom;
-
-const inside = (a: Rect, frame: Rect): boolean =>
-  a.left >= frame.left && a.right <= frame.right && a.top >= frame.top && a.bottom <= frame.bottom;
 
 /** Below, above, aft, forward of what it names; then the same a line farther off. */
 function candidates({ box, width }: Wanted): Rect[] {

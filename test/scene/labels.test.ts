@@ -1,6 +1,7 @@
 import fc from 'fast-check';
 import { expect, test } from 'vitest';
-import { LABEL_HEIGHT, placeLabels, type Rect } from '../../src/scene/labels.ts';
+import { LABEL_HEIGHT, placeLabels } from '../../src/scene/labels.ts';
+import type { Rect } from '../../src/scene/rect.ts';
 
 const FRAME: Rect = { left: 0, top: 0, right: 800, bottom: 400 };
 const whole = (min: number, max: number) => fc.integer({ min, max });
