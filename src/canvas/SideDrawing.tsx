@@ -1,10 +1,11 @@
 /** The side view on its three layers: the ground that rarely changes, what stands still on it, and what moves. */
-import { useCallback } from 'react';
+import { useCallback, useMemo } from 'react';
 import { Group, Layer, Stage } from 'react-konva/es/ReactKonvaCore.js';
 import { idsOf, isSelected, type Selection } from '../edit/selection.ts';
 import { handlesOf } from '../scene/grip.ts';
 import { type BalanceMarks, marksTaken, sideMarks } from '../scene/marks.ts';
-import { around, type Rect } from '../scene/rect.ts';
+import { around, type Rect, screenBox } from '../scene/rect.ts';
+import { axisMarks, tapeMarks, textsTaken } from '../scene/tapeMarks.ts';
 import { type ScreenPoint, toScreen, toWorld, type View } from '../scene/view.ts';
 import { leadWords, pitchAngle } from '../scene/words.ts';
 import { BalanceMark } from './BalanceMark.tsx';
@@ -15,7 +16,7 @@ import type { Overlay } from './overlay.ts';
 import { PartMarks } from './PartMarks.tsx';
 import { PointMarks, type PointMarksProps } from './PointMarks.tsx';
 import { worldTransform } from './paint.ts';
-import { FootRuler, HullRulers } from './Rulers.tsx';
+import { FOOT, FootRuler, footNameTaken, HullRulers } from './Rulers.tsx';
 import type { SideScene } from './useSideScene.ts';
 import { WireMarks } from './WireMarks.tsx';
 
@@ -33,13 +34,24 @@ export function SideDrawing({ scene, selection, overlay, faded }: SideDrawingPro
   const world = worldTransform(view);
   const marks = sideMarks(view, geometry);
   const { hover } = overlay;
-  const named = new Set([...idsOf(selection, 'part'), ...(hover?.kind === 'part' ? [hover.id] : [])]);
-  const frame: Rect = { left: 2, top: 2, right: view.width - 2, bottom: view.height - 30 };
   const points = pointsOf(scene, selection);
   const handles = handlesShown(scene, overlay);
-  const wanted = wantedLabels(craft, scene.still, view, named);
-  const labels = useLabels(wanted, takenBy(marks, points, handles), frame, overlay.held !== null);
   const { hull } = geometry;
+  const rulers = useMemo(
+    () => [...tapeMarks(hull, view, units), ...(view.tilt === 0 ? [] : axisMarks(hull, view, units))],
+    [hull, view, units],
+  );
+  const hoveredPart = hover?.kind === 'part' ? hover.id : null;
+  const labels = useLabels({
+    wanted: wantedLabels(craft, scene.still, view, idsOf(selection, 'part'), hoveredPart),
+    ground: () => ({
+      taken: [...takenBy(marks, points, handles), ...textsTaken(rulers), footNameTaken(view)],
+      boxes: scene.still.map((figure) => screenBox(figure, view)),
+      frame: { left: 2, top: 2, right: view.width - 2, bottom: view.height - FOOT - 4 },
+    }),
+    busy: overlay.held !== null,
+    hovered: hoveredPart,
+  });
   const onGas = useCallback(
     ({ x, y }: ScreenPoint) => {
       const { u, z } = toWorld(view, { x: x + 8, y });
@@ -56,7 +68,7 @@ export function SideDrawing({ scene, selection, overlay, faded }: SideDrawingPro
         <Group {...world}>
           <HullMarks hull={geometry.hull} palette={palette} px={px} />
         </Group>
-        <HullRulers hull={geometry.hull} view={view} palette={palette} units={units} />
+        <HullRulers marks={rulers} palette={palette} />
       </Layer>
       <Layer listening={false}>
         <Group {...world}>

@@ -2,6 +2,7 @@
 import { useMemo, useRef } from 'react';
 import { idsOf } from '../edit/selection.ts';
 import { sameGrip } from '../scene/grip.ts';
+import { sideMargins } from '../scene/margins.ts';
 import { sideMarks } from '../scene/marks.ts';
 import { sideReadout } from '../scene/readout.ts';
 import type { View } from '../scene/view.ts';
@@ -23,8 +24,6 @@ import { useGestures } from './useGestures.ts';
 import { useGround, useOverlay } from './useGround.ts';
 import { useLie, useSideScene } from './useSideScene.ts';
 import { useSize } from './useSize.ts';
-
-const MARGINS = { left: 46, right: 66, top: 46, bottom: 74 };
 
 const KEYS =
   'Arrow keys move what is selected by 1 millimetre, with Shift by 10. Square brackets select the part before or after. Plus, minus and 0 zoom and fit. Escape gives up a drag.';
@@ -52,7 +51,14 @@ function SideFrame(props: SharedProps & DrawnProps & { stale: string | null }) {
   const scene = useSideScene(props, view, overlay);
   const ground = useGround(props, scene, overlays, viewState);
   const { length, height } = geometry.hull;
-  useFit(viewState, view, `${tilted} ${length} ${height}`, busy, () => sidePoints(geometry), MARGINS);
+  useFit(
+    viewState,
+    view,
+    `${tilted} ${length} ${height}`,
+    busy,
+    () => sidePoints(props.craft, geometry),
+    sideMargins(size),
+  );
 
   const hover = (hand: Hand | null) => {
     const next = hand && gripUnder(ground, hand);

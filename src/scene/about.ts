@@ -4,7 +4,7 @@ import { formatQuantity } from '../units/format.ts';
 import type { Grip } from './grip.ts';
 import type { Readout } from './readout.ts';
 import { geometryOf, type Subject } from './subject.ts';
-import { leadWords, momentAmount, nameOfGrip } from './words.ts';
+import { leadWords, momentAmount, momentWords, nameOfGrip } from './words.ts';
 
 /** Null for the handles of the hull, which name themselves by moving. */
 export function aboutGrip(subject: Subject, grip: Grip): Readout | null {
@@ -27,6 +27,12 @@ export function aboutGrip(subject: Subject, grip: Grip): Readout | null {
       return null;
   }
 }
+
+/** The same on one line, for a low pane. */
+export const aboutBarShort = (subject: Subject, bar: BeamBar): Readout => ({
+  title: aboutBar(subject, bar).title,
+  lines: [momentWords(bar.mass, bar.station - (geometryOf(subject.assessment)?.cb[0] ?? 0), subject.units)],
+});
 
 /** "Battery": mass, arm from the CB, moment. */
 export function aboutBar({ assessment, units }: Subject, bar: BeamBar): Readout {

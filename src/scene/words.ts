@@ -5,7 +5,7 @@ import { formatQuantity } from '../units/format.ts';
 import type { UnitSystem } from '../units/units.ts';
 import { type Beam, netWords } from './beam.ts';
 import type { Grip } from './grip.ts';
-import { geometryOf, rowValue, type Subject } from './subject.ts';
+import { geometryOf, isLevel, rowValue, type Subject } from './subject.ts';
 
 const DEGREE = Math.PI / 180;
 
@@ -122,10 +122,10 @@ export function leadBarWords({ mass, name }: BeamBar, units: UnitSystem): string
 }
 
 /** The beam in words: the sums of both sides, the longest bars, and what is left. */
-export function beamInWords(beam: Beam, units: UnitSystem): string {
+export function beamInWords(beam: Beam, { units, assessment }: Subject): string {
   const longest = beam.bars
     .slice(0, 4)
     .map(({ name, moment }) => `${name} ${momentAmount(moment, units)} ${moment < 0 ? 'forward' : 'aft'}`);
   const sums = `${momentAmount(beam.fore, units)} forward of the CB, ${momentAmount(beam.aft, units)} aft`;
-  return `Moments about the CB: ${sums}; ${netWords(beam.net, units)}. Longest: ${longest.join(', ') || 'none'}.`;
+  return `Moments about the CB: ${sums}; ${netWords(beam.net, units, isLevel(assessment))}. Longest: ${longest.join(', ') || 'none'}.`;
 }

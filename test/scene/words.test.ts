@@ -62,7 +62,7 @@ test('the drawing in words for those who do not see it', () => {
   expect(selectionInWords(of, ['battery'])).toMatch(/^battery at station 1\.200 m; floats /);
   expect(selectionInWords(of, [])).toBe('');
   const { beam, lead } = geometry();
-  expect(beamInWords(beamOf(beam, lead), 'metric')).toContain('forward of the CB');
+  expect(beamInWords(beamOf(beam, lead), of)).toContain('forward of the CB');
 });
 
 test('lead is named where there is some', () => {

@@ -1,0 +1,27 @@
+import fc from 'fast-check';
+import { expect, test } from 'vitest';
+import { TAIL_HANDLE_PX } from '../../src/scene/grip.ts';
+import { frontMargins, sideMargins } from '../../src/scene/margins.ts';
+
+test('a small pane has smaller margins, never so small that ruler, tape or handle fall off', () => {
+  const size = fc.record({
+    width: fc.integer({ min: 60, max: 2000 }),
+    height: fc.integer({ min: 60, max: 1200 }),
+  });
+  fc.assert(
+    fc.property(size, size, (a, b) => {
+      const [small, large] = [
+        { width: Math.min(a.width, b.width), height: Math.min(a.height, b.height) },
+        { width: Math.max(a.width, b.width), height: Math.max(a.height, b.height) },
+      ];
+      for (const margins of [sideMargins, frontMargins]) {
+        const [of, than] = [margins(small), margins(large)];
+        for (const edge of ['left', 'right', 'top', 'bottom'] as const) {
+          expect(of[edge]).toBeLessThanOrEqual(than[edge]);
+        }
+      }
+      expect(sideMargins(a).right).toBeGreaterThan(TAIL_HANDLE_PX + 13);
+      expect(sideMargins(a).bottom).toBeGreaterThan(24);
+    }),
+  );
+});
