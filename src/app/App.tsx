@@ -6,7 +6,6 @@ import { useCell } from './cell.ts';
 import { openFile } from './commands.ts';
 import { Dialogs } from './Dialogs.tsx';
 import { dropKind, takeDrops } from './drops.ts';
-import { NoticeArea } from './NoticeArea.tsx';
 import type { Store } from './store.ts';
 import { usePalette } from './theme.ts';
 import { useEditorOf } from './useEditorOf.ts';
@@ -25,7 +24,6 @@ export function App({ store }: { store: Store }) {
       <CommandBar store={store} />
       <Workspace store={store} editor={editor} palette={palette} />
       <Dialogs store={store} />
-      <NoticeArea notices={store.notices} />
       {over && (
         <div className="drop-veil">Drop a craft file to open it, or a table of parts to add them.</div>
       )}

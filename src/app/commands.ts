@@ -32,6 +32,8 @@ const COMMAND_TABLE = {
   redo: (store) => store.session.redo(),
   tilt: (store) => store.view.set({ ...store.view.get(), tilted: !store.view.get().tilted }),
   fit: (store) => store.fit.set(store.fit.get() + 1),
+  several: (store) => store.hands.set({ ...store.hands.get(), several: !store.hands.get().several }),
+  snap: (store) => store.hands.set({ ...store.hands.get(), snap: !store.hands.get().snap }),
   units: (store) =>
     store.settings.set({ ...store.settings.get(), units: otherUnits(store.settings.get().units) }),
   theme: (store) =>

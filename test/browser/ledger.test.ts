@@ -55,3 +55,54 @@ test('two edits of one cell are two undo steps', async ({ visit }) => {
   expect(await savedText(page)).toBe(sample('worked-example'));
   expect(await undoable(page)).toBe(false);
 });
+
+test('an opened cell keeps its width, and a sentence on what is wrong stands whole on the page', async ({
+  visit,
+}) => {
+  for (const viewport of [
+    { width: 1440, height: 900 },
+    { width: 1024, height: 768 },
+  ]) {
+    const page = await visit({ viewport });
+    await openSample(page, 'worked-example');
+    const last = cell(page, 'battery', 'mass');
+    await last.click();
+    const before = await last.boundingBox();
+    await page.keyboard.type('abc');
+    expect(await last.boundingBox()).toEqual(before);
+    await page.keyboard.press('Enter');
+    const sentence = page.getByRole('alert').filter({ hasText: 'abc' });
+    expect(await sentence.textContent()).toBe(
+      'Mass of Battery: “abc” is not a number. Enter a mass: a number, in g, oz, kg, mg, lb.',
+    );
+    const box = (await sentence.boundingBox())!;
+    expect(box.y + box.height).toBeLessThanOrEqual(viewport.height);
+    expect(box.x + box.width).toBeLessThanOrEqual(viewport.width);
+    const inFront = await page.evaluate(
+      ({ x, y, width, height }) => document.elementFromPoint(x + width / 2, y + height / 2)?.textContent,
+      box,
+    );
+    expect(inFront).toContain('“abc” is not a number');
+    await page.keyboard.press('Escape');
+    expect(await savedText(page)).toBe(sample('worked-example'));
+  }
+});
+
+test('on a narrow page name, mass, place, station, moment and lock are all in sight', async ({ visit }) => {
+  const page = await visit({ viewport: { width: 1024, height: 768 } });
+  const pane = (await page.locator('.grid-scroll').boundingBox())!;
+  for (const title of ['Name', 'Mass', '±', 'Place', 'Station', 'Moment', 'Lock']) {
+    const head = (await page.getByRole('columnheader', { name: title, exact: true }).boundingBox())!;
+    expect(head.x + head.width).toBeLessThanOrEqual(pane.x + pane.width + 1);
+  }
+});
+
+test('a letter typed in a list of choices goes to its entry and is no command', async ({ visit }) => {
+  const page = await visit();
+  await openSample(page, 'worked-example');
+  await page.getByRole('tab', { name: 'Hull' }).click();
+  await page.getByRole('combobox', { name: 'Shape' }).focus();
+  for (const key of ['t', 'f', '?', 'Delete']) await page.keyboard.press(key);
+  expect(await page.getByRole('button', { name: 'As it floats' }).getAttribute('aria-pressed')).toBe('false');
+  expect(await page.getByRole('dialog').count()).toBe(0);
+});

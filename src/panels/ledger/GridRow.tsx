@@ -57,7 +57,10 @@ function PlainGridRow<R extends GridItem>(props: GridRowProps<R>) {
           key={column.key}
           role={index === 0 ? 'rowheader' : 'gridcell'}
           data-cell={column.key}
-          className={column.numeric ? 'number' : undefined}
+          className={
+            [column.numeric && 'number', opened.has(column.key) && 'opened'].filter(Boolean).join(' ') ||
+            undefined
+          }
           tabIndex={active === column.key ? 0 : -1}
           onFocus={() => props.onCellFocus(row.id, column.key)}
         >
