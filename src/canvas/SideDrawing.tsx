@@ -5,7 +5,7 @@ import { idsOf, isSelected, type Selection } from '../edit/selection.ts';
 import { handlesOf } from '../scene/grip.ts';
 import { type BalanceMarks, marksTaken, sideMarks } from '../scene/marks.ts';
 import { around, type Rect, screenBox } from '../scene/rect.ts';
-import { axisMarks, tapeMarks, textsTaken } from '../scene/tapeMarks.ts';
+import { axisMarks, tapeMarks, textsTaken, withoutCovered } from '../scene/tapeMarks.ts';
 import { type ScreenPoint, toScreen, toWorld, type View } from '../scene/view.ts';
 import { leadWords, pitchAngle } from '../scene/words.ts';
 import { BalanceMark } from './BalanceMark.tsx';
@@ -29,7 +29,7 @@ export interface SideDrawingProps {
 }
 
 export function SideDrawing({ scene, selection, overlay, faded }: SideDrawingProps) {
-  const { view, palette, units, geometry, craft } = scene;
+  const { view, palette, units, geometry, craft, still } = scene;
   const px = 1 / view.scale;
   const world = worldTransform(view);
   const marks = sideMarks(view, geometry);
@@ -38,15 +38,21 @@ export function SideDrawing({ scene, selection, overlay, faded }: SideDrawingPro
   const handles = handlesShown(scene, overlay);
   const { hull } = geometry;
   const rulers = useMemo(
-    () => [...tapeMarks(hull, view, units), ...(view.tilt === 0 ? [] : axisMarks(hull, view, units))],
-    [hull, view, units],
+    () => [
+      ...withoutCovered(
+        tapeMarks(hull, view, units),
+        still.map((figure) => screenBox(figure, view)),
+      ),
+      ...(view.tilt === 0 ? [] : axisMarks(hull, view, units)),
+    ],
+    [hull, view, units, still],
   );
   const hoveredPart = hover?.kind === 'part' ? hover.id : null;
   const labels = useLabels({
     wanted: wantedLabels(craft, scene.still, view, idsOf(selection, 'part'), hoveredPart),
     ground: () => ({
       taken: [...takenBy(marks, points, handles), ...textsTaken(rulers), footNameTaken(view)],
-      boxes: scene.still.map((figure) => screenBox(figure, view)),
+      boxes: scene.still.map((figure) => ({ id: figure.part, box: screenBox(figure, view) })),
       frame: { left: 2, top: 2, right: view.width - 2, bottom: view.height - FOOT - 4 },
     }),
     busy: overlay.held !== null,

@@ -1,5 +1,5 @@
 /** Names stay where they are while nothing they depend on changed, and while a hand is at work. */
-import { type Label, type LabelGround, placeLabels, sameRect, type Wanted } from './labels.ts';
+import { type Label, type LabelGround, type PartBox, placeLabels, sameRect, type Wanted } from './labels.ts';
 import type { Rect } from './rect.ts';
 
 export interface LabelsAsked {
@@ -61,4 +61,6 @@ const sameWanted = (a: readonly Wanted[], b: readonly Wanted[]): boolean => same
 const sameRects = (a: readonly Rect[], b: readonly Rect[]): boolean => same(a, b, sameRect);
 
 const sameGround = (a: LabelGround, b: LabelGround): boolean =>
-  sameRect(a.frame, b.frame) && sameRects(a.taken, b.taken) && sameRects(a.boxes, b.boxes);
+  sameRect(a.frame, b.frame) && sameRects(a.taken, b.taken) && same(a.boxes, b.boxes, sameBox);
+
+const sameBox = (a: PartBox, b: PartBox): boolean => a.id === b.id && sameRect(a.box, b.box);

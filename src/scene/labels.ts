@@ -23,10 +23,16 @@ export interface Label {
   readonly leader: { readonly from: ScreenPoint; readonly to: ScreenPoint } | null;
 }
 
+/** Where a piece of a part is. */
+export interface PartBox {
+  readonly id: string;
+  readonly box: Rect;
+}
+
 /** What lies about: `taken` is never covered, `boxes` of parts if it can be helped. */
 export interface LabelGround {
   readonly taken: readonly Rect[];
-  readonly boxes: readonly Rect[];
+  readonly boxes: readonly PartBox[];
   readonly frame: Rect;
 }
 
@@ -35,12 +41,13 @@ export const LABEL_HEIGHT = 15;
 export const MOST_LABELS = 40;
 
 /** Rings round the part, px off it: beyond the last the name would no longer be taken for its own. */
-const RINGS = [4, 14, 26, 40, 56, 74, 94];
+const RINGS = [4, 14, 26, 40, 56];
 const NEXT_TO = 6;
-/** Prices, in px of distance: of covering a part whole, of a line across something, of a side that is not below. */
+/** Prices, in px of distance: of covering a part whole, and of a side that is not below. */
 const ON_PART = 90;
-const CROSSING = 45;
 const SIDE = 1.5;
+/** Dearer than this a name does more harm than good. */
+const MOST_PRICE = 100;
 
 interface Candidate {
   readonly rect: Rect;
@@ -114,7 +121,7 @@ function crosses({ from, to }: NonNullable<Label['leader']>, rects: readonly Rec
 /** The cheapest spot that covers nothing taken; null when there is none. */
 function bestSpot(wanted: Wanted, others: readonly Rect[], full: readonly Rect[], frame: Rect): Label | null {
   let best: Label | null = null;
-  let least = Number.POSITIVE_INFINITY;
+  let least = MOST_PRICE;
   for (const { rect, price } of candidates(wanted)) {
     if (price >= least) break;
     if (!inside(rect, frame) || full.some((each) => overlaps(each, rect))) continue;
@@ -123,8 +130,8 @@ function bestSpot(wanted: Wanted, others: readonly Rect[], full: readonly Rect[]
     const own = distance(rect, wanted.box);
     const doubtful = covered > 0 || others.some((each) => distance(rect, each) < own);
     const leader = own > NEXT_TO || doubtful ? leaderOf(rect, wanted.box) : null;
-    const whole = price + ON_PART * covered + (leader && crosses(leader, full) ? CROSSING : 0);
-    if (whole >= least) continue;
+    const whole = price + ON_PART * covered;
+    if (whole >= least || (leader && crosses(leader, full))) continue;
     least = whole;
     best = { id: wanted.id, text: wanted.text, x: rect.left, y: rect.top + LABEL_HEIGHT / 2, leader };
   }
@@ -135,7 +142,7 @@ function bestSpot(wanted: Wanted, others: readonly Rect[], full: readonly Rect[]
 export function placeLabels(wanted: readonly Wanted[], { taken, boxes, frame }: LabelGround): Label[] {
   const full = [...taken];
   return wanted.flatMap((each) => {
-    const others = boxes.filter((box) => !sameRect(box, each.box));
+    const others = boxes.filter(({ id }) => id !== each.id).map(({ box }) => box);
     const label = bestSpot(each, others, full, frame);
     if (!label) return [];
     full.push({

@@ -16,8 +16,8 @@ export function sideMargins(pane: Extent): Margins {
   return {
     left: least(46, by, 16),
     right: least(66, by, TAIL_HANDLE_PX + 15),
-    top: least(46, by, 28),
-    bottom: least(74, by, 44),
+    top: least(46, by, 24),
+    bottom: least(74, by, 36),
   };
 }
 

@@ -1,7 +1,7 @@
 /** Ticks of tape distance along the top of the skin, and of stations along the axis: where each stands and what it says. px. */
 import type { Hull } from '../report/assessment.ts';
 import type { UnitSystem } from '../units/units.ts';
-import type { Rect } from './rect.ts';
+import { overlaps, type Rect } from './rect.ts';
 import { rulerUnit, stationTicks, tapeTicks } from './ruler.ts';
 import { type ScreenPoint, toScreen, type View } from './view.ts';
 
@@ -64,11 +64,20 @@ function outwardAt(hull: Hull, station: number, view: View): ScreenPoint {
 const LETTER = 6.4;
 const HALF_HEIGHT = 7;
 
+function textRect({ text, align, at: { x, y } }: RulerMark): Rect | null {
+  if (text === null) return null;
+  const width = text.length * LETTER;
+  const left = align === 'left' ? x : align === 'right' ? x - width : x - width / 2;
+  return { left, right: left + width, top: y - HALF_HEIGHT, bottom: y + HALF_HEIGHT };
+}
+
 /** What the texts take up. */
 export const textsTaken = (marks: readonly RulerMark[]): Rect[] =>
-  marks.flatMap(({ text, align, at: { x, y } }) => {
-    if (text === null) return [];
-    const width = text.length * LETTER;
-    const left = align === 'left' ? x : align === 'right' ? x - width : x - width / 2;
-    return [{ left, right: left + width, top: y - HALF_HEIGHT, bottom: y + HALF_HEIGHT }];
+  marks.flatMap((mark) => textRect(mark) ?? []);
+
+/** Without the texts that a part would cover in half. */
+export const withoutCovered = (marks: readonly RulerMark[], boxes: readonly Rect[]): RulerMark[] =>
+  marks.map((mark) => {
+    const rect = textRect(mark);
+    return rect && boxes.some((box) => overlaps(box, rect)) ? { ...mark, text: null } : mark;
   });

@@ -19,7 +19,7 @@ const rectOf = ({ x, y }: Label, width: number): Rect => ({
 const named = (id: string, box: Rect, width = 40): Wanted => ({ id, text: id, width, box });
 const on = (all: readonly Wanted[], taken: readonly Rect[] = []) => ({
   taken,
-  boxes: all.map(({ box }) => box),
+  boxes: all,
   frame: FRAME,
 });
 
@@ -102,7 +102,7 @@ test('the part under the pointer is named before all others when it had no name'
     named('a', { left: 10, right: 40, top: 0, bottom: 10 }),
     named('b', { left: 10, right: 40, top: 10, bottom: 20 }),
   ];
-  const ground = () => ({ taken: [], boxes: wanted.map(({ box }) => box), frame: { ...room, bottom: 40 } });
+  const ground = () => ({ taken: [], boxes: wanted, frame: { ...room, bottom: 40 } });
   const ids = (hovered: string | null) =>
     nextLabels(null, { wanted, ground, busy: false, hovered }).labels.map(({ id }) => id);
   expect(ids(null)).toContain('a');

@@ -1,6 +1,6 @@
 import { expect, test } from 'vitest';
 import { overlaps } from '../../src/scene/rect.ts';
-import { axisMarks, tapeMarks, textsTaken } from '../../src/scene/tapeMarks.ts';
+import { axisMarks, tapeMarks, textsTaken, withoutCovered } from '../../src/scene/tapeMarks.ts';
 import { toWorld } from '../../src/scene/view.ts';
 import { geometry, VIEW } from './fixture.ts';
 
@@ -31,4 +31,12 @@ test('the texts of one ruler do not lie on each other', () => {
   rects.forEach((a, i) => {
     expect(rects.slice(i + 1).filter((b) => overlaps(a, b))).toEqual([]);
   });
+});
+
+test('a text that a part covers is left out, its tick and all others stay', () => {
+  const marks = tapeMarks(hull, VIEW, 'metric');
+  const [first, ...rest] = textsTaken(marks);
+  const seen = withoutCovered(marks, [{ ...first!, left: first!.right - 3 }]);
+  expect(textsTaken(seen)).toEqual(rest);
+  expect(seen).toHaveLength(marks.length);
 });
