@@ -110,7 +110,7 @@ function FrontFrame(props: CanvasProps & DrawnProps) {
         hint={overlay.hint}
         readout={overlay.held && frontReadout(scene, overlay.held)}
         under={thingUnder(scene, overlay)}
-        inSight={inSightOf(scene, frontMarks(view, geometry), overlay.held)}
+        inSight={inSightOf(scene, frontMarks(view, geometry), overlay.held, outlines.greatest)}
         size={size}
         palette={palette}
         most={220}

@@ -4,6 +4,7 @@ import { idsOf } from '../edit/selection.ts';
 import { sameGrip } from '../scene/grip.ts';
 import { sideMargins } from '../scene/margins.ts';
 import { sideMarks } from '../scene/marks.ts';
+import { sideOutline } from '../scene/outline.ts';
 import { sideReadout } from '../scene/readout.ts';
 import type { View } from '../scene/view.ts';
 import { selectionInWords, sideInWords } from '../scene/words.ts';
@@ -24,6 +25,8 @@ import { useGestures } from './useGestures.ts';
 import { useGround, useOverlay } from './useGround.ts';
 import { useLie, useSideScene } from './useSideScene.ts';
 import { useSize } from './useSize.ts';
+
+const OUTLINE_POINTS = 32;
 
 const KEYS =
   'Arrow keys move what is selected by 1 millimetre, with Shift by 10. Square brackets select the part before or after. Plus, minus and 0 zoom and fit. Escape gives up a drag.';
@@ -57,8 +60,10 @@ function SideFrame(props: SharedProps & DrawnProps & { stale: string | null }) {
     `${tilted} ${length} ${height}`,
     busy,
     () => sidePoints(props.craft, geometry),
-    sideMargins(size),
+    sideMargins(size, geometry.support !== null),
   );
+
+  const outline = useMemo(() => sideOutline(geometry.hull, OUTLINE_POINTS), [geometry.hull]);
 
   const hover = (hand: Hand | null) => {
     const next = hand && gripUnder(ground, hand);
@@ -91,7 +96,7 @@ function SideFrame(props: SharedProps & DrawnProps & { stale: string | null }) {
         hint={hint}
         readout={readout}
         under={thingUnder(scene, overlay)}
-        inSight={inSightOf(scene, sideMarks(view, geometry), overlay.held)}
+        inSight={inSightOf(scene, sideMarks(view, geometry), overlay.held, outline)}
         size={{ width: size.width, height: size.height - FOOT }}
         palette={palette}
       />

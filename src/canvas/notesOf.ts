@@ -18,13 +18,24 @@ export function thingUnder(scene: Scene, { held, hover, hoverAt }: Overlay): Not
   return { about, thing: box ?? around(hoverAt, REACH) };
 }
 
-/** CB, CG, the line between them and the thing in hand; rather the parts too. */
-export function inSightOf(scene: Scene, marks: BalanceMarks, held: Grip | null): InSight {
+/** CB, CG, the line between them and the thing in hand; rather the parts and the outline of the hull with its figures too. */
+export function inSightOf(
+  scene: Scene,
+  marks: BalanceMarks,
+  held: Grip | null,
+  outline: readonly PlanePoint[],
+): InSight {
   return {
     clear: [...marksTaken(marks), ...(held ? boxesOf(scene, held) : [])],
-    rather: scene.figures.slice(0, MOST).map((figure) => screenBox(figure, scene.view)),
+    rather: [
+      ...scene.figures.slice(0, MOST).map((figure) => screenBox(figure, scene.view)),
+      ...outline.map((point) => around(toScreen(scene.view, point), OUTLINE_REACH)),
+    ],
   };
 }
+
+/** From the skin to the figures along it, px. */
+const OUTLINE_REACH = 18;
 
 /** Enough to see where the parts are. */
 const MOST = 60;

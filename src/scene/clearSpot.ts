@@ -1,5 +1,5 @@
 /** Where a box of text can stand in a view without covering what the eye is on. px. */
-import { inside, overlapArea, type Rect } from './rect.ts';
+import { overlapArea, type Rect } from './rect.ts';
 
 export interface Extent {
   readonly width: number;
@@ -65,9 +65,10 @@ export function clearSpot(view: Extent, box: Extent, ground: InSight, last: numb
 
 const GAP = 10;
 
-/** Beside a thing: aft, forward, below, above of it, at either end; else a corner. */
+const between = (value: number, low: number, high: number): number => Math.max(low, Math.min(value, high));
+
+/** Beside a thing and not on it: aft, forward, below, above, at either end; else a corner. */
 export function spotBeside(view: Extent, box: Extent, thing: Rect, ground: InSight): Rect {
-  const frame = { left: 2, top: 2, right: view.width - 2, bottom: view.height - 2 };
   const [aft, fore] = [thing.right + GAP, thing.left - GAP - box.width];
   const [below, above] = [thing.bottom + GAP, thing.top - GAP - box.height];
   const near = [
@@ -79,11 +80,20 @@ export function spotBeside(view: Extent, box: Extent, thing: Rect, ground: InSig
     [fore, thing.top],
     [thing.left, below],
     [thing.left, above],
-  ]
-    .map(([left, top], index) => ({ index, rect: rectAt({ left: left!, top: top! }, box) }))
-    .filter(({ rect }) => inside(rect, frame));
-  const best = near.length ? cheapest(near, ground) : null;
-  return best && covered(best.rect, ground.clear) === 0 ? best.rect : clearSpot(view, box, ground).rect;
+    [thing.right - box.width, above],
+  ].map(([left, top], index) => ({
+    index,
+    rect: rectAt(
+      {
+        left: between(left!, EDGE, view.width - box.width - EDGE),
+        top: between(top!, EDGE, view.height - box.height - EDGE),
+      },
+      box,
+    ),
+  }));
+  const clear = [...ground.clear, thing];
+  const best = cheapest(near, { ...ground, clear });
+  return covered(best.rect, clear) === 0 ? best.rect : clearSpot(view, box, { ...ground, clear }).rect;
 }
 
 /** The first of the cheapest. */

@@ -47,7 +47,7 @@ function stayed(kept: KeptLabels, wanted: readonly Wanted[]): boolean {
 function onlyOf(kept: KeptLabels, wanted: readonly Wanted[]): KeptLabels {
   const ids = new Set(wanted.map(({ id }) => id));
   const labels = kept.labels.filter(({ id }) => ids.has(id));
-  return labels.length === kept.labels.length ? kept : { ...kept, labels };
+  return { ...kept, wanted, labels: labels.length === kept.labels.length ? kept.labels : labels };
 }
 
 const sameName = (a: Wanted, b: Wanted): boolean =>

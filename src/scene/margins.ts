@@ -10,14 +10,17 @@ const share = ({ width, height }: Extent): number => Math.min(1, width / ROOMY.w
 
 const least = (whole: number, by: number, low: number): number => Math.max(low, Math.round(whole * by));
 
+/** What the wedge of a support point and its name need below it, over the ruler. */
+const SUPPORTED = 46;
+
 /** Beyond the tail there is the handle, above the skin the tape, below the craft the ruler of stations. */
-export function sideMargins(pane: Extent): Margins {
+export function sideMargins(pane: Extent, supported: boolean): Margins {
   const by = share(pane);
   return {
     left: least(46, by, 16),
     right: least(66, by, TAIL_HANDLE_PX + 15),
     top: least(46, by, 24),
-    bottom: least(74, by, 36),
+    bottom: least(74, by, supported ? SUPPORTED : 36),
   };
 }
 

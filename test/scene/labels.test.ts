@@ -93,6 +93,7 @@ test('names stay where they are while a hand is at work, and come back to the sa
   expect(nextLabels(first, ask([...all], false))).toBe(first);
   const held = nextLabels(first, ask(all.slice(1), true, [FRAME]));
   expect(held.labels).toEqual(first.labels.slice(1));
+  expect(nextLabels(held, ask(all, false)).labels).toEqual(first.labels);
   expect(nextLabels(first, ask(all, false, [FRAME])).labels).toEqual([]);
 });
 
