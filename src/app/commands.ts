@@ -9,7 +9,7 @@ import { called, idsOf, type Selectable } from '../edit/selection.ts';
 import { hullLengthOf } from '../panels/defaults.ts';
 import { assessed } from './assessed.ts';
 import { chooseFile, type Saved, saveCraft } from './files.ts';
-import { openText } from './openings.ts';
+import { type Opened, openText } from './openings.ts';
 import { nextTheme, otherUnits } from './settings.ts';
 import type { Store } from './store.ts';
 
@@ -106,8 +106,16 @@ async function openChosen(store: Store): Promise<void> {
 
 export async function openFile(store: Store, file: File): Promise<void> {
   const opened = await openText(store, await file.text(), file.name);
-  if (opened) store.notices.add(`Opened ${file.name}.`);
+  if (opened) store.notices.add(`Opened ${file.name}.${OPENED_WORDS[opened.how](opened.as)}`);
 }
+
+const OPENED_WORDS: Readonly<Record<Opened['how'], (as: string) => string>> = {
+  new: () => '',
+  kept: () => ' It was kept here already.',
+  earlier: (as) =>
+    ` It is kept here as “${as}” and was changed since: this is how it is now. As in the file it stands under Crafts, earlier versions.`,
+  renamed: (as) => ` Another craft of that name is kept here and differs, so this one is called “${as}”.`,
+};
 
 async function save(store: Store): Promise<void> {
   try {

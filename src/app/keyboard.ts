@@ -13,6 +13,9 @@ const ARROWED = '[role=tab], [role=separator], [role=slider]';
 const closest = (target: EventTarget | null, selector: string): boolean =>
   target instanceof Element && target.closest(selector) !== null;
 
+/** Whether keys and pasted text go into a field there. */
+export const inText = (target: EventTarget | null): boolean => closest(target, TYPED_IN);
+
 /** Starts listening; returns how to stop. */
 export function listenForKeys(store: Store): () => void {
   /** The field whose text was changed and not yet committed: undo and redo there are the browser's own. */

@@ -15,6 +15,9 @@ import { foundParts } from './foundParts.ts';
 import { useAdding } from './ledger/adding.ts';
 import { PART_WORDS } from './words.ts';
 
+/** The head of the dialog says it for all of these. */
+const GENERIC = /^generic\b/;
+
 type Filter = PartKind | 'all';
 
 const FILTERS = [
@@ -56,9 +59,15 @@ export function CatalogueDialog({ onClose }: { onClose: () => void }) {
           }}
         />
       </div>
-      <p role="status">{added || `${entries.length} parts`}</p>
+      <p role="status">{added || (entries.length === 1 ? '1 part' : `${entries.length} parts`)}</p>
       {kind !== 'all' && <PartCaution kind={kind} />}
-      <ul className="catalogue">
+      {entries.length === 0 && (
+        <p className="aside">
+          Nothing here matches. Try fewer words or a kind, as “battery”, or add a part of your own with “Add
+          part”.
+        </p>
+      )}
+      <ul className="catalogue catalogue-parts">
         {entries.map((entry) => (
           <Entry key={entry.id} entry={entry} units={units} onAdded={setAdded} />
         ))}
@@ -83,7 +92,7 @@ function Entry({ entry, units, onAdded }: EntryProps) {
         <strong>{name}</strong> {PART_WORDS[kind]}, {formatQuantity(mass, 'mass', units)}
         {massTolerance > 0 && ` ± ${formatQuantity(massTolerance, 'mass', units)}`}
         <p className="aside">
-          {note} <cite>{source}</cite>
+          {note} {GENERIC.test(source) || <cite>{source}</cite>}
         </p>
       </div>
       <button

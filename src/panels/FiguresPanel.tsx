@@ -6,6 +6,7 @@ import { workingOf } from '../report/workings.ts';
 import { AdviceButton } from './AdviceButton.tsx';
 import { useEditor } from './editor.ts';
 import { figureGroups } from './figureGroups.ts';
+import { FIGURE_HINTS } from './figureHints.ts';
 import { WorkingBody } from './WorkingBody.tsx';
 
 const STATUS_WORDS: Readonly<Record<RowStatus, string>> = {
@@ -60,7 +61,13 @@ function Figure({ name, row, open, onToggle, onJump }: FigureProps) {
   const working = open ? workingOf(name, assessment.rows) : null;
   return (
     <li data-figure={name} data-status={row.status}>
-      <button type="button" className="figure-face" aria-expanded={open} onClick={() => onToggle(name)}>
+      <button
+        type="button"
+        className="figure-face"
+        title={FIGURE_HINTS[name]}
+        aria-expanded={open}
+        onClick={() => onToggle(name)}
+      >
         <span className="figure-label">{row.label}</span>{' '}
         <span className="number">{rowText(row, units)}</span>
       </button>
@@ -73,6 +80,7 @@ function Figure({ name, row, open, onToggle, onJump }: FigureProps) {
       {name === 'oneWeight.station' && <AdviceButton kind="load" />}
       {open && (
         <div className="figure-working">
+          {FIGURE_HINTS[name] && <p>{FIGURE_HINTS[name]}</p>}
           {working ? <WorkingBody working={working} onJump={onJump} /> : <p>As entered.</p>}
         </div>
       )}

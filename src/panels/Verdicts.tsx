@@ -6,6 +6,7 @@ import type { UnitSystem } from '../units/units.ts';
 import { AdviceButton } from './AdviceButton.tsx';
 import { CautionLine } from './CautionLine.tsx';
 import { useEditor } from './editor.ts';
+import { VERDICT_HINTS } from './figureHints.ts';
 import { Headline } from './Headline.tsx';
 import { WorkingBody } from './WorkingBody.tsx';
 import './verdicts.css';
@@ -47,7 +48,7 @@ function VerdictCard({ verdict, units }: { verdict: Verdict; units: UnitSystem }
       <button
         type="button"
         className="verdict-face"
-        title={`${title}: ${word}, ${rowText(row, units)}${marginWords && `, ${marginWords}`}`}
+        title={`${VERDICT_HINTS[verdict.key]}. ${title}: ${word}, ${rowText(row, units)}${marginWords && `, ${marginWords}`}`}
         aria-expanded={open}
         aria-controls={id}
         onClick={() => setOpen(!open)}
@@ -70,6 +71,7 @@ function WorkingText({ verdict }: { verdict: Verdict }) {
   const { key, row, target, working } = verdict;
   return (
     <>
+      <p>{VERDICT_HINTS[key]}.</p>
       <p>
         <strong>Wanted:</strong> {target}.
       </p>

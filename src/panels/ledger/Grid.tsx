@@ -12,6 +12,7 @@ import {
 import { isSelected, type Selectable } from '../../edit/selection.ts';
 import { useCommit } from '../commit.ts';
 import { useEditor } from '../editor.ts';
+import type { Fresh } from './adding.ts';
 import { type CellAt, cellFrom } from './cellKeys.ts';
 import { GridHead } from './GridHead.tsx';
 import { GridRow } from './GridRow.tsx';
@@ -28,6 +29,8 @@ export interface GridProps<R extends GridItem> {
   readonly columns: readonly GridColumn<R>[];
   /** What stands there when there are no rows. */
   readonly empty: string;
+  /** A row just added, whose first field opens. */
+  readonly fresh?: Fresh;
   /** Makes the order shown the order of the craft. */
   onKeepOrder?: (ids: readonly string[]) => void;
 }
@@ -38,6 +41,7 @@ export function Grid<R extends GridItem>({
   rows,
   columns: all,
   empty,
+  fresh,
   onKeepOrder,
 }: GridProps<R>) {
   const { session, selection, dragging, units, several } = useEditor();
@@ -114,8 +118,10 @@ export function Grid<R extends GridItem>({
               columns={columns}
               units={units}
               commit={commit}
+              several={several}
               selected={isSelected(selection, { kind, id })}
               active={active?.id === id ? active.key : null}
+              onFresh={fresh?.id === id ? fresh.opened : null}
               onPick={pick}
               onCellFocus={onCellFocus}
             />
