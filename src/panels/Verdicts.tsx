@@ -1,8 +1,6 @@
 /** The one sentence, and the five verdicts, each opening into its working. Of one height whatever they say, so that the drawing under them stays where it is. */
 import { type KeyboardEvent, useId, useState } from 'react';
-import { rowText } from '../report/rowText.ts';
 import type { Verdict } from '../report/verdict.ts';
-import type { UnitSystem } from '../units/units.ts';
 import { AdviceButton } from './AdviceButton.tsx';
 import { CautionLine } from './CautionLine.tsx';
 import { useEditor } from './editor.ts';
@@ -12,14 +10,14 @@ import { WorkingBody } from './WorkingBody.tsx';
 import './verdicts.css';
 
 export function Verdicts() {
-  const { assessment, units } = useEditor();
+  const { assessment } = useEditor();
   return (
     <section className="verdicts" aria-label="Verdicts">
       <Headline />
       <ul className="verdict-list">
         {assessment.verdicts.map((verdict) => (
           <li key={verdict.key}>
-            <VerdictCard verdict={verdict} units={units} />
+            <VerdictCard verdict={verdict} />
           </li>
         ))}
       </ul>
@@ -31,13 +29,13 @@ export function Verdicts() {
 const STATE_WORDS: Readonly<Record<Verdict['state'], string>> = {
   met: 'meets its target',
   missed: 'misses its target',
-  open: 'is open',
+  open: 'is advice, not a target',
 };
 
-function VerdictCard({ verdict, units }: { verdict: Verdict; units: UnitSystem }) {
+function VerdictCard({ verdict }: { verdict: Verdict }) {
   const [open, setOpen] = useState(false);
   const id = useId();
-  const { row, state, title, word, marginWords } = verdict;
+  const { state, title, word, figure, marginWords } = verdict;
   const onKeyDown = (event: KeyboardEvent) => {
     if (!open || event.key !== 'Escape') return;
     event.stopPropagation();
@@ -48,7 +46,7 @@ function VerdictCard({ verdict, units }: { verdict: Verdict; units: UnitSystem }
       <button
         type="button"
         className="verdict-face"
-        title={`${VERDICT_HINTS[verdict.key]}. ${title}: ${word}, ${rowText(row, units)}${marginWords && `, ${marginWords}`}`}
+        title={`${VERDICT_HINTS[verdict.key]}. ${title}: ${word}, ${figure}${marginWords && `, ${marginWords}`}`}
         aria-expanded={open}
         aria-controls={id}
         onClick={() => setOpen(!open)}
@@ -56,7 +54,7 @@ function VerdictCard({ verdict, units }: { verdict: Verdict; units: UnitSystem }
       >
         <span className="verdict-title">{title}</span>
         <span className="verdict-word">{word}</span>
-        <span className="verdict-number">{rowText(row, units)}</span>
+        <span className="verdict-number">{figure}</span>
         <span className="verdict-margin">{marginWords}</span>
         <span className="verdict-state">{STATE_WORDS[state]}</span>
       </button>

@@ -126,7 +126,7 @@ test('each verdict is a word, a number and a margin, and its state is said in wo
   for (const { title, word, state } of verdicts) {
     expect(text).toContain(title);
     expect(text).toContain(word);
-    expect(text).toContain({ met: 'meets', missed: 'misses', open: 'is open' }[state]);
+    expect(text).toContain({ met: 'meets', missed: 'misses', open: 'is advice' }[state]);
   }
   expect(text).toMatch(/(to spare|off by)/);
 });
