@@ -42,10 +42,13 @@ export const MOST_LABELS = 40;
 
 /** Rings round the part, px off it: beyond the last the name would no longer be taken for its own. */
 const RINGS = [4, 14, 26, 40, 56];
+/** Lines of text up or down, for names that stand in a column beside the part. */
+const ROWS = [1, -1, 2, -2, 3, -3];
 const NEXT_TO = 6;
-/** Prices, in px of distance: of covering a part whole, and of a side that is not below. */
-const ON_PART = 90;
+/** Prices, in px of distance: of covering a part (or being on it) whole, and of a side that is not below. */
+const ON_PART = 70;
 const SIDE = 1.5;
+const LAST_SIDE = 15;
 /** Dearer than this a name does more harm than good. */
 const MOST_PRICE = 100;
 
@@ -79,10 +82,14 @@ function candidates({ box, width }: Wanted): Candidate[] {
       [fore, below],
       [aft, above],
       [fore, above],
+      ...ROWS.flatMap((row) => [
+        [aft, midY + row * LABEL_HEIGHT] as const,
+        [fore, midY + row * LABEL_HEIGHT] as const,
+      ]),
     ];
     return spots.map(([left, top], side) => ({
       rect: { left, top, right: left + width, bottom: top + LABEL_HEIGHT },
-      price: gap + SIDE * side,
+      price: gap + SIDE * Math.min(side, LAST_SIDE),
     }));
   }).sort((a, b) => a.price - b.price);
 }
@@ -107,16 +114,26 @@ const distance = (a: Rect, b: Rect): number =>
   );
 
 const STEP = 5;
+/** What lies so near the end of the line, in steps, may lie on the part itself. */
+const END = 2;
 
 function crosses({ from, to }: NonNullable<Label['leader']>, rects: readonly Rect[]): boolean {
   const count = Math.ceil(Math.hypot(to.x - from.x, to.y - from.y) / STEP);
-  for (let i = 1; i < count; i++) {
+  for (let i = 1; i < count - END; i++) {
     const at = { x: from.x + ((to.x - from.x) * i) / count, y: from.y + ((to.y - from.y) * i) / count };
     const dot = around(at, 0.5);
     if (rects.some((rect) => overlaps(rect, dot))) return true;
   }
   return false;
 }
+
+/** Of the smaller of the two; for two boxes of no area, none. */
+const coveredShare = (a: Rect, b: Rect): number => {
+  const area = overlapArea(a, b);
+  return area > 0 ? area / Math.min(areaOf(a), areaOf(b)) : 0;
+};
+
+const areaOf = ({ left, right, top, bottom }: Rect): number => (right - left) * (bottom - top);
 
 /** The cheapest spot that covers nothing taken; null when there is none. */
 function bestSpot(wanted: Wanted, others: readonly Rect[], full: readonly Rect[], frame: Rect): Label | null {
@@ -125,8 +142,7 @@ function bestSpot(wanted: Wanted, others: readonly Rect[], full: readonly Rect[]
   for (const { rect, price } of candidates(wanted)) {
     if (price >= least) break;
     if (!inside(rect, frame) || full.some((each) => overlaps(each, rect))) continue;
-    const area = (rect.right - rect.left) * LABEL_HEIGHT;
-    const covered = others.reduce((sum, each) => sum + overlapArea(each, rect) / area, 0);
+    const covered = others.reduce((sum, each) => sum + coveredShare(each, rect), 0);
     const own = distance(rect, wanted.box);
     const doubtful = covered > 0 || others.some((each) => distance(rect, each) < own);
     const leader = own > NEXT_TO || doubtful ? leaderOf(rect, wanted.box) : null;
