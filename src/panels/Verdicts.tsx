@@ -35,7 +35,7 @@ const STATE_WORDS: Readonly<Record<Verdict['state'], string>> = {
 function VerdictCard({ verdict }: { verdict: Verdict }) {
   const [open, setOpen] = useState(false);
   const id = useId();
-  const { state, title, word, figure, marginWords } = verdict;
+  const { state, title, word, figure, side, marginWords } = verdict;
   const onKeyDown = (event: KeyboardEvent) => {
     if (!open || event.key !== 'Escape') return;
     event.stopPropagation();
@@ -46,7 +46,7 @@ function VerdictCard({ verdict }: { verdict: Verdict }) {
       <button
         type="button"
         className="verdict-face"
-        title={`${VERDICT_HINTS[verdict.key]}. ${title}: ${word}, ${figure}${marginWords && `, ${marginWords}`}`}
+        title={`${VERDICT_HINTS[verdict.key]}. ${title}: ${word}, ${figure} ${side}${marginWords && `, ${marginWords}`}`}
         aria-expanded={open}
         aria-controls={id}
         onClick={() => setOpen(!open)}
@@ -54,7 +54,9 @@ function VerdictCard({ verdict }: { verdict: Verdict }) {
       >
         <span className="verdict-title">{title}</span>
         <span className="verdict-word">{word}</span>
-        <span className="verdict-number">{figure}</span>
+        <span className="verdict-number">
+          {figure} <small>{side}</small>
+        </span>
         <span className="verdict-margin">{marginWords}</span>
         <span className="verdict-state">{STATE_WORDS[state]}</span>
       </button>

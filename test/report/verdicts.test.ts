@@ -110,9 +110,9 @@ test('a hair over the limit is said to be just that', () => {
 });
 
 test('figures are said without signs', () => {
-  expect(verdict(workedExample(), 'floats').figure).toBe('724.4 g light');
-  expect(verdict(workedExample(), 'level').figure).toBe('53.9° nose-up');
-  expect(verdict(workedExample(), 'even').figure).toBe('0.0°');
+  expect(verdict(workedExample(), 'floats')).toMatchObject({ figure: '724.4 g', side: 'light' });
+  expect(verdict(workedExample(), 'level')).toMatchObject({ figure: '53.9°', side: 'nose-up' });
+  expect(verdict(workedExample(), 'even')).toMatchObject({ figure: '0.0°', side: '' });
   expect(verdict(workedExample(), 'floats').target).toBe('10.0 g light to 20.0 g heavy');
 });
 
