@@ -66,10 +66,10 @@ export function KeysDialog({ onClose }: { onClose: () => void }) {
               </div>
             ))}
           </dl>
-          <Lines title="In the ledger" lines={IN_THE_LEDGER} />
         </section>
         <section>
           <Lines title="In the drawing" lines={IN_THE_DRAWING} />
+          <Lines title="In the ledger" lines={IN_THE_LEDGER} />
           <Lines title="By hand" lines={BY_HAND} />
         </section>
       </div>

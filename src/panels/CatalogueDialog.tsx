@@ -59,14 +59,8 @@ export function CatalogueDialog({ onClose }: { onClose: () => void }) {
           }}
         />
       </div>
-      <p role="status">{added || (entries.length === 1 ? '1 part' : `${entries.length} parts`)}</p>
+      <p role="status">{added || countWords(entries.length)}</p>
       {kind !== 'all' && <PartCaution kind={kind} />}
-      {entries.length === 0 && (
-        <p className="aside">
-          Nothing here matches. Try fewer words or a kind, as “battery”, or add a part of your own with “Add
-          part”.
-        </p>
-      )}
       <ul className="catalogue catalogue-parts">
         {entries.map((entry) => (
           <Entry key={entry.id} entry={entry} units={units} onAdded={setAdded} />
@@ -74,6 +68,12 @@ export function CatalogueDialog({ onClose }: { onClose: () => void }) {
       </ul>
     </DialogFrame>
   );
+}
+
+function countWords(found: number): string {
+  if (found === 1) return '1 part';
+  if (found > 0) return `${found} parts`;
+  return 'Nothing here matches. Try fewer words or a kind, as “battery”, or add a part of your own with “Add part”.';
 }
 
 interface EntryProps {

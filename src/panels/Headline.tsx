@@ -5,7 +5,7 @@ import { headlineAdvice } from './advice.ts';
 import { useEditor } from './editor.ts';
 
 export function Headline() {
-  const { assessment } = useEditor();
+  const { assessment, craft } = useEditor();
   const { headline, met } = assessment;
   const text = useRef<HTMLParagraphElement>(null);
   const cut = useCut(text, headline);
@@ -17,7 +17,7 @@ export function Headline() {
         {headline}
       </p>
       <div className="headline-buttons">
-        {headlineAdvice(assessment).map((kind) => (
+        {headlineAdvice(assessment, craft).map((kind) => (
           <AdviceButton key={kind} kind={kind} />
         ))}
         {cut && (

@@ -1,4 +1,5 @@
 /** What the report advises, as edits: one step each. */
+import type { Craft } from '../craft/craft.ts';
 import { type Edit, step } from '../edit/edit.ts';
 import { addPart, placePart } from '../edit/edits/parts.ts';
 import type { Advice } from '../report/advice.ts';
@@ -11,8 +12,11 @@ export type AdviceKind = Advice['kind'];
 export const adviceOf = ({ advice }: Assessment, kind: AdviceKind): Advice | null =>
   advice.find((each) => each.kind === kind) ?? null;
 
-/** What the sentence on top speaks of: the lead and the slide while they are called for, the load once all else is met. */
-export function headlineAdvice(assessment: Assessment): AdviceKind[] {
+/** What the sentence on top speaks of: the lead and the slide once it is neither top-heavy nor too heavy, the load once all else is met. */
+export function headlineAdvice(assessment: Assessment, { targets }: Pick<Craft, 'targets'>): AdviceKind[] {
+  const value = (key: string) => assessment.rows[key]?.value ?? null;
+  const [depth, heaviness] = [value('float.pendulumDepth'), value('heaviness')];
+  if ((depth !== null && depth <= 0) || (heaviness !== null && heaviness > targets.heaviness.most)) return [];
   const has = (kind: AdviceKind) => adviceOf(assessment, kind) !== null;
   const met = (key: VerdictKey) => assessment.verdicts.find((each) => each.key === key)?.state === 'met';
   if (!met('level')) return (['lead', 'slide'] as const).filter(has);

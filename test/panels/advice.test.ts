@@ -1,4 +1,5 @@
 import { expect, test } from 'vitest';
+import { setPart } from '../../src/edit/edits/parts.ts';
 import { run } from '../../src/edit/history.ts';
 import { type AdviceKind, adviceEdit, adviceOf, headlineAdvice } from '../../src/panels/advice.ts';
 import { FiguresPanel } from '../../src/panels/FiguresPanel.tsx';
@@ -35,13 +36,20 @@ test('the load takes the lift left where it levels, so that both verdicts are me
 });
 
 test('buttons stand where the advice is said: lead and slide on top, the load at its figure', () => {
-  const assessment = assess(worked);
-  expect(headlineAdvice(assessment)).toContain('lead');
-  expect(headlineAdvice(assessment)).not.toContain('load');
+  const onTop = headlineAdvice(assess(worked), worked);
+  expect(onTop).toContain('lead');
+  expect(onTop).not.toContain('load');
   expect(seen(render(Verdicts, {}, worked))).toContain('Hang this lead');
   expect(seen(render(FiguresPanel, {}, worked))).toContain('Add a load there');
 });
 
 test('once the lead hangs, only the load is left to add', () => {
-  expect(headlineAdvice(assess(carriedOut('lead')))).toEqual(['load']);
+  const craft = carriedOut('lead');
+  expect(headlineAdvice(assess(craft), craft)).toEqual(['load']);
+});
+
+test('while it is too heavy the sentence speaks of neither, and nor do the buttons', () => {
+  const craft = run(worked, setPart(worked.parts.byId.gondola!, 'mass', { mass: 3 }).recipe).craft;
+  expect(assess(craft).headline).toMatch(/^Too heavy/);
+  expect(headlineAdvice(assess(craft), craft)).toEqual([]);
 });

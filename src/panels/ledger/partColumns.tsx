@@ -148,7 +148,7 @@ export const PART_GRID: readonly GridColumn<PartRow>[] = [
   {
     key: 'name',
     title: 'Name',
-    width: 12,
+    width: 11.5,
     sortBy: ({ part }) => part.name,
     text: ({ part }) => part.name,
     field: (cell) => <NameCell {...cell} />,
@@ -229,7 +229,7 @@ export const PART_GRID: readonly GridColumn<PartRow>[] = [
   {
     key: 'moment',
     title: 'Moment',
-    width: 7.9,
+    width: 8.8,
     numeric: true,
     sortBy: ({ moment }) => moment ?? 0,
     text: ({ moment }, units) => (moment === null ? '–' : formatQuantity(moment, 'momentMass', units)),
