@@ -135,6 +135,12 @@ test('heeled: which side is low, and how much to bring over', () => {
   expect(assess(loose).headline).toMatch(/^Heels \d\.\d°, starboard low: bring 25\.00 g·m over to port\.$/);
 });
 
+test('a bare hull has no pendulum, and says so', () => {
+  const bare: Craft = { ...workedExample(), parts: keyed([]) };
+  expect(assess(bare).headline).toMatch(/^Without a pendulum/);
+  expect(verdict(bare, 'upright').state).toBe('missed');
+});
+
 test('top-heavy: missed however little is asked for, and said before anything else', () => {
   const craft = workedExample();
   const top: Craft = {
