@@ -26,7 +26,6 @@ export default defineConfig({
   root: 'src/app',
   base: './',
   plugins: [react(), offline()],
-  worker: { format: 'es' },
   build: {
     outDir: '../../dist',
     emptyOutDir: true,
