@@ -6,7 +6,7 @@ import type { BeamOnPage } from '../scene/beamLayout.ts';
 import { planNetWords } from '../scene/beamPlan.ts';
 import type { Palette } from '../scene/palette.ts';
 import type { UnitSystem } from '../scene/subject.ts';
-import { fontOf, shortened, textWidth, traceOnScreen, writeOn } from './paint.ts';
+import { fontOf, shortened, traceOnScreen, writeOn } from './paint.ts';
 import type { Size } from './useSize.ts';
 
 export interface BeamPlanMarksProps {
@@ -107,19 +107,15 @@ function edge(context: Context, { page: { middle }, palette }: BeamPlanMarksProp
 }
 
 const EDGE = 6;
+const ABOVE = 9;
 
-/** What either row is, over its bars, and how the plan comes out, after its own. */
-function rowNames(context: Context, props: BeamPlanMarksProps, top: number): void {
-  const { page, beam, size, palette, units, today } = props;
-  const y = top + BAR / 2 + 0.5;
-  const [font, result] = [fontOf(12, 600), planNetWords(beam, units)];
-  context.font = font;
+/** What either row is, over its bars; the plan also how it comes out. Without room for it the upper row goes unnamed. */
+function rowNames(context: Context, { beam, palette, units, today }: BeamPlanMarksProps, top: number): void {
+  context.font = fontOf(12, 600);
   context.textAlign = 'left';
   context.textBaseline = 'middle';
-  const after = Math.min(lastOf(page) + 8, size.width - textWidth(result, font) - EDGE);
-  writeOn(context, result, { x: after, y }, palette.open, palette.paper);
-  writeOn(context, 'plan', { x: EDGE, y: top - 9 }, palette.open, palette.paper);
-  writeOn(context, 'today', { x: EDGE, y: today - 9 }, palette.ink, palette.paper);
+  const words = `plan: ${planNetWords(beam, units)}`;
+  writeOn(context, words, { x: EDGE, y: top - ABOVE }, palette.open, palette.paper);
+  if (today < 2 * ABOVE) return;
+  writeOn(context, 'today', { x: EDGE, y: today - ABOVE }, palette.ink, palette.paper);
 }
-
-const lastOf = ({ middle, bars }: BeamOnPage): number => Math.max(middle, ...bars.map(({ right }) => right));

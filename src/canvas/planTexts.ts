@@ -96,6 +96,13 @@ const weightBox = ({ at: { x, y }, drop }: WeightMark): Area => ({
   bottom: y + drop + WEIGHT_HIGH,
 });
 
+/** Where the lean is written. */
+function angleArea({ ring, lean, line }: BalanceMarks): Area {
+  const y = ring.y + Math.min(0.6 * line, 70);
+  const x = ring.x + (lean > 0 ? -30 : 30);
+  return { left: x - 26, right: x + 26, top: y - 9, bottom: y + 9 };
+}
+
 /** The line from ring to bob. */
 const alongLine = (from: ScreenPoint, to: ScreenPoint): Area[] =>
   Array.from({ length: 12 }, (_, i) =>
@@ -107,12 +114,14 @@ const MOST = 60;
 
 /** Names of parts and the parts themselves, marks of balance, eyelets, weights, ghosts, knobs with their stations. */
 export function planTaken(
-  { view, geometry, hardpoints, figures, units }: SideScene,
+  { view, geometry, hardpoints, figures, units, support }: SideScene,
   plan: PlanShown | null,
   knobs: readonly Knob[],
   labels: readonly { readonly text: string; readonly x: number; readonly y: number }[],
 ): Area[] {
-  const { ring, bob } = sideMarks(view, geometry);
+  const marks = sideMarks(view, geometry);
+  const { ring, bob } = marks;
+  const foot = support && toScreen(view, support);
   return [
     ...labels.map(({ text, x, y }) => ({
       left: x,
@@ -122,7 +131,8 @@ export function planTaken(
     })),
     { ...about(ring, 12), left: ring.x - 38, top: ring.y - 20 },
     ...(bob ? [{ ...about(bob, 16), left: bob.x - 36, right: bob.x + 36 }] : []),
-    ...(bob ? alongLine(ring, bob) : []),
+    ...(bob ? [...alongLine(ring, bob), angleArea(marks)] : []),
+    ...(foot ? [{ left: foot.x - 9, right: foot.x + 64, top: foot.y, bottom: foot.y + 18 }] : []),
     ...(plan?.bob?.bob ? [about(plan.bob.bob, 12), ...alongLine(ring, plan.bob.bob)] : []),
     ...hardpoints.map(({ at }) => about(toScreen(view, at), 11)),
     ...figures.slice(0, MOST).map((figure) => boxOnScreen(figure, view)),

@@ -3,7 +3,7 @@ import type { AxeResults } from 'axe-core';
 import type { Locator, Page } from 'playwright-core';
 import { expect } from 'vitest';
 import { openFile, openSample, sample, savedText } from './craftFiles.ts';
-import { partOnPage, verdictText } from './drawing.ts';
+import { partOnPage, planeOnPage, verdictText } from './drawing.ts';
 import { open, test } from './visit.ts';
 
 const axe = createRequire(import.meta.url).resolve('axe-core/axe.min.js');
@@ -166,6 +166,30 @@ test('loads are compared, and a curve is drawn along the keel', async ({ visit }
   expect(await page.getByText('Best set by the exact plan:').textContent()).toBe(
     'Best set by the exact plan:',
   );
+});
+
+test('a click on the curve hangs the chosen load there, as one step', async ({ visit }) => {
+  const page = await visit();
+  const before = await savedText(page);
+  await planTab(page).click();
+  await upToDate(page);
+  await unfold(page, 'What can I carry where');
+  await page.getByRole('combobox', { name: 'Curve' }).selectOption('keel');
+  await page.getByRole('progressbar', { name: 'Working out the curve' }).waitFor({ state: 'detached' });
+  await page
+    .getByRole('combobox', { name: 'A click hangs' })
+    .selectOption({ label: 'Row of lamps for the ribs' });
+  const plot = page.getByTestId('carry-plot');
+  const { y, height } = (await plot.boundingBox())!;
+  const { x } = await planeOnPage(page, 1.2, 0);
+  await page.mouse.click(x, y + height / 2);
+  const { loads, parts } = JSON.parse(await savedText(page));
+  const [load] = loads.filter(({ name }: { name: string }) => name.startsWith('Row of lamps'));
+  const part = parts.find(({ id }: { id: string }) => id === load.id);
+  expect(part.place.kind).toBe('keel');
+  expect(part.place.station).toBeCloseTo(1.2, 1);
+  await page.getByRole('button', { name: /^Undo/ }).click();
+  expect(await savedText(page)).toBe(before);
 });
 
 test('the solver comes with the plan, not with the page; without a network it is there too', async ({
