@@ -6,7 +6,7 @@ import { useCell } from './cell.ts';
 import { openFile } from './commands.ts';
 import { Dialogs } from './Dialogs.tsx';
 import { dropKind, takeDrops } from './drops.ts';
-import { NoticeArea } from './NoticeArea.tsx';
+import { takePastes } from './pastes.ts';
 import type { Store } from './store.ts';
 import { usePalette } from './theme.ts';
 import { useEditorOf } from './useEditorOf.ts';
@@ -16,6 +16,7 @@ export function App({ store }: { store: Store }) {
   const editor = useEditorOf(store);
   const palette = usePalette(useCell(store.settings).theme);
   const over = useDrops(store);
+  useEffect(() => takePastes(store.table.set), [store]);
   const { name } = editor.craft;
   useEffect(() => {
     document.title = `${name || 'Craft without a name'} – Steelyard`;
@@ -25,7 +26,6 @@ export function App({ store }: { store: Store }) {
       <CommandBar store={store} />
       <Workspace store={store} editor={editor} palette={palette} />
       <Dialogs store={store} />
-      <NoticeArea notices={store.notices} />
       {over && (
         <div className="drop-veil">Drop a craft file to open it, or a table of parts to add them.</div>
       )}

@@ -24,6 +24,8 @@ export function Dialogs({ store }: { store: Store }) {
       const create = (craft: Parameters<Store['start']>[0]) => {
         close();
         store.start(craft);
+        // After the dialog has gone and given the focus back to its button.
+        requestAnimationFrame(focusSideView);
       };
       return <NewCraftDialog onCreate={create} onClose={close} />;
     }
@@ -31,6 +33,8 @@ export function Dialogs({ store }: { store: Store }) {
       return null;
   }
 }
+
+const focusSideView = () => document.querySelector<HTMLElement>('[data-testid=side-view]')?.focus();
 
 const RefusalDialog = ({
   refusal: { name, problems },

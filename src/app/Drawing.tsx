@@ -7,6 +7,7 @@ import { useView } from '../canvas/useView.ts';
 import type { Editor } from '../panels/editor.ts';
 import type { Palette } from '../scene/palette.ts';
 import { useCell } from './cell.ts';
+import { NoticeArea } from './NoticeArea.tsx';
 import type { Store } from './store.ts';
 
 interface DrawingProps {
@@ -20,9 +21,11 @@ export function Drawing({ store, editor, palette }: DrawingProps) {
   const { tilted } = useCell(store.view);
   const viewState = useView();
   useFitOnCommand(store, viewState.fit);
-  const shown = { session, craft, selection, assessment, units, palette, tilted };
+  const { snap, several } = useCell(store.hands);
+  const shown = { session, craft, selection, assessment, units, palette, tilted, snap, several };
   return (
     <div className="drawing">
+      <NoticeArea notices={store.notices} />
       <div className="side-view">
         <SideView {...shown} viewState={viewState} />
       </div>

@@ -1,7 +1,8 @@
 /** When the page itself fails: the work is still in the store, can be saved to a file, and the page tried again. */
 import { Component, type ReactNode } from 'react';
 import { serialize } from '../craft/serialize.ts';
-import { download, fileName } from './files.ts';
+import { fileName } from '../panels/ledger/download.ts';
+import { download } from './files.ts';
 import type { Store } from './store.ts';
 
 interface Props {
@@ -19,7 +20,7 @@ export class ErrorBoundary extends Component<Props, { readonly error: Error | nu
   readonly #save = () => {
     this.props.store.session.cancelDrag();
     const { craft } = this.props.store.session.getState();
-    download(serialize(craft), fileName(craft));
+    download(serialize(craft), fileName(craft.name, 'json'));
   };
 
   readonly #stepBack = () => {

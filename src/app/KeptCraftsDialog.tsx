@@ -2,7 +2,7 @@
 import { useCallback, useEffect, useState } from 'react';
 import { type CraftEntry, CraftsDialog, type SampleEntry } from '../panels/CraftsDialog.tsx';
 import { craftEntries, duplicateKept, renameKept } from './keptCrafts.ts';
-import { openKept, openText } from './openings.ts';
+import { openAfresh, openKept } from './openings.ts';
 import { sampleEntries, sampleText } from './samples.ts';
 import type { Store } from './store.ts';
 
@@ -27,7 +27,7 @@ export function KeptCraftsDialog({ store, onClose }: { store: Store; onClose: ()
       onRename={(id, name) => change(renameKept(store, id, name))}
       onDuplicate={(id) => change(duplicateKept(store, id))}
       onDelete={(id) => change(store.keep.remove(id))}
-      onSample={(id) => leaveFor(sampleText(id).then((text) => openText(store, text, id)))}
+      onSample={(id) => leaveFor(sampleText(id).then((text) => openAfresh(store, text, id)))}
       onNew={() => store.dialog.set('newCraft')}
       onClose={onClose}
     />
@@ -37,5 +37,5 @@ export function KeptCraftsDialog({ store, onClose }: { store: Store; onClose: ()
 /** As a craft of its own, so that neither it nor what came after is lost. */
 async function openVersion(store: Store, id: string, index: number): Promise<void> {
   const version = (await store.keep.versions(id))[index];
-  if (version) await openText(store, version.text, version.name);
+  if (version) await openAfresh(store, version.text, version.name);
 }

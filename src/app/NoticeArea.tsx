@@ -27,7 +27,7 @@ function NoticeLine({ notice: { tone, message, action }, dismiss }: { notice: No
           {action.label}
         </button>
       )}
-      <button type="button" className="command terse" aria-label="Dismiss" onClick={dismiss}>
+      <button type="button" className="command" aria-label="Dismiss" onClick={dismiss}>
         <Icon name="close" />
       </button>
     </div>

@@ -16,10 +16,9 @@ interface WorkspaceProps {
 }
 
 const COLUMN = { least: 260, usual: innerWidth < 1200 ? 320 : 348 };
-const LEDGER = {
-  least: 96,
-  usual: Math.round(innerHeight * (matchMedia('(pointer: coarse)').matches ? 0.25 : 0.23)),
-};
+/** A finger needs taller rows; a small page has no more to give, or the drawing gets too small. */
+const LEDGER_SHARE = innerWidth < 1200 ? 0.26 : matchMedia('(pointer: coarse)').matches ? 0.3 : 0.24;
+const LEDGER = { least: 96, usual: Math.round(innerHeight * LEDGER_SHARE) };
 
 export function Workspace({ store, editor, palette }: WorkspaceProps) {
   const [column, setColumn] = useState(COLUMN.usual);

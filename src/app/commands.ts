@@ -9,7 +9,7 @@ import { called, idsOf, type Selectable } from '../edit/selection.ts';
 import { hullLengthOf } from '../panels/defaults.ts';
 import { assessed } from './assessed.ts';
 import { chooseFile, type Saved, saveCraft } from './files.ts';
-import { openText } from './openings.ts';
+import { type Opened, openText } from './openings.ts';
 import { nextTheme, otherUnits } from './settings.ts';
 import type { Store } from './store.ts';
 
@@ -32,6 +32,8 @@ const COMMAND_TABLE = {
   redo: (store) => store.session.redo(),
   tilt: (store) => store.view.set({ ...store.view.get(), tilted: !store.view.get().tilted }),
   fit: (store) => store.fit.set(store.fit.get() + 1),
+  several: (store) => store.hands.set({ ...store.hands.get(), several: !store.hands.get().several }),
+  snap: (store) => store.hands.set({ ...store.hands.get(), snap: !store.hands.get().snap }),
   units: (store) =>
     store.settings.set({ ...store.settings.get(), units: otherUnits(store.settings.get().units) }),
   theme: (store) =>
@@ -104,8 +106,16 @@ async function openChosen(store: Store): Promise<void> {
 
 export async function openFile(store: Store, file: File): Promise<void> {
   const opened = await openText(store, await file.text(), file.name);
-  if (opened) store.notices.add(`Opened ${file.name}.`);
+  if (opened) store.notices.add(`Opened ${file.name}.${OPENED_WORDS[opened.how](opened.as)}`);
 }
+
+const OPENED_WORDS: Readonly<Record<Opened['how'], (as: string) => string>> = {
+  new: () => '',
+  kept: () => ' It was kept here already.',
+  earlier: (as) =>
+    ` It is kept here as “${as}” and was changed since: this is how it is now. As in the file it stands under Crafts, earlier versions.`,
+  renamed: (as) => ` Another craft of that name is kept here and differs, so this one is called “${as}”.`,
+};
 
 async function save(store: Store): Promise<void> {
   try {

@@ -1,20 +1,9 @@
 /** Craft files: chosen, dropped and saved. */
 import type { Craft } from '../craft/craft.ts';
 import { serialize } from '../craft/serialize.ts';
+import { fileName } from '../panels/ledger/download.ts';
 
 const MIME = 'application/json';
-
-/** "Atrium camera craft" → atrium-camera-craft.json */
-export function fileName(craft: Pick<Craft, 'name'>): string {
-  const plain = craft.name
-    .normalize('NFKD')
-    .toLowerCase()
-    .replace(/[\u0300-\u036f]/g, '')
-    .replace(/[^\p{L}\p{N}]+/gu, '-')
-    .replace(/^-+|-+$/g, '')
-    .slice(0, 60);
-  return `${plain || 'craft'}.json`;
-}
 
 /** Lets the builder choose a file. Resolves to null when none was chosen. */
 export function chooseFile(accept = `.json,${MIME}`): Promise<File | null> {
@@ -46,7 +35,8 @@ export async function saveCraft(
 ): Promise<{ saved: Saved; handle: FileSystemFileHandle | null }> {
   const text = serialize(craft);
   const { showSaveFilePicker } = window as SavePicker;
-  if (!handle && !showSaveFilePicker) return { saved: download(text, fileName(craft)), handle: null };
+  if (!handle && !showSaveFilePicker)
+    return { saved: download(text, fileName(craft.name, 'json')), handle: null };
   const chosen = handle ?? (await askWhere(craft, showSaveFilePicker!));
   if (!chosen) return { saved: 'cancelled', handle };
   await write(chosen, text);
@@ -56,7 +46,7 @@ export async function saveCraft(
 async function askWhere(craft: Craft, pick: NonNullable<SavePicker['showSaveFilePicker']>) {
   const types = [{ description: 'Steelyard craft', accept: { [MIME]: ['.json'] } }];
   try {
-    return await pick.call(window, { suggestedName: fileName(craft), types });
+    return await pick.call(window, { suggestedName: fileName(craft.name, 'json'), types });
   } catch (error) {
     if ((error as DOMException).name === 'AbortError') return null;
     throw error;

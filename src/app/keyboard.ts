@@ -5,11 +5,16 @@ import type { Store } from './store.ts';
 
 const TYPED_IN =
   'input:not([type=checkbox]):not([type=radio]):not([type=button]):not([type=file]), textarea, [contenteditable]';
+/** Elements to which a key without Ctrl or Cmd belongs: a letter goes to its entry in a list. */
+const KEYED = 'input, select, textarea, [contenteditable], [role=menu], [role=listbox]';
 /** Elements that use the arrow keys themselves. */
-const ARROWED = 'select, [role=tab], [role=separator], [role=slider], [role=menuitem], input[type=radio]';
+const ARROWED = '[role=tab], [role=separator], [role=slider]';
 
 const closest = (target: EventTarget | null, selector: string): boolean =>
   target instanceof Element && target.closest(selector) !== null;
+
+/** Whether keys and pasted text go into a field there. */
+export const inText = (target: EventTarget | null): boolean => closest(target, TYPED_IN);
 
 /** Starts listening; returns how to stop. */
 export function listenForKeys(store: Store): () => void {
@@ -27,7 +32,8 @@ export function listenForKeys(store: Store): () => void {
   };
   const onKey = (event: KeyboardEvent) => {
     if (event.defaultPrevented || event.isComposing) return;
-    const command = commandFor(event, closest(event.target, TYPED_IN));
+    const own = event.ctrlKey || event.metaKey ? TYPED_IN : KEYED;
+    const command = commandFor(event, closest(event.target, own));
     if (!command || !allowed(command, event, drafted)) return;
     event.preventDefault();
     COMMANDS[command](store);

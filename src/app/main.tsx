@@ -9,6 +9,7 @@ import { settingsFrom } from './settings.ts';
 import { Store } from './store.ts';
 import './base.css';
 import './layout.css';
+import './overlays.css';
 import './panels.css';
 
 const keep = await openKeep();

@@ -4,6 +4,14 @@
 export const freshId = (): string =>
   `${Date.now().toString(36)}-${Math.floor(Math.random() * 2 ** 40).toString(36)}`;
 
+/** "Heron", or "Heron 2" when that is taken. */
+export function freeName(name: string, taken: ReadonlySet<string>): string {
+  for (let n = 1; ; n++) {
+    const free = n === 1 ? name : `${name.slice(0, 190)} ${n}`;
+    if (!taken.has(free)) return free;
+  }
+}
+
 const KEY = 'steelyard craft';
 
 /** The craft this tab showed last, which need not be the last one of all tabs. */

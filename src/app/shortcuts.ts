@@ -2,12 +2,14 @@
  * Which key means which command. One table: the page obeys it and the help dialog lists it. `Mod` is Ctrl, or Cmd
  * on a Mac. Keys that a browser needs for itself (tabs, windows, reload, zoom, find, the address line) are not used.
  */
+import { say } from '../units/sentence.ts';
 import type { CommandId } from './commands.ts';
 
 export interface Shortcut {
   readonly command: CommandId;
   /** Modifiers in the order Mod, Shift, then the key as KeyboardEvent.key names it. */
   readonly keys: readonly string[];
+  /** To be put through `inUnits`. */
   readonly does: string;
   /** Whether it also works while a text field has the focus. */
   readonly inText: boolean;
@@ -20,6 +22,9 @@ const shortcut = (command: CommandId, does: string, keys: readonly string[], inT
   inText,
 });
 
+const nudge = (way: string): string => `Nudge ${say(0.001, 'smallLength')} ${way}`;
+const leap = (way: string): string => `Nudge ${say(0.01, 'smallLength')} ${way}`;
+
 export const SHORTCUTS: readonly Shortcut[] = [
   shortcut('undo', 'Undo', ['Mod+z'], true),
   shortcut('redo', 'Redo', ['Mod+Shift+z', 'Mod+y'], true),
@@ -28,14 +33,14 @@ export const SHORTCUTS: readonly Shortcut[] = [
   shortcut('selectAll', 'Select all parts', ['Mod+a']),
   shortcut('duplicate', 'Duplicate the selected parts', ['Mod+d']),
   shortcut('remove', 'Remove what is selected', ['Delete', 'Backspace']),
-  shortcut('nudgeFore', 'Nudge 1 mm forward', ['ArrowLeft']),
-  shortcut('nudgeAft', 'Nudge 1 mm aft', ['ArrowRight']),
-  shortcut('nudgeUp', 'Nudge 1 mm up', ['ArrowUp']),
-  shortcut('nudgeDown', 'Nudge 1 mm down', ['ArrowDown']),
-  shortcut('leapFore', 'Nudge 10 mm forward', ['Shift+ArrowLeft']),
-  shortcut('leapAft', 'Nudge 10 mm aft', ['Shift+ArrowRight']),
-  shortcut('leapUp', 'Nudge 10 mm up', ['Shift+ArrowUp']),
-  shortcut('leapDown', 'Nudge 10 mm down', ['Shift+ArrowDown']),
+  shortcut('nudgeFore', nudge('forward'), ['ArrowLeft']),
+  shortcut('nudgeAft', nudge('aft'), ['ArrowRight']),
+  shortcut('nudgeUp', nudge('up'), ['ArrowUp']),
+  shortcut('nudgeDown', nudge('down'), ['ArrowDown']),
+  shortcut('leapFore', leap('forward'), ['Shift+ArrowLeft']),
+  shortcut('leapAft', leap('aft'), ['Shift+ArrowRight']),
+  shortcut('leapUp', leap('up'), ['Shift+ArrowUp']),
+  shortcut('leapDown', leap('down'), ['Shift+ArrowDown']),
   shortcut('tilt', 'Show as it floats, or level', ['t']),
   shortcut('fit', 'Fit the craft in the view', ['f']),
   shortcut('keys', 'Show this list', ['?']),

@@ -32,6 +32,14 @@ export interface Refusal {
   readonly problems: readonly Problem[];
 }
 
+/** How the hand works, for this visit. */
+export interface Hands {
+  /** Whether what is dragged snaps. */
+  readonly snap: boolean;
+  /** Whether a pick adds to what is selected. */
+  readonly several: boolean;
+}
+
 export const FIRST_VIEW: KeptView = { tilted: false, tab: 'hull' };
 
 export class Store {
@@ -39,6 +47,7 @@ export class Store {
   readonly shown: Cell<SessionState>;
   readonly view: Cell<KeptView>;
   readonly settings: Cell<Settings>;
+  readonly hands = new Cell<Hands>({ snap: true, several: false });
   readonly notices = new Notices();
   readonly dialog = new Cell<DialogId | null>(null);
   readonly refusal = new Cell<Refusal | null>(null);

@@ -8,6 +8,7 @@ import type { Store } from './store.ts';
 export function useEditorOf(store: Store): Editor {
   const { craft, selection, dragging, undoLabel, redoLabel } = useCell(store.shown);
   const { units } = useCell(store.settings);
+  const { several } = useCell(store.hands);
   return useMemo(
     () => ({
       session: store.session,
@@ -18,10 +19,11 @@ export function useEditorOf(store: Store): Editor {
       redoLabel,
       assessment: assessed(craft, units),
       units,
+      several,
       apply: store.apply,
       select: (next) => store.session.select(next),
       notify: store.notices.add,
     }),
-    [store, craft, selection, dragging, undoLabel, redoLabel, units],
+    [store, craft, selection, dragging, undoLabel, redoLabel, units, several],
   );
 }

@@ -2,11 +2,17 @@
 import { useMemo, useRef, useState } from 'react';
 import { Layer, Stage } from 'react-konva/es/ReactKonvaCore.js';
 import { isSelected, type Selectable } from '../edit/selection.ts';
+import { aboutBarShort } from '../scene/about.ts';
 import { beamOf, type PlacedBar } from '../scene/beam.ts';
-import { barAt, layBeam } from '../scene/beamLayout.ts';
+import { type BeamRows, barAt, beamRows, layBeam, type Zone, zonesOf } from '../scene/beamLayout.ts';
+import { spotBeside } from '../scene/clearSpot.ts';
+import type { Readout } from '../scene/readout.ts';
+import type { Rect } from '../scene/rect.ts';
+import { isLevel } from '../scene/subject.ts';
 import type { View } from '../scene/view.ts';
 import { beamInWords } from '../scene/words.ts';
-import { BeamMarks, onBeam } from './BeamMarks.tsx';
+import { BeamMarks, keyOfBar, onBeam } from './BeamMarks.tsx';
+import { Bubble, bubbleExtent } from './Bubble.tsx';
 import { Frame } from './Frame.tsx';
 import type { Hand } from './gestures/gesture.ts';
 import { pan } from './gestures/pan.ts';
@@ -18,9 +24,11 @@ import { Unformed } from './Unformed.tsx';
 import { useGeometry } from './useGeometry.ts';
 import { useGestures } from './useGestures.ts';
 import { useGround, useOverlay } from './useGround.ts';
-import { useSize } from './useSize.ts';
+import { type Size, useSize } from './useSize.ts';
 
 const TOUCH_SLOP = 10;
+/** rad */
+const LEAST_LEAN = 0.01;
 
 export function BeamView(props: SharedProps) {
   const { geometry } = useGeometry(props);
@@ -34,8 +42,18 @@ function thingOf({ kind, id }: PlacedBar): Selectable | null {
   return kind === 'lead' ? { kind: 'hardpoint', id } : null;
 }
 
+/** Drawn in an attitude in which stations above do not lie over those of the beam, so that no line may join them. */
+const leansFrom = ({ tilted, geometry }: DrawnProps): boolean =>
+  tilted && Math.abs(geometry.attitude?.pitch ?? 0) > LEAST_LEAN;
+
+/** Under the beam or beside the bar, whichever the pane has room for. */
+function bubbleRect({ title, lines }: Readout, { left, right }: Zone, rows: BeamRows, size: Size): Rect {
+  const bars = { left, right, top: rows.top, bottom: rows.top + rows.bar };
+  return spotBeside(size, bubbleExtent(title, lines, 260), bars, { clear: [bars] });
+}
+
 function BeamFrame(props: SharedProps & DrawnProps) {
-  const { session, selection, palette, viewState, geometry, units, craft, assessment } = props;
+  const { selection, palette, viewState, geometry, units, craft, assessment } = props;
   const frame = useRef<HTMLDivElement>(null);
   const size = useSize(frame);
   const [hovered, setHovered] = useState<string | null>(null);
@@ -47,6 +65,7 @@ function BeamFrame(props: SharedProps & DrawnProps) {
   );
   const beam = useMemo(() => beamOf(geometry.beam, geometry.lead), [geometry.beam, geometry.lead]);
   const page = layBeam(beam, view);
+  const rows = beamRows(size.height);
   const scene = {
     craft,
     assessment,
@@ -58,10 +77,11 @@ function BeamFrame(props: SharedProps & DrawnProps) {
     lines: [],
     hardpoints: [],
     support: null,
+    wireHandles: [],
   };
-  const ground = useGround(session, scene, useOverlay(), viewState);
+  const ground = useGround(props, scene, useOverlay(), viewState);
 
-  const under = ({ x, y, touch }: Hand) => (onBeam(y, size) ? barAt(page, x, touch ? TOUCH_SLOP : 0) : null);
+  const under = ({ x, y, touch }: Hand) => (onBeam(y, rows) ? barAt(page, x, touch ? TOUCH_SLOP : 0) : null);
   const take: Take = (on, down) => {
     const bar = under(down);
     const thing = bar && thingOf(bar);
@@ -71,8 +91,9 @@ function BeamFrame(props: SharedProps & DrawnProps) {
   };
   const gestures = useGestures(frame, ground, take, (hand) => {
     const bar = hand && under(hand);
-    setHovered(bar ? `${bar.kind} ${bar.id}` : null);
+    setHovered(bar && keyOfBar(bar));
   });
+  const hoveredZone = zonesOf(page).find(({ bar }) => keyOfBar(bar) === hovered);
   const isLit = (bar: PlacedBar) => {
     const thing = thingOf(bar);
     return thing !== null && isSelected(selection, thing);
@@ -82,7 +103,7 @@ function BeamFrame(props: SharedProps & DrawnProps) {
       frame={frame}
       testId="beam-view"
       label="Beam of moments about the CB"
-      description={beamInWords(beam, units)}
+      description={beamInWords(beam, scene)}
       status=""
       view={view}
       cursor={hovered ? 'pointer' : 'default'}
@@ -94,6 +115,9 @@ function BeamFrame(props: SharedProps & DrawnProps) {
           <BeamMarks
             beam={beam}
             page={page}
+            rows={rows}
+            leaders={rows.leaders && !leansFrom(props)}
+            level={isLevel(assessment)}
             size={size}
             units={units}
             palette={palette}
@@ -102,6 +126,13 @@ function BeamFrame(props: SharedProps & DrawnProps) {
           />
         </Layer>
       </Stage>
+      {hoveredZone && size.width > 0 && (
+        <Bubble
+          {...aboutBarShort(scene, hoveredZone.bar)}
+          rect={bubbleRect(aboutBarShort(scene, hoveredZone.bar), hoveredZone, rows, size)}
+          palette={palette}
+        />
+      )}
     </Frame>
   );
 }

@@ -1,36 +1,42 @@
-/** A few lines of text beside the hand, kept inside the view. */
+/** A few lines of text over a view, where they cover nothing the eye is on. */
+import type { Extent } from '../scene/clearSpot.ts';
 import type { Palette } from '../scene/palette.ts';
-import type { ScreenPoint } from '../scene/view.ts';
-import { FONT } from './paint.ts';
-import type { Size } from './useSize.ts';
+import type { Rect } from '../scene/rect.ts';
+import { FONT, fontOf, textWidth } from './paint.ts';
 
 const LINE = 17;
-/** Mean width of a letter, to guess where lines wrap. */
-const LETTER = 6.6;
-/** How far from the hand it stands, px. */
-export const BESIDE = 22;
+/** Edges and padding, both sides. */
+const PAD_X = 20;
+const PAD_Y = 14;
+/** Figures of even width, and words that wrap early, take a little more than measured. */
+const SLACK = 1.06;
 
-export interface BubbleProps {
-  readonly at: ScreenPoint;
-  readonly lines: readonly string[];
-  readonly size: Size;
-  readonly palette: Palette;
-  readonly width?: number;
+/** How large the text will be, no wider than `most` px. */
+export function bubbleExtent(title: string | null, lines: readonly string[], most: number): Extent {
+  const widths = [
+    ...(title ? [textWidth(title, fontOf(12, 600))] : []),
+    ...lines.map((line) => textWidth(line, fontOf(12))),
+  ].map((width) => width * SLACK);
+  const room = most - PAD_X;
+  const rows = widths.reduce((sum, width) => sum + Math.max(1, Math.ceil(width / room)), 0);
+  return { width: Math.ceil(Math.min(most, Math.max(...widths) + PAD_X)), height: rows * LINE + PAD_Y };
 }
 
-export function Bubble({ at, lines, size, palette, width = 290 }: BubbleProps) {
-  const rows = lines.reduce((sum, line) => sum + Math.ceil((line.length * LETTER) / (width - 18)), 0);
-  const height = rows * LINE + 12;
-  const left = Math.max(4, Math.min(at.x + BESIDE, size.width - width - 4));
-  const below = at.y + BESIDE + height < size.height;
-  const top = Math.max(4, below ? at.y + BESIDE : at.y - BESIDE - height);
+export interface BubbleProps {
+  readonly title: string | null;
+  readonly lines: readonly string[];
+  readonly rect: Rect;
+  readonly palette: Palette;
+}
+
+export function Bubble({ title, lines, rect, palette }: BubbleProps) {
   return (
     <div
       style={{
         position: 'absolute',
-        left,
-        top,
-        maxWidth: width,
+        left: rect.left,
+        top: rect.top,
+        width: rect.right - rect.left,
         boxSizing: 'border-box',
         padding: '6px 9px',
         font: `12px/${LINE}px ${FONT}`,
@@ -42,6 +48,7 @@ export function Bubble({ at, lines, size, palette, width = 290 }: BubbleProps) {
         pointerEvents: 'none',
       }}
     >
+      {title && <div style={{ fontWeight: 600 }}>{title}</div>}
       {lines.map((line) => (
         <div key={line}>{line}</div>
       ))}

@@ -28,6 +28,9 @@ const FILL: CSSProperties = {
   overflow: 'hidden',
   touchAction: 'none',
   userSelect: 'none',
+  // The ring of the focus is drawn inside the edge and over the canvases.
+  outlineOffset: -3,
+  isolation: 'isolate',
 };
 
 const UNSEEN: CSSProperties = {
@@ -60,7 +63,7 @@ export function Frame(props: FrameProps) {
       onPointerLeave={leave}
       {...handlers}
     >
-      <div aria-hidden="true" style={{ position: 'absolute', inset: 0 }}>
+      <div aria-hidden="true" style={{ position: 'absolute', inset: 0, zIndex: -1 }}>
         {children}
       </div>
       <p id={described} style={UNSEEN}>

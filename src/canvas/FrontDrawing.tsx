@@ -1,11 +1,14 @@
 /** The front view on two layers: sections, clock and parts; and what shows the hand what it does. */
 import type { Context } from 'konva/lib/Context.js';
-import { memo } from 'react';
+import { memo, useRef } from 'react';
 import { Group, Layer, Shape, Stage } from 'react-konva/es/ReactKonvaCore.js';
 import { isSelected, type Selection } from '../edit/selection.ts';
-import { frontMarks } from '../scene/marks.ts';
+import { type ClockName, clockNames, radiusAt } from '../scene/clockNames.ts';
+import { keepSame } from '../scene/keepSame.ts';
+import { frontMarks, marksTaken } from '../scene/marks.ts';
 import { onSection } from '../scene/outline.ts';
 import type { Palette } from '../scene/palette.ts';
+import { around, type Rect, screenBox } from '../scene/rect.ts';
 import { type PlanePoint, toScreen, type View } from '../scene/view.ts';
 import { heelAngle } from '../scene/words.ts';
 import { BalanceMark } from './BalanceMark.tsx';
@@ -25,13 +28,16 @@ export interface FrontDrawingProps {
   readonly greatest: readonly PlanePoint[];
   /** At the station of the part selected; null when none is. */
   readonly section: readonly PlanePoint[] | null;
+  /** Whether something is being dragged, in whichever view. */
+  readonly busy: boolean;
 }
 
-export function FrontDrawing({ scene, selection, overlay, greatest, section }: FrontDrawingProps) {
+export function FrontDrawing({ scene, selection, overlay, greatest, section, busy }: FrontDrawingProps) {
   const { view, palette, geometry, figures, still, moving, lines } = scene;
   const px = 1 / view.scale;
   const world = worldTransform(view);
   const { hover } = overlay;
+  const names = useClockNames(scene, greatest, busy);
   const eyelets = scene.hardpoints.map(({ id, at }) => ({
     id,
     at: toScreen(view, at),
@@ -44,7 +50,7 @@ export function FrontDrawing({ scene, selection, overlay, greatest, section }: F
           <Greatest outline={greatest} palette={palette} px={px} />
           <PartMarks figures={still} palette={palette} px={px} />
         </Group>
-        <Clock view={view} palette={palette} outline={greatest} />
+        <Clock view={view} palette={palette} outline={greatest} names={names} />
       </Layer>
       <Layer listening={false}>
         <Group {...world}>
@@ -115,23 +121,51 @@ interface ClockProps {
   readonly palette: Palette;
   /** Clockwise from the top, evenly. */
   readonly outline: readonly PlanePoint[];
+  readonly names: readonly ClockName[];
 }
 
-/** Ticks every 15° round the section, clockwise from the top as seen from astern, named every 90°. */
-const Clock = memo(({ view, palette, outline }: ClockProps) => (
+/** Ticks every 15° round the section, clockwise from the top as seen from astern, longer and named every 90°. */
+const Clock = memo(({ view, palette, outline, names }: ClockProps) => (
   <Shape
     sceneFunc={(context) => {
+      for (let degrees = 0; degrees < 360; degrees += STEP) tick(context, view, palette, outline, degrees);
       context.font = fontOf(11);
       context.textAlign = 'center';
       context.textBaseline = 'middle';
-      for (let degrees = 0; degrees < 360; degrees += STEP) tick(context, view, palette, outline, degrees);
+      for (const { text, at, onGas } of names) {
+        writeOn(context, text, at, palette.inkSoft, onGas ? palette.gas : palette.paper);
+      }
       context.textAlign = 'left';
       writeOn(context, 'from astern', { x: 6, y: 11 }, palette.inkSoft, palette.paper);
     }}
   />
 ));
 
-const NAMES: Readonly<Record<number, string>> = { 0: '0°', 90: '90°', 180: '180°', 270: '270°' };
+/** What 'from astern' takes up. */
+const TITLE: Rect = { left: 0, right: 78, top: 0, bottom: 20 };
+
+/** Where the names are free; they hold still while a hand is at work. */
+function useClockNames(
+  scene: Scene & Movers,
+  outline: readonly PlanePoint[],
+  busy: boolean,
+): readonly ClockName[] {
+  const last = useRef<readonly ClockName[]>([]);
+  if (!busy) {
+    const { view, geometry, figures, hardpoints } = scene;
+    const taken = [
+      TITLE,
+      ...marksTaken(frontMarks(view, geometry)),
+      ...figures.map((figure) => screenBox(figure, view)),
+      ...hardpoints.map(({ at }) => around(toScreen(view, at), 6)),
+    ];
+    last.current = keepSame(last.current, clockNames(outline, view, taken), sameName);
+  }
+  return last.current;
+}
+
+const sameName = (a: ClockName, b: ClockName): boolean =>
+  a.text === b.text && a.onGas === b.onGas && a.at.x === b.at.x && a.at.y === b.at.y;
 
 function tick(
   context: Context,
@@ -140,17 +174,13 @@ function tick(
   outline: readonly PlanePoint[],
   degrees: number,
 ): void {
-  const { u, z } = outline[Math.round((outline.length * degrees) / 360)]!;
-  const radius = Math.hypot(u, z);
+  const radius = radiusAt(outline, degrees);
   const clock = (degrees * Math.PI) / 180;
-  // On a small section the names would lie on each other.
-  const name = radius * view.scale > 62 ? NAMES[degrees] : undefined;
   const at = (px: number) => toScreen(view, onSection(clock, radius + px / view.scale));
   context.strokeStyle = palette.inkSoft;
   context.lineWidth = 1;
-  traceOnScreen(context, [at(name ? -8 : -5), at(0)], false);
+  traceOnScreen(context, [at(degrees % 90 === 0 ? -8 : -5), at(0)], false);
   context.stroke();
-  if (name) writeOn(context, name, at(-20), palette.inkSoft, palette.gas);
 }
 
 function guideShown(view: View, { guide }: Overlay, radius: number): HandMarksProps['guide'] {

@@ -5,21 +5,24 @@ import { frontFigure } from '../scene/figure.ts';
 import { fromAstern, hardpointPoints, wireLines } from '../scene/flatten.ts';
 import { sameGrip } from '../scene/grip.ts';
 import { FigureCache } from '../scene/keepSame.ts';
-import { onSection, sectionOutline, widestStation } from '../scene/outline.ts';
+import { frontMargins } from '../scene/margins.ts';
+import { frontMarks } from '../scene/marks.ts';
+import { sectionOutline, widestStation } from '../scene/outline.ts';
 import { frontReadout } from '../scene/readout.ts';
 import type { Geometry } from '../scene/subject.ts';
-import type { PlanePoint, View } from '../scene/view.ts';
+import type { View } from '../scene/view.ts';
 import { frontInWords } from '../scene/words.ts';
-import { BESIDE, Bubble } from './Bubble.tsx';
 import { Frame } from './Frame.tsx';
 import { FrontDrawing } from './FrontDrawing.tsx';
 import type { Hand } from './gestures/gesture.ts';
 import { gripUnder, type Take, takeInFront } from './gestures/take.ts';
 import { keysOf } from './keys.ts';
+import { Notes } from './Notes.tsx';
+import { inSightOf, thingUnder } from './notesOf.ts';
 import { cursorOf } from './overlay.ts';
 import type { CanvasProps, DrawnProps } from './props.ts';
 import { Unformed } from './Unformed.tsx';
-import { useFit } from './useFit.ts';
+import { frontPoints, useFit } from './useFit.ts';
 import { useGeometry } from './useGeometry.ts';
 import { useGestures } from './useGestures.ts';
 import { useGround, useOverlay } from './useGround.ts';
@@ -27,8 +30,6 @@ import { useMovers } from './useMovers.ts';
 import { useLie } from './useSideScene.ts';
 import { useSize } from './useSize.ts';
 import { useView } from './useView.ts';
-
-const MARGINS = { left: 26, right: 26, top: 26, bottom: 26 };
 
 const KEYS =
   'Left and right arrows turn what is selected round the hull, up and down move it out and in. Square brackets select the part before or after.';
@@ -38,16 +39,6 @@ export function FrontView(props: CanvasProps) {
   if (!geometry) return <Unformed why="" palette={props.palette} testId="front-view" />;
   return <FrontFrame {...props} geometry={geometry} />;
 }
-
-/** Everything that should be seen from astern. */
-const frontPoints = ({ hull, pieces, hardpoints }: Geometry): PlanePoint[] => [
-  ...[0, 90, 180, 270].map((degrees) => {
-    const clock = (degrees * Math.PI) / 180;
-    return onSection(clock, hull.radius(widestStation(hull), clock));
-  }),
-  ...pieces.map(({ middle }) => fromAstern(middle)),
-  ...hardpoints.map(({ at }) => fromAstern(at)),
-];
 
 function FrontFrame(props: CanvasProps & DrawnProps) {
   const { session, selection, palette, geometry, tilted, craft, assessment, units } = props;
@@ -65,7 +56,8 @@ function FrontFrame(props: CanvasProps & DrawnProps) {
   );
   const [cache] = useState(() => new FigureCache(frontFigure));
   const figures = cache.figures(craft, geometry, 1 / view.scale);
-  const movers = useMovers(figures, session.getState().dragging);
+  const { dragging } = session.getState();
+  const movers = useMovers(figures, dragging);
   const scene = {
     ...movers,
     figures,
@@ -73,23 +65,30 @@ function FrontFrame(props: CanvasProps & DrawnProps) {
     lines: wireLines(geometry.wires, fromAstern),
     hardpoints: hardpointPoints(geometry, fromAstern),
     support: null,
+    wireHandles: [],
   };
-  const ground = useGround(session, scene, overlays, viewState);
+  const ground = useGround(props, scene, overlays, viewState);
   const { height, breadth } = geometry.hull;
-  useFit(viewState, view, `${tilted} ${height} ${breadth}`, busy, () => frontPoints(geometry), MARGINS);
+  useFit(
+    viewState,
+    view,
+    `${tilted} ${height} ${breadth}`,
+    busy,
+    () => frontPoints(craft, geometry),
+    frontMargins(size),
+  );
   const outlines = useOutlines(geometry, idsOf(selection, 'part'));
 
   const hover = (hand: Hand | null) => {
-    const next = hand && gripUnder(ground, hand, []);
+    const next = hand && gripUnder(ground, hand);
     const taken = next?.kind === 'hull' ? null : next;
-    if (!sameGrip(taken, overlay.hover)) show({ hover: taken });
+    if (!sameGrip(taken, overlay.hover)) show({ hover: taken, hoverAt: hand });
   };
   const take: Take = (on, hand) => {
     show({ hint: null, hover: null });
     return takeInFront(on, hand);
   };
   const gestures = useGestures(frame, ground, take, hover);
-  const lines = overlay.held ? frontReadout(scene, overlay.held) : overlay.hint ? [overlay.hint] : [];
   return (
     <Frame
       frame={frame}
@@ -106,10 +105,16 @@ function FrontFrame(props: CanvasProps & DrawnProps) {
       }}
       leave={() => hover(null)}
     >
-      <FrontDrawing scene={scene} selection={selection} overlay={overlay} {...outlines} />
-      {lines.length > 0 && (
-        <Bubble at={{ x: -BESIDE, y: size.height }} lines={lines} size={size} palette={palette} width={220} />
-      )}
+      <FrontDrawing scene={scene} selection={selection} overlay={overlay} busy={dragging} {...outlines} />
+      <Notes
+        hint={overlay.hint}
+        readout={overlay.held && frontReadout(scene, overlay.held)}
+        under={thingUnder(scene, overlay)}
+        inSight={inSightOf(scene, frontMarks(view, geometry), overlay.held, outlines.greatest)}
+        size={size}
+        palette={palette}
+        most={220}
+      />
     </Frame>
   );
 }

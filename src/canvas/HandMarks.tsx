@@ -2,7 +2,7 @@
 import type { Context } from 'konva/lib/Context.js';
 import { Shape } from 'react-konva/es/ReactKonvaCore.js';
 import type { Figure } from '../scene/figure.ts';
-import type { Line } from '../scene/grip.ts';
+import { BRACKET_PX, DOT_PX, type Line } from '../scene/grip.ts';
 import type { Palette } from '../scene/palette.ts';
 import type { ScreenPoint } from '../scene/view.ts';
 import { fontOf, trace, traceOnScreen, writeOn } from './paint.ts';
@@ -24,7 +24,7 @@ export function Outlines({ selected, hovered, selectedLines, palette, px }: Outl
         context.lineJoin = 'round';
         context.strokeStyle = palette.brass;
         for (const figure of hovered) outline(context, figure, 1.5 * px, 4 * px);
-        for (const figure of selected) outline(context, figure, 2.5 * px, 5 * px);
+        for (const figure of selected) outline(context, figure, 2.5 * px, BRACKET_PX * px);
         context.lineWidth = 3.5 * px;
         for (const { at } of selectedLines) {
           trace(context, at, false);
@@ -64,7 +64,8 @@ export interface Handle {
 
 export interface HandMarksProps {
   readonly handles: readonly Handle[];
-  readonly wireEnds: readonly ScreenPoint[];
+  /** Each on a stalk from its true end. */
+  readonly wireEnds: readonly { readonly at: ScreenPoint; readonly end: ScreenPoint }[];
   readonly guide: { readonly from: ScreenPoint; readonly to: ScreenPoint; readonly label: string } | null;
   readonly marquee: { readonly from: ScreenPoint; readonly to: ScreenPoint } | null;
   readonly palette: Palette;
@@ -75,7 +76,7 @@ export function HandMarks({ handles, wireEnds, guide, marquee, palette }: HandMa
     <Shape
       sceneFunc={(context) => {
         for (const each of handles) handle(context, each, palette);
-        for (const at of wireEnds) wireEnd(context, at, palette);
+        for (const each of wireEnds) wireEnd(context, each, palette);
         if (guide) guideLine(context, guide, palette);
         if (marquee) rubber(context, marquee, palette);
       }}
@@ -101,9 +102,13 @@ function handle(context: Context, { at, way, lit }: Handle, palette: Palette): v
   }
 }
 
-function wireEnd(context: Context, { x, y }: ScreenPoint, palette: Palette): void {
+function wireEnd(context: Context, { at, end }: HandMarksProps['wireEnds'][number], palette: Palette): void {
   context.beginPath();
-  context.arc(x, y, 6, 0, 2 * Math.PI, false);
+  context.arc(end.x, end.y, 2.5, 0, 2 * Math.PI, false);
+  context.fillStyle = palette.brass;
+  context.fill();
+  context.beginPath();
+  context.arc(at.x, at.y, DOT_PX, 0, 2 * Math.PI, false);
   context.fillStyle = palette.paper;
   context.fill();
   context.strokeStyle = palette.brass;

@@ -1,67 +1,46 @@
-/** Names of parts, placed so that none covers another. Pixels. */
-import { memo, useMemo, useRef } from 'react';
+/** Names of parts, placed so that none covers another, each with a fine line where it stands off its part. Pixels. */
+import type { Context } from 'konva/lib/Context.js';
+import { memo, useRef } from 'react';
 import { Shape } from 'react-konva/es/ReactKonvaCore.js';
 import type { Craft } from '../craft/craft.ts';
 import type { Figure } from '../scene/figure.ts';
-import { keepSame } from '../scene/keepSame.ts';
-import { type Label, MOST_LABELS, placeLabels, type Rect, type Wanted } from '../scene/labels.ts';
+import { type KeptLabels, type LabelsAsked, nextLabels } from '../scene/keptLabels.ts';
+import { type Label, MOST_LABELS, type Wanted } from '../scene/labels.ts';
 import type { Palette } from '../scene/palette.ts';
-import { toScreen, type View } from '../scene/view.ts';
-import { fontOf, textWidth, writeOn } from './paint.ts';
+import { screenBox } from '../scene/rect.ts';
+import type { View } from '../scene/view.ts';
+import { fontOf, textWidth, traceOnScreen, writeOn } from './paint.ts';
 
 const SIZE = 12;
 
-/** What is to be named: everything while it is few, else only the ids in `always`. */
+/** What is to be named, what is selected first: everything while it is few, else only that and the part under the pointer. */
 export function wantedLabels(
   craft: Craft,
   figures: readonly Figure[],
   view: View,
-  always: ReadonlySet<string>,
+  selected: readonly string[],
+  hovered: string | null,
 ): Wanted[] {
+  const first = new Set(selected);
   const few = craft.parts.order.length <= MOST_LABELS;
-  return figures
-    .filter(({ part, copy }) => copy === 0 && (few || always.has(part)))
-    .map((figure) => {
-      const { name, kind } = craft.parts.byId[figure.part]!;
-      const text = name || kind;
-      return { id: figure.part, text, width: textWidth(text, fontOf(SIZE)), box: screenBox(figure, view) };
-    });
+  const named = figures.filter(
+    ({ part, copy }) => copy === 0 && (few || first.has(part) || part === hovered),
+  );
+  const ordered = [
+    ...named.filter(({ part }) => first.has(part)),
+    ...named.filter(({ part }) => !first.has(part)),
+  ];
+  return ordered.map((figure) => {
+    const { name, kind } = craft.parts.byId[figure.part]!;
+    const text = name || kind;
+    return { id: figure.part, text, width: textWidth(text, fontOf(SIZE)), box: screenBox(figure, view) };
+  });
 }
 
-function screenBox({ box: { left, right, bottom, top } }: Figure, view: View): Rect {
-  const corners = [
-    { u: left, z: bottom },
-    { u: right, z: bottom },
-    { u: right, z: top },
-    { u: left, z: top },
-  ].map((corner) => toScreen(view, corner));
-  const xs = corners.map(({ x }) => x);
-  const ys = corners.map(({ y }) => y);
-  return { left: Math.min(...xs), right: Math.max(...xs), top: Math.min(...ys), bottom: Math.max(...ys) };
-}
-
-const sameRect = (a: Rect, b: Rect): boolean =>
-  a.left === b.left && a.right === b.right && a.top === b.top && a.bottom === b.bottom;
-
-const sameWanted = (a: Wanted, b: Wanted): boolean =>
-  a.id === b.id && a.text === b.text && sameRect(a.box, b.box);
-
-/** Placed anew only when something to be named changed; while a hand is at work, not for what moves among them. */
-export function useLabels(
-  wanted: readonly Wanted[],
-  taken: readonly Rect[],
-  frame: Rect,
-  busy: boolean,
-): readonly Label[] {
-  const last = useRef<readonly Wanted[]>([]);
-  const still = keepSame(last.current, wanted, sameWanted);
-  last.current = still;
-  const lastTaken = useRef<readonly Rect[]>([]);
-  if (!busy || lastTaken.current.length === 0) {
-    lastTaken.current = keepSame(lastTaken.current, [...taken, frame], sameRect);
-  }
-  const clear = lastTaken.current;
-  return useMemo(() => placeLabels(still, clear.slice(0, -1), clear.at(-1)!), [still, clear]);
+export function useLabels(asked: LabelsAsked): readonly Label[] {
+  const kept = useRef<KeptLabels | null>(null);
+  kept.current = nextLabels(kept.current, asked);
+  return kept.current.labels;
 }
 
 export interface LabelsProps {
@@ -74,6 +53,7 @@ export interface LabelsProps {
 export const Labels = memo(({ labels, palette, onGas }: LabelsProps) => (
   <Shape
     sceneFunc={(context) => {
+      for (const { leader } of labels) if (leader) line(context, leader, palette);
       context.font = fontOf(SIZE);
       context.textAlign = 'left';
       context.textBaseline = 'middle';
@@ -83,3 +63,14 @@ export const Labels = memo(({ labels, palette, onGas }: LabelsProps) => (
     }}
   />
 ));
+
+function line(context: Context, { from, to }: NonNullable<Label['leader']>, palette: Palette): void {
+  context.strokeStyle = palette.inkSoft;
+  context.lineWidth = 0.8;
+  traceOnScreen(context, [from, to], false);
+  context.stroke();
+  context.beginPath();
+  context.arc(to.x, to.y, 1.6, 0, 2 * Math.PI, false);
+  context.fillStyle = palette.inkSoft;
+  context.fill();
+}

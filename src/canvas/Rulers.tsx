@@ -3,38 +3,36 @@ import type { Context } from 'konva/lib/Context.js';
 import { memo } from 'react';
 import { Shape } from 'react-konva/es/ReactKonvaCore.js';
 import type { Palette } from '../scene/palette.ts';
-import { rulerUnit, stationTicks, tapeTicks } from '../scene/ruler.ts';
-import type { Geometry, UnitSystem } from '../scene/subject.ts';
+import type { Rect } from '../scene/rect.ts';
+import { rulerUnit, stationTicks } from '../scene/ruler.ts';
+import type { UnitSystem } from '../scene/subject.ts';
+import type { RulerMark } from '../scene/tapeMarks.ts';
 import { type ScreenPoint, toScreen, toWorld, type View } from '../scene/view.ts';
 import { fontOf, writeOn } from './paint.ts';
 
-export interface RulersProps {
-  readonly hull: Geometry['hull'];
+export interface FootRulerProps {
   readonly view: View;
   readonly palette: Palette;
   readonly units: UnitSystem;
 }
 
-const FOOT = 24;
+/** Height of the strip along the foot, px. */
+export const FOOT = 24;
 const LARGE = 9;
 const SMALL = 4;
-const LABEL = 18;
-/** Beyond this a label stands beside its tick, not centred on it. */
-const STEEP = 0.4;
 
 /** Those on the hull itself. */
-export const HullRulers = memo(({ hull, view, palette, units }: RulersProps) => (
+export const HullRulers = memo(({ marks, palette }: { marks: readonly RulerMark[]; palette: Palette }) => (
   <Shape
     sceneFunc={(context) => {
       prepare(context, palette);
-      tapeRuler(context, hull, view, palette, units);
-      if (view.tilt !== 0) axisRuler(context, hull, view, palette, units);
+      for (const mark of marks) draw(context, mark, palette);
     }}
   />
 ));
 
 /** The one along the foot, on a strip of its own. */
-export const FootRuler = memo(({ view, palette, units }: Omit<RulersProps, 'hull'>) => (
+export const FootRuler = memo(({ view, palette, units }: FootRulerProps) => (
   <Shape
     sceneFunc={(context) => {
       prepare(context, palette);
@@ -53,6 +51,14 @@ function prepare(context: Context, palette: Palette): void {
   context.lineWidth = 1;
 }
 
+/** What the name of the foot's ruler takes up. */
+export const footNameTaken = ({ height }: View): Rect => ({
+  left: 0,
+  right: 76,
+  top: height - FOOT - 19,
+  bottom: height - FOOT,
+});
+
 function footRuler(context: Context, view: View, palette: Palette, units: UnitSystem): void {
   const y = Math.round(view.height - FOOT) + 0.5;
   const from = toWorld(view, { x: 0, y }).u;
@@ -67,62 +73,13 @@ function footRuler(context: Context, view: View, palette: Palette, units: UnitSy
   write(context, `station, ${rulerUnit(units)}`, { x: 6, y: y - 10 }, palette);
 }
 
-function axisRuler(
-  context: Context,
-  hull: Geometry['hull'],
-  view: View,
-  palette: Palette,
-  units: UnitSystem,
-): void {
-  const down = { x: -Math.sin(view.tilt), y: Math.cos(view.tilt) };
-  for (const { at, label } of stationTicks(0, hull.length, view.scale, units)) {
-    tickAlong(context, toScreen(view, { u: at, z: 0 }), down, label, palette);
-  }
-}
-
-function tapeRuler(
-  context: Context,
-  hull: Geometry['hull'],
-  view: View,
-  palette: Palette,
-  units: UnitSystem,
-): void {
-  let named = false;
-  for (const { at, station, label } of tapeTicks(hull, 0, view.scale, units)) {
-    const foot = toScreen(view, { u: station, z: hull.radius(station, 0) });
-    const first = label !== null && at > 0 && !named;
-    if (first) named = true;
-    const text = first ? `tape ${label} ${rulerUnit(units)}` : at > 0 ? label : null;
-    tickAlong(context, foot, outwardAt(hull, station, view), text, palette);
-  }
-}
-
-/** Square to the skin on top, on the screen. */
-function outwardAt(hull: Geometry['hull'], station: number, view: View): ScreenPoint {
-  const reach = hull.length / 400;
-  const before = Math.max(0, station - reach);
-  const after = Math.min(hull.length, station + reach);
-  const a = toScreen(view, { u: before, z: hull.radius(before, 0) });
-  const b = toScreen(view, { u: after, z: hull.radius(after, 0) });
-  const run = Math.hypot(b.x - a.x, b.y - a.y) || 1;
-  return { x: (b.y - a.y) / run, y: (a.x - b.x) / run };
-}
-
-function tickAlong(
-  context: Context,
-  foot: ScreenPoint,
-  way: ScreenPoint,
-  label: string | null,
-  palette: Palette,
-): void {
-  const reach = label ? LARGE : SMALL;
+function draw(context: Context, { foot, way, reach, text, align, at }: RulerMark, palette: Palette): void {
   context.strokeStyle = palette.inkSoft;
   context.lineWidth = 1;
   line(context, foot, { x: foot.x + way.x * reach, y: foot.y + way.y * reach });
-  if (!label) return;
-  context.textAlign = way.x < -STEEP ? 'right' : way.x > STEEP ? 'left' : 'center';
-  const far = context.textAlign === 'center' ? LABEL : LARGE + 4;
-  write(context, label, { x: foot.x + way.x * far, y: foot.y + way.y * far }, palette);
+  if (text === null) return;
+  context.textAlign = align;
+  write(context, text, at, palette);
 }
 
 function line(context: Context, a: ScreenPoint, b: ScreenPoint): void {

@@ -1,10 +1,11 @@
 /** The side view on its three layers: the ground that rarely changes, what stands still on it, and what moves. */
-import { useCallback } from 'react';
+import { useCallback, useMemo } from 'react';
 import { Group, Layer, Stage } from 'react-konva/es/ReactKonvaCore.js';
 import { idsOf, isSelected, type Selection } from '../edit/selection.ts';
-import { handlesOf, wireEnds } from '../scene/grip.ts';
-import type { Rect } from '../scene/labels.ts';
-import { type BalanceMarks, sideMarks } from '../scene/marks.ts';
+import { handlesOf } from '../scene/grip.ts';
+import { type BalanceMarks, marksTaken, sideMarks } from '../scene/marks.ts';
+import { around, type Rect, screenBox } from '../scene/rect.ts';
+import { axisMarks, tapeMarks, textsTaken, withoutCovered } from '../scene/tapeMarks.ts';
 import { type ScreenPoint, toScreen, toWorld, type View } from '../scene/view.ts';
 import { leadWords, pitchAngle } from '../scene/words.ts';
 import { BalanceMark } from './BalanceMark.tsx';
@@ -15,7 +16,7 @@ import type { Overlay } from './overlay.ts';
 import { PartMarks } from './PartMarks.tsx';
 import { PointMarks, type PointMarksProps } from './PointMarks.tsx';
 import { worldTransform } from './paint.ts';
-import { FootRuler, HullRulers } from './Rulers.tsx';
+import { FOOT, FootRuler, footNameTaken, HullRulers } from './Rulers.tsx';
 import type { SideScene } from './useSideScene.ts';
 import { WireMarks } from './WireMarks.tsx';
 
@@ -28,18 +29,35 @@ export interface SideDrawingProps {
 }
 
 export function SideDrawing({ scene, selection, overlay, faded }: SideDrawingProps) {
-  const { view, palette, units, geometry, craft } = scene;
+  const { view, palette, units, geometry, craft, still } = scene;
   const px = 1 / view.scale;
   const world = worldTransform(view);
   const marks = sideMarks(view, geometry);
   const { hover } = overlay;
-  const named = new Set([...idsOf(selection, 'part'), ...(hover?.kind === 'part' ? [hover.id] : [])]);
-  const frame: Rect = { left: 2, top: 2, right: view.width - 2, bottom: view.height - 30 };
   const points = pointsOf(scene, selection);
   const handles = handlesShown(scene, overlay);
-  const wanted = wantedLabels(craft, scene.still, view, named);
-  const labels = useLabels(wanted, takenBy(marks, points, handles), frame, overlay.held !== null);
   const { hull } = geometry;
+  const rulers = useMemo(
+    () => [
+      ...withoutCovered(
+        tapeMarks(hull, view, units),
+        still.map((figure) => screenBox(figure, view)),
+      ),
+      ...(view.tilt === 0 ? [] : axisMarks(hull, view, units)),
+    ],
+    [hull, view, units, still],
+  );
+  const hoveredPart = hover?.kind === 'part' ? hover.id : null;
+  const labels = useLabels({
+    wanted: wantedLabels(craft, scene.still, view, idsOf(selection, 'part'), hoveredPart),
+    ground: () => ({
+      taken: [...takenBy(marks, points, handles), ...textsTaken(rulers), footNameTaken(view)],
+      boxes: scene.still.map((figure) => ({ id: figure.part, box: screenBox(figure, view) })),
+      frame: { left: 2, top: 2, right: view.width - 2, bottom: view.height - FOOT - 4 },
+    }),
+    busy: overlay.held !== null,
+    hovered: hoveredPart,
+  });
   const onGas = useCallback(
     ({ x, y }: ScreenPoint) => {
       const { u, z } = toWorld(view, { x: x + 8, y });
@@ -56,7 +74,7 @@ export function SideDrawing({ scene, selection, overlay, faded }: SideDrawingPro
         <Group {...world}>
           <HullMarks hull={geometry.hull} palette={palette} px={px} />
         </Group>
-        <HullRulers hull={geometry.hull} view={view} palette={palette} units={units} />
+        <HullRulers marks={rulers} palette={palette} />
       </Layer>
       <Layer listening={false}>
         <Group {...world}>
@@ -82,7 +100,7 @@ export function SideDrawing({ scene, selection, overlay, faded }: SideDrawingPro
         <BalanceMark marks={marks} palette={palette} angle={pitchAngle(scene)} />
         <HandMarks
           handles={handles}
-          wireEnds={endsShown(scene, selectedWires)}
+          wireEnds={endsShown(scene)}
           guide={guideShown(scene, overlay)}
           marquee={overlay.marquee}
           palette={palette}
@@ -92,23 +110,15 @@ export function SideDrawing({ scene, selection, overlay, faded }: SideDrawingPro
   );
 }
 
-const around = ({ x, y }: ScreenPoint, reach: number): Rect => ({
-  left: x - reach,
-  right: x + reach,
-  top: y - reach,
-  bottom: y + reach,
-});
-
 type Points = Omit<PointMarksProps, 'palette'>;
 
 /** What labels keep clear of: the marks of balance with their names, handles, the ghost of the lead, the support, the eyelets. */
 const takenBy = (
-  { ring, bob, lean }: BalanceMarks,
+  marks: BalanceMarks,
   { lead, support, eyelets }: Points,
   handles: readonly Handle[],
 ): Rect[] => [
-  { ...around(ring, 14), left: ring.x - 38, top: ring.y - 20 },
-  ...(bob ? [{ ...around(bob, 18), [lean > 0 ? 'right' : 'left']: bob.x + (lean > 0 ? 42 : -42) }] : []),
+  ...marksTaken(marks),
   ...handles.map(({ at }) => around(at, 14)),
   ...(lead ? [{ left: lead.at.x - 48, right: lead.at.x + 48, top: lead.at.y, bottom: lead.at.y + 54 }] : []),
   ...(support
@@ -147,11 +157,8 @@ function handlesShown({ geometry, view }: SideScene, { held, hover }: Overlay): 
   ];
 }
 
-const endsShown = ({ lines, view }: SideScene, wires: readonly string[]): ScreenPoint[] =>
-  wires.flatMap((id) => {
-    const ends = wireEnds(lines, id);
-    return ends ? [toScreen(view, ends.from), toScreen(view, ends.to)] : [];
-  });
+const endsShown = ({ wireHandles, view }: SideScene): HandMarksProps['wireEnds'] =>
+  wireHandles.map(({ at, end }) => ({ at: toScreen(view, at), end: toScreen(view, end) }));
 
 /** Across the whole view at the station snapped to. */
 function guideShown({ view, geometry }: SideScene, { guide }: Overlay): HandMarksProps['guide'] {

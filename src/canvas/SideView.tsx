@@ -1,18 +1,22 @@
 /** The side view: hull, parts, wire runs, rulers and marks of balance, and everything a hand does there. */
 import { useMemo, useRef } from 'react';
 import { idsOf } from '../edit/selection.ts';
-import { fromSide } from '../scene/flatten.ts';
 import { sameGrip } from '../scene/grip.ts';
+import { sideMargins } from '../scene/margins.ts';
+import { sideMarks } from '../scene/marks.ts';
+import { sideOutline } from '../scene/outline.ts';
 import { sideReadout } from '../scene/readout.ts';
-import { toScreen, type View } from '../scene/view.ts';
+import type { View } from '../scene/view.ts';
 import { selectionInWords, sideInWords } from '../scene/words.ts';
-import { Bubble } from './Bubble.tsx';
 import { Frame } from './Frame.tsx';
 import type { Hand } from './gestures/gesture.ts';
 import { gripUnder, takeInSide } from './gestures/take.ts';
 import { keysOf } from './keys.ts';
+import { Notes } from './Notes.tsx';
+import { inSightOf, thingUnder } from './notesOf.ts';
 import { cursorOf } from './overlay.ts';
 import type { DrawnProps, SharedProps } from './props.ts';
+import { FOOT } from './Rulers.tsx';
 import { SideDrawing } from './SideDrawing.tsx';
 import { Unformed } from './Unformed.tsx';
 import { sidePoints, useFit } from './useFit.ts';
@@ -22,7 +26,7 @@ import { useGround, useOverlay } from './useGround.ts';
 import { useLie, useSideScene } from './useSideScene.ts';
 import { useSize } from './useSize.ts';
 
-const MARGINS = { left: 46, right: 66, top: 46, bottom: 74 };
+const OUTLINE_POINTS = 32;
 
 const KEYS =
   'Arrow keys move what is selected by 1 millimetre, with Shift by 10. Square brackets select the part before or after. Plus, minus and 0 zoom and fit. Escape gives up a drag.';
@@ -34,7 +38,7 @@ export function SideView(props: SharedProps) {
 }
 
 function SideFrame(props: SharedProps & DrawnProps & { stale: string | null }) {
-  const { session, selection, palette, viewState, geometry, tilted, stale } = props;
+  const { selection, palette, viewState, geometry, tilted, stale } = props;
   const frame = useRef<HTMLDivElement>(null);
   const size = useSize(frame);
   const overlays = useOverlay();
@@ -48,13 +52,22 @@ function SideFrame(props: SharedProps & DrawnProps & { stale: string | null }) {
     [scale, originX, originY, tilt, pivot, size],
   );
   const scene = useSideScene(props, view, overlay);
-  const ground = useGround(session, scene, overlays, viewState);
+  const ground = useGround(props, scene, overlays, viewState);
   const { length, height } = geometry.hull;
-  useFit(viewState, view, `${tilted} ${length} ${height}`, busy, () => sidePoints(geometry), MARGINS);
+  useFit(
+    viewState,
+    view,
+    `${tilted} ${length} ${height}`,
+    busy,
+    () => sidePoints(props.craft, geometry),
+    sideMargins(size, geometry.support !== null),
+  );
+
+  const outline = useMemo(() => sideOutline(geometry.hull, OUTLINE_POINTS), [geometry.hull]);
 
   const hover = (hand: Hand | null) => {
-    const next = hand && gripUnder(ground, hand, selection);
-    if (!sameGrip(next, overlay.hover)) show({ hover: next });
+    const next = hand && gripUnder(ground, hand);
+    if (!sameGrip(next, overlay.hover)) show({ hover: next, hoverAt: hand });
   };
   const take: typeof takeInSide = (on, hand) => {
     show({ hint: null, hover: null });
@@ -64,7 +77,7 @@ function SideFrame(props: SharedProps & DrawnProps & { stale: string | null }) {
   const onDoubleClick = () => {
     if (!overlay.hover) ground.fit();
   };
-  const readout = overlay.held && sideReadout(scene, overlay.held, fromSide, view.scale);
+  const readout = overlay.held && sideReadout(scene, overlay.held);
   const hint = overlay.hint ?? stale;
   return (
     <Frame
@@ -79,10 +92,14 @@ function SideFrame(props: SharedProps & DrawnProps & { stale: string | null }) {
       leave={() => hover(null)}
     >
       <SideDrawing scene={scene} selection={selection} overlay={overlay} faded={stale !== null} />
-      {readout && (
-        <Bubble at={toScreen(view, readout.at)} lines={readout.lines} size={size} palette={palette} />
-      )}
-      {hint && <Bubble at={{ x: 0, y: 0 }} lines={[hint]} size={size} palette={palette} width={420} />}
+      <Notes
+        hint={hint}
+        readout={readout}
+        under={thingUnder(scene, overlay)}
+        inSight={inSightOf(scene, sideMarks(view, geometry), overlay.held, outline)}
+        size={{ width: size.width, height: size.height - FOOT }}
+        palette={palette}
+      />
     </Frame>
   );
 }

@@ -12,6 +12,8 @@ export interface Guide {
 export interface Overlay {
   /** Under the pointer. */
   readonly hover: Grip | null;
+  /** Where the pointer came upon it. */
+  readonly hoverAt: ScreenPoint | null;
   /** What is in hand; `moving` has the keys (see grip.ts) of all that is drawn on the layer that moves. */
   readonly held: Grip | null;
   readonly moving: ReadonlySet<string>;
@@ -35,7 +37,7 @@ export const AT_REST = {
   marquee: null,
 } as const satisfies Partial<Overlay>;
 
-export const CLEAR: Overlay = { hover: null, hint: null, ...AT_REST };
+export const CLEAR: Overlay = { hover: null, hoverAt: null, hint: null, ...AT_REST };
 
 /** The pointer over what it can take. */
 export function cursorOf({ hover, held, marquee }: Overlay): string {

@@ -9,6 +9,10 @@ export interface CanvasProps extends Subject {
   readonly selection: Selection;
   /** Drawn in the attitude in which it floats, or level. */
   readonly tilted: boolean;
+  /** Whether what is dragged snaps, by default true; Alt turns it round. */
+  readonly snap?: boolean;
+  /** Whether a click adds to the selection and a drag on empty ground draws a box, by default false. */
+  readonly several?: boolean;
 }
 
 /** The side view and the beam share one view state, so that stations lie under each other. */

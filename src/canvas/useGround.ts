@@ -1,8 +1,9 @@
 /** The ground that gestures work on: always the latest scene, the overlay, and the view. */
 import { useCallback, useRef, useState } from 'react';
-import type { Session } from '../edit/session.ts';
+import type { PlanePoint } from '../scene/view.ts';
 import type { Ground, Scene } from './gestures/gesture.ts';
 import { CLEAR, type Overlay } from './overlay.ts';
+import type { CanvasProps } from './props.ts';
 import type { ViewState } from './useView.ts';
 
 export interface OverlayState {
@@ -17,15 +18,18 @@ export function useOverlay(): OverlayState {
 }
 
 export function useGround(
-  session: Session,
+  { session, snap = true, several = false }: Pick<CanvasProps, 'session' | 'snap' | 'several'>,
   scene: Scene,
   { show }: OverlayState,
   { setView, fit }: ViewState,
 ): Ground {
   const latest = useRef(scene);
   latest.current = scene;
+  const lastClick = useRef<PlanePoint | null>(null);
   return {
     session,
+    habits: { snap, several },
+    lastClick,
     scene: () => latest.current,
     show,
     setView: (change) => setView((view) => change({ ...latest.current.view, ...pickView(view) })),

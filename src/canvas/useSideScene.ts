@@ -1,10 +1,12 @@
 /** Everything the side view draws and gestures reach, each piece kept the same while it is. */
 import { useMemo, useRef, useState } from 'react';
+import { idsOf } from '../edit/selection.ts';
 import { type Figure, sideFigure } from '../scene/figure.ts';
 import { fromSide, hardpointPoints, wireLines } from '../scene/flatten.ts';
 import { keyOf, type Line } from '../scene/grip.ts';
 import { FigureCache, sameWire } from '../scene/keepSame.ts';
 import type { View } from '../scene/view.ts';
+import { wireHandles } from '../scene/wireHandle.ts';
 import type { Scene } from './gestures/gesture.ts';
 import type { Overlay } from './overlay.ts';
 import type { DrawnProps } from './props.ts';
@@ -19,7 +21,7 @@ export interface SideScene extends Scene {
 }
 
 export function useSideScene(props: DrawnProps, view: View, { moving }: Overlay): SideScene {
-  const { craft, assessment, units, palette, geometry } = props;
+  const { craft, assessment, units, palette, geometry, selection } = props;
   const [cache] = useState(() => new FigureCache(sideFigure));
   const figures = cache.figures(craft, geometry, 1 / view.scale);
   const isMoving = ({ part }: Figure) => moving.has(keyOf('part', part));
@@ -29,10 +31,12 @@ export function useSideScene(props: DrawnProps, view: View, { moving }: Overlay)
   const stillLines = useMemo(() => wireLines(stillWires, fromSide), [stillWires]);
   const movingWires = geometry.wires.filter(({ wire }) => moving.has(keyOf('wire', wire)));
   const movingLines = wireLines(movingWires, fromSide);
+  const lines = [...stillLines, ...movingLines];
   return {
     ...{ craft, assessment, units, palette, view, geometry, figures, still, stillLines, movingLines },
     moving: figures.filter(isMoving),
-    lines: [...stillLines, ...movingLines],
+    lines,
+    wireHandles: wireHandles({ craft, lines, figures }, idsOf(selection, 'wire'), view.scale),
     hardpoints: hardpointPoints(geometry, fromSide),
     support: geometry.support && fromSide(geometry.support),
   };

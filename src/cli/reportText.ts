@@ -30,8 +30,8 @@ const bullet = (sentence: string): string[] =>
   wrapped(sentence, 4).map((line, i) => (i === 0 ? `  - ${line.slice(4)}` : line));
 
 function verdictLines(verdict: Verdict): string[] {
-  const { state, title, word, figure, target, marginWords } = verdict;
-  const cells = [left(state, 8), `${left(title, 19)} `, left(word, 16), figure];
+  const { state, title, word, figure, side, target, marginWords } = verdict;
+  const cells = [left(state, 8), `${left(title, 19)} `, left(word, 16), `${figure} ${side}`.trimEnd()];
   const by = marginWords && `: ${marginWords}`;
   return [oneLine(`  ${cells.join('')}`), ...wrapped(`wanted ${target}${by}`, 10), ...reason(verdict)];
 }

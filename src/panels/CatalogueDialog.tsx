@@ -15,6 +15,9 @@ import { foundParts } from './foundParts.ts';
 import { useAdding } from './ledger/adding.ts';
 import { PART_WORDS } from './words.ts';
 
+/** The head of the dialog says it for all of these. */
+const GENERIC = /^generic\b/;
+
 type Filter = PartKind | 'all';
 
 const FILTERS = [
@@ -56,15 +59,21 @@ export function CatalogueDialog({ onClose }: { onClose: () => void }) {
           }}
         />
       </div>
-      <p role="status">{added || `${entries.length} parts`}</p>
+      <p role="status">{added || countWords(entries.length)}</p>
       {kind !== 'all' && <PartCaution kind={kind} />}
-      <ul className="catalogue">
+      <ul className="catalogue catalogue-parts">
         {entries.map((entry) => (
           <Entry key={entry.id} entry={entry} units={units} onAdded={setAdded} />
         ))}
       </ul>
     </DialogFrame>
   );
+}
+
+function countWords(found: number): string {
+  if (found === 1) return '1 part';
+  if (found > 0) return `${found} parts`;
+  return 'Nothing here matches. Try fewer words or a kind, as “battery”, or add a part of your own with “Add part”.';
 }
 
 interface EntryProps {
@@ -83,7 +92,7 @@ function Entry({ entry, units, onAdded }: EntryProps) {
         <strong>{name}</strong> {PART_WORDS[kind]}, {formatQuantity(mass, 'mass', units)}
         {massTolerance > 0 && ` ± ${formatQuantity(massTolerance, 'mass', units)}`}
         <p className="aside">
-          {note} <cite>{source}</cite>
+          {note} {GENERIC.test(source) || <cite>{source}</cite>}
         </p>
       </div>
       <button

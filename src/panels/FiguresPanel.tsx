@@ -1,9 +1,13 @@
-/** Every figure of the report, with what stands behind those that need a word. */
+/** Every figure of the report. Each opens into its formula, the figures that went in, and the source. */
+import { useRef, useState } from 'react';
 import type { Row, RowStatus } from '../report/row.ts';
 import { rowText } from '../report/rowText.ts';
-import type { UnitSystem } from '../units/units.ts';
+import { workingOf } from '../report/workings.ts';
+import { AdviceButton } from './AdviceButton.tsx';
 import { useEditor } from './editor.ts';
 import { figureGroups } from './figureGroups.ts';
+import { FIGURE_HINTS } from './figureHints.ts';
+import { WorkingBody } from './WorkingBody.tsx';
 
 const STATUS_WORDS: Readonly<Record<RowStatus, string>> = {
   solved: '',
@@ -12,35 +16,74 @@ const STATUS_WORDS: Readonly<Record<RowStatus, string>> = {
 };
 
 export function FiguresPanel() {
-  const { assessment, units } = useEditor();
+  const { rows } = useEditor().assessment;
+  const [open, setOpen] = useState<ReadonlySet<string>>(new Set());
+  const panel = useRef<HTMLElement>(null);
+  const toggle = (key: string) =>
+    setOpen((before) => {
+      const next = new Set(before);
+      if (!next.delete(key)) next.add(key);
+      return next;
+    });
+  const jump = (key: string) => {
+    setOpen((before) => new Set(before).add(key));
+    const face = panel.current?.querySelector<HTMLElement>(`[data-figure="${key}"] > button`);
+    face?.scrollIntoView({ block: 'nearest' });
+    face?.focus();
+  };
   return (
-    <section className="panel" aria-label="Figures">
-      {figureGroups(assessment.rows).map(({ title, rows }) => (
-        <section key={title} aria-label={title}>
-          <h3>{title}</h3>
-          <dl className="rows">
-            {rows.map(({ key, row }) => (
-              <Figure key={key} name={key} row={row} units={units} />
+    <section className="panel" aria-label="Figures" ref={panel}>
+      {figureGroups(rows).map((group) => (
+        <section key={group.title} aria-label={group.title}>
+          <h3>{group.title}</h3>
+          <ul className="figures">
+            {group.rows.map(({ key, row }) => (
+              <Figure key={key} name={key} row={row} open={open.has(key)} onToggle={toggle} onJump={jump} />
             ))}
-          </dl>
+          </ul>
         </section>
       ))}
     </section>
   );
 }
 
-function Figure({ name, row, units }: { name: string; row: Row; units: UnitSystem }) {
+interface FigureProps {
+  readonly name: string;
+  readonly row: Row;
+  readonly open: boolean;
+  onToggle(key: string): void;
+  onJump(key: string): void;
+}
+
+function Figure({ name, row, open, onToggle, onJump }: FigureProps) {
+  const { assessment, units } = useEditor();
   const word = STATUS_WORDS[row.status];
+  const working = open ? workingOf(name, assessment.rows) : null;
   return (
-    <div className="row" data-figure={name} data-status={row.status}>
-      <dt>{row.label}</dt>
-      <dd className="number">{rowText(row, units)}</dd>
+    <li data-figure={name} data-status={row.status}>
+      <button
+        type="button"
+        className="figure-face"
+        title={FIGURE_HINTS[name]}
+        aria-expanded={open}
+        onClick={() => onToggle(name)}
+      >
+        <span className="figure-label">{row.label}</span>{' '}
+        <span className="number">{rowText(row, units)}</span>
+      </button>
       {(word || row.why) && (
-        <dd className="row-why">
+        <p className="row-why">
           {word && <strong>{word}: </strong>}
           {row.why}
-        </dd>
+        </p>
       )}
-    </div>
+      {name === 'oneWeight.station' && <AdviceButton kind="load" />}
+      {open && (
+        <div className="figure-working">
+          {FIGURE_HINTS[name] && <p>{FIGURE_HINTS[name]}</p>}
+          {working ? <WorkingBody working={working} onJump={onJump} /> : <p>As entered.</p>}
+        </div>
+      )}
+    </li>
   );
 }

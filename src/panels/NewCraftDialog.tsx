@@ -2,6 +2,7 @@
 import { type FormEvent, useState } from 'react';
 import type { Craft } from '../craft/craft.ts';
 import type { ShapeKind } from '../craft/hullSchema.ts';
+import type { PlaceKind } from '../craft/placeSchema.ts';
 import type { Problem } from '../craft/problem.ts';
 import type { PartKind } from '../craft/schema.ts';
 import { DialogFrame } from './DialogFrame.tsx';
@@ -11,19 +12,21 @@ import { QuantityField } from './fields/QuantityField.tsx';
 import { TextField } from './fields/TextField.tsx';
 import { type FirstPart, newCraft } from './newCraft.ts';
 import { ProblemsList } from './ProblemsList.tsx';
-import { PART_CHOICES, SHAPE_CHOICES } from './words.ts';
+import { PART_CHOICES, PLACE_CHOICES, SHAPE_CHOICES } from './words.ts';
 
 export interface NewCraftDialogProps {
   onCreate(craft: Craft): void;
   onClose(): void;
 }
 
+const FIRST_PART: FirstPart = { name: '', mass: null, kind: 'gondola', place: 'keel', station: null };
+
 export function NewCraftDialog({ onCreate, onClose }: NewCraftDialogProps) {
   const [name, setName] = useState('New craft');
   const [length, setLength] = useState(3);
   const [diameter, setDiameter] = useState(1);
   const [shape, setShape] = useState<ShapeKind>('spheroid');
-  const [part, setPart] = useState<FirstPart>({ name: '', mass: null, kind: 'gondola', station: null });
+  const [part, setPart] = useState<FirstPart>(FIRST_PART);
   const [problems, setProblems] = useState<readonly Problem[]>([]);
   const { units } = useEditor();
   const create = (event: FormEvent) => {
@@ -104,6 +107,12 @@ function FirstPartFields({ part, onPart }: FirstPartFieldsProps) {
         quantity="mass"
         units={units}
         onCommit={set('mass')}
+      />
+      <ChoiceField<PlaceKind>
+        label="Part place"
+        value={part.place}
+        choices={PLACE_CHOICES}
+        onCommit={set('place')}
       />
       <QuantityField
         label="Part station"

@@ -1,30 +1,27 @@
-/** The one sentence, and the five verdicts, each opening into its working. */
+/** The one sentence, and the five verdicts, each opening into its working. Of one height whatever they say, so that the drawing under them stays where it is. */
 import { type KeyboardEvent, useId, useState } from 'react';
-import { rowText } from '../report/rowText.ts';
 import type { Verdict } from '../report/verdict.ts';
-import type { UnitSystem } from '../units/units.ts';
+import { AdviceButton } from './AdviceButton.tsx';
+import { CautionLine } from './CautionLine.tsx';
 import { useEditor } from './editor.ts';
-import { RowList } from './RowList.tsx';
+import { VERDICT_HINTS } from './figureHints.ts';
+import { Headline } from './Headline.tsx';
+import { WorkingBody } from './WorkingBody.tsx';
+import './verdicts.css';
 
 export function Verdicts() {
-  const { assessment, units } = useEditor();
+  const { assessment } = useEditor();
   return (
     <section className="verdicts" aria-label="Verdicts">
-      <p className="headline" data-met={assessment.met} role="status">
-        {assessment.headline}
-      </p>
+      <Headline />
       <ul className="verdict-list">
         {assessment.verdicts.map((verdict) => (
           <li key={verdict.key}>
-            <VerdictCard verdict={verdict} units={units} />
+            <VerdictCard verdict={verdict} />
           </li>
         ))}
       </ul>
-      {assessment.cautions.map((caution) => (
-        <p className="caution" key={caution}>
-          <strong>Mind:</strong> {caution}
-        </p>
-      ))}
+      <CautionLine />
     </section>
   );
 }
@@ -32,13 +29,13 @@ export function Verdicts() {
 const STATE_WORDS: Readonly<Record<Verdict['state'], string>> = {
   met: 'meets its target',
   missed: 'misses its target',
-  open: 'is open',
+  open: 'is advice, not a target',
 };
 
-function VerdictCard({ verdict, units }: { verdict: Verdict; units: UnitSystem }) {
+function VerdictCard({ verdict }: { verdict: Verdict }) {
   const [open, setOpen] = useState(false);
   const id = useId();
-  const { row, state } = verdict;
+  const { state, title, word, figure, side, marginWords } = verdict;
   const onKeyDown = (event: KeyboardEvent) => {
     if (!open || event.key !== 'Escape') return;
     event.stopPropagation();
@@ -49,36 +46,40 @@ function VerdictCard({ verdict, units }: { verdict: Verdict; units: UnitSystem }
       <button
         type="button"
         className="verdict-face"
+        title={`${VERDICT_HINTS[verdict.key]}. ${title}: ${word}, ${figure} ${side}${marginWords && `, ${marginWords}`}`}
         aria-expanded={open}
         aria-controls={id}
         onClick={() => setOpen(!open)}
         onKeyDown={onKeyDown}
       >
-        <span className="verdict-title">{verdict.title}</span>
-        <span className="verdict-word">{verdict.word}</span>
-        <span className="verdict-number number">{rowText(row, units)}</span>
-        <span className="verdict-margin">{verdict.marginWords}</span>
+        <span className="verdict-title">{title}</span>
+        <span className="verdict-word">{word}</span>
+        <span className="verdict-number">
+          {figure} <small>{side}</small>
+        </span>
+        <span className="verdict-margin">{marginWords}</span>
         <span className="verdict-state">{STATE_WORDS[state]}</span>
       </button>
       <div id={id} className="verdict-working" hidden={!open}>
-        {open && <WorkingText verdict={verdict} units={units} />}
+        {open && <WorkingText verdict={verdict} />}
       </div>
     </div>
   );
 }
 
-function WorkingText({ verdict: { row, target, working }, units }: { verdict: Verdict; units: UnitSystem }) {
+function WorkingText({ verdict }: { verdict: Verdict }) {
+  const { key, row, target, working } = verdict;
   return (
     <>
+      <p>{VERDICT_HINTS[key]}.</p>
       <p>
         <strong>Wanted:</strong> {target}.
       </p>
       {row.status !== 'solved' && <p>{row.why}</p>}
-      <p className="formula">{working.formula}</p>
-      <RowList rows={working.inputs} units={units} />
-      <p className="source">
-        <strong>Source:</strong> {working.source}
-      </p>
+      {key === 'lead' && <AdviceButton kind="lead" />}
+      {key === 'level' && <AdviceButton kind="slide" />}
+      {key === 'floats' && <AdviceButton kind="load" />}
+      <WorkingBody working={working} />
     </>
   );
 }

@@ -16,6 +16,8 @@ export interface Editor {
   readonly redoLabel: string | null;
   readonly assessment: Assessment;
   readonly units: UnitSystem;
+  /** Whether a pick adds to what is selected, as it does with Ctrl. */
+  readonly several: boolean;
   /** Runs the edit; what is wrong with its result goes to the notice area. True when it was done. */
   apply(edit: Edit): boolean;
   select(selection: Selection): void;

@@ -2,6 +2,7 @@
 import { blankCraft } from '../craft/blank.ts';
 import type { ShapeKind } from '../craft/hullSchema.ts';
 import { type Parsed, parseJson } from '../craft/parse.ts';
+import type { Place, PlaceKind } from '../craft/placeSchema.ts';
 import type { PartKind } from '../craft/schema.ts';
 import { fileOf } from '../craft/serialize.ts';
 import { addPart } from '../edit/edits/parts.ts';
@@ -12,6 +13,7 @@ import { blankPart } from './defaults.ts';
 export interface FirstPart {
   readonly name: string;
   readonly kind: PartKind;
+  readonly place: PlaceKind;
   /** kg; null means that there is no first part yet. */
   readonly mass: number | null;
   /** m; null means half the length. */
@@ -34,7 +36,25 @@ export function newCraft({ name, length, diameter, shape, part }: NewCraft): Par
   if (!problems.ok) return problems;
   const shaped = blankCraft(name, shapeAs(shape, plain.hull.shape), length);
   if (part.mass === null) return { ok: true, craft: shaped };
-  const place = { kind: 'keel', station: part.station ?? length / 2, drop: 0 } as const;
-  const fields = { ...blankPart(place), name: part.name, kind: part.kind, mass: part.mass };
+  const fields = {
+    ...blankPart(placeAt(part.place, part.station ?? length / 2)),
+    name: part.name,
+    kind: part.kind,
+    mass: part.mass,
+  };
   return parseJson(fileOf(run(shaped, addPart(fields).recipe).craft));
+}
+
+/** On the skin it sits at the keel, until somebody says otherwise. */
+function placeAt(kind: PlaceKind, station: number): Place {
+  switch (kind) {
+    case 'skin':
+      return { kind, station, clock: Math.PI, standoff: 0 };
+    case 'keel':
+      return { kind, station, drop: 0 };
+    case 'axis':
+      return { kind, station };
+    case 'free':
+      return { kind, x: station, y: 0, z: 0 };
+  }
 }

@@ -56,7 +56,7 @@ function assessState(state: CraftState, units: UnitSystem): Assessment {
   const readRow = (row: Row): Row => (row.why.includes('{') ? { ...row, why: read(row.why) } : row);
   const readVerdict = ({ sides, ...verdict }: PlainVerdict): Verdict => ({
     ...verdict,
-    figure: figureText(verdict.row, sides, units),
+    ...figureText(verdict.row, sides, units),
     row: readRow(verdict.row),
     target: read(verdict.target),
     marginWords: read(verdict.marginWords),

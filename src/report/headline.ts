@@ -28,8 +28,12 @@ export function headlineOf(
   return `Floats level and upright, ${heavinessWords(rows.heaviness!.value!)}: within its targets.`;
 }
 
-const topHeavy = (rows: Rows): string =>
-  `Top-heavy: the CG stands ${say(-rows['float.pendulumDepth']!.value!, 'smallLength')} above the CB, so the craft turns over. Hang the heavy parts lower.`;
+function topHeavy(rows: Rows): string {
+  const depth = rows['float.pendulumDepth']!.value!;
+  return insignificant(depth, 'smallLength')
+    ? 'Without a pendulum: the CG stands as high as the CB, so a touch turns the craft over. Hang something below it.'
+    : `Top-heavy: the CG stands ${say(-depth, 'smallLength')} above the CB, so the craft turns over. Hang the heavy parts lower.`;
+}
 
 function tooHeavy({ air, gasDensity, craft }: CraftState, rows: Rows): string {
   const heaviness = rows.heaviness!.value!;

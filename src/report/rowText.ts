@@ -31,10 +31,14 @@ function uncertainText(value: number, uncertainty: number, quantity: Quantity, u
   return `${number} ± ${spread} ${unit.symbol}`.trimEnd();
 }
 
-/** A figure as one says it: its size, and the word for its side where it has one; none for as good as zero. */
-export function figureText(row: Row, [below, above]: readonly [string, string], units: UnitSystem): string {
-  if (row.value === null) return rowText(row, units);
-  if (!below && !above) return rowText(row, units);
-  const size = rowText({ ...row, value: Math.abs(row.value) }, units);
-  return insignificant(row.value, row.quantity) ? size : `${size} ${row.value < 0 ? below : above}`;
+/** A figure without its sign, and the word for its side where it has one; none for as good as zero. */
+export function figureText(
+  row: Row,
+  [below, above]: readonly [string, string],
+  units: UnitSystem,
+): { figure: string; side: string } {
+  if (row.value === null || !above) return { figure: rowText(row, units), side: '' };
+  const figure = rowText({ ...row, value: Math.abs(row.value) }, units);
+  const side = insignificant(row.value, row.quantity) ? '' : row.value < 0 ? below : above;
+  return { figure, side };
 }

@@ -14,8 +14,9 @@ export interface Verdict {
   readonly word: string;
   /** The figure it rests on. */
   readonly row: Row;
-  /** That figure as one says it, without a sign: "188 ± 50 g light", "15.8° nose-up". */
+  /** That figure without its sign, "15.8°", and the word that stands for the sign, "nose-up"; none for as good as zero. */
   readonly figure: string;
+  readonly side: string;
   /** The target in words: "within ±2.0°". */
   readonly target: string;
   /** How far inside (+) or outside (−) the target, in the row's quantity; null where there is no such number. */

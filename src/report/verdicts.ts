@@ -10,7 +10,7 @@ import type { Verdict } from './verdict.ts';
 import { heavinessWords } from './words.ts';
 
 /** A verdict before its figure is put into words, with the word for each sign of it. */
-export interface PlainVerdict extends Omit<Verdict, 'figure'> {
+export interface PlainVerdict extends Omit<Verdict, 'figure' | 'side'> {
   readonly sides: readonly [below: string, above: string];
 }
 

@@ -50,9 +50,15 @@ export function beamOf(bars: readonly BeamBar[], lead: BeamBar | null): Beam {
 export const reachOf = ({ fore, aft, gap, lead }: Beam): number =>
   Math.max(-fore, aft, Math.abs(gap.far), Math.abs(lead?.far ?? 0));
 
-/** "38.0 g·m tail-heavy", or "in balance" when the net rounds to nothing. */
-export function netWords(net: number, units: UnitSystem): string {
+/** "38.0 g·m tail-heavy"; "balanced" when it rounds to nothing; of a craft that is level all the same, that it is. */
+export function netWords(net: number, units: UnitSystem, level: boolean): string {
+  if (roundsToNothing(net, units)) return 'balanced';
+  const amount = `${formatQuantity(Math.abs(net), 'momentMass', units)} ${net > 0 ? 'tail-heavy' : 'nose-heavy'}`;
+  return level ? `level within tolerance, ${amount}` : amount;
+}
+
+/** Less than half of the last digit shown: 0.005 g·m. */
+export function roundsToNothing(net: number, units: UnitSystem): boolean {
   const { si, digits } = unitOf('momentMass', units);
-  if (Math.abs(net / si) < 0.5 * 10 ** -digits) return 'in balance';
-  return `${formatQuantity(Math.abs(net), 'momentMass', units)} ${net > 0 ? 'tail-heavy' : 'nose-heavy'}`;
+  return Math.abs(net / si) < 0.5 * 10 ** -digits;
 }

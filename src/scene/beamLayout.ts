@@ -27,6 +27,9 @@ const MARGIN = 14;
 /** Even when the CB is near an edge or out of sight the beam keeps this much of the width on its shorter side. */
 const LEAST_SHARE = 0.2;
 
+/** A smaller moment than this is none, kg·m. */
+const LEAST_REACH = 1e-12;
+
 /** The beam shares the pan and the station scale of the side view. */
 export function layBeam(beam: Beam, view: View): BeamOnPage {
   const stationX = (station: number) => view.originX + station * view.scale;
@@ -34,7 +37,7 @@ export function layBeam(beam: Beam, view: View): BeamOnPage {
   const room = Math.min(middle, view.width - middle) - MARGIN;
   const width = Math.max(room, LEAST_SHARE * view.width);
   const reach = reachOf(beam);
-  const scale = reach > 0 ? width / reach : 0;
+  const scale = reach > LEAST_REACH ? width / reach : 0;
   const place = (bar: PlacedBar): BarOnPage => ({
     bar,
     ...span(middle, scale, bar.near, bar.far),
@@ -54,10 +57,67 @@ const span = (middle: number, scale: number, near: number, far: number) => ({
   right: middle + scale * Math.max(near, far),
 });
 
-/** The bar at an x of the page; the wider wins where bars are thinner than a pixel. */
-export function barAt({ bars }: BeamOnPage, x: number, slop = 0): PlacedBar | null {
-  const under = bars.filter(({ left, right }) => x >= left - slop && x <= right + slop);
-  const distance = ({ left, right }: BarOnPage) => Math.max(left - x, x - right, 0);
-  under.sort((a, b) => distance(a) - distance(b));
-  return under[0]?.bar ?? null;
+/** A bar too thin to point at answers over so many px, the next one after it. */
+const LEAST_ZONE = 4;
+
+export interface Zone {
+  readonly bar: PlacedBar;
+  readonly left: number;
+  readonly right: number;
+}
+
+/** Where each bar answers to the pointer: itself, and slivers side by side from where they begin outward; then the lead. */
+export function zonesOf({ bars, lead, middle }: BeamOnPage): Zone[] {
+  const ends = { fore: middle, aft: middle };
+  const zones = bars.map(({ bar, left, right }): Zone => {
+    if (bar.moment < 0) {
+      const end = Math.min(ends.fore, right);
+      ends.fore = Math.min(left, end - LEAST_ZONE);
+      return { bar, left: ends.fore, right: end };
+    }
+    const start = Math.max(ends.aft, left);
+    ends.aft = Math.max(right, start + LEAST_ZONE);
+    return { bar, left: start, right: ends.aft };
+  });
+  return lead ? [...zones, lead] : zones;
+}
+
+/** The bar at an x of the page, or the nearest within the slop, px. */
+export function barAt(page: BeamOnPage, x: number, slop = 0): PlacedBar | null {
+  const away = ({ left, right }: Zone) => Math.max(left - x, x - right, 0);
+  let best: Zone | null = null;
+  for (const zone of zonesOf(page)) {
+    if (away(zone) <= slop && (!best || away(zone) < away(best))) best = zone;
+  }
+  return best?.bar ?? null;
+}
+
+/** From the top of the beam's pane down, px. */
+export interface BeamRows {
+  readonly top: number;
+  readonly bar: number;
+  /** Middle of the line of sums, and of the result under it; null when the result stands beside the sums. */
+  readonly sums: number;
+  readonly result: number | null;
+  /** Whether there is room for the lines up to the stations. */
+  readonly leaders: boolean;
+}
+
+const BAR = 38;
+const LEAST_BAR = 14;
+const LEADER_ROOM = 24;
+const EDGE = 4;
+const SUMS = 15;
+const RESULT = 34;
+const LINE = 11;
+
+/** A low pane first drops the lines to the stations, then puts the result beside the sums, then thins the bars. */
+export function beamRows(height: number): BeamRows {
+  const whole = BAR + RESULT + LINE;
+  const leaders = height >= LEADER_ROOM + whole;
+  const two = height >= EDGE + whole;
+  const bar = two ? BAR : Math.min(BAR, Math.max(LEAST_BAR, height - EDGE - SUMS - LINE));
+  const top = leaders ? Math.max(LEADER_ROOM, Math.min(height - whole, 0.42 * height)) : EDGE;
+  const bottom = top + bar;
+  return { top, bar, leaders, sums: bottom + SUMS, result: two ? bottom + RESULT : null };
 }

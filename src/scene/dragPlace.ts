@@ -46,20 +46,37 @@ export interface FrontStep {
   readonly mirrored: boolean;
 }
 
-/** Dragged in the front view. */
-export function draggedInFront(place: Place, { from, to, mirrored }: FrontStep): Place {
+/** A step in the front view as the hand goes: round the axis, rad clockwise; to starboard and up, m. */
+export interface FrontWay {
+  readonly turn: number;
+  readonly du: number;
+  readonly dz: number;
+}
+
+export const wayInFront = ({ from, to }: Pick<FrontStep, 'from' | 'to'>): FrontWay => ({
+  turn: clockOf(to) - clockOf(from),
+  du: to.u - from.u,
+  dz: to.z - from.z,
+});
+
+/** Moved that way in the front view, each kind of place as far as it goes. */
+export function movedInFront(place: Place, { turn, du, dz }: FrontWay, mirrored: boolean): Place {
   const sense = mirrored ? -1 : 1;
   switch (place.kind) {
     case 'skin':
-      return { ...place, clock: place.clock + sense * (clockOf(to) - clockOf(from)) };
+      return { ...place, clock: place.clock + sense * turn };
     case 'keel':
-      return { ...place, drop: Math.max(0, place.drop - (to.z - from.z)) };
+      return { ...place, drop: Math.max(0, place.drop - dz) };
     case 'axis':
       return place;
     case 'free':
-      return { ...place, y: place.y + sense * (to.u - from.u), z: place.z + to.z - from.z };
+      return { ...place, y: place.y + sense * du, z: place.z + dz };
   }
 }
+
+/** Dragged in the front view. */
+export const draggedInFront = (place: Place, { from, to, mirrored }: FrontStep): Place =>
+  movedInFront(place, wayInFront({ from, to }), mirrored);
 
 /** Whether a piece is the mirrored one of a pair. */
 export const isMirrored = (copies: Copies, copy: number): boolean => copies.kind === 'pair' && copy === 1;

@@ -1,9 +1,13 @@
-/** What the hand would take hold of at a point of a view. Nearer things win; what is selected shows its ends first. */
+/**
+ * What the hand would take hold of at a point of a view. The handle of a wire end wins on its dot, then what is selected
+ * within its brackets, then nearer and smaller things.
+ */
 import type { Figure } from './figure.ts';
-import { figureAt, lineAt, pointAt } from './hit.ts';
+import { distanceToLine, figureAt, figuresAt, lineAt, pointAt } from './hit.ts';
 import { widestStation } from './outline.ts';
 import type { Geometry } from './subject.ts';
 import type { PlanePoint } from './view.ts';
+import type { WireHandle } from './wireHandle.ts';
 
 export type Grip =
   | { readonly kind: 'part'; readonly id: string; readonly copy: number }
@@ -12,6 +16,12 @@ export type Grip =
   | { readonly kind: 'hardpoint'; readonly id: string }
   | { readonly kind: 'support' }
   | { readonly kind: 'hull'; readonly end: 'tail' | 'waist' };
+
+/** What can be selected; scene knows no more of a selection than this. */
+export interface Selectable {
+  readonly kind: 'part' | 'wire' | 'hardpoint';
+  readonly id: string;
+}
 
 /** Parts, wire runs and hardpoints each have ids of their own; the key tells them apart. */
 export const keyOf = (kind: 'part' | 'wire' | 'hardpoint', id: string): string => `${kind} ${id}`;
@@ -28,8 +38,9 @@ export interface Reachable {
   readonly hardpoints: readonly { readonly id: string; readonly at: PlanePoint }[];
   /** Where the view shows the support point; null where it does not. */
   readonly support: PlanePoint | null;
-  /** Wire runs whose ends can be taken. */
-  readonly selectedWires: readonly string[];
+  /** Ends of the wire runs selected. */
+  readonly wireHandles: readonly WireHandle[];
+  readonly selection: readonly Selectable[];
 }
 
 /** Where the two handles of the hull are: beyond the tail tip for the length, on top of the waist for the diameter. */
@@ -46,17 +57,59 @@ export function handlesOf({ hull }: Geometry, scale: number): { tail: PlanePoint
 /** Half the least touch target of a handle, px. */
 const HANDLE_PX = 16;
 
+/** Size of the dot at a wire end, and how far the brackets stand off what is selected, px. */
+export const DOT_PX = 6;
+export const BRACKET_PX = 5;
+
 /** `slop` px is how near counts; `scale` px/m. */
 export function gripAt(things: Reachable, point: PlanePoint, scale: number, slop: number): Grip | null {
   const near = slop / scale;
   return (
-    wireEndAt(things, point, (slop + 4) / scale) ??
+    wireEndAt(things, point, DOT_PX / scale) ??
+    selectedAt(things, point, scale) ??
     partAt(things, point, near) ??
+    wireEndAt(things, point, (slop + 4) / scale) ??
     hardpointAt(things, point, near) ??
     supportAt(things, point, near) ??
     handleAt(things, point, scale) ??
     wireAt(things, point, near)
   );
+}
+
+/** What is selected and lies under the point within its brackets. */
+function selectedAt(
+  { figures, hardpoints, selection }: Reachable,
+  point: PlanePoint,
+  scale: number,
+): Grip | null {
+  const within = BRACKET_PX / scale;
+  const chosen = (kind: Selectable['kind'], id: string) =>
+    selection.some((each) => each.kind === kind && each.id === id);
+  const figure = figureAt(
+    figures.filter(({ part }) => chosen('part', part)),
+    point,
+    within,
+  );
+  if (figure) return { kind: 'part', id: figure.part, copy: figure.copy };
+  const id = pointAt(
+    hardpoints.filter((each) => chosen('hardpoint', each.id)),
+    point,
+    within,
+  );
+  return id === null ? null : { kind: 'hardpoint', id };
+}
+
+/** All that can be selected there: parts from the smallest up, then hardpoints, then wire runs. */
+export function stackAt(things: Reachable, point: PlanePoint, scale: number, slop: number): Selectable[] {
+  const near = slop / scale;
+  const parts = figuresAt(things.figures, point, near).map(({ part }) => part);
+  const hardpoints = things.hardpoints.filter(({ at }) => Math.hypot(at.u - point.u, at.z - point.z) <= near);
+  const wires = things.lines.filter(({ at }) => distanceToLine(point, at) <= near);
+  return [
+    ...[...new Set(parts)].map((id) => ({ kind: 'part' as const, id })),
+    ...hardpoints.map(({ id }) => ({ kind: 'hardpoint' as const, id })),
+    ...[...new Set(wires.map(({ id }) => id))].map((id) => ({ kind: 'wire' as const, id })),
+  ];
 }
 
 const partAt = ({ figures }: Reachable, point: PlanePoint, near: number): Grip | null => {
@@ -82,18 +135,14 @@ export const wireEnds = (lines: readonly Line[], id: string): { from: PlanePoint
   return line?.length ? { from: line[0]!, to: line.at(-1)! } : null;
 };
 
-function wireEndAt({ lines, selectedWires }: Reachable, point: PlanePoint, near: number): Grip | null {
-  const ends = selectedWires.flatMap((id) => {
-    const both = wireEnds(lines, id);
-    if (!both) return [];
-    return [
-      { id: `from ${id}`, at: both.from },
-      { id: `to ${id}`, at: both.to },
-    ];
-  });
-  const found = pointAt(ends, point, near);
+function wireEndAt({ wireHandles }: Reachable, point: PlanePoint, near: number): Grip | null {
+  const found = pointAt(
+    wireHandles.map(({ at }, i) => ({ id: `${i}`, at })),
+    point,
+    near,
+  );
   if (found === null) return null;
-  const [side, id] = found.split(' ') as ['from' | 'to', string];
+  const { id, side } = wireHandles[Number(found)]!;
   return { kind: 'wireEnd', id, side };
 }
 

@@ -42,6 +42,14 @@ export function figureAt(figures: readonly Figure[], point: PlanePoint, slop: nu
   return best;
 }
 
+/** All figures within the slop (m): those it lies on first, the smallest first; then the nearest. */
+export const figuresAt = (figures: readonly Figure[], point: PlanePoint, slop: number): Figure[] =>
+  figures
+    .map((figure) => ({ figure, distance: distanceToBox(point, figure.box) }))
+    .filter(({ distance }) => distance <= slop)
+    .sort((a, b) => a.distance - b.distance || areaOf(a.figure.box) - areaOf(b.figure.box))
+    .map(({ figure }) => figure);
+
 export interface Named<T> {
   readonly id: string;
   readonly at: T;

@@ -2,6 +2,8 @@
  * The marks of balance. The CB is a ring from which the craft hangs; the CG a plumb bob on a line from that ring. Drawn in
  * the attitude in which it floats the line stands plumb; drawn level it leans by the pitch (or the heel).
  */
+import { rectsAlong } from './clearSpot.ts';
+import { around, type Rect } from './rect.ts';
 import type { Geometry } from './subject.ts';
 import { type PlanePoint, type ScreenPoint, toScreen, type View } from './view.ts';
 
@@ -50,3 +52,14 @@ export function bobOutline(at: ScreenPoint, lean: number, size: number): ScreenP
     y: at.y + size * (y * cos - x * sin),
   }));
 }
+
+/** What the marks take up with their names, and the line between them. px. */
+export const marksTaken = ({ ring, bob, lean }: BalanceMarks): Rect[] => [
+  { ...around(ring, 14), left: ring.x - 38, top: ring.y - 20 },
+  ...(bob
+    ? [
+        { ...around(bob, 18), [lean > 0 ? 'right' : 'left']: bob.x + (lean > 0 ? 42 : -42) },
+        ...rectsAlong(ring, bob, 4),
+      ]
+    : []),
+];

@@ -1,47 +1,43 @@
-/** What stands beside the hand during a drag: where the thing is, what it does, and how the craft floats now. */
+/** What stands in the corner during a drag: where the thing is, what it does, and how the craft floats now. */
 import type { Place } from '../craft/placeSchema.ts';
 import { formatQuantity } from '../units/format.ts';
-import type { Flatten } from './flatten.ts';
-import { type Grip, handlesOf, wireEnds } from './grip.ts';
+import type { Grip } from './grip.ts';
 import { type Geometry, geometryOf, rowValue, type Subject, type UnitSystem } from './subject.ts';
-import type { PlanePoint } from './view.ts';
-import { floatWords, heelWords, momentWords, pitchWords } from './words.ts';
+import { floatWords, heelWords, momentWords, nameOfGrip, pitchWords } from './words.ts';
 
 export interface Readout {
-  readonly at: PlanePoint;
+  /** The name of the thing. */
+  readonly title: string;
   readonly lines: readonly string[];
 }
 
 const KEEL = Math.PI;
 
-/** In the side view; `scale` px/m. Null when what is held is nowhere. */
-export function sideReadout(subject: Subject, held: Grip, flatten: Flatten, scale: number): Readout | null {
+/** In the side view. Null when what is held is nowhere. */
+export function sideReadout(subject: Subject, held: Grip): Readout | null {
   const geometry = geometryOf(subject.assessment);
-  if (!geometry) return null;
-  const about = aboutHeld(subject, geometry, held, flatten, scale);
-  return about && { ...about, lines: [...about.lines, floatWords(subject.assessment, subject.units)] };
+  const about = geometry && aboutHeld(subject, geometry, held);
+  if (!about) return null;
+  return {
+    title: nameOfGrip(subject.craft, held),
+    lines: [...about, floatWords(subject.assessment, subject.units)],
+  };
 }
 
-function aboutHeld(
-  subject: Subject,
-  geometry: Geometry,
-  held: Grip,
-  flatten: Flatten,
-  scale: number,
-): Readout | null {
+function aboutHeld(subject: Subject, geometry: Geometry, held: Grip): string[] | null {
   switch (held.kind) {
     case 'part':
-      return aboutPart(subject, geometry, held.id, held.copy, flatten);
+      return aboutPart(subject, geometry, held.id, held.copy);
     case 'hardpoint':
-      return aboutHardpoint(subject, geometry, held.id, flatten);
+      return aboutHardpoint(subject, geometry, held.id);
     case 'support':
-      return aboutSupport(subject, geometry, flatten);
+      return aboutSupport(subject, geometry);
     case 'wire':
       return null;
     case 'wireEnd':
-      return aboutWire(subject, geometry, held.id, held.side, flatten);
+      return aboutWire(subject, geometry, held.id);
     case 'hull':
-      return aboutHull(subject, geometry, handlesOf(geometry, scale)[held.end]);
+      return aboutHull(subject, geometry);
   }
 }
 
@@ -50,17 +46,13 @@ function aboutPart(
   { hull, cb, pieces, beam }: Geometry,
   id: string,
   copy: number,
-  flatten: Flatten,
-): Readout | null {
+): string[] | null {
   const piece = pieces.find((each) => each.part === id && each.copy === copy);
   const part = craft.parts.byId[id];
   if (!piece || !part) return null;
   const bar = beam.find((each) => each.kind === 'part' && each.id === id);
   const moment = bar ? [momentWords(bar.mass, bar.station - cb[0], units)] : [];
-  return {
-    at: flatten(piece.middle),
-    lines: [...whereWords(units, hull, part.place, piece.middle[0]), ...moment],
-  };
+  return [...whereWords(units, hull, part.place, piece.middle[0]), ...moment];
 }
 
 function whereWords(units: UnitSystem, hull: Geometry['hull'], place: Place, station: number): string[] {
@@ -77,53 +69,44 @@ function aboutHardpoint(
   { craft, assessment, units }: Subject,
   { hull, hardpoints }: Geometry,
   id: string,
-  flatten: Flatten,
-): Readout | null {
+): string[] | null {
   const at = hardpoints.find(({ hardpoint }) => hardpoint === id)?.at;
   const hardpoint = craft.hardpoints.byId[id];
   if (!at || !hardpoint) return null;
   const lead = craft.leadAt === id ? rowValue(assessment, 'lead.mass') : null;
   const leadWords = lead === null ? [] : [`${formatQuantity(lead, 'mass', units)} of lead here levels it`];
-  return { at: flatten(at), lines: [...whereWords(units, hull, hardpoint.place, at[0]), ...leadWords] };
+  return [...whereWords(units, hull, hardpoint.place, at[0]), ...leadWords];
 }
 
-function aboutSupport(
-  { craft, units, assessment }: Subject,
-  { hull, support }: Geometry,
-  flatten: Flatten,
-): Readout | null {
+function aboutSupport({ craft, units, assessment }: Subject, { hull, support }: Geometry): string[] | null {
   if (!support || !craft.support) return null;
   const pitch = rowValue(assessment, 'support.pitch');
   const held = pitch === null ? [] : [`held here: ${pitchWords(pitch, units)}`];
-  return { at: flatten(support), lines: [...whereWords(units, hull, craft.support, support[0]), ...held] };
+  return [...whereWords(units, hull, craft.support, support[0]), ...held];
 }
 
-function aboutWire(
-  { units }: Subject,
-  { wires }: Geometry,
-  id: string,
-  side: 'from' | 'to',
-  flatten: Flatten,
-): Readout | null {
+function aboutWire({ units }: Subject, { wires }: Geometry, id: string): string[] | null {
   const wire = wires.find((each) => each.wire === id);
   if (!wire) return null;
-  const ends = wireEnds([{ id, at: (wire.branches[0] ?? []).map(flatten) }], id);
-  const length = formatQuantity(wire.length, 'length', units);
-  return ends && { at: ends[side], lines: [`${length} long, ${formatQuantity(wire.mass, 'mass', units)}`] };
+  return [
+    `${formatQuantity(wire.length, 'length', units)} long, ${formatQuantity(wire.mass, 'mass', units)}`,
+  ];
 }
 
-function aboutHull({ assessment, units }: Subject, { hull }: Geometry, at: PlanePoint): Readout {
+function aboutHull({ assessment, units }: Subject, { hull }: Geometry): string[] {
   const length = (value: number) => formatQuantity(value, 'length', units);
   const size = `${length(hull.length)} long · ${length(hull.height)} across`;
   const lift = rowValue(assessment, 'lift.gross');
-  return { at, lines: [size, ...(lift === null ? [] : [`lifts ${formatQuantity(lift, 'mass', units)}`])] };
+  return [size, ...(lift === null ? [] : [`lifts ${formatQuantity(lift, 'mass', units)}`])];
 }
 
 /** In the front view: the side of it that can be seen there, and the heel. */
-export function frontReadout({ craft, assessment, units }: Subject, held: Grip): string[] {
+export function frontReadout({ craft, assessment, units }: Subject, held: Grip): Readout | null {
   const place = placeOf(craft, held);
+  if (!place) return null;
   const heel = heelWords(rowValue(assessment, 'float.heel'), units);
-  return place ? [...acrossWords(units, place), heel === 'even' ? 'floats even' : `heels ${heel}`] : [];
+  const lines = [...acrossWords(units, place), heel === 'even' ? 'floats even' : `heels ${heel}`];
+  return { title: nameOfGrip(craft, held), lines };
 }
 
 function placeOf({ parts, hardpoints }: Subject['craft'], held: Grip): Place | null {

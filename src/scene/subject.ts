@@ -19,3 +19,7 @@ export const geometryOf = ({ geometry }: Assessment): Geometry | null =>
 
 /** Value of a row, SI; null when there is none. */
 export const rowValue = ({ rows }: Assessment, key: string): number | null => rows[key]?.value ?? null;
+
+/** Whether its pitch is within the tolerance. */
+export const isLevel = ({ verdicts }: Pick<Assessment, 'verdicts'>): boolean =>
+  verdicts.some(({ key, state }) => key === 'level' && state === 'met');

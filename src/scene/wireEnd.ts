@@ -1,4 +1,5 @@
 /** What the end of a wire run becomes when it is let go: joined to the part it is on, or loose on its own path. */
+import type { Craft } from '../craft/craft.ts';
 import type { Place } from '../craft/placeSchema.ts';
 import type { WireEnd, WireRun } from '../craft/schema.ts';
 import { placeAs } from '../report/placeAs.ts';
@@ -45,4 +46,11 @@ export function looseEnd(wire: WireRun, side: WireSide, geometry: Geometry, { u,
 function sideOf({ wires }: Geometry, id: string, side: WireSide): number {
   const branch = wires.find(({ wire }) => wire === id)?.branches[0];
   return branch?.at(side === 'from' ? 0 : -1)?.[1] ?? 0;
+}
+
+/** What to say of an end that came loose; null of one that was loose before. */
+export function unjoinedWords({ parts }: Craft, end: WireEnd): string | null {
+  if (end.kind !== 'part') return null;
+  const part = parts.byId[end.part];
+  return `Unjoined from ${part?.name || part?.kind || 'its part'}; drop it on a part to join it`;
 }

@@ -1,10 +1,11 @@
 /** Figures in the words of the trade, for readouts beside the hand and for those who do not see the drawing. */
-import { listed } from '../craft/craft.ts';
+import { type Craft, listed } from '../craft/craft.ts';
 import type { BeamBar } from '../report/assessment.ts';
 import { formatQuantity } from '../units/format.ts';
 import type { UnitSystem } from '../units/units.ts';
 import { type Beam, netWords } from './beam.ts';
-import { geometryOf, rowValue, type Subject } from './subject.ts';
+import type { Grip } from './grip.ts';
+import { geometryOf, isLevel, rowValue, type Subject } from './subject.ts';
 
 const DEGREE = Math.PI / 180;
 
@@ -37,6 +38,24 @@ export function momentWords(mass: number, arm: number, units: UnitSystem): strin
 
 export const floatWords = (assessment: Subject['assessment'], units: UnitSystem): string =>
   `floats ${pitchWords(rowValue(assessment, 'float.pitch'), units)}`;
+
+/** What to call the thing in hand or under the pointer. */
+export function nameOfGrip(craft: Craft, grip: Grip): string {
+  switch (grip.kind) {
+    case 'part':
+      return craft.parts.byId[grip.id]?.name || craft.parts.byId[grip.id]?.kind || 'Part';
+    case 'wire':
+      return craft.wires.byId[grip.id]?.name || 'Wire run';
+    case 'wireEnd':
+      return `End of ${craft.wires.byId[grip.id]?.name || 'a wire run'}`;
+    case 'hardpoint':
+      return craft.hardpoints.byId[grip.id]?.name || 'Hardpoint';
+    case 'support':
+      return 'Support point';
+    case 'hull':
+      return grip.end === 'tail' ? 'Hull length' : 'Hull diameter';
+  }
+}
 
 /** The side view in words. */
 export function sideInWords({ craft, assessment, units }: Subject): string {
@@ -103,10 +122,10 @@ export function leadBarWords({ mass, name }: BeamBar, units: UnitSystem): string
 }
 
 /** The beam in words: the sums of both sides, the longest bars, and what is left. */
-export function beamInWords(beam: Beam, units: UnitSystem): string {
+export function beamInWords(beam: Beam, { units, assessment }: Subject): string {
   const longest = beam.bars
     .slice(0, 4)
     .map(({ name, moment }) => `${name} ${momentAmount(moment, units)} ${moment < 0 ? 'forward' : 'aft'}`);
   const sums = `${momentAmount(beam.fore, units)} forward of the CB, ${momentAmount(beam.aft, units)} aft`;
-  return `Moments about the CB: ${sums}; ${netWords(beam.net, units)}. Longest: ${longest.join(', ') || 'none'}.`;
+  return `Moments about the CB: ${sums}; ${netWords(beam.net, units, isLevel(assessment))}. Longest: ${longest.join(', ') || 'none'}.`;
 }

@@ -31,11 +31,15 @@ export function parseQuantity(text: string, quantity: Quantity, system: UnitSyst
 }
 
 function refuse(text: string, quantity: Quantity, why: string): Parsed {
-  const found = text.trim() === '' ? 'Nothing entered' : `Found “${text.trim()}”: ${why}`;
+  const found = text.trim() === '' ? 'Nothing entered' : foundText(text.trim(), why);
   const units = typedUnitsOf(quantity).flatMap(({ symbol }) => (symbol === '' ? [] : [symbol]));
   const allowed = units.length > 0 ? `a number, in ${units.join(', ')}` : 'a plain number';
   return { ok: false, message: `${found}. Enter ${wordOf(quantity)}: ${allowed}.` };
 }
+
+/** When the whole of it is at fault, it is named once. */
+const foundText = (text: string, why: string): string =>
+  why.startsWith(`“${text}” `) ? why : `Found “${text}”: ${why}`;
 
 interface Term {
   readonly value: number;

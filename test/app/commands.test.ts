@@ -1,7 +1,6 @@
 import { expect, test } from 'vitest';
 import { COMMANDS } from '../../src/app/commands.ts';
 import { dropKind } from '../../src/app/drops.ts';
-import { fileName } from '../../src/app/files.ts';
 import { openKeep } from '../../src/app/openKeep.ts';
 import { firstSentence } from '../../src/app/samples.ts';
 import { DEFAULTS } from '../../src/app/settings.ts';
@@ -86,16 +85,6 @@ test('the tilt switches there and back', async () => {
   expect(store.view.get().tilted).toBe(true);
   COMMANDS.tilt(store);
   expect(store.view.get().tilted).toBe(false);
-});
-
-test.each([
-  ['Atrium camera craft', 'atrium-camera-craft.json'],
-  ['  Ölwanne / 3.2 m ', 'olwanne-3-2-m.json'],
-  ['', 'craft.json'],
-  ['../..', 'craft.json'],
-  ['気球', '気球.json'],
-])('a craft called %j is saved as %s', (name, file) => {
-  expect(fileName({ name })).toBe(file);
 });
 
 test.each([

@@ -3,13 +3,13 @@ import { beforeEach, expect, test, vi } from 'vitest';
 import 'fake-indexeddb/auto';
 import { COMMANDS } from '../../src/app/commands.ts';
 import type { Keep } from '../../src/app/keep.ts';
-import { firstOpening, openKept, openText } from '../../src/app/openings.ts';
+import { firstOpening, openAfresh, openKept, openText } from '../../src/app/openings.ts';
 import { openKeep } from '../../src/app/openKeep.ts';
 import { DEFAULTS, settingsFrom } from '../../src/app/settings.ts';
 import { Store } from '../../src/app/store.ts';
 import { blankCraft } from '../../src/craft/blank.ts';
 import { serialize } from '../../src/craft/serialize.ts';
-import { setName } from '../../src/edit/edits/craft.ts';
+import { setName, setNotes } from '../../src/edit/edits/craft.ts';
 
 const frames = { request: () => 0, cancel: () => {} };
 
@@ -60,7 +60,7 @@ test('a craft file opens as a craft of its own, and gives the same bytes', async
   const { store, keep } = await opened();
   const first = store.craftId;
   const text = serialize(blankCraft('From a file', { kind: 'spheroid', length: 2, diameter: 1 }, 2));
-  expect(await openText(store, text, 'file.json')).toBe(true);
+  expect(await openText(store, text, 'file.json')).toEqual({ how: 'new', as: 'From a file' });
   expect(textOf(store)).toBe(text);
   await store.keeper.settled();
   expect((await keep.crafts()).map(({ id }) => id).sort()).toEqual([first, store.craftId].sort());
@@ -75,13 +75,39 @@ test('the same file opened twice is kept once', async () => {
   expect(await keep.crafts()).toHaveLength(2);
 });
 
+test('a file that was changed since opens as it is now, and is kept once', async () => {
+  const { store, keep } = await opened();
+  const text = serialize(blankCraft('Heron', { kind: 'spheroid', length: 2, diameter: 1 }, 2));
+  await openText(store, text, 'file.json');
+  store.apply(setNotes('Changed'));
+  await store.keeper.settled();
+  const heron = store.craftId;
+  store.start(blankCraft('Other', { kind: 'spheroid', length: 2, diameter: 1 }, 2));
+  expect(await openText(store, text, 'file.json')).toEqual({ how: 'earlier', as: 'Heron' });
+  expect(store.craftId).toBe(heron);
+  expect(store.session.getState().craft.notes).toBe('Changed');
+  expect(await openAfresh(store, text, 'file.json')).toEqual({ how: 'renamed', as: 'Heron 2' });
+  await store.keeper.settled();
+  expect((await keep.crafts()).map(({ name }) => name)).toContain('Heron 2');
+});
+
+test('another craft of the same name is numbered', async () => {
+  const { store } = await opened();
+  const textOfLength = (length: number) =>
+    serialize(blankCraft('Heron', { kind: 'spheroid', length, diameter: 1 }, length));
+  await openText(store, textOfLength(2), 'a.json');
+  expect(await openText(store, textOfLength(3), 'b.json')).toEqual({ how: 'renamed', as: 'Heron 2' });
+  expect(store.session.getState().craft.name).toBe('Heron 2');
+  expect(await openText(store, textOfLength(2), 'a.json')).toEqual({ how: 'kept', as: 'Heron' });
+});
+
 test.each(['', '{', '[]', '{"steelyard":1}', 'null', '{"steelyard":99}'])(
   'a broken file (%j) shows its problems and leaves the craft before',
   async (text) => {
     const { store } = await opened();
     store.apply(setName('Mine'));
     const before = store.session.getState();
-    expect(await openText(store, text, 'broken.json')).toBe(false);
+    expect(await openText(store, text, 'broken.json')).toBeNull();
     expect(store.session.getState()).toBe(before);
     expect(store.refusal.get()?.name).toBe('broken.json');
     expect(store.refusal.get()?.problems.length).toBeGreaterThan(0);

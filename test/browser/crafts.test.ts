@@ -14,12 +14,17 @@ test('a new craft asks for length, diameter and shape, and answers at once', asy
   const page = await visit();
   await page.getByRole('button', { name: 'New craft' }).click();
   const dialog = page.getByRole('dialog', { name: 'New craft' });
+  // The name stands selected.
+  await page.keyboard.type('Heron');
   await dialog.getByRole('textbox', { name: 'Length', exact: true }).fill('2.4');
   await dialog.getByRole('textbox', { name: 'Greatest diameter' }).fill('0.8');
   await dialog.getByRole('textbox', { name: 'Part mass' }).fill('120');
   await dialog.getByRole('button', { name: 'Make the craft' }).click();
   await dialog.waitFor({ state: 'detached' });
+  expect(await page.evaluate(() => (document.activeElement as HTMLElement).dataset.testid)).toBe('side-view');
   const craft = JSON.parse(await savedText(page));
+  expect(craft.name).toBe('Heron');
+  expect(await page.getByRole('textbox', { name: 'Name of the craft' }).inputValue()).toBe('Heron');
   expect(craft.hull.shape).toMatchObject({ kind: 'spheroid', length: 2.4, diameter: 0.8 });
   expect(craft.parts).toHaveLength(1);
   expect(await headline(page)).toMatch(/\d/);

@@ -1,6 +1,7 @@
 import type { Page } from 'playwright-core';
 import { expect } from 'vitest';
-import { openSample } from './craftFiles.ts';
+import { openSample, sample } from './craftFiles.ts';
+import { partOnPage } from './drawing.ts';
 import { test } from './visit.ts';
 
 const SIZES = [
@@ -61,3 +62,41 @@ test('the beam stands under the side view on the same scale of stations', async 
     expect(await beam.getAttribute(name)).toBe(await side.getAttribute(name));
   }
 });
+
+test('whatever the sentence and the verdicts say in a drag, the drawing under them stays where it is', async ({
+  visit,
+}) => {
+  for (const viewport of SIZES) {
+    const page = await visit({ viewport });
+    await openSample(page, 'worked-example');
+    const side = page.getByTestId('side-view');
+    const before = await side.boundingBox();
+    const cards = () =>
+      page
+        .locator('.verdict-face')
+        .evaluateAll((faces) => [...new Set(faces.map((face) => face.getBoundingClientRect().height))]);
+    const [height, ...others] = await cards();
+    expect(others).toEqual([]);
+    const { x, y } = await partOnPage(page, sample('worked-example'), 'battery');
+    await page.mouse.move(x, y);
+    await page.mouse.down();
+    for (let to = -260; to <= 260; to += 20) {
+      await page.mouse.move(x + to, y);
+      expect(await side.boundingBox()).toEqual(before);
+      expect(await cards()).toEqual([height]);
+      expect(await spilling(page)).toEqual([]);
+    }
+    await page.mouse.up();
+  }
+});
+
+/** Verdicts whose text stands out of their card. */
+const spilling = (page: Page) =>
+  page.locator('.verdict-face > span:not(.verdict-state)').evaluateAll((spans) =>
+    spans
+      .filter((span) => {
+        const [text, card] = [span.getBoundingClientRect(), span.parentElement!.getBoundingClientRect()];
+        return text.right > card.right || text.bottom > card.bottom;
+      })
+      .map((span) => span.textContent),
+  );

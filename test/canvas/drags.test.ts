@@ -1,7 +1,7 @@
 import { expect, test } from 'vitest';
 import { takeInFront, takeInSide } from '../../src/canvas/gestures/take.ts';
 import type { Place } from '../../src/craft/placeSchema.ts';
-import { handlesOf, wireEnds } from '../../src/scene/grip.ts';
+import { handlesOf } from '../../src/scene/grip.ts';
 import { onSection } from '../../src/scene/outline.ts';
 import { craft, PARTS, part } from '../scene/fixture.ts';
 import { frontGround, middleOf, sideGround, type TestGround } from './ground.ts';
@@ -117,14 +117,16 @@ test('the handle beyond the tail changes the length, the one on the waist the di
 test('the end of a wire run joins the part under it, or stays loose on its meridian', () => {
   const ground = sideGround();
   ground.session.select([{ kind: 'wire', id: 'power' }]);
-  const end = wireEnds(ground.scene().lines, 'power')!.from;
+  const end = ground.scene().wireHandles[0]!.at;
   const gesture = takeInSide(ground, ground.at(end));
   gesture.move(ground.at(middleOf(ground, 'gondola')));
-  expect(ground.overlay().join).toBe('gondola');
+  expect(ground.overlay()).toMatchObject({ join: 'gondola', hint: null });
   expect(ground.craft().wires.byId.power!.from).toEqual({ kind: 'part', part: 'gondola' });
   gesture.move(ground.at({ u: 2.004, z: 0.3 }));
   expect(ground.overlay().join).toBeNull();
+  expect(ground.overlay().hint).toBe('Unjoined from battery; drop it on a part to join it');
   gesture.end(ground.at({ u: 2.004, z: 0.3 }), true);
+  expect(ground.overlay().hint).toContain('Unjoined');
   expect(ground.craft().wires.byId.power!.from).toEqual({
     kind: 'loose',
     place: { kind: 'skin', station: 2, clock: Math.PI, standoff: 0 },
@@ -171,4 +173,50 @@ test('the support point is dragged in its kind of place, in one step', () => {
   gesture.end(ground.at(by(at, -0.4)), true);
   expect(ground.craft().support).toEqual({ kind: 'keel', station: 1.8, drop: 0.2 });
   expect(ground.session.getState().undoLabel).toBe('Move the support point');
+});
+
+test('with a wire run selected the part it ends at is dragged with its end joined', () => {
+  const ground = sideGround();
+  ground.session.select([{ kind: 'wire', id: 'power' }]);
+  const from = middleOf(ground, 'battery');
+  const gesture = takeInSide(ground, ground.at(from));
+  gesture.move(ground.at(by(from, -0.3)));
+  gesture.end(ground.at(by(from, -0.3)), true);
+  expect(placeOf(ground, 'battery')).toMatchObject({ station: expect.closeTo(0.9, 2) });
+  expect(ground.craft().wires.byId.power!.from).toEqual({ kind: 'part', part: 'battery' });
+});
+
+test('without snapping the part goes where the hand is, and Alt snaps it', () => {
+  const ground = sideGround(craft(), { snap: false });
+  const from = middleOf(ground, 'battery');
+  const gesture = takeInSide(ground, ground.at(from));
+  gesture.move(ground.at(by(from, 0.313)));
+  expect(placeOf(ground, 'battery')).toMatchObject({ station: 1.513 });
+  gesture.move(ground.at(by(from, 0.31), { alt: true }));
+  expect(placeOf(ground, 'battery')).toMatchObject({ station: 1.5 });
+});
+
+test('in the front view what is selected goes together, each as its kind of place allows; locked parts stay', () => {
+  const parts = PARTS.map((each) => ({ ...each, locked: each.id === 'gondola' }));
+  const ground = frontGround(craft(parts));
+  const chosen = ['fins', 'motors', 'battery', 'gondola', 'camera', 'thruster'];
+  ground.session.select(chosen.map((id) => ({ kind: 'part', id })));
+  const from = middleOf(ground, 'fins');
+  const reach = Math.hypot(from.u, from.z);
+  const to = onSection(0.2, reach);
+  const gesture = takeInFront(ground, ground.at(onSection(0, reach)));
+  gesture.move(ground.at(to, { alt: true }));
+  gesture.end(ground.at(to), true);
+  const [du, dz] = [to.u, to.z - reach];
+  expect(placeOf(ground, 'fins')).toMatchObject({ clock: expect.closeTo(0.2, 6) });
+  expect(placeOf(ground, 'motors')).toMatchObject({ clock: expect.closeTo(2.2, 6) });
+  expect(placeOf(ground, 'battery')).toMatchObject({ drop: expect.closeTo(0.04 - dz, 6) });
+  expect(placeOf(ground, 'camera')).toMatchObject({
+    y: expect.closeTo(0.1 + du, 6),
+    z: expect.closeTo(-0.6 + dz, 6),
+  });
+  for (const id of ['gondola', 'thruster'])
+    expect(placeOf(ground, id)).toEqual(parts.find((p) => p.id === id)!.place);
+  ground.session.undo();
+  expect(ground.session.getState().undoLabel).toBeNull();
 });

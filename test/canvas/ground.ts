@@ -1,13 +1,15 @@
 /** A ground for gestures without a page: a real session, a scene worked out anew at each look, and what was shown. */
 
-import type { Ground, Hand, Scene } from '../../src/canvas/gestures/gesture.ts';
+import type { Ground, Habits, Hand, Scene } from '../../src/canvas/gestures/gesture.ts';
 import { CLEAR, type Overlay } from '../../src/canvas/overlay.ts';
 import type { Craft } from '../../src/craft/craft.ts';
+import { idsOf } from '../../src/edit/selection.ts';
 import { Session } from '../../src/edit/session.ts';
 import { frontFigure, sideFigure } from '../../src/scene/figure.ts';
 import { type Flatten, fromAstern, fromSide, hardpointPoints, wireLines } from '../../src/scene/flatten.ts';
 import { FigureCache, type FigureMaker } from '../../src/scene/keepSame.ts';
 import { type PlanePoint, toScreen, type View } from '../../src/scene/view.ts';
+import { wireHandles } from '../../src/scene/wireHandle.ts';
 import { craft as fixture, geometry, subject, VIEW } from '../scene/fixture.ts';
 
 export interface TestGround extends Ground {
@@ -19,26 +21,38 @@ export interface TestGround extends Ground {
   at(point: PlanePoint, keys?: Partial<Hand>): Hand;
 }
 
-function groundOf(start: Craft, flatten: Flatten, make: FigureMaker, first: View): TestGround {
+function groundOf(
+  start: Craft,
+  flatten: Flatten,
+  make: FigureMaker,
+  first: View,
+  habits: Partial<Habits>,
+): TestGround {
   const session = new Session(start);
   let overlay = CLEAR;
   let view = first;
   let fits = 0;
   const scene = (): Scene => {
-    const { craft } = session.getState();
+    const { craft, selection } = session.getState();
     const drawn = geometry(craft);
+    const figures = new FigureCache(make).figures(craft, drawn, 1 / view.scale);
+    const lines = wireLines(drawn.wires, flatten);
+    const ends = flatten === fromSide ? idsOf(selection, 'wire') : [];
     return {
       ...subject(craft),
       view,
       geometry: drawn,
-      figures: new FigureCache(make).figures(craft, drawn, 1 / view.scale),
-      lines: wireLines(drawn.wires, flatten),
+      figures,
+      lines,
+      wireHandles: wireHandles({ craft, lines, figures }, ends, view.scale),
       hardpoints: hardpointPoints(drawn, flatten),
       support: flatten === fromSide && drawn.support ? fromSide(drawn.support) : null,
     };
   };
   return {
     session,
+    habits: { snap: true, several: false, ...habits },
+    lastClick: { current: null },
     scene,
     show: (change) => {
       overlay = { ...overlay, ...change };
@@ -59,11 +73,11 @@ function groundOf(start: Craft, flatten: Flatten, make: FigureMaker, first: View
 
 const OPEN_HAND: Hand = { x: 0, y: 0, shift: false, ctrl: false, alt: false, touch: false };
 
-export const sideGround = (start: Craft = fixture()): TestGround =>
-  groundOf(start, fromSide, sideFigure, VIEW);
+export const sideGround = (start: Craft = fixture(), habits: Partial<Habits> = {}): TestGround =>
+  groundOf(start, fromSide, sideFigure, VIEW, habits);
 
-export const frontGround = (start: Craft = fixture()): TestGround =>
-  groundOf(start, fromAstern, frontFigure, { ...VIEW, originX: 420, pivot: 0 });
+export const frontGround = (start: Craft = fixture(), habits: Partial<Habits> = {}): TestGround =>
+  groundOf(start, fromAstern, frontFigure, { ...VIEW, originX: 420, pivot: 0 }, habits);
 
 /** The middle of a part's first piece as drawn. */
 export const middleOf = (ground: Ground, id: string): PlanePoint =>

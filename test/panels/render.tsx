@@ -25,6 +25,7 @@ export function editorOn(craft: Craft, { selection = [], units = 'metric' }: Set
     redoLabel: null,
     assessment: assess(craft, units),
     units,
+    several: false,
     apply: (edit) => session.apply(edit).length === 0,
     select: (next) => session.select(next),
     notify: () => {},

@@ -25,9 +25,22 @@ test('a search finds entries that hold every word, in any order and case', () =>
   expect(foundParts(catalogue.parts, '', 'battery').every(({ kind }) => kind === 'battery')).toBe(true);
 });
 
-test('a file name has nothing that file systems dislike, and is never empty', () => {
-  expect(fileName('Atrium / camera: 2', 'csv')).toBe('Atrium  camera 2.csv');
-  expect(fileName('***', 'csv')).toBe('craft.csv');
+test.each([
+  ['Atrium camera craft', 'json', 'atrium-camera-craft.json'],
+  ['Atrium / camera: 2', 'csv', 'atrium-camera-2.csv'],
+  ['  Ölwanne / 3.2 m ', 'json', 'olwanne-3-2-m.json'],
+  ['', 'csv', 'craft.csv'],
+  ['../..', 'json', 'craft.json'],
+  ['気球', 'json', '気球.json'],
+])('a craft called %j is written to a file %s called %s', (name, extension, file) => {
+  expect(fileName(name, extension)).toBe(file);
+});
+
+test('a search finds what stands in the note or in the word for the kind', () => {
+  const names = (search: string) => foundParts(catalogue.parts, search, null).map(({ kind }) => kind);
+  expect(new Set(names('useful load'))).toEqual(new Set(['load']));
+  expect(names('lithium swollen')).toContain('battery');
+  expect(names('no such thing')).toEqual([]);
 });
 
 test('rows are alike when every value is', () => {

@@ -111,9 +111,9 @@ test('a hair over the limit is said to be just that', () => {
 });
 
 test('figures are said without signs', () => {
-  expect(verdict(workedExample(), 'floats').figure).toBe('724.4 g light');
-  expect(verdict(workedExample(), 'level').figure).toBe('53.9° nose-up');
-  expect(verdict(workedExample(), 'even').figure).toBe('0.0°');
+  expect(verdict(workedExample(), 'floats')).toMatchObject({ figure: '724.4 g', side: 'light' });
+  expect(verdict(workedExample(), 'level')).toMatchObject({ figure: '53.9°', side: 'nose-up' });
+  expect(verdict(workedExample(), 'even')).toMatchObject({ figure: '0.0°', side: '' });
   expect(verdict(workedExample(), 'floats').target).toBe('10.0 g light to 20.0 g heavy');
 });
 
@@ -134,6 +134,12 @@ test('heeled: which side is low, and how much to bring over', () => {
   const loose = { ...heeled, targets: { ...heeled.targets, heaviness: { least: -1, most: 1 } } };
   expect(verdict(loose, 'even')).toMatchObject({ state: 'missed', word: 'starboard low' });
   expect(assess(loose).headline).toMatch(/^Heels \d\.\d°, starboard low: bring 25\.00 g·m over to port\.$/);
+});
+
+test('a bare hull has no pendulum, and says so', () => {
+  const bare: Craft = { ...workedExample(), parts: keyed([]) };
+  expect(assess(bare).headline).toMatch(/^Without a pendulum/);
+  expect(verdict(bare, 'upright').state).toBe('missed');
 });
 
 test('top-heavy: missed however little is asked for, and said before anything else', () => {

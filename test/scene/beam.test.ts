@@ -2,8 +2,8 @@ import fc from 'fast-check';
 import { expect, test } from 'vitest';
 import type { BeamBar } from '../../src/report/assessment.ts';
 import { beamOf, netWords, reachOf } from '../../src/scene/beam.ts';
-import { barAt, layBeam } from '../../src/scene/beamLayout.ts';
-import { rowValue } from '../../src/scene/subject.ts';
+import { barAt, beamRows, layBeam, zonesOf } from '../../src/scene/beamLayout.ts';
+import { isLevel, rowValue } from '../../src/scene/subject.ts';
 import { geometry, subject, VIEW } from './fixture.ts';
 
 const bar = (moment: number, i = 0): BeamBar => ({
@@ -72,8 +72,60 @@ test('on the page the beam stands under the CB and stays in sight', () => {
   expect(barAt(page, -500)).toBeNull();
 });
 
-test('what is left over, in words', () => {
-  expect(netWords(0.038, 'metric')).toBe('38.00 g·m tail-heavy');
-  expect(netWords(-0.0005, 'metric')).toBe('0.50 g·m nose-heavy');
-  expect(netWords(1e-9, 'metric')).toBe('in balance');
+test('what is left over, in words: the verdict says whether it matters', () => {
+  expect(netWords(0.038, 'metric', false)).toBe('38.00 g·m tail-heavy');
+  expect(netWords(-0.0005, 'metric', false)).toBe('0.50 g·m nose-heavy');
+  expect(netWords(-0.00027, 'metric', true)).toBe('level within tolerance, 0.27 g·m nose-heavy');
+  for (const level of [true, false]) {
+    expect(netWords(4.9e-6, 'metric', level)).toBe('balanced');
+    expect(netWords(5.1e-6, 'metric', level)).not.toContain('balanced');
+  }
+});
+
+test('a craft is level when the verdict says so', () => {
+  const { assessment } = subject();
+  expect(isLevel(assessment)).toBe(assessment.verdicts.find(({ key }) => key === 'level')!.state === 'met');
+  const all = [-1, 0, 1].map((margin) => ({
+    ...assessment.verdicts[1]!,
+    state: margin < 0 ? 'missed' : 'met',
+  }));
+  expect(all.map((verdict) => isLevel({ verdicts: [verdict as (typeof assessment.verdicts)[0]] }))).toEqual([
+    false,
+    true,
+    true,
+  ]);
+});
+
+test('every bar answers to the pointer, slivers too', () => {
+  fc.assert(
+    fc.property(moments, (all) => {
+      const page = layBeam(beamOf(all.map(bar), null), VIEW);
+      const zones = zonesOf(page);
+      expect(zones.map((zone) => zone.bar)).toEqual(page.bars.map((each) => each.bar));
+      for (const zone of zones) {
+        expect(zone.right - zone.left).toBeGreaterThanOrEqual(4 - 1e-9);
+        expect(barAt(page, (zone.left + zone.right) / 2)).toBe(zone.bar);
+      }
+    }),
+  );
+});
+
+test('in any pane the result is seen whole, and nothing overlaps', () => {
+  fc.assert(
+    fc.property(fc.integer({ min: 44, max: 400 }), (height) => {
+      const { top, bar, sums, result, leaders } = beamRows(height);
+      expect(top).toBeGreaterThanOrEqual(leaders ? 24 : 4);
+      expect(bar).toBeGreaterThanOrEqual(14);
+      expect(sums - 8).toBeGreaterThan(top + bar);
+      if (result !== null) expect(result - sums).toBeGreaterThanOrEqual(16);
+      expect((result ?? sums) + 8).toBeLessThanOrEqual(height);
+    }),
+  );
+  expect([60, 80, 90, 120].map((height) => beamRows(height).leaders)).toEqual([false, false, false, true]);
+  expect([60, 80, 90, 120].map((height) => beamRows(height).result === null)).toEqual([
+    true,
+    true,
+    false,
+    false,
+  ]);
 });

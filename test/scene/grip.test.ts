@@ -1,7 +1,15 @@
 import { expect, test } from 'vitest';
 import { sideFigure } from '../../src/scene/figure.ts';
 import { fromSide, hardpointPoints, wireLines } from '../../src/scene/flatten.ts';
-import { gripAt, handlesOf, type Reachable, sameGrip, wireEnds } from '../../src/scene/grip.ts';
+import {
+  DOT_PX,
+  gripAt,
+  handlesOf,
+  type Reachable,
+  sameGrip,
+  stackAt,
+  wireEnds,
+} from '../../src/scene/grip.ts';
 import {
   distanceToBox,
   distanceToSegment,
@@ -11,20 +19,26 @@ import {
   pointAt,
 } from '../../src/scene/hit.ts';
 import { FigureCache } from '../../src/scene/keepSame.ts';
-import { craft, geometry } from './fixture.ts';
+import { wireHandles } from '../../src/scene/wireHandle.ts';
+import { craft, geometry, wire } from './fixture.ts';
 
 const SCALE = 240;
 const of = craft();
 const drawn = geometry(of);
 const figures = new FigureCache(sideFigure).figures(of, drawn, 1 / SCALE);
 const lines = wireLines(drawn.wires, fromSide);
-const things = (selectedWires: string[] = []): Reachable => ({
+const things = (selection: Reachable['selection'] = []): Reachable => ({
   geometry: drawn,
   figures,
   lines,
   hardpoints: hardpointPoints(drawn, fromSide),
   support: { u: 2.4, z: -0.7 },
-  selectedWires,
+  selection,
+  wireHandles: wireHandles(
+    { craft: of, lines, figures },
+    selection.filter(({ kind }) => kind === 'wire').map(({ id }) => id),
+    SCALE,
+  ),
 });
 const middleOf = (id: string) => figures.find(({ part }) => part === id)!.middle;
 
@@ -40,10 +54,46 @@ test('each thing can be taken where it is drawn', () => {
   expect(at({ u: 1.2, z: 0.2 })).toBeNull();
 });
 
-test('the end of a selected wire run comes before the part it ends at', () => {
-  const end = wireEnds(lines, 'power')!.from;
-  expect(gripAt(things(), end, SCALE, 5)).toMatchObject({ kind: 'part' });
-  expect(gripAt(things(['power']), end, SCALE, 5)).toEqual({ kind: 'wireEnd', id: 'power', side: 'from' });
+const POWER = { kind: 'wire', id: 'power' } as const;
+
+test('the handle of a wire end stands off its part: the part is taken on itself, the end on its dot', () => {
+  const [from, to] = things([POWER]).wireHandles;
+  const { box } = figures.find(({ part }) => part === 'battery')!;
+  expect(distanceToBox(from!.at, box) * SCALE).toBeGreaterThan(DOT_PX + 5);
+  expect(distanceToBox(from!.at, box) * SCALE).toBeLessThan(30);
+  expect(from!.end).toEqual(wireEnds(lines, 'power')!.from);
+  const take = (point: { u: number; z: number }) => gripAt(things([POWER]), point, SCALE, 5);
+  expect(take(from!.at)).toEqual({ kind: 'wireEnd', id: 'power', side: 'from' });
+  expect(take(to!.at)).toEqual({ kind: 'wireEnd', id: 'power', side: 'to' });
+  for (const u of [box.left, (box.left + box.right) / 2, box.right]) {
+    for (const z of [box.bottom, (box.bottom + box.top) / 2, box.top]) {
+      expect(take({ u, z })).toEqual({ kind: 'part', id: 'battery', copy: 0 });
+    }
+  }
+});
+
+test('a handle at a loose end is on it, and no handle passes the middle of its run', () => {
+  const loose = { kind: 'loose', place: { kind: 'skin', station: 2, clock: Math.PI, standoff: 0 } } as const;
+  const run = craft(undefined, [wire('power', { to: loose })]);
+  const at = geometry(run);
+  const runs = wireLines(at.wires, fromSide);
+  const big = figures.map((figure) => ({ ...figure, box: { left: 0, right: 3, bottom: -1, top: 1 } }));
+  const [from, to] = wireHandles({ craft: run, lines: runs, figures: big }, ['power'], SCALE);
+  expect(to!.at).toEqual(to!.end);
+  expect(from!.at.u).toBeLessThan((from!.end.u + to!.end.u) / 2);
+});
+
+test('what is selected wins within its brackets over what is smaller or nearer; all else keeps its order', () => {
+  const { u, z } = middleOf('battery');
+  const around = { left: u - 0.3, right: u + 0.3, bottom: z - 0.1, top: z + 0.1 };
+  const pod = { ...figures[0]!, part: 'pod', copy: 0, box: around };
+  const all = (selection: Reachable['selection']) => ({ ...things(selection), figures: [...figures, pod] });
+  const point = { u, z };
+  expect(gripAt(all([]), point, SCALE, 5)).toMatchObject({ id: 'battery' });
+  const chosen = [{ kind: 'part', id: 'pod' }] as const;
+  expect(gripAt(all(chosen), point, SCALE, 5)).toMatchObject({ id: 'pod' });
+  expect(gripAt(all(chosen), { u: around.right + 4.9 / SCALE, z }, SCALE, 5)).toMatchObject({ id: 'pod' });
+  expect(stackAt(all(chosen), point, SCALE, 5).map(({ id }) => id)).toEqual(['battery', 'pod', 'power']);
 });
 
 test('handles have a target of at least 32 px across', () => {

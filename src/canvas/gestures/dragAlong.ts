@@ -10,7 +10,7 @@ import { toWorld } from '../../scene/view.ts';
 import type { Guide } from '../overlay.ts';
 import { type Company, placesOf } from './company.ts';
 import type { Step } from './dragging.ts';
-import type { Ground, Hand, Scene } from './gesture.ts';
+import { type Ground, type Hand, type Scene, unsnapped } from './gesture.ts';
 
 /** Up or down by less than this many px leaves the drop below the keel as it is. */
 const DEAD_BAND_PX = 12;
@@ -38,7 +38,7 @@ export function follow(
   const { value, to: target } = snapped(
     stationOfPlace(free),
     stationTargets(start.craft, start.geometry, moving),
-    stationRule(view.scale, start.units, hand.alt),
+    stationRule(view.scale, start.units, unsnapped(ground, hand)),
   );
   return { place: atStation(free, hull, value), guide: target && { along: 'station', ...target } };
 }

@@ -4,7 +4,7 @@ import { companyOf, sizeOf } from './company.ts';
 import { follow, together } from './dragAlong.ts';
 import { dragging } from './dragging.ts';
 import type { Gesture, Ground, Hand } from './gesture.ts';
-import { click, include, press } from './select.ts';
+import { clickThrough, include, press } from './select.ts';
 
 export function dragHardpoint(ground: Ground, down: Hand, { id }: { id: string }): Gesture {
   const thing = { kind: 'hardpoint', id } as const;
@@ -25,5 +25,5 @@ export function dragHardpoint(ground: Ground, down: Hand, { id }: { id: string }
       },
     };
   };
-  return dragging(ground, `Move ${name || 'hardpoint'}`, begin, (hand) => click(ground, thing, hand));
+  return dragging(ground, `Move ${name || 'hardpoint'}`, begin, (hand) => clickThrough(ground, thing, hand));
 }

@@ -4,7 +4,7 @@ import { withDiameter } from '../../scene/dragHull.ts';
 import { snapped, stationRule } from '../../scene/snap.ts';
 import { toWorld } from '../../scene/view.ts';
 import { dragging } from './dragging.ts';
-import type { Gesture, Ground, Hand } from './gesture.ts';
+import { type Gesture, type Ground, type Hand, unsnapped } from './gesture.ts';
 
 export function dragHullDiameter(ground: Ground, down: Hand): Gesture {
   const { craft, geometry, units, view } = ground.scene();
@@ -13,7 +13,7 @@ export function dragHullDiameter(ground: Ground, down: Hand): Gesture {
   const from = toWorld(view, down);
   const step = (hand: Hand) => {
     const asked = height + 2 * (toWorld(ground.scene().view, hand).z - from.z);
-    const { value } = snapped(asked, [], stationRule(view.scale, units, hand.alt));
+    const { value } = snapped(asked, [], stationRule(view.scale, units, unsnapped(ground, hand)));
     return { recipe: reshape(withDiameter(shape, height, value)) };
   };
   return dragging(ground, 'Change hull diameter', () => ({

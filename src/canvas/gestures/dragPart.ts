@@ -4,12 +4,12 @@ import { companyOf, sizeOf } from './company.ts';
 import { follow, together } from './dragAlong.ts';
 import { dragging, refusing } from './dragging.ts';
 import type { Gesture, Ground, Hand } from './gesture.ts';
-import { click, include, press } from './select.ts';
+import { clickThrough, include, press } from './select.ts';
 
 export function dragPart(ground: Ground, down: Hand, { id, copy }: { id: string; copy: number }): Gesture {
   const thing = { kind: 'part', id } as const;
   press(ground, thing, down);
-  const clicked = (hand: Hand) => click(ground, thing, hand);
+  const clicked = (hand: Hand) => clickThrough(ground, thing, hand);
   const start = ground.scene();
   const { name, kind, locked, place } = start.craft.parts.byId[id]!;
   if (locked) return refusing(ground, `${name || kind} is locked. Unlock it to move it.`, clicked);

@@ -24,6 +24,7 @@ export function dragging(
   let going: { drag: Drag; work: Work } | null = null;
   const started = () => {
     const work = begin();
+    ground.lastClick.current = null;
     ground.show({ held: work.held, moving: work.moving, hint: null });
     return { work, drag: ground.session.beginDrag(label) };
   };
@@ -32,7 +33,7 @@ export function dragging(
       going ??= started();
       const { recipe, show } = going.work.step(hand);
       going.drag.move(recipe);
-      ground.show({ guide: null, join: null, ...show });
+      ground.show({ guide: null, join: null, hint: null, ...show });
     },
     end: (hand, moved) => {
       if (!moved) click(hand);
@@ -41,7 +42,7 @@ export function dragging(
     },
     cancel: () => {
       going?.drag.cancel();
-      ground.show(AT_REST);
+      ground.show({ ...AT_REST, hint: null });
     },
   };
 }

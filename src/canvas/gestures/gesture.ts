@@ -5,6 +5,7 @@ import type { Figure } from '../../scene/figure.ts';
 import type { Line } from '../../scene/grip.ts';
 import type { Geometry, Subject } from '../../scene/subject.ts';
 import type { PlanePoint, View } from '../../scene/view.ts';
+import type { WireHandle } from '../../scene/wireHandle.ts';
 import type { Overlay } from '../overlay.ts';
 
 /** Where the hand is on the view, px, and which keys it holds. */
@@ -36,17 +37,33 @@ export interface Scene extends Subject {
   readonly hardpoints: readonly { readonly id: string; readonly at: PlanePoint }[];
   /** Where the view shows the support point; null where it does not. */
   readonly support: PlanePoint | null;
+  /** Ends of the wire runs selected, where the view lets them be taken. */
+  readonly wireHandles: readonly WireHandle[];
+}
+
+/** How the builder wants the hand to work. */
+export interface Habits {
+  /** Whether what is dragged snaps; Alt turns it round. */
+  readonly snap: boolean;
+  /** Whether a click adds to the selection or takes away, and a drag on empty ground draws a box. */
+  readonly several: boolean;
 }
 
 /** What gestures work on. */
 export interface Ground {
   readonly session: Session;
+  readonly habits: Habits;
+  /** Where the last click was, in the plane; null once something else happened. */
+  readonly lastClick: { current: PlanePoint | null };
   scene(): Scene;
   show(change: Partial<Overlay>): void;
   /** The view was moved by hand. */
   setView(change: (view: View) => View): void;
   fit(): void;
 }
+
+/** Whether snapping is held off. */
+export const unsnapped = ({ habits }: Ground, { alt }: Hand): boolean => alt === habits.snap;
 
 /** What a drag that could not be kept says. */
 export const problemHint = (problems: readonly Problem[]): string | null =>

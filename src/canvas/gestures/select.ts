@@ -1,17 +1,22 @@
-/** Selecting: a click takes one thing, Ctrl or Shift adds or takes away, and a box dragged with Shift takes what is in it. */
+/**
+ * Selecting: a click takes the smallest thing there, further clicks on the spot the others in turn. Ctrl, Shift or the habit of
+ * picking several adds or takes away, and a box takes what is in it.
+ */
 import { isSelected, type Selectable, type Selection, sameThing, toggled } from '../../edit/selection.ts';
+import { stackAt } from '../../scene/grip.ts';
 import { figuresIn } from '../../scene/hit.ts';
 import { boxOf, toWorld, turnedBy } from '../../scene/view.ts';
 import { AT_REST } from '../overlay.ts';
 import type { Gesture, Ground, Hand } from './gesture.ts';
+import { reachable, slopOf } from './reach.ts';
 
-const adds = (hand: Hand): boolean => hand.ctrl || hand.shift;
+const adds = ({ habits }: Ground, hand: Hand): boolean => habits.several || hand.ctrl || hand.shift;
 
 const selection = (ground: Ground): Selection => ground.session.getState().selection;
 
 /** Pressing: what is not selected yet becomes so at once, so that it can be dragged without a click before. */
 export function press(ground: Ground, thing: Selectable, hand: Hand): void {
-  if (adds(hand) || isSelected(selection(ground), thing)) return;
+  if (adds(ground, hand) || isSelected(selection(ground), thing)) return;
   ground.session.select([thing]);
 }
 
@@ -21,11 +26,24 @@ export function include(ground: Ground, thing: Selectable): void {
   if (!isSelected(now, thing)) ground.session.select([...now, thing]);
 }
 
-/** Letting go where it was pressed. */
+/** A click on one thing that nothing else can lie under. */
 export function click(ground: Ground, thing: Selectable, hand: Hand): void {
   const now = selection(ground);
-  if (adds(hand)) ground.session.select(toggled(now, thing));
+  if (adds(ground, hand)) ground.session.select(toggled(now, thing));
   else if (now.length !== 1 || !sameThing(now[0]!, thing)) ground.session.select([thing]);
+}
+
+/** Letting go in a view where it was pressed, on `thing` and perhaps others: the smallest, or the next on the same spot. */
+export function clickThrough(ground: Ground, thing: Selectable, hand: Hand): void {
+  const { view } = ground.scene();
+  const point = toWorld(view, hand);
+  const stack = stackAt(reachable(ground), point, view.scale, slopOf(hand));
+  const last = ground.lastClick.current;
+  const again = last && Math.hypot(last.u - point.u, last.z - point.z) <= slopOf(hand) / view.scale;
+  ground.lastClick.current = point;
+  const [only, more] = selection(ground);
+  const at = again && !more && only ? stack.findIndex((each) => sameThing(each, only)) : -1;
+  click(ground, stack[(at + 1) % stack.length] ?? thing, hand);
 }
 
 /** A box dragged over empty ground. The sides of the box are those of the screen. */

@@ -1,8 +1,5 @@
 /** Which gesture begins where the hand presses. */
-import type { Selection } from '../../edit/selection.ts';
-import { idsOf } from '../../edit/selection.ts';
 import { type Grip, gripAt } from '../../scene/grip.ts';
-import { MOUSE_SLOP, TOUCH_SLOP } from '../../scene/hit.ts';
 import { toWorld } from '../../scene/view.ts';
 import { dragHardpoint } from './dragHardpoint.ts';
 import { dragHullDiameter } from './dragHullDiameter.ts';
@@ -13,19 +10,19 @@ import { dragSupport } from './dragSupport.ts';
 import { dragWireEnd } from './dragWireEnd.ts';
 import type { Gesture, Ground, Hand } from './gesture.ts';
 import { pan } from './pan.ts';
-import { click, marquee } from './select.ts';
+import { reachable, slopOf } from './reach.ts';
+import { clickThrough, marquee } from './select.ts';
 
 export type Take = (ground: Ground, hand: Hand) => Gesture;
 
 /** What lies under the hand in the view. */
-export function gripUnder(ground: Ground, hand: Hand, selection: Selection): Grip | null {
-  const scene = ground.scene();
-  const slop = hand.touch ? TOUCH_SLOP : MOUSE_SLOP;
-  const things = { ...scene, selectedWires: idsOf(selection, 'wire') };
-  return gripAt(things, toWorld(scene.view, hand), scene.view.scale, slop);
+export function gripUnder(ground: Ground, hand: Hand): Grip | null {
+  const { view } = ground.scene();
+  return gripAt(reachable(ground), toWorld(view, hand), view.scale, slopOf(hand));
 }
 
-const onEmpty: Take = (ground, hand) => (hand.shift ? marquee(ground, hand) : pan(ground, hand));
+const onEmpty: Take = (ground, hand) =>
+  hand.shift || ground.habits.several ? marquee(ground, hand) : pan(ground, hand);
 
 /** A wire run is selected by a click; dragging it moves the drawing. */
 function onWire(ground: Ground, hand: Hand, id: string): Gesture {
@@ -33,13 +30,13 @@ function onWire(ground: Ground, hand: Hand, id: string): Gesture {
   return {
     ...panning,
     end: (at, moved) => {
-      if (!moved) click(ground, { kind: 'wire', id }, at);
+      if (!moved) clickThrough(ground, { kind: 'wire', id }, at);
     },
   };
 }
 
 export const takeInSide: Take = (ground, hand) => {
-  const grip = gripUnder(ground, hand, ground.session.getState().selection);
+  const grip = gripUnder(ground, hand);
   switch (grip?.kind) {
     case undefined:
       return onEmpty(ground, hand);
@@ -59,7 +56,7 @@ export const takeInSide: Take = (ground, hand) => {
 };
 
 export const takeInFront: Take = (ground, hand) => {
-  const grip = gripUnder(ground, hand, []);
+  const grip = gripUnder(ground, hand);
   switch (grip?.kind) {
     case 'part':
       return dragPartInFront(ground, hand, grip);

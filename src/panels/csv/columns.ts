@@ -3,7 +3,7 @@ import type { Part } from '../../craft/schema.ts';
 import { stationOf } from '../../edit/place.ts';
 import type { Quantity, UnitSystem } from '../../units/units.ts';
 import { copiesText } from './copiesText.ts';
-import { writeCell } from './quantityCell.ts';
+import { writeAngle, writeCell } from './quantityCell.ts';
 import { textCell } from './table.ts';
 
 export interface PartColumn {
@@ -58,7 +58,8 @@ const figure = (
   quantity,
   write: (part, units) => {
     const si = value(part);
-    return si === null ? '' : writeCell(si, quantity, units);
+    if (si === null) return '';
+    return quantity === 'angle' ? writeAngle(si, units) : writeCell(si, quantity, units);
   },
 });
 

@@ -20,4 +20,8 @@ export function writeCell(si: number, quantity: Quantity, units: UnitSystem): st
   return texts.find((text) => sameAs(si, readEntry(text, quantity, units))) ?? texts.at(-1)!;
 }
 
+/** To a millionth of a degree, which no hand can tell: 60 and not 60.00000000000001. */
+export const writeAngle = (si: number, units: UnitSystem): string =>
+  String(Number(unitOf('angle', units).toDisplay(si).toFixed(6)));
+
 const sameAs = (si: number, read: Read<number>): boolean => read.ok && read.value === si;

@@ -4,7 +4,7 @@ import { type UnitSystem, unitOf } from '../../units/units.ts';
 import { PART_COLUMNS, type PartColumn } from './columns.ts';
 import { csvText } from './table.ts';
 
-/** Numbers are written in full, so that `readParts` gives the same parts again. */
+/** Numbers are written in full, angles to 1e-6°, so that `readParts` gives the same parts again. */
 export const partsCsv = (parts: readonly Part[], units: UnitSystem): string =>
   csvText([
     PART_COLUMNS.map((column) => headOf(column, units)),

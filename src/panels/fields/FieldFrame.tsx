@@ -1,5 +1,6 @@
 /** The label, unit and error sentence around one input. */
 import { type ReactNode, useId } from 'react';
+import { ErrorBubble } from './ErrorBubble.tsx';
 
 /** What the input inside must carry so that label, unit and error belong to it. */
 export interface InputAria {
@@ -50,10 +51,28 @@ export function FieldFrame({ label, bare, unit, error, hint, children }: FieldFr
         </span>
       )}
       {error && (
-        <span className="field-error" id={`${id}-error`} role="alert">
+        <ErrorText id={`${id}-error`} floating={bare}>
           {error}
-        </span>
+        </ErrorText>
       )}
     </div>
+  );
+}
+
+/** In a table there is no room under the input, so the sentence floats over what stands there. */
+function ErrorText({
+  id,
+  floating,
+  children,
+}: {
+  id: string;
+  floating?: boolean | undefined;
+  children: string;
+}) {
+  if (floating) return <ErrorBubble id={id}>{children}</ErrorBubble>;
+  return (
+    <span className="field-error" id={id} role="alert">
+      {children}
+    </span>
   );
 }

@@ -15,6 +15,8 @@ export interface QuantityFieldProps {
   readonly units: UnitSystem;
   /** `run`: the burst of arrow keys it belongs to. */
   onCommit(value: number, run?: string): Problem | null;
+  /** Not kept as typed but worked out from what is: shown as figures are. */
+  readonly derived?: boolean | undefined;
   readonly bare?: boolean | undefined;
   readonly hint?: string | undefined;
   readonly disabled?: boolean | undefined;
@@ -33,7 +35,7 @@ export function QuantityField(props: QuantityFieldProps) {
   };
   const draft = useDraft({
     label,
-    shown: value === null ? '' : entryText(value, quantity, units),
+    shown: value === null ? '' : entryText(value, quantity, units, props.derived ? 0 : 2),
     read: (text) => readEntry(text, quantity, units),
     commit,
     startWith,

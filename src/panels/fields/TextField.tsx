@@ -49,7 +49,7 @@ export function TextField({
           value={draft.text}
           // biome-ignore lint/a11y/noAutofocus: only where the builder just opened this cell or dialog to type
           autoFocus={autoFocus}
-          onFocus={(event) => bare && startWith === undefined && event.currentTarget.select()}
+          onFocus={(event) => startWith === undefined && event.currentTarget.select()}
           onChange={(event) => draft.set(event.currentTarget.value)}
           onBlur={draft.onBlur}
           onKeyDown={draft.onKeyDown}

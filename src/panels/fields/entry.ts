@@ -7,10 +7,13 @@ export type Read<T> =
   | { readonly ok: true; readonly value: T }
   | { readonly ok: false /** What was found and what is allowed. */; readonly message: string };
 
-/** Two decimals more than the quantity is usually shown with, unpadded: a typed value comes back as typed, a dragged one stays short. */
-export function entryText(si: number, quantity: Quantity, units: UnitSystem): string {
+/**
+ * Unpadded, with `more` decimals than the quantity is usually shown with: with two a typed value comes back as typed
+ * and a dragged one stays short; what only follows from others needs none.
+ */
+export function entryText(si: number, quantity: Quantity, units: UnitSystem, more = 2): string {
   const full = formatEntry(si, quantity, units);
-  return full === '' ? '' : String(Number(Number(full).toFixed(unitOf(quantity, units).digits + 2)));
+  return full === '' ? '' : String(Number(Number(full).toFixed(unitOf(quantity, units).digits + more)));
 }
 
 /** The typed SI value without the last digit of binary dust, so that 35.7 g is kept as 0.0357 and not 0.035700000000000003. Angles keep it, so that 180° is π. */

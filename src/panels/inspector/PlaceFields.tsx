@@ -118,6 +118,7 @@ function TapeField({ place, hull, prefix, onPlace }: TapeFieldProps) {
       value={hull.tapeAt(place.station, clock)}
       quantity="length"
       units={units}
+      derived
       hint="Along the skin from the nose tip"
       onCommit={commit}
     />

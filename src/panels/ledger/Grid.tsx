@@ -1,12 +1,22 @@
 /** A table of parts, wire runs or hardpoints: sort by head, pick rows, edit in place, all of it by keyboard too. */
-import { type CSSProperties, type KeyboardEvent, useCallback, useEffect, useRef, useState } from 'react';
+import {
+  type CSSProperties,
+  type KeyboardEvent,
+  useCallback,
+  useEffect,
+  useLayoutEffect,
+  useMemo,
+  useRef,
+  useState,
+} from 'react';
 import { isSelected, type Selectable } from '../../edit/selection.ts';
 import { useCommit } from '../commit.ts';
 import { useEditor } from '../editor.ts';
+import type { Fresh } from './adding.ts';
 import { type CellAt, cellFrom } from './cellKeys.ts';
 import { GridHead } from './GridHead.tsx';
 import { GridRow } from './GridRow.tsx';
-import type { GridColumn, GridItem } from './gridColumn.ts';
+import { fitting, type GridColumn, type GridItem, widthOf } from './gridColumn.ts';
 import { keptOrder, nextSort, type Sort, sortedIds } from './order.ts';
 import { type PickKeys, picked } from './pick.ts';
 
@@ -19,29 +29,45 @@ export interface GridProps<R extends GridItem> {
   readonly columns: readonly GridColumn<R>[];
   /** What stands there when there are no rows. */
   readonly empty: string;
+  /** A row just added, whose first field opens. */
+  readonly fresh?: Fresh;
   /** Makes the order shown the order of the craft. */
   onKeepOrder?: (ids: readonly string[]) => void;
 }
 
-export function Grid<R extends GridItem>({ label, kind, rows, columns, empty, onKeepOrder }: GridProps<R>) {
-  const { session, selection, dragging, units } = useEditor();
+export function Grid<R extends GridItem>({
+  label,
+  kind,
+  rows,
+  columns: all,
+  empty,
+  fresh,
+  onKeepOrder,
+}: GridProps<R>) {
+  const { session, selection, dragging, units, several } = useEditor();
   const commit = useCommit();
   const [sort, setSort] = useState<Sort | null>(null);
   const [focus, setFocus] = useState<CellAt | null>(null);
   const table = useRef<HTMLDivElement>(null);
+  const columns = useFitting(table, all);
   const order = useOrder(sortedIds(rows, columns, sort), dragging);
   const shown = useRef(order);
   shown.current = order;
   const pick = useCallback(
     (id: string, keys: PickKeys) =>
-      session.select(picked(session.getState().selection, kind, id, shown.current, keys)),
-    [session, kind],
+      session.select(
+        picked(session.getState().selection, kind, id, shown.current, {
+          ...keys,
+          toggle: keys.toggle || (several && !keys.extend),
+        }),
+      ),
+    [session, kind, several],
   );
   const onCellFocus = useCallback((id: string, key: string) => setFocus({ id, key }), []);
   useSelectedInView(table, kind);
   const byId = new Map(rows.map((row) => [row.id, row]));
   const active: CellAt | null =
-    focus && byId.has(focus.id)
+    focus && byId.has(focus.id) && columns.some(({ key }) => key === focus.key)
       ? focus
       : order[0] === undefined
         ? null
@@ -62,7 +88,7 @@ export function Grid<R extends GridItem>({ label, kind, rows, columns, empty, on
     <>
       {sort && onKeepOrder && (
         <p className="keep-order">
-          Shown by {columns.find(({ key }) => key === sort.key)!.title.toLowerCase()}.
+          Shown by {all.find(({ key }) => key === sort.key)!.title.toLowerCase()}.
           <button
             type="button"
             onClick={() => {
@@ -79,7 +105,7 @@ export function Grid<R extends GridItem>({ label, kind, rows, columns, empty, on
         role="grid"
         aria-label={label}
         aria-multiselectable
-        style={{ '--columns': tracks(columns), minWidth: `${width(columns)}em` } as CSSProperties}
+        style={{ '--columns': tracks(columns), minWidth: `${widthOf(columns)}em` } as CSSProperties}
         ref={table}
         onKeyDown={onKeyDown}
       >
@@ -92,8 +118,10 @@ export function Grid<R extends GridItem>({ label, kind, rows, columns, empty, on
               columns={columns}
               units={units}
               commit={commit}
+              several={several}
               selected={isSelected(selection, { kind, id })}
               active={active?.id === id ? active.key : null}
+              onFresh={fresh?.id === id ? fresh.opened : null}
               onPick={pick}
               onCellFocus={onCellFocus}
             />
@@ -109,8 +137,25 @@ export function Grid<R extends GridItem>({ label, kind, rows, columns, empty, on
 const tracks = <R extends GridItem>(columns: readonly GridColumn<R>[]): string =>
   columns.map(({ width }) => `minmax(${width}em, ${width}fr)`).join(' ');
 
-const width = <R extends GridItem>(columns: readonly GridColumn<R>[]): number =>
-  columns.reduce((sum, each) => sum + each.width, 0);
+/** The columns for which there is room; the same array as long as they are the same. */
+function useFitting<R extends GridItem>(
+  table: { readonly current: HTMLElement | null },
+  all: readonly GridColumn<R>[],
+): readonly GridColumn<R>[] {
+  const [room, setRoom] = useState(Number.POSITIVE_INFINITY);
+  useLayoutEffect(() => {
+    const pane = table.current!.parentElement!;
+    const look = () => setRoom(pane.clientWidth / Number.parseFloat(getComputedStyle(pane).fontSize));
+    look();
+    const observer = new ResizeObserver(look);
+    observer.observe(pane);
+    return () => observer.disconnect();
+  }, [table]);
+  const shown = fitting(all, room);
+  const keys = shown.map(({ key }) => key).join();
+  // biome-ignore lint/correctness/useExhaustiveDependencies: the keys tell whether they are the same columns
+  return useMemo(() => shown, [all, keys]);
+}
 
 /** While something is dragged rows keep their places, so that none jumps about under the eye. */
 function useOrder(ids: readonly string[], dragging: boolean): readonly string[] {

@@ -1,5 +1,5 @@
 /** One row of a table. Cells show text; Enter, F2, typing or a second click opens the field of a cell in place. */
-import { type KeyboardEvent, type MouseEvent, memo, type ReactNode, useRef } from 'react';
+import { type KeyboardEvent, type MouseEvent, memo, type ReactNode, useEffect, useRef } from 'react';
 import type { UnitSystem } from '../../units/units.ts';
 import type { Commit } from '../commit.ts';
 import { shallowEqual } from '../shallow.ts';
@@ -13,22 +13,32 @@ export interface GridRowProps<R extends GridItem> {
   readonly units: UnitSystem;
   readonly commit: Commit;
   readonly selected: boolean;
+  /** Whether a click only picks, as it does with Ctrl. */
+  readonly several: boolean;
   /** The column of the cell that Tab leads to, if it is in this row. */
   readonly active: string | null;
+  /** Present in a row just added: its first field opens, and this is told so. */
+  readonly onFresh: (() => void) | null;
   onPick(id: string, keys: PickKeys): void;
   onCellFocus(id: string, key: string): void;
 }
 
 function PlainGridRow<R extends GridItem>(props: GridRowProps<R>) {
-  const { row, columns, units, commit, selected, active } = props;
+  const { row, columns, units, commit, selected, active, onFresh } = props;
   const { opened, open, leave, onTab, line } = useOpenCells(row, columns, commit);
+  // biome-ignore lint/correctness/useExhaustiveDependencies: once for a fresh row, however often it is drawn
+  useEffect(() => {
+    if (!onFresh) return;
+    open(columns[0]!.key);
+    onFresh();
+  }, [onFresh]);
   /** The cell that was active and selected when the pointer went down: its click is the second. */
   const ready = useRef<string | null>(null);
   const onClick = (event: MouseEvent) => {
     const key = cellAt(event.target);
     if (key === null) return;
     const keys = { toggle: event.ctrlKey || event.metaKey, extend: event.shiftKey };
-    if (ready.current === key && !keys.toggle && !keys.extend) open(key);
+    if (ready.current === key && !props.several && !keys.toggle && !keys.extend) open(key);
     else props.onPick(row.id, keys);
   };
   const onKeyDown = (event: KeyboardEvent<HTMLDivElement>) => {
@@ -57,7 +67,10 @@ function PlainGridRow<R extends GridItem>(props: GridRowProps<R>) {
           key={column.key}
           role={index === 0 ? 'rowheader' : 'gridcell'}
           data-cell={column.key}
-          className={column.numeric ? 'number' : undefined}
+          className={
+            [column.numeric && 'number', opened.has(column.key) && 'opened'].filter(Boolean).join(' ') ||
+            undefined
+          }
           tabIndex={active === column.key ? 0 : -1}
           onFocus={() => props.onCellFocus(row.id, column.key)}
         >

@@ -4,7 +4,7 @@ import { addHardpoint, removeHardpoints } from '../../edit/edits/hardpoints.ts';
 import { called, idsOf } from '../../edit/selection.ts';
 import { defaultPlace } from '../defaults.ts';
 import { useEditor } from '../editor.ts';
-import { useAdding } from './adding.ts';
+import { useAdding, useNaming } from './adding.ts';
 import { Grid } from './Grid.tsx';
 import { hardpointRows } from './gridRows.ts';
 import { HARDPOINT_GRID } from './hardpointColumns.tsx';
@@ -12,6 +12,7 @@ import { HARDPOINT_GRID } from './hardpointColumns.tsx';
 export function HardpointTable() {
   const { craft, assessment, selection, apply } = useEditor();
   const add = useAdding('hardpoint');
+  const { fresh, addAndName } = useNaming('hardpoint');
   const ids = idsOf(selection, 'hardpoint');
   const all = ids.length === craft.hardpoints.order.length;
   const what = called(craft, 'hardpoint', ids);
@@ -24,7 +25,10 @@ export function HardpointTable() {
   return (
     <>
       <div className="toolbar" role="toolbar" aria-label="Hardpoints">
-        <button type="button" onClick={() => add(addHardpoint('New hardpoint', defaultPlace(assessment)))}>
+        <button
+          type="button"
+          onClick={() => addAndName(addHardpoint('New hardpoint', defaultPlace(assessment)))}
+        >
           Add hardpoint
         </button>
         <button type="button" disabled={ids.length === 0} onClick={() => add(duplicate)}>
@@ -45,6 +49,7 @@ export function HardpointTable() {
           kind="hardpoint"
           rows={hardpointRows(craft)}
           columns={HARDPOINT_GRID}
+          fresh={fresh}
           empty="No hardpoints."
         />
       </div>

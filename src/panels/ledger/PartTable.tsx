@@ -1,6 +1,7 @@
 /** The parts, and what can be done to them. */
 import { useRef } from 'react';
 import { listed } from '../../craft/craft.ts';
+import type { Edit } from '../../edit/edit.ts';
 import {
   addPart,
   duplicateParts,
@@ -13,7 +14,7 @@ import { called, idsOf } from '../../edit/selection.ts';
 import { partsCsv } from '../csv/writeParts.ts';
 import { blankPart, defaultPlace, hullLengthOf } from '../defaults.ts';
 import { useEditor } from '../editor.ts';
-import { useAdding } from './adding.ts';
+import { useAdding, useNaming } from './adding.ts';
 import { download, fileName } from './download.ts';
 import { Grid } from './Grid.tsx';
 import { partRows } from './gridRows.ts';
@@ -30,10 +31,11 @@ interface PartTableProps {
 
 export function PartTable({ onDialog }: PartTableProps) {
   const { craft, assessment, apply } = useEditor();
+  const { fresh, addAndName } = useNaming('part');
   return (
     <>
       <div className="toolbar" role="toolbar" aria-label="Parts">
-        <AddButtons onDialog={onDialog} />
+        <AddButtons onDialog={onDialog} onAdd={addAndName} />
         <SelectedButtons onDialog={onDialog} />
         <CsvButtons onDialog={onDialog} />
       </div>
@@ -43,6 +45,7 @@ export function PartTable({ onDialog }: PartTableProps) {
           kind="part"
           rows={partRows(craft, assessment)}
           columns={PART_GRID}
+          fresh={fresh}
           empty="No parts yet. Add the first one: its name, its mass and where it sits are enough."
           onKeepOrder={(ids) => apply(sortParts(ids))}
         />
@@ -51,13 +54,16 @@ export function PartTable({ onDialog }: PartTableProps) {
   );
 }
 
-function AddButtons({ onDialog }: PartTableProps) {
+function AddButtons({ onDialog, onAdd }: PartTableProps & { onAdd: (edit: Edit) => void }) {
   const { craft, assessment } = useEditor();
-  const add = useAdding('part');
   const full = !hasRoom(craft, 1);
   return (
     <>
-      <button type="button" disabled={full} onClick={() => add(addPart(blankPart(defaultPlace(assessment))))}>
+      <button
+        type="button"
+        disabled={full}
+        onClick={() => onAdd(addPart(blankPart(defaultPlace(assessment))))}
+      >
         Add part
       </button>
       <button type="button" disabled={full} onClick={() => onDialog({ kind: 'catalogue' })}>

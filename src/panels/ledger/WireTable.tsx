@@ -5,7 +5,7 @@ import { addWire, removeWires, type WireFields } from '../../edit/edits/wires.ts
 import { called, idsOf } from '../../edit/selection.ts';
 import { blankWire, defaultPlace } from '../defaults.ts';
 import { useEditor } from '../editor.ts';
-import { useAdding } from './adding.ts';
+import { useAdding, useNaming } from './adding.ts';
 import { Grid } from './Grid.tsx';
 import { wireRows } from './gridRows.ts';
 import { WIRE_GRID } from './wireColumns.tsx';
@@ -13,10 +13,11 @@ import { WIRE_GRID } from './wireColumns.tsx';
 export function WireTable() {
   const { craft, assessment, selection, apply } = useEditor();
   const add = useAdding('wire');
+  const { fresh, addAndName } = useNaming('wire');
   const ids = idsOf(selection, 'wire');
   const what = called(craft, 'wire', ids);
   const addBlank = () =>
-    add(addWire(blankWire(defaultPlace(assessment), catalogue.conductors[0]?.massPerMetre ?? 0)));
+    addAndName(addWire(blankWire(defaultPlace(assessment), catalogue.conductors[0]?.massPerMetre ?? 0)));
   return (
     <>
       <div className="toolbar" role="toolbar" aria-label="Wire runs">
@@ -47,6 +48,7 @@ export function WireTable() {
           kind="wire"
           rows={wireRows(craft, assessment)}
           columns={WIRE_GRID}
+          fresh={fresh}
           empty="No wire runs. Their mass counts too: add one and join its ends to two parts."
         />
       </div>

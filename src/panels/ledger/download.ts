@@ -10,6 +10,14 @@ export function download(name: string, type: string, text: string): void {
   setTimeout(() => URL.revokeObjectURL(url), 60_000);
 }
 
-/** A file name from the name of a craft, without what file systems dislike. */
-export const fileName = (name: string, extension: string): string =>
-  `${name.replace(/[^\p{L}\p{N} _-]+/gu, '').trim() || 'craft'}.${extension}`;
+/** "Atrium camera craft" → atrium-camera-craft.json; craft file and table of parts are called alike. */
+export function fileName(name: string, extension: string): string {
+  const plain = name
+    .normalize('NFKD')
+    .toLowerCase()
+    .replace(/[\u0300-\u036f]/g, '')
+    .replace(/[^\p{L}\p{N}]+/gu, '-')
+    .replace(/^-+|-+$/g, '')
+    .slice(0, 60);
+  return `${plain || 'craft'}.${extension}`;
+}

@@ -23,8 +23,10 @@ export interface CellProps<R> {
 export interface GridColumn<R extends GridItem> {
   readonly key: string;
   readonly title: string;
-  /** em; all columns widen alike where there is room. */
+  /** em it needs at least; all columns widen in proportion where there is room. */
   readonly width: number;
+  /** Gives way where the table is narrow, the lowest first; what it says stands in the inspector too. */
+  readonly yields?: number;
   readonly numeric?: boolean;
   sortBy(row: R): string | number;
   text(row: R, units: UnitSystem): string;
@@ -36,4 +38,22 @@ export interface GridColumn<R extends GridItem> {
     readonly pressed: (row: R) => boolean;
     readonly run: (row: R, commit: Commit) => void;
   };
+}
+
+export const widthOf = <R extends GridItem>(columns: readonly GridColumn<R>[]): number =>
+  columns.reduce((sum, { width }) => sum + width, 0);
+
+/** The columns that fit side by side into so many em; those that never yield stay however narrow it is. */
+export function fitting<R extends GridItem>(
+  columns: readonly GridColumn<R>[],
+  room: number,
+): readonly GridColumn<R>[] {
+  const yielding = columns.filter((column) => column.yields !== undefined);
+  yielding.sort((a, b) => a.yields! - b.yields!);
+  let shown = columns;
+  for (const next of yielding) {
+    if (widthOf(shown) <= room) break;
+    shown = shown.filter((column) => column !== next);
+  }
+  return shown;
 }

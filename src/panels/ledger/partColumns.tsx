@@ -148,7 +148,7 @@ export const PART_GRID: readonly GridColumn<PartRow>[] = [
   {
     key: 'name',
     title: 'Name',
-    width: 17,
+    width: 11.5,
     sortBy: ({ part }) => part.name,
     text: ({ part }) => part.name,
     field: (cell) => <NameCell {...cell} />,
@@ -156,7 +156,8 @@ export const PART_GRID: readonly GridColumn<PartRow>[] = [
   {
     key: 'kind',
     title: 'Kind',
-    width: 8.5,
+    width: 8.2,
+    yields: 3,
     sortBy: ({ part }) => PART_WORDS[part.kind],
     text: ({ part }) => PART_WORDS[part.kind],
     field: choiceCell<PartKind>(
@@ -169,7 +170,7 @@ export const PART_GRID: readonly GridColumn<PartRow>[] = [
   {
     key: 'mass',
     title: 'Mass',
-    width: 7,
+    width: 6,
     numeric: true,
     sortBy: ({ part }) => part.mass,
     text: ({ part }, units) => formatQuantity(part.mass, 'mass', units),
@@ -178,7 +179,7 @@ export const PART_GRID: readonly GridColumn<PartRow>[] = [
   {
     key: 'tolerance',
     title: '±',
-    width: 5.5,
+    width: 4.8,
     numeric: true,
     sortBy: ({ part }) => part.massTolerance,
     text: ({ part }, units) =>
@@ -188,7 +189,8 @@ export const PART_GRID: readonly GridColumn<PartRow>[] = [
   {
     key: 'source',
     title: 'Source',
-    width: 8,
+    width: 7.6,
+    yields: 1,
     sortBy: ({ part }) => SOURCE_WORDS[part.massSource],
     text: ({ part }) => SOURCE_WORDS[part.massSource],
     field: choiceCell<MassSource>(
@@ -201,7 +203,7 @@ export const PART_GRID: readonly GridColumn<PartRow>[] = [
   {
     key: 'place',
     title: 'Place',
-    width: 9.5,
+    width: 8.9,
     sortBy: ({ part }) => PLACE_WORDS[part.place.kind],
     text: ({ part }) => PLACE_WORDS[part.place.kind],
     field: (cell) => <PlaceCell {...cell} />,
@@ -209,7 +211,7 @@ export const PART_GRID: readonly GridColumn<PartRow>[] = [
   {
     key: 'station',
     title: 'Station',
-    width: 7,
+    width: 6.1,
     numeric: true,
     sortBy: ({ part }) => stationOf(part.place),
     text: ({ part }, units) => formatQuantity(stationOf(part.place), 'length', units),
@@ -218,7 +220,8 @@ export const PART_GRID: readonly GridColumn<PartRow>[] = [
   {
     key: 'copies',
     title: 'Copies',
-    width: 6.5,
+    width: 5.4,
+    yields: 2,
     sortBy: ({ part }) => copiesText(part.copies),
     text: ({ part }) => copiesText(part.copies),
     field: (cell) => <CopiesCell {...cell} />,
@@ -226,7 +229,7 @@ export const PART_GRID: readonly GridColumn<PartRow>[] = [
   {
     key: 'moment',
     title: 'Moment',
-    width: 8.5,
+    width: 8.8,
     numeric: true,
     sortBy: ({ moment }) => moment ?? 0,
     text: ({ moment }, units) => (moment === null ? '–' : formatQuantity(moment, 'momentMass', units)),
@@ -234,7 +237,7 @@ export const PART_GRID: readonly GridColumn<PartRow>[] = [
   {
     key: 'locked',
     title: 'Lock',
-    width: 5.5,
+    width: 5,
     sortBy: ({ part }) => (part.locked ? 0 : 1),
     text: () => 'Lock',
     press: {

@@ -54,7 +54,7 @@ const figure = (
 ): GridColumn<WireRow> => ({
   key,
   title,
-  width: 8,
+  width: 6.8,
   numeric: true,
   sortBy: (row) => row[key] ?? 0,
   text: (row, units) => shown(row[key], quantity, units),
@@ -63,7 +63,7 @@ const figure = (
 const words = (key: 'from' | 'to', title: string): GridColumn<WireRow> => ({
   key,
   title,
-  width: 12,
+  width: 8.5,
   sortBy: (row) => row[key],
   text: (row) => row[key],
 });
@@ -72,7 +72,7 @@ export const WIRE_GRID: readonly GridColumn<WireRow>[] = [
   {
     key: 'name',
     title: 'Name',
-    width: 17,
+    width: 10,
     sortBy: ({ wire }) => wire.name,
     text: ({ wire }) => wire.name,
     field: (cell) => (
@@ -92,15 +92,17 @@ export const WIRE_GRID: readonly GridColumn<WireRow>[] = [
   {
     key: 'path',
     title: 'Path',
-    width: 11,
+    width: 8.5,
+    yields: 2,
     sortBy: ({ wire }) => wire.path.kind,
     text: ({ wire: { path } }, units) =>
       path.kind === 'straight' ? 'Straight' : `Skin, ${formatQuantity(path.clock, 'angle', units)}`,
   },
   {
     key: 'massPerMetre',
-    title: 'Mass per length',
-    width: 10,
+    title: 'Per length',
+    width: 7.6,
+    yields: 3,
     numeric: true,
     sortBy: ({ wire }) => wire.massPerMetre,
     text: ({ wire }, units) => formatQuantity(wire.massPerMetre, 'massPerMetre', units),
@@ -109,7 +111,8 @@ export const WIRE_GRID: readonly GridColumn<WireRow>[] = [
   {
     key: 'conductors',
     title: 'Conductors',
-    width: 8,
+    width: 6.4,
+    yields: 1,
     numeric: true,
     sortBy: ({ wire }) => wire.conductors,
     text: ({ wire }) => String(wire.conductors),
@@ -128,7 +131,7 @@ export const WIRE_GRID: readonly GridColumn<WireRow>[] = [
   {
     key: 'slack',
     title: 'Slack',
-    width: 6,
+    width: 5,
     numeric: true,
     sortBy: ({ wire }) => wire.slack,
     text: ({ wire }, units) => formatQuantity(wire.slack, 'fraction', units),

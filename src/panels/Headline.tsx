@@ -1,0 +1,56 @@
+/** The one sentence, in a frame of fixed height, and the buttons that do what it advises. */
+import { type RefObject, useId, useLayoutEffect, useRef, useState } from 'react';
+import { AdviceButton } from './AdviceButton.tsx';
+import { headlineAdvice } from './advice.ts';
+import { useEditor } from './editor.ts';
+
+export function Headline() {
+  const { assessment, craft } = useEditor();
+  const { headline, met } = assessment;
+  const text = useRef<HTMLParagraphElement>(null);
+  const cut = useCut(text, headline);
+  const [open, setOpen] = useState(false);
+  const id = useId();
+  return (
+    <div className="headline-frame">
+      <p className="headline" ref={text} data-met={met} role="status" title={headline}>
+        {headline}
+      </p>
+      <div className="headline-buttons">
+        {headlineAdvice(assessment, craft).map((kind) => (
+          <AdviceButton key={kind} kind={kind} />
+        ))}
+        {cut && (
+          <button
+            type="button"
+            className="small"
+            aria-expanded={open}
+            aria-controls={id}
+            onClick={() => setOpen(!open)}
+            onBlur={() => setOpen(false)}
+          >
+            More
+          </button>
+        )}
+      </div>
+      <p id={id} className="headline-whole" hidden={!(open && cut)}>
+        {headline}
+      </p>
+    </div>
+  );
+}
+
+/** Whether the text does not fit into its frame. */
+function useCut(text: RefObject<HTMLElement | null>, content: string): boolean {
+  const [cut, setCut] = useState(false);
+  // biome-ignore lint/correctness/useExhaustiveDependencies: another sentence needs another look
+  useLayoutEffect(() => {
+    const element = text.current!;
+    const look = () => setCut(element.scrollHeight > element.clientHeight + 1);
+    look();
+    const observer = new ResizeObserver(look);
+    observer.observe(element);
+    return () => observer.disconnect();
+  }, [text, content]);
+  return cut;
+}
