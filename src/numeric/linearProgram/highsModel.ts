@@ -12,6 +12,7 @@ const TOLERANCES = {
 export class HighsModel {
   readonly model: Model;
   readonly #highs: Highs;
+  readonly #set = new Map<string, number>();
   #held: LinearProblem | null = null;
 
   constructor(highs: Highs) {
@@ -23,6 +24,15 @@ export class HighsModel {
       mip_heuristic_run_feasibility_jump: false,
       ...TOLERANCES,
     });
+  }
+
+  /** Sets options of HiGHS; those that stay cost nothing. */
+  set(options: Readonly<Record<string, number>>): void {
+    for (const [name, value] of Object.entries(options)) {
+      if (this.#set.get(name) === value) continue;
+      this.model.options.set(name, value);
+      this.#set.set(name, value);
+    }
   }
 
   /** Makes the model inside stand for this problem. */

@@ -106,7 +106,7 @@ class HighsLiveModel implements LiveModel {
     this.#inside.hold(problem);
     const integers = hasIntegers(problem);
     const { timeLimit = 60, gap = 0, absoluteGap = 1e-6 } = options;
-    model.options.set({ time_limit: timeLimit, mip_rel_gap: gap, mip_abs_gap: absoluteGap });
+    this.#inside.set({ time_limit: timeLimit, mip_rel_gap: gap, mip_abs_gap: absoluteGap });
     model.zeroAllClocks();
     if (integers && options.start) model.setSolution({ colValue: options.start });
     return model.run(callbacksOf(this.#highs, options)).modelStatus;

@@ -83,7 +83,8 @@ function stageOptions(
   k: number,
   values: readonly number[],
 ): SolveOptions {
-  const timeLimit = Math.max(0.01, (deadline - Date.now()) / 1000);
+  // Rounded up, so that a solver that is asked every frame is not told anew each time.
+  const timeLimit = Math.max(0.01, Math.ceil((deadline - Date.now()) / 100) / 10);
   const { shouldStop } = options;
   const rest = k === 0 ? options : shouldStop ? { shouldStop } : {};
   return { ...rest, timeLimit, absoluteGap: WISH_GAP[key], ...(values.length > 0 ? { start: values } : {}) };
