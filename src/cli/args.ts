@@ -5,6 +5,24 @@ import type { UnitSystem } from '../units/units.ts';
 export type Command =
   | { readonly kind: 'balance'; readonly file: string; readonly json: boolean; readonly units: UnitSystem }
   | { readonly kind: 'check'; readonly files: readonly string[] }
+  | {
+      readonly kind: 'plan';
+      readonly file: string;
+      readonly robust: boolean;
+      readonly json: boolean;
+      readonly units: UnitSystem;
+      /** s */
+      readonly timeLimit: number;
+      /** Where the planned craft goes; null for nowhere. */
+      readonly write: string | null;
+    }
+  | {
+      readonly kind: 'carry';
+      readonly file: string;
+      readonly json: boolean;
+      readonly units: UnitSystem;
+      readonly line: string;
+    }
   | { readonly kind: 'help' }
   | { readonly kind: 'version' }
   | { readonly kind: 'misuse'; readonly why: string };
@@ -12,6 +30,10 @@ export type Command =
 const OPTIONS = {
   json: { type: 'boolean' },
   units: { type: 'string' },
+  robust: { type: 'boolean' },
+  write: { type: 'string' },
+  'time-limit': { type: 'string' },
+  line: { type: 'string' },
   help: { type: 'boolean', short: 'h' },
   version: { type: 'boolean' },
 } as const;
@@ -19,6 +41,16 @@ const OPTIONS = {
 type Values = ReturnType<typeof split>['values'];
 
 const split = (args: string[]) => parseArgs({ args, options: OPTIONS, allowPositionals: true });
+
+const WORDS = 'balance, check, plan, carry, help';
+
+/** The options that a command takes besides --help and --version. */
+const TAKEN: Readonly<Record<string, readonly string[]>> = {
+  balance: ['json', 'units'],
+  check: [],
+  plan: ['json', 'units', 'robust', 'write', 'time-limit'],
+  carry: ['json', 'units', 'line'],
+};
 
 const misuse = (why: string): Command => ({ kind: 'misuse', why });
 
@@ -35,32 +67,37 @@ export function commandOf(args: readonly string[]): Command {
 }
 
 function named(word: string | undefined, files: string[], values: Values): Command {
-  switch (word) {
-    case 'balance':
-      return balance(files, values);
-    case 'check':
-      return check(files, values);
-    case 'help':
-      return { kind: 'help' };
-    case undefined:
-      return misuse('No command given; allowed: balance, check, help');
-    default:
-      return misuse(`Unknown command ${JSON.stringify(word)}; allowed: balance, check, help`);
-  }
+  if (word === 'help') return { kind: 'help' };
+  if (word === undefined) return misuse(`No command given; allowed: ${WORDS}`);
+  const taken = Object.hasOwn(TAKEN, word) ? TAKEN[word]! : null;
+  if (!taken) return misuse(`Unknown command ${JSON.stringify(word)}; allowed: ${WORDS}`);
+  const foreign = Object.keys(values).find((option) => !taken.includes(option));
+  if (foreign) return misuse(`${word} takes no --${foreign}`);
+  if (word === 'check') return check(files);
+  return onOneFile(word as 'balance' | 'plan' | 'carry', files, values);
 }
 
-function balance(files: string[], { json = false, units = 'metric' }: Values): Command {
+function onOneFile(kind: 'balance' | 'plan' | 'carry', files: string[], values: Values): Command {
   const [file] = files;
   if (file === undefined || files.length > 1) {
-    return misuse(`balance takes one craft file; found ${files.length}`);
+    return misuse(`${kind} takes one craft file; found ${files.length}`);
   }
+  const { json = false, units = 'metric', robust = false, write = null, line = 'keel' } = values;
   if (units !== 'metric' && units !== 'imperial') {
     return misuse(`--units: found ${JSON.stringify(units)}; allowed: metric, imperial`);
   }
-  return { kind: 'balance', file, json, units };
+  if (kind === 'balance') return { kind, file, json, units };
+  if (kind === 'carry') return { kind, file, json, units, line };
+  const timeLimit = Number(values['time-limit'] ?? USUAL_SECONDS);
+  if (!(timeLimit > 0 && timeLimit <= MOST_SECONDS)) {
+    const found = JSON.stringify(values['time-limit']);
+    return misuse(`--time-limit: found ${found}; allowed: seconds above 0 and up to ${MOST_SECONDS}`);
+  }
+  return { kind, file, json, units, robust, write, timeLimit };
 }
 
-function check(files: string[], { json, units }: Values): Command {
-  if (json !== undefined || units !== undefined) return misuse('check takes no --json and no --units');
-  return files.length > 0 ? { kind: 'check', files } : misuse('check takes one craft file or more; found 0');
-}
+const check = (files: string[]): Command =>
+  files.length > 0 ? { kind: 'check', files } : misuse('check takes one craft file or more; found 0');
+
+const USUAL_SECONDS = 20;
+const MOST_SECONDS = 3600;

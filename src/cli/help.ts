@@ -5,13 +5,21 @@ export const HELP = `Steelyard: the balance of a small unmanned blimp.
       levels it. --json gives one object of rows in SI units instead.
   npm run -s craft -- check FILE...
       Whether each file is a craft file whose hull can be formed.
+  npm run -s craft -- plan FILE [--robust] [--json] [--write OUT]
+                      [--time-limit SECONDS] [--units metric|imperial]
+      The least dead ballast that keeps every target: what to hang, slide and
+      carry, what stands in the way of less, and the proof. --robust holds it
+      for every mass within its tolerance; --write keeps the planned craft.
+  npm run -s craft -- carry FILE [--line keel|axis|HARDPOINT] [--json]
+      The most useful load at each station of a line, the rest planned anew.
   npm run -s craft -- help
   npm run -s craft -- --version
 
 FILE is a craft file; "-" reads it from standard input. Without -s npm prints
 a banner of its own before the report.
 
-Exit codes: 0 fine; 1 the craft does not meet its targets; 2 bad input or use.
+Exit codes: 0 fine; 1 the craft does not meet its targets, or
+no plan can; 2 bad input or use.
 Errors go to standard error, one line a problem.
 
 It is an aid for planning. The aviation authority, the site and the makers of

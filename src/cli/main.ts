@@ -1,5 +1,6 @@
 /** The shell over `run`: real arguments, files, streams and exit code. */
-import { readFileSync } from 'node:fs';
+import { readFileSync, writeFileSync } from 'node:fs';
+import { loadHighs } from '../numeric/linearProgram/highsSolver.ts';
 import { run } from './run.ts';
 
 // Whoever reads the output may stop early, as `head` does; that is no fault of ours.
@@ -11,9 +12,11 @@ for (const stream of [process.stdout, process.stderr]) {
 
 const manifest = new URL('../../package.json', import.meta.url);
 
-process.exitCode = run(process.argv.slice(2), {
+process.exitCode = await run(process.argv.slice(2), {
   version: JSON.parse(readFileSync(manifest, 'utf8')).version,
   readText: (path) => new TextDecoder().decode(readFileSync(path === '-' ? 0 : path)),
+  writeText: (path, text) => writeFileSync(path, text),
+  solver: () => loadHighs(),
   write: (text) => process.stdout.write(text),
   error: (text) => process.stderr.write(text),
 });

@@ -5,15 +5,20 @@ import { check } from './check.ts';
 import { HELP } from './help.ts';
 import { EXIT, type ExitCode, type Io } from './io.ts';
 import { oneLine } from './layout.ts';
+import { carried, planned } from './planning.ts';
 
 /** Runs what the arguments ask for. Returns the exit code: 0 fine, 1 the craft misses its targets, 2 bad input or use. */
-export function run(args: readonly string[], io: Io): ExitCode {
+export function run(args: readonly string[], io: Io): ExitCode | Promise<ExitCode> {
   const command = commandOf(args);
   switch (command.kind) {
     case 'balance':
       return balance(command, io);
     case 'check':
       return check(command.files, io);
+    case 'plan':
+      return planned(command, io);
+    case 'carry':
+      return carried(command, io);
     case 'help':
       io.write(HELP);
       return EXIT.fine;

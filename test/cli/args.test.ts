@@ -45,14 +45,17 @@ test('--version gives the version alone', () => {
 });
 
 test.each([
-  [[], /No command given; allowed: balance, check, help/],
+  [[], /No command given; allowed: balance, check, plan, carry, help/],
   [['balance'], /balance takes one craft file; found 0/],
   [['balance', 'a', 'b'], /balance takes one craft file; found 2/],
   [['check'], /check takes one craft file or more; found 0/],
   [['check', 'a', '--json'], /check takes no --json/],
-  [['weigh', 'a'], /Unknown command "weigh"; allowed: balance, check, help/],
+  [['weigh', 'a'], /Unknown command "weigh"; allowed: balance, check, plan, carry, help/],
   [['balance', 'a', '--units', 'stone'], /--units: found "stone"; allowed: metric, imperial/],
   [['balance', 'a', '--units'], /--units/],
+  [['balance', 'a', '--robust'], /balance takes no --robust/],
+  [['plan', 'a', '--time-limit', '0'], /--time-limit: found "0"; allowed: seconds above 0/],
+  [['carry', 'a', 'b'], /carry takes one craft file; found 2/],
   [['balance', 'a', '--loud'], /--loud/],
   [['balance', 'a', '--json=yes'], /--json/],
   [['we\nigh'], /Unknown command/],
