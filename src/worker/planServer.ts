@@ -32,12 +32,13 @@ export class PlanServer {
     }
   }
 
-  /** Between two requests the thread listens, so that what came meanwhile can still be withdrawn. */
+  /** Before each request the thread listens, so that what came meanwhile can still be withdrawn. */
   async #run(): Promise<void> {
     this.#running = true;
-    for (let next = this.#queue.shift(); next; next = this.#queue.shift()) {
+    for (await nextTurn(); ; await nextTurn()) {
+      const next = this.#queue.shift();
+      if (!next) break;
       await this.#answer(next);
-      await new Promise((resolve) => setTimeout(resolve));
     }
     this.#running = false;
   }
@@ -79,3 +80,14 @@ function seldom(tell: (share: number) => void): (share: number) => void {
     tell(share);
   };
 }
+
+/** Once what has come in is heard; a timer would wait a millisecond for it, which a frame has not got. */
+const nextTurn = (): Promise<void> =>
+  new Promise((resolve) => {
+    const { port1, port2 } = new MessageChannel();
+    port1.onmessage = () => {
+      port1.close();
+      resolve();
+    };
+    port2.postMessage(null);
+  });

@@ -19,7 +19,7 @@ export interface Stage {
 }
 
 /**
- * plan: all of it. ballast: least dead ballast alone. follow: that, and the least distance moved. trial: the most of the
+ * plan: all of it. ballast: least dead ballast alone. follow: that and the least distance moved, in one. trial: the most of the
  * load that is tried, then least dead ballast.
  */
 export type Aim = 'plan' | 'ballast' | 'follow' | 'trial';
@@ -31,11 +31,22 @@ export function stagesFor(aim: Aim, setting: Setting, linear: Linear, program: P
     case 'ballast':
       return [leastBallast(setting, program)];
     case 'follow':
-      return [leastBallast(setting, program), leastDistance(program)];
+      return [follow(setting, program)];
     case 'trial':
       return [mostTrial(program), leastBallast(setting, program)];
   }
 }
+
+/** Ballast that a metre of movement weighs as much as, g: too little to be weighed, enough to break a tie. */
+const METRE = 1e-4;
+
+const follow = (setting: Setting, program: Program): Stage => ({
+  key: 'ballast',
+  terms: [
+    ...leastBallast(setting, program).terms,
+    ...leastDistance(program).terms.map(([column, a]): Term => [column, a * METRE]),
+  ],
+});
 
 const mostTrial = ({ columns }: Program): Stage => ({
   key: 'trial',
