@@ -1,5 +1,4 @@
 /** How long plans take: a frame of a drag, pieces and places, the carry curve. Prints figures; judges nothing. */
-import { fileURLToPath } from 'node:url';
 import { Worker } from 'node:worker_threads';
 import { build } from 'esbuild';
 import { blankCraft } from '../../src/craft/blank.ts';
@@ -142,7 +141,8 @@ function benchLive(solver: LinearSolver, print: Print): void {
 /** Threads of Node read JavaScript only. */
 async function threadCode(): Promise<string> {
   const { outputFiles } = await build({
-    entryPoints: [fileURLToPath(new URL('./planThread.ts', import.meta.url))],
+    // From the folder of the project, in which npm runs this: the bench itself is bundled elsewhere.
+    entryPoints: ['test/bench/planThread.ts'],
     bundle: true,
     write: false,
     platform: 'node',
