@@ -102,8 +102,14 @@ const ROUNDING = 1e-12;
 function lookups(panels: readonly Panel[], table: SkinTable) {
   const { length } = table;
   const slack = ROUNDING * length;
-  const radius = (station: number): number =>
+  const radiusAt = (station: number): number =>
     station >= -slack && station <= length + slack ? table.radiusOf(table.spotAtStation(station)) : 0;
+  // Walking round a section asks for one station many times.
+  let last = { station: Number.NaN, radius: 0 };
+  const radius = (station: number): number => {
+    if (station !== last.station) last = { station, radius: radiusAt(station) };
+    return last.radius;
+  };
   return {
     length,
     radius,
