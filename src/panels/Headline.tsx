@@ -5,10 +5,11 @@ import { headlineAdvice } from './advice.ts';
 import { useEditor } from './editor.ts';
 
 export function Headline() {
-  const { assessment, craft } = useEditor();
+  const { assessment, craft, dragging } = useEditor();
   const { headline, met } = assessment;
   const text = useRef<HTMLParagraphElement>(null);
-  const cut = useCut(text, headline);
+  // Not at every move of a drag: to look is to have the page laid out at once.
+  const cut = useCut(text, dragging ? null : headline);
   const [open, setOpen] = useState(false);
   const id = useId();
   return (
@@ -41,10 +42,10 @@ export function Headline() {
 }
 
 /** Whether the text does not fit into its frame. */
-function useCut(text: RefObject<HTMLElement | null>, content: string): boolean {
+function useCut(text: RefObject<HTMLElement | null>, content: string | null): boolean {
   const [cut, setCut] = useState(false);
-  // biome-ignore lint/correctness/useExhaustiveDependencies: another sentence needs another look
   useLayoutEffect(() => {
+    if (content === null) return;
     const element = text.current!;
     const look = () => setCut(element.scrollHeight > element.clientHeight + 1);
     look();
