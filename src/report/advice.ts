@@ -34,7 +34,9 @@ export function adviceOf(state: CraftState, rows: Rows): Advice[] {
 function leadAdvice({ craft }: CraftState, rows: Rows): Advice[] {
   const { value, status } = rows['lead.mass']!;
   if (!value || status !== 'solved') return [];
-  const { id, name, place } = leadHardpoint(craft);
+  const { id, name, place, fill } = leadHardpoint(craft);
+  // Lead in pieces is for the plan to choose.
+  if (fill === 'pieces') return [];
   return [{ kind: 'lead', hardpoint: id, name, mass: value, place }];
 }
 

@@ -57,7 +57,7 @@ const afterRow = (
 
 /** What is wrong with the craft that has its lead, or null. */
 function leadCaution(
-  { air, gasDensity }: CraftState,
+  { air, craft, gasDensity }: CraftState,
   lead: Outcome<number>,
   after: Outcome<Loading>,
 ): string | null {
@@ -65,6 +65,10 @@ function leadCaution(
   const depth = pendulumDepthOf(after.value);
   if (depth !== null && depth <= 0) {
     return `With it the CG still stands ${say(-depth, 'smallLength')} above the CB, so the craft turns over. Hang the heavy parts lower.`;
+  }
+  const { limit, name } = leadHardpoint(craft);
+  if (lead.value > limit) {
+    return `The ${name.toLowerCase() || 'hardpoint'} holds no more than ${say(limit, 'mass')}: see what a plan can do.`;
   }
   const excess = heavinessOf(after.value);
   if (excess <= 0) return null;

@@ -1,16 +1,18 @@
 /** A plan for reading: one sentence on top, what to do, how the craft then floats, what binds, what would help. */
 import type { Craft } from '../craft/craft.ts';
 import type { Relaxation } from '../craft/relaxation.ts';
+import { valueOrNull } from '../numeric/outcome.ts';
 import type { Binding } from '../physics/ballast/binding.ts';
 import type { Plan, PlanFound, PlanNotFound } from '../physics/ballast/plan.ts';
 import type { Remedy } from '../physics/ballast/relaxations.ts';
+import { uncertainOf } from '../physics/ballast/robust.ts';
 import { craftStateOf } from '../physics/craftState.ts';
 import { inUnits, say } from '../units/sentence.ts';
 import type { UnitSystem } from '../units/units.ts';
 import { assess } from './assess.ts';
 import { HAZARDS } from './hazards.ts';
 import { limitName, limitStands, relaxationWords, stepSaves } from './limitWords.ts';
-import { loadWords, planHeadline, planProof, slideWords, toldSlides, weightWords } from './planWords.ts';
+import { joined, planHeadline, planProof, planSteps } from './planWords.ts';
 import type { Rows } from './rows.ts';
 
 export interface PlanReport {
@@ -60,11 +62,7 @@ function foundReport(craft: Craft, plan: PlanFound, units: UnitSystem): PlanRepo
   return {
     headline: planHeadline(craft, plan, leadToday),
     proof: planProof(craft, plan),
-    steps: [
-      ...toldSlides(plan).map((slide) => sentence(slideWords(craft, slide))),
-      ...plan.loads.flatMap((load) => sentence(loadWords(craft, load) ?? '') || []),
-      ...plan.weights.map((weight) => sentence(`hang ${weightWords(craft, weight)}`)),
-    ],
+    steps: planSteps(craft, plan).map(sentence),
     binding: plan.binding.map((each) => ({
       ...each,
       name: limitName(each.limit),
@@ -82,7 +80,7 @@ function notFoundReport(craft: Craft, plan: PlanNotFound): PlanReport {
   const remedies = plan.remedies.map((remedy) => remedyWords(craft, remedy));
   return {
     headline: plan.status === 'infeasible' ? noPlanWords(plan) : plan.why,
-    proof: plan.status === 'infeasible' ? remedyHeadline(plan) : '',
+    proof: plan.status === 'infeasible' ? [remedyHeadline(plan), ...robustWords(craft, plan)].join(' ') : '',
     steps: [],
     binding: [],
     remedies,
@@ -95,6 +93,25 @@ const noPlanWords = ({ why, robust }: PlanNotFound): string =>
   why.startsWith('No solution')
     ? `No ballast, slide or place of a load keeps every target at once${robust ? ' for every mass within its tolerance' : ''}.`
     : why;
+
+/** When the masses together may be off by more than the band of heaviness is wide, no plan can hold for all of them. */
+function robustWords(craft: Craft, { robust }: PlanNotFound): string[] {
+  const state = robust ? valueOrNull(craftStateOf(craft)) : null;
+  if (!state) return [];
+  const { least, most } = craft.targets.heaviness;
+  const shares = uncertainOf(state)
+    .map(({ part, tolerance, perKilogram: [pieces] }) => ({
+      name: part === null ? 'the film' : craft.parts.byId[part]!.name || part,
+      mass: tolerance * pieces,
+    }))
+    .sort((a, b) => b.mass - a.mass);
+  const all = shares.reduce((sum, { mass }) => sum + mass, 0);
+  if (2 * all <= most - least) return [];
+  const first = joined(shares.slice(0, 3).map(({ name, mass }) => `${name} (±${say(mass, 'mass')})`));
+  return [
+    `All masses together may be off by ±${say(all, 'mass')}, and the band of heaviness is only ${say(most - least, 'mass')} wide: widen it to ${say(2 * all, 'mass')} or more, or weigh what is least known first: ${first}.`,
+  ];
+}
 
 function remedyHeadline({ remedies, remediesComplete }: PlanNotFound): string {
   if (remedies.length === 0 && !remediesComplete)

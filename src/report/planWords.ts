@@ -2,7 +2,9 @@
 import type { Craft } from '../craft/craft.ts';
 import type { Place } from '../craft/placeSchema.ts';
 import { stationOf } from '../craft/station.ts';
+import { hungBallast } from '../craft/stowage.ts';
 import type { PlanFound, PlannedLoad, PlannedSlide, PlannedWeight } from '../physics/ballast/plan.ts';
+import { ballastMass } from '../physics/ballast/setting.ts';
 import { say } from '../units/sentence.ts';
 import { limitStands, loadName, partName, spotName, stepSaves } from './limitWords.ts';
 
@@ -45,8 +47,36 @@ export function weightWords(craft: Craft, { hardpoint, mass, pieces }: PlannedWe
   return `${joined(counted)} ${at}`;
 }
 
+/** Differences of lead smaller than this are none, kg. */
+const LEAST_LEAD = 5e-5;
+
+/** What to do at each hardpoint: hang, change or take off; nothing where the lead is right already. */
+export function leadSteps(craft: Craft, { weights }: PlanFound): string[] {
+  const hung = hungBallast(craft);
+  return craft.hardpoints.order.flatMap((hardpoint) => {
+    const today = ballastMass(hung.get(hardpoint) ?? []);
+    const planned = weights.find((each) => each.hardpoint === hardpoint);
+    if (Math.abs((planned?.mass ?? 0) - today) < LEAST_LEAD) return [];
+    if (!planned) return [`take the ${say(today, 'mass')} of lead off the ${spotName(craft, hardpoint)}`];
+    const instead = today > 0 ? ` instead of the ${say(today, 'mass')} there` : '';
+    return [`hang ${weightWords(craft, planned)}${instead}`];
+  });
+}
+
+/** Everything there is to do, one thing each; empty when the craft is as planned already. */
+export const planSteps = (craft: Craft, plan: PlanFound): string[] => [
+  ...toldSlides(plan).map((slide) => slideWords(craft, slide)),
+  ...plan.loads.flatMap((load) => loadWords(craft, load) ?? []),
+  ...leadSteps(craft, plan),
+];
+
 /** The plan as one or two sentences. `leadToday`: what levels the craft as it is, at the chosen hardpoint, where that can be done, kg. */
 export function planHeadline(craft: Craft, plan: PlanFound, leadToday: number | null): string {
+  const sameLead = Math.abs(plan.deadBallastToday - plan.deadBallast) < LEAST_LEAD;
+  if (sameLead && planSteps(craft, plan).length === 0) {
+    const lead = plan.deadBallast > 0 ? `${say(plan.deadBallast, 'mass')} of lead` : 'no lead';
+    return `The craft is as planned already, with ${lead}: nothing to do.`;
+  }
   const moves = [
     ...toldSlides(plan).map((slide) => slideWords(craft, slide)),
     ...plan.loads.flatMap((load) => loadWords(craft, load) ?? []),

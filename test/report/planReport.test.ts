@@ -1,10 +1,12 @@
 import fc from 'fast-check';
 import { expect, test } from 'vitest';
+import { keyed, listed } from '../../src/craft/craft.ts';
 import { loadHighs } from '../../src/numeric/linearProgram/highsSolver.ts';
 import { type PlanFound, planOf } from '../../src/physics/ballast/plan.ts';
 import { planJson } from '../../src/report/planJson.ts';
 import { planReport } from '../../src/report/planReport.ts';
 import { planHeadline, weightWords } from '../../src/report/planWords.ts';
+import { partOf } from '../edit/craftFixture.ts';
 import { randomCraft } from '../physics/ballast/randomCraft.ts';
 import { notFinite } from '../samples/finite.ts';
 import { sampleCraft } from '../samples/readSamples.ts';
@@ -106,7 +108,7 @@ const nothing: PlanFound = {
 };
 
 test.each<[string, Partial<PlanFound>, string]>([
-  ['nothing to do', {}, 'No lead is needed.'],
+  ['nothing to do', {}, 'The craft is as planned already, with no lead: nothing to do.'],
   [
     'lead to take out',
     { deadBallastToday: 0.07 },
@@ -120,7 +122,7 @@ test.each<[string, Partial<PlanFound>, string]>([
   [
     'a move too small to tell',
     { slides: [{ part: 'battery', from: 2.12, to: 2.1201 }] },
-    'No lead is needed.',
+    'The craft is as planned already, with no lead: nothing to do.',
   ],
   [
     'lead that stays',
@@ -153,4 +155,34 @@ test('pieces are counted in words', () => {
   expect(weightWords(craft, { hardpoint: 'nose', mass: 0.011, pieces })).toBe(
     'two {0.005 mass} pieces and one {0.001 mass} piece at the nose',
   );
+});
+
+test('a plan carried out has nothing left to do', () => {
+  const craft = sampleCraft('museum-atrium');
+  const plan = planOf(craft, solver);
+  if ('why' in plan) throw new Error(plan.why);
+  const again = planOf(plan.craft, solver);
+  const { headline, steps } = planReport(plan.craft, again);
+  expect(steps).toEqual([]);
+  expect(headline).toMatch(/^The craft is as planned already, with 11\.\d g of lead: nothing to do\.$/);
+});
+
+test('lead that hangs there already is told of: changed or taken off, never hung twice', () => {
+  const craft = sampleCraft('museum-atrium');
+  const { place } = craft.hardpoints.byId.nose!;
+  const lead = partOf('lump', { kind: 'ballast', mass: 0.061, massTolerance: 0, place });
+  const leaded = { ...craft, parts: keyed([...listed(craft.parts), lead]) };
+  const { steps } = planReport(leaded, planOf(leaded, solver));
+  expect(steps.at(-1)).toMatch(
+    /^Hang \d+\.\d g at the nose instead of the 61\.0 g there\.$|^Take the 61\.0 g of lead off the nose\.$/,
+  );
+});
+
+test('a robust plan that the spread of masses forbids says how wide the spread is, and what to weigh', () => {
+  const craft = sampleCraft('museum-atrium');
+  const { proof } = planReport(craft, planOf(craft, solver, { robust: true }));
+  expect(proof).toMatch(
+    /All masses together may be off by ±\d+\.\d g, and the band of heaviness is only 50\.0 g wide/,
+  );
+  expect(proof).toContain('the film (±');
 });

@@ -53,6 +53,15 @@ test('advice can be carried out: the lead levels, the load fills the lift and le
   expect(assess(loaded).met).toBe(true);
 });
 
+test('lead that its hardpoint cannot hold is not offered, and the sentence says so', () => {
+  const { nose } = workedExample().hardpoints.byId;
+  const weak = { ...workedExample(), hardpoints: keyed([{ ...nose!, limit: 0.05 }]) };
+  expect(assess(weak).advice.map(({ kind }) => kind)).not.toContain('lead');
+  expect(assess(weak).headline).toContain('The nose holds no more than 50.0 g');
+  const pieces = { ...workedExample(), hardpoints: keyed([{ ...nose!, fill: 'pieces' as const }]) };
+  expect(assess(pieces).advice.map(({ kind }) => kind)).not.toContain('lead');
+});
+
 test('a craft that needs nothing gets no lead and no slide offered', () => {
   expect(assess(trimmed()).advice.map(({ kind }) => kind)).toEqual(['load']);
 });

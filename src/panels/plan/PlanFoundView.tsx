@@ -17,7 +17,7 @@ export function PlanFoundView({ plan, report, fresh }: PlanFoundViewProps) {
   const { apply, dragging } = useEditor();
   const { kept, keep } = usePlanning();
   // Not `disabled`, which would lose the focus each time that the plan is worked out anew.
-  const ready = fresh && !dragging;
+  const ready = fresh && !dragging && report.steps.length > 0;
   return (
     <>
       <p className="plan-headline">{report.headline}</p>
