@@ -30,10 +30,10 @@ function bar(
   return { kind, id, name, mass, station, moment: moment[0] - mass * state.hull.cbStation };
 }
 
-/** The lead that levels exactly, as a bar of its own. */
+/** The lead that levels exactly, as a bar of its own; none where the craft is level within its tolerance. */
 export function leadBar(state: CraftState, rows: Rows): BeamBar | null {
   const mass = rows['lead.mass']!.value;
-  if (!mass) return null;
+  if (!mass || rows['lead.massWithinTolerance']!.value === 0) return null;
   const station = leadPosition(state)[0];
   const { id, name } = leadHardpoint(state.craft);
   return { kind: 'lead', id, name, mass, station, moment: mass * (station - state.hull.cbStation) };

@@ -140,8 +140,8 @@ const liftWords = (heavinessAfter: number | null): string => {
 function lead({ craft }: CraftState, rows: Rows): PlainVerdict {
   const exact = rows['lead.mass']!;
   const within = rows['lead.massWithinTolerance']!;
-  const after = rows['lead.heavinessAfter']!;
   const none = within.value === 0;
+  const after = rows[none ? 'heaviness' : 'lead.heavinessAfter']!.value;
   const impossible = exact.status !== 'solved' && !none;
   return {
     key: 'lead',
@@ -149,10 +149,10 @@ function lead({ craft }: CraftState, rows: Rows): PlainVerdict {
     title: `Lead on the ${leadHardpoint(craft).name.toLowerCase() || 'hardpoint'}`,
     state: none ? 'met' : impossible ? 'missed' : 'open',
     word: none ? 'none needed' : impossible ? 'does not do it' : 'levels it',
-    row: exact,
+    row: none ? within : exact,
     target: 'within the lift left',
-    margin: after.value === null ? null : -after.value,
-    marginWords: liftWords(after.value),
+    margin: after === null ? null : -after,
+    marginWords: liftWords(after),
     working: {
       formula:
         'lead = moment to cancel ÷ arm = solid mass × (CG station − CB station) ÷ (CB station − lead station)',
