@@ -23,6 +23,17 @@ export function placed(before: Place, next: Place): Place {
   return JSON.stringify(kept) === JSON.stringify(before) ? before : kept;
 }
 
+const FIRST_SHARE = 0.1;
+
+/** A first slide for a part: a tenth of the hull either way, not beyond its ends. */
+export function slideAbout(station: number, hullLength: number): Slide {
+  const reach = FIRST_SHARE * hullLength;
+  return {
+    from: coordinate(Math.min(station, Math.max(0, station - reach))),
+    to: coordinate(Math.max(station, Math.min(hullLength, station + reach))),
+  };
+}
+
 /** A slide brought within limits, its ends in order; `before` itself when they are equal. */
 export function stretched(before: Slide | null, { from, to }: Slide): Slide {
   const [fore, aft] = [coordinate(Math.min(from, to)), coordinate(Math.max(from, to))];

@@ -14,6 +14,7 @@ import {
 } from '../../src/edit/edits/loads.ts';
 import { addPart, setSlide } from '../../src/edit/edits/parts.ts';
 import { applyPlan } from '../../src/edit/edits/plan.ts';
+import { slideAbout } from '../../src/edit/place.ts';
 import { Session } from '../../src/edit/session.ts';
 import { partOf } from './craftFixture.ts';
 import { loadOf, planningCraft } from './planningFixture.ts';
@@ -175,4 +176,11 @@ test('what a plan names that is gone meanwhile is passed over', () => {
     }),
   );
   expect(result).toBe(craft);
+});
+
+test('a first slide reaches a tenth of the hull either way, and not beyond its ends', () => {
+  expect(slideAbout(1.5, 3)).toEqual({ from: 1.2, to: 1.8 });
+  expect(slideAbout(0.1, 3)).toEqual({ from: 0, to: 0.4 });
+  expect(slideAbout(2.95, 3)).toEqual({ from: 2.65, to: 3 });
+  expect(slideAbout(3.2, 3)).toEqual({ from: 2.9, to: 3.2 });
 });

@@ -1,23 +1,24 @@
 /** The stretch along which the plan may move a part. */
 import type { Part } from '../../craft/schema.ts';
 import { setSlide } from '../../edit/edits/parts.ts';
-import { stationOf } from '../../edit/place.ts';
+import { slideAbout, stationOf } from '../../edit/place.ts';
 import { useCommit } from '../commit.ts';
 import { useEditor } from '../editor.ts';
 import { CheckField } from '../fields/CheckField.tsx';
 import { SlideEnds } from './SlideEnds.tsx';
 
 export function PartSlideFields({ part }: { part: Part }) {
-  const { apply } = useEditor();
+  const { apply, assessment } = useEditor();
   const commit = useCommit();
   const { slide, locked } = part;
-  const here = stationOf(part.place);
+  const length = assessment.rows['hull.length']?.value ?? 0;
+  const first = slideAbout(stationOf(part.place), length);
   return (
     <>
       <CheckField
         label="The plan may slide it"
         value={slide !== null}
-        onCommit={(may) => apply(setSlide(part, may ? { from: here, to: here } : null))}
+        onCommit={(may) => apply(setSlide(part, may ? first : null))}
       />
       {slide && (
         <SlideEnds prefix="Slide" slide={slide} onSlide={(next, run) => commit(setSlide(part, next), run)} />

@@ -54,12 +54,13 @@ const counted = (count: number): string => (count === 0 ? 'none' : String(count)
 
 function Answer({ answer: { plan, craft } }: { answer: PlanAnswer }) {
   const { craft: now, units } = useEditor();
+  const { waiting } = usePlanning();
   const report = useMemo(() => planReport(craft, plan, units), [craft, plan, units]);
   if ('why' in plan) return <PlanNotFoundView plan={plan} report={report} />;
   return (
-    <>
+    <div className={waiting ? 'plan-old' : undefined}>
       <PlanFoundView plan={plan} report={report} fresh={craft === now} />
       <Compared today={craft} then={plan.craft} title="Today and with the plan" />
-    </>
+    </div>
   );
 }

@@ -44,7 +44,7 @@ function StatusWords() {
     );
   }
   const words = waiting
-    ? 'There is something to choose: the plan follows on release.'
+    ? 'Below is the plan from before this drag; with something to choose, the new one comes on release.'
     : answer?.craft === craft
       ? 'Up to date.'
       : '';
