@@ -58,7 +58,7 @@ function Answer({ answer: { plan, craft } }: { answer: PlanAnswer }) {
   const report = useMemo(() => planReport(craft, plan, units), [craft, plan, units]);
   if ('why' in plan) return <PlanNotFoundView plan={plan} report={report} />;
   return (
-    <div className={waiting ? 'plan-old' : undefined}>
+    <div className={waiting ? 'plan-answer plan-old' : 'plan-answer'}>
       <PlanFoundView plan={plan} report={report} fresh={craft === now} />
       <Compared today={craft} then={plan.craft} title="Today and with the plan" />
     </div>
