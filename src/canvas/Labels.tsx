@@ -13,16 +13,20 @@ import { fontOf, textWidth, traceOnScreen, writeOn } from './paint.ts';
 
 const SIZE = 12;
 
-/** What is to be named, what is selected first: everything while it is few, else only that and the part under the pointer. */
+/**
+ * What is to be named, what is selected first: everything while it is few, else only that and the part under the
+ * pointer; only these too when `sparing`, where other words need the room.
+ */
 export function wantedLabels(
   craft: Craft,
   figures: readonly Figure[],
   view: View,
   selected: readonly string[],
   hovered: string | null,
+  sparing: boolean,
 ): Wanted[] {
   const first = new Set(selected);
-  const few = craft.parts.order.length <= MOST_LABELS;
+  const few = !sparing && craft.parts.order.length <= MOST_LABELS;
   const named = figures.filter(
     ({ part, copy }) => copy === 0 && (few || first.has(part) || part === hovered),
   );

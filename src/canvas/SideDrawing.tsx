@@ -26,11 +26,13 @@ export interface SideDrawingProps {
   readonly overlay: Overlay;
   /** Drawn faint, for it is not the craft as it stands. */
   readonly faded: boolean;
+  /** Few names of parts, for the words of a plan need the room. */
+  readonly sparing: boolean;
   /** A layer between what stands still and what moves. */
   children(labels: ReturnType<typeof useLabels>): ReactNode;
 }
 
-export function SideDrawing({ scene, selection, overlay, faded, children }: SideDrawingProps) {
+export function SideDrawing({ scene, selection, overlay, faded, sparing, children }: SideDrawingProps) {
   const { view, palette, units, geometry, craft, still } = scene;
   const px = 1 / view.scale;
   const world = worldTransform(view);
@@ -51,7 +53,7 @@ export function SideDrawing({ scene, selection, overlay, faded, children }: Side
   );
   const hoveredPart = hover?.kind === 'part' ? hover.id : null;
   const labels = useLabels({
-    wanted: wantedLabels(craft, scene.still, view, idsOf(selection, 'part'), hoveredPart),
+    wanted: wantedLabels(craft, scene.still, view, idsOf(selection, 'part'), hoveredPart, sparing),
     ground: () => ({
       taken: [...takenBy(marks, points, handles), ...textsTaken(rulers), footNameTaken(view)],
       boxes: scene.still.map((figure) => ({ id: figure.part, box: screenBox(figure, view) })),

@@ -107,6 +107,7 @@ function SideFrame(props: SharedProps & DrawnProps & { stale: string | null }) {
         selection={selection}
         overlay={overlay}
         faded={stale !== null}
+        sparing={planned !== null}
       >
         {(labels) => <PlanLayer {...{ scene, selection, rails, planned, labels }} hover={overlay.hover} />}
       </SideDrawing>
