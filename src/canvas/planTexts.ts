@@ -1,13 +1,13 @@
 /** Which words stand beside the marks of the plan and the rails, and what they keep clear of. Pixels. */
 import type { Area } from '../scene/clearTexts.ts';
-import type { Figure } from '../scene/figure.ts';
 import { fromSide } from '../scene/flatten.ts';
 import { type BalanceMarks, sideMarks } from '../scene/marks.ts';
 import type { GhostMark, WeightMark } from '../scene/planMarks.ts';
 import type { Planned } from '../scene/planned.ts';
 import { stationWords } from '../scene/planWords.ts';
 import type { Knob, Rail } from '../scene/rails.ts';
-import { type PlanePoint, type ScreenPoint, toScreen, type View } from '../scene/view.ts';
+import { around, screenBox } from '../scene/rect.ts';
+import { type PlanePoint, type ScreenPoint, toScreen } from '../scene/view.ts';
 import { fontOf, textWidth } from './paint.ts';
 import { KNOB_LABEL, KNOB_PX } from './RailMarks.tsx';
 import type { MarkText } from './TextMarks.tsx';
@@ -20,24 +20,6 @@ export interface PlanShown {
   readonly bob: BalanceMarks | null;
 }
 
-const about = ({ x, y }: ScreenPoint, reach: number): Area => ({
-  left: x - reach,
-  right: x + reach,
-  top: y - reach,
-  bottom: y + reach,
-});
-
-export function boxOnScreen({ box: { left, right, bottom, top } }: Pick<Figure, 'box'>, view: View): Area {
-  const corners = [
-    { u: left, z: bottom },
-    { u: right, z: bottom },
-    { u: right, z: top },
-    { u: left, z: top },
-  ].map((corner) => toScreen(view, corner));
-  const [xs, ys] = [corners.map(({ x }) => x), corners.map(({ y }) => y)];
-  return { left: Math.min(...xs), right: Math.max(...xs), top: Math.min(...ys), bottom: Math.max(...ys) };
-}
-
 export function planTexts(
   { view, palette }: SideScene,
   plan: PlanShown | null,
@@ -46,7 +28,7 @@ export function planTexts(
   const paper = { halo: palette.paper };
   const ghosts = plan?.ghosts.flatMap(({ figure, label }) =>
     label
-      ? [{ key: `ghost ${figure.part}`, lines: [label], ink: palette.open, box: boxOnScreen(figure, view) }]
+      ? [{ key: `ghost ${figure.part}`, lines: [label], ink: palette.open, box: screenBox(figure, view) }]
       : [],
   );
   const weights = plan?.weights.map((mark, i) => ({
@@ -59,10 +41,10 @@ export function planTexts(
     key: `ashore ${load}`,
     lines: ['ashore'],
     ink: palette.open,
-    box: about(toScreen(view, fromSide(at)), 11),
+    box: around(toScreen(view, fromSide(at)), 11),
   }));
   const bob = plan?.bob?.bob
-    ? [{ key: 'bob', lines: ['CG, plan'], ink: palette.bob, box: about(plan.bob.bob, 11) }]
+    ? [{ key: 'bob', lines: ['CG, plan'], ink: palette.bob, box: around(plan.bob.bob, 11) }]
     : [];
   const told = new Set(plan?.ghosts.filter(({ arrow }) => !arrow).map(({ figure }) => figure.part));
   const names = rails
@@ -71,7 +53,7 @@ export function planTexts(
       key: `rail ${i}`,
       lines: [rail.name],
       ink: palette.good,
-      box: about(toScreen(view, middleOf(rail.line)), 1),
+      box: around(toScreen(view, middleOf(rail.line)), 1),
     }));
   return [...bob, ...(weights ?? []), ...(ghosts ?? []), ...(ashore ?? []), ...names].map((text) => ({
     ...text,
@@ -106,7 +88,7 @@ function angleArea({ ring, lean, line }: BalanceMarks): Area {
 /** The line from ring to bob. */
 const alongLine = (from: ScreenPoint, to: ScreenPoint): Area[] =>
   Array.from({ length: 12 }, (_, i) =>
-    about({ x: from.x + ((to.x - from.x) * i) / 12, y: from.y + ((to.y - from.y) * i) / 12 }, 5),
+    around({ x: from.x + ((to.x - from.x) * i) / 12, y: from.y + ((to.y - from.y) * i) / 12 }, 5),
   );
 
 /** So many parts are kept clear of. */
@@ -129,15 +111,15 @@ export function planTaken(
       top: y - 7,
       bottom: y + 7,
     })),
-    { ...about(ring, 12), left: ring.x - 38, top: ring.y - 20 },
-    ...(bob ? [{ ...about(bob, 16), left: bob.x - 36, right: bob.x + 36 }] : []),
+    { ...around(ring, 12), left: ring.x - 38, top: ring.y - 20 },
+    ...(bob ? [{ ...around(bob, 16), left: bob.x - 36, right: bob.x + 36 }] : []),
     ...(bob ? [...alongLine(ring, bob), angleArea(marks)] : []),
     ...(foot ? [{ left: foot.x - 9, right: foot.x + 64, top: foot.y, bottom: foot.y + 18 }] : []),
-    ...(plan?.bob?.bob ? [about(plan.bob.bob, 12), ...alongLine(ring, plan.bob.bob)] : []),
-    ...hardpoints.map(({ at }) => about(toScreen(view, at), 11)),
-    ...figures.slice(0, MOST).map((figure) => boxOnScreen(figure, view)),
+    ...(plan?.bob?.bob ? [around(plan.bob.bob, 12), ...alongLine(ring, plan.bob.bob)] : []),
+    ...hardpoints.map(({ at }) => around(toScreen(view, at), 11)),
+    ...figures.slice(0, MOST).map((figure) => screenBox(figure, view)),
     ...(plan?.weights.map(weightBox) ?? []),
-    ...(plan?.ghosts.map(({ figure }) => boxOnScreen(figure, view)) ?? []),
+    ...(plan?.ghosts.map(({ figure }) => screenBox(figure, view)) ?? []),
     ...knobs.map((knob) => {
       const { x, y } = toScreen(view, knob.at);
       const width = textWidth(stationWords(knob.rail.slide[knob.end], units), KNOB_LABEL) + KNOB_PX + 6;

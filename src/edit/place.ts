@@ -13,8 +13,6 @@ const coordinate = (value: number): number => tidy(clamp(value, -LIMITS.length, 
 /** A clock angle brought to 0 … 2π. */
 export const turned = (clock: number): number => tidy(clock - TURN * Math.floor(clock / TURN));
 
-export { stationOf, withStation };
-
 export const shifted = (place: Place, by: number): Place => withStation(place, stationOf(place) + by);
 
 /** `next` brought within limits; `before` itself when they are equal, so that no history entry is made. */

@@ -1,5 +1,5 @@
 /** A button that carries out one piece of advice; none where there is no such advice. */
-import { stationOf } from '../edit/place.ts';
+import { stationOf } from '../craft/station.ts';
 import type { Advice } from '../report/advice.ts';
 import { formatQuantity } from '../units/format.ts';
 import type { UnitSystem } from '../units/units.ts';

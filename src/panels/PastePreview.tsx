@@ -1,6 +1,7 @@
 /** What a table of parts would add, as the ledger would show it, and in which units its bare numbers were taken. */
+
+import { stationOf } from '../craft/station.ts';
 import type { PartFields } from '../edit/edits/parts.ts';
-import { stationOf } from '../edit/place.ts';
 import { formatQuantity } from '../units/format.ts';
 import { copiesText } from './csv/copiesText.ts';
 import { type StationDoubt, stationDoubt } from './csv/doubt.ts';

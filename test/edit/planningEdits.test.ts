@@ -10,7 +10,6 @@ import {
   removeLoads,
   setLoad,
   setLoadOption,
-  sortLoads,
 } from '../../src/edit/edits/loads.ts';
 import { addPart, setSlide } from '../../src/edit/edits/parts.ts';
 import { applyPlan } from '../../src/edit/edits/plan.ts';
@@ -76,7 +75,6 @@ test('loads come under an id that no part has, change, change order and go', () 
   expect(testEdit(more, setLoad(craft.loads.byId.horn!, 'mass', { mass: 0.02 })).loads.byId.horn!.mass).toBe(
     0.02,
   );
-  expect(testEdit(more, sortLoads(['battery-2', 'logger', 'horn'])).loads.order[0]).toBe('battery-2');
   expect(testEdit(more, removeLoads(['logger', 'horn'], '2 loads')).loads.order).toEqual(['battery-2']);
 });
 

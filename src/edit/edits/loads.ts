@@ -35,12 +35,6 @@ export const setLoad = (
     Object.assign(craft.loads.byId[id]!, change);
   });
 
-/** Puts the list in another order. */
-export const sortLoads = (order: readonly string[]): Edit =>
-  step('Sort loads', (craft) => {
-    craft.loads.order = [...order];
-  });
-
 export const addLoadOption = (load: LoadCalled, option: LoadOption): Edit =>
   step(`Add a place for ${called(load)}`, (craft) => {
     craft.loads.byId[load.id]!.options.push(option);

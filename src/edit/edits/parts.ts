@@ -5,10 +5,11 @@ import type { Place } from '../../craft/placeSchema.ts';
 import type { Slide } from '../../craft/planningSchema.ts';
 import { LIMITS } from '../../craft/quantities.ts';
 import type { Part } from '../../craft/schema.ts';
+import { stationOf } from '../../craft/station.ts';
 import { taken } from '../../craft/stowage.ts';
 import { takeOut } from '../../craft/takeOut.ts';
 import { type Edit, type Recipe, step } from '../edit.ts';
-import { placed, shifted, stationOf, stretched } from '../place.ts';
+import { placed, shifted, stretched } from '../place.ts';
 
 export type PartFields = Omit<Part, 'id'>;
 

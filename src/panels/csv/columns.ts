@@ -1,6 +1,6 @@
 /** The columns of a table of parts: how each is headed, and which quantity stands in it. */
 import type { Part } from '../../craft/schema.ts';
-import { stationOf } from '../../edit/place.ts';
+import { stationOf } from '../../craft/station.ts';
 import type { Quantity, UnitSystem } from '../../units/units.ts';
 import { copiesText } from './copiesText.ts';
 import { writeAngle, writeCell } from './quantityCell.ts';

@@ -1,6 +1,7 @@
 /** Whether the stations of rows to be added look as if they were meant in another unit. Pure. */
+
+import { stationOf } from '../../craft/station.ts';
 import type { PartFields } from '../../edit/edits/parts.ts';
-import { stationOf } from '../../edit/place.ts';
 
 /** All within this share of the hull's length from the nose tip: hardly a craft, likely a unit mistaken. */
 const CROWDED = 0.01;

@@ -1,8 +1,8 @@
 /** Reinforcements, valves and labels on the skin. */
 import type { HullSpec } from '../../craft/hullSchema.ts';
 import type { Problem } from '../../craft/problem.ts';
+import { stationOf } from '../../craft/station.ts';
 import { setHull } from '../../edit/edits/craft.ts';
-import { stationOf } from '../../edit/place.ts';
 import { type Quantity, unitOf } from '../../units/units.ts';
 import { useCommit } from '../commit.ts';
 import { defaultPlace } from '../defaults.ts';

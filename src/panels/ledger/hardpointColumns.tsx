@@ -1,7 +1,7 @@
 /** The columns of the hardpoints. */
 import type { Hardpoint } from '../../craft/schema.ts';
+import { stationOf, withStation } from '../../craft/station.ts';
 import { setHardpoint, setLeadAt } from '../../edit/edits/hardpoints.ts';
-import { stationOf, withStation } from '../../edit/place.ts';
 import { formatQuantity } from '../../units/format.ts';
 import { QuantityField } from '../fields/QuantityField.tsx';
 import { TextField } from '../fields/TextField.tsx';

@@ -2,8 +2,8 @@
 import type { PlaceKind } from '../../craft/placeSchema.ts';
 import type { Problem } from '../../craft/problem.ts';
 import type { MassSource, Part, PartKind } from '../../craft/schema.ts';
+import { stationOf, withStation } from '../../craft/station.ts';
 import { type PartFields, setPart } from '../../edit/edits/parts.ts';
-import { stationOf, withStation } from '../../edit/place.ts';
 import { placeAs } from '../../report/placeAs.ts';
 import { formatQuantity } from '../../units/format.ts';
 import { copiesText, readCopies } from '../csv/copiesText.ts';

@@ -1,6 +1,6 @@
 /** What each load of the list costs or saves in dead ballast, and the set that the exact plan takes. */
 import type { Craft } from '../../craft/craft.ts';
-import { stationOf } from '../../edit/place.ts';
+import { stationOf } from '../../craft/station.ts';
 import type { LoadRow } from '../../report/plans.ts';
 import { formatQuantity } from '../../units/format.ts';
 import type { UnitSystem } from '../../units/units.ts';

@@ -1,8 +1,8 @@
 /** Where a load may go: hardpoints by their boxes, and stretches along the hull. */
 import { listed } from '../../craft/craft.ts';
 import type { Load, LoadOption } from '../../craft/planningSchema.ts';
+import { withStation } from '../../craft/station.ts';
 import { addLoadOption, removeLoadOption, setLoadOption } from '../../edit/edits/loads.ts';
-import { withStation } from '../../edit/place.ts';
 import { useCommit } from '../commit.ts';
 import { defaultPlace } from '../defaults.ts';
 import { useEditor } from '../editor.ts';

@@ -1,7 +1,8 @@
 /** The stretch along which the plan may move a part. */
 import type { Part } from '../../craft/schema.ts';
+import { stationOf } from '../../craft/station.ts';
 import { setSlide } from '../../edit/edits/parts.ts';
-import { slideAbout, stationOf } from '../../edit/place.ts';
+import { slideAbout } from '../../edit/place.ts';
 import { useCommit } from '../commit.ts';
 import { useEditor } from '../editor.ts';
 import { CheckField } from '../fields/CheckField.tsx';
