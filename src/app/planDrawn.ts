@@ -10,6 +10,8 @@ import type { CarryCurve, PlanFound } from '../report/plans.ts';
 import { assessed } from './assessed.ts';
 
 export interface PlanDrawn {
+  /** Whether the plan is in front: where loads may go is drawn only then. */
+  readonly planning: boolean;
   readonly plan: PlanFound | null;
   /** The craft with the plan carried out. */
   readonly planned: Assessment | null;
@@ -22,6 +24,7 @@ export function usePlanDrawn(editor: Editor, inFront: boolean): PlanDrawn {
   const { units } = editor;
   const plan = useMemo(() => (inFront ? planToDraw(planning, editor) : null), [inFront, planning, editor]);
   return {
+    planning: inFront,
     plan,
     planned: plan && assessed(plan.craft, units),
     carry: inFront ? planning.carry.curve : null,

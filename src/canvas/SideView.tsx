@@ -83,7 +83,7 @@ function SideFrame(props: SharedProps & DrawnProps & { stale: string | null }) {
     return takeInSide(on, hand);
   };
   const planned = usePlanned(props, geometry);
-  const rails = useRails(scene, selection);
+  const rails = useRails(scene, selection, props.planning ?? false);
   const gestures = useGestures(frame, ground, rails.take(take), rails.hover(hover));
   const onDoubleClick = () => {
     if (!overlay.hover) ground.fit();

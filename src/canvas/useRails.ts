@@ -9,6 +9,7 @@ import {
   knobsOfAll,
   type Rail,
   railsOf,
+  railsShown,
   sameKnob,
   sameRail,
 } from '../scene/rails.ts';
@@ -30,12 +31,12 @@ export interface Rails {
   hover(otherwise: (hand: Hand | null) => void): (hand: Hand | null) => void;
 }
 
-export function useRails(scene: Scene, selection: Selection): Rails {
+export function useRails(scene: Scene, selection: Selection, planning: boolean): Rails {
   const { craft, geometry, view, figures } = scene;
   const { parts, loads } = craft;
   const { hull } = geometry;
   // biome-ignore lint/correctness/useExhaustiveDependencies: of the craft only parts and loads have slides
-  const found = useMemo(() => railsOf(craft, hull), [parts, loads, hull]);
+  const found = useMemo(() => railsShown(railsOf(craft, hull), planning), [parts, loads, hull, planning]);
   const rails = useSame(found, sameRail);
   const [lit, setLit] = useState<string | null>(null);
   const selected = idsOf(selection, 'part');

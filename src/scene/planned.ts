@@ -6,6 +6,8 @@ import { type Geometry, geometryOf } from './subject.ts';
 export type { CurveToDraw, PlanToDraw };
 
 export interface PlanSubject {
+  /** Whether the plan is in front: where loads may go is drawn only then, by default false. */
+  readonly planning?: boolean;
   readonly plan?: PlanToDraw | null;
   /** The craft with the plan carried out. */
   readonly planned?: Assessment | null;

@@ -31,6 +31,10 @@ export interface Knob {
   readonly at: PlanePoint;
 }
 
+/** Those to draw: of parts always, of loads while planning, for they are nothing on the craft yet. */
+export const railsShown = (rails: readonly Rail[], planning: boolean): Rail[] =>
+  rails.filter(({ owner }) => planning || owner.kind === 'part');
+
 /** Of the side view. */
 export const railsOf = (craft: Craft, hull: Hull): Rail[] =>
   slideLines(craft, hull).map(({ line, ...rest }) => {

@@ -11,6 +11,7 @@ import {
   knobsOfAll,
   type Rail,
   railsOf,
+  railsShown,
   sameRail,
 } from '../../src/scene/rails.ts';
 import { toScreen } from '../../src/scene/view.ts';
@@ -85,4 +86,11 @@ test('a rail found again is the same until its slide, its place or the hull chan
   expect(sameRail(of('part'), other(sliding({ from: 0.9, to: 1.61 })))).toBe(false);
   const wider = { ...craft.hull, shape: { kind: 'spheroid', length: 3, diameter: 1.1 } } as const;
   expect(sameRail(of('part'), other({ ...craft, hull: wider }))).toBe(false);
+});
+
+test('where loads may go is drawn only while planning; slides of parts always', () => {
+  expect(railsShown(rails, true)).toEqual(rails);
+  const kinds = railsShown(rails, false).map(({ owner }) => owner.kind);
+  expect(new Set(kinds)).toEqual(new Set(['part']));
+  expect(kinds.length).toBe(rails.filter(({ owner }) => owner.kind === 'part').length);
 });
