@@ -32,6 +32,8 @@ export const blankCraft = (name: string, shape: HullShape, length: number): Craf
     pitchTolerance: 2 * degrees,
     heelTolerance: 2 * degrees,
     leastPendulumDepth: 0.01,
+    turnTime: null,
+    sideGust: null,
   },
   wishes: [...WISHES],
 });

@@ -2,6 +2,7 @@
 import { planningProblems } from './planningReferences.ts';
 import { type Problem, unknownId } from './problem.ts';
 import type { CraftFile, WireEnd } from './schema.ts';
+import { thrustProblems } from './thrustReferences.ts';
 
 export function referenceProblems(file: CraftFile): Problem[] {
   const partIds = new Set(file.parts.map((part) => part.id));
@@ -18,6 +19,7 @@ export function referenceProblems(file: CraftFile): Problem[] {
     ...(hardpointIds.has(file.leadAt) ? [] : [unknownId('leadAt', file.leadAt, 'a hardpoint', hardpointIds)]),
     ...bandProblems(file),
     ...planningProblems(file),
+    ...thrustProblems(file),
   ];
 }
 

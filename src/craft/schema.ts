@@ -9,9 +9,10 @@ import { hullSchema } from './hullSchema.ts';
 import { placeSchema } from './placeSchema.ts';
 import { fillSchema, loadSchema, pieceSchema, slideSchema, WISHES } from './planningSchema.ts';
 import * as q from './quantities.ts';
+import { finSchema, thrusterSchema } from './thrustSchema.ts';
 
 /** The version this program writes. Older ones step up in `versions.ts`. */
-export const VERSION = 2;
+export const VERSION = 3;
 
 export const PART_KINDS = [
   'thruster',
@@ -103,6 +104,13 @@ export const partSchema = z.strictObject({
   slide: slideSchema.nullable().meta({
     description: 'The stretch along which the ballast plan may move it; null when it stays where it is',
   }),
+  thruster: thrusterSchema.nullable().meta({
+    description: 'What it does as a thruster, each piece; null when it is none or nothing is known of it',
+  }),
+  fin: finSchema.nullable().meta({ description: 'What it does as a fin, each piece; null when it is none' }),
+  dragArea: q.number('m²', 'Drag of one piece over dynamic pressure', 0, 100).nullable().meta({
+    description: 'Drag of one piece over dynamic pressure; null to have it reckoned from kind and size',
+  }),
   notes: q.text('Notes', 4000),
 });
 
@@ -148,6 +156,12 @@ export const targetsSchema = z.strictObject({
   pitchTolerance: q.tolerance('Pitch either way that still counts as level'),
   heelTolerance: q.tolerance('Heel either way that still counts as even'),
   leastPendulumDepth: q.distance('Least height of CB above CG'),
+  turnTime: q.number('s', 'Longest time for the first 90° of yaw from rest', 0.01, 3600).nullable().meta({
+    description: 'Longest time for the first 90° of yaw from rest; null when none is asked for',
+  }),
+  sideGust: q.number('m/s', 'Side gust to be held', 0, 50).nullable().meta({
+    description: 'Side gust that the thrusters have to hold in cruise; null when none is asked for',
+  }),
 });
 
 const listed = <T extends z.ZodType>(item: T, most: number, what: string) =>

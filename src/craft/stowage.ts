@@ -161,6 +161,9 @@ const blankWeight = (id: string, name: string, mass: number, place: Place): Part
   cgOffset: 0,
   locked: false,
   slide: null,
+  thruster: null,
+  fin: null,
+  dragArea: null,
   notes: '',
 });
 

@@ -18,20 +18,44 @@ const from1: Step = (file) => ({
   loads: [],
   wishes: ['usefulLoad', 'fewestMoved', 'leastWire'],
   ...file,
-  parts: eachObject(file.parts, { slide: null }),
-  hardpoints: eachObject(file.hardpoints, { limit: 10, fill: 'continuous' }),
+  parts: eachObject(file.parts, () => ({ slide: null })),
+  hardpoints: eachObject(file.hardpoints, () => ({ limit: 10, fill: 'continuous' })),
   steelyard: 2,
 });
 
+/** Version 2, from before thrust and turning: a fin was known by its box alone, and of thrusters nothing but their mass. */
+const from2: Step = (file) => ({
+  ...file,
+  parts: eachObject(file.parts, (part) => ({
+    thruster: null,
+    fin: part.kind === 'fin' ? finOfBox(part.size) : null,
+    dragArea: null,
+  })),
+  targets: isObject(file.targets) ? { turnTime: null, sideGust: null, ...file.targets } : file.targets,
+  steelyard: 3,
+});
+
+/** A fin as large as its box seen from the side; null where the box is none. */
+function finOfBox(size: unknown): Json | null {
+  if (!isObject(size)) return null;
+  const { length, height } = size;
+  if (typeof length !== 'number' || typeof height !== 'number' || !(length > 0) || !(height > 0)) return null;
+  const ratio = Math.min(Math.max(height / length, 0.05), 20);
+  return { area: rounded(length * height), aspectRatio: rounded(ratio) };
+}
+
+const rounded = (value: number): number => Math.round(value * 1e6) / 1e6;
+
+const isObject = (value: unknown): value is Json =>
+  value !== null && typeof value === 'object' && !Array.isArray(value);
+
 /** Every object of a list with those fields, where it has none of its own; anything else as it is. */
-const eachObject = (list: unknown, fields: Json): unknown =>
+const eachObject = (list: unknown, fields: (item: Json) => Json): unknown =>
   Array.isArray(list)
-    ? list.map((item) =>
-        item !== null && typeof item === 'object' && !Array.isArray(item) ? { ...fields, ...item } : item,
-      )
+    ? list.map((item: unknown) => (isObject(item) ? { ...fields(item), ...item } : item))
     : list;
 
-const STEPS: Readonly<Record<number, Step>> = { 0: from0, 1: from1 };
+const STEPS: Readonly<Record<number, Step>> = { 0: from0, 1: from1, 2: from2 };
 
 /** The file at today's version, or the problem with its version. */
 export function stepUp(file: Json): { file: Json } | { problem: Problem } {

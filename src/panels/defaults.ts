@@ -28,6 +28,9 @@ export const blankPart = (place: Place): PartFields => ({
   cgOffset: 0,
   locked: false,
   slide: null,
+  thruster: null,
+  fin: null,
+  dragArea: null,
   notes: '',
 });
 

@@ -55,6 +55,11 @@ export const QUANTITIES = {
   inertia: kind('a moment of inertia', 'kg·m²', shown('kg·m²', 4), shown('lb·ft²', 3)),
   anglePerMass: kind('an angle per mass', 'rad/kg', shown('°/g', 3), shown('°/oz', 2)),
   momentPerAngle: kind('a moment per angle', 'N·m/rad', shown('N·m/°', 4), shown('ozf·in/°', 2)),
+  torque: kind('a moment', 'N·m', shown('N·m', 3), shown('ozf·in', 1), ['mN·m']),
+  power: kind('a power', 'W', shown('W', 1), shown('W', 1), ['kW', 'hp']),
+  turnSpeed: kind('a speed of turning', 'rad/s', shown('rpm', 0), shown('rpm', 0)),
+  yawRate: kind('a rate of turn', 'rad/s', shown('°/s', 1), shown('°/s', 1)),
+  forcePerPower: kind('a thrust per power', 'N/W', shown('N/W', 3), shown('ozf/W', 2)),
 } as const satisfies Record<string, QuantityKind>;
 
 export type Quantity = keyof typeof QUANTITIES;

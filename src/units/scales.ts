@@ -84,6 +84,17 @@ export const SCALES = {
   'N·m/rad': plain(1),
   'N·m/°': plain(1 / DEGREE),
   'ozf·in/°': plain((OUNCE_FORCE * INCH) / DEGREE),
+  'N·m': plain(1),
+  'mN·m': plain(1e-3),
+  'ozf·in': plain(OUNCE_FORCE * INCH),
+  W: plain(1),
+  kW: plain(1000),
+  hp: plain(550 * FOOT * POUND * STANDARD_GRAVITY),
+  'rad/s': plain(1),
+  rpm: plain(Math.PI / 30),
+  '°/s': plain(DEGREE),
+  'N/W': plain(1),
+  'ozf/W': plain(OUNCE_FORCE),
 } as const satisfies Record<string, Scale>;
 
 export type UnitSymbol = keyof typeof SCALES;

@@ -22,6 +22,9 @@ const part = (name: string): PartFields => ({
   cgOffset: 0,
   locked: false,
   slide: null,
+  thruster: null,
+  fin: null,
+  dragArea: null,
   notes: '',
 });
 

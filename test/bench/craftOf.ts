@@ -26,6 +26,9 @@ const partAt = (i: number, parts: number): Part => ({
   cgOffset: 0,
   locked: false,
   slide: null,
+  thruster: null,
+  fin: null,
+  dragArea: null,
   notes: '',
 });
 

@@ -42,7 +42,7 @@ test('every number has its unit, and its description says it', () => {
   );
   expect(numbers.length).toBeGreaterThan(50);
   for (const { path, node } of numbers) {
-    expect(node.unit, path).toMatch(/^(1|m|kg|rad|K|Pa|kg\/m|kg\/m²)$/);
+    expect(node.unit, path).toMatch(/^(1|m|kg|rad|K|Pa|kg\/m|kg\/m²|N|W|s|m\/s|m²|rad\/s)$/);
     expect(node.description, path).toContain(
       node.unit === '1' && node.type === 'integer' ? 'whole number' : `, ${node.unit}`,
     );

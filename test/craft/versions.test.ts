@@ -41,3 +41,45 @@ test.each([undefined, null, '1', -1, 0.5, [1], {}, true])('version %j is no vers
   const parsed = parse(JSON.stringify({ ...sampleJson('worked-example'), steelyard: version }));
   expect(parsed).toMatchObject({ ok: false, problems: [{ path: 'steelyard' }] });
 });
+
+test('a file of version 2 steps up: fins take their outline from their box, nothing is known of thrust', () => {
+  const part = { id: 'a', size: { length: 0.2, width: 0.004, height: 0.3 } };
+  const stepped = stepUp({
+    steelyard: 2,
+    parts: [{ ...part, kind: 'fin' }, { ...part, kind: 'thruster' }, { kind: 'fin', size: 'rubbish' }, 7],
+    targets: { pitchTolerance: 0.1 },
+  });
+  expect(stepped).toMatchObject({
+    file: {
+      steelyard: VERSION,
+      parts: [
+        { fin: { area: 0.06, aspectRatio: 1.5 }, thruster: null, dragArea: null },
+        { fin: null, thruster: null },
+        { fin: null },
+        7,
+      ],
+      targets: { turnTime: null, sideGust: null, pitchTolerance: 0.1 },
+    },
+  });
+});
+
+test.each([
+  ['yaw', { least: 1, most: 0.5, set: 0.7, slew: 1 }, 'parts[0].thruster.yaw.least'],
+  ['pitch', { least: -0.5, most: 0.5, set: 0.7, slew: 1 }, 'parts[0].thruster.pitch.set'],
+])('a %s vectoring out of order is told', (way, vectoring, path) => {
+  const file = sampleJson('worked-example');
+  const still = { least: 0, most: 0, set: 0, slew: 0 };
+  const [first, ...rest] = file.parts as Record<string, unknown>[];
+  const thruster = {
+    thrust: { kind: 'measured', staticThrust: 1 },
+    diameter: 0.2,
+    pitchSpeed: { kind: 'given', speed: 8 },
+    reverse: 0,
+    yaw: still,
+    pitch: still,
+    differential: false,
+    [way]: vectoring,
+  };
+  const parsed = parse(JSON.stringify({ ...file, parts: [{ ...first, thruster }, ...rest] }));
+  expect(parsed.ok ? [] : parsed.problems.map((problem) => problem.path)).toEqual([path]);
+});

@@ -16,6 +16,9 @@ export const partOf = (id: string, change: Partial<Part> = {}): Part => ({
   cgOffset: 0,
   locked: false,
   slide: null,
+  thruster: null,
+  fin: null,
+  dragArea: null,
   notes: '',
   ...change,
 });

@@ -45,6 +45,9 @@ function withLead(craft: Craft, mass: number, hardpoint: string): Craft {
     cgOffset: 0,
     locked: false,
     slide: null,
+    thruster: null,
+    fin: null,
+    dragArea: null,
     notes: '',
   };
   return {

@@ -21,6 +21,9 @@ export const part = (id: string, place: Place, more: Partial<Part> = {}): Part =
   cgOffset: 0,
   locked: false,
   slide: null,
+  thruster: null,
+  fin: null,
+  dragArea: null,
   notes: '',
   ...more,
 });

@@ -58,6 +58,9 @@ function fieldsOf(row: Row, home: Place): PartFields {
     cgOffset: row.quantity('cgOffset') ?? blank.cgOffset,
     locked: row.read('locked', readYes) ?? blank.locked,
     slide: blank.slide,
+    thruster: blank.thruster,
+    fin: blank.fin,
+    dragArea: blank.dragArea,
     notes: cellText(row.text('notes')),
   };
 }

@@ -38,6 +38,9 @@ const part: fc.Arbitrary<Part> = fc.record({
   cgOffset: length,
   locked: fc.boolean(),
   slide: fc.constant(null),
+  thruster: fc.constant(null),
+  fin: fc.constant(null),
+  dragArea: fc.constant(null),
   notes: text,
 });
 
@@ -194,5 +197,8 @@ const blank: Part = {
   cgOffset: 0,
   locked: false,
   slide: null,
+  thruster: null,
+  fin: null,
+  dragArea: null,
   notes: '',
 };

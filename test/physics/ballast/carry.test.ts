@@ -66,6 +66,8 @@ test('without ballast: forward of the station of the one weight as much as level
       pitchTolerance: 1e-5,
       heelTolerance: 0.1,
       leastPendulumDepth: 0,
+      turnTime: null,
+      sideGust: null,
     },
   };
   const state = craftStateOf(craft);

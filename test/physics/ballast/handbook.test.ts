@@ -29,6 +29,8 @@ function craftWithCb(cb: number, parts: readonly Part[], lead: number): Craft {
       pitchTolerance: 1e-8,
       heelTolerance: 0.1,
       leastPendulumDepth: 0,
+      turnTime: null,
+      sideGust: null,
     },
   };
 }

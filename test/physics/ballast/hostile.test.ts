@@ -35,6 +35,8 @@ const base: Craft = {
     pitchTolerance: 0.1,
     heelTolerance: 0.1,
     leastPendulumDepth: 0.01,
+    turnTime: null,
+    sideGust: null,
   },
 };
 

@@ -101,6 +101,8 @@ export function randomCraft(want: Want = {}): fc.Arbitrary<Craft> {
           pitchTolerance: given.pitch * degrees,
           heelTolerance: given.heel * degrees,
           leastPendulumDepth: given.depth,
+          turnTime: null,
+          sideGust: null,
         },
         wishes: given.wishes,
       };

@@ -34,6 +34,8 @@ function levelCraft(loads: readonly Load[], wishes: Wish[]): Craft {
       pitchTolerance: 0.05,
       heelTolerance: 0.05,
       leastPendulumDepth: 0.1,
+      turnTime: null,
+      sideGust: null,
     },
   };
 }
