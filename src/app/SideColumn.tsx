@@ -1,5 +1,5 @@
 /** The column of panels, one in front at a time. */
-import { type ReactNode, useEffect } from 'react';
+import { lazy, type ReactNode, Suspense, useEffect } from 'react';
 import { DayPanel } from '../panels/DayPanel.tsx';
 import { FiguresPanel } from '../panels/FiguresPanel.tsx';
 import { FilmPanel } from '../panels/FilmPanel.tsx';
@@ -13,7 +13,9 @@ import { TargetsPanel } from '../panels/TargetsPanel.tsx';
 import { useCell } from './cell.ts';
 import type { Store } from './store.ts';
 
-type TabId = 'selected' | 'hull' | 'gas' | 'targets' | 'plan' | 'figures' | 'notes';
+type TabId = 'selected' | 'hull' | 'gas' | 'targets' | 'plan' | 'turn' | 'figures' | 'notes';
+
+const TurnTab = lazy(async () => ({ default: (await import('./TurnTab.tsx')).TurnTab }));
 
 const TABS: readonly Tab<TabId>[] = [
   { id: 'selected', title: 'Selected' },
@@ -21,12 +23,13 @@ const TABS: readonly Tab<TabId>[] = [
   { id: 'gas', title: 'Gas, day' },
   { id: 'targets', title: 'Targets' },
   { id: 'plan', title: 'Plan' },
+  { id: 'turn', title: 'Turn' },
   { id: 'figures', title: 'Figures' },
   { id: 'notes', title: 'Notes' },
 ];
 
 /** Panels that stay in front while things are picked. */
-const READ: ReadonlySet<string> = new Set<TabId>(['figures', 'plan']);
+const READ: ReadonlySet<string> = new Set<TabId>(['figures', 'plan', 'turn']);
 
 const PANELS: Readonly<Record<TabId, readonly ReactNode[]>> = {
   selected: [<Inspector key="inspector" />],
@@ -34,6 +37,11 @@ const PANELS: Readonly<Record<TabId, readonly ReactNode[]>> = {
   gas: [<GasPanel key="gas" />, <DayPanel key="day" />],
   targets: [<TargetsPanel key="targets" />],
   plan: [<PlanPanel key="plan" />],
+  turn: [
+    <Suspense key="turn" fallback={<p className="panel aside">Loading…</p>}>
+      <TurnTab />
+    </Suspense>,
+  ],
   figures: [<FiguresPanel key="figures" />],
   notes: [<NotesPanel key="notes" />],
 };
@@ -52,7 +60,7 @@ export function SideColumn({ store, hidden }: { store: Store; hidden: boolean })
   );
 }
 
-/** What is newly selected comes to the front, unless the builder is reading figures or the plan. */
+/** What is newly selected comes to the front, unless the builder is reading figures, the plan or the turn. */
 function useSelectionInFront({ session, view }: Store): void {
   useEffect(() => {
     let before = session.getState().selection;
