@@ -2,9 +2,11 @@
  * Older craft files step up, one version at a time. To add a version: raise VERSION in `schema.ts` and add here the
  * step from the one before, which takes and gives plain JSON and must not throw on rubbish.
  */
+import { finOfBox } from './firstFigures.ts';
 import type { Problem } from './problem.ts';
 import { foundText } from './problem.ts';
 import { VERSION } from './schema.ts';
+import type { FinData } from './thrustSchema.ts';
 
 type Json = Record<string, unknown>;
 export type Step = (file: Json) => Json;
@@ -28,23 +30,19 @@ const from2: Step = (file) => ({
   ...file,
   parts: eachObject(file.parts, (part) => ({
     thruster: null,
-    fin: part.kind === 'fin' ? finOfBox(part.size) : null,
+    fin: part.kind === 'fin' ? boxedFin(part.size) : null,
     dragArea: null,
   })),
   targets: isObject(file.targets) ? { turnTime: null, sideGust: null, ...file.targets } : file.targets,
   steelyard: 3,
 });
 
-/** A fin as large as its box seen from the side; null where the box is none. */
-function finOfBox(size: unknown): Json | null {
+/** A fin as large as its box; null where the box is none. */
+function boxedFin(size: unknown): FinData | null {
   if (!isObject(size)) return null;
   const { length, height } = size;
-  if (typeof length !== 'number' || typeof height !== 'number' || !(length > 0) || !(height > 0)) return null;
-  const ratio = Math.min(Math.max(height / length, 0.05), 20);
-  return { area: rounded(length * height), aspectRatio: rounded(ratio) };
+  return typeof length === 'number' && typeof height === 'number' ? finOfBox({ length, height }) : null;
 }
-
-const rounded = (value: number): number => Math.round(value * 1e6) / 1e6;
 
 const isObject = (value: unknown): value is Json =>
   value !== null && typeof value === 'object' && !Array.isArray(value);

@@ -1,5 +1,6 @@
 /** Edits of parts. Positions that only the hull knows are handed in, so that an edit needs no physics. */
 import { type Craft, listed } from '../../craft/craft.ts';
+import { finOfBox, isBoxed } from '../../craft/firstFigures.ts';
 import { freeId } from '../../craft/ids.ts';
 import type { Place } from '../../craft/placeSchema.ts';
 import type { Slide } from '../../craft/planningSchema.ts';
@@ -16,7 +17,7 @@ export type PartFields = Omit<Part, 'id'>;
 /** Enough of a part to find it and to call it by its name. */
 export type PartCalled = Pick<Part, 'id' | 'name' | 'kind'>;
 
-const calledPart = ({ name, kind }: Omit<PartCalled, 'id'>): string => name || kind;
+export const calledPart = ({ name, kind }: Omit<PartCalled, 'id'>): string => name || kind;
 
 /** Adds a part at the end of the list, under an id made from its name. */
 export const addPart = (fields: PartFields): Edit => addParts([fields], `Add ${calledPart(fields)}`);
@@ -73,15 +74,24 @@ export const removeParts = (ids: readonly string[], what: string): Edit =>
 
 /** Sets fields of one part. `field` names what is typed, for the undo button. */
 export const setPart = (part: PartCalled, field: string, change: Partial<PartFields>): Edit =>
-  step(`Change ${field} of ${calledPart(part)}`, (craft) => {
-    Object.assign(craft.parts.byId[part.id]!, change);
-  });
+  step(`Change ${field} of ${calledPart(part)}`, (craft) => alter(craft.parts.byId[part.id]!, change));
 
 /** Sets the same fields of several parts: lock, kind, source of mass. */
 export const setParts = (ids: readonly string[], label: string, change: Partial<PartFields>): Edit =>
   step(label, (craft) => {
-    for (const id of ids) Object.assign(craft.parts.byId[id]!, change);
+    for (const id of ids) alter(craft.parts.byId[id]!, change);
   });
+
+/**
+ * What becomes a fin is one as large as its box, and a fin as large as its box stays so when the box changes. What is a
+ * fin no more keeps its figures, should it become one again.
+ */
+function alter(part: Part, change: Partial<PartFields>): void {
+  const boxed = part.fin !== null && isBoxed(part.fin, part.size);
+  Object.assign(part, change);
+  if (change.kind === 'fin') part.fin ??= finOfBox(part.size);
+  if (change.size && boxed) part.fin = finOfBox(part.size) ?? part.fin;
+}
 
 /** A weighed mass replaces the planned one; its tolerance becomes the scale's. */
 export const markWeighed = (part: PartCalled, mass: number, massTolerance: number): Edit =>

@@ -1,4 +1,5 @@
 /** One row of a table of parts. */
+import { finOfBox } from '../../craft/firstFigures.ts';
 import { problemsOf } from '../../craft/parse.ts';
 import { PLACE_KINDS, type Place } from '../../craft/placeSchema.ts';
 import { foundText } from '../../craft/problem.ts';
@@ -42,24 +43,26 @@ export function readPartRow(
 
 function fieldsOf(row: Row, home: Place): PartFields {
   const blank = blankPart(home);
+  const kind = row.oneOf('kind', PART_KINDS, PART_WORDS) ?? blank.kind;
+  const size = {
+    length: row.quantity('sizeLength') ?? blank.size.length,
+    width: row.quantity('sizeWidth') ?? blank.size.width,
+    height: row.quantity('sizeHeight') ?? blank.size.height,
+  };
   return {
-    kind: row.oneOf('kind', PART_KINDS, PART_WORDS) ?? blank.kind,
+    kind,
     name: cellText(row.text('name')),
     mass: row.needed('mass'),
     massTolerance: row.quantity('massTolerance') ?? blank.massTolerance,
     massSource: row.oneOf('massSource', MASS_SOURCES, SOURCE_WORDS) ?? blank.massSource,
     place: placeOf(row, home),
     copies: row.read('copies', readCopies) ?? blank.copies,
-    size: {
-      length: row.quantity('sizeLength') ?? blank.size.length,
-      width: row.quantity('sizeWidth') ?? blank.size.width,
-      height: row.quantity('sizeHeight') ?? blank.size.height,
-    },
+    size,
     cgOffset: row.quantity('cgOffset') ?? blank.cgOffset,
     locked: row.read('locked', readYes) ?? blank.locked,
     slide: blank.slide,
     thruster: blank.thruster,
-    fin: blank.fin,
+    fin: kind === 'fin' ? finOfBox(size) : blank.fin,
     dragArea: blank.dragArea,
     notes: cellText(row.text('notes')),
   };

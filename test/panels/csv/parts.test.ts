@@ -1,5 +1,6 @@
 import fc from 'fast-check';
 import { expect, test } from 'vitest';
+import { finOfBox } from '../../../src/craft/firstFigures.ts';
 import type { Place } from '../../../src/craft/placeSchema.ts';
 import { MASS_SOURCES, PART_KINDS, type Part } from '../../../src/craft/schema.ts';
 import { stationDoubt } from '../../../src/panels/csv/doubt.ts';
@@ -25,24 +26,27 @@ const copies = fc.oneof(
   fc.record({ kind: fc.constant('ring' as const), count: fc.integer({ min: 2, max: 64 }) }),
 );
 const text = fc.string({ maxLength: 40, unit: 'grapheme' }).map((each) => each.trim().replaceAll('\r', ''));
-const part: fc.Arbitrary<Part> = fc.record({
-  id: fc.constant('part'),
-  kind: fc.constantFrom(...PART_KINDS),
-  name: text,
-  mass,
-  massTolerance: mass,
-  massSource: fc.constantFrom(...MASS_SOURCES),
-  place,
-  copies,
-  size: fc.record({ length: distance, width: distance, height: distance }),
-  cgOffset: length,
-  locked: fc.boolean(),
-  slide: fc.constant(null),
-  thruster: fc.constant(null),
-  fin: fc.constant(null),
-  dragArea: fc.constant(null),
-  notes: text,
-});
+/** A table has no outline of fins: they are taken from their box. */
+const part: fc.Arbitrary<Part> = fc
+  .record({
+    id: fc.constant('part'),
+    kind: fc.constantFrom(...PART_KINDS),
+    name: text,
+    mass,
+    massTolerance: mass,
+    massSource: fc.constantFrom(...MASS_SOURCES),
+    place,
+    copies,
+    size: fc.record({ length: distance, width: distance, height: distance }),
+    cgOffset: length,
+    locked: fc.boolean(),
+    slide: fc.constant(null),
+    thruster: fc.constant(null),
+    fin: fc.constant(null),
+    dragArea: fc.constant(null),
+    notes: text,
+  })
+  .map((each) => (each.kind === 'fin' ? { ...each, fin: finOfBox(each.size) } : each));
 
 const withoutId = ({ id: _, ...fields }: Part) => fields;
 
