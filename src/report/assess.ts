@@ -20,6 +20,7 @@ import { leadRows, oneWeightRows } from './leadRows.ts';
 import type { Row } from './row.ts';
 import { noRow, type Rows } from './rows.ts';
 import { figureText } from './rowText.ts';
+import { arrowsOf } from './turning/arrows.ts';
 import type { Verdict } from './verdict.ts';
 import { meetsTargets, type PlainVerdict, verdictsOf } from './verdicts.ts';
 
@@ -100,6 +101,7 @@ function geometryOf(state: CraftState, rows: Rows): Geometry {
       at: positionOf(place, hull),
     })),
     support: craft.support && positionOf(craft.support, hull),
+    thrust: arrowsOf(state),
     beam: beamOf(state),
     lead: leadBar(state, rows),
   };

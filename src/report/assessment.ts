@@ -4,6 +4,7 @@ import type { Vec3 } from '../numeric/vector.ts';
 import type { Hull } from '../physics/hull/hull.ts';
 import type { Advice } from './advice.ts';
 import type { Row } from './row.ts';
+import type { ThrustArrow } from './turning/arrows.ts';
 import type { Verdict } from './verdict.ts';
 
 export type { Hull, Vec3 };
@@ -71,6 +72,8 @@ export interface Geometry {
   readonly wires: readonly WireView[];
   readonly hardpoints: readonly HardpointView[];
   readonly support: Vec3 | null;
+  /** Thrust of each piece of a thruster with figures. */
+  readonly thrust: readonly ThrustArrow[];
   readonly beam: readonly BeamBar[];
   /** The least lead as one more bar, where it can be had. */
   readonly lead: BeamBar | null;

@@ -20,10 +20,12 @@ export interface ThrustArrow {
   readonly diameter: number;
   readonly movesInYaw: boolean;
   readonly movesInPitch: boolean;
+  /** Whether it is throttled apart from its fellow of a pair. */
+  readonly apart: boolean;
 }
 
 export const arrowsOf = (state: CraftState): ThrustArrow[] =>
-  thrustersOf(state).map(({ part, copy, name, at, staticThrust, diameter, yaw, pitch }) => ({
+  thrustersOf(state).map(({ part, copy, name, at, staticThrust, diameter, yaw, pitch, differ }) => ({
     part,
     copy,
     name,
@@ -34,6 +36,7 @@ export const arrowsOf = (state: CraftState): ThrustArrow[] =>
     diameter,
     movesInYaw: moves(yaw),
     movesInPitch: moves(pitch),
+    apart: differ !== 0,
   }));
 
 const moves = ({ least, most }: Vectoring): boolean => most > least;
