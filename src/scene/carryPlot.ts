@@ -120,8 +120,13 @@ function roundUp(least: number): number {
   return power * ([1, 2, 5, 10].find((n) => n * power >= least * (1 - 1e-9)) ?? 10);
 }
 
+export interface Stationed {
+  /** m */
+  readonly station: number;
+}
+
 /** Index of the point nearest to an x; null off the hull, or when there is none. */
-export function spotAt({ points }: CurveToDraw, view: Scale, x: number): number | null {
+export function spotAt(points: readonly Stationed[], view: Scale, x: number): number | null {
   const station = (x - view.originX) / view.scale;
   const reach = points.length > 1 ? points[1]!.station - points[0]!.station : Number.POSITIVE_INFINITY;
   let best: number | null = null;

@@ -64,10 +64,10 @@ test('the highest mass of the axis is not below the most, in either system', () 
 });
 
 test('the pointer reads the nearest station, and nothing off the hull', () => {
-  expect(spotAt(curve, view, 149)).toBe(1);
-  expect(spotAt(curve, view, 201)).toBe(2);
-  expect(spotAt(curve, view, 700)).toBeNull();
-  expect(spotAt({ points: [], complete: false }, view, 100)).toBeNull();
+  expect(spotAt(curve.points, view, 149)).toBe(1);
+  expect(spotAt(curve.points, view, 201)).toBe(2);
+  expect(spotAt(curve.points, view, 700)).toBeNull();
+  expect(spotAt([], view, 100)).toBeNull();
 });
 
 test('arrows, pages, Home and End move the station and stop at the ends; other keys do not', () => {

@@ -1,0 +1,204 @@
+/** The curves of a placement study as drawn, strip below strip. Pixels. */
+import type { Context } from 'konva/lib/Context.js';
+import { Shape } from 'react-konva/es/ReactKonvaCore.js';
+import type { Palette } from '../scene/palette.ts';
+import { type Band, nameSpot, type PlacePage, type Strip } from '../scene/placePlot.ts';
+import type { ScreenPoint } from '../scene/view.ts';
+import { fontOf, shortened, textWidth, traceOnScreen, writeOn } from './paint.ts';
+import type { Size } from './useSize.ts';
+
+export interface PlaceMarksProps {
+  readonly page: PlacePage;
+  readonly size: Size;
+  /** Index of the station that is read, and what each strip says there. */
+  readonly read: { readonly index: number; readonly values: readonly string[] } | null;
+  /** What stands above the strips; the legend when it is empty. */
+  readonly words: string;
+  readonly palette: Palette;
+}
+
+/** Middle of the line of words above the strips. */
+const WORDS_Y = 10;
+const TEXT = fontOf(12);
+const SMALL = fontOf(11);
+
+export function PlaceMarks(props: PlaceMarksProps) {
+  return (
+    <Shape
+      sceneFunc={(context) => {
+        const { page, palette } = props;
+        for (const band of page.struck) hatch(context, band, page, palette);
+        today(context, props);
+        for (const strip of page.strips) drawStrip(context, strip, props);
+        reading(context, props);
+        if (props.words) line(context, props.words, props);
+        else legend(context, props);
+      }}
+    />
+  );
+}
+
+const headOf = ({ strips }: PlacePage): number => strips[0]!.top;
+const footOf = ({ strips }: PlacePage): number => strips.at(-1)!.foot;
+
+function across(context: Context, from: ScreenPoint, to: ScreenPoint): void {
+  traceOnScreen(context, [from, to], false);
+  context.stroke();
+}
+
+function drawStrip(context: Context, strip: Strip, props: PlaceMarksProps): void {
+  const { page, palette } = props;
+  const foot = Math.round(strip.foot) + 0.5;
+  context.strokeStyle = palette.line;
+  context.lineWidth = 1;
+  across(context, { x: page.left, y: foot }, { x: page.right, y: foot });
+  context.strokeStyle = palette.ring;
+  context.lineWidth = 1.8;
+  context.lineJoin = 'round';
+  for (const run of strip.runs) {
+    traceOnScreen(context, run, false);
+    context.stroke();
+  }
+  for (const index of page.best) {
+    const y = strip.heights[index];
+    if (typeof y === 'number') dot(context, { x: page.stations[index]!, y }, 2.6, palette.good, palette);
+  }
+  scaleNumbers(context, strip, props);
+  name(context, strip, props);
+}
+
+function dot(context: Context, { x, y }: ScreenPoint, radius: number, ink: string, { paper }: Palette): void {
+  context.beginPath();
+  context.arc(x, y, radius, 0, 2 * Math.PI, false);
+  context.fillStyle = ink;
+  context.fill();
+  context.strokeStyle = paper;
+  context.lineWidth = 1;
+  context.stroke();
+}
+
+/** Aft of the tail while it is in sight, else at the edge. */
+function scaleNumbers(context: Context, { high, low, top, foot }: Strip, props: PlaceMarksProps): void {
+  const { page, size, palette } = props;
+  context.font = SMALL;
+  context.textBaseline = 'middle';
+  context.textAlign = 'left';
+  const room = Math.max(textWidth(high, SMALL), textWidth(low, SMALL)) + 4;
+  const x = Math.min(page.right + 6, size.width - room);
+  writeOn(context, high, { x, y: top + 5 }, palette.inkSoft, palette.paper);
+  if (foot - top > 22) writeOn(context, low, { x, y: foot - 4 }, palette.inkSoft, palette.paper);
+}
+
+/** What it is and which way is better, where the curve leaves room for it. */
+function name(context: Context, strip: Strip, { page, size, palette }: PlaceMarksProps): void {
+  const room = Math.min(page.right, size.width) - Math.max(page.left, 0) - 12;
+  const { name: what, better } = strip.curve;
+  const whole = `${what} – ${better} is better`;
+  const text = textWidth(whole, SMALL) < room ? whole : shortened(what, SMALL, room);
+  if (text === null) return;
+  const at = nameSpot(strip, page, size.width, { width: textWidth(text, SMALL), height: 12 });
+  context.font = SMALL;
+  context.textBaseline = 'middle';
+  context.textAlign = 'left';
+  writeOn(context, text, { x: at.left, y: at.top + 6 }, palette.ink, palette.paper);
+}
+
+function hatch(context: Context, { left, right }: Band, page: PlacePage, palette: Palette): void {
+  const [top, foot] = [headOf(page), footOf(page)];
+  context.save();
+  context.beginPath();
+  context.rect(left, top, right - left, foot - top);
+  context.clip();
+  context.beginPath();
+  context.strokeStyle = palette.bad;
+  context.globalAlpha = 0.45;
+  context.lineWidth = 1;
+  for (let x = left - (foot - top); x < right; x += 8) {
+    context.moveTo(x, foot);
+    context.lineTo(x + (foot - top), top);
+  }
+  context.stroke();
+  context.restore();
+}
+
+/** A dashed line through all strips, and a ring on each curve. */
+function today(context: Context, { page, palette }: PlaceMarksProps): void {
+  if (page.today === null) return;
+  context.save();
+  context.setLineDash([3, 3]);
+  context.strokeStyle = palette.inkSoft;
+  context.lineWidth = 1.2;
+  across(context, { x: page.today, y: headOf(page) }, { x: page.today, y: footOf(page) + 3 });
+  context.restore();
+  for (const strip of page.strips) {
+    if (strip.today === null) continue;
+    context.beginPath();
+    context.arc(page.today, strip.today, 4.5, 0, 2 * Math.PI, false);
+    context.strokeStyle = palette.ink;
+    context.lineWidth = 1.5;
+    context.stroke();
+  }
+}
+
+function reading(context: Context, { page, read, palette, size }: PlaceMarksProps): void {
+  if (!read) return;
+  const x = page.stations[read.index]!;
+  context.strokeStyle = palette.brass;
+  context.lineWidth = 1.5;
+  across(context, { x, y: headOf(page) - 2 }, { x, y: footOf(page) + 4 });
+  page.strips.forEach(({ heights, top, foot }, i) => {
+    const y = heights[read.index] ?? null;
+    if (y !== null) dot(context, { x, y }, 4, palette.brass, palette);
+    const text = read.values[i]!;
+    const width = textWidth(text, fontOf(12, 600));
+    const left = x + 9 + width < size.width ? x + 9 : x - 9 - width;
+    context.font = fontOf(12, 600);
+    context.textBaseline = 'middle';
+    context.textAlign = 'left';
+    const at = Math.min(Math.max(y ?? (top + foot) / 2, top + 7), foot - 6);
+    writeOn(context, text, { x: left, y: at }, palette.ink, palette.paper);
+  });
+}
+
+function line(context: Context, words: string, { page, size, palette }: PlaceMarksProps): void {
+  context.font = TEXT;
+  context.textBaseline = 'middle';
+  context.textAlign = 'left';
+  const x = Math.max(6, Math.min(page.left, size.width - textWidth(words, TEXT) - 8));
+  const text = shortened(words, TEXT, size.width - 12) ?? '';
+  writeOn(context, text, { x, y: WORDS_Y }, palette.ink, palette.paper);
+}
+
+const APART = 16;
+
+/** What dots, ring and hatching stand for. */
+function legend(context: Context, props: PlaceMarksProps): void {
+  const { page, palette } = props;
+  context.font = TEXT;
+  context.textBaseline = 'middle';
+  context.textAlign = 'left';
+  let x = Math.max(6, page.left);
+  const entry = (text: string, sample: (at: ScreenPoint) => void) => {
+    sample({ x: x + 5, y: WORDS_Y });
+    writeOn(context, text, { x: x + 14, y: WORDS_Y }, palette.inkSoft, palette.paper);
+    x += 14 + textWidth(text, TEXT) + APART;
+  };
+  entry('nothing beats it', (at) => dot(context, at, 3.2, palette.good, palette));
+  if (page.today !== null) {
+    entry('today', ({ x: left, y }) => {
+      context.beginPath();
+      context.arc(left, y, 4.5, 0, 2 * Math.PI, false);
+      context.strokeStyle = palette.ink;
+      context.lineWidth = 1.5;
+      context.stroke();
+    });
+  }
+  if (page.struck.length > 0) {
+    entry('propeller would strike', ({ x: left, y }) => {
+      context.strokeStyle = palette.bad;
+      context.lineWidth = 1;
+      for (let i = -6; i <= 2; i += 4)
+        across(context, { x: left + i, y: y + 5 }, { x: left + i + 6, y: y - 5 });
+    });
+  }
+}

@@ -1,0 +1,251 @@
+/**
+ * A placement study on the station scale of the side view: one strip for each curve, one below the other, each with its name and a
+ * scale of its own; bands where the propeller would strike something; where the thruster is today and where it is best. px.
+ */
+import { formatNumber } from '../units/format.ts';
+import { type Quantity, unitOf } from '../units/units.ts';
+import type { UnitSystem } from './subject.ts';
+import type { ScreenPoint, View } from './view.ts';
+
+/** A station as far as it is drawn. Each figure is null where there is none. */
+export interface StudySpot {
+  /** m */
+  readonly station: number;
+  /** Dead ballast and all wire, kg. */
+  readonly ballast: number | null;
+  readonly wire: number;
+  /** s */
+  readonly timeTo90: number | null;
+  /** m/s */
+  readonly gustHeld: number | null;
+  /** Thrust per watt against free stream. */
+  readonly perWatt: number | null;
+  /** m */
+  readonly radius: number | null;
+  /** rad, + nose-up. */
+  readonly cruisePitch: number | null;
+  /** Of no plan. */
+  readonly why: string;
+  /** What the propeller would strike there. */
+  readonly cautions: readonly string[];
+  readonly best: boolean;
+}
+
+export interface StudyToDraw {
+  /** Nose to tail. */
+  readonly points: readonly StudySpot[];
+  readonly today: StudySpot | null;
+  readonly complete: boolean;
+}
+
+export interface Curve {
+  readonly name: string;
+  readonly quantity: Quantity;
+  /** Which way is better. */
+  readonly better: 'less' | 'more';
+  value(spot: StudySpot): number | null;
+}
+
+export const CURVES: readonly Curve[] = [
+  {
+    name: 'Lead and wire',
+    quantity: 'mass',
+    better: 'less',
+    value: ({ ballast, wire }) => (ballast === null ? null : ballast + wire),
+  },
+  { name: 'Time to 90°', quantity: 'time', better: 'less', value: ({ timeTo90 }) => timeTo90 },
+  { name: 'Side gust held', quantity: 'speed', better: 'more', value: ({ gustHeld }) => gustHeld },
+  { name: 'Thrust per watt', quantity: 'ratio', better: 'more', value: ({ perWatt }) => perWatt },
+];
+
+export interface Band {
+  readonly left: number;
+  readonly right: number;
+}
+
+export interface Strip {
+  readonly curve: Curve;
+  readonly top: number;
+  readonly foot: number;
+  /** Numbers at the top and the foot of its scale, the top one with the unit. */
+  readonly high: string;
+  readonly low: string;
+  /** One run of points for each stretch without a gap. */
+  readonly runs: readonly (readonly ScreenPoint[])[];
+  /** Height at each station of the study; null where there is no figure. */
+  readonly heights: readonly (number | null)[];
+  readonly today: number | null;
+}
+
+export interface PlacePage {
+  readonly strips: readonly Strip[];
+  /** x of each station of the study. */
+  readonly stations: readonly number[];
+  /** Indices of the stations that nothing beats. */
+  readonly best: readonly number[];
+  readonly today: number | null;
+  /** Where the propeller would strike. */
+  readonly struck: readonly Band[];
+  /** The stretch not worked out yet. */
+  readonly waiting: Band | null;
+  readonly left: number;
+  readonly right: number;
+}
+
+export interface StripRoom {
+  readonly top: number;
+  readonly foot: number;
+}
+
+type Scale = Pick<View, 'scale' | 'originX'>;
+
+const xOf = ({ scale, originX }: Scale, station: number): number => originX + station * scale;
+
+/** Between strips, so that a curve at the foot of one and at the top of the next stay apart. */
+const GAP = 6;
+
+/** `length`: of the hull, m. */
+export function layPlace(
+  { points, today, complete }: StudyToDraw,
+  view: Scale,
+  length: number,
+  { top, foot }: StripRoom,
+  units: UnitSystem,
+): PlacePage {
+  const stations = points.map(({ station }) => xOf(view, station));
+  const high = (foot - top + GAP) / CURVES.length;
+  const strips = CURVES.map((curve, i) =>
+    stripOf(curve, points, today, stations, { top: top + i * high, foot: top + (i + 1) * high - GAP }, units),
+  );
+  const [left, right] = [xOf(view, 0), xOf(view, length)];
+  return {
+    strips,
+    stations,
+    best: points.flatMap(({ best }, i) => (best ? [i] : [])),
+    today: today && xOf(view, today.station),
+    struck: struckBands(points, stations),
+    waiting: complete ? null : { left: stations.at(-1) ?? left, right },
+    left,
+    right,
+  };
+}
+
+function stripOf(
+  curve: Curve,
+  points: readonly StudySpot[],
+  today: StudySpot | null,
+  stations: readonly number[],
+  { top, foot }: StripRoom,
+  units: UnitSystem,
+): Strip {
+  const values = points.map(curve.value);
+  const now = today && curve.value(today);
+  const scale = scaleOf(
+    [...values, now].filter((value) => value !== null),
+    curve.quantity,
+    units,
+  );
+  const height = (value: number | null): number | null =>
+    value === null ? null : foot - ((foot - top) * (value - scale.low)) / (scale.high - scale.low);
+  const heights = values.map(height);
+  return {
+    curve,
+    top,
+    foot,
+    high: scale.labels.high,
+    low: scale.labels.low,
+    runs: runsOf(stations, heights),
+    heights,
+    today: height(now),
+  };
+}
+
+export interface StripScale {
+  readonly low: number;
+  readonly high: number;
+  readonly labels: { readonly low: string; readonly high: string };
+}
+
+/** A scale that begins at nought is read at a glance; values that lie close together far from it would then look alike. */
+const FROM_NOUGHT = 0.6;
+/** Of a scale, in last digits usually shown: less would make mountains of rounding. */
+const LEAST_SPAN = 10;
+
+/** Round numbers that hold all the values, SI with labels in the builder's unit. */
+export function scaleOf(values: readonly number[], quantity: Quantity, units: UnitSystem): StripScale {
+  const unit = unitOf(quantity, units);
+  if (values.length === 0) return { low: 0, high: 1, labels: { low: '', high: unit.symbol } };
+  const shown = values.map((value) => unit.toDisplay(value));
+  const [least, most] = [Math.min(...shown), Math.max(...shown)];
+  const from = least >= 0 && least < FROM_NOUGHT * most ? 0 : least;
+  const step = roundUp(Math.max(most - from, LEAST_SPAN * 10 ** -unit.digits) / 2);
+  const low = Math.floor(from / step + 1e-9) * step;
+  const high = Math.max(Math.ceil(most / step - 1e-9) * step, low + step);
+  const decimals = Math.max(0, -Math.floor(Math.log10(step) + 1e-9));
+  const number = (value: number) => formatNumber(value, decimals);
+  return {
+    low: unit.fromDisplay(low),
+    high: unit.fromDisplay(high),
+    labels: { low: number(low), high: `${number(high)}${unit.symbol && ` ${unit.symbol}`}` },
+  };
+}
+
+function roundUp(least: number): number {
+  const power = 10 ** Math.floor(Math.log10(least));
+  return power * ([1, 2, 5, 10].find((n) => n * power >= least * (1 - 1e-9)) ?? 10);
+}
+
+function runsOf(stations: readonly number[], heights: readonly (number | null)[]): ScreenPoint[][] {
+  const runs: ScreenPoint[][] = [];
+  heights.forEach((y, i) => {
+    if (y === null) return;
+    const at = { x: stations[i]!, y };
+    if (i > 0 && heights[i - 1] !== null) runs.at(-1)!.push(at);
+    else runs.push([at]);
+  });
+  return runs;
+}
+
+/** Each station stands for the stretch half-way to its neighbours. */
+function struckBands(points: readonly StudySpot[], stations: readonly number[]): Band[] {
+  const bands: { left: number; right: number }[] = [];
+  points.forEach(({ cautions }, i) => {
+    if (cautions.length === 0) return;
+    const x = stations[i]!;
+    const [before, after] = [stations[i - 1] ?? x, stations[i + 1] ?? x];
+    const last = bands.at(-1);
+    if (last && points[i - 1]!.cautions.length > 0) last.right = (x + after) / 2;
+    else bands.push({ left: (before + x) / 2, right: (x + after) / 2 });
+  });
+  return bands;
+}
+
+interface Extent {
+  readonly width: number;
+  readonly height: number;
+}
+
+/** Where in its strip a name hides least of the curve: at either end or in the middle, above or below. */
+export function nameSpot(
+  { heights, top, foot }: Strip,
+  { stations, left, right }: PlacePage,
+  pane: number,
+  { width, height }: Extent,
+): { readonly left: number; readonly top: number } {
+  const [from, to] = [Math.max(left, 0) + 4, Math.min(right, pane) - 4 - width];
+  const spots = [from, to, (from + to) / 2].flatMap((x) =>
+    [top, foot - height].map((y) => ({ left: x, top: y })),
+  );
+  const hidden = (spot: { left: number; top: number }): number =>
+    heights.filter((y, i) => {
+      const x = stations[i]!;
+      return (
+        y !== null &&
+        x > spot.left - 4 &&
+        x < spot.left + width + 4 &&
+        y > spot.top - 3 &&
+        y < spot.top + height + 3
+      );
+    }).length;
+  return spots.reduce((best, spot) => (hidden(spot) < hidden(best) ? spot : best));
+}
