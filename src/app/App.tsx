@@ -2,6 +2,7 @@
 import { useEffect, useState } from 'react';
 import { EditorContext } from '../panels/editor.ts';
 import { PlanningContext } from '../panels/plan/planning.ts';
+import { TurningContext } from '../panels/turn/turning.ts';
 import { CommandBar } from './CommandBar.tsx';
 import { useCell } from './cell.ts';
 import { openFile } from './commands.ts';
@@ -12,11 +13,13 @@ import type { Store } from './store.ts';
 import { usePalette } from './theme.ts';
 import { useEditorOf } from './useEditorOf.ts';
 import { usePlanningOf } from './usePlanningOf.ts';
+import { useTurningOf } from './useTurningOf.ts';
 import { Workspace } from './Workspace.tsx';
 
 export function App({ store }: { store: Store }) {
   const editor = useEditorOf(store);
   const planning = usePlanningOf(store);
+  const turning = useTurningOf(store);
   const palette = usePalette(useCell(store.settings).theme);
   const over = useDrops(store);
   useEffect(() => takePastes(store.table.set), [store]);
@@ -28,7 +31,9 @@ export function App({ store }: { store: Store }) {
     <EditorContext value={editor}>
       <CommandBar store={store} />
       <PlanningContext value={planning}>
-        <Workspace store={store} editor={editor} palette={palette} />
+        <TurningContext value={turning}>
+          <Workspace store={store} editor={editor} palette={palette} />
+        </TurningContext>
       </PlanningContext>
       <Dialogs store={store} />
       {over && (
