@@ -1,0 +1,3 @@
+/** What a placement study is, for the layers that show it and do not see the physics. */
+export type { PlacedPoint, PlacementStudy, StudyProgress } from '../../physics/placing/study.ts';
+export type { TurnAsked } from '../../physics/turning/turn.ts';
