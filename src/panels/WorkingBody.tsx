@@ -7,16 +7,21 @@ import { RowList } from './RowList.tsx';
 
 interface WorkingBodyProps {
   readonly working: Working;
-  /** Goes to the working of a figure that went in. Without it they are only shown. */
+  /** The figures there are to go to, by key, and how. Without them those that went in are only shown. */
+  readonly rows?: Readonly<Record<string, Row>>;
   readonly onJump?: (key: string) => void;
 }
 
-export function WorkingBody({ working: { formula, inputs, source }, onJump }: WorkingBodyProps) {
+export function WorkingBody({ working: { formula, inputs, source }, rows = {}, onJump }: WorkingBodyProps) {
   const { units } = useEditor();
   return (
     <>
       <p className="formula">{formula}</p>
-      {onJump ? <JumpList inputs={inputs} onJump={onJump} /> : <RowList rows={inputs} units={units} />}
+      {onJump ? (
+        <JumpList inputs={inputs} rows={rows} onJump={onJump} />
+      ) : (
+        <RowList rows={inputs} units={units} />
+      )}
       <p className="source">
         <strong>Source:</strong> {source}
       </p>
@@ -24,25 +29,37 @@ export function WorkingBody({ working: { formula, inputs, source }, onJump }: Wo
   );
 }
 
-function JumpList({ inputs, onJump }: { inputs: readonly Row[]; onJump: (key: string) => void }) {
-  const { assessment, units } = useEditor();
-  const keys = new Map(Object.entries(assessment.rows).map(([key, row]) => [row, key]));
-  if (inputs.length === 0) return null;
+interface JumpListProps {
+  readonly inputs: readonly Row[];
+  readonly rows: Readonly<Record<string, Row>>;
+  onJump(key: string): void;
+}
+
+function JumpList({ inputs, rows, onJump }: JumpListProps) {
+  const { units } = useEditor();
+  const keys = new Map(Object.entries(rows).map(([key, row]) => [row, key]));
+  const there = inputs.filter((row) => keys.has(row));
+  const elsewhere = inputs.filter((row) => !keys.has(row));
   return (
-    <ul className="figures">
-      {inputs.map((row) => (
-        <li key={row.label}>
-          <button
-            type="button"
-            className="figure-face"
-            title="Go to this figure"
-            onClick={() => onJump(keys.get(row)!)}
-          >
-            <span className="figure-label">{row.label}</span>{' '}
-            <span className="number">{rowText(row, units)}</span>
-          </button>
-        </li>
-      ))}
-    </ul>
+    <>
+      {elsewhere.length > 0 && <RowList rows={elsewhere} units={units} />}
+      {there.length > 0 && (
+        <ul className="figures">
+          {there.map((row) => (
+            <li key={row.label}>
+              <button
+                type="button"
+                className="figure-face"
+                title="Go to this figure"
+                onClick={() => onJump(keys.get(row)!)}
+              >
+                <span className="figure-label">{row.label}</span>{' '}
+                <span className="number">{rowText(row, units)}</span>
+              </button>
+            </li>
+          ))}
+        </ul>
+      )}
+    </>
   );
 }

@@ -1,0 +1,17 @@
+/** The builder's choices as the report takes them. */
+import { type Craft, listed } from '../../craft/craft.ts';
+import type { Part } from '../../craft/schema.ts';
+import type { Vectoring } from '../../craft/thrustSchema.ts';
+import type { TurningState } from './turning.ts';
+
+/** The thruster by whose arrow one steers: the one turned last, else the first that turns in yaw; null when none does. */
+export function steeringPart(craft: Craft, { turned }: Pick<TurningState, 'turned'>): Part | null {
+  const able = listed(craft.parts).filter(({ thruster }) => thruster && turns(thruster.yaw));
+  return able.find(({ id }) => id === turned) ?? able[0] ?? null;
+}
+
+const turns = ({ least, most }: Vectoring): boolean => most > least;
+
+/** rad; null for hardest to starboard. */
+export const vectorAsked = (craft: Craft, turning: TurningState): number | null =>
+  turning.steering === 'set' ? (steeringPart(craft, turning)?.thruster?.yaw.set ?? null) : null;
