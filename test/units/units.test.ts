@@ -69,6 +69,11 @@ test('derived units: 1 g 1 m aft is 1 g·m; 1 rad/kg is 0.0573 °/g; 29.92 inHg 
   expect(unitOf('pressure', 'imperial').fromDisplay(29.92)).toBeCloseTo(101320.76, 2);
 });
 
+test('a mechanical horsepower is 745.69987 W (NIST SP 811, appendix B.8: 550 ft·lbf/s)', () => {
+  const horsepower = typedUnitsOf('power').find(({ symbol }) => symbol === 'hp');
+  expect(horsepower?.fromDisplay(1)).toBeCloseTo(745.69987, 5);
+});
+
 test('files and JSON are SI: kg, m, rad, K, Pa, m³', () => {
   const wanted = {
     mass: 'kg',

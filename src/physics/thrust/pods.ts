@@ -35,10 +35,14 @@ export const podAreas = ({ craft, hull, pieces }: CraftState): Pod[] =>
     return [{ part: part.id, area, at: meanOf(outside), reckoned: part.dragArea === null }];
   });
 
-const dragAreaOf = ({ dragArea, kind, size }: Part): number =>
-  dragArea ?? (RECKONED.has(kind) ? BOX_DRAG * size.width * size.height : 0);
+const dragAreaOf = (part: Part): number => part.dragArea ?? reckonedArea(part);
 
-const isInside = (hull: Hull, at: Vec3): boolean => distanceFromAxis(at) < hull.radius(at[0], clockOf(at));
+/** Of one piece outside the hull, m². */
+export const reckonedArea = ({ kind, size }: Pick<Part, 'kind' | 'size'>): number =>
+  RECKONED.has(kind) ? BOX_DRAG * size.width * size.height : 0;
+
+export const isInside = (hull: Hull, at: Vec3): boolean =>
+  distanceFromAxis(at) < hull.radius(at[0], clockOf(at));
 
 const meanOf = (points: readonly Vec3[]): Vec3 => {
   const mean = (i: 0 | 1 | 2) => points.reduce((sum, point) => sum + point[i], 0) / points.length;

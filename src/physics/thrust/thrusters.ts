@@ -1,11 +1,14 @@
 /**
  * The thrusters of a craft, one for each piece, with what each can do.
  *
- *   pitch speed  V_p = n · p:  n = ω/(2π · gear ratio) propeller turns a second, p the pitch
- *   thrust  T = share · T₀ · (1 − V/V_p) between rest and the pitch speed, V the advance along the thruster's own axis;
- *   T₀ when it is pushed backwards, nil above the pitch speed; backwards the same with the reverse share of T₀.
+ *   pitch speed  V_p = n · p:  n = ω/(2π · gear ratio) propeller turns a second at full throttle, p the pitch
+ *   thrust  T = T₀ (s − √s V/V_p), between s T₀ (at rest, and when pushed backwards) and nil (from √s V_p on)
  *
- * A straight line from static thrust to the pitch speed: common practice, no source.
+ * T₀ static thrust at full throttle, N; s throttle: the share of T₀ it would give at rest, negative for backwards, when V
+ * counts the other way; V the advance along the thruster's own axis, m/s. At full throttle a straight line from static
+ * thrust to the pitch speed (common practice, no source); at part throttle the same propeller turning √s as fast, its
+ * static thrust going with the square of its speed and its pitch speed with the speed. A propeller that the air drives
+ * (beyond √s V_p) is taken to have no drag.
  */
 import { listed } from '../../craft/craft.ts';
 import type { PitchSpeed, Thrust, Vectoring } from '../../craft/thrustSchema.ts';
@@ -26,6 +29,8 @@ export interface Thruster {
   readonly pitchSpeed: number;
   /** m */
   readonly diameter: number;
+  /** Ideal over shaft power at rest, where known. */
+  readonly figureOfMerit: number | null;
   /** Greatest thrust backwards as a share of that forwards. */
   readonly reverse: number;
   readonly yaw: Vectoring;
@@ -47,6 +52,7 @@ export function thrustersOf({ craft, pieces, air }: CraftState): Thruster[] {
       staticThrust,
       pitchSpeed: pitchSpeedOf(thruster.pitchSpeed),
       diameter: thruster.diameter,
+      figureOfMerit: thruster.thrust.kind === 'power' ? thruster.thrust.figureOfMerit : null,
       reverse: thruster.reverse,
       yaw: thruster.yaw,
       pitch: thruster.pitch,
@@ -57,7 +63,8 @@ export function thrustersOf({ craft, pieces, air }: CraftState): Thruster[] {
 
 const sideOf = ([, y]: Vec3): -1 | 0 | 1 => (y < 0 ? 1 : y > 0 ? -1 : 0);
 
-const staticThrustOfData = (thrust: Thrust, diameter: number, density: number): number =>
+/** N, at full throttle, in air of that density, kg/m³. */
+export const staticThrustOfData = (thrust: Thrust, diameter: number, density: number): number =>
   thrust.kind === 'measured'
     ? thrust.staticThrust
     : staticThrustOf(thrust.shaftPower, thrust.figureOfMerit, diameter, density);
@@ -68,7 +75,8 @@ export const pitchSpeedOf = (given: PitchSpeed): number =>
 
 /** Thrust along the thruster's axis, N, + forward. `share` of full throttle, −reverse … 1; `advance` along its axis, m/s. */
 export function thrustAt({ staticThrust, pitchSpeed }: Thruster, share: number, advance: number): number {
-  const along = share < 0 ? -advance : advance;
-  const left = 1 - Math.min(Math.max(along / pitchSpeed, 0), 1);
-  return share * staticThrust * left;
+  const size = Math.abs(share);
+  const along = Math.max(share < 0 ? -advance : advance, 0);
+  const thrust = staticThrust * Math.max(size - Math.sqrt(size) * (along / pitchSpeed), 0);
+  return share < 0 ? -thrust : thrust;
 }
