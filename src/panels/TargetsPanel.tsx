@@ -35,7 +35,7 @@ export function TargetsPanel() {
 function TargetFields() {
   const { craft, units } = useEditor();
   const commit = useCommit();
-  const { heaviness, pitchTolerance, heelTolerance, leastPendulumDepth } = craft.targets;
+  const { heaviness, pitchTolerance, heelTolerance, leastPendulumDepth, turnTime, sideGust } = craft.targets;
   const set = (field: string, change: Partial<Targets>, run?: string) =>
     commit(setTargets(field, change), run);
   return (
@@ -53,7 +53,12 @@ function TargetFields() {
         value={heaviness.most}
         quantity="mass"
         units={units}
-        onCommit={(most, run) => set('greatest heaviness', { heaviness: { ...heaviness, most } }, run)}
+        // The gate would name the least as the one at fault.
+        onCommit={(most, run) =>
+          most < heaviness.least
+            ? { path: '', found: String(most), allowed: `at least ${heaviness.least}` }
+            : set('greatest heaviness', { heaviness: { ...heaviness, most } }, run)
+        }
       />
       <QuantityField
         label="Pitch tolerance"
@@ -78,6 +83,26 @@ function TargetFields() {
         units={units}
         hint="CB above CG"
         onCommit={(next, run) => set('least pendulum depth', { leastPendulumDepth: next }, run)}
+      />
+      <QuantityField
+        label="First 90° within"
+        value={turnTime}
+        quantity="time"
+        units={units}
+        empty="not asked for"
+        hint="Of yaw, from rest"
+        onCommit={(next, run) => set('time for the first 90°', { turnTime: next }, run)}
+        onClear={() => set('time for the first 90°', { turnTime: null })}
+      />
+      <QuantityField
+        label="Side gust to hold"
+        value={sideGust}
+        quantity="speed"
+        units={units}
+        empty="not asked for"
+        hint="In cruise"
+        onCommit={(next, run) => set('side gust', { sideGust: next }, run)}
+        onClear={() => set('side gust', { sideGust: null })}
       />
     </>
   );

@@ -1,4 +1,5 @@
 import { expect, test } from 'vitest';
+import { firstThruster } from '../../src/craft/firstFigures.ts';
 import { PART_KINDS } from '../../src/craft/schema.ts';
 import { apparentSize, frontFigure, LEAST_PX, sideFigure } from '../../src/scene/figure.ts';
 import { keelAt } from '../../src/scene/outline.ts';
@@ -72,4 +73,23 @@ test('three fins at 120° are seen under their clock angles, two on one side of 
   const tips = fins.map(({ box }) => Math.max(Math.abs(box.top), Math.abs(box.bottom)));
   expect(tips[1]! / tips[0]!).toBeCloseTo(0.5, 6);
   expect(fins.map(({ far }) => far)).toEqual([false, true, false]);
+});
+
+test('a thruster is drawn as wide as its propeller, a fin as large as its outline, whatever their boxes', () => {
+  const box = { length: 0.1, width: 0.05, height: 0.05 };
+  const place = { kind: 'axis', station: 1 } as const;
+  const propeller = part('a', place, {
+    kind: 'thruster',
+    size: box,
+    thruster: { ...firstThruster(box), diameter: 0.3 },
+  });
+  const [side, front] = [sideFigure, frontFigure].map((make) => figuresOf([propeller], make)[0]!.box);
+  expect(side!.top - side!.bottom).toBeCloseTo(0.3, 9);
+  expect(side!.right - side!.left).toBeCloseTo(0.1, 9);
+  expect(front!.right - front!.left).toBeCloseTo(0.3, 9);
+  // 0.06 m² at an aspect ratio of 1.5: 0.3 m out, 0.2 m along.
+  const fin = part('b', place, { kind: 'fin', size: box, fin: { area: 0.06, aspectRatio: 1.5 } });
+  const [outline] = figuresOf([fin]);
+  expect(outline!.box.top - outline!.box.bottom).toBeCloseTo(0.3, 9);
+  expect(outline!.box.right - outline!.box.left).toBeCloseTo(0.2, 9);
 });

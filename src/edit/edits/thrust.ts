@@ -36,13 +36,18 @@ export const setThruster = (part: PartCalled, field: string, change: Partial<Thr
   step(`Change ${field} of ${calledPart(part)}`, (craft) => {
     const { thruster, size } = craft.parts.byId[part.id]!;
     if (!thruster) return;
+    const before = { yaw: thruster.yaw, pitch: thruster.pitch };
     if (change.diameter !== undefined) resize(size, thruster.diameter, change.diameter);
     Object.assign(thruster, change);
     for (const way of ['yaw', 'pitch'] as const) {
-      const set = held(thruster[way].set, thruster[way]);
-      if (change[way] && set !== thruster[way].set) thruster[way] = { ...thruster[way], set };
+      const next = change[way];
+      if (next) thruster[way] = withinLimits(before[way], next);
     }
   });
+
+/** An angle set out of limits that stay is left for the gate to refuse. */
+const withinLimits = (before: Vectoring, next: Vectoring): Vectoring =>
+  next.least === before.least && next.most === before.most ? next : { ...next, set: held(next.set, next) };
 
 function resize(size: Part['size'], from: number, to: number): void {
   if (size.width === from) size.width = to;

@@ -2,7 +2,7 @@
 import type { KeyboardEvent } from 'react';
 import type { Problem } from '../../craft/problem.ts';
 import { type Quantity, type UnitSystem, unitOf } from '../../units/units.ts';
-import { entryText, problemSentence, readEntry, stepped } from './entry.ts';
+import { entryText, problemSentence, readEntry, readOptional, stepped } from './entry.ts';
 import { FieldFrame } from './FieldFrame.tsx';
 import { useBurst } from './useBurst.ts';
 import { type Leave, useDraft } from './useDraft.ts';
@@ -15,6 +15,10 @@ export interface QuantityFieldProps {
   readonly units: UnitSystem;
   /** `run`: the burst of arrow keys it belongs to. */
   onCommit(value: number, run?: string): Problem | null;
+  /** Takes the value away when the field is emptied. Without it something has to stand there. */
+  onClear?: (() => Problem | null) | undefined;
+  /** What stands there, faintly, while there is no value. */
+  readonly empty?: string | undefined;
   /** Not kept as typed but worked out from what is: shown as figures are. */
   readonly derived?: boolean | undefined;
   readonly bare?: boolean | undefined;
@@ -26,18 +30,20 @@ export interface QuantityFieldProps {
 }
 
 export function QuantityField(props: QuantityFieldProps) {
-  const { label, value, quantity, units, onCommit, startWith, onLeave } = props;
+  const { label, value, quantity, units, onCommit, onClear, startWith, onLeave } = props;
   const burst = useBurst();
-  const commit = (next: number, text: string, stepped?: boolean): string | null => {
-    if (next === value) return null;
-    const problem = stepped ? onCommit(next, burst.run()) : onCommit(next);
-    return problem && problemSentence(label, text, problem, quantity, units);
+  const hand = (next: number | null, stepped?: boolean): Problem | null => {
+    if (next === null) return onClear?.() ?? null;
+    return stepped ? onCommit(next, burst.run()) : onCommit(next);
   };
-  const draft = useDraft({
+  const draft = useDraft<number | null>({
     label,
     shown: value === null ? '' : entryText(value, quantity, units, props.derived ? 0 : 2),
-    read: (text) => readEntry(text, quantity, units),
-    commit,
+    read: (text) => (onClear ? readOptional : readEntry)(text, quantity, units),
+    commit: (next, text, stepped) => {
+      const problem = next === value ? null : hand(next, stepped);
+      return problem && problemSentence(label, text, problem, quantity, units);
+    },
     startWith,
     onLeave,
   });
@@ -68,6 +74,7 @@ export function QuantityField(props: QuantityFieldProps) {
           autoComplete="off"
           className="number"
           value={draft.text}
+          placeholder={props.empty}
           disabled={props.disabled}
           // biome-ignore lint/a11y/noAutofocus: only where the builder just opened this cell to type
           autoFocus={props.autoFocus}

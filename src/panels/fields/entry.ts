@@ -23,6 +23,10 @@ export function readEntry(text: string, quantity: Quantity, units: UnitSystem): 
   return { ok: true, value: Number(parsed.value.toPrecision(15)) };
 }
 
+/** The same where there need be no value: null for nothing typed. */
+export const readOptional = (text: string, quantity: Quantity, units: UnitSystem): Read<number | null> =>
+  text.trim() === '' ? { ok: true, value: null } : readEntry(text, quantity, units);
+
 /** A whole number as typed. */
 export function readCount(text: string): Read<number> {
   const plain = text.trim();
@@ -46,15 +50,26 @@ export function stepped(si: number, steps: number, quantity: Quantity, units: Un
   return quantity === 'angle' ? next : Number(next.toPrecision(15));
 }
 
-const BOUND = /^(at least|at most|more than|less than) (-?[\d.]+(?:e[+-]?\d+)?)$/;
+const NUMBER = String.raw`(-?[\d.]+(?:e[+-]?\d+)?)`;
+const BOUND = new RegExp(`^(at least|at most|more than|less than) ${NUMBER}$`);
+/** Another field is the bound: "at most targets.heaviness.most (0.02 kg)". */
+const FIELD_BOUND = new RegExp(`^(at least|at most) \\S+ \\(${NUMBER} \\S+\\)$`);
+const RANGE = new RegExp(`^(an? \\w+ from) ${NUMBER} to ${NUMBER} \\S+$`);
 
 /** What the gate allows, its bounds put in the unit the builder reads. */
 export function allowedText(allowed: string, quantity: Quantity | null, units: UnitSystem): string {
-  const bound = BOUND.exec(allowed);
-  if (!bound || !quantity) return allowed;
+  if (!quantity) return allowed;
+  const shown = (si: string | undefined) => boundText(Number(si), quantity, units);
+  const range = RANGE.exec(allowed);
+  if (range) return `${range[1]} ${shown(range[2])} to ${shown(range[3])}`;
+  const bound = BOUND.exec(allowed) ?? FIELD_BOUND.exec(allowed);
+  return bound ? `${bound[1]} ${shown(bound[2])}` : allowed;
+}
+
+function boundText(si: number, quantity: Quantity, units: UnitSystem): string {
   const { symbol } = unitOf(quantity, units);
-  const number = formatEntry(Number(bound[2]), quantity, units);
-  return `${bound[1]} ${number}${symbol === '°' || symbol === '' ? symbol : ` ${symbol}`}`;
+  const number = formatEntry(si, quantity, units);
+  return `${number}${symbol === '°' || symbol === '' ? symbol : ` ${symbol}`}`;
 }
 
 /** One sentence on what the gate refused: names the field, what was typed, what is allowed. */

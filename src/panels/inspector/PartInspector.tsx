@@ -15,8 +15,12 @@ import { TextField } from '../fields/TextField.tsx';
 import { PartSlideFields } from '../plan/PartSlideFields.tsx';
 import { PART_CHOICES, SOURCE_CHOICES } from '../words.ts';
 import { CopiesField } from './CopiesField.tsx';
+import { DragAreaField } from './DragAreaField.tsx';
 import { FactList } from './FactList.tsx';
+import { FinFields } from './FinFields.tsx';
 import { PlaceFields } from './PlaceFields.tsx';
+import { ThrustFields } from './ThrustFields.tsx';
+import './inspector.css';
 
 export function PartInspector({ part }: { part: Part }) {
   const { assessment, units } = useEditor();
@@ -65,6 +69,9 @@ export function PartInspector({ part }: { part: Part }) {
       />
       <CopiesField copies={part.copies} onCommit={(copies) => set('copies', { copies })} />
       <SizeFields part={part} />
+      {(part.kind === 'thruster' || part.thruster) && <ThrustFields part={part} />}
+      {(part.kind === 'fin' || part.fin) && <FinFields part={part} />}
+      <DragAreaField part={part} />
       {quantity(
         'CG offset',
         'cgOffset',

@@ -6,6 +6,7 @@ import {
   problemSentence,
   readCount,
   readEntry,
+  readOptional,
   stepped,
 } from '../../../src/panels/fields/entry.ts';
 
@@ -69,4 +70,20 @@ test('what the gate refuses is said with the field, what was typed and the bound
   );
   expect(allowedText('at most 6.283185307179586', 'angle', 'imperial')).toBe('at most 360°');
   expect(allowedText('one of a, b', 'mass', 'metric')).toBe('one of a, b');
+});
+
+test('a bound that is another field, and a range, come in the builder’s unit too', () => {
+  const most = 'at most parts[3].thruster.yaw.most (0.5235987755982988 rad)';
+  expect(allowedText(most, 'angle', 'metric')).toBe('at most 30°');
+  expect(allowedText('at most targets.heaviness.most (-0.005 kg)', 'mass', 'metric')).toBe('at most -5 g');
+  const range = `an angle from ${-Math.PI / 3} to ${Math.PI / 6} rad`;
+  expect(allowedText(range, 'angle', 'metric')).toBe('an angle from -60° to 30°');
+  expect(allowedText(range, null, 'metric')).toBe(range);
+});
+
+test('where there need be no value nothing is no value, and rubbish is still refused', () => {
+  expect(readOptional(' ', 'time', 'metric')).toEqual({ ok: true, value: null });
+  expect(readOptional('6', 'time', 'metric')).toEqual({ ok: true, value: 6 });
+  expect(readOptional('soon', 'time', 'metric').ok).toBe(false);
+  expect(readEntry(' ', 'time', 'metric').ok).toBe(false);
 });
