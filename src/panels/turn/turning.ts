@@ -12,13 +12,24 @@ export interface TurningState {
   readonly turned: string | null;
   /** Of the cruise it begins from, m/s; null for the steady speed at that throttle. */
   readonly speed: number | null;
+  /** The thruster that every station is tried for; null for the first. */
+  readonly tried: string | null;
+  /** A station of the study that the list points at, m. */
+  readonly marked: number | null;
 }
 
 export interface Turning extends TurningState {
   set(change: Partial<TurningState>): void;
 }
 
-export const FIRST_TURNING: TurningState = { throttle: 1, steering: 'limit', turned: null, speed: null };
+export const FIRST_TURNING: TurningState = {
+  throttle: 1,
+  steering: 'limit',
+  turned: null,
+  speed: null,
+  tried: null,
+  marked: null,
+};
 
 export const TurningContext = createContext<Turning | null>(null);
 

@@ -1,0 +1,166 @@
+/** The stations that nothing beats. One that is picked can be moved to; one that is pointed at is marked in the drawing. */
+import { useState } from 'react';
+import { moveAndHang, moveThruster } from '../../edit/edits/moveThruster.ts';
+import type { PlacedPoint } from '../../report/turning/studies.ts';
+import { formatNumber } from '../../units/format.ts';
+import { type Quantity, type UnitSystem, unitOf } from '../../units/units.ts';
+import { useEditor } from '../editor.ts';
+import { useStudying } from './studying.ts';
+import { useTurning } from './turning.ts';
+
+interface Column {
+  readonly head: string;
+  readonly quantity: Quantity;
+  value(point: PlacedPoint): number | null;
+}
+
+const COLUMNS: readonly Column[] = [
+  {
+    head: 'Lead, wire',
+    quantity: 'mass',
+    value: ({ ballast, wire }) => (ballast === null ? null : ballast + wire),
+  },
+  { head: '90° in', quantity: 'time', value: ({ timeTo90 }) => timeTo90 },
+  { head: 'Radius', quantity: 'length', value: ({ radius }) => radius },
+  { head: 'Gust', quantity: 'speed', value: ({ gustHeld }) => gustHeld },
+  { head: 'Per watt', quantity: 'ratio', value: ({ perWatt }) => perWatt },
+  { head: 'Pitch', quantity: 'angle', value: ({ cruisePitch }) => cruisePitch },
+];
+
+export function StudyTable({ fresh }: { fresh: boolean }) {
+  const { units } = useEditor();
+  const { points, busy } = useStudying();
+  const [picked, setPicked] = useState<number | null>(null);
+  const best = points.filter((point) => point.best);
+  if (best.length === 0) {
+    return (
+      <p>
+        {busy
+          ? 'None so far that can be flown.'
+          : 'No station has both a ballast plan and room for the propeller.'}
+      </p>
+    );
+  }
+  return (
+    <div className="plan-scroll">
+      <table className="study-table">
+        <caption>Nothing beats these{busy && ' so far'}</caption>
+        <thead>
+          <tr>
+            <th scope="col">
+              Station <small>{unitOf('length', units).symbol}</small>
+            </th>
+            {COLUMNS.map(({ head, quantity }) => (
+              <th scope="col" key={head}>
+                {head} <small>{unitOf(quantity, units).symbol}</small>
+              </th>
+            ))}
+          </tr>
+        </thead>
+        <tbody>
+          {best.map((point) => (
+            <StudyRow
+              key={point.station}
+              point={point}
+              open={point.station === picked}
+              fresh={fresh}
+              onPick={() => setPicked(point.station === picked ? null : point.station)}
+            />
+          ))}
+        </tbody>
+      </table>
+    </div>
+  );
+}
+
+interface StudyRowProps {
+  readonly point: PlacedPoint;
+  readonly open: boolean;
+  readonly fresh: boolean;
+  onPick(): void;
+}
+
+function StudyRow({ point, open, fresh, onPick }: StudyRowProps) {
+  const { units } = useEditor();
+  const { set } = useTurning();
+  const mark = () => set({ marked: point.station });
+  const unmark = () => set({ marked: null });
+  const at = bare(point.station, 'length', units);
+  return (
+    <>
+      <tr data-station={point.station} onPointerEnter={mark} onPointerLeave={unmark}>
+        <th scope="row">
+          <button
+            type="button"
+            className="small"
+            aria-expanded={open}
+            onClick={onPick}
+            onFocus={mark}
+            onBlur={unmark}
+          >
+            {at}
+          </button>
+        </th>
+        {COLUMNS.map(({ head, quantity, value }) => {
+          const figure = value(point);
+          return (
+            <td className="number" key={head}>
+              {figure === null ? '–' : bare(figure, quantity, units)}
+            </td>
+          );
+        })}
+      </tr>
+      {open && (
+        <tr className="kept-actions" onPointerEnter={mark} onPointerLeave={unmark}>
+          <td colSpan={COLUMNS.length + 1}>
+            <Actions point={point} at={at} fresh={fresh} />
+          </td>
+        </tr>
+      )}
+    </>
+  );
+}
+
+/** Without its unit, which stands in the head. */
+const bare = (si: number, quantity: Quantity, units: UnitSystem): string => {
+  const unit = unitOf(quantity, units);
+  return formatNumber(unit.toDisplay(si), unit.digits);
+};
+
+function Actions({ point, at, fresh }: { point: PlacedPoint; at: string; fresh: boolean }) {
+  const { craft, apply, dragging } = useEditor();
+  const { part } = useStudying();
+  const thruster = craft.parts.byId[part ?? ''];
+  if (!thruster) return null;
+  if (thruster.locked)
+    return <p className="aside">{thruster.name || 'It'} is locked. Unlock it to move it.</p>;
+  const { stowage } = point;
+  const ready = fresh && !dragging;
+  return (
+    <>
+      {point.cautions.map((caution) => (
+        <p className="row-why" key={caution}>
+          {caution}
+        </p>
+      ))}
+      <span className="plan-actions">
+        <button
+          type="button"
+          aria-disabled={!ready}
+          onClick={() => ready && apply(moveThruster(thruster, point.place))}
+        >
+          Move it there<span className="spoken">, to {at}</span>
+        </button>
+        {stowage && (
+          <button
+            type="button"
+            aria-disabled={!ready}
+            onClick={() => ready && apply(moveAndHang(thruster, point.place, stowage))}
+          >
+            Move it and hang the ballast<span className="spoken">, at {at}</span>
+          </button>
+        )}
+      </span>
+    </>
+  );
+}
