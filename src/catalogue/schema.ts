@@ -14,6 +14,7 @@ import {
   text,
 } from '../craft/quantities.ts';
 import { gasSchema, partSchema } from '../craft/schema.ts';
+import { finSchema, thrusterSchema } from '../craft/thrustSchema.ts';
 
 const source = z.string().min(1).max(600).meta({ description: 'Where the figures come from' });
 const note = text('What to mind when choosing it', 600);
@@ -63,6 +64,11 @@ export const conductorEntrySchema = z.strictObject({
   source,
 });
 
+/** Which way it points is for the craft to say. */
+const thrusterFiguresSchema = thrusterSchema
+  .omit({ yaw: true, pitch: true, differential: true })
+  .meta({ description: 'What it does as a thruster' });
+
 export const partEntrySchema = z.strictObject({
   id: id('Id of the entry'),
   name,
@@ -70,6 +76,8 @@ export const partEntrySchema = z.strictObject({
   mass: mass('Mass of one piece'),
   massTolerance: mass('Half-width of the band in which the mass of one piece lies'),
   size: partSchema.shape.size,
+  thruster: thrusterFiguresSchema.optional(),
+  fin: finSchema.optional(),
   note,
   source,
 });

@@ -22,16 +22,18 @@ const DIAMETER = 0.1;
 export function firstThruster({ width, height }: Pick<Box, 'width' | 'height'>): ThrusterData {
   const diameter = within(Math.max(width, height) || DIAMETER, 0.005, 10);
   const staticThrust = Math.min((DISC_LOADING * Math.PI * diameter * diameter) / 4, 1000);
-  return {
+  return fixedThruster({
     thrust: { kind: 'measured', staticThrust: Number(staticThrust.toPrecision(2)) },
     diameter,
     pitchSpeed: { kind: 'given', speed: PITCH_SPEED },
     reverse: 0,
-    yaw: { ...STRAIGHT },
-    pitch: { ...STRAIGHT },
-    differential: false,
-  };
+  });
 }
+
+/** A thruster with those figures that points straight ahead. */
+export const fixedThruster = (
+  figures: Omit<ThrusterData, 'yaw' | 'pitch' | 'differential'>,
+): ThrusterData => ({ ...figures, yaw: { ...STRAIGHT }, pitch: { ...STRAIGHT }, differential: false });
 
 /** Null where the box has no side. */
 export function finOfBox({ length, height }: Pick<Box, 'length' | 'height'>): FinData | null {

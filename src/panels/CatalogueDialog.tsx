@@ -4,7 +4,9 @@ import { catalogue } from '../catalogue/catalogue.ts';
 import type { PartEntry } from '../catalogue/schema.ts';
 import { PART_KINDS, type PartKind } from '../craft/schema.ts';
 import { addPart, hasRoom } from '../edit/edits/parts.ts';
+import { thrusterFacts } from '../report/thrusterAs.ts';
 import { formatQuantity } from '../units/format.ts';
+import { inUnits, say } from '../units/sentence.ts';
 import type { UnitSystem } from '../units/units.ts';
 import { PartCaution } from './Caution.tsx';
 import { DialogFrame } from './DialogFrame.tsx';
@@ -76,6 +78,18 @@ function countWords(found: number): string {
   return 'Nothing here matches. Try fewer words or a kind, as “battery”, or add a part of your own with “Add part”.';
 }
 
+/** Of the air where the craft has none, kg/m³. */
+const USUAL_DENSITY = 1.2;
+
+/** What a part does in the air: "1.000 N from a 100 mm propeller". */
+function doingWords({ thruster, fin }: PartEntry, density: number): string {
+  if (thruster) {
+    const { staticThrust } = thrusterFacts(thruster, density);
+    return `${say(staticThrust, 'force')} from a ${say(thruster.diameter, 'smallLength')} propeller`;
+  }
+  return fin ? `outline ${say(fin.area, 'area')}` : '';
+}
+
 interface EntryProps {
   readonly entry: PartEntry;
   readonly units: UnitSystem;
@@ -86,11 +100,13 @@ function Entry({ entry, units, onAdded }: EntryProps) {
   const { craft, assessment } = useEditor();
   const add = useAdding('part');
   const { name, kind, mass, massTolerance, note, source } = entry;
+  const doing = doingWords(entry, assessment.rows['air.density']?.value ?? USUAL_DENSITY);
   return (
     <li>
       <div>
         <strong>{name}</strong> {PART_WORDS[kind]}, {formatQuantity(mass, 'mass', units)}
         {massTolerance > 0 && ` ± ${formatQuantity(massTolerance, 'mass', units)}`}
+        {doing && `, ${inUnits(doing, units)}`}
         <p className="aside">
           {note} {GENERIC.test(source) || <cite>{source}</cite>}
         </p>

@@ -1,5 +1,6 @@
 /** What a new thing is until the builder says otherwise. */
 import type { PartEntry } from '../catalogue/schema.ts';
+import { fixedThruster } from '../craft/firstFigures.ts';
 import type { Place } from '../craft/placeSchema.ts';
 import type { PartFields } from '../edit/edits/parts.ts';
 import type { WireFields } from '../edit/edits/wires.ts';
@@ -34,15 +35,20 @@ export const blankPart = (place: Place): PartFields => ({
   notes: '',
 });
 
-export const partFrom = ({ name, kind, mass, massTolerance, size }: PartEntry, place: Place): PartFields => ({
-  ...blankPart(place),
-  name,
-  kind,
-  mass,
-  massTolerance,
-  massSource: 'catalogue',
-  size: { ...size },
-});
+export function partFrom(entry: PartEntry, place: Place): PartFields {
+  const { name, kind, mass, massTolerance, size, thruster, fin } = entry;
+  return {
+    ...blankPart(place),
+    name,
+    kind,
+    mass,
+    massTolerance,
+    massSource: 'catalogue',
+    size: { ...size },
+    thruster: thruster ? fixedThruster(thruster) : null,
+    fin: fin ? { ...fin } : null,
+  };
+}
 
 /** A pair of thin conductors along the keel, its ends loose. */
 export const blankWire = (place: Place, massPerMetre: number): WireFields => ({

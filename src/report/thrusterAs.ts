@@ -50,7 +50,10 @@ export interface ThrusterFacts {
 const OUTDOORS = 5;
 
 /** `density` of the air, kg/m³. */
-export function thrusterFacts(data: ThrusterData, density: number): ThrusterFacts {
+export function thrusterFacts(
+  data: Pick<ThrusterData, 'thrust' | 'diameter' | 'pitchSpeed'>,
+  density: number,
+): ThrusterFacts {
   const staticThrust = staticThrustOfData(data.thrust, data.diameter, density);
   const pitchSpeed = pitchSpeedOf(data.pitchSpeed);
   return {

@@ -40,6 +40,8 @@ test('a search finds what stands in the note or in the word for the kind', () =>
   const names = (search: string) => foundParts(catalogue.parts, search, null).map(({ kind }) => kind);
   expect(new Set(names('useful load'))).toEqual(new Set(['load']));
   expect(names('lithium swollen')).toContain('battery');
+  expect(names('light')).toContain('load');
+  expect(names('lamp')).toContain('load');
   expect(names('no such thing')).toEqual([]);
 });
 

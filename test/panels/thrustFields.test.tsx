@@ -1,4 +1,5 @@
 import { expect, test } from 'vitest';
+import { catalogue } from '../../src/catalogue/catalogue.ts';
 import type { Craft } from '../../src/craft/craft.ts';
 import { firstThruster } from '../../src/craft/firstFigures.ts';
 import type { Part } from '../../src/craft/schema.ts';
@@ -6,6 +7,8 @@ import type { ThrusterData } from '../../src/craft/thrustSchema.ts';
 import { setTargets } from '../../src/edit/edits/craft.ts';
 import { setPart } from '../../src/edit/edits/parts.ts';
 import { run } from '../../src/edit/history.ts';
+import { CatalogueDialog } from '../../src/panels/CatalogueDialog.tsx';
+import { partFrom } from '../../src/panels/defaults.ts';
 import { Inspector } from '../../src/panels/Inspector.tsx';
 import { TargetsPanel } from '../../src/panels/TargetsPanel.tsx';
 import { sampleCraft } from '../samples/readSamples.ts';
@@ -98,4 +101,17 @@ test('targets of turning are empty until they are asked for', () => {
   expect(markup.match(/placeholder="not asked for"/g)).toHaveLength(2);
   const asked = run(worked, setTargets('turning', { turnTime: 6, sideGust: 1.5 }).recipe).craft;
   expect(render(TargetsPanel, {}, asked)).toMatch(/First 90° within.*?value="6".*?Side gust.*?value="1\.5"/);
+});
+
+test('what is picked from the catalogue brings its figures, and the list tells them', () => {
+  const entry = (id: string) => catalogue.parts.find((each) => each.id === id)!;
+  const place = { kind: 'axis', station: 1 } as const;
+  const motor = partFrom(entry('motor-2212-230'), place);
+  expect(motor.thruster).toMatchObject({ ...entry('motor-2212-230').thruster, differential: false });
+  expect(partFrom(entry('fin-frame-medium'), place).fin).toEqual(entry('fin-frame-medium').fin);
+  expect(partFrom(entry('valve'), place)).toMatchObject({ thruster: null, fin: null });
+  const list = seen(render(CatalogueDialog, { onClose: () => {} }, worked));
+  // (14 W × 0.52 × √(2 × 1.199 kg/m³ × 78.5 cm²))^(2/3) = 1.000 N.
+  expect(list).toContain('1.000 N from a 100 mm propeller');
+  expect(list).toContain('outline 0.150 m²');
 });
