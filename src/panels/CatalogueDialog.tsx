@@ -6,7 +6,6 @@ import { PART_KINDS, type PartKind } from '../craft/schema.ts';
 import { addPart, hasRoom } from '../edit/edits/parts.ts';
 import { thrusterFacts } from '../report/thrusterAs.ts';
 import { formatQuantity } from '../units/format.ts';
-import { inUnits, say } from '../units/sentence.ts';
 import type { UnitSystem } from '../units/units.ts';
 import { PartCaution } from './Caution.tsx';
 import { DialogFrame } from './DialogFrame.tsx';
@@ -81,13 +80,13 @@ function countWords(found: number): string {
 /** Of the air where the craft has none, kg/m³. */
 const USUAL_DENSITY = 1.2;
 
-/** What a part does in the air: "1.000 N from a 100 mm propeller". */
-function doingWords({ thruster, fin }: PartEntry, density: number): string {
-  if (thruster) {
-    const { staticThrust } = thrusterFacts(thruster, density);
-    return `${say(staticThrust, 'force')} from a ${say(thruster.diameter, 'smallLength')} propeller`;
-  }
-  return fin ? `outline ${say(fin.area, 'area')}` : '';
+/** What a part does in the air, to two digits: "1.0 N from a 100 mm propeller". */
+function doingWords({ thruster, fin }: PartEntry, density: number, units: UnitSystem): string {
+  if (fin) return `outline ${formatQuantity(fin.area, 'area', units, { uncertainty: fin.area })}`;
+  if (!thruster) return '';
+  const { staticThrust } = thrusterFacts(thruster, density);
+  const thrust = formatQuantity(staticThrust, 'force', units, { uncertainty: staticThrust });
+  return `${thrust} from a ${formatQuantity(thruster.diameter, 'smallLength', units)} propeller`;
 }
 
 interface EntryProps {
@@ -100,13 +99,13 @@ function Entry({ entry, units, onAdded }: EntryProps) {
   const { craft, assessment } = useEditor();
   const add = useAdding('part');
   const { name, kind, mass, massTolerance, note, source } = entry;
-  const doing = doingWords(entry, assessment.rows['air.density']?.value ?? USUAL_DENSITY);
+  const doing = doingWords(entry, assessment.rows['air.density']?.value ?? USUAL_DENSITY, units);
   return (
     <li>
       <div>
         <strong>{name}</strong> {PART_WORDS[kind]}, {formatQuantity(mass, 'mass', units)}
         {massTolerance > 0 && ` ± ${formatQuantity(massTolerance, 'mass', units)}`}
-        {doing && `, ${inUnits(doing, units)}`}
+        {doing && `, ${doing}`}
         <p className="aside">
           {note} {GENERIC.test(source) || <cite>{source}</cite>}
         </p>
