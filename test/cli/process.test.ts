@@ -36,7 +36,7 @@ test('broken input exits 2 and speaks on standard error alone', () => {
   const { status, stdout, stderr } = craft(['check', '-'], '{"steelyard": 99}');
   expect({ status, stdout }).toEqual({ status: 2, stdout: '' });
   expect(stderr).toBe(
-    'standard input: steelyard: found 99; allowed: a version up to 2; this file comes from a newer Steelyard\n',
+    'standard input: steelyard: found 99; allowed: a version up to 3; this file comes from a newer Steelyard\n',
   );
 });
 
