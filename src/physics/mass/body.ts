@@ -56,3 +56,12 @@ export function pitchInertia(bodies: readonly Body[], [px, , pz]: Vec3): number 
   }
   return total;
 }
+
+/** The same about the upright (z) axis: the one for yaw. kg·m² */
+export function yawInertia(bodies: readonly Body[], [px, py]: Vec3): number {
+  let total = 0;
+  for (const { mass, cg, second } of bodies) {
+    total += second[0] + second[1] + mass * ((cg[0] - px) ** 2 + (cg[1] - py) ** 2);
+  }
+  return total;
+}

@@ -1,0 +1,73 @@
+/** Time to the first 90° of yaw, either way, and to stop the yaw again by countering. */
+import { infeasible, type Outcome, solved } from '../../numeric/outcome.ts';
+import { say } from '../../units/sentence.ts';
+import type { Commands } from './asked.ts';
+import { LONGEST, type Moment, type Sailed, type SailOptions, sail, type Track, trackOf } from './sail.ts';
+import type { Command } from './steer.ts';
+import type { TurningCraft } from './turningCraft.ts';
+
+export interface QuarterTurn {
+  /** s */
+  readonly time: number;
+  readonly track: Track;
+}
+
+export interface YawStop {
+  /** s, from the opposite command until the craft no longer yaws. */
+  readonly time: number;
+  /** Yawed on meanwhile, rad, ≥ 0. */
+  readonly angle: number;
+  /** Goes on where the quarter turn ended; its time begins anew. */
+  readonly track: Track;
+}
+
+export const QUARTER = Math.PI / 2;
+
+/** Turns from below nil where the heading is first 90° off, either way. */
+export const quarterEvent = (_: number, state: Float64Array): number => Math.abs(state[5]!) - QUARTER;
+
+/** Until the heading is 90° off, or infeasible with how far it got. */
+export function quarterTurn(
+  craft: TurningCraft,
+  from: Moment,
+  command: Command,
+  options: SailOptions = {},
+): Outcome<Sailed> {
+  const sailed = sail(craft, from, command, { ...options, event: quarterEvent });
+  if (sailed.status !== 'solved') return sailed;
+  const { trajectory, motion } = sailed.value;
+  if (trajectory.stopped) return sailed;
+  const still = new Float64Array(3);
+  motion.forces(LONGEST, Float64Array.of(0, 0, 0), still);
+  return still[2] === 0
+    ? infeasible(
+        'Nothing turns the craft: at this setting the thrust gives no yaw moment.',
+        'Let a thruster turn in yaw, or throttle a pair apart.',
+      )
+    : infeasible(
+        `In ${say(trajectory.end, 'time')} it yaws only ${say(Math.abs(trajectory.last[5]!), 'angle')}: the yaw moment of the thrusters is ${say(still[2]!, 'torque')}.`,
+        'More thrust, a longer arm or a wider vectoring angle would help.',
+      );
+}
+
+export const quarterTurnOf = (craft: TurningCraft, { trajectory, ...rest }: Sailed): QuarterTurn => ({
+  time: trajectory.end,
+  track: trackOf(craft, { trajectory, ...rest }),
+});
+
+/** From the end of a quarter turn, the opposite command until the yaw rate is nil. */
+export function yawStop(craft: TurningCraft, { end }: Sailed, { counter }: Commands): Outcome<YawStop> {
+  const way = Math.sign(end.state[5]!);
+  const event = (_: number, state: Float64Array) => -way * state[2]!;
+  const sailed = sail(craft, end, counter, { event });
+  if (sailed.status !== 'solved') return sailed;
+  const { trajectory } = sailed.value;
+  const angle = way * (trajectory.last[5]! - end.state[5]!);
+  if (!trajectory.stopped) {
+    return infeasible(
+      `Countering does not stop the yaw: after ${say(trajectory.end, 'time')} and ${say(angle, 'angle')} the craft still yaws ${say(way * trajectory.last[2]!, 'yawRate')}.`,
+      'More thrust, a longer arm or a wider vectoring angle to the other side would help.',
+    );
+  }
+  return solved({ time: trajectory.end, angle, track: trackOf(craft, sailed.value) });
+}
