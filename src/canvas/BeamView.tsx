@@ -84,6 +84,7 @@ function BeamFrame(props: SharedProps & DrawnProps) {
     hardpoints: [],
     support: null,
     wireHandles: [],
+    thrust: [],
   };
   const ground = useGround(props, scene, useOverlay(), viewState);
 

@@ -66,6 +66,7 @@ function FrontFrame(props: CanvasProps & DrawnProps) {
     hardpoints: hardpointPoints(geometry, fromAstern),
     support: null,
     wireHandles: [],
+    thrust: [],
   };
   const ground = useGround(props, scene, overlays, viewState);
   const { height, breadth } = geometry.hull;

@@ -2,6 +2,7 @@
 import { type ReactNode, useCallback, useMemo } from 'react';
 import { Group, Layer, Stage } from 'react-konva/es/ReactKonvaCore.js';
 import { idsOf, isSelected, type Selection } from '../edit/selection.ts';
+import { rectsAlong } from '../scene/clearSpot.ts';
 import { handlesOf } from '../scene/grip.ts';
 import { type BalanceMarks, marksTaken, sideMarks } from '../scene/marks.ts';
 import { around, type Rect, screenBox } from '../scene/rect.ts';
@@ -17,6 +18,7 @@ import { PartMarks } from './PartMarks.tsx';
 import { PointMarks, type PointMarksProps } from './PointMarks.tsx';
 import { worldTransform } from './paint.ts';
 import { FOOT, FootRuler, footNameTaken, HullRulers } from './Rulers.tsx';
+import { arcShown, ThrustMarks, thrustHandles } from './ThrustMarks.tsx';
 import type { SideScene } from './useSideScene.ts';
 import { WireMarks } from './WireMarks.tsx';
 
@@ -55,7 +57,12 @@ export function SideDrawing({ scene, selection, overlay, faded, sparing, childre
   const labels = useLabels({
     wanted: wantedLabels(craft, scene.still, view, idsOf(selection, 'part'), hoveredPart, sparing),
     ground: () => ({
-      taken: [...takenBy(marks, points, handles), ...textsTaken(rulers), footNameTaken(view)],
+      taken: [
+        ...takenBy(marks, points, handles),
+        ...arrowsTaken(scene),
+        ...textsTaken(rulers),
+        footNameTaken(view),
+      ],
       boxes: scene.still.map((figure) => ({ id: figure.part, box: screenBox(figure, view) })),
       frame: { left: 2, top: 2, right: view.width - 2, bottom: view.height - FOOT - 4 },
     }),
@@ -101,10 +108,11 @@ export function SideDrawing({ scene, selection, overlay, faded, sparing, childre
             px={px}
           />
         </Group>
+        <ThrustMarks marks={scene.thrust} arc={arcShown(scene, overlay)} view={view} palette={palette} />
         <PointMarks {...points} palette={palette} />
         <BalanceMark marks={marks} palette={palette} angle={pitchAngle(scene)} />
         <HandMarks
-          handles={handles}
+          handles={[...handles, ...thrustHandles(scene, overlay)]}
           wireEnds={endsShown(scene)}
           guide={guideShown(scene, overlay)}
           marquee={overlay.marquee}
@@ -131,6 +139,10 @@ const takenBy = (
     : []),
   ...eyelets.map(({ at }) => around(at, 6)),
 ];
+
+/** Arrows, as far as a hand can take them. */
+const arrowsTaken = ({ thrust, view }: SideScene): Rect[] =>
+  thrust.flatMap(({ at, tip, handle }) => rectsAlong(toScreen(view, at), toScreen(view, handle ?? tip), 8));
 
 function pointsOf(scene: SideScene, selection: Selection): Points {
   const { view, geometry, hardpoints } = scene;

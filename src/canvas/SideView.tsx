@@ -7,6 +7,7 @@ import { sideMarks } from '../scene/marks.ts';
 import { sideOutline } from '../scene/outline.ts';
 import { planInWords } from '../scene/planWords.ts';
 import { sideReadout } from '../scene/readout.ts';
+import { thrustInWords, turnStatus } from '../scene/thrustWords.ts';
 import type { View } from '../scene/view.ts';
 import { selectionInWords, sideInWords } from '../scene/words.ts';
 import { BelowCarry } from './CarryPlot.tsx';
@@ -22,19 +23,19 @@ import type { DrawnProps, SharedProps } from './props.ts';
 import { FOOT } from './Rulers.tsx';
 import { SideDrawing } from './SideDrawing.tsx';
 import { Unformed } from './Unformed.tsx';
-import { sidePoints, useFit } from './useFit.ts';
+import { sidePoints, useFit, withTips } from './useFit.ts';
 import { useGeometry } from './useGeometry.ts';
 import { useGestures } from './useGestures.ts';
 import { useGround, useOverlay } from './useGround.ts';
 import { usePlanned } from './usePlanned.ts';
 import { useRails } from './useRails.ts';
-import { useLie, useSideScene, withoutLead } from './useSideScene.ts';
+import { type SideScene, useLie, useSideScene, withoutLead } from './useSideScene.ts';
 import { useSize } from './useSize.ts';
 
 const OUTLINE_POINTS = 32;
 
 const KEYS =
-  'Arrow keys move what is selected by 1 millimetre, with Shift by 10. Square brackets select the part before or after. Plus, minus and 0 zoom and fit. Escape gives up a drag.';
+  'Arrow keys move what is selected by 1 millimetre, with Shift by 10. Comma and full stop turn the thrust of what is selected by 1 degree down and up, with Shift by 10. Square brackets select the part before or after. Plus, minus and 0 zoom and fit. Escape gives up a drag.';
 
 export function SideView(props: SharedProps) {
   const { geometry, stale } = useGeometry(props);
@@ -47,7 +48,7 @@ export function SideView(props: SharedProps) {
 }
 
 function SideFrame(props: SharedProps & DrawnProps & { stale: string | null }) {
-  const { selection, palette, viewState, geometry, tilted, stale } = props;
+  const { selection, palette, viewState, geometry, tilted, stale, turning = false } = props;
   const frame = useRef<HTMLDivElement>(null);
   const size = useSize(frame);
   const overlays = useOverlay();
@@ -63,13 +64,17 @@ function SideFrame(props: SharedProps & DrawnProps & { stale: string | null }) {
   const scene = useSideScene(props, view, overlay);
   const ground = useGround(props, scene, overlays, viewState);
   const { length, height } = geometry.hull;
+  const margins = sideMargins(size, geometry.support !== null);
   useFit(
     viewState,
     view,
-    `${tilted} ${length} ${height}`,
+    `${tilted} ${length} ${height} ${turning}`,
     busy,
-    () => sidePoints(props.craft, geometry),
-    sideMargins(size, geometry.support !== null),
+    () => {
+      const points = sidePoints(props.craft, geometry);
+      return turning ? withTips(points, geometry.thrust, view, margins, { way: 'pitch' }) : points;
+    },
+    margins,
   );
 
   const outline = useMemo(() => sideOutline(geometry.hull, OUTLINE_POINTS), [geometry.hull]);
@@ -95,8 +100,10 @@ function SideFrame(props: SharedProps & DrawnProps & { stale: string | null }) {
       frame={frame}
       testId="side-view"
       label="Side view"
-      description={[sideInWords(scene), planInWords(scene, props), KEYS].filter(Boolean).join(' ')}
-      status={hint ?? (busy ? '' : selectionInWords(scene, idsOf(selection, 'part')))}
+      description={[sideInWords(scene), thrustInWords(scene, 'pitch'), planInWords(scene, props), KEYS]
+        .filter(Boolean)
+        .join(' ')}
+      status={hint ?? (busy ? '' : statusOf(scene, idsOf(selection, 'part')))}
       view={view}
       cursor={rails.cursor ?? cursorOf(overlay)}
       handlers={{ ...gestures.handlers, ...keysOf(ground, gestures, 'side'), onDoubleClick }}
@@ -122,3 +129,7 @@ function SideFrame(props: SharedProps & DrawnProps & { stale: string | null }) {
     </Frame>
   );
 }
+
+/** What is selected, and how its thrust is turned. */
+const statusOf = (scene: SideScene, parts: readonly string[]): string =>
+  [selectionInWords(scene, parts), turnStatus(scene, parts, 'pitch')].filter(Boolean).join(' ');

@@ -1,8 +1,10 @@
 /** Keys of a view that has the focus. What it does not know goes on to the page. */
 import type { KeyboardEvent } from 'react';
+import type { Edit } from '../edit/edit.ts';
 import { zoomedAtMiddle } from '../scene/view.ts';
 import type { Ground } from './gestures/gesture.ts';
 import { type Facing, neighbour, nudgeEdit, nudgeFor } from './gestures/nudge.ts';
+import { thrustNudgeEdit, thrustNudgeFor } from './gestures/nudgeThrust.ts';
 import type { Gestures } from './useGestures.ts';
 
 const ZOOM = 1.25;
@@ -30,7 +32,8 @@ export function keysOf(ground: Ground, gestures: Gestures, facing: Facing): KeyH
 }
 
 /** True when the key meant something here. */
-function act(ground: Ground, gestures: Gestures, facing: Facing, { key, shiftKey }: KeyboardEvent): boolean {
+function act(ground: Ground, gestures: Gestures, facing: Facing, event: KeyboardEvent): boolean {
+  const { key, shiftKey } = event;
   switch (key) {
     case 'Escape':
       return gestures.cancel();
@@ -50,7 +53,7 @@ function act(ground: Ground, gestures: Gestures, facing: Facing, { key, shiftKey
     case ']':
       return pick(ground, 1);
     default:
-      return nudgeBy(ground, facing, key, shiftKey);
+      return turnBy(ground, facing, event) || nudgeBy(ground, facing, key, shiftKey);
   }
 }
 
@@ -65,7 +68,21 @@ function nudgeBy(ground: Ground, facing: Facing, key: string, shift: boolean): b
   if (!nudge) return false;
   const edit = nudgeEdit(ground.session.getState().selection, nudge);
   if (!edit) return false;
-  const [problem] = ground.session.apply(edit);
-  if (problem) ground.show({ hint: `${problem.path}: allowed is ${problem.allowed}` });
+  apply(ground, edit);
   return true;
+}
+
+function turnBy(ground: Ground, facing: Facing, event: KeyboardEvent): boolean {
+  const nudge = thrustNudgeFor(event, facing);
+  const { craft, selection } = ground.session.getState();
+  const edit = nudge && thrustNudgeEdit(craft, selection, nudge);
+  if (!edit) return false;
+  if (typeof edit === 'string') ground.show({ hint: edit });
+  else apply(ground, edit);
+  return true;
+}
+
+function apply({ session, show }: Ground, edit: Edit): void {
+  const [problem] = session.apply(edit);
+  show({ hint: problem ? `${problem.path}: allowed is ${problem.allowed}` : null });
 }

@@ -1,6 +1,6 @@
 /** What the notes over a view say of the thing under the pointer, and what they must not cover. */
 import { aboutGrip } from '../scene/about.ts';
-import type { InSight } from '../scene/clearSpot.ts';
+import { type InSight, rectsAlong } from '../scene/clearSpot.ts';
 import { type Grip, handlesOf } from '../scene/grip.ts';
 import { type BalanceMarks, marksTaken } from '../scene/marks.ts';
 import { around, type Rect, screenBox } from '../scene/rect.ts';
@@ -42,7 +42,7 @@ const MOST = 60;
 
 /** Boxes of the thing itself on the screen; none for a wire run, which is everywhere. */
 function boxesOf(scene: Scene, grip: Grip): Rect[] {
-  const { view, figures, hardpoints, support, geometry, wireHandles } = scene;
+  const { view, figures, hardpoints, support, geometry, wireHandles, thrust } = scene;
   const spot = (at: PlanePoint | null | undefined) => (at ? [around(toScreen(view, at), REACH)] : []);
   switch (grip.kind) {
     case 'part':
@@ -57,6 +57,13 @@ function boxesOf(scene: Scene, grip: Grip): Rect[] {
       return wireHandles
         .filter(({ id, side }) => id === grip.id && side === grip.side)
         .flatMap(({ at, end }) => [...spot(at), ...spot(end)]);
+    case 'thrust':
+      return thrust
+        .filter(({ part, copy }) => part === grip.id && copy === grip.copy)
+        .flatMap(({ at, tip, handle }) => [
+          ...spot(handle),
+          ...rectsAlong(toScreen(view, at), toScreen(view, tip), REACH),
+        ]);
     case 'hull':
       return spot(handlesOf(geometry, view.scale)[grip.end]);
     case 'wire':

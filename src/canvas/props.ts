@@ -14,6 +14,8 @@ export interface CanvasProps extends Subject {
   readonly snap?: boolean;
   /** Whether a click adds to the selection and a drag on empty ground draws a box, by default false. */
   readonly several?: boolean;
+  /** Whether the turn is in front: thrust is then drawn of every thruster, by default only where a hand or the pointer is. */
+  readonly turning?: boolean;
 }
 
 /** The side view and the beam share one view state, so that stations lie under each other. */

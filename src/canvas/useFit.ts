@@ -1,9 +1,10 @@
 /** Keeps the whole craft in the window until a hand moves it: after a resize, a change of hull, a tilt, or when asked. */
 import { useLayoutEffect, useRef } from 'react';
 import type { Craft } from '../craft/craft.ts';
-import { fromAstern, fromSide } from '../scene/flatten.ts';
-import { onSection, sideOutline, widestStation } from '../scene/outline.ts';
+import { fromAbove, fromAstern, fromSide } from '../scene/flatten.ts';
+import { onSection, planOutline, sideOutline, widestStation } from '../scene/outline.ts';
 import type { Geometry } from '../scene/subject.ts';
+import { type ThrustArrow, type ThrustShown, thrustMarks } from '../scene/thrustArrows.ts';
 import { fitted, type Margins, type PlanePoint, type View } from '../scene/view.ts';
 import type { ViewState } from './useView.ts';
 
@@ -40,6 +41,30 @@ export const frontPoints = ({ parts }: Craft, { hull, pieces, hardpoints }: Geom
   }),
   ...hardpoints.map(({ at }) => fromAstern(at)),
 ];
+
+/** Everything that should be seen from above. */
+export const abovePoints = ({ parts }: Craft, { hull, pieces }: Geometry): PlanePoint[] => [
+  ...planOutline(hull, 40),
+  ...pieces.flatMap(({ part, middle, roll }) => {
+    const { length, width, height } = parts.byId[part]?.size ?? POINT;
+    const across = width * Math.abs(Math.cos(roll)) + height * Math.abs(Math.sin(roll));
+    return cornersOf(fromAbove(middle), across, length);
+  }),
+];
+
+/** The points, and where arrows of thrust end once they are fitted. */
+export function withTips(
+  points: readonly PlanePoint[],
+  arrows: readonly ThrustArrow[],
+  view: View,
+  margins: Margins,
+  how: Pick<ThrustShown, 'way' | 'longest'>,
+): PlanePoint[] {
+  const { scale } = fitted(view, points, margins);
+  const all = () => true;
+  const marks = thrustMarks(arrows, { ...how, scale, shows: all, hands: all });
+  return [...points, ...marks.map(({ tip, handle }) => handle ?? tip)];
+}
 
 /** Of what is no longer there. */
 const POINT = { length: 0, width: 0, height: 0 };

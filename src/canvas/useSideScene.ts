@@ -11,6 +11,7 @@ import type { Scene } from './gestures/gesture.ts';
 import type { Overlay } from './overlay.ts';
 import type { DrawnProps } from './props.ts';
 import { useSame } from './useSame.ts';
+import { useThrust } from './useThrust.ts';
 
 export interface SideScene extends Scene {
   /** Drawn on the layer that stands still, and on the one that moves. */
@@ -20,8 +21,9 @@ export interface SideScene extends Scene {
   readonly movingLines: readonly Line[];
 }
 
-export function useSideScene(props: DrawnProps, view: View, { moving }: Overlay): SideScene {
-  const { craft, assessment, units, palette, geometry, selection } = props;
+export function useSideScene(props: DrawnProps, view: View, overlay: Overlay): SideScene {
+  const { moving } = overlay;
+  const { craft, assessment, units, palette, geometry, selection, turning = false } = props;
   const [cache] = useState(() => new FigureCache(sideFigure));
   const figures = cache.figures(craft, geometry, 1 / view.scale);
   const isMoving = ({ part }: Figure) => moving.has(keyOf('part', part));
@@ -32,8 +34,9 @@ export function useSideScene(props: DrawnProps, view: View, { moving }: Overlay)
   const movingWires = geometry.wires.filter(({ wire }) => moving.has(keyOf('wire', wire)));
   const movingLines = wireLines(movingWires, fromSide);
   const lines = [...stillLines, ...movingLines];
+  const thrust = useThrust(geometry, selection, overlay, { way: 'pitch', scale: view.scale, turning });
   return {
-    ...{ craft, assessment, units, palette, view, geometry, figures, still, stillLines, movingLines },
+    ...{ craft, assessment, units, palette, view, geometry, figures, thrust, still, stillLines, movingLines },
     moving: figures.filter(isMoving),
     lines,
     wireHandles: wireHandles({ craft, lines, figures }, idsOf(selection, 'wire'), view.scale),

@@ -4,6 +4,7 @@ import { formatQuantity } from '../units/format.ts';
 import type { Grip } from './grip.ts';
 import type { Readout } from './readout.ts';
 import { geometryOf, type Subject } from './subject.ts';
+import { thrustReadout } from './thrustWords.ts';
 import { leadWords, momentAmount, momentWords, nameOfGrip } from './words.ts';
 
 /** Null for the handles of the hull, which name themselves by moving. */
@@ -23,6 +24,8 @@ export function aboutGrip(subject: Subject, grip: Grip): Readout | null {
       return { title, lines: aboutHardpoint(subject, grip.id) };
     case 'support':
       return { title, lines: ['Carries the static heaviness'] };
+    case 'thrust':
+      return thrustReadout(subject, grip.id, grip.way);
     case 'hull':
       return null;
   }

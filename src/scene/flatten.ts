@@ -1,4 +1,4 @@
-/** Places in space as points of the side view and the front view. */
+/** Places in space as points of the side view, the front view and the view from above. */
 import type { Vec3 } from '../report/assessment.ts';
 import type { Line } from './grip.ts';
 import type { Geometry } from './subject.ts';
@@ -11,6 +11,9 @@ export const fromSide: Flatten = ([x, , z]) => ({ u: x, z });
 
 /** Seen from astern: starboard to the right. */
 export const fromAstern: Flatten = ([, y, z]) => ({ u: y, z });
+
+/** Seen from above with the nose up: starboard to the right, as from astern. */
+export const fromAbove: Flatten = ([x, y]) => ({ u: y, z: -x });
 
 export const wireLines = (wires: Geometry['wires'], flatten: Flatten): Line[] =>
   wires.flatMap(({ wire, branches }) => branches.map((branch) => ({ id: wire, at: branch.map(flatten) })));

@@ -1,11 +1,12 @@
 /**
- * What the hand would take hold of at a point of a view. The handle of a wire end wins on its dot, then what is selected
- * within its brackets, then nearer and smaller things.
+ * What the hand would take hold of at a point of a view. The handle of a thrust arrow or of a wire end wins on its dot, then
+ * what is selected within its brackets, then nearer and smaller things.
  */
 import type { Figure } from './figure.ts';
 import { distanceToLine, figureAt, figuresAt, lineAt, pointAt } from './hit.ts';
 import { widestStation } from './outline.ts';
 import type { Geometry } from './subject.ts';
+import type { ThrustMark, Way } from './thrustArrows.ts';
 import type { PlanePoint } from './view.ts';
 import type { WireHandle } from './wireHandle.ts';
 
@@ -15,7 +16,8 @@ export type Grip =
   | { readonly kind: 'wireEnd'; readonly id: string; readonly side: 'from' | 'to' }
   | { readonly kind: 'hardpoint'; readonly id: string }
   | { readonly kind: 'support' }
-  | { readonly kind: 'hull'; readonly end: 'tail' | 'waist' };
+  | { readonly kind: 'hull'; readonly end: 'tail' | 'waist' }
+  | { readonly kind: 'thrust'; readonly id: string; readonly copy: number; readonly way: Way };
 
 /** What can be selected; scene knows no more of a selection than this. */
 export interface Selectable {
@@ -40,6 +42,8 @@ export interface Reachable {
   readonly support: PlanePoint | null;
   /** Ends of the wire runs selected. */
   readonly wireHandles: readonly WireHandle[];
+  /** Arrows of thrust, some with a handle. */
+  readonly thrust: readonly ThrustMark[];
   readonly selection: readonly Selectable[];
 }
 
@@ -57,6 +61,9 @@ export function handlesOf({ hull }: Geometry, scale: number): { tail: PlanePoint
 /** Half the least touch target of a handle, px. */
 const HANDLE_PX = 16;
 
+/** A handle of thrust is taken from as far as its ends reach, px. */
+const THRUST_PX = 13;
+
 /** Size of the dot at a wire end, and how far the brackets stand off what is selected, px. */
 export const DOT_PX = 6;
 export const BRACKET_PX = 5;
@@ -65,9 +72,11 @@ export const BRACKET_PX = 5;
 export function gripAt(things: Reachable, point: PlanePoint, scale: number, slop: number): Grip | null {
   const near = slop / scale;
   return (
+    thrustAt(things, point, THRUST_PX / scale) ??
     wireEndAt(things, point, DOT_PX / scale) ??
     selectedAt(things, point, scale) ??
     partAt(things, point, near) ??
+    thrustAt(things, point, (slop + 4) / scale) ??
     wireEndAt(things, point, (slop + 4) / scale) ??
     hardpointAt(things, point, near) ??
     supportAt(things, point, near) ??
@@ -144,6 +153,14 @@ function wireEndAt({ wireHandles }: Reachable, point: PlanePoint, near: number):
   if (found === null) return null;
   const { id, side } = wireHandles[Number(found)]!;
   return { kind: 'wireEnd', id, side };
+}
+
+function thrustAt({ thrust }: Reachable, point: PlanePoint, near: number): Grip | null {
+  const handles = thrust.flatMap(({ handle }, i) => (handle ? [{ id: `${i}`, at: handle }] : []));
+  const found = pointAt(handles, point, near);
+  if (found === null) return null;
+  const { part, copy, way } = thrust[Number(found)]!;
+  return { kind: 'thrust', id: part, copy, way };
 }
 
 function handleAt({ geometry }: Reachable, point: PlanePoint, scale: number): Grip | null {

@@ -28,3 +28,9 @@ export function frontMargins({ width, height }: Extent): Margins {
   const each = Math.max(16, Math.min(30, Math.round(0.1 * Math.min(width, height))));
   return { left: each, right: each, top: each, bottom: each };
 }
+
+/** At the foot there is a line of words, at the starboard edge its name; a lever stands to port. */
+export function aboveMargins({ width, height }: Extent): Margins {
+  const each = Math.max(16, Math.min(30, Math.round(0.08 * Math.min(width, height))));
+  return { left: each + 8, right: each + 8, top: Math.max(24, each), bottom: each + (width < 190 ? 24 : 12) };
+}

@@ -1,4 +1,4 @@
-/** Outlines of the hull: from the side by its true profile, from astern by its section. m. */
+/** Outlines of the hull: from the side and from above by its true profile, from astern by its section. m. */
 import type { Hull } from '../report/assessment.ts';
 import type { PlanePoint } from './view.ts';
 
@@ -10,6 +10,16 @@ export function sideOutline(hull: Hull, count = 160): PlanePoint[] {
   const top = stations.map((u) => ({ u, z: hull.radius(u, 0) }));
   const keel = stations.map((u) => ({ u, z: -hull.radius(u, KEEL) }));
   return [...top, ...keel.reverse()];
+}
+
+const STARBOARD = Math.PI / 2;
+
+/** From above, the nose up, closed: along the starboard side from nose to tail, back along the port side. */
+export function planOutline(hull: Hull, count = 160): PlanePoint[] {
+  const stations = hull.drawStations(count);
+  const starboard = stations.map((x) => ({ u: hull.radius(x, STARBOARD), z: -x }));
+  const port = stations.map((x) => ({ u: -hull.radius(x, -STARBOARD), z: -x }));
+  return [...starboard, ...port.reverse()];
 }
 
 /** The keel line, nose to tail. */

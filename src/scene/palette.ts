@@ -30,6 +30,8 @@ export interface Palette {
   readonly lead: string;
   readonly bob: string;
   readonly ring: string;
+  /** Thrust, and what it does. */
+  readonly thrust: string;
   /** Moments forward and aft of the CB. */
   readonly fore: string;
   readonly aft: string;
@@ -60,6 +62,7 @@ export const LIGHT: Palette = {
   lead: '#454a66',
   bob: '#8a3b12',
   ring: '#0f5e73',
+  thrust: '#1f4fae',
   fore: '#34728a',
   aft: '#a9552c',
 };
@@ -89,6 +92,7 @@ export const DARK: Palette = {
   lead: '#a9b0d8',
   bob: '#f0a36f',
   ring: '#6cc6dd',
+  thrust: '#8fb6ff',
   fore: '#6cb2c8',
   aft: '#dd8f63',
 };

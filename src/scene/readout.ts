@@ -3,6 +3,7 @@ import type { Place } from '../craft/placeSchema.ts';
 import { formatQuantity } from '../units/format.ts';
 import type { Grip } from './grip.ts';
 import { type Geometry, geometryOf, rowValue, type Subject, type UnitSystem } from './subject.ts';
+import { thrustReadout } from './thrustWords.ts';
 import { floatWords, heelWords, momentWords, nameOfGrip, pitchWords } from './words.ts';
 
 export interface Readout {
@@ -15,6 +16,7 @@ const KEEL = Math.PI;
 
 /** In the side view. Null when what is held is nowhere. */
 export function sideReadout(subject: Subject, held: Grip): Readout | null {
+  if (held.kind === 'thrust') return thrustReadout(subject, held.id, held.way);
   const geometry = geometryOf(subject.assessment);
   const about = geometry && aboutHeld(subject, geometry, held);
   if (!about) return null;
@@ -24,7 +26,11 @@ export function sideReadout(subject: Subject, held: Grip): Readout | null {
   };
 }
 
-function aboutHeld(subject: Subject, geometry: Geometry, held: Grip): string[] | null {
+function aboutHeld(
+  subject: Subject,
+  geometry: Geometry,
+  held: Exclude<Grip, { kind: 'thrust' }>,
+): string[] | null {
   switch (held.kind) {
     case 'part':
       return aboutPart(subject, geometry, held.id, held.copy);

@@ -58,6 +58,13 @@ export const clockRule = (scale: number, distance: number, suspended: boolean): 
   suspended,
 });
 
+/** Angles to which thrust is turned snap to every 5°. */
+export const turnRule = (suspended: boolean): SnapRule => ({
+  tolerance: 2.5 * DEGREE,
+  grid: 5 * DEGREE,
+  suspended,
+});
+
 /** Stations of the CB, of other parts and of hardpoints; `moving` holds the keys (see grip.ts) of what is in hand. */
 export function stationTargets(craft: Craft, geometry: Geometry, moving: ReadonlySet<string>): SnapTarget[] {
   const still = (kind: 'part' | 'hardpoint') =>

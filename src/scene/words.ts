@@ -43,6 +43,7 @@ export const floatWords = (assessment: Subject['assessment'], units: UnitSystem)
 export function nameOfGrip(craft: Craft, grip: Grip): string {
   switch (grip.kind) {
     case 'part':
+    case 'thrust':
       return craft.parts.byId[grip.id]?.name || craft.parts.byId[grip.id]?.kind || 'Part';
     case 'wire':
       return craft.wires.byId[grip.id]?.name || 'Wire run';

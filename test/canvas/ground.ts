@@ -5,9 +5,17 @@ import { CLEAR, type Overlay } from '../../src/canvas/overlay.ts';
 import type { Craft } from '../../src/craft/craft.ts';
 import { idsOf } from '../../src/edit/selection.ts';
 import { Session } from '../../src/edit/session.ts';
-import { frontFigure, sideFigure } from '../../src/scene/figure.ts';
-import { type Flatten, fromAstern, fromSide, hardpointPoints, wireLines } from '../../src/scene/flatten.ts';
+import { aboveFigure, frontFigure, sideFigure } from '../../src/scene/figure.ts';
+import {
+  type Flatten,
+  fromAbove,
+  fromAstern,
+  fromSide,
+  hardpointPoints,
+  wireLines,
+} from '../../src/scene/flatten.ts';
 import { FigureCache, type FigureMaker } from '../../src/scene/keepSame.ts';
+import { thrustMarks } from '../../src/scene/thrustArrows.ts';
 import { type PlanePoint, toScreen, type View } from '../../src/scene/view.ts';
 import { wireHandles } from '../../src/scene/wireHandle.ts';
 import { craft as fixture, geometry, subject, VIEW } from '../scene/fixture.ts';
@@ -46,6 +54,12 @@ function groundOf(
       lines,
       wireHandles: wireHandles({ craft, lines, figures }, ends, view.scale),
       hardpoints: hardpointPoints(drawn, flatten),
+      thrust: thrustMarks(drawn.thrust, {
+        way: flatten === fromAbove ? 'yaw' : 'pitch',
+        scale: view.scale,
+        shows: () => true,
+        hands: () => true,
+      }),
       support: flatten === fromSide && drawn.support ? fromSide(drawn.support) : null,
     };
   };
@@ -78,6 +92,16 @@ export const sideGround = (start: Craft = fixture(), habits: Partial<Habits> = {
 
 export const frontGround = (start: Craft = fixture(), habits: Partial<Habits> = {}): TestGround =>
   groundOf(start, fromAstern, frontFigure, { ...VIEW, originX: 420, pivot: 0 }, habits);
+
+/** Nose up. */
+export const groundFromAbove = (start: Craft = fixture(), habits: Partial<Habits> = {}): TestGround =>
+  groundOf(
+    start,
+    fromAbove,
+    aboveFigure,
+    { ...VIEW, originX: 420, originY: 60, scale: 120, pivot: 0 },
+    habits,
+  );
 
 /** The middle of a part's first piece as drawn. */
 export const middleOf = (ground: Ground, id: string): PlanePoint =>

@@ -39,6 +39,7 @@ const things = (selection: Reachable['selection'] = []): Reachable => ({
     selection.filter(({ kind }) => kind === 'wire').map(({ id }) => id),
     SCALE,
   ),
+  thrust: [],
 });
 const middleOf = (id: string) => figures.find(({ part }) => part === id)!.middle;
 

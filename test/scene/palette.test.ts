@@ -15,7 +15,7 @@ function contrast(a: string, b: string): number {
   return (high! + 0.05) / (low! + 0.05);
 }
 
-const TEXT = ['ink', 'inkSoft', 'brass', 'good', 'bad', 'open', 'lead', 'bob', 'ring'] as const;
+const TEXT = ['ink', 'inkSoft', 'brass', 'good', 'bad', 'open', 'lead', 'bob', 'ring', 'thrust'] as const;
 
 test.each([
   ['light', LIGHT],

@@ -4,6 +4,7 @@ import type { Session } from '../../edit/session.ts';
 import type { Figure } from '../../scene/figure.ts';
 import type { Line } from '../../scene/grip.ts';
 import type { Geometry, Subject } from '../../scene/subject.ts';
+import type { ThrustMark } from '../../scene/thrustArrows.ts';
 import type { PlanePoint, View } from '../../scene/view.ts';
 import type { WireHandle } from '../../scene/wireHandle.ts';
 import type { Overlay } from '../overlay.ts';
@@ -32,6 +33,8 @@ export interface Gesture {
 export interface Scene extends Subject {
   readonly view: View;
   readonly geometry: Geometry;
+  /** What panning keeps in sight; by default the hull from the side. */
+  readonly outline?: readonly PlanePoint[];
   readonly figures: readonly Figure[];
   readonly lines: readonly Line[];
   readonly hardpoints: readonly { readonly id: string; readonly at: PlanePoint }[];
@@ -39,6 +42,7 @@ export interface Scene extends Subject {
   readonly support: PlanePoint | null;
   /** Ends of the wire runs selected, where the view lets them be taken. */
   readonly wireHandles: readonly WireHandle[];
+  readonly thrust: readonly ThrustMark[];
 }
 
 /** How the builder wants the hand to work. */

@@ -1,7 +1,8 @@
 /**
  * The arrow keys as edits: 1 mm, with Shift 10 mm. Left and right go along the hull in the side view and round it
- * (or athwart) in the front view; up and down go as far as the kind of place allows. On the skin, up is outward or
- * inward, whichever is up there; on the axis nothing goes up.
+ * (or athwart) in the front view and from above; up and down go along the hull from above, where the nose is up, and
+ * elsewhere as far as the kind of place allows. On the skin, up is outward or inward, whichever is up there; on the axis
+ * nothing goes up.
  */
 import type { Place } from '../../craft/placeSchema.ts';
 import { type Edit, runOf } from '../../edit/edit.ts';
@@ -10,7 +11,7 @@ import { placePart } from '../../edit/edits/parts.ts';
 import { shifted } from '../../edit/place.ts';
 import { idsOf, type Selection } from '../../edit/selection.ts';
 
-export type Facing = 'side' | 'front';
+export type Facing = 'side' | 'front' | 'above';
 export type Nudge = (place: Place) => Place;
 
 const STEP = 0.001;
@@ -28,9 +29,9 @@ export function nudgeFor(key: string, shift: boolean, facing: Facing): Nudge | n
     case 'ArrowRight':
       return facing === 'side' ? along(by) : round(1, by, shift);
     case 'ArrowUp':
-      return up(by);
+      return facing === 'above' ? along(-by) : up(by);
     case 'ArrowDown':
-      return up(-by);
+      return facing === 'above' ? along(by) : up(-by);
     default:
       return null;
   }

@@ -20,6 +20,6 @@ export function pan(ground: Ground, down: Hand): Gesture {
 
 /** Moves the drawing by px, but never the whole hull out of sight. */
 export function slide(ground: Ground, dx: number, dy: number): void {
-  const outline = sideOutline(ground.scene().geometry.hull, 24);
+  const { geometry, outline = sideOutline(geometry.hull, 24) } = ground.scene();
   ground.setView((view) => keptInSight(panned(view, dx, dy), outline));
 }

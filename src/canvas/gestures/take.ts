@@ -1,6 +1,7 @@
 /** Which gesture begins where the hand presses. */
 import { type Grip, gripAt } from '../../scene/grip.ts';
 import { toWorld } from '../../scene/view.ts';
+import { refusing } from './dragging.ts';
 import { dragHardpoint } from './dragHardpoint.ts';
 import { dragHullDiameter } from './dragHullDiameter.ts';
 import { dragHullLength } from './dragHullLength.ts';
@@ -12,6 +13,7 @@ import type { Gesture, Ground, Hand } from './gesture.ts';
 import { pan } from './pan.ts';
 import { reachable, slopOf } from './reach.ts';
 import { clickThrough, marquee } from './select.ts';
+import { turnArrow } from './turnThrust.ts';
 
 export type Take = (ground: Ground, hand: Hand) => Gesture;
 
@@ -50,6 +52,8 @@ export const takeInSide: Take = (ground, hand) => {
       return onWire(ground, hand, grip.id);
     case 'wireEnd':
       return dragWireEnd(ground, hand, grip);
+    case 'thrust':
+      return turnArrow(ground, hand, grip);
     case 'hull':
       return grip.end === 'tail' ? dragHullLength(ground, hand) : dragHullDiameter(ground, hand);
   }
@@ -68,3 +72,20 @@ export const takeInFront: Take = (ground, hand) => {
       return onEmpty(ground, hand);
   }
 };
+
+/** From above thrust is turned and parts are picked; they are moved in the other views. */
+export const takeFromAbove: Take = (ground, hand) => {
+  const grip = gripUnder(ground, hand);
+  switch (grip?.kind) {
+    case 'thrust':
+      return turnArrow(ground, hand, grip);
+    case 'part':
+      return refusing(ground, MOVED_ELSEWHERE, (at) =>
+        clickThrough(ground, { kind: 'part', id: grip.id }, at),
+      );
+    default:
+      return onEmpty(ground, hand);
+  }
+};
+
+const MOVED_ELSEWHERE = 'Parts are moved in the side view and from astern. Here the arrows are turned.';
