@@ -14,6 +14,10 @@ const IN_THE_DRAWING: readonly Line[] = [
   ['+ or −', 'Zoom'],
   ['0', 'Fit'],
   ['← or → in the front view', 'Turn round the hull by 0.1°, with Shift by 1°'],
+  [
+    ', or .',
+    'Turn the thrust of the thruster selected by 1°, with Shift by 10°: down or up in the side view, to port or starboard from above',
+  ],
 ];
 
 const IN_THE_LEDGER: readonly Line[] = [
@@ -36,12 +40,13 @@ const SNAP_WORDS: Readonly<Record<UnitSystem, string>> = {
 
 const BY_HAND: readonly Line[] = [
   ['Drag a part', 'Move it, keeping its kind of place'],
-  ['Drag the amber diamonds', 'Change the hull’s length or diameter'],
+  ['Drag the amber diamonds at the hull', 'Change the hull’s length or diameter'],
+  ['Drag the amber diamond at an arrow', 'Turn the thrust, within its limits'],
   ['Drag the end of a wire run', 'Join it to another part'],
   ['Shift + click', 'Add to what is selected'],
   ['Shift + drag on nothing', 'Select all within'],
   ['Alt while dragging', 'The other way about: no snapping, or snapping if Snap is off'],
-  ['Snapping', 'To other parts, else to {SNAP}; round the hull to whole degrees'],
+  ['Snapping', 'To other parts, else to {SNAP}; round the hull to whole degrees; thrust to every 5°'],
   ['Drag on nothing, or Space + drag', 'Move the view'],
   ['Wheel, or two fingers', 'Zoom'],
 ];
