@@ -79,7 +79,8 @@ test.each(assessed)(
     expect(rows['hull.fineness']!.value).toBeGreaterThanOrEqual(1);
     expect(rows['hull.fineness']!.value).toBeLessThan(7);
     for (const { middle } of geometry.pieces) {
-      expect(middle[0]).toBeGreaterThanOrEqual(0);
+      // A propeller may turn just ahead of the nose, or just behind the tail.
+      expect(middle[0]).toBeGreaterThan(hull.length * -0.05);
       expect(middle[0]).toBeLessThan(hull.length * 1.05);
       expect(Math.hypot(middle[1], middle[2])).toBeLessThan(hull.breadth / 2 + 0.35);
     }
@@ -88,7 +89,7 @@ test.each(assessed)(
 
 test('some meet their targets, most do not yet', () => {
   const met = assessed.filter(({ report }) => report.met).map(({ name }) => name);
-  expect(met).toEqual(['micro-round', 'school-cylinder']);
+  expect(met).toEqual(['aviary-counter', 'micro-round', 'school-cylinder', 'vault-inspector']);
 });
 
 test('what is wrong with the others is not the same for all', () => {
