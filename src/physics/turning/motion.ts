@@ -25,6 +25,7 @@ import type { Command } from './steer.ts';
 import type { TurningCraft } from './turningCraft.ts';
 
 export interface Motion {
+  readonly command: Command;
   /** Of (u, v, r, x, y, ψ). */
   readonly slope: Slope;
   /** Writes τ − C(ν)ν at a time with (u, v, r, …): N ahead, N to starboard, N·m to starboard. */
@@ -75,7 +76,7 @@ export function motionOf(craft: TurningCraft, command: Command, from = command.a
   const arrivals = craft.thrusters.flatMap(({ yaw }, i) =>
     command.angles[i] === from[i] ? [] : [Math.abs(command.angles[i]! - from[i]!) / yaw.slew],
   );
-  return { slope, forces, angleAt, arrivals };
+  return { command, slope, forces, angleAt, arrivals };
 }
 
 type AddTau = (t: number, u: number, v: number, r: number, into: Float64Array) => void;

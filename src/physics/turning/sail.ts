@@ -69,6 +69,15 @@ export interface Track {
   readonly r: readonly number[];
   /** Angle in yaw of the first thruster that turns in yaw (of the first, if none does), rad. */
   readonly vector: readonly number[];
+  /** Of each thruster, in their order. */
+  readonly thrusters: readonly TrackedThruster[];
+}
+
+export interface TrackedThruster {
+  /** Of full throttle, −reverse … 1; the same throughout. */
+  readonly share: number;
+  /** In yaw, rad, at each of the times. */
+  readonly angles: readonly number[];
 }
 
 const POINTS = 241;
@@ -87,6 +96,10 @@ export function trackOf(craft: TurningCraft, { motion, trajectory }: Sailed): Tr
     v: each(1),
     r: each(2),
     vector: time.map((t) => motion.angleAt(shown, t)),
+    thrusters: motion.command.shares.map((share, i) => ({
+      share,
+      angles: time.map((t) => motion.angleAt(i, t)),
+    })),
   };
 }
 
