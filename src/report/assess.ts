@@ -17,9 +17,8 @@ import { floatRows, supportRows } from './floatRows.ts';
 import { headlineOf } from './headline.ts';
 import { hullRows, massRows } from './hullRows.ts';
 import { leadRows, oneWeightRows } from './leadRows.ts';
-import type { Row } from './row.ts';
 import { noRow, type Rows } from './rows.ts';
-import { figureText } from './rowText.ts';
+import { figureText, readRow } from './rowText.ts';
 import { arrowsOf } from './turning/arrows.ts';
 import type { Verdict } from './verdict.ts';
 import { meetsTargets, type PlainVerdict, verdictsOf } from './verdicts.ts';
@@ -54,17 +53,16 @@ function assessState(state: CraftState, units: UnitSystem): Assessment {
   const verdicts = verdictsOf(state, rows);
   const advice = adviceOf(state, rows);
   const read = (sentence: string) => inUnits(sentence, units);
-  const readRow = (row: Row): Row => (row.why.includes('{') ? { ...row, why: read(row.why) } : row);
   const readVerdict = ({ sides, ...verdict }: PlainVerdict): Verdict => ({
     ...verdict,
     ...figureText(verdict.row, sides, units),
-    row: readRow(verdict.row),
+    row: readRow(verdict.row, units),
     target: read(verdict.target),
     marginWords: read(verdict.marginWords),
-    working: { ...verdict.working, inputs: verdict.working.inputs.map(readRow) },
+    working: { ...verdict.working, inputs: verdict.working.inputs.map((row) => readRow(row, units)) },
   });
   return {
-    rows: Object.fromEntries(Object.entries(rows).map(([key, row]) => [key, readRow(row)])),
+    rows: Object.fromEntries(Object.entries(rows).map(([key, row]) => [key, readRow(row, units)])),
     verdicts: verdicts.map(readVerdict),
     met: meetsTargets(verdicts),
     headline: read(headlineOf(state, rows, verdicts, advice)),

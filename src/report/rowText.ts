@@ -1,9 +1,14 @@
 /** Rows of the report as text in the builder's units. */
 
 import { decimalsFor, formatNumber, formatQuantity } from '../units/format.ts';
+import { inUnits } from '../units/sentence.ts';
 import { type Quantity, type UnitSystem, unitOf } from '../units/units.ts';
 import type { Row } from './row.ts';
 import { insignificant } from './rows.ts';
+
+/** The row with its sentence in the builder's units. */
+export const readRow = (row: Row, units: UnitSystem): Row =>
+  row.why.includes('{') ? { ...row, why: inUnits(row.why, units) } : row;
 
 /** "157.1 g", "157.1 ± 2.4 g"; "none" where there is no value. */
 export function rowText(row: Row, units: UnitSystem): string {

@@ -31,7 +31,7 @@ export const meetsTargets = (verdicts: readonly PlainVerdict[]): boolean =>
 
 const inputs = (rows: Rows, ...keys: string[]): Row[] => keys.flatMap((key) => rows[key] ?? []);
 /** To spare, off by, or just on the limit. */
-function marginWords(margin: number | null, quantity: Quantity): string {
+export function marginWords(margin: number | null, quantity: Quantity): string {
   if (margin === null) return '';
   if (insignificant(margin, quantity)) return margin < 0 ? 'just outside' : 'just inside';
   return margin < 0 ? `off by ${say(-margin, quantity)}` : `${say(margin, quantity)} to spare`;

@@ -2,6 +2,7 @@
 import { type Craft, keyed, listed } from '../../../src/craft/craft.ts';
 import type { Part } from '../../../src/craft/schema.ts';
 import type { ThrusterData, Vectoring } from '../../../src/craft/thrustSchema.ts';
+import { assess } from '../../../src/report/assess.ts';
 import { partOf, wireOf } from '../../edit/craftFixture.ts';
 import { workedExample } from '../workedExample.ts';
 
@@ -60,6 +61,16 @@ export const tailCraft = (change: Partial<Part> = {}): Craft => ({
   ),
   wires: keyed([wireOf('power')]),
 });
+
+/** The same with the lead on that levels it. */
+export function levelCraft(change: Partial<Part> = {}): Craft {
+  const craft = tailCraft(change);
+  const mass = assess(craft).rows['lead.mass']!.value!;
+  return withParts(
+    craft,
+    partOf('lead', { kind: 'ballast', mass, massTolerance: 0, place: { kind: 'axis', station: 0.05 } }),
+  );
+}
 
 /** A pair at the sides of the middle, throttled apart. */
 export const pairCraft = (): Craft =>

@@ -1,0 +1,36 @@
+/** What the thrusters can do to yaw the craft at rest. */
+import { infeasible, type Outcome, solved } from '../../numeric/outcome.ts';
+import { cgOf } from '../../physics/balance/loading.ts';
+import type { CraftState } from '../../physics/craftState.ts';
+import { type Leverage, leverageOf, yaws } from '../../physics/turning/leverage.ts';
+import { turningCraftOf } from '../../physics/turning/turningCraft.ts';
+import { spread } from '../floatRows.ts';
+import type { Rows } from '../rows.ts';
+import { cannotYaw, withoutThrust } from './thrusterWords.ts';
+import { rowsFrom } from './turnFigure.ts';
+
+export function leverageIn(state: CraftState, throttle: number): Outcome<Leverage> {
+  const craft = turningCraftOf(state);
+  if (craft.status === 'infeasible') {
+    const why = withoutThrust(state.craft, []);
+    return state.loading.solid.mass > 0 && why ? infeasible(why) : craft;
+  }
+  const { thrusters } = craft.value;
+  return thrusters.some(yaws) ? solved(leverageOf(craft.value, throttle)) : infeasible(cannotYaw(thrusters)!);
+}
+
+export function authorityRows(state: CraftState, throttle: number): Rows {
+  return rowsFrom(
+    leverageIn(state, throttle),
+    {
+      'turn.arm': ({ arm }) => arm,
+      'turn.yawMoment': ({ yawMoment }) => yawMoment,
+      'turn.virtualArm': ({ virtualArm }) => virtualArm,
+      'turn.virtualMoment': ({ virtualMoment }) => virtualMoment,
+      'turn.shareVectoring': ({ shares }) => shares.vectoring,
+      'turn.shareArm': ({ shares }) => shares.arm,
+      'turn.shareThrust': ({ shares }) => shares.thrust,
+    },
+    { 'turn.arm': { uncertainty: spread(state, (loading) => cgOf(loading)?.[0] ?? null) } },
+  );
+}

@@ -1,0 +1,71 @@
+/** The air that reaches each propeller in cruise, and what it does for the thrust per watt. */
+import { infeasible, type Outcome, solved } from '../../numeric/outcome.ts';
+import { kinematicViscosity } from '../../physics/air/viscosity.ts';
+import type { CraftState } from '../../physics/craftState.ts';
+import { boundaryLayerOf } from '../../physics/flow/boundaryLayer.ts';
+import { hullFlowOf } from '../../physics/flow/hullFlow.ts';
+import { powerAgainstFree } from '../../physics/flow/idealPower.ts';
+import { type Inflow, inflowAt } from '../../physics/flow/inflow.ts';
+import { discArea } from '../../physics/thrust/propeller.ts';
+import { type Thruster, thrustAt, thrustersOf } from '../../physics/thrust/thrusters.ts';
+import type { Rows } from '../rows.ts';
+import { withoutThrust } from './thrusterWords.ts';
+import { rowsFrom } from './turnFigure.ts';
+
+/** Of one piece of a thruster. */
+export interface PropellerAir extends Inflow {
+  readonly part: string;
+  readonly copy: number;
+  readonly name: string;
+  /** Thrust per watt over that in free air. */
+  readonly perWatt: number;
+}
+
+export interface Inflows {
+  readonly each: readonly PropellerAir[];
+  readonly cautions: readonly string[];
+}
+
+/** At a speed ahead, m/s, > 0. */
+export function inflowsAt(state: CraftState, speed: number, throttle: number): Outcome<Inflows> {
+  const { hull, air, craft } = state;
+  const thrusters = thrustersOf(state);
+  const why = withoutThrust(craft, thrusters);
+  if (why) return infeasible(why);
+  const flow = hullFlowOf(hull);
+  if (flow.status === 'infeasible') return flow;
+  const layer = boundaryLayerOf(flow.value, speed, kinematicViscosity(air));
+  if (layer.status === 'infeasible') return layer;
+  const each = thrusters.map((thruster): PropellerAir => {
+    const inflow = inflowAt(flow.value, layer.value, thruster);
+    return { ...names(thruster), ...inflow, perWatt: perWatt(thruster, inflow.ratio) };
+  });
+  return solved({ each, cautions: [...flow.value.cautions, ...layer.value.cautions] });
+
+  function perWatt({ diameter, ...thruster }: Thruster, ratio: number): number {
+    const thrust = thrustAt({ diameter, ...thruster }, throttle, speed);
+    return powerAgainstFree(thrust, discArea(diameter), air.density, speed, ratio);
+  }
+}
+
+const names = ({ part, copy, name }: Thruster) => ({ part, copy, name });
+
+/** Of all propellers together, each by the area of its disc. */
+export function inflowRows(state: CraftState, speed: Outcome<number>, throttle: number): Rows {
+  const inflows = speed.status === 'solved' ? inflowsAt(state, speed.value, throttle) : speed;
+  const areas = thrustersOf(state).map(({ diameter }) => discArea(diameter));
+  const whole = areas.reduce((sum, area) => sum + area, 0);
+  const mean = (of: (air: PropellerAir) => number) => (value: Inflows) =>
+    value.each.reduce((sum, air, i) => sum + (areas[i]! / whole) * of(air), 0);
+  const caution = inflows.status === 'solved' ? inflows.value.cautions.join(' ') : null;
+  return rowsFrom(
+    inflows,
+    {
+      'inflow.ratio': mean(({ ratio }) => ratio),
+      'inflow.perWatt': mean((air) => air.perWatt),
+      'inflow.wakeShare': mean(({ wakeShare }) => wakeShare),
+      'inflow.insideShare': mean(({ insideShare }) => insideShare),
+    },
+    { 'inflow.ratio': { caution } },
+  );
+}

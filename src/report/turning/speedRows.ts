@@ -1,0 +1,54 @@
+/** Thrust, drag, speed and power straight ahead. */
+import { infeasible, type Outcome, solved } from '../../numeric/outcome.ts';
+import type { CraftState } from '../../physics/craftState.ts';
+import type { AheadHelm } from '../../physics/thrust/ahead.ts';
+import { dragOf } from '../../physics/thrust/drag.ts';
+import { powerAt, steadySpeed, topSpeed } from '../../physics/thrust/speed.ts';
+import { thrustersOf } from '../../physics/thrust/thrusters.ts';
+import type { TurnAsked } from '../../physics/turning/asked.ts';
+import type { Rows } from '../rows.ts';
+import { withoutThrust } from './thrusterWords.ts';
+import { rowsFrom } from './turnFigure.ts';
+
+const FULL: AheadHelm = { throttle: 1, vector: null };
+
+export function speedRows(state: CraftState, { throttle, speed }: TurnAsked): Rows {
+  const thrusters = thrustersOf(state);
+  const why = withoutThrust(state.craft, thrusters);
+  const known: Outcome<null> = why ? infeasible(why) : solved(null);
+  const top = why ? infeasible(why) : topSpeed(state);
+  const cruise = speed === null ? (why ? infeasible(why) : steadySpeed(state, throttle)) : solved(speed);
+  const drag = dragOf(state);
+  const powers = (at: number) => powerAt(thrusters, FULL, at, state.air.density);
+  return {
+    ...rowsFrom(
+      top,
+      { 'speed.top': (at) => at },
+      { 'speed.top': { caution: top.status === 'solved' ? drag.cautions(top.value).join(' ') : null } },
+    ),
+    ...rowsFrom(
+      cruise,
+      { 'speed.cruise': (at) => at },
+      { 'speed.cruise': { why: speed === null ? 'The steady speed at that throttle.' : 'As asked.' } },
+    ),
+    ...rowsFrom(known, {
+      'speed.pitchSpeed': () => Math.min(...thrusters.map(({ pitchSpeed }) => pitchSpeed)),
+      'thrust.static': () => thrusters.reduce((sum, { staticThrust }) => sum + staticThrust, 0),
+    }),
+    ...rowsFrom(top, {
+      'drag.atTop': drag.at,
+      'drag.hullShare': (at) => drag.hull(at) / drag.at(at),
+      'drag.finShare': (at) => drag.fins(at) / drag.at(at),
+      'drag.podShare': (at) => drag.pods(at) / drag.at(at),
+      'power.atTop': (at) => powers(at).idealPower,
+    }),
+    ...rowsFrom(known, { 'power.atRest': () => powers(0).idealPower }),
+    ...shaftRows(known, powers(0).shaftPower),
+  };
+}
+
+/** The shaft's power is known only where a figure of merit is. */
+const shaftRows = (known: Outcome<null>, power: number | null): Rows =>
+  power === null || known.status === 'infeasible'
+    ? {}
+    : rowsFrom(solved(power), { 'power.shaftAtRest': (at) => at });

@@ -1,0 +1,36 @@
+/** Why a craft cannot be driven or steered, in sentences. */
+import { type Craft, listed } from '../../craft/craft.ts';
+import type { Thruster } from '../../physics/thrust/thrusters.ts';
+import { yaws } from '../../physics/turning/leverage.ts';
+import { isStuck } from '../../physics/turning/steer.ts';
+import { joined } from '../planWords.ts';
+
+export const NO_THRUSTER =
+  'The craft has no thruster: add a part of that kind and enter its thrust under Selected.';
+
+/** One sentence for each thruster of which nothing is known. */
+export const missingFigures = (craft: Craft): string[] =>
+  listed(craft.parts)
+    .filter(({ kind, thruster }) => kind === 'thruster' && thruster === null)
+    .map(({ name }) => `${name || 'A thruster'} has no thrust figures: enter them under Selected.`);
+
+/** Why nothing can be said of thrust; null when some thruster has figures. */
+export function withoutThrust(craft: Craft, thrusters: readonly Thruster[]): string | null {
+  if (thrusters.length > 0) return null;
+  return missingFigures(craft)[0] ?? NO_THRUSTER;
+}
+
+/** Each once, in order: "Tail thruster", "Port and Starboard". */
+export const namesOf = (thrusters: readonly Thruster[]): string =>
+  joined([...new Set(thrusters.map(({ name }) => name))]);
+
+export function cannotYaw(thrusters: readonly Thruster[]): string | null {
+  if (thrusters.length === 0 || thrusters.some(yaws)) return null;
+  return `${namesOf(thrusters)} can only push straight: nothing turns in yaw and nothing is throttled apart, so the craft cannot be steered. Let a thruster turn in yaw, or throttle a pair apart.`;
+}
+
+/** Of those with limits in yaw but no slew rate: a servo that never gets anywhere. */
+export const stuckWords = (thrusters: readonly Thruster[]): string[] =>
+  thrusters
+    .filter((thruster) => isStuck(thruster) && thruster.copy === 0)
+    .map(({ name }) => `${name} has limits in yaw but turns at 0 °/s: it is taken to stay as it is set.`);

@@ -1,0 +1,79 @@
+/** How the craft turns, and what is left when the throttle is cut. */
+import { type Outcome, solved } from '../../numeric/outcome.ts';
+import type { Need, Turn } from '../../physics/turning/turn.ts';
+import type { Rows } from '../rows.ts';
+import { rowsFrom } from './turnFigure.ts';
+
+/** Of one answer of the physics; `thrust`: what all thrusters give at rest at full throttle, N. */
+export function turnRows(turn: Outcome<Turn>, thrust: number): Rows {
+  const part = <T>(of: (turn: Turn) => Outcome<T>): Outcome<T> =>
+    turn.status === 'solved' ? of(turn.value) : turn;
+  return {
+    ...rowsFrom(
+      part(({ fromRest }) => fromRest),
+      { 'turn.timeTo90': ({ time }) => time },
+    ),
+    ...rowsFrom(
+      part(({ fromCruise }) => fromCruise),
+      { 'turn.timeTo90Cruise': ({ time }) => time },
+    ),
+    ...rowsFrom(
+      part(({ stop }) => stop),
+      { 'turn.stopTime': ({ time }) => time, 'turn.stopAngle': ({ angle }) => angle },
+    ),
+    ...rowsFrom(
+      part(({ steady }) => steady),
+      {
+        'turn.radius': ({ radius }) => radius,
+        'turn.radiusLengths': ({ lengths }) => lengths,
+        'turn.drift': ({ drift }) => drift,
+        'turn.yawRate': ({ yawRate }) => yawRate,
+        'turn.speed': ({ speed }) => speed,
+        'turn.vector': ({ vector }) => vector,
+      },
+    ),
+    ...rowsFrom(
+      part(({ gust }) => gust),
+      { 'turn.gustHeld': (speed) => speed },
+    ),
+    ...rowsFrom(
+      part(({ gustAtRest }) => gustAtRest),
+      { 'turn.gustHeldAtRest': (speed) => speed },
+    ),
+    ...needRows(turn, thrust),
+    ...glideRows(turn),
+  };
+}
+
+function needRows(turn: Outcome<Turn>, thrust: number): Rows {
+  const need = turn.status === 'solved' ? turn.value.authority.need : null;
+  const of = (each: Need, keys: readonly [TurnNeed, TurnNeed, TurnNeed, TurnNeed]): Rows => ({
+    ...rowsFrom(each.needed, { [keys[0]]: (moment: number) => moment }),
+    ...rowsFrom(each.thrust, { [keys[1]]: (times: number) => times * thrust }),
+    ...rowsFrom(each.vector, { [keys[2]]: (angle: number) => angle }),
+    ...rowsFrom(each.arm, { [keys[3]]: (arm: number) => arm }),
+  });
+  return {
+    ...(need?.turnTime ? of(need.turnTime, NEEDED) : {}),
+    ...(need?.sideGust ? of(need.sideGust, AGAINST_GUST) : {}),
+  };
+}
+
+const NEEDED = ['turn.neededMoment', 'turn.neededThrust', 'turn.neededVector', 'turn.neededArm'] as const;
+const AGAINST_GUST = ['turn.gustMoment', 'turn.gustThrust', 'turn.gustVector', 'turn.gustArm'] as const;
+type TurnNeed = (typeof NEEDED)[number] | (typeof AGAINST_GUST)[number];
+
+function glideRows(turn: Outcome<Turn>): Rows {
+  const glide = turn.status === 'solved' ? solved(turn.value.glide) : turn;
+  return {
+    ...rowsFrom(glide.status === 'solved' ? glide.value.after : glide, {
+      'glide.halving': ({ halving }) => halving,
+      'glide.time': ({ time }) => time,
+      'glide.angle': ({ angle }) => angle,
+    }),
+    ...rowsFrom(glide, {
+      'glide.munk': ({ stability }) => stability.munk,
+      'glide.fins': ({ stability }) => stability.fins,
+    }),
+  };
+}

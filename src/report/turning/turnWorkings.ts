@@ -1,0 +1,330 @@
+/** How every figure of thrust and turning comes about. */
+import type { Rows } from '../rows.ts';
+import type { Working } from '../verdict.ts';
+import type { TurnKey } from './turnFigure.ts';
+
+interface Recipe {
+  readonly formula: string;
+  readonly from: readonly TurnKey[];
+  readonly source: string;
+}
+
+const STATICS = 'Statics: each force times its lever.';
+const LAMB = 'H. Lamb, Hydrodynamics (1932), §§ 114–126.';
+const FLOW = 'Frictionless flow by sources on the skin; H. Lamb, Hydrodynamics (1932), §§ 118, 121.';
+const MOTION =
+  'M ν̇ + C(ν) ν = τ in the horizontal plane, after Kirchhoff (Lamb, Hydrodynamics, 1932, § 124); followed by Dormand and Prince’s method.';
+const STEADY =
+  'The motion in which nothing changes any more, by Newton’s method; held against the motion itself.';
+const ALONE = 'The same craft with this one figure changed until the target is just met.';
+const MOMENTUM = 'Momentum theory after Rankine and Froude.';
+const PITCH = 'Moments about the CB in steady level flight; Munk, NACA TR 184 (1924).';
+const HOERNER =
+  'Hull after Hoerner, Fluid-Dynamic Drag (1965); fins as plates; what hangs outside by its drag area.';
+
+const RECIPES: Readonly<Record<TurnKey, Recipe>> = {
+  'turn.arm': {
+    formula: 'Σ thrust × lever ÷ Σ thrust, of the thrusters that can yaw the craft',
+    from: ['thrust.static'],
+    source: STATICS,
+  },
+  'turn.yawMoment': {
+    formula: 'Σ T cos ε (X sin δ − Y cos δ) about the CG, each thruster turned hardest to starboard',
+    from: ['turn.arm', 'thrust.static', 'turn.shareVectoring'],
+    source: STATICS,
+  },
+  'turn.virtualArm': {
+    formula: 'the same about the point m X_G ÷ (m + k2 ρV) ahead of the CB',
+    from: ['turn.arm', 'added.k2'],
+    source: LAMB,
+  },
+  'turn.virtualMoment': {
+    formula: 'Σ T cos ε (X sin δ − Y cos δ) about the virtual mass centre',
+    from: ['turn.virtualArm', 'turn.yawMoment'],
+    source: LAMB,
+  },
+  'turn.shareVectoring': {
+    formula: 'yaw moment ÷ (Σ thrust × arm)',
+    from: ['turn.yawMoment', 'turn.arm', 'thrust.static'],
+    source: 'Definition: vectoring × arm × thrust make the moment.',
+  },
+  'turn.shareArm': {
+    formula: 'arm ÷ longest distance from the CG to an end of the hull',
+    from: ['turn.arm'],
+    source: 'Definition: vectoring × arm × thrust make the moment.',
+  },
+  'turn.shareThrust': {
+    formula: 'throttle × thrust that can yaw the craft ÷ all static thrust',
+    from: ['thrust.static'],
+    source: 'Definition: vectoring × arm × thrust make the moment.',
+  },
+  'turn.timeTo90': {
+    formula: 'M ν̇ + C(ν) ν = τ from rest until the heading is 90° off',
+    from: ['turn.yawMoment', 'inertia.yaw', 'inertia.airYaw'],
+    source: MOTION,
+  },
+  'turn.timeTo90Cruise': {
+    formula: 'M ν̇ + C(ν) ν = τ from cruise until the heading is 90° off',
+    from: ['turn.yawMoment', 'speed.cruise', 'inertia.yaw', 'inertia.airYaw', 'added.k1', 'added.k2'],
+    source: MOTION,
+  },
+  'turn.stopTime': {
+    formula: 'from the end of the 90° from cruise, hardest the other way, until r = 0',
+    from: ['turn.timeTo90Cruise', 'turn.yawMoment'],
+    source: MOTION,
+  },
+  'turn.stopAngle': {
+    formula: '∫ r dt while the yaw is being stopped',
+    from: ['turn.stopTime'],
+    source: MOTION,
+  },
+  'turn.radius': {
+    formula: '√(u² + v²) ÷ |r| where τ = C(ν) ν',
+    from: ['turn.speed', 'turn.yawRate'],
+    source: STEADY,
+  },
+  'turn.radiusLengths': { formula: 'radius ÷ hull length', from: ['turn.radius'], source: 'Definition.' },
+  'turn.drift': {
+    formula: 'atan2(−v, u) in a turn to starboard',
+    from: ['turn.speed', 'turn.yawRate'],
+    source: STEADY,
+  },
+  'turn.yawRate': {
+    formula: 'r where τ = C(ν) ν',
+    from: ['turn.vector', 'added.k1', 'added.k2'],
+    source: STEADY,
+  },
+  'turn.speed': {
+    formula: '√(u² + v²) where τ = C(ν) ν',
+    from: ['turn.vector', 'speed.cruise'],
+    source: STEADY,
+  },
+  'turn.vector': {
+    formula: 'the angle asked for, or the one of the greatest yaw moment, within its limits',
+    from: [],
+    source: 'The craft as entered.',
+  },
+  'turn.gustHeld': {
+    formula:
+      'the greatest side gust up to which the thrusters can make the moment about the virtual mass centre nil',
+    from: ['turn.virtualMoment', 'speed.cruise', 'added.k1', 'added.k2'],
+    source: 'Munk, NACA TR 184 (1924); cross-flow by strips; fins after Helmbold (1942).',
+  },
+  'turn.gustHeldAtRest': {
+    formula: 'the same without way on',
+    from: ['turn.virtualMoment'],
+    source: 'Cross-flow by strips; fins square to the air.',
+  },
+  'turn.neededMoment': {
+    formula: 'moment there is × the factor on thrust with which the first 90° take just the time asked for',
+    from: ['turn.timeTo90', 'turn.yawMoment'],
+    source: ALONE,
+  },
+  'turn.neededThrust': {
+    formula: 'static thrust × that factor',
+    from: ['thrust.static', 'turn.neededMoment'],
+    source: ALONE,
+  },
+  'turn.neededVector': {
+    formula: 'limits of vectoring widened until the time is just kept',
+    from: ['turn.shareVectoring', 'turn.neededMoment'],
+    source: ALONE,
+  },
+  'turn.neededArm': {
+    formula: 'levers lengthened until the time is just kept',
+    from: ['turn.arm', 'turn.neededMoment'],
+    source: ALONE,
+  },
+  'turn.gustMoment': {
+    formula: 'what the air gives at worst, over all gusts up to the one asked for',
+    from: ['turn.gustHeld', 'turn.virtualMoment', 'speed.cruise'],
+    source: ALONE,
+  },
+  'turn.gustThrust': {
+    formula: 'static thrust × needed ÷ available',
+    from: ['thrust.static', 'turn.gustMoment'],
+    source: ALONE,
+  },
+  'turn.gustVector': {
+    formula: 'limits of vectoring widened until the gust is just held',
+    from: ['turn.shareVectoring', 'turn.gustMoment'],
+    source: ALONE,
+  },
+  'turn.gustArm': {
+    formula: 'levers lengthened until the gust is just held',
+    from: ['turn.virtualArm', 'turn.gustMoment'],
+    source: ALONE,
+  },
+  'glide.halving': {
+    formula: 'M ν̇ + C(ν) ν = τ without thrust, until r is half',
+    from: ['turn.timeTo90Cruise', 'inertia.yaw', 'inertia.airYaw'],
+    source: MOTION,
+  },
+  'glide.time': {
+    formula: 'M ν̇ + C(ν) ν = τ without thrust, until r is a tenth',
+    from: ['turn.timeTo90Cruise', 'inertia.yaw', 'inertia.airYaw'],
+    source: MOTION,
+  },
+  'glide.angle': { formula: '∫ r dt meanwhile', from: ['glide.time'], source: MOTION },
+  'glide.munk': {
+    formula: '−(k2 − k1) ρV u²',
+    from: ['added.k1', 'added.k2', 'speed.cruise'],
+    source: 'Munk, NACA TR 184 (1924).',
+  },
+  'glide.fins': {
+    formula: '½ρ u² Σ S a cos²θ (x_fin − x_CB),  a = 2πA ÷ (2 + √(4 + A²))',
+    from: ['speed.cruise'],
+    source: 'Slope after Helmbold (1942).',
+  },
+  'added.k1': { formula: 'α₀ ÷ (2 − α₀)', from: [], source: LAMB },
+  'added.k2': { formula: 'β₀ ÷ (2 − β₀)', from: [], source: LAMB },
+  'added.kPrime': {
+    formula: '(b² − a²)² (α₀ − β₀) ÷ {(b² + a²)[2(b² − a²) + (b² + a²)(β₀ − α₀)]}',
+    from: [],
+    source: LAMB,
+  },
+  'added.hullK1': { formula: '−∮ φ ∂φ/∂n dS ÷ V, moving ahead', from: ['added.k1'], source: FLOW },
+  'added.hullK2': { formula: '−∮ φ ∂φ/∂n dS ÷ V, moving sideways', from: ['added.k2'], source: FLOW },
+  'added.hullKPrime': {
+    formula: '−∮ φ ∂φ/∂n dS ÷ inertia of the displaced air, yawing about the CB',
+    from: ['added.kPrime'],
+    source: FLOW,
+  },
+  'inertia.yaw': {
+    formula: 'Σ (I_z + m d²) of every solid mass, and the gas turning with the hull',
+    from: [],
+    source: 'Parallel-axis theorem.',
+  },
+  'inertia.airYaw': { formula: 'k′ × inertia of the displaced air', from: ['added.kPrime'], source: LAMB },
+  'thrust.static': {
+    formula: 'Σ static thrust, measured or (P · FM · √(2ρA))^⅔',
+    from: [],
+    source: `The craft as entered. ${MOMENTUM}`,
+  },
+  'speed.top': {
+    formula: 'where Σ thrust ahead = drag;  T = T₀ (1 − V ÷ pitch speed)',
+    from: ['thrust.static', 'speed.pitchSpeed', 'drag.atTop'],
+    source: `${HOERNER} Thrust in a straight line from rest to pitch speed: common practice, no source.`,
+  },
+  'speed.cruise': {
+    formula: 'where Σ thrust ahead at that throttle = drag; or as asked',
+    from: ['thrust.static', 'speed.pitchSpeed'],
+    source: HOERNER,
+  },
+  'speed.pitchSpeed': {
+    formula: 'as given, or motor speed ÷ (2π × gear ratio) × pitch',
+    from: [],
+    source: 'The craft as entered.',
+  },
+  'drag.atTop': {
+    formula: '½ρ V^⅔ C_DV u² + fins + ½ρ u² Σ drag areas',
+    from: ['speed.top'],
+    source: HOERNER,
+  },
+  'drag.hullShare': {
+    formula: '½ρ V^⅔ C_DV u² ÷ drag',
+    from: ['drag.atTop', 'speed.top'],
+    source: HOERNER,
+  },
+  'drag.finShare': { formula: 'drag of the fins ÷ drag', from: ['drag.atTop', 'speed.top'], source: HOERNER },
+  'drag.podShare': {
+    formula: '½ρ u² Σ drag areas ÷ drag',
+    from: ['drag.atTop', 'speed.top'],
+    source: HOERNER,
+  },
+  'power.atRest': { formula: 'Σ √(T³ ÷ (2ρA))', from: ['thrust.static'], source: MOMENTUM },
+  'power.atTop': {
+    formula: 'Σ T (V ÷ 2 + √(V² ÷ 4 + T ÷ (2ρA)))',
+    from: ['speed.top', 'drag.atTop'],
+    source: MOMENTUM,
+  },
+  'power.shaftAtRest': {
+    formula: 'Σ ideal power ÷ figure of merit',
+    from: ['power.atRest'],
+    source: 'Figures of merit as entered.',
+  },
+  'cruise.pitch': {
+    formula: 'θ at which all couples about the CB add up to nil',
+    from: [
+      'cruise.thrustCouple',
+      'cruise.dragCouple',
+      'cruise.munkCouple',
+      'cruise.finCouple',
+      'cruise.crossFlowCouple',
+      'cruise.pendulumCouple',
+    ],
+    source: PITCH,
+  },
+  'cruise.floating': {
+    formula: 'atan2(CG station − CB station, CB height − CG height)',
+    from: [],
+    source: 'At rest the line from CG to CB stands vertical.',
+  },
+  'cruise.thrustCouple': {
+    formula: 'Σ T (a sin ε − h cos ε)',
+    from: ['thrust.static', 'speed.cruise'],
+    source: STATICS,
+  },
+  'cruise.dragCouple': {
+    formula: 'Σ drag × height, of fins and of what hangs outside',
+    from: ['speed.cruise'],
+    source: STATICS,
+  },
+  'cruise.munkCouple': {
+    formula: '(k3 − k1) ρV ½U² sin 2α',
+    from: ['cruise.pitch', 'speed.cruise', 'added.k1'],
+    source: 'Munk, NACA TR 184 (1924).',
+  },
+  'cruise.finCouple': {
+    formula: 'Σ force square to each fin × its distance from the CB',
+    from: ['cruise.pitch', 'speed.cruise'],
+    source: 'Slope after Helmbold (1942).',
+  },
+  'cruise.crossFlowCouple': {
+    formula: '−½ρ · 1.2 η S w|w| × distance of the outline’s centroid from the CB',
+    from: ['cruise.pitch', 'speed.cruise'],
+    source: 'Strips of finite length, Aeronautical Engineer’s Data Book.',
+  },
+  'cruise.pendulumCouple': {
+    formula: 'g W [(x_G − x_B) cos θ − (z_B − z_G) sin θ]',
+    from: ['cruise.pitch'],
+    source: STATICS,
+  },
+  'cruise.rising': {
+    formula: 'thrust and air upward − g × static heaviness',
+    from: ['cruise.pitch', 'speed.cruise'],
+    source: 'Balance of forces.',
+  },
+  'cruise.criticalSpeed': {
+    formula: '√(g W h ÷ [(k3 − k1) ρV − ½ρ Σ S a sin²φ (x_fin − x_B)])',
+    from: ['added.k1'],
+    source: PITCH,
+  },
+  'inflow.ratio': {
+    formula: 'mean axial speed over the open disc ÷ speed of the craft',
+    from: ['speed.cruise'],
+    source: 'Frictionless flow by sources on the skin, with the layer and wake of the hull in it.',
+  },
+  'inflow.perWatt': {
+    formula: '(U ÷ 2 + √(U² ÷ 4 + T ÷ (2ρA))) ÷ the same with ratio × U',
+    from: ['inflow.ratio', 'speed.cruise'],
+    source: MOMENTUM,
+  },
+  'inflow.wakeShare': {
+    formula: 'area of disc within the layer or wake ÷ area of disc',
+    from: ['speed.cruise'],
+    source: 'Growth of the layer by momentum.',
+  },
+  'inflow.insideShare': {
+    formula: 'area of disc within the hull ÷ area of disc',
+    from: [],
+    source: 'Geometry.',
+  },
+};
+
+/** The working of the figure under that key, its inputs taken from the same report; null for a key that is none. */
+export function turnWorkingOf(key: string, rows: Rows): Working | null {
+  if (!Object.hasOwn(RECIPES, key)) return null;
+  const { formula, from, source } = RECIPES[key as TurnKey];
+  return { formula, inputs: from.flatMap((each) => rows[each] ?? []), source };
+}

@@ -1,0 +1,151 @@
+import { expect, test } from 'vitest';
+import type { Craft } from '../../../src/craft/craft.ts';
+import { TURN_KEYS } from '../../../src/report/turning/turnFigure.ts';
+import { turnFigures, turnReport } from '../../../src/report/turning/turnReport.ts';
+import { turnWorkingOf } from '../../../src/report/turning/turnWorkings.ts';
+import { craftFrom, samples } from '../../samples/readSamples.ts';
+import { DEGREE, levelCraft, pairCraft, straightCraft, tailCraft, unknownCraft } from './turningCrafts.ts';
+
+const FULL = { throttle: 1, vector: null, speed: null };
+const reportOf = (craft: Craft, asked = FULL) => turnReport(craft, asked, 'metric');
+const value = (craft: Craft, key: string, asked = FULL) => reportOf(craft, asked).rows[key]!.value!;
+
+const every = [
+  ...samples.map(({ name, text }) => ({ name, craft: craftFrom(text) })),
+  ...Object.entries({
+    tail: tailCraft(),
+    pair: pairCraft(),
+    straight: straightCraft(),
+    unknown: unknownCraft(),
+  }).map(([name, craft]) => ({ name, craft })),
+];
+
+test.each(every)(
+  '$name: each figure is a finite number, or a sentence says why there is none',
+  ({ craft }) => {
+    for (const units of ['metric', 'imperial'] as const) {
+      const { rows } = turnReport(craft, FULL, units);
+      for (const [key, { value, status, why }] of Object.entries(rows)) {
+        expect(status === 'infeasible' ? value === null : Number.isFinite(value), key).toBe(true);
+        if (status === 'infeasible') expect(why, key).toMatch(/^[A-Z].*[.!]$/s);
+        expect(why, key).not.toMatch(/[{}]|NaN|undefined/);
+      }
+    }
+  },
+);
+
+test.each(every)('$name: nothing is said in SI or of nothing', ({ craft }) => {
+  for (const units of ['metric', 'imperial'] as const) {
+    const { headline, notes, cautions, costWords, verdicts, propellers } = turnReport(craft, FULL, units);
+    const said = [
+      headline,
+      ...notes,
+      ...cautions,
+      ...costWords,
+      ...verdicts.flatMap(({ need, target, marginWords, figure }) => [...need, target, marginWords, figure]),
+      ...propellers.map(({ name }) => name),
+    ];
+    expect(headline).not.toBe('');
+    for (const sentence of said) expect(sentence).not.toMatch(/[{}]|NaN|undefined|Infinity/);
+  }
+});
+
+test.each(every)('$name: the quick figures are those of the whole report', ({ craft }) => {
+  const { rows, arrows, costs } = turnFigures(craft, FULL, 'metric');
+  expect(reportOf(craft)).toMatchObject({ rows, arrows, costs });
+});
+
+test('every figure opens into formula, figures of the same report and source', () => {
+  const craft = tailCraft();
+  const { rows } = reportOf({ ...craft, targets: { ...craft.targets, turnTime: 2, sideGust: 0.3 } });
+  for (const key of TURN_KEYS) {
+    const { formula, source, inputs } = turnWorkingOf(key, rows)!;
+    expect(formula.length, key).toBeGreaterThan(2);
+    expect(source.length, key).toBeGreaterThan(3);
+    for (const input of inputs) expect(Object.values(rows), key).toContain(input);
+  }
+  expect(TURN_KEYS).toEqual(expect.arrayContaining(Object.keys(rows)));
+  expect(turnWorkingOf('toString', rows)).toBeNull();
+});
+
+test('the tail thruster: moment is thrust times arm times the sine of its limit', () => {
+  // Statics by hand: 0.4 N turned 60°, on the arm from the CG to 2.97 m.
+  const { rows } = reportOf(tailCraft());
+  const arm = rows['turn.arm']!.value!;
+  expect(rows['turn.yawMoment']!.value).toBeCloseTo(0.4 * arm * Math.sin(60 * DEGREE), 12);
+  expect(rows['turn.shareVectoring']!.value).toBeCloseTo(Math.sin(60 * DEGREE), 12);
+});
+
+test('turned to the other side it turns to the other side, as far and as fast', () => {
+  const to = (degrees: number) => reportOf(tailCraft(), { ...FULL, vector: degrees * DEGREE }).rows;
+  const [port, starboard] = [to(40), to(-40)];
+  for (const key of [
+    'turn.timeTo90',
+    'turn.radius',
+    'turn.speed',
+    'turn.drift',
+    'turn.stopTime',
+    'turn.gustHeld',
+  ]) {
+    expect(port[key]!.value, key).toBeCloseTo(starboard[key]!.value!, 6);
+  }
+  expect(port['turn.yawRate']!.value).toBeCloseTo(-starboard['turn.yawRate']!.value!, 6);
+});
+
+test('less throttle turns slower, goes slower and leaves less moment', () => {
+  const half = { ...FULL, throttle: 0.5 };
+  expect(value(tailCraft(), 'turn.timeTo90', half)).toBeGreaterThan(value(tailCraft(), 'turn.timeTo90'));
+  expect(value(tailCraft(), 'speed.cruise', half)).toBeLessThan(value(tailCraft(), 'speed.cruise'));
+  expect(value(tailCraft(), 'turn.yawMoment', half)).toBeCloseTo(
+    value(tailCraft(), 'turn.yawMoment') / 2,
+    12,
+  );
+  expect(value(tailCraft(), 'speed.top', half)).toBe(value(tailCraft(), 'speed.top'));
+});
+
+test('shares of vectoring, arm and thrust make the moment', () => {
+  const { rows } = reportOf(tailCraft(), { ...FULL, throttle: 0.7 });
+  const share = (key: string) => rows[key]!.value!;
+  const longest = share('turn.arm') / share('turn.shareArm');
+  const whole = share('thrust.static') * longest;
+  expect(
+    share('turn.shareVectoring') * share('turn.shareArm') * share('turn.shareThrust') * whole,
+  ).toBeCloseTo(share('turn.yawMoment'), 12);
+});
+
+test('the couples of cruise add up to nil', () => {
+  const { rows } = reportOf(levelCraft());
+  const terms = Object.entries(rows).filter(([key]) => key.endsWith('Couple'));
+  expect(terms.map(([, { status }]) => status)).toEqual(Array(6).fill('solved'));
+  expect(terms.reduce((sum, [, { value }]) => sum + value!, 0)).toBeCloseTo(0, 9);
+});
+
+test('the headline names place, arm, time, radius and gusts', () => {
+  expect(reportOf(tailCraft()).headline).toMatch(
+    /^With Tail thruster at 2\.970 m the arm is \d\.\d+ m: 90° from rest in [\d.]+ s, radius [\d.]+ m at [\d.]+ m\/s, holds a [\d.]+ m\/s gust from the side in cruise and [\d.]+ m\/s at rest\.$/,
+  );
+  expect(reportOf(pairCraft()).headline).toContain(
+    'With Side thrusters at 1.500 m the arm is 0.600 m to the side:',
+  );
+});
+
+test('what cannot be: no figures, no steering, no thruster, each with its sentence', () => {
+  const unknown = reportOf(unknownCraft());
+  expect(unknown.headline).toBe('Tail thruster has no thrust figures: enter them under Selected.');
+  expect(unknown.cautions).toContain(unknown.headline);
+  expect(unknown.rows['turn.timeTo90']!.why).toBe(unknown.headline);
+  expect(unknown.turn).toBeNull();
+  const straight = reportOf(straightCraft());
+  expect(straight.headline).toMatch(/^Tail thruster can only push straight/);
+  expect(straight.rows['speed.top']!.status).toBe('solved');
+  const bare = { ...tailCraft(), parts: { byId: {}, order: [] }, wires: { byId: {}, order: [] } };
+  expect(reportOf(bare).headline).toMatch(/^The craft has no thruster/);
+});
+
+test('one pitch speed below 5 m/s is too low for outdoors', () => {
+  // Common practice, no source.
+  const { thruster } = tailCraft().parts.byId.thruster!;
+  const slow = tailCraft({ thruster: { ...thruster!, pitchSpeed: { kind: 'given', speed: 3 } } });
+  const said = (craft: Craft) => reportOf(craft).cautions.some((each) => each.includes('to fly outdoors'));
+  expect([said(slow), said(tailCraft())]).toEqual([true, false]);
+});
