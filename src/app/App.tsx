@@ -2,7 +2,9 @@
 import { useEffect, useState } from 'react';
 import { EditorContext } from '../panels/editor.ts';
 import { PlanningContext } from '../panels/plan/planning.ts';
+import { StudyingContext } from '../panels/turn/studying.ts';
 import { TurningContext } from '../panels/turn/turning.ts';
+import { PlanClient } from '../worker/planClient.ts';
 import { CommandBar } from './CommandBar.tsx';
 import { useCell } from './cell.ts';
 import { openFile } from './commands.ts';
@@ -13,12 +15,16 @@ import type { Store } from './store.ts';
 import { usePalette } from './theme.ts';
 import { useEditorOf } from './useEditorOf.ts';
 import { usePlanningOf } from './usePlanningOf.ts';
+import { useStudyingOf } from './useStudyingOf.ts';
 import { useTurningOf } from './useTurningOf.ts';
 import { Workspace } from './Workspace.tsx';
 
 export function App({ store }: { store: Store }) {
   const editor = useEditorOf(store);
-  const planning = usePlanningOf(store);
+  // One thread for plans, curves and studies; it begins with the first request.
+  const [client] = useState(() => new PlanClient());
+  const planning = usePlanningOf(store, client);
+  const studying = useStudyingOf(store, client);
   const turning = useTurningOf(store);
   const palette = usePalette(useCell(store.settings).theme);
   const over = useDrops(store);
@@ -31,9 +37,11 @@ export function App({ store }: { store: Store }) {
     <EditorContext value={editor}>
       <CommandBar store={store} />
       <PlanningContext value={planning}>
-        <TurningContext value={turning}>
-          <Workspace store={store} editor={editor} palette={palette} />
-        </TurningContext>
+        <StudyingContext value={studying}>
+          <TurningContext value={turning}>
+            <Workspace store={store} editor={editor} palette={palette} />
+          </TurningContext>
+        </StudyingContext>
       </PlanningContext>
       <Dialogs store={store} />
       {over && (

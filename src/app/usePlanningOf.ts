@@ -1,14 +1,14 @@
 /** What the plan panel and the drawing are given of the plan, made from the store. */
 import { useEffect, useMemo, useState } from 'react';
 import type { Planning } from '../panels/plan/planning.ts';
-import { PlanClient } from '../worker/planClient.ts';
+import type { PlanClient } from '../worker/planClient.ts';
 import { Carries } from './carries.ts';
 import { useCell } from './cell.ts';
 import { Plans } from './plans.ts';
 import type { Store } from './store.ts';
 
-export function usePlanningOf(store: Store): Planning {
-  const [{ plans, carries }] = useState(() => begin(store));
+export function usePlanningOf(store: Store, client: PlanClient): Planning {
+  const [{ plans, carries }] = useState(() => begin(store, client));
   const plansState = useCell(plans.state);
   const carriesState = useCell(carries.state);
   const looked = useCell(store.view).tab === 'plan';
@@ -39,9 +39,8 @@ export function usePlanningOf(store: Store): Planning {
   );
 }
 
-/** One thread for all of it, begun with the first request; on another craft everything begins afresh. */
-function begin(store: Store): { plans: Plans; carries: Carries } {
-  const client = new PlanClient();
+/** On another craft everything begins afresh. */
+function begin(store: Store, client: PlanClient): { plans: Plans; carries: Carries } {
   const plans = new Plans(store.shown, client);
   const carries = new Carries(store.shown, client);
   let { craftId } = store;

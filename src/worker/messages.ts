@@ -4,6 +4,7 @@ import type { Outcome } from '../numeric/outcome.ts';
 import type { CarryCurve, CarryLine, CarryOptions } from '../physics/ballast/carry.ts';
 import type { CarryTable, TableOptions } from '../physics/ballast/carryTable.ts';
 import type { Plan, PlanOptions, PlanProgress } from '../physics/ballast/plan.ts';
+import type { PlacementStudy, StudyOptions, StudyProgress } from '../physics/placing/study.ts';
 
 /** Options without the functions, which cannot be sent. */
 type Sent<T> = Omit<T, 'onProgress' | 'shouldStop'>;
@@ -19,6 +20,11 @@ export interface Tasks {
     progress: number;
   };
   table: { asked: { craft: Craft; options: Sent<TableOptions> }; value: CarryTable; progress: never };
+  place: {
+    asked: { craft: Craft; part: string; options: Sent<StudyOptions> };
+    value: Outcome<PlacementStudy>;
+    progress: StudyProgress;
+  };
 }
 
 export type Task = keyof Tasks;
@@ -32,6 +38,6 @@ export interface Withdrawal {
 }
 
 export type Reply =
-  | { readonly id: number; readonly kind: 'progress'; readonly progress: PlanProgress | number }
+  | { readonly id: number; readonly kind: 'progress'; readonly progress: Tasks[Task]['progress'] }
   | { readonly id: number; readonly kind: 'done'; readonly value: Tasks[Task]['value'] }
   | { readonly id: number; readonly kind: 'failed'; readonly why: string };

@@ -67,6 +67,14 @@ export class PlanClient {
     return this.#ask('table', asked, () => {});
   }
 
+  /** Each progress holds the stations so far: what is left when one stops. */
+  place(
+    asked: Tasks['place']['asked'],
+    onProgress: (progress: Tasks['place']['progress']) => void = () => {},
+  ): Job<Tasks['place']['value']> {
+    return this.#ask('place', asked, onProgress);
+  }
+
   /**
    * The plan while something is dragged. Of crafts that come faster than plans only the newest is planned for; `onPlan`
    * hears null when pieces or places are to be chosen.

@@ -5,6 +5,7 @@ import { carryCurve } from '../physics/ballast/carry.ts';
 import { carryTable } from '../physics/ballast/carryTable.ts';
 import { LivePlanner } from '../physics/ballast/live.ts';
 import { planOf } from '../physics/ballast/plan.ts';
+import { placementStudy } from '../physics/placing/study.ts';
 import type { Reply, Request, Tasks, Withdrawal } from './messages.ts';
 import { reunited } from './reunited.ts';
 
@@ -67,6 +68,8 @@ export class PlanServer {
         return carryCurve(craft, solver, request.line, { ...request.options, onProgress: seldom(tell) });
       case 'table':
         return carryTable(craft, solver, request.options);
+      case 'place':
+        return placementStudy(craft, request.part, solver, { ...request.options, onProgress: tell });
     }
   }
 }
