@@ -4,8 +4,8 @@
  *   moment of a thruster about the CG, per newton:  cos ε (X sin δ − Y cos δ),  + to starboard
  *
  * X ahead and Y to starboard of the CG, m; δ in yaw (+ thrust to starboard), ε in pitch as it is set. Hardest to starboard
- * is the angle within its limits, and within ±90°, where this is greatest at rest, and for pieces throttled apart full
- * throttle where that helps and what they can do backwards where it does not. All pieces of a part turn alike.
+ * is the angle within its limits, and within ±90°, where this is greatest at rest; of a pair throttled apart
+ * one piece gives then what it can backwards, where that adds to the moment. All pieces of a part turn alike.
  */
 import { heldWithin, pitchAngle } from '../thrust/ahead.ts';
 import type { Helm } from '../thrust/helm.ts';
@@ -43,14 +43,13 @@ export const momentOf = (craft: TurningCraft, { shares, angles }: Command): numb
 
 export function commandOf(craft: TurningCraft, { throttle, steer, vector }: Helm): Command {
   const way = steer < 0 ? -1 : 1;
-  const hardest = craft.thrusters.map((each) => hardestShare(craft, each, throttle, way));
+  const hardest = hardestOf(craft, throttle, way);
   return {
-    shares: hardest.map((share) => throttle + Math.abs(steer) * (share - throttle)),
-    angles: craft.thrusters.map((each) => {
+    shares: hardest.map(({ share }) => throttle + Math.abs(steer) * (share - throttle)),
+    angles: craft.thrusters.map((each, i) => {
       const straight = straightAngle(each);
-      if (!turnsInYaw(each)) return straight;
-      if (vector !== null) return heldWithin(each.yaw, vector);
-      return straight + Math.abs(steer) * (hardestAngle(craft, each, hardest, way) - straight);
+      if (vector !== null && turnsInYaw(each)) return heldWithin(each.yaw, vector);
+      return straight + Math.abs(steer) * (hardest[i]!.angle - straight);
     }),
   };
 }
@@ -61,35 +60,56 @@ export const partOfTheWay = (straight: Command, hard: Command, share: number): C
   angles: straight.angles.map((each, i) => each + share * (hard.angles[i]! - each)),
 });
 
-function hardestShare(craft: TurningCraft, thruster: Thruster, throttle: number, way: 1 | -1): number {
-  if (thruster.differ === 0) return throttle;
-  const helps = way * momentPerThrust(craft, thruster, straightAngle(thruster)) > 0;
-  return helps ? throttle : -thruster.reverse * throttle;
+interface Setting {
+  readonly share: number;
+  readonly angle: number;
 }
 
-function hardestAngle(
-  craft: TurningCraft,
-  { part, yaw }: Thruster,
-  shares: readonly number[],
-  way: 1 | -1,
-): number {
-  const momentAt = (angle: number) =>
-    craft.thrusters.reduce(
-      (sum, each, i) =>
-        each.part === part
-          ? sum + way * shares[i]! * each.staticThrust * momentPerThrust(craft, each, angle)
-          : sum,
-      0,
-    );
-  const [least, most] = forwardRange(yaw.least, yaw.most);
-  // The moment goes as a sine of the angle: its peak, if within the range, or else an end of it.
+/** For each thruster. The pieces of a part are set together, and throttled apart only where that gives more. */
+function hardestOf(craft: TurningCraft, throttle: number, way: 1 | -1): Setting[] {
+  const byPart = new Map<string, readonly Setting[]>();
+  return craft.thrusters.map(({ part, copy }) => {
+    const known = byPart.get(part) ?? hardestOfPart(craft, part, throttle, way);
+    byPart.set(part, known);
+    return known[copy]!;
+  });
+}
+
+function hardestOfPart(craft: TurningCraft, part: string, throttle: number, way: 1 | -1): Setting[] {
+  const pieces = craft.thrusters.filter((each) => each.part === part);
+  const choices = sharesOf(pieces, throttle).map((shares) => {
+    const momentAt = (angle: number) =>
+      pieces.reduce((sum, each, i) => {
+        const moment = each.staticThrust * momentPerThrust(craft, each, angle);
+        return sum + way * shares[i]! * moment;
+      }, 0);
+    const angle = hardestAngle(pieces[0]!, momentAt);
+    return { moment: momentAt(angle), settings: shares.map((share) => ({ share, angle })) };
+  });
+  return choices.reduce((best, each) => (each.moment > best.moment ? each : best)).settings;
+}
+
+/** What the pieces of a part may give: all alike, or one of a pair backwards. */
+function sharesOf(pieces: readonly Thruster[], throttle: number): number[][] {
+  const alike = pieces.map(() => throttle);
+  const backwards = pieces.flatMap(({ differ, reverse }, i) =>
+    differ === 0 ? [] : [alike.map((share, k) => (k === i ? -reverse * throttle : share))],
+  );
+  return [alike, ...backwards];
+}
+
+/** Where the moment, which goes as a sine of the angle, is greatest: its peak, if within the range, or else an end of it. */
+function hardestAngle(thruster: Thruster, momentAt: (angle: number) => number): number {
+  const straight = straightAngle(thruster);
+  if (!turnsInYaw(thruster)) return straight;
+  const [least, most] = forwardRange(thruster.yaw);
   const peak = Math.atan2(momentAt(Math.PI / 2), momentAt(0));
-  const candidates = [heldWithin(yaw, 0), least, most, Math.min(Math.max(peak, least), most)];
+  const candidates = [straight, least, most, Math.min(Math.max(peak, least), most)];
   return candidates.reduce((best, each) => (momentAt(each) > momentAt(best) ? each : best));
 }
 
 /** The part of the limits where the thrust still has a forward share; all of them where it never has. */
-function forwardRange(least: number, most: number): readonly [number, number] {
+function forwardRange({ least, most }: Thruster['yaw']): readonly [number, number] {
   const [from, to] = [Math.max(least, -Math.PI / 2), Math.min(most, Math.PI / 2)];
   return from <= to ? [from, to] : [least, most];
 }
