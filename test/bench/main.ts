@@ -7,6 +7,7 @@ import { run } from '../../src/edit/history.ts';
 import { hullOf } from '../../src/physics/hull/hullOf.ts';
 import { assess } from '../../src/report/assess.ts';
 import { craftOf } from './craftOf.ts';
+import { benchFlow } from './flow.ts';
 import { benchPage } from './page.ts';
 import { benchPlan } from './plan.ts';
 import { benchShapes } from './shapes.ts';
@@ -75,5 +76,6 @@ console.log(
 benchRecompute(40, '0.3 ms');
 benchRecompute(500, '3 ms');
 for (const [name, shape] of Object.entries(benchShapes)) benchHull(name, shape);
+benchFlow(print);
 await benchPlan(print);
 await benchPage(print);
