@@ -80,13 +80,13 @@ function countWords(found: number): string {
 /** Of the air where the craft has none, kg/m³. */
 const USUAL_DENSITY = 1.2;
 
-/** What a part does in the air, to two digits: "1.0 N from a 100 mm propeller". */
+/** What a part does in the air, to two digits: "1.0 N, ⌀ 100 mm". */
 function doingWords({ thruster, fin }: PartEntry, density: number, units: UnitSystem): string {
   if (fin) return `outline ${formatQuantity(fin.area, 'area', units, { uncertainty: fin.area })}`;
   if (!thruster) return '';
   const { staticThrust } = thrusterFacts(thruster, density);
   const thrust = formatQuantity(staticThrust, 'force', units, { uncertainty: staticThrust });
-  return `${thrust} from a ${formatQuantity(thruster.diameter, 'smallLength', units)} propeller`;
+  return `${thrust}, ⌀ ${formatQuantity(thruster.diameter, 'smallLength', units)}`;
 }
 
 interface EntryProps {

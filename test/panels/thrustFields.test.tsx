@@ -112,6 +112,6 @@ test('what is picked from the catalogue brings its figures, and the list tells t
   expect(partFrom(entry('valve'), place)).toMatchObject({ thruster: null, fin: null });
   const list = seen(render(CatalogueDialog, { onClose: () => {} }, worked));
   // (14 W × 0.52 × √(2 × 1.199 kg/m³ × 78.5 cm²))^(2/3) = 0.9994 N.
-  expect(list).toContain('1.0 N from a 100 mm propeller');
+  expect(list).toContain('1.0 N, ⌀ 100 mm');
   expect(list).toContain('outline 0.15 m²');
 });

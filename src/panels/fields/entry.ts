@@ -68,7 +68,7 @@ export function allowedText(allowed: string, quantity: Quantity | null, units: U
 
 function boundText(si: number, quantity: Quantity, units: UnitSystem): string {
   const { symbol } = unitOf(quantity, units);
-  const number = formatEntry(si, quantity, units);
+  const number = entryText(si, quantity, units);
   return `${number}${symbol === '°' || symbol === '' ? symbol : ` ${symbol}`}`;
 }
 

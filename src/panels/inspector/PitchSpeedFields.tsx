@@ -7,7 +7,7 @@ import type { FieldsOfThruster } from './ThrustFields.tsx';
 
 const CHOICES = choicesOf(['given', 'turning'], {
   given: 'Given',
-  turning: 'From motor speed and pitch',
+  turning: 'From motor speed',
 });
 
 const TURNING = [

@@ -6,7 +6,7 @@ import { FigureField, type SetFigures } from './FigureField.tsx';
 import type { FieldsOfThruster } from './ThrustFields.tsx';
 
 const CHOICES = choicesOf(['measured', 'power'], {
-  measured: 'Measured at the bench',
+  measured: 'Measured',
   power: 'From shaft power',
 });
 
@@ -28,7 +28,7 @@ export function StaticThrustFields({ data, density, set }: FieldsOfThruster & { 
           figures={thrust}
           name="staticThrust"
           quantity="force"
-          hint="Of one piece at full throttle"
+          hint="At the bench: of one piece, at full throttle"
           set={setThrust}
         />
       ) : (

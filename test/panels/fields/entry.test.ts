@@ -79,6 +79,7 @@ test('a bound that is another field, and a range, come in the builder’s unit t
   const range = `an angle from ${-Math.PI / 3} to ${Math.PI / 6} rad`;
   expect(allowedText(range, 'angle', 'metric')).toBe('an angle from -60° to 30°');
   expect(allowedText(range, null, 'metric')).toBe(range);
+  expect(allowedText('at least -0.523598776', 'angle', 'metric')).toBe('at least -30°');
 });
 
 test('where there need be no value nothing is no value, and rubbish is still refused', () => {
