@@ -82,10 +82,12 @@ function climbOf(craft: PitchCraft, helm: AheadHelm): Outcome<Climb> {
   });
 }
 
+const CALMER = 'Throttle back, bring the line of thrust nearer to the CB or hang weight lower.';
+
 const tooSteep = (pitch: number): Outcome<never> =>
   infeasible(
     `Left to itself the craft would pitch to ${say(pitch, 'angle')}, beyond the ${say(FARTHEST, 'angle')} for which these sums are good.`,
-    'Throttle back, bring the line of thrust nearer to the CB or hang weight lower.',
+    CALMER,
   );
 
 /** A craft slower than this stands, m/s. */
@@ -120,10 +122,7 @@ function flightFrom(craft: PitchCraft, helm: AheadHelm, start: Flight): Outcome<
     const [u, w, pitch] = root.value;
     return solved({ u: u!, w: w!, pitch: pitch! });
   }
-  return infeasible(
-    `No steady path was found at ${say(helm.throttle, 'fraction')} throttle.`,
-    'Throttle back, or turn the thrusters less.',
-  );
+  return infeasible(`No steady path was found at ${say(helm.throttle, 'fraction')} throttle.`, CALMER);
 }
 
 /** Forces and moment left over at (u, w, θ), against those of thrust, heaviness and pendulum. */

@@ -15,7 +15,7 @@ import { NO_THRUSTER } from '../thrust/speed.ts';
 import { criticalOf } from './critical.ts';
 import { type CruiseAsked, type Level, levelAt } from './level.ts';
 import { type PitchCraft, pitchCraftOf } from './pitchCraft.ts';
-import type { PitchTerms } from './pitchMoments.ts';
+import { flightAt, type Loads, loadsOn, type PitchTerms } from './pitchMoments.ts';
 
 export interface Cruise {
   /** rad, + nose-up */
@@ -47,8 +47,26 @@ export function cruiseOf(craft: PitchCraft, asked: CruiseAsked): Outcome<Cruise>
   if (pitch.status === 'infeasible') return pitch;
   const level = levelAt(craft, asked, pitch.value);
   if (level.status === 'infeasible') return level;
-  return notHeld(craft, level.value.speed) ?? solved(found(craft, floating.value, pitch.value, level.value));
+  return (
+    notHeld(craft, level.value.speed) ??
+    tooFast(craft, pitch.value, level.value) ??
+    solved(found(craft, floating.value, pitch.value, level.value))
+  );
 }
+
+/** Throttles as near as this are one. */
+const ROUNDING = 1e-9;
+
+function tooFast(craft: PitchCraft, pitch: number, { speed, throttle, loads }: Level) {
+  if (throttle <= 1 + ROUNDING) return undefined;
+  const full = loadsOn(craft, { throttle: 1, vector: null }, flightAt(speed, pitch, pitch));
+  return infeasible(
+    `Level flight at ${say(speed, 'speed')} takes ${say(thrustOf(loads), 'force')} of thrust; the thrusters give ${say(thrustOf(full), 'force')} there.`,
+    'Fly slower, or fit more thrust or a higher pitch speed.',
+  );
+}
+
+const thrustOf = ({ pushes }: Loads): number => pushes.reduce((sum, { thrust }) => sum + thrust, 0);
 
 export const FARTHEST = Math.PI / 6;
 const STEP = Math.PI / 180;
@@ -124,13 +142,13 @@ function found(
   pitch: number,
   { speed, throttle, loads }: Level,
 ): Cruise {
-  const { forward, up, pushes, terms } = loads;
+  const { forward, up, terms } = loads;
   return {
     pitch,
     floating,
     speed,
-    throttle,
-    thrust: pushes.reduce((sum, { thrust }) => sum + thrust, 0),
+    throttle: Math.min(throttle, 1),
+    thrust: thrustOf(loads),
     rising: forward * Math.sin(pitch) + up * Math.cos(pitch) - craft.heaviness,
     terms,
     cautions: flightCautions(craft, speed, pitch),

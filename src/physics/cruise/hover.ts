@@ -19,6 +19,7 @@ import type { CraftState } from '../craftState.ts';
 import { momentAbout } from '../mass/body.ts';
 import { NO_THRUSTER } from '../thrust/speed.ts';
 import { type Thruster, thrustersOf } from '../thrust/thrusters.ts';
+import { FARTHEST } from './cruise.ts';
 
 export interface Hover {
   /** rad, + nose-up */
@@ -71,14 +72,13 @@ function hoverWith(loading: Loading, thrusters: readonly Thruster[], reversed: b
   }
   const share = Math.abs(needed) / available;
   if (share > 1) return tooWeak(needed, available);
-  if (Math.abs(pitch) > STEEPEST) return tooSteep(pitch);
+  if (Math.abs(pitch) > FARTHEST) return tooSteep(pitch);
   const parts = [...new Set(thrusters.map(({ part }) => part))];
   return solved({ pitch, vector, reversed, needed, available, share, parts });
 }
 
 /** Angles as near as this are one, rad. */
 const ROUNDING = 1e-9;
-const STEEPEST = Math.PI / 4;
 
 /** How far beyond its limits the angle lies, rad, ≥ 0. */
 const shortOf = ({ pitch: { least, most } }: Thruster, angle: number): number =>
@@ -116,6 +116,6 @@ const tooWeak = (needed: number, available: number) =>
 
 const tooSteep = (pitch: number) =>
   infeasible(
-    `Hovering on its thrusters the craft would stand at ${say(pitch, 'angle')}.`,
+    `Hovering on its thrusters the craft would stand at ${say(pitch, 'angle')}, more than ${say(FARTHEST, 'angle')} from level.`,
     'Bring the thrusters under the CB, or hang weight lower.',
   );

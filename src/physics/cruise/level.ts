@@ -19,6 +19,7 @@ export type CruiseAsked = { readonly throttle: number } | { readonly speed: numb
 export interface Level {
   /** m/s */
   readonly speed: number;
+  /** Above 1 where full throttle is not enough for the speed asked for. */
   readonly throttle: number;
   readonly loads: Loads;
 }
@@ -42,25 +43,26 @@ export function levelAt(craft: PitchCraft, asked: CruiseAsked, pitch: number): O
 
 const helmAt = (throttle: number): AheadHelm => ({ throttle, vector: null });
 
+/** Of a thruster that is not pointed backwards this much is enough, however fast. */
+const MOST_THROTTLE = 1e6;
+
 function throttleFor(along: (throttle: number) => number, speed: number): Outcome<number> {
   if (speed === 0) return solved(0);
-  const left = along(1);
-  if (left >= 0) return findRoot(along, 0, 1);
-  return infeasible(
-    `Level flight at ${say(speed, 'speed')} takes ${say(-left, 'force')} more than full thrust gives there.`,
-    'Fly slower, or fit more thrust or a higher pitch speed.',
-  );
+  let most = 1;
+  while (along(most) < 0 && most < MOST_THROTTLE) most *= 4;
+  return along(most) < 0 ? notAhead(along(1)) : findRoot(along, 0, most);
 }
+
+const notAhead = (thrust: number) =>
+  infeasible(
+    `Along a level path thrust less drag is ${say(thrust, 'force')}, so the craft does not move ahead.`,
+    'Turn the thrusters forward.',
+  );
 
 function speedFor(along: (speed: number) => number, throttle: number): Outcome<number> {
   if (throttle === 0) return solved(0);
   const atRest = along(0);
-  if (!(atRest > 0)) {
-    return infeasible(
-      `Along a level path the thrust is ${say(atRest, 'force')} at rest, so the craft does not move ahead.`,
-      'Turn the thrusters forward.',
-    );
-  }
+  if (!(atRest > 0)) return notAhead(atRest);
   let fast = 1;
   while (along(fast) > 0) fast *= 2;
   return findRoot(along, 0, fast, 1e-10);
