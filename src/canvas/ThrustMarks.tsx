@@ -24,7 +24,7 @@ export const ThrustMarks = memo(({ marks, arc, view, palette }: ThrustMarksProps
       context.lineJoin = 'round';
       context.lineCap = 'round';
       if (arc) limits(context, arc, palette);
-      for (const { at, tip } of marks) arrow(context, toScreen(view, at), toScreen(view, tip), palette);
+      for (const { at, tip } of marks) paintArrow(context, toScreen(view, at), toScreen(view, tip), palette);
       context.lineCap = 'butt';
     }}
   />
@@ -33,14 +33,15 @@ export const ThrustMarks = memo(({ marks, arc, view, palette }: ThrustMarksProps
 const HEAD = 9;
 
 /** Twice: first as a halo, so that lines under it do not disturb. */
-function arrow(context: Context, from: ScreenPoint, to: ScreenPoint, palette: Palette): void {
+export function paintArrow(context: Context, from: ScreenPoint, to: ScreenPoint, palette: Palette): void {
   const long = Math.hypot(to.x - from.x, to.y - from.y);
   const way = { x: (to.x - from.x) / long, y: (to.y - from.y) / long };
+  const size = Math.min(HEAD, long);
   const back = (along: number, across: number) => ({
     x: to.x - way.x * along - way.y * across,
     y: to.y - way.y * along + way.x * across,
   });
-  const head = [to, back(HEAD, 0.5 * HEAD), back(HEAD, -0.5 * HEAD)];
+  const head = [to, back(size, 0.5 * size), back(size, -0.5 * size)];
   for (const [ink, more] of [
     [palette.paper, 3],
     [palette.thrust, 0],
@@ -48,7 +49,7 @@ function arrow(context: Context, from: ScreenPoint, to: ScreenPoint, palette: Pa
     context.strokeStyle = ink;
     context.fillStyle = ink;
     context.lineWidth = 2.6 + more;
-    traceOnScreen(context, [from, back(HEAD, 0)], false);
+    traceOnScreen(context, [from, back(size, 0)], false);
     context.stroke();
     context.lineWidth = 1 + more;
     traceOnScreen(context, head, true);
