@@ -10,6 +10,7 @@ import { NotesPanel } from '../panels/NotesPanel.tsx';
 import { PlanPanel } from '../panels/plan/PlanPanel.tsx';
 import { type Tab, Tabs } from '../panels/Tabs.tsx';
 import { TargetsPanel } from '../panels/TargetsPanel.tsx';
+import type { Palette } from '../scene/palette.ts';
 import { useCell } from './cell.ts';
 import type { Store } from './store.ts';
 
@@ -31,22 +32,23 @@ const TABS: readonly Tab<TabId>[] = [
 /** Panels that stay in front while things are picked. */
 const READ: ReadonlySet<string> = new Set<TabId>(['figures', 'plan', 'turn']);
 
-const PANELS: Readonly<Record<TabId, readonly ReactNode[]>> = {
+const PANELS: Readonly<Record<Exclude<TabId, 'turn'>, readonly ReactNode[]>> = {
   selected: [<Inspector key="inspector" />],
   hull: [<HullPanel key="hull" />, <FilmPanel key="film" />],
   gas: [<GasPanel key="gas" />, <DayPanel key="day" />],
   targets: [<TargetsPanel key="targets" />],
   plan: [<PlanPanel key="plan" />],
-  turn: [
-    <Suspense key="turn" fallback={<p className="panel aside">Loading…</p>}>
-      <TurnTab />
-    </Suspense>,
-  ],
   figures: [<FiguresPanel key="figures" />],
   notes: [<NotesPanel key="notes" />],
 };
 
-export function SideColumn({ store, hidden }: { store: Store; hidden: boolean }) {
+interface SideColumnProps {
+  readonly store: Store;
+  readonly palette: Palette;
+  readonly hidden: boolean;
+}
+
+export function SideColumn({ store, palette, hidden }: SideColumnProps) {
   const { tab } = useCell(store.view);
   const front = TABS.find(({ id }) => id === tab)?.id ?? 'hull';
   const show = (id: TabId) => store.view.set({ ...store.view.get(), tab: id });
@@ -54,7 +56,13 @@ export function SideColumn({ store, hidden }: { store: Store; hidden: boolean })
   return (
     <aside className="column" aria-label="Panels" hidden={hidden}>
       <Tabs<TabId> label="Panels" tabs={TABS} front={front} onFront={show} body="tab-panel" focusable>
-        {PANELS[front]}
+        {front === 'turn' ? (
+          <Suspense fallback={<p className="panel aside">Loading…</p>}>
+            <TurnTab store={store} palette={palette} />
+          </Suspense>
+        ) : (
+          PANELS[front]
+        )}
       </Tabs>
     </aside>
   );

@@ -48,7 +48,7 @@ export function Workspace({ store, editor, palette }: WorkspaceProps) {
         {...COLUMN}
         onSize={setColumn}
       />
-      <SideColumn store={store} hidden={column === 0} />
+      <SideColumn store={store} palette={palette} hidden={column === 0} />
     </main>
   );
 }

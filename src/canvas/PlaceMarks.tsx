@@ -64,7 +64,7 @@ function drawStrip(context: Context, strip: Strip, props: PlaceMarksProps): void
     if (typeof y === 'number') dot(context, { x: page.stations[index]!, y }, 2.6, palette.good, palette);
   }
   scaleNumbers(context, strip, props);
-  name(context, strip, props);
+  if (!props.read) name(context, strip, props);
 }
 
 function dot(context: Context, { x, y }: ScreenPoint, radius: number, ink: string, { paper }: Palette): void {
@@ -77,14 +77,15 @@ function dot(context: Context, { x, y }: ScreenPoint, radius: number, ink: strin
   context.stroke();
 }
 
-/** Aft of the tail while it is in sight, else at the edge. */
+/** Aft of tail and stations while they are in sight, else at the edge. */
 function scaleNumbers(context: Context, { high, low, top, foot }: Strip, props: PlaceMarksProps): void {
   const { page, size, palette } = props;
   context.font = SMALL;
   context.textBaseline = 'middle';
   context.textAlign = 'left';
   const room = Math.max(textWidth(high, SMALL), textWidth(low, SMALL)) + 4;
-  const x = Math.min(page.right + 6, size.width - room);
+  const aft = Math.max(page.right, page.stations.at(-1) ?? 0, page.today ?? 0);
+  const x = Math.min(aft + 9, size.width - room);
   writeOn(context, high, { x, y: top + 5 }, palette.inkSoft, palette.paper);
   if (foot - top > 22) writeOn(context, low, { x, y: foot - 4 }, palette.inkSoft, palette.paper);
 }
@@ -146,16 +147,16 @@ function reading(context: Context, { page, read, palette, size }: PlaceMarksProp
   context.strokeStyle = palette.brass;
   context.lineWidth = 1.5;
   across(context, { x, y: headOf(page) - 2 }, { x, y: footOf(page) + 4 });
-  page.strips.forEach(({ heights, top, foot }, i) => {
+  page.strips.forEach(({ curve, heights, top, foot }, i) => {
     const y = heights[read.index] ?? null;
     if (y !== null) dot(context, { x, y }, 4, palette.brass, palette);
-    const text = read.values[i]!;
+    const text = `${curve.name} ${read.values[i]}`;
     const width = textWidth(text, fontOf(12, 600));
     const left = x + 9 + width < size.width ? x + 9 : x - 9 - width;
     context.font = fontOf(12, 600);
     context.textBaseline = 'middle';
     context.textAlign = 'left';
-    const at = Math.min(Math.max(y ?? (top + foot) / 2, top + 7), foot - 6);
+    const at = Math.min(Math.max(y ?? foot, top + 7), foot - 6);
     writeOn(context, text, { x: left, y: at }, palette.ink, palette.paper);
   });
 }

@@ -53,6 +53,10 @@ interface FigureListProps {
   workingOf(key: string): Working | null;
   /** What can be done about a figure. */
   readonly action?: (key: string) => ReactNode;
+  /** Whether what is told of a figure that stands is read when it is opened, and not before. */
+  readonly whyInside?: boolean;
+  /** Figures of before the last change. */
+  readonly isOld?: (key: string) => boolean;
 }
 
 export function FigureList({ rows, ...rest }: FigureListProps) {
@@ -67,24 +71,25 @@ export function FigureList({ rows, ...rest }: FigureListProps) {
 
 type FigureProps = Omit<FigureListProps, 'rows'> & { readonly name: string; readonly row: Row };
 
-function Figure({ name, row, sheet, all, workingOf, action }: FigureProps) {
+function Figure({ name, row, sheet, all, workingOf, action, whyInside, isOld }: FigureProps) {
   const { units } = useEditor();
   const open = sheet.open.has(name);
   const word = STATUS_WORDS[row.status];
   const working = open ? workingOf(name) : null;
+  const hint = FIGURE_HINTS[name] ?? (whyInside && !word ? row.why : undefined);
   return (
-    <li data-figure={name} data-status={row.status}>
+    <li data-figure={name} data-status={row.status} className={isOld?.(name) ? 'plan-old' : undefined}>
       <button
         type="button"
         className="figure-face"
-        title={FIGURE_HINTS[name]}
+        title={hint}
         aria-expanded={open}
         onClick={() => sheet.toggle(name)}
       >
         <span className="figure-label">{row.label}</span>{' '}
         <span className="number">{rowText(row, units)}</span>
       </button>
-      {(word || row.why) && (
+      {(word || (row.why && !whyInside)) && (
         <p className="row-why">
           {word && <strong>{word}: </strong>}
           {row.why}
@@ -93,7 +98,7 @@ function Figure({ name, row, sheet, all, workingOf, action }: FigureProps) {
       {action?.(name)}
       {open && (
         <div className="figure-working">
-          {FIGURE_HINTS[name] && <p>{FIGURE_HINTS[name]}</p>}
+          {hint && <p>{hint}</p>}
           {working ? <WorkingBody working={working} rows={all} onJump={sheet.jump} /> : <p>As entered.</p>}
         </div>
       )}

@@ -29,7 +29,7 @@ const COLUMNS: readonly Column[] = [
 
 export function StudyTable({ fresh }: { fresh: boolean }) {
   const { units } = useEditor();
-  const { points, busy } = useStudying();
+  const { points, today, busy } = useStudying();
   const [picked, setPicked] = useState<number | null>(null);
   const best = points.filter((point) => point.best);
   if (best.length === 0) {
@@ -58,6 +58,12 @@ export function StudyTable({ fresh }: { fresh: boolean }) {
           </tr>
         </thead>
         <tbody>
+          {today && (
+            <tr>
+              <th scope="row">today</th>
+              <Figures point={today} />
+            </tr>
+          )}
           {best.map((point) => (
             <StudyRow
               key={point.station}
@@ -101,14 +107,7 @@ function StudyRow({ point, open, fresh, onPick }: StudyRowProps) {
             {at}
           </button>
         </th>
-        {COLUMNS.map(({ head, quantity, value }) => {
-          const figure = value(point);
-          return (
-            <td className="number" key={head}>
-              {figure === null ? '–' : bare(figure, quantity, units)}
-            </td>
-          );
-        })}
+        <Figures point={point} />
       </tr>
       {open && (
         <tr className="kept-actions" onPointerEnter={mark} onPointerLeave={unmark}>
@@ -119,6 +118,18 @@ function StudyRow({ point, open, fresh, onPick }: StudyRowProps) {
       )}
     </>
   );
+}
+
+function Figures({ point }: { point: PlacedPoint }) {
+  const { units } = useEditor();
+  return COLUMNS.map(({ head, quantity, value }) => {
+    const figure = value(point);
+    return (
+      <td className="number" key={head}>
+        {figure === null ? '–' : bare(figure, quantity, units)}
+      </td>
+    );
+  });
 }
 
 /** Without its unit, which stands in the head. */
@@ -157,7 +168,7 @@ function Actions({ point, at, fresh }: { point: PlacedPoint; at: string; fresh: 
             aria-disabled={!ready}
             onClick={() => ready && apply(moveAndHang(thruster, point.place, stowage))}
           >
-            Move it and hang the ballast<span className="spoken">, at {at}</span>
+            Move it, hang the ballast<span className="spoken">, at {at}</span>
           </button>
         )}
       </span>

@@ -1,16 +1,80 @@
 /** How the craft turns, climbs and flies with its thrusters as they are, and where a thruster had better sit. */
 import type { ReactNode } from 'react';
+import { HAZARDS } from '../../report/hazards.ts';
+import type { TurnReport } from '../../report/turning/turnReport.ts';
+import type { Turn } from '../../report/turning/turns.ts';
+import { Caution } from '../Caution.tsx';
+import { useEditor } from '../editor.ts';
+import { useFigureSheet } from '../FigureSheet.tsx';
+import { Foldable } from '../plan/Foldable.tsx';
+import { MomentBars } from './MomentBars.tsx';
+import { StudySection } from './StudySection.tsx';
+import { TurnAnswer } from './TurnAnswer.tsx';
+import { TurnControls } from './TurnControls.tsx';
+import { TurnFigures } from './TurnFigures.tsx';
+import { type ReportNow, useTurnReport } from './useTurnReport.ts';
 import './turn.css';
 
 interface TurnPanelProps {
   /** Plays the path of the turn; the page puts it in, since panels do not draw. */
-  readonly player: ReactNode;
+  player(turn: Turn): ReactNode;
+  /** Brings the targets to the front. */
+  onTargets(): void;
 }
 
-export function TurnPanel({ player }: TurnPanelProps) {
+export function TurnPanel(props: TurnPanelProps) {
+  const now = useTurnReport();
+  return now ? <TurnSheet now={now} {...props} /> : <p className="panel aside">Working out how it turns…</p>;
+}
+
+export function TurnSheet({ now, player, onTargets }: TurnPanelProps & { now: ReportNow }) {
+  const { report, fresh, figures } = now;
+  const sheet = useFigureSheet();
+  const old = fresh ? '' : 'plan-old';
+  // What follows at once stands among what is of before the last change.
+  const rows = fresh ? report.rows : { ...report.rows, ...figures.rows };
   return (
-    <section className="panel turn" aria-label="Turning">
-      {player}
+    <>
+      <section className="panel turn" aria-label="Turning" ref={sheet.frame}>
+        <div className={`plan-answer ${old}`}>
+          <TurnAnswer report={report} onTargets={onTargets} />
+        </div>
+        <MomentBars rows={rows} />
+        <TurnControls />
+        {report.turn && (
+          <Foldable title="Path of the turn" note="">
+            <div className={old}>{player(report.turn)}</div>
+          </Foldable>
+        )}
+        <Foldable title="Where should the thruster sit?" note="" open>
+          <StudySection />
+        </Foldable>
+        <TurnFigures
+          report={report}
+          rows={rows}
+          sheet={sheet}
+          isOld={(key) => !fresh && !(key in figures.rows)}
+        />
+      </section>
+      <Cautions report={report} />
+    </>
+  );
+}
+
+const TETHER =
+  'Models leave things out. Try the craft, and every change to it, on a tether before it flies free.';
+
+function Cautions({ report: { cautions } }: { report: TurnReport }) {
+  const { craft } = useEditor();
+  const thrusters = craft.parts.order.some((id) => craft.parts.byId[id]!.kind === 'thruster');
+  return (
+    <section className="panel turn" aria-label="What to mind">
+      {cautions.map((caution) => (
+        <Caution key={caution}>{caution}</Caution>
+      ))}
+      {thrusters && <Caution>{HAZARDS.thruster}</Caution>}
+      <Caution>{HAZARDS.people}</Caution>
+      <Caution>{TETHER}</Caution>
     </section>
   );
 }
