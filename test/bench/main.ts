@@ -9,6 +9,7 @@ import { assess } from '../../src/report/assess.ts';
 import { craftOf } from './craftOf.ts';
 import { benchFlow } from './flow.ts';
 import { benchPage } from './page.ts';
+import { benchPlacing } from './placing.ts';
 import { benchPlan } from './plan.ts';
 import { benchShapes } from './shapes.ts';
 
@@ -78,4 +79,5 @@ benchRecompute(500, '3 ms');
 for (const [name, shape] of Object.entries(benchShapes)) benchHull(name, shape);
 benchFlow(print);
 await benchPlan(print);
+await benchPlacing(print);
 await benchPage(print);

@@ -46,13 +46,14 @@ function turningFigures(state: CraftState, asked: TurnAsked): TurningFigures {
   if (!craft) return NO_TURN;
   const { straight, turn } = commandsOf(craft, asked);
   const cruise = cruiseSpeedOf(craft, asked);
+  const able = craft.thrusters.some(yaws);
   const fromRest = valueOrNull(quarterTurn(craft, straightAt(0, straight), turn));
   const steady = valueOrNull(steadyTurn(craft, straight, turn, cruise));
   return {
-    arm: craft.thrusters.some(yaws) ? leverageOf(craft, asked.throttle).arm : null,
+    arm: able ? leverageOf(craft, asked.throttle).arm : null,
     timeTo90: fromRest?.trajectory.end ?? null,
     radius: steady?.turn.radius ?? null,
-    gustHeld: gustHeld(craft, asked.throttle, cruise),
+    gustHeld: able ? gustHeld(craft, asked.throttle, cruise) : null,
   };
 }
 
