@@ -68,7 +68,11 @@ export function boundaryLayerOf(
       'Give a speed above nothing.',
     );
   const { fine, edge } = edgeOf(flow, speed);
-  const stream = { speed, viscosity, trip: trip === undefined ? null : tapeAt(flow, trip) };
+  const stream = {
+    speed,
+    viscosity,
+    trip: trip === undefined ? null : between(flow.surface, trip, ({ tape }) => tape),
+  };
   const growth = growLayer(edge, stream);
   const wakeArea = growth.marks.at(-1)!.area;
   const marks = flow.surface.map((mark, i) => layerMark(flow, mark, growth.marks[i * STEPS]!));
@@ -108,12 +112,16 @@ function edgeOf({ surface }: HullFlow, speed: number): { fine: FinePlace[]; edge
   };
 }
 
-/** Tape distance of a station, between the marks. */
-function tapeAt({ surface }: HullFlow, station: number): number {
-  const next = surface.findIndex((mark) => mark.station > station);
-  if (next <= 0) return next < 0 ? surface.at(-1)!.tape : 0;
-  const [a, b] = [surface[next - 1]!, surface[next]!];
-  return a.tape + ((b.tape - a.tape) * (station - a.station)) / (b.station - a.station);
+/** A figure of the marks at a station; it goes evenly from each mark to the next. */
+function between<M extends FinePlace>(
+  marks: readonly M[],
+  station: number,
+  figure: (mark: M) => number,
+): number {
+  const next = marks.findIndex((mark) => mark.station > station);
+  if (next <= 0) return figure(marks.at(next)!);
+  const [a, b] = [marks[next - 1]!, marks[next]!];
+  return figure(a) + ((figure(b) - figure(a)) * (station - a.station)) / (b.station - a.station);
 }
 
 function layerMark(
@@ -161,17 +169,10 @@ function sliceAt(
   const thickness =
     station > flow.hull.length
       ? thickLayer(flow, wakeArea, station, 0).thickness
-      : thicknessAt(marks, station);
+      : between(marks, station, (mark) => mark.thickness);
   const atEdge = outside(skin + thickness);
   const within = (rho: number): number => atEdge * shareOfSpeed(rho - skin, thickness, station >= transition);
   return { skin, thickness, axialAt: (rho) => (rho < skin + thickness ? within(rho) : outside(rho)) };
-}
-
-function thicknessAt(marks: readonly LayerMark[], station: number): number {
-  const next = marks.findIndex((mark) => mark.station > station);
-  if (next <= 0) return marks.at(-1)!.thickness;
-  const [a, b] = [marks[next - 1]!, marks[next]!];
-  return a.thickness + ((b.thickness - a.thickness) * (station - a.station)) / (b.station - a.station);
 }
 
 /** The air leaving the skin matters where the section is still more than this share of the greatest. */
