@@ -1,6 +1,7 @@
 /** The same thruster known another way, and what follows from its figures. */
 import type { PitchSpeed, Thrust, ThrusterData } from '../craft/thrustSchema.ts';
 import { discArea, idealPower } from '../physics/thrust/propeller.ts';
+import { LEAST_PITCH_SPEED_OUTDOORS } from '../physics/thrust/speed.ts';
 import { pitchSpeedOf, staticThrustOfData } from '../physics/thrust/thrusters.ts';
 import { say } from '../units/sentence.ts';
 
@@ -46,9 +47,6 @@ export interface ThrusterFacts {
   readonly note: string | null;
 }
 
-/** m/s: common practice, no source. */
-const OUTDOORS = 5;
-
 /** `density` of the air, kg/m³. */
 export function thrusterFacts(
   data: Pick<ThrusterData, 'thrust' | 'diameter' | 'pitchSpeed'>,
@@ -61,8 +59,8 @@ export function thrusterFacts(
     idealPower: idealPower(staticThrust, discArea(data.diameter), density),
     pitchSpeed,
     note:
-      pitchSpeed < OUTDOORS
-        ? `Below about ${say(OUTDOORS, 'speed')} a pitch speed is low for outdoors: against wind too little thrust is left.`
+      pitchSpeed < LEAST_PITCH_SPEED_OUTDOORS
+        ? `Below about ${say(LEAST_PITCH_SPEED_OUTDOORS, 'speed')} a pitch speed is low for outdoors: against wind too little thrust is left.`
         : null,
   };
 }

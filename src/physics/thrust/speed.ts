@@ -113,7 +113,7 @@ export function powerAt(
 }
 
 /** Common practice, no source, m/s. */
-const LEAST_PITCH_SPEED_OUTDOORS = 5;
+export const LEAST_PITCH_SPEED_OUTDOORS = 5;
 
 /** One sentence for each part whose pitch speed is low for flying outdoors. */
 export const pitchSpeedCautions = ({ craft }: CraftState): string[] =>
