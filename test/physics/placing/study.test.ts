@@ -1,6 +1,7 @@
 /** A thruster moved along the hull: against plans made one by one, brute force, symmetry, and facts of the trade. */
 import { expect, test } from 'vitest';
 import type { Craft } from '../../../src/craft/craft.ts';
+import { valueOrNull } from '../../../src/numeric/outcome.ts';
 import { planOf } from '../../../src/physics/ballast/plan.ts';
 import { craftStateOf } from '../../../src/physics/craftState.ts';
 import { cruisePitch } from '../../../src/physics/cruise/cruise.ts';
@@ -8,6 +9,7 @@ import { heldAt } from '../../../src/physics/placing/moved.ts';
 import type { PlacedPoint } from '../../../src/physics/placing/placedPoint.ts';
 import { worthOf } from '../../../src/physics/placing/placedPoint.ts';
 import { placementStudy } from '../../../src/physics/placing/study.ts';
+import { turnOf } from '../../../src/physics/turning/turn.ts';
 import { solvedValue } from '../thrust/thrustFixture.ts';
 import { BLUNT_CB, placingCraft, solver, studyOf, vectored } from './placingCrafts.ts';
 
@@ -137,15 +139,34 @@ test('a pair given by its port piece does what one given by its starboard piece 
   });
 });
 
-test('pitch in cruise is that of the craft with the plan carried out', () => {
+test('the figures are those of the craft with the plan carried out, turned and flown by itself', () => {
   const craft = placingCraft();
-  const { points } = studyOf(craft, { stations: 5 });
-  for (const { place, cruisePitch: pitch } of points) {
+  const asked = { throttle: 0.7, vector: null, speed: null };
+  const { points } = studyOf(craft, { stations: 5, asked });
+  for (const { place, arm, timeTo90, radius, gustHeld, cruisePitch: pitch } of points) {
     const plan = planOf(heldAt(craft, craft.parts.byId.thruster!, place), solver, { explain: false });
     if ('why' in plan) throw new Error(plan.why);
-    const cruise = cruisePitch(solvedValue(craftStateOf(plan.craft)), { throttle: 1 });
-    if (cruise.status === 'solved') expect(pitch).toBeCloseTo(cruise.value.pitch, 5);
-    else expect(pitch).toBe(null);
+    const state = solvedValue(craftStateOf(plan.craft));
+    const turn = solvedValue(turnOf(state, asked));
+    const figures = [
+      [arm, turn.authority.arm],
+      [timeTo90, valueOrNull(turn.fromRest)?.time],
+      [radius, valueOrNull(turn.steady)?.radius],
+      [gustHeld, valueOrNull(turn.gust)],
+      [pitch, valueOrNull(cruisePitch(state, { throttle: 0.7 }))?.pitch],
+    ] as const;
+    for (const [figure, alone] of figures) {
+      if (figure === null) expect(alone ?? null).toBe(null);
+      else expect(figure).toBeCloseTo(alone!, 5);
+    }
+  }
+  expect(points.filter(({ timeTo90 }) => timeTo90 !== null).length).toBeGreaterThan(2);
+});
+
+test('one that only pushes straight has no arm, no time and holds no gust', () => {
+  const { points } = studyOf(placingCraft({ data: {} }), { stations: 3 });
+  for (const point of points) {
+    expect(point).toMatchObject({ arm: null, timeTo90: null, radius: null, gustHeld: null });
   }
 });
 

@@ -1,0 +1,166 @@
+import Papa from 'papaparse';
+import { expect, test } from 'vitest';
+import type { PlacedPoint } from '../../../src/physics/placing/placedPoint.ts';
+import type { PlacementStudy } from '../../../src/physics/placing/study.ts';
+import { placeCsv } from '../../../src/report/turning/placeCsv.ts';
+import { PLACE_FIGURES } from '../../../src/report/turning/placeFigures.ts';
+import { placeJson } from '../../../src/report/turning/placeJson.ts';
+import { placeReport } from '../../../src/report/turning/placeReport.ts';
+import { matterOf, stretchesOf, toldStation } from '../../../src/report/turning/placeWords.ts';
+import { inUnits } from '../../../src/units/sentence.ts';
+import { placingCraft, studyOf } from '../../physics/placing/placingCrafts.ts';
+
+const craft = placingCraft({ part: { name: 'Tail motor' } });
+
+const point = (station: number, change: Partial<PlacedPoint> = {}): PlacedPoint => ({
+  station,
+  place: { kind: 'axis', station },
+  ballast: 0.1,
+  ballastProven: true,
+  stowage: { weights: [], slides: [], loads: [] },
+  why: '',
+  wire: 0.02,
+  wireChange: 0,
+  arm: 1,
+  timeTo90: 4,
+  radius: 0.5,
+  gustHeld: 1,
+  inflowRatio: 1,
+  perWatt: 1,
+  cruisePitch: 0,
+  cautions: [],
+  strikes: false,
+  best: false,
+  ...change,
+});
+
+const tail = point(3.9, { ballast: 0.196, wire: 0.028, timeTo90: 3.1, gustHeld: 2.4, best: true });
+const middle = point(1.9, { timeTo90: 9 });
+const studyWith = (points: readonly PlacedPoint[], today: PlacedPoint): PlacementStudy => ({
+  part: 'thruster',
+  points,
+  today,
+  complete: true,
+});
+const headline = (study: PlacementStudy, of = craft) => placeReport(of, study).headline;
+
+test('the headline weighs the quickest of the best against where it is', () => {
+  expect(headline(studyWith([middle, point(3, { best: true, timeTo90: 5 }), tail], middle))).toBe(
+    'In the tail at 3.900 m: 90° in 3.1 s, holds 2.40 m/s from the side; costs 96.0 g of lead and 8.0 g of wire more than at 1.900 m, where it is now and takes 9.0 s.',
+  );
+  expect(headline(studyWith([middle, tail], { ...tail }))).toBe(
+    'In the tail at 3.900 m, where it is now: 90° in 3.1 s, holds 2.40 m/s from the side.',
+  );
+});
+
+test.each([
+  [{ ballast: 0.05, wire: 0.01 }, 'costs 50.0 g of lead and 10.0 g of wire less than at 1.900 m'],
+  [{ ballast: 0.13, wire: 0.01 }, 'costs 30.0 g of lead more and 10.0 g of wire less than at 1.900 m'],
+  [{}, 'costs no lead or wire more than at 1.900 m'],
+])('what it costs: %j', (change, words) => {
+  const study = studyWith([point(0.2, { best: true, timeTo90: 3, ...change })], middle);
+  expect(headline(study)).toContain(
+    `In the nose at 0.200 m: 90° in 3.0 s, holds 1.00 m/s from the side; ${words}`,
+  );
+});
+
+test('where today stands ill it says so', () => {
+  const best = point(2, { best: true });
+  expect(headline(studyWith([best], point(1.9, { ballast: null, why: 'None.' })))).toMatch(
+    /side; at 1\.900 m, where it is now, no ballast plan can be made\.$/,
+  );
+  expect(headline(studyWith([best], point(1.9, { strikes: true })))).toMatch(
+    /than at 1\.900 m, where it is now and the propeller has no room\.$/,
+  );
+  expect(headline(studyWith([middle], middle))).toBe(
+    'At no station is there both a ballast plan and room for the propeller.',
+  );
+});
+
+test('where turning targets are set, the cheapest of the best that meets them is told of, else the quickest', () => {
+  const cheap = point(2, { best: true, ballast: 0, timeTo90: 6 });
+  const between = point(3, { best: true, ballast: 0.1, timeTo90: 4 });
+  const study = studyWith([cheap, between, tail], middle);
+  const told = (turnTime: number | null, sideGust: number | null = null) =>
+    toldStation(study, { ...craft.targets, turnTime, sideGust });
+  expect(told(null)).toBe(tail);
+  expect(told(7)).toBe(cheap);
+  expect(told(5)).toBe(between);
+  expect(told(7, 2)).toBe(tail);
+  expect(told(1)).toBe(tail);
+  const straight = [tail, cheap].map((each) => ({ ...each, timeTo90: null }));
+  expect(toldStation(studyWith(straight, middle), craft.targets)).toBe(straight[1]);
+});
+
+test('obstacles are told by the stations where they are', () => {
+  const skin = {
+    strikes: true,
+    cautions: ['The propeller would strike the skin: it reaches {0.1 length} into it.'],
+  };
+  const points = [point(0, skin), point(1, skin), point(2), point(3, skin), point(4, { why: 'No plan.' })];
+  const stretches = stretchesOf(points, ({ cautions }) => cautions.map(matterOf));
+  expect(stretches.map((each) => inUnits(each, 'metric'))).toEqual([
+    'The propeller would strike the skin: 0.000 m to 1.000 m and at 3.000 m.',
+  ]);
+  const { obstacles } = placeReport(craft, studyWith(points, middle));
+  expect(obstacles).toEqual(['No plan: at 4.000 m.', ...stretches.map((each) => inUnits(each, 'metric'))]);
+  expect(placeReport(craft, studyWith(points, middle), 'imperial').obstacles[1]).toContain('39.37 in');
+});
+
+test('what is the matter is told without by how much, whatever the name of a part', () => {
+  expect(matterOf('The propeller would strike the 1.5 V cell.')).toBe(
+    'The propeller would strike the 1.5 V cell',
+  );
+  expect(matterOf('It stands beyond the tail: by {0.1 length}, on a mount.')).toBe(
+    'It stands beyond the tail',
+  );
+});
+
+const study = studyOf(craft, { stations: 9 });
+
+test('JSON has every point with the fields of the study, in SI, and no quantities left unread', () => {
+  const text = JSON.stringify(placeJson(craft, study));
+  const { place } = JSON.parse(text);
+  expect(place).toMatchObject({ part: 'thruster', name: 'Tail motor', complete: true });
+  expect(place.points).toHaveLength(9);
+  for (const [i, read] of place.points.entries()) {
+    const { stowage: _, cautions: __, why: ___, ...figures } = study.points[i]!;
+    expect(read).toMatchObject(figures);
+  }
+  expect(place.today.station).toBe(4.2);
+  expect(text).not.toMatch(/\{-?[\d.]/);
+});
+
+test('CSV read back by a library has the same figures, units in the heads', () => {
+  const { data, errors, meta } = Papa.parse<Record<string, string>>(placeCsv(study.points).trimEnd(), {
+    header: true,
+  });
+  expect(errors).toEqual([]);
+  expect(meta.fields).toEqual(
+    expect.arrayContaining([
+      'station m',
+      'ballast kg',
+      'timeTo90 s',
+      'gustHeld m/s',
+      'perWatt',
+      'cruisePitch rad',
+    ]),
+  );
+  expect(data).toHaveLength(9);
+  data.forEach((row, i) => {
+    const read = study.points[i]!;
+    for (const { key } of PLACE_FIGURES) {
+      const cell = row[meta.fields!.find((field) => field.split(' ')[0] === key)!]!;
+      expect(cell === '' ? null : Number(cell)).toBe(read[key]);
+    }
+    expect(row.best).toBe(read.best ? 'yes' : 'no');
+    expect(row.cautions).toBe(read.cautions.map((caution) => inUnits(caution, 'metric')).join(' '));
+  });
+});
+
+test('the notes say what a station below the keel is, and that a study was stopped', () => {
+  const { notes, cautions } = placeReport(craft, { ...study, complete: false });
+  expect(notes[0]).toMatch(/stopped before the last station/);
+  expect(notes.some((note) => note.includes('below the keel'))).toBe(true);
+  expect(cautions.some((caution) => caution.includes('propeller'))).toBe(true);
+});
