@@ -59,8 +59,8 @@ export function PlacePlot({ study, fresh, marked, name, length, units, palette, 
       tabIndex={0}
       data-testid="place-plot"
       aria-label={`Stations tried for ${name}`}
-      aria-valuemin={0}
-      aria-valuemax={length}
+      aria-valuemin={Math.min(0, study.points[0]?.station ?? 0)}
+      aria-valuemax={Math.max(length, study.points.at(-1)?.station ?? 0)}
       aria-valuenow={reader?.station ?? 0}
       aria-valuetext={
         reader ? `${stationSentence(reader, units)} ${fresh ? ENTER : OLD}` : 'Nothing worked out yet'

@@ -62,16 +62,28 @@ interface FigureListProps {
 export function FigureList({ rows, ...rest }: FigureListProps) {
   return (
     <ul className="figures">
-      {rows.map(({ key, row }) => (
-        <Figure key={key} name={key} row={row} {...rest} />
+      {rows.map(({ key, row }, i) => (
+        <Figure
+          key={key}
+          name={key}
+          row={row}
+          said={row.why !== '' && rows.slice(0, i).some((before) => before.row.why === row.why)}
+          {...rest}
+        />
       ))}
     </ul>
   );
 }
 
-type FigureProps = Omit<FigureListProps, 'rows'> & { readonly name: string; readonly row: Row };
+interface FigureProps extends Omit<FigureListProps, 'rows'> {
+  readonly name: string;
+  readonly row: Row;
+  /** Whether a figure above says the same of itself. */
+  readonly said: boolean;
+}
 
-function Figure({ name, row, sheet, all, workingOf, action, whyInside, isOld }: FigureProps) {
+function Figure(props: FigureProps) {
+  const { name, row, said, sheet, all, workingOf, action, whyInside, isOld } = props;
   const { units } = useEditor();
   const open = sheet.open.has(name);
   const word = STATUS_WORDS[row.status];
@@ -89,7 +101,7 @@ function Figure({ name, row, sheet, all, workingOf, action, whyInside, isOld }: 
         <span className="figure-label">{row.label}</span>{' '}
         <span className="number">{rowText(row, units)}</span>
       </button>
-      {(word || (row.why && !whyInside)) && (
+      {(word || (row.why && !whyInside)) && (open || !said) && (
         <p className="row-why">
           {word && <strong>{word}: </strong>}
           {row.why}

@@ -32,7 +32,8 @@ export function TurnSheet({ now, player, onTargets }: TurnPanelProps & { now: Re
   const sheet = useFigureSheet();
   const old = fresh ? '' : 'plan-old';
   // What follows at once stands among what is of before the last change.
-  const rows = fresh ? report.rows : { ...report.rows, ...figures.rows };
+  const all = fresh ? report.rows : { ...report.rows, ...figures.rows };
+  const rows = report.turn ? all : told(all);
   return (
     <>
       <section className="panel turn" aria-label="Turning" ref={sheet.frame}>
@@ -40,7 +41,7 @@ export function TurnSheet({ now, player, onTargets }: TurnPanelProps & { now: Re
           <TurnAnswer report={report} onTargets={onTargets} />
         </div>
         <MomentBars rows={rows} />
-        <TurnControls />
+        {report.turn && <TurnControls />}
         {report.turn && (
           <Foldable title="Path of the turn" note="">
             <div className={old}>{player(report.turn)}</div>
@@ -60,6 +61,10 @@ export function TurnSheet({ now, player, onTargets }: TurnPanelProps & { now: Re
     </>
   );
 }
+
+/** Of a craft without thrust only what can be said: the sentence on top says why there is no more. */
+const told = (rows: TurnReport['rows']): TurnReport['rows'] =>
+  Object.fromEntries(Object.entries(rows).filter(([, { value }]) => value !== null));
 
 const TETHER =
   'Models leave things out. Try the craft, and every change to it, on a tether before it flies free.';
