@@ -137,17 +137,26 @@ function layerMark(
 
 /** The outer speed is looked for no lower than this share of U. */
 const SLOWEST = 0.2;
-const ROUNDS = 8;
+const MOST_ROUNDS = 8;
+/** Share to which thickness and outer speed must agree. */
+const AGREED = 1e-4;
 
-/** Thickness and momentum area that agree with the outer speed at the edge; `area` is referred to U. */
+/** Thickness and momentum area that agree with the outer speed at the edge; `area` is referred to U. By secants. */
 function thickLayer(flow: HullFlow, area: number, station: number, radius: number) {
-  let thickness = thicknessOf(area, radius, true);
-  let momentumArea = area;
-  for (let round = 0; round < ROUNDS; round += 1) {
+  const areaAt = (thickness: number): number => {
     const { axial, radial } = flow.velocityAt(station, radius + thickness);
-    momentumArea = area * Math.max(SLOWEST, Math.hypot(axial, radial)) ** -SHAPE_POWER;
-    // Half steps, since behind a blunt tail the outer speed rises with the thickness.
-    thickness = (thickness + thicknessOf(momentumArea, radius, true)) / 2;
+    return area * Math.max(SLOWEST, Math.hypot(axial, radial)) ** -SHAPE_POWER;
+  };
+  let before = thicknessOf(area, radius, true);
+  let excess = thicknessOf(areaAt(before), radius, true) - before;
+  let thickness = before + excess / 2;
+  let momentumArea = areaAt(thickness);
+  for (let round = 0; round < MOST_ROUNDS; round += 1) {
+    const left = thicknessOf(momentumArea, radius, true) - thickness;
+    if (Math.abs(left) <= AGREED * thickness || left === excess) break;
+    const next = thickness - (left * (thickness - before)) / (left - excess);
+    [before, excess, thickness] = [thickness, left, next > 0 ? next : thickness / 2];
+    momentumArea = areaAt(thickness);
   }
   return { thickness, momentumArea };
 }
