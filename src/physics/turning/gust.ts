@@ -10,8 +10,7 @@
  */
 import { valueOrNull } from '../../numeric/outcome.ts';
 import { findRoot } from '../../numeric/roots.ts';
-import { type Motion, motionOf } from './motion.ts';
-import { LONGEST } from './sail.ts';
+import { momentUnder } from './motion.ts';
 import { commandOf } from './steer.ts';
 import type { TurningCraft } from './turningCraft.ts';
 
@@ -19,13 +18,6 @@ import type { TurningCraft } from './turningCraft.ts';
 export const STRONGEST = 50;
 const WEAKEST = 0.01;
 const GROWTH = 1.1;
-
-/** N·m about the virtual mass centre at (u, v, 0), + to starboard. */
-function momentAt({ mass }: TurningCraft, { forces }: Motion, u: number, v: number): number {
-  const sums = new Float64Array(3);
-  forces(LONGEST, Float64Array.of(u, v, 0), sums);
-  return sums[2]! - mass.centreAhead * sums[1]! + mass.centreSide * sums[0]!;
-}
 
 export interface GustMoments {
   /** Of the air alone, N·m, + to starboard. */
@@ -37,16 +29,14 @@ export interface GustMoments {
 
 /** Moments about the virtual mass centre against the speed to starboard through the air. */
 export function gustMoments(craft: TurningCraft, throttle: number, u: number): (v: number) => GustMoments {
-  const motionAt = (share: number, steer: -1 | 0 | 1) =>
-    motionOf(craft, commandOf(craft, { throttle: share, steer, vector: null }));
-  const [still, starboard, port] = [motionAt(0, 0), motionAt(throttle, 1), motionAt(throttle, -1)];
+  const momentOf = (share: number, steer: -1 | 0 | 1) =>
+    momentUnder(craft, commandOf(craft, { throttle: share, steer, vector: null }));
+  const [still, hardStarboard, hardPort] = [momentOf(0, 0), momentOf(throttle, 1), momentOf(throttle, -1)];
   return (v) => {
-    const air = momentAt(craft, still, u, v);
-    return {
-      air,
-      starboard: momentAt(craft, starboard, u, v) - air,
-      port: momentAt(craft, port, u, v) - air,
-    };
+    const air = still(u, v);
+    const [one, other] = [hardStarboard(u, v) - air, hardPort(u, v) - air];
+    // At speed the thrust that is hardest at rest may be spent.
+    return { air, starboard: Math.max(one, other), port: Math.min(one, other) };
   };
 }
 

@@ -79,6 +79,29 @@ export function motionOf(craft: TurningCraft, command: Command, from = command.a
   return { command, slope, forces, angleAt, arrivals };
 }
 
+/** N·m about the virtual mass centre at (u, v, 0) with the thrusters as commanded, + to starboard: what yaws the craft. */
+export function momentUnder(craft: TurningCraft, command: Command): (u: number, v: number) => number {
+  const { centreAhead, centreSide } = craft.mass;
+  const { forces } = motionOf(craft, command);
+  return (u, v) => {
+    const sums = new Float64Array(3);
+    forces(0, Float64Array.of(u, v, 0), sums);
+    return sums[2]! - centreAhead * sums[1]! + centreSide * sums[0]!;
+  };
+}
+
+/** A moment below this share of all thrust times hull length is rounding. */
+const ROUNDING = 1e-9;
+
+/** Whether a command yaws the craft at all, from rest. */
+export function turnsUnder(craft: TurningCraft, command: Command): boolean {
+  const thrust = craft.thrusters.reduce(
+    (sum, { staticThrust }, i) => sum + Math.abs(command.shares[i]!) * staticThrust,
+    0,
+  );
+  return Math.abs(momentUnder(craft, command)(0, 0)) > ROUNDING * thrust * craft.length;
+}
+
 type AddTau = (t: number, u: number, v: number, r: number, into: Float64Array) => void;
 
 /** Adds thrust, drag, cross-flow and fins. */

@@ -2,8 +2,9 @@
 import { infeasible, type Outcome, solved } from '../../numeric/outcome.ts';
 import { say } from '../../units/sentence.ts';
 import type { Commands } from './asked.ts';
-import { LONGEST, type Moment, type Sailed, type SailOptions, sail, type Track, trackOf } from './sail.ts';
-import type { Command } from './steer.ts';
+import { turnsUnder } from './motion.ts';
+import { type Moment, type Sailed, type SailOptions, sail, type Track, trackOf } from './sail.ts';
+import { type Command, momentOf } from './steer.ts';
 import type { TurningCraft } from './turningCraft.ts';
 
 export interface QuarterTurn {
@@ -26,6 +27,11 @@ export const QUARTER = Math.PI / 2;
 /** Turns from below nil where the heading is first 90° off, either way. */
 export const quarterEvent = (_: number, state: Float64Array): number => Math.abs(state[5]!) - QUARTER;
 
+export const NOTHING_TURNS = infeasible(
+  'Nothing turns the craft: at this setting the thrust gives no yaw moment.',
+  'Let a thruster turn in yaw, or throttle a pair apart.',
+);
+
 /** Until the heading is 90° off, or infeasible with how far it got. */
 export function quarterTurn(
   craft: TurningCraft,
@@ -33,21 +39,14 @@ export function quarterTurn(
   command: Command,
   options: SailOptions = {},
 ): Outcome<Sailed> {
+  if (!turnsUnder(craft, command)) return NOTHING_TURNS;
   const sailed = sail(craft, from, command, { ...options, event: quarterEvent });
-  if (sailed.status !== 'solved') return sailed;
-  const { trajectory, motion } = sailed.value;
-  if (trajectory.stopped) return sailed;
-  const still = new Float64Array(3);
-  motion.forces(LONGEST, Float64Array.of(0, 0, 0), still);
-  return still[2] === 0
-    ? infeasible(
-        'Nothing turns the craft: at this setting the thrust gives no yaw moment.',
-        'Let a thruster turn in yaw, or throttle a pair apart.',
-      )
-    : infeasible(
-        `In ${say(trajectory.end, 'time')} it yaws only ${say(Math.abs(trajectory.last[5]!), 'angle')}: the yaw moment of the thrusters is ${say(still[2]!, 'torque')}.`,
-        'More thrust, a longer arm or a wider vectoring angle would help.',
-      );
+  if (sailed.status !== 'solved' || sailed.value.trajectory.stopped) return sailed;
+  const { end, last } = sailed.value.trajectory;
+  return infeasible(
+    `In ${say(end, 'time')} it yaws only ${say(Math.abs(last[5]!), 'angle')}: the yaw moment of the thrusters is ${say(momentOf(craft, command), 'torque')}.`,
+    'More thrust, a longer arm or a wider vectoring angle would help.',
+  );
 }
 
 export const quarterTurnOf = (craft: TurningCraft, { trajectory, ...rest }: Sailed): QuarterTurn => ({
@@ -66,7 +65,7 @@ export function yawStop(craft: TurningCraft, { end }: Sailed, { counter }: Comma
   if (!trajectory.stopped) {
     return infeasible(
       `Countering does not stop the yaw: after ${say(trajectory.end, 'time')} and ${say(angle, 'angle')} the craft still yaws ${say(way * trajectory.last[2]!, 'yawRate')}.`,
-      'More thrust, a longer arm or a wider vectoring angle to the other side would help.',
+      'Larger fins, a longer arm or a wider vectoring angle to the other side would help.',
     );
   }
   return solved({ time: trajectory.end, angle, track: trackOf(craft, sailed.value) });

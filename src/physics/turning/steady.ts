@@ -11,6 +11,8 @@
 import { infeasible, type Outcome, solved } from '../../numeric/outcome.ts';
 import { say } from '../../units/sentence.ts';
 import { straightAt } from './asked.ts';
+import { turnsUnder } from './motion.ts';
+import { NOTHING_TURNS } from './quarterTurn.ts';
 import { LONGEST, type Moment, sail, shownThruster } from './sail.ts';
 import { settlesAt, sizesOf, steadyNear, type Velocity, velocityOf } from './steadyRoot.ts';
 import { type Command, partOfTheWay } from './steer.ts';
@@ -37,11 +39,6 @@ export interface Settled {
   readonly reached: boolean;
 }
 
-const STRAIGHT_ON = infeasible(
-  'The craft goes straight on: at this setting nothing turns it.',
-  'Let a thruster turn in yaw, or throttle a pair apart.',
-);
-
 /** First stretch of time for which the motion is followed, s; each next is twice as long. */
 const STRETCH = 4;
 /** How near the motion must come to a root, against its sizes. */
@@ -58,6 +55,7 @@ export function steadyTurn(
   if (!craft.thrusters.some(({ staticThrust }, i) => staticThrust * command.shares[i]! !== 0)) {
     return infeasible('Without thrust there is no steady turn: the craft comes to rest.');
   }
+  if (!turnsUnder(craft, command)) return NOTHING_TURNS;
   const sizes = sizesOf(craft, command, cruiseSpeed);
   let at: Moment = straightAt(cruiseSpeed, straight);
   let followed = 0;
@@ -89,7 +87,6 @@ function unreached(
   const last = velocityOf(end.state);
   const way = Math.sign(last[2]) || 1;
   const [speed, , rate] = sizes;
-  if (Math.abs(last[2]) <= STRAIGHT * rate) return STRAIGHT_ON;
   const starts: Velocity[] = [
     ...followedFromStraight(craft, straight, command, sizes),
     last,
@@ -138,7 +135,7 @@ export function turnAt(
   const [u, v, r] = velocity;
   const speed = Math.hypot(u, v);
   if (Math.abs(r) * craft.length <= STRAIGHT * speed) {
-    return STRAIGHT_ON;
+    return infeasible('The craft ends up going straight on: the air holds it against the thrusters.');
   }
   const radius = speed / Math.abs(r);
   const turn = {
