@@ -56,12 +56,12 @@ const limitWords = (way: Way, { least, most }: Vectoring, units: UnitSystem): st
 /** About the CG, or about the CB of a craft without solid mass. */
 export const yawOf = ({ thrust, cg, cb }: Geometry): YawAsSet => yawAsSet(thrust, cg ?? cb);
 
-/** Less than this reads as nought, N·m. */
-const NO_MOMENT = 5e-4;
+/** Thrust that passes the CG as near as this is not said to yaw the craft: no CG is known better. m */
+const BESIDE = 0.005;
 
 /** −1 to port, 1 to starboard, 0 for none. */
-export const senseOf = ({ moment }: YawAsSet): -1 | 0 | 1 =>
-  Math.abs(moment) < NO_MOMENT ? 0 : moment > 0 ? 1 : -1;
+export const senseOf = ({ moment, thrust }: YawAsSet): -1 | 0 | 1 =>
+  Math.abs(moment) <= BESIDE * thrust ? 0 : moment > 0 ? 1 : -1;
 
 /** "yaws to starboard", "0.208 N·m"; nothing when it does not. */
 export function yawWords(yaw: YawAsSet, units: UnitSystem): string[] {

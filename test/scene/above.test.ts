@@ -72,8 +72,9 @@ test('thrust to port at the tail turns the nose to starboard; its lever leads af
   const [lever, more] = yaw.levers;
   expect(more).toBeUndefined();
   expect(lever!.from).toEqual({ u: of.cg![1], z: -of.cg![0] });
-  expect(lever!.to.z).toBeCloseTo(-2.97, 9);
-  expect(lever!.words).toBe(`arm ${(2.97 - of.cg![0]).toFixed(2)} m`);
+  const station = of.thrust[0]!.at[0];
+  expect(lever!.to.z).toBeCloseTo(-station, 9);
+  expect(lever!.words).toBe(`arm ${(station - of.cg![0]).toFixed(2)} m`);
   expect(yawMark(geometryFor(turned(20)), 'metric')!.sense).toBe(-1);
   expect(yawMark(geometryFor(turned(0)), 'metric')).toMatchObject({ sense: 0, words: [] });
 });
@@ -98,4 +99,12 @@ test('the view is told in words', () => {
   expect(words).toMatch(/What turns in yaw is 1\.\d\d m aft of the CG\./);
   expect(words).toMatch(/As set it yaws to starboard, 0\.\d{3} N·m\./);
   expect(aboveInWords(subject(tailCraft({ thruster: null })))).not.toContain('Thrust');
+});
+
+test('thrust that passes the CG within 5 mm is not said to yaw the craft', () => {
+  const aside = (side: number) => {
+    const { cg, ...of } = geometryFor(turned(0));
+    return yawMark({ ...of, cg: [cg![0], side, cg![2]] }, 'metric')!.sense;
+  };
+  expect([aside(0.004), aside(0.006), aside(-0.006)]).toEqual([0, 1, -1]);
 });

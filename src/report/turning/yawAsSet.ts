@@ -13,6 +13,8 @@ import type { ThrustArrow } from './arrows.ts';
 
 export interface YawAsSet {
   readonly moment: number;
+  /** All thrust together, Σ T, N. */
+  readonly thrust: number;
   /** Null when none turns in yaw. */
   readonly arm: number | null;
   /** Null when none is throttled apart. */
@@ -24,6 +26,7 @@ export function yawAsSet(arrows: readonly ThrustArrow[], cg: Vec3): YawAsSet {
     thrust * Math.cos(pitch) * ((cg[0] - x) * Math.sin(yaw) - (y - cg[1]) * Math.cos(yaw));
   return {
     moment: arrows.reduce((sum, arrow) => sum + momentOf(arrow), 0),
+    thrust: arrows.reduce((sum, { thrust }) => sum + thrust, 0),
     arm: meanLever(
       arrows.filter(({ movesInYaw }) => movesInYaw),
       ({ at }) => at[0] - cg[0],
