@@ -26,7 +26,7 @@ export class Studies {
   readonly start = (part: string, asked: TurnAsked): void => {
     this.close();
     const { craft } = this.#shown.get();
-    this.state.set({ ...NO_STUDY, part, craft, busy: true });
+    this.state.set({ ...NO_STUDY, part, craft, asked, busy: true });
     const job = this.#client.place({ craft, part, options: { asked } }, (progress) => {
       if (this.#job === job) this.#put(progress);
     });

@@ -19,7 +19,7 @@ export interface StudyDrawn {
 /** Null while there is none to show. */
 export function useStudyDrawn(editor: Editor, inFront: boolean): StudyDrawn | null {
   const studying = useStudying();
-  const { marked } = useTurning();
+  const turning = useTurning();
   const { craft, assessment } = editor;
   const { geometry } = assessment;
   const part = craft.parts.byId[studying.part ?? ''];
@@ -27,8 +27,8 @@ export function useStudyDrawn(editor: Editor, inFront: boolean): StudyDrawn | nu
   const { points, complete } = studying;
   return {
     study: { points, complete, today: pointNow(studying, craft) },
-    fresh: holdsFor(studying, craft),
-    marked,
+    fresh: holdsFor(studying, craft, turning),
+    marked: turning.marked,
     name: part.name || 'the thruster',
     length: geometry.hull.length,
     onMoveTo: (station) => {

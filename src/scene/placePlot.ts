@@ -2,34 +2,28 @@
  * A placement study on the station scale of the side view: one strip for each curve, one below the other, each with its name and a
  * scale of its own; bands where the propeller would strike something; where the thruster is today and where it is best. px.
  */
+import type { PlacedPoint } from '../report/turning/studies.ts';
 import { formatNumber } from '../units/format.ts';
 import { type Quantity, unitOf } from '../units/units.ts';
 import type { UnitSystem } from './subject.ts';
 import type { ScreenPoint, View } from './view.ts';
 
-/** A station as far as it is drawn. Each figure is null where there is none. */
-export interface StudySpot {
-  /** m */
-  readonly station: number;
-  /** Dead ballast and all wire, kg. */
-  readonly ballast: number | null;
-  readonly wire: number;
-  /** s */
-  readonly timeTo90: number | null;
-  /** m/s */
-  readonly gustHeld: number | null;
-  /** Thrust per watt against free stream. */
-  readonly perWatt: number | null;
-  /** m */
-  readonly radius: number | null;
-  /** rad, + nose-up. */
-  readonly cruisePitch: number | null;
-  /** Of no plan. */
-  readonly why: string;
-  /** What the propeller would strike there. */
-  readonly cautions: readonly string[];
-  readonly best: boolean;
-}
+/** A station as far as it is drawn and told. */
+export type StudySpot = Pick<
+  PlacedPoint,
+  | 'station'
+  | 'ballast'
+  | 'wire'
+  | 'timeTo90'
+  | 'gustHeld'
+  | 'perWatt'
+  | 'radius'
+  | 'cruisePitch'
+  | 'why'
+  | 'cautions'
+  | 'strikes'
+  | 'best'
+>;
 
 export interface StudyToDraw {
   /** Nose to tail. */
@@ -209,12 +203,12 @@ function runsOf(stations: readonly number[], heights: readonly (number | null)[]
 /** Each station stands for the stretch half-way to its neighbours. */
 function struckBands(points: readonly StudySpot[], stations: readonly number[]): Band[] {
   const bands: { left: number; right: number }[] = [];
-  points.forEach(({ cautions }, i) => {
-    if (cautions.length === 0) return;
+  points.forEach(({ strikes }, i) => {
+    if (!strikes) return;
     const x = stations[i]!;
     const [before, after] = [stations[i - 1] ?? x, stations[i + 1] ?? x];
     const last = bands.at(-1);
-    if (last && points[i - 1]!.cautions.length > 0) last.right = (x + after) / 2;
+    if (last && points[i - 1]!.strikes) last.right = (x + after) / 2;
     else bands.push({ left: (before + x) / 2, right: (x + after) / 2 });
   });
   return bands;

@@ -1,5 +1,6 @@
 /** One station of a placement study in words. */
 import { formatQuantity } from '../units/format.ts';
+import { inUnits } from '../units/sentence.ts';
 import { CURVES, type StudySpot } from './placePlot.ts';
 import type { UnitSystem } from './subject.ts';
 
@@ -14,12 +15,13 @@ export const curveWords = (spot: StudySpot, units: UnitSystem): string[] =>
 export function besideWords(spot: StudySpot, units: UnitSystem): string {
   const { radius, cruisePitch, cautions, why } = spot;
   const facts = [
-    radius === null ? '' : `radius ${formatQuantity(radius, 'length', units)}`,
+    radius === null ? '' : `radius ${formatQuantity(radius, 'pathLength', units)}`,
     cruisePitch === null ? '' : pitchWords(cruisePitch, units),
   ].filter(Boolean);
   const at = `Station ${formatQuantity(spot.station, 'length', units)}`;
   const first = facts.length > 0 ? `${at}: ${facts.join(', ')}.` : `${at}.`;
-  return [first, why, ...cautions].filter(Boolean).join(' ');
+  const matters = [why, ...cautions].filter(Boolean).map((sentence) => inUnits(sentence, units));
+  return [first, ...matters].join(' ');
 }
 
 function pitchWords(pitch: number, units: UnitSystem): string {

@@ -47,7 +47,15 @@ test('a study is worked out when asked for, for the craft as it is then', async 
   session.apply(setName('Changed'));
   await idle(studies);
   const { points, today, ...rest } = studies.state.get();
-  expect(rest).toEqual({ part: 'thruster', craft, busy: false, share: 1, complete: true, why: null });
+  expect(rest).toEqual({
+    part: 'thruster',
+    craft,
+    asked: ASKED,
+    busy: false,
+    share: 1,
+    complete: true,
+    why: null,
+  });
   expect(rest.craft).toBe(craft);
   expect(points).toHaveLength(61);
   expect(today).toMatchObject({ station: 4.2 });

@@ -15,15 +15,16 @@ const spot = (station: number, more: Partial<StudySpot> = {}): StudySpot => ({
   cruisePitch: -0.02,
   why: '',
   cautions: [],
+  strikes: false,
   best: false,
   ...more,
 });
 const points = [
-  spot(0, { cautions: ['The propeller strikes the ground.'] }),
+  spot(0, { strikes: true, cautions: ['The propeller reaches {0.03 smallLength} into the ground.'] }),
   spot(1, { timeTo90: 6, best: true }),
   spot(2, { ballast: null, timeTo90: null, why: 'No plan keeps every target.' }),
-  spot(3, { cautions: ['It strikes the skin.'] }),
-  spot(4, { cautions: ['It strikes the skin.'], ballast: 0.38 }),
+  spot(3, { strikes: true }),
+  spot(4, { strikes: true, ballast: 0.38 }),
 ];
 const study = { points, today: spot(2.5), complete: true };
 const view = { scale: 100, originX: 50 };
@@ -125,10 +126,10 @@ test('the name of a curve stands where the curve is not', () => {
 test('a station in words: every figure, why there is none, and what the propeller strikes', () => {
   expect(curveWords(points[0]!, 'metric')).toEqual(['120.0 g', '3.0 s', '2.00 m/s', '1.100']);
   expect(besideWords(points[0]!, 'metric')).toBe(
-    'Station 0.000 m: radius 0.700 m, 1.1° nose-down in cruise. The propeller strikes the ground.',
+    'Station 0.000 m: radius 0.70 m, 1.1° nose-down in cruise. The propeller reaches 30 mm into the ground.',
   );
   expect(stationSentence(points[2]!, 'metric')).toBe(
-    'Station 2.000 m: radius 0.700 m, 1.1° nose-down in cruise. No plan keeps every target. Lead and wire none, Time to 90° none, Side gust held 2.00 m/s, Thrust per watt 1.100.',
+    'Station 2.000 m: radius 0.70 m, 1.1° nose-down in cruise. No plan keeps every target. Lead and wire none, Time to 90° none, Side gust held 2.00 m/s, Thrust per watt 1.100.',
   );
   expect(stationSentence(points[1]!, 'imperial')).toMatch(/4\.23 oz.*Nothing beats it\.$/);
 });

@@ -1,24 +1,26 @@
 /** Where a thruster had better sit: every station tried, the best of them in a list, the curves under the side view. */
 import { listed } from '../../craft/craft.ts';
+import { placeReport } from '../../report/turning/placeReport.ts';
+import { toldStation } from '../../report/turning/placeWords.ts';
 import { formatQuantity } from '../../units/format.ts';
+import { inUnits } from '../../units/sentence.ts';
 import { useEditor } from '../editor.ts';
 import { ChoiceField } from '../fields/ChoiceField.tsx';
-import { vectorAsked } from './asked.ts';
+import { askedOf } from './asked.ts';
 import { StudyTable } from './StudyTable.tsx';
 import { holdsFor } from './studyCraft.ts';
 import { useStudying } from './studying.ts';
 import { useTurning } from './turning.ts';
 
 export function StudySection() {
-  const { craft } = useEditor();
+  const { craft, units } = useEditor();
   const turning = useTurning();
   const studying = useStudying();
   const thrusters = listed(craft.parts).filter(({ thruster }) => thruster);
   const chosen = thrusters.find(({ id }) => id === turning.tried) ?? thrusters[0];
   if (!chosen)
     return <p className="aside">Enter the thrust of a thruster, and every station can be tried for it.</p>;
-  const { throttle, speed } = turning;
-  const start = () => studying.start(chosen.id, { throttle, vector: vectorAsked(craft, turning), speed });
+  const start = () => studying.start(chosen.id, askedOf(craft, turning));
   return (
     <>
       {thrusters.length > 1 && (
@@ -33,7 +35,9 @@ export function StudySection() {
         />
       )}
       {studying.busy ? <Progress /> : <Buttons start={start} />}
-      {studying.why && <p className={studying.points.length > 0 ? 'aside' : 'field-error'}>{studying.why}</p>}
+      {studying.why && (
+        <p className={studying.points.length > 0 ? 'aside' : 'field-error'}>{inUnits(studying.why, units)}</p>
+      )}
       {studying.points.length > 0 && <Result />}
     </>
   );
@@ -70,15 +74,39 @@ function Buttons({ start }: { start: () => void }) {
 }
 
 function Result() {
-  const { craft } = useEditor();
+  const { craft, units } = useEditor();
   const studying = useStudying();
-  const fresh = holdsFor(studying, craft);
+  const { craft: then, part, points, today, complete, busy } = studying;
+  const fresh = holdsFor(studying, craft, useTurning());
+  if (!then || part === null || !today) return null;
+  const study = { part, points, today, complete };
+  const { headline, obstacles, notes } = placeReport(then, study, units);
   return (
     <>
       {!fresh && <p className="aside">Worked out before the last change: try every station again.</p>}
       <div className={fresh ? 'plan-answer' : 'plan-answer plan-old'}>
-        <StudyTable fresh={fresh} />
+        <p className="study-headline">
+          {busy && 'So far: '}
+          {headline}
+        </p>
+        <StudyTable fresh={fresh} told={toldStation(study, then.targets)?.station ?? null} />
+        <Sentences title="Where something is in the way" sentences={obstacles} />
+        <Sentences title="What the figures are of" sentences={notes} />
       </div>
     </>
+  );
+}
+
+function Sentences({ title, sentences }: { title: string; sentences: readonly string[] }) {
+  if (sentences.length === 0) return null;
+  return (
+    <details className="load">
+      <summary>{title}</summary>
+      <ul className="plan-limits">
+        {sentences.map((sentence) => (
+          <li key={sentence}>{sentence}</li>
+        ))}
+      </ul>
+    </details>
   );
 }

@@ -3,6 +3,7 @@ import { useState } from 'react';
 import { moveAndHang, moveThruster } from '../../edit/edits/moveThruster.ts';
 import type { PlacedPoint } from '../../report/turning/studies.ts';
 import { formatNumber } from '../../units/format.ts';
+import { inUnits } from '../../units/sentence.ts';
 import { type Quantity, type UnitSystem, unitOf } from '../../units/units.ts';
 import { useEditor } from '../editor.ts';
 import { useStudying } from './studying.ts';
@@ -21,16 +22,23 @@ const COLUMNS: readonly Column[] = [
     value: ({ ballast, wire }) => (ballast === null ? null : ballast + wire),
   },
   { head: '90° in', quantity: 'time', value: ({ timeTo90 }) => timeTo90 },
-  { head: 'Radius', quantity: 'length', value: ({ radius }) => radius },
+  { head: 'Radius', quantity: 'pathLength', value: ({ radius }) => radius },
   { head: 'Gust', quantity: 'speed', value: ({ gustHeld }) => gustHeld },
   { head: 'Per watt', quantity: 'ratio', value: ({ perWatt }) => perWatt },
   { head: 'Pitch', quantity: 'angle', value: ({ cruisePitch }) => cruisePitch },
 ];
 
-export function StudyTable({ fresh }: { fresh: boolean }) {
+interface StudyTableProps {
+  readonly fresh: boolean;
+  /** The station that the sentence above tells of, open until another is picked. */
+  readonly told: number | null;
+}
+
+export function StudyTable({ fresh, told }: StudyTableProps) {
   const { units } = useEditor();
   const { points, today, busy } = useStudying();
-  const [picked, setPicked] = useState<number | null>(null);
+  const [chosen, setPicked] = useState<number | null | undefined>(undefined);
+  const picked = chosen === undefined ? told : chosen;
   const best = points.filter((point) => point.best);
   if (best.length === 0) {
     return (
@@ -139,7 +147,7 @@ const bare = (si: number, quantity: Quantity, units: UnitSystem): string => {
 };
 
 function Actions({ point, at, fresh }: { point: PlacedPoint; at: string; fresh: boolean }) {
-  const { craft, apply, dragging } = useEditor();
+  const { craft, units, apply, dragging } = useEditor();
   const { part } = useStudying();
   const thruster = craft.parts.byId[part ?? ''];
   if (!thruster) return null;
@@ -151,7 +159,7 @@ function Actions({ point, at, fresh }: { point: PlacedPoint; at: string; fresh: 
     <>
       {point.cautions.map((caution) => (
         <p className="row-why" key={caution}>
-          {caution}
+          {inUnits(caution, units)}
         </p>
       ))}
       <span className="plan-actions">

@@ -2,6 +2,7 @@
 import { type Craft, listed } from '../../craft/craft.ts';
 import type { Part } from '../../craft/schema.ts';
 import type { Vectoring } from '../../craft/thrustSchema.ts';
+import type { TurnAsked } from '../../report/turning/turns.ts';
 import type { TurningState } from './turning.ts';
 
 /** The thruster by whose arrow one steers: the one turned last, else the first that turns in yaw; null when none does. */
@@ -12,6 +13,8 @@ export function steeringPart(craft: Craft, { turned }: Pick<TurningState, 'turne
 
 const turns = ({ least, most }: Vectoring): boolean => most > least;
 
-/** rad; null for hardest to starboard. */
-export const vectorAsked = (craft: Craft, turning: TurningState): number | null =>
-  turning.steering === 'set' ? (steeringPart(craft, turning)?.thruster?.yaw.set ?? null) : null;
+export const askedOf = (craft: Craft, turning: TurningState): TurnAsked => ({
+  throttle: turning.throttle,
+  vector: turning.steering === 'set' ? (steeringPart(craft, turning)?.thruster?.yaw.set ?? null) : null,
+  speed: turning.speed,
+});

@@ -2,11 +2,17 @@
 import type { Craft } from '../../craft/craft.ts';
 import type { Place } from '../../craft/placeSchema.ts';
 import type { PlacedPoint } from '../../report/turning/studies.ts';
+import { askedOf } from './asked.ts';
 import type { StudyState } from './studying.ts';
+import type { TurningState } from './turning.ts';
 
-/** Whether it was worked out for a craft that differs from this one at most in the place of its thruster. */
-export function holdsFor({ craft: then, part }: StudyState, now: Craft): boolean {
-  if (!then || part === null) return false;
+/** Whether it was worked out for such a flight, and for a craft that differs from this one at most in the place of its thruster. */
+export function holdsFor(
+  { craft: then, part, asked }: StudyState,
+  now: Craft,
+  turning: TurningState,
+): boolean {
+  if (!then || part === null || !asked || !same(asked, askedOf(now, turning))) return false;
   if (then === now) return true;
   const { parts, ...rest } = now;
   if (!same(then, rest) || parts.order !== then.parts.order) return false;

@@ -8,6 +8,8 @@ export interface StudyState {
   readonly part: string | null;
   /** The craft it is worked out for. */
   readonly craft: Craft | null;
+  /** How it was to be flown. */
+  readonly asked: TurnAsked | null;
   /** Nose first, as far as it is worked out. */
   readonly points: readonly PlacedPoint[];
   /** The thruster where it was in that craft. */
@@ -32,6 +34,7 @@ export interface Studying extends StudyState {
 export const NO_STUDY: StudyState = {
   part: null,
   craft: null,
+  asked: null,
   points: [],
   today: null,
   busy: false,

@@ -13,7 +13,7 @@ import {
 import type { TurnAsked } from '../../report/turning/turns.ts';
 import type { UnitSystem } from '../../units/units.ts';
 import { useEditor } from '../editor.ts';
-import { vectorAsked } from './asked.ts';
+import { askedOf } from './asked.ts';
 import { useTurning } from './turning.ts';
 
 interface Question {
@@ -36,8 +36,7 @@ const PAUSE = 120;
 export function useTurnReport(): ReportNow | null {
   const { craft, units } = useEditor();
   const turning = useTurning();
-  const { throttle, speed } = turning;
-  const vector = vectorAsked(craft, turning);
+  const { throttle, vector, speed } = askedOf(craft, turning);
   const now: Question = useMemo(
     () => ({ craft, asked: { throttle, vector, speed }, units }),
     [craft, throttle, vector, speed, units],
