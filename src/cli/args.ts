@@ -1,6 +1,7 @@
 /** What was typed after `craft`, made a command, or one sentence on what is wrong with it. */
 import { parseArgs } from 'node:util';
 import type { UnitSystem } from '../units/units.ts';
+import { type TurnOptions, turnOptions } from './turnOptions.ts';
 
 export type Command =
   | { readonly kind: 'balance'; readonly file: string; readonly json: boolean; readonly units: UnitSystem }
@@ -23,6 +24,9 @@ export type Command =
       readonly units: UnitSystem;
       readonly line: string;
     }
+  | ({ readonly kind: 'turn'; readonly file: string; readonly json: boolean } & TurnOptions & {
+        readonly units: UnitSystem;
+      })
   | { readonly kind: 'help' }
   | { readonly kind: 'version' }
   | { readonly kind: 'misuse'; readonly why: string };
@@ -34,15 +38,26 @@ const OPTIONS = {
   write: { type: 'string' },
   'time-limit': { type: 'string' },
   line: { type: 'string' },
+  vector: { type: 'string' },
+  throttle: { type: 'string' },
+  speed: { type: 'string' },
   help: { type: 'boolean', short: 'h' },
   version: { type: 'boolean' },
 } as const;
 
 type Values = ReturnType<typeof split>['values'];
 
-const split = (args: string[]) => parseArgs({ args, options: OPTIONS, allowPositionals: true });
+const split = (args: string[]) =>
+  parseArgs({ args: withNegatives(args), options: OPTIONS, allowPositionals: true });
 
-const WORDS = 'balance, check, plan, carry, help';
+/** "--vector -30" is "--vector=-30": the parser would take -30 for an option of its own. */
+function withNegatives(args: readonly string[]): string[] {
+  const at = args.findIndex((arg, i) => /^--\w+$/.test(arg) && /^-[\d.]/.test(args[i + 1] ?? ''));
+  if (at < 0 || args.slice(0, at).includes('--')) return [...args];
+  return [...args.slice(0, at), `${args[at]}=${args[at + 1]}`, ...withNegatives(args.slice(at + 2))];
+}
+
+const WORDS = 'balance, check, plan, carry, turn, help';
 
 /** The options that a command takes besides --help and --version. */
 const TAKEN: Readonly<Record<string, readonly string[]>> = {
@@ -50,6 +65,7 @@ const TAKEN: Readonly<Record<string, readonly string[]>> = {
   check: [],
   plan: ['json', 'units', 'robust', 'write', 'time-limit'],
   carry: ['json', 'units', 'line'],
+  turn: ['json', 'units', 'vector', 'throttle', 'speed'],
 };
 
 const misuse = (why: string): Command => ({ kind: 'misuse', why });
@@ -74,10 +90,12 @@ function named(word: string | undefined, files: string[], values: Values): Comma
   const foreign = Object.keys(values).find((option) => !taken.includes(option));
   if (foreign) return misuse(`${word} takes no --${foreign}`);
   if (word === 'check') return check(files);
-  return onOneFile(word as 'balance' | 'plan' | 'carry', files, values);
+  return onOneFile(word as OnOneFile, files, values);
 }
 
-function onOneFile(kind: 'balance' | 'plan' | 'carry', files: string[], values: Values): Command {
+type OnOneFile = 'balance' | 'plan' | 'carry' | 'turn';
+
+function onOneFile(kind: OnOneFile, files: string[], values: Values): Command {
   const [file] = files;
   if (file === undefined || files.length > 1) {
     return misuse(`${kind} takes one craft file; found ${files.length}`);
@@ -88,6 +106,10 @@ function onOneFile(kind: 'balance' | 'plan' | 'carry', files: string[], values: 
   }
   if (kind === 'balance') return { kind, file, json, units };
   if (kind === 'carry') return { kind, file, json, units, line };
+  if (kind === 'turn') {
+    const options = turnOptions(values);
+    return typeof options === 'string' ? misuse(options) : { kind, file, json, units, ...options };
+  }
   const timeLimit = Number(values['time-limit'] ?? USUAL_SECONDS);
   if (!(timeLimit > 0 && timeLimit <= MOST_SECONDS)) {
     const found = JSON.stringify(values['time-limit']);

@@ -1,5 +1,5 @@
 /** `balance FILE`: the whole report, for reading or as JSON. */
-import type { Assessment } from '../report/assessment.ts';
+import type { Rows } from '../report/rows.ts';
 import type { UnitSystem } from '../units/units.ts';
 import { EXIT, type ExitCode, type Io } from './io.ts';
 import { readCraft } from './readCraft.ts';
@@ -15,12 +15,12 @@ export function balance({ file, json, units }: Asked, io: Io): ExitCode {
   const read = readCraft(file, units, io);
   if (!read) return EXIT.bad;
   const { craft, report } = read;
-  io.write(json ? jsonText(report) : reportText(craft, report, units));
+  io.write(json ? rowsJson(report.rows) : reportText(craft, report, units));
   return report.met ? EXIT.fine : EXIT.misses;
 }
 
 /** Values in SI whatever the units; these only change the sentences in `why`. */
-function jsonText({ rows }: Assessment): string {
+export function rowsJson(rows: Rows): string {
   const entries = Object.entries(rows).map(([key, { value, unit, uncertainty, status, why }]) => [
     key,
     { value, unit, ...(uncertainty === undefined ? {} : { uncertainty }), status, why },

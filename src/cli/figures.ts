@@ -17,6 +17,18 @@ const GROUPS: Readonly<Record<string, string>> = {
   lead: 'Lead',
   oneWeight: 'One weight to level it and use up the lift',
   support: 'On its support',
+  turn: 'Turning',
+  glide: 'Turning, with the throttle cut',
+  speed: 'Speed',
+  drag: 'Speed',
+  thrust: 'Speed',
+  power: 'Speed',
+  cruise: 'Pitch',
+  climb: 'Pitch',
+  hover: 'Pitch',
+  inflow: 'Inflow',
+  added: 'Added mass and inertia',
+  inertia: 'Added mass and inertia',
 };
 
 const LABEL = 38;

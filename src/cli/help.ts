@@ -12,14 +12,21 @@ export const HELP = `Steelyard: the balance of a small unmanned blimp.
       for every mass within its tolerance; --write keeps the planned craft.
   npm run -s craft -- carry FILE [--line keel|axis|HARDPOINT] [--json]
       The most useful load at each station of a line, the rest planned anew.
+  npm run -s craft -- turn FILE [--vector DEG] [--throttle F] [--speed M/S]
+                      [--json] [--units metric|imperial]
+      How it turns, flies and climbs by its thrusters: arm and yaw moment, time
+      to yaw 90°, radius, side gust held, top speed, pitch under way.
+      --vector: thrust turned in yaw by so many degrees, + to starboard, instead
+      of as hard to starboard as it goes; --throttle: share of full thrust, 0 to
+      1; --speed: of the cruise it turns from, in m/s.
   npm run -s craft -- help
   npm run -s craft -- --version
 
 FILE is a craft file; "-" reads it from standard input. Without -s npm prints
 a banner of its own before the report.
 
-Exit codes: 0 fine; 1 the craft does not meet its targets, or
-no plan can; 2 bad input or use.
+Exit codes: 0 fine; 1 the craft does not meet its targets, no plan can, or it
+has no thruster to turn it; 2 bad input or use.
 Errors go to standard error, one line a problem.
 
 It is an aid for planning. The aviation authority, the site and the makers of

@@ -6,6 +6,7 @@ import { HELP } from './help.ts';
 import { EXIT, type ExitCode, type Io } from './io.ts';
 import { oneLine } from './layout.ts';
 import { carried, planned } from './planning.ts';
+import { turned } from './turn.ts';
 
 /** Runs what the arguments ask for. Returns the exit code: 0 fine, 1 the craft misses its targets, 2 bad input or use. */
 export function run(args: readonly string[], io: Io): ExitCode | Promise<ExitCode> {
@@ -19,6 +20,8 @@ export function run(args: readonly string[], io: Io): ExitCode | Promise<ExitCod
       return planned(command, io);
     case 'carry':
       return carried(command, io);
+    case 'turn':
+      return turned(command, io);
     case 'help':
       io.write(HELP);
       return EXIT.fine;

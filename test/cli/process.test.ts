@@ -55,3 +55,19 @@ test('a reader that has gone is no error, and the exit code is still the craftâ€
   const { stderr } = spawnSync('sh', ['-c', command], { cwd: root, encoding: 'utf8' });
   expect(stderr).toBe('exit 1\n');
 });
+
+test('turn from file to exit code, its figures as JSON to the last byte', () => {
+  const { status, stdout, stderr } = craft([
+    'turn',
+    'samples/museum-atrium.json',
+    '--vector',
+    '-30',
+    '--json',
+  ]);
+  expect({ status, stderr }).toEqual({ status: 0, stderr: '' });
+  expect(JSON.parse(stdout).rows['turn.vector']).toMatchObject({
+    unit: 'rad',
+    status: 'solved',
+    value: expect.closeTo(-Math.PI / 6, 12),
+  });
+});

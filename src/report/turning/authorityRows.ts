@@ -2,6 +2,7 @@
 import { infeasible, type Outcome, solved } from '../../numeric/outcome.ts';
 import { cgOf } from '../../physics/balance/loading.ts';
 import type { CraftState } from '../../physics/craftState.ts';
+import { thrustersOf } from '../../physics/thrust/thrusters.ts';
 import { type Leverage, leverageOf, yaws } from '../../physics/turning/leverage.ts';
 import { turningCraftOf } from '../../physics/turning/turningCraft.ts';
 import { spread } from '../floatRows.ts';
@@ -20,6 +21,9 @@ export function leverageIn(state: CraftState, throttle: number): Outcome<Leverag
 }
 
 export function authorityRows(state: CraftState, throttle: number): Rows {
+  const apart = thrustersOf(state)
+    .filter(yaws)
+    .every(({ differ }) => differ !== 0);
   return rowsFrom(
     leverageIn(state, throttle),
     {
@@ -31,6 +35,11 @@ export function authorityRows(state: CraftState, throttle: number): Rows {
       'turn.shareArm': ({ shares }) => shares.arm,
       'turn.shareThrust': ({ shares }) => shares.thrust,
     },
-    { 'turn.arm': { uncertainty: spread(state, (loading) => cgOf(loading)?.[0] ?? null) } },
+    {
+      'turn.arm': {
+        uncertainty: spread(state, (loading) => cgOf(loading)?.[apart ? 1 : 0] ?? null),
+        why: apart ? 'To the side, of thrusters throttled apart.' : '+ thrust aft of the CG.',
+      },
+    },
   );
 }

@@ -38,34 +38,39 @@ export function inflowsAt(state: CraftState, speed: number, throttle: number): O
   if (layer.status === 'infeasible') return layer;
   const each = thrusters.map((thruster): PropellerAir => {
     const inflow = inflowAt(flow.value, layer.value, thruster);
-    return { ...names(thruster), ...inflow, perWatt: perWatt(thruster, inflow.ratio) };
+    const { part, copy, name, diameter } = thruster;
+    const thrust = thrustAt(thruster, throttle, speed);
+    const perWatt = powerAgainstFree(thrust, discArea(diameter), air.density, speed, inflow.ratio);
+    return { part, copy, name, ...inflow, perWatt };
   });
   return solved({ each, cautions: [...flow.value.cautions, ...layer.value.cautions] });
-
-  function perWatt({ diameter, ...thruster }: Thruster, ratio: number): number {
-    const thrust = thrustAt({ diameter, ...thruster }, throttle, speed);
-    return powerAgainstFree(thrust, discArea(diameter), air.density, speed, ratio);
-  }
 }
 
-const names = ({ part, copy, name }: Thruster) => ({ part, copy, name });
-
 /** Of all propellers together, each by the area of its disc. */
-export function inflowRows(state: CraftState, speed: Outcome<number>, throttle: number): Rows {
-  const inflows = speed.status === 'solved' ? inflowsAt(state, speed.value, throttle) : speed;
-  const areas = thrustersOf(state).map(({ diameter }) => discArea(diameter));
+export function inflowRows(inflows: Outcome<Inflows>, thrusters: readonly Thruster[]): Rows {
+  const areas = thrusters.map(({ diameter }) => discArea(diameter));
   const whole = areas.reduce((sum, area) => sum + area, 0);
   const mean = (of: (air: PropellerAir) => number) => (value: Inflows) =>
     value.each.reduce((sum, air, i) => sum + (areas[i]! / whole) * of(air), 0);
   const caution = inflows.status === 'solved' ? inflows.value.cautions.join(' ') : null;
-  return rowsFrom(
-    inflows,
-    {
-      'inflow.ratio': mean(({ ratio }) => ratio),
-      'inflow.perWatt': mean((air) => air.perWatt),
-      'inflow.wakeShare': mean(({ wakeShare }) => wakeShare),
-      'inflow.insideShare': mean(({ insideShare }) => insideShare),
-    },
-    { 'inflow.ratio': { caution } },
-  );
+  return {
+    ...rowsFrom(
+      withAir(inflows),
+      {
+        'inflow.ratio': mean(({ ratio }) => ratio),
+        'inflow.perWatt': mean((air) => air.perWatt),
+        'inflow.wakeShare': mean(({ wakeShare }) => wakeShare),
+      },
+      { 'inflow.ratio': { caution } },
+    ),
+    ...rowsFrom(inflows, { 'inflow.insideShare': mean(({ insideShare }) => insideShare) }),
+  };
+}
+
+function withAir(inflows: Outcome<Inflows>): Outcome<Inflows> {
+  if (inflows.status === 'infeasible') return inflows;
+  const buried = inflows.value.each.find(({ insideShare }) => insideShare >= 1);
+  return buried
+    ? infeasible(`${buried.name} turns inside the hull, where no air reaches it.`, 'Move it out of the hull.')
+    : inflows;
 }

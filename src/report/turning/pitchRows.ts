@@ -1,10 +1,14 @@
-/** How the craft sits in cruise, how it climbs, and how fast it may fly. */
+/** How the craft sits in cruise, how it climbs and hovers, and up to which speed its pitch is held. */
 import { infeasible, type Outcome, solved } from '../../numeric/outcome.ts';
+import { heavinessOf } from '../../physics/balance/loading.ts';
 import type { CraftState } from '../../physics/craftState.ts';
+import { type ClimbPoint, steadyClimb } from '../../physics/cruise/climb.ts';
 import { type Critical, criticalSpeed } from '../../physics/cruise/critical.ts';
 import { cruisePitch } from '../../physics/cruise/cruise.ts';
+import { hoverOf } from '../../physics/cruise/hover.ts';
 import { thrustersOf } from '../../physics/thrust/thrusters.ts';
 import type { TurnAsked } from '../../physics/turning/asked.ts';
+import { STANDARD_GRAVITY } from '../../units/constants.ts';
 import type { Rows } from '../rows.ts';
 import { withoutThrust } from './thrusterWords.ts';
 import { rowsFrom } from './turnFigure.ts';
@@ -18,7 +22,6 @@ export function pitchRows(state: CraftState, { throttle, speed }: TurnAsked): Ro
       cruise,
       {
         'cruise.pitch': ({ pitch }) => pitch,
-        'cruise.floating': ({ floating }) => floating,
         'cruise.thrustCouple': ({ terms }) => terms.thrust,
         'cruise.dragCouple': ({ terms }) => terms.podDrag + terms.finDrag,
         'cruise.munkCouple': ({ terms }) => terms.munk,
@@ -38,3 +41,61 @@ const loosening = (critical: Outcome<Critical>): Outcome<number> => {
   const { speed } = critical.value;
   return speed === null ? infeasible('There is none: the fins hold the nose at any speed.') : solved(speed);
 };
+
+export function hoverRows(state: CraftState): Rows {
+  const why = withoutThrust(state.craft, thrustersOf(state));
+  return {
+    ...rowsFrom(solved(STANDARD_GRAVITY * heavinessOf(state.loading)), { 'hover.force': (force) => force }),
+    ...rowsFrom(why ? infeasible(why) : hoverOf(state), {
+      'hover.share': ({ share }) => share,
+      'hover.vector': ({ vector }) => vector,
+      'hover.pitch': ({ pitch }) => pitch,
+    }),
+  };
+}
+
+/** `curve`: climb over vectoring in pitch, at the same throttle. */
+export function climbRows(state: CraftState, throttle: number, curve: readonly ClimbPoint[]): Rows {
+  const why = withoutThrust(state.craft, thrustersOf(state));
+  const asSet = why ? infeasible(why) : steadyClimb(state, { throttle, vector: null });
+  const caution = asSet.status === 'solved' ? asSet.value.cautions.join(' ') : null;
+  return {
+    ...rowsFrom(
+      asSet,
+      {
+        'climb.rate': ({ climbRate }) => climbRate,
+        'climb.path': ({ path }) => path,
+        'climb.pitch': ({ pitch }) => pitch,
+      },
+      { 'climb.rate': { caution } },
+    ),
+    ...rowsFrom(why ? infeasible(why) : most(curve, 1), {
+      'climb.best': ({ rate }) => rate,
+      'climb.bestVector': ({ vector }) => vector,
+    }),
+    ...rowsFrom(why ? infeasible(why) : most(curve, -1), {
+      'climb.descent': ({ rate }) => rate,
+      'climb.descentVector': ({ vector }) => vector,
+    }),
+  };
+}
+
+interface Rate {
+  readonly vector: number;
+  /** m/s, + up */
+  readonly rate: number;
+}
+
+/** The point that goes up fastest, or down fastest. */
+function most(curve: readonly ClimbPoint[], way: 1 | -1): Outcome<Rate> {
+  if (curve.length < 2) return infeasible('No thruster turns in pitch.');
+  const rates = curve.flatMap(({ vector, climb }) =>
+    climb.status === 'solved' ? [{ vector, rate: climb.value.climbRate }] : [],
+  );
+  const [first, ...rest] = rates;
+  if (!first) {
+    const [{ climb }] = curve as [ClimbPoint];
+    return climb.status === 'infeasible' ? climb : infeasible('No steady path was found.');
+  }
+  return solved(rest.reduce((best, each) => (way * each.rate > way * best.rate ? each : best), first));
+}

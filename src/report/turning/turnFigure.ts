@@ -15,7 +15,7 @@ const ALONE = 'All else as it is, the masses too.';
 const COUPLE = 'In cruise, about the CB, + nose-up.';
 
 const FIGURES = {
-  'turn.arm': { label: 'Arm about the CG', quantity: 'length', why: '+ thrust aft of the CG.' },
+  'turn.arm': { label: 'Arm about the CG', quantity: 'length' },
   'turn.yawMoment': { label: 'Yaw moment about the CG', quantity: 'torque', why: 'The greatest, at rest.' },
   'turn.virtualArm': {
     label: 'Arm about the virtual mass centre',
@@ -34,9 +34,9 @@ const FIGURES = {
     why: 'Of the longest arm that the hull has room for.',
   },
   'turn.shareThrust': {
-    label: 'Left by the throttle',
+    label: 'Left by thrust and throttle',
     quantity: 'fraction',
-    why: 'Of the thrust of all thrusters at full throttle.',
+    why: 'What can yaw the craft, of the thrust of all at full throttle.',
   },
   'turn.timeTo90': { label: 'Time to yaw 90° from rest', quantity: 'time' },
   'turn.timeTo90Cruise': { label: 'Time to yaw 90° from cruise', quantity: 'time' },
@@ -99,23 +99,6 @@ const FIGURES = {
     quantity: 'momentPerAngle',
     why: 'At cruise speed; + brings the nose back to the path.',
   },
-  'added.k1': { label: 'Added mass ahead, k1', quantity: 'ratio', why: USED },
-  'added.k2': { label: 'Added mass sideways, k2', quantity: 'ratio', why: USED },
-  'added.kPrime': { label: 'Added inertia in yaw, k′', quantity: 'ratio', why: USED },
-  'added.hullK1': { label: 'Added mass ahead, true hull', quantity: 'ratio', why: COMPARED },
-  'added.hullK2': { label: 'Added mass sideways, true hull', quantity: 'ratio', why: COMPARED },
-  'added.hullKPrime': { label: 'Added inertia in yaw, true hull', quantity: 'ratio', why: COMPARED },
-  'inertia.yaw': { label: 'Yaw inertia, solid and gas', quantity: 'inertia', why: 'About the CB.' },
-  'inertia.airYaw': {
-    label: 'Yaw inertia, air carried along',
-    quantity: 'inertia',
-    why: 'About the CB; it adds to that of solid and gas.',
-  },
-  'thrust.static': {
-    label: 'Static thrust, all thrusters',
-    quantity: 'force',
-    why: 'At rest at full throttle, each along its own axis.',
-  },
   'speed.top': { label: 'Top speed', quantity: 'speed', why: 'Level, in still air, at full throttle.' },
   'speed.cruise': { label: 'Cruise speed', quantity: 'speed' },
   'speed.pitchSpeed': {
@@ -127,6 +110,11 @@ const FIGURES = {
   'drag.hullShare': { label: 'of it the hull', quantity: 'fraction' },
   'drag.finShare': { label: 'of it the fins', quantity: 'fraction' },
   'drag.podShare': { label: 'of it what hangs outside', quantity: 'fraction' },
+  'thrust.static': {
+    label: 'Static thrust, all thrusters',
+    quantity: 'force',
+    why: 'At rest at full throttle, each along its own axis.',
+  },
   'power.atRest': {
     label: 'Ideal power at rest',
     quantity: 'power',
@@ -150,12 +138,42 @@ const FIGURES = {
     quantity: 'force',
     why: 'Left over of thrust, air and lift after the weight; + up. Without a hand on it the craft climbs or sinks by it.',
   },
-  'cruise.floating': { label: 'Pitch afloat at rest', quantity: 'angle', why: '+ nose-up.' },
   'cruise.criticalSpeed': {
-    label: 'Speed at which the nose gets loose',
+    label: 'Speed up to which pitch is held',
     quantity: 'speed',
-    why: 'From there on the Munk moment overcomes pendulum and fins.',
+    why: 'From there on the Munk moment overcomes pendulum and fins, and the nose goes where it likes.',
   },
+  'climb.rate': {
+    label: 'Climbs, left to itself',
+    quantity: 'speed',
+    why: 'With thrust as set in pitch; + up.',
+  },
+  'climb.path': { label: 'Slope of that path', quantity: 'angle', why: '+ up.' },
+  'climb.pitch': { label: 'Pitch on that path', quantity: 'angle', why: '+ nose-up.' },
+  'climb.best': {
+    label: 'Fastest climb by vectoring',
+    quantity: 'speed',
+    why: 'Of all angles in pitch that are within the limits.',
+  },
+  'climb.bestVector': { label: 'with thrust turned in pitch by', quantity: 'angle', why: '+ thrust up.' },
+  'climb.descent': { label: 'Fastest descent by vectoring', quantity: 'speed', why: '+ up, so − is down.' },
+  'climb.descentVector': { label: 'with the thrust turned by', quantity: 'angle', why: '+ thrust up.' },
+  'hover.force': {
+    label: 'Force up that holds its height',
+    quantity: 'force',
+    why: 'At rest; + carries a heavy craft, − holds a light one down.',
+  },
+  'hover.share': {
+    label: 'Share of thrust for hovering',
+    quantity: 'fraction',
+    why: 'Of what the thrusters that can be turned so far give at rest.',
+  },
+  'hover.vector': {
+    label: 'Thrust turned in pitch, hovering',
+    quantity: 'angle',
+    why: 'To the hull; + thrust up.',
+  },
+  'hover.pitch': { label: 'Pitch, hovering', quantity: 'angle', why: '+ nose-up.' },
   'inflow.ratio': {
     label: 'Air at the propeller over free air',
     quantity: 'factor',
@@ -174,6 +192,18 @@ const FIGURES = {
   'inflow.insideShare': {
     label: 'Share of the disc inside the hull',
     quantity: 'fraction',
+  },
+  'added.k1': { label: 'Added mass ahead, k1', quantity: 'ratio', why: USED },
+  'added.k2': { label: 'Added mass sideways, k2', quantity: 'ratio', why: USED },
+  'added.kPrime': { label: 'Added inertia in yaw, k′', quantity: 'ratio', why: USED },
+  'added.hullK1': { label: 'Added mass ahead, true hull', quantity: 'ratio', why: COMPARED },
+  'added.hullK2': { label: 'Added mass sideways, true hull', quantity: 'ratio', why: COMPARED },
+  'added.hullKPrime': { label: 'Added inertia in yaw, true hull', quantity: 'ratio', why: COMPARED },
+  'inertia.yaw': { label: 'Yaw inertia, solid and gas', quantity: 'inertia', why: 'About the CB.' },
+  'inertia.airYaw': {
+    label: 'Yaw inertia, air carried along',
+    quantity: 'inertia',
+    why: 'About the CB; it adds to that of solid and gas.',
   },
 } as const satisfies Record<string, Figure>;
 

@@ -1,7 +1,7 @@
 /** Asks the physics once and gives everything that panels, drawing and terminal show of how a craft turns and flies. */
 import type { Craft } from '../../craft/craft.ts';
 import { kept } from '../../numeric/kept.ts';
-import { infeasible, type Outcome, solved, valueOrNull } from '../../numeric/outcome.ts';
+import { infeasible, type Outcome, valueOrNull } from '../../numeric/outcome.ts';
 import { type CraftState, craftStateOf } from '../../physics/craftState.ts';
 import { type ClimbPoint, climbCurve } from '../../physics/cruise/climb.ts';
 import { type SpeedPoint, speedCurve } from '../../physics/thrust/speed.ts';
@@ -22,11 +22,12 @@ import { arrowsOf, type ThrustArrow } from './arrows.ts';
 import { authorityRows } from './authorityRows.ts';
 import { type PlaceCost, placeCostOf } from './costs.ts';
 import { inflowRows, inflowsAt, type PropellerAir } from './inflows.ts';
-import { pitchRows } from './pitchRows.ts';
+import { climbRows, hoverRows, pitchRows } from './pitchRows.ts';
 import { type PropellerLine, propellerLines } from './propellers.ts';
 import { speedRows } from './speedRows.ts';
 import { withoutThrust } from './thrusterWords.ts';
 import { turnCautions } from './turnCautions.ts';
+import { TURN_KEYS } from './turnFigure.ts';
 import { costWords, turnHeadline } from './turnHeadline.ts';
 import { turnRows } from './turnRows.ts';
 import { type PlainTurnVerdict, type TurnVerdict, turnVerdictsOf } from './turnVerdicts.ts';
@@ -136,6 +137,7 @@ function figuresOf(state: CraftState, asked: TurnAsked): TurnFigures {
       ...authorityRows(state, asked.throttle),
       ...speedRows(state, asked),
       ...pitchRows(state, asked),
+      ...hoverRows(state),
       ...addedRows(state),
     },
     arrows: arrowsOf(state),
@@ -154,14 +156,17 @@ function reportOf(state: CraftState, asked: TurnAsked): PlainReport {
   const figures = figuresOf(state, asked);
   const turn = turnIn(state, thrusters, asked);
   const cruise = figures.rows['speed.cruise']!;
-  const speed = cruise.value === null ? infeasible(cruise.why) : solved(cruise.value);
-  const rows: Rows = {
+  const inflows =
+    cruise.value === null ? infeasible(cruise.why) : inflowsAt(state, cruise.value, asked.throttle);
+  const climbs = climbCurve(state, asked.throttle);
+  const rows = inOrder({
     ...figures.rows,
     ...turnRows(turn, figures.rows['thrust.static']!.value ?? 0),
-    ...inflowRows(state, speed, asked.throttle),
+    ...climbRows(state, asked.throttle, climbs),
+    ...inflowRows(inflows, thrusters),
     ...hullAirRows(state),
-  };
-  const verdicts = turnVerdictsOf(craft.targets, turn, rows);
+  });
+  const verdicts = turnVerdictsOf(craft.targets, thrusters, turn, rows);
   const moves = thrusters.length > 0;
   return {
     ...figures,
@@ -174,14 +179,14 @@ function reportOf(state: CraftState, asked: TurnAsked): PlainReport {
     turn: valueOrNull(turn),
     speedCurve: moves ? speedCurve(state, { throttle: asked.throttle }) : [],
     steadyCurve: valueOrNull(steadyCurve(state, asked)) ?? [],
-    climbCurve: climbCurve(state, asked.throttle),
+    climbCurve: climbs,
     propellers: propellerLines(state),
-    inflows:
-      speed.status === 'solved'
-        ? (valueOrNull(inflowsAt(state, speed.value, asked.throttle))?.each ?? [])
-        : [],
+    inflows: valueOrNull(inflows)?.each ?? [],
   };
 }
+
+const inOrder = (rows: Rows): Rows =>
+  Object.fromEntries(TURN_KEYS.flatMap((key) => (rows[key] ? [[key, rows[key]]] : [])));
 
 /** Without thrust the sentence names the part that lacks it. */
 function turnIn(state: CraftState, thrusters: readonly Thruster[], asked: TurnAsked): Outcome<Turn> {

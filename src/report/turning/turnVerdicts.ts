@@ -1,6 +1,8 @@
 /** The verdicts on what the targets ask of turning: the time for the first 90° of yaw, and the side gust to be held. */
 import type { Targets } from '../../craft/schema.ts';
 import type { Outcome } from '../../numeric/outcome.ts';
+import type { Thruster } from '../../physics/thrust/thrusters.ts';
+import { turnsInYaw } from '../../physics/turning/steer.ts';
 import type { Need, Turn } from '../../physics/turning/turn.ts';
 import { say } from '../../units/sentence.ts';
 import type { Row } from '../row.ts';
@@ -21,17 +23,29 @@ export interface TurnVerdict extends Omit<Verdict, 'key'> {
 export type PlainTurnVerdict = Omit<TurnVerdict, 'figure' | 'side'> & Pick<PlainVerdict, 'sides'>;
 
 /** One for each target that is set. */
-export function turnVerdictsOf(targets: Targets, turn: Outcome<Turn>, rows: Rows): PlainTurnVerdict[] {
-  const { turnTime, sideGust } = targets;
-  const needs = turn.status === 'solved' ? turn.value.authority.need : null;
+export function turnVerdictsOf(
+  { turnTime, sideGust }: Targets,
+  thrusters: readonly Thruster[],
+  turn: Outcome<Turn>,
+  rows: Rows,
+): PlainTurnVerdict[] {
   const told = turn.status === 'solved';
+  const needs = told ? turn.value.authority.need : null;
+  const limit = Math.max(...thrusters.filter(turnsInYaw).map(({ yaw }) => Math.max(-yaw.least, yaw.most)), 0);
+  const verdict = (key: TurnVerdictKey, asked: number) => {
+    const { make, keys } =
+      key === 'turnTime' ? { make: timeVerdict, keys: NEEDED } : { make: gustVerdict, keys: AGAINST_GUST };
+    return { ...make(asked, told, rows), need: needWords(needs?.[key] ?? null, rows, keys, limit) };
+  };
   return [
-    ...(turnTime === null ? [] : [timeVerdict(turnTime, told, rows, needs?.turnTime ?? null)]),
-    ...(sideGust === null ? [] : [gustVerdict(sideGust, told, rows, needs?.sideGust ?? null)]),
+    ...(turnTime === null ? [] : [verdict('turnTime', turnTime)]),
+    ...(sideGust === null ? [] : [verdict('sideGust', sideGust)]),
   ];
 }
 
-function timeVerdict(most: number, told: boolean, rows: Rows, need: Need | null): PlainTurnVerdict {
+type Bare = Omit<PlainTurnVerdict, 'need'>;
+
+function timeVerdict(most: number, told: boolean, rows: Rows): Bare {
   const row = rows['turn.timeTo90']!;
   const margin = row.value === null ? null : most - row.value;
   const short = row.value === null ? 'does not get there' : 'too slow';
@@ -40,12 +54,11 @@ function timeVerdict(most: number, told: boolean, rows: Rows, need: Need | null)
     title: 'Turns 90°',
     ...judged(row, margin, told, ['quick enough', short]),
     target: `within ${say(most, 'time')}`,
-    need: needWords(need, rows, NEEDED),
     working: workingWith(rows, 'turn.timeTo90', NEEDED),
   };
 }
 
-function gustVerdict(least: number, told: boolean, rows: Rows, need: Need | null): PlainTurnVerdict {
+function gustVerdict(least: number, told: boolean, rows: Rows): Bare {
   const row = rows['turn.gustHeld']!;
   const margin = row.value === null ? null : row.value - least;
   return {
@@ -53,7 +66,6 @@ function gustVerdict(least: number, told: boolean, rows: Rows, need: Need | null
     title: 'Side gust',
     ...judged(row, margin, told, ['holds it', 'turned by it']),
     target: `at least ${say(least, 'speed')}`,
-    need: needWords(need, rows, AGAINST_GUST),
     working: workingWith(rows, 'turn.gustHeld', AGAINST_GUST),
   };
 }
@@ -96,24 +108,24 @@ function workingWith(rows: Rows, key: TurnKey, keys: NeedKeys) {
   };
 }
 
-function needWords(need: Need | null, rows: Rows, keys: NeedKeys): string[] {
+/** `limit`: how far the thrusters turn in yaw today, rad. */
+function needWords(need: Need | null, rows: Rows, keys: NeedKeys, limit: number): string[] {
   const moment = rows[keys.moment];
   if (!need || !moment) return [];
   const takes =
     moment.value === null
       ? moment.why
-      : `It takes a yaw moment of ${say(moment.value, 'torque')}; there is ${say(need.available, 'torque')}.`;
+      : `It takes a yaw moment of ${say(moment.value, 'torque')}; steered hardest there is ${say(need.available, 'torque')}.`;
   return [
     takes,
-    ...aloneWords('Thrust', rows[keys.thrust]!, rows['thrust.static']?.value ?? null),
-    ...aloneWords('Vectoring', rows[keys.vector]!, null),
-    ...aloneWords('The arm', rows[keys.arm]!, Math.abs(rows['turn.arm']?.value ?? 0)),
+    aloneWords('Thrust', rows[keys.thrust]!, rows['thrust.static']!.value),
+    aloneWords('Vectoring', rows[keys.vector]!, limit),
+    aloneWords('The arm', rows[keys.arm]!, Math.abs(rows['turn.arm']?.value ?? 0)),
   ];
 }
 
-/** "Thrust alone: 0.812 N instead of 0.400 N." */
-function aloneWords(what: string, row: Row, now: number | null): string[] {
-  if (row.value === null) return [`${what} alone: ${row.why.charAt(0).toLowerCase()}${row.why.slice(1)}`];
-  const instead = now === null ? '' : ` instead of ${say(now, row.quantity)}`;
-  return [`${what} alone: ${say(row.value, row.quantity)}${instead}.`];
+/** "Thrust alone: 0.812 N would do; it is 0.400 N." */
+function aloneWords(what: string, { value, quantity, why }: Row, now: number | null): string {
+  if (value === null) return `${what} alone: ${why.charAt(0).toLowerCase()}${why.slice(1)}`;
+  return `${what} alone: ${say(value, quantity)} would do; it is ${say(now ?? 0, quantity)}.`;
 }

@@ -19,6 +19,8 @@ const STEADY =
 const ALONE = 'The same craft with this one figure changed until the target is just met.';
 const MOMENTUM = 'Momentum theory after Rankine and Froude.';
 const PITCH = 'Moments about the CB in steady level flight; Munk, NACA TR 184 (1924).';
+const PATH =
+  'Statics of a steady straight path in the vertical plane, by Newton’s method; couples as in cruise.';
 const HOERNER =
   'Hull after Hoerner, Fluid-Dynamic Drag (1965); fins as plates; what hangs outside by its drag area.';
 
@@ -255,11 +257,6 @@ const RECIPES: Readonly<Record<TurnKey, Recipe>> = {
     ],
     source: PITCH,
   },
-  'cruise.floating': {
-    formula: 'atan2(CG station − CB station, CB height − CG height)',
-    from: [],
-    source: 'At rest the line from CG to CB stands vertical.',
-  },
   'cruise.thrustCouple': {
     formula: 'Σ T (a sin ε − h cos ε)',
     from: ['thrust.static', 'speed.cruise'],
@@ -299,6 +296,45 @@ const RECIPES: Readonly<Record<TurnKey, Recipe>> = {
     formula: '√(g W h ÷ [(k3 − k1) ρV − ½ρ Σ S a sin²φ (x_fin − x_B)])',
     from: ['added.k1'],
     source: PITCH,
+  },
+  'climb.rate': {
+    formula: 'u sin θ + w cos θ where forces along, forces across and couples are all nil',
+    from: ['climb.path', 'climb.pitch', 'thrust.static'],
+    source: PATH,
+  },
+  'climb.path': { formula: 'θ − α', from: ['climb.pitch'], source: PATH },
+  'climb.pitch': { formula: 'θ of that steady path', from: ['thrust.static'], source: PATH },
+  'climb.best': {
+    formula: 'greatest of the climb rates over pitch vectoring',
+    from: ['climb.bestVector'],
+    source: PATH,
+  },
+  'climb.bestVector': { formula: 'the angle of the fastest climb', from: ['climb.best'], source: PATH },
+  'climb.descent': {
+    formula: 'least of the climb rates over pitch vectoring',
+    from: ['climb.descentVector'],
+    source: PATH,
+  },
+  'climb.descentVector': {
+    formula: 'the angle of the fastest descent',
+    from: ['climb.descent'],
+    source: PATH,
+  },
+  'hover.force': { formula: 'g × static heaviness', from: [], source: 'Archimedes.' },
+  'hover.share': {
+    formula: 'that force ÷ thrust at rest of the thrusters that can be turned so far',
+    from: ['hover.force', 'thrust.static'],
+    source: STATICS,
+  },
+  'hover.vector': {
+    formula: '±90° − pitch: the thrust stands upright',
+    from: ['hover.pitch'],
+    source: STATICS,
+  },
+  'hover.pitch': {
+    formula: 'W (G − S) − L (B − S) stands vertical, S where the thrust acts',
+    from: ['hover.force'],
+    source: 'Moments about S.',
   },
   'inflow.ratio': {
     formula: 'mean axial speed over the open disc ÷ speed of the craft',

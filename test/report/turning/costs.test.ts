@@ -14,9 +14,9 @@ const costOf = (craft: Craft) => {
 const bare = (craft: Craft): Craft => ({ ...craft, wires: { byId: {}, order: [] } });
 
 test('without wires the lead is the moment of the thruster over the arm of the lead', () => {
-  // 110 g at 2.97 m about a CB at 1.5 m, answered at 0.05 m: 0.11 × 1.47 ÷ 1.45 kg, by hand.
-  expect(costOf(bare(tailCraft()))).toMatchObject({ station: 2.97, wire: 0 });
-  expect(costOf(bare(tailCraft())).lead).toBeCloseTo((0.11 * 1.47) / 1.45, 12);
+  // 110 g at 3.05 m about a CB at 1.5 m, answered at 0.05 m: 0.11 × 1.55 ÷ 1.45 kg, by hand.
+  expect(costOf(bare(tailCraft()))).toMatchObject({ station: 3.05, wire: 0 });
+  expect(costOf(bare(tailCraft())).lead).toBeCloseTo((0.11 * 1.55) / 1.45, 12);
 });
 
 test('with its wires it is the lead that the report tells, less that of the craft with the thruster at the CB', () => {

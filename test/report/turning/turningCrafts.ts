@@ -39,7 +39,7 @@ const tailThruster = (change: Partial<Part> = {}): Part =>
     name: 'Tail thruster',
     mass: 0.11,
     massTolerance: 0,
-    place: { kind: 'axis', station: 2.97 },
+    place: { kind: 'axis', station: 3.05 },
     thruster: thrusterData({ yaw: upTo(60), pitch: upTo(40) }),
     ...change,
   });

@@ -1,0 +1,99 @@
+/** `turn FILE`: how a craft turns, flies and climbs by its thrusters, for reading or as JSON. */
+import { type Craft, listed } from '../craft/craft.ts';
+import type { Vectoring } from '../craft/thrustSchema.ts';
+import { hazardsOf } from '../report/hazards.ts';
+import { rowText } from '../report/rowText.ts';
+import type { PropellerLine } from '../report/turning/propellers.ts';
+import { type TurnReport, turnReport } from '../report/turning/turnReport.ts';
+import type { TurnVerdict } from '../report/turning/turnVerdicts.ts';
+import { formatQuantity } from '../units/format.ts';
+import type { UnitSystem } from '../units/units.ts';
+import type { Command } from './args.ts';
+import { rowsJson } from './balance.ts';
+import { figures } from './figures.ts';
+import { EXIT, type ExitCode, type Io } from './io.ts';
+import { left, oneLine, right, wrapped } from './layout.ts';
+import { readCraft } from './readCraft.ts';
+
+type Asked = Extract<Command, { kind: 'turn' }>;
+
+/** Exit 1 when a turning target is missed, or nothing is known of any thruster. */
+export function turned(asked: Asked, io: Io): ExitCode {
+  const { file, json, units } = asked;
+  const read = readCraft(file, units, io);
+  if (!read) return EXIT.bad;
+  const { craft } = read;
+  const wrong = vectorTrouble(craft, asked.vector);
+  if (wrong) {
+    io.error(`${oneLine(wrong)}\n`);
+    return EXIT.bad;
+  }
+  const report = turnReport(craft, asked, units);
+  io.write(json ? rowsJson(report.rows) : turnText(craft, report, units));
+  return report.turn && report.met ? EXIT.fine : EXIT.misses;
+}
+
+/** Why no thruster, or not every one, can be turned to that angle in yaw; null when all that turn can. */
+function vectorTrouble(craft: Craft, vector: number | null): string | null {
+  if (vector === null) return null;
+  const found = `--vector: found ${degrees(vector)}`;
+  const able = listed(craft.parts).filter(({ thruster }) => thruster && turns(thruster.yaw));
+  if (able.length === 0) return `${found}; but no thruster of this craft turns in yaw`;
+  const out = able.find(
+    ({ thruster }) => vector < thruster!.yaw.least - DUST || vector > thruster!.yaw.most + DUST,
+  );
+  if (!out) return null;
+  const { least, most } = out.thruster!.yaw;
+  return `${found}; allowed: ${degrees(least)} to ${degrees(most)}, the limits in yaw of ${out.name || out.kind}`;
+}
+
+/** Degrees as typed are no whole number of radians. */
+const DUST = 1e-9;
+
+const turns = ({ least, most, slew }: Vectoring): boolean => most > least && slew > 0;
+
+const degrees = (angle: number): string => formatQuantity(angle, 'angle', 'metric');
+
+function turnText(craft: Craft, report: TurnReport, units: UnitSystem): string {
+  const { headline, costWords, verdicts, rows, notes, propellers, cautions } = report;
+  const lines = [
+    ...wrapped(craft.name || 'Craft without a name'),
+    ...wrapped([headline, ...costWords].join(' ')),
+    '',
+    ...(verdicts.length > 0 ? ['Verdicts', ...verdicts.flatMap(verdictLines), ''] : []),
+    ...figures(rows, units),
+    ...propellerTable(propellers, units),
+    ...(notes.length > 0 ? ['Notes', ...notes.flatMap(bullet), ''] : []),
+    'Cautions',
+    ...[...cautions, ...hazardsOf(craft)].flatMap(bullet),
+  ];
+  return `${lines.join('\n')}\n`;
+}
+
+function verdictLines({ need, ...verdict }: TurnVerdict): string[] {
+  const { state, title, word, figure, target, marginWords } = verdict;
+  const cells = [left(state, 8), `${left(title, 19)} `, left(word, 20), figure];
+  const by = marginWords && `: ${marginWords}`;
+  return [
+    oneLine(`  ${cells.join('')}`).trimEnd(),
+    ...wrapped(`wanted ${target}${by}`, 10),
+    ...need.flatMap((each) => wrapped(each, 10)),
+  ];
+}
+
+function propellerTable(lines: readonly PropellerLine[], units: UnitSystem): string[] {
+  if (lines.length === 0) return [];
+  const row = (name: string, ...cells: readonly string[]) =>
+    oneLine(`  ${left(name, 26)}${cells.map((cell) => right(cell, 12)).join('')}`).trimEnd();
+  return [
+    'Propellers: ideal power for the same thrust, and that over today’s',
+    row('', 'at rest', 'over', 'at top', 'over'),
+    ...lines.map(({ name, atRest, atRestOverToday, atTop, atTopOverToday }) =>
+      row(name, ...[atRest, atRestOverToday, atTop, atTopOverToday].map((each) => rowText(each, units))),
+    ),
+    '',
+  ];
+}
+
+const bullet = (sentence: string): string[] =>
+  wrapped(sentence, 4).map((line, i) => (i === 0 ? `  - ${line.slice(4)}` : line));
