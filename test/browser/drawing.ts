@@ -20,9 +20,14 @@ export async function partOnPage(page: Page, text: string, part: string): Promis
   return planeOnPage(page, x, z);
 }
 
-/** A point of the side view's plane, px on the page. */
-export async function planeOnPage(page: Page, station: number, height: number): Promise<Point> {
-  const side = page.getByTestId('side-view');
+/** A point of the side view's plane, or of another view's, px on the page. */
+export async function planeOnPage(
+  page: Page,
+  station: number,
+  height: number,
+  testId = 'side-view',
+): Promise<Point> {
+  const side = page.getByTestId(testId);
   const box = (await side.boundingBox())!;
   const view = await side.evaluate(({ dataset }): View => {
     const { scale, originX, originY, tilt, pivot } = dataset;

@@ -1,24 +1,8 @@
-import type { Page } from 'playwright-core';
 import { expect } from 'vitest';
 import { openSample, sample, savedText } from './craftFiles.ts';
 import { type Point, partOnPage, planeOnPage } from './drawing.ts';
+import { touch } from './fingers.ts';
 import { test } from './visit.ts';
-
-/** Moves fingers over the glass, in steps. */
-async function touch(page: Page, fingers: readonly (readonly [from: Point, to: Point])[]): Promise<void> {
-  const cdp = await page.context().newCDPSession(page);
-  const at = (share: number) =>
-    fingers.map(([from, to], id) => ({
-      x: from.x + (to.x - from.x) * share,
-      y: from.y + (to.y - from.y) * share,
-      id,
-    }));
-  await cdp.send('Input.dispatchTouchEvent', { type: 'touchStart', touchPoints: at(0) });
-  for (let i = 1; i <= 12; i++) {
-    await cdp.send('Input.dispatchTouchEvent', { type: 'touchMove', touchPoints: at(i / 12) });
-  }
-  await cdp.send('Input.dispatchTouchEvent', { type: 'touchEnd', touchPoints: [] });
-}
 
 const by = ({ x, y }: Point, dx: number, dy: number): Point => ({ x: x + dx, y: y + dy });
 
