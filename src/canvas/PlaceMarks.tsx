@@ -78,7 +78,8 @@ function dot(context: Context, { x, y }: ScreenPoint, radius: number, ink: strin
 }
 
 /** Aft of tail and stations while they are in sight, else at the edge. */
-function scaleNumbers(context: Context, { high, low, top, foot }: Strip, props: PlaceMarksProps): void {
+function scaleNumbers(context: Context, { high, low, top, foot, runs }: Strip, props: PlaceMarksProps): void {
+  if (runs.length === 0) return;
   const { page, size, palette } = props;
   context.font = SMALL;
   context.textBaseline = 'middle';
@@ -94,7 +95,7 @@ function scaleNumbers(context: Context, { high, low, top, foot }: Strip, props: 
 function name(context: Context, strip: Strip, { page, size, palette }: PlaceMarksProps): void {
   const room = Math.min(page.right, size.width) - Math.max(page.left, 0) - 12;
   const { name: what, better } = strip.curve;
-  const whole = `${what} – ${better} is better`;
+  const whole = strip.runs.length > 0 ? `${what} – ${better} is better` : `${what} – at no station so far`;
   const text = textWidth(whole, SMALL) < room ? whole : shortened(what, SMALL, room);
   if (text === null) return;
   const at = nameSpot(strip, page, size.width, { width: textWidth(text, SMALL), height: 12 });

@@ -37,6 +37,8 @@ export interface Curve {
   readonly quantity: Quantity;
   /** Which way is better. */
   readonly better: 'less' | 'more';
+  /** Values beyond so many times the least are drawn at the top: where the arm is nil the time has no end. */
+  readonly cap?: number;
   value(spot: StudySpot): number | null;
 }
 
@@ -47,7 +49,7 @@ export const CURVES: readonly Curve[] = [
     better: 'less',
     value: ({ ballast, wire }) => (ballast === null ? null : ballast + wire),
   },
-  { name: 'Time to 90°', quantity: 'time', better: 'less', value: ({ timeTo90 }) => timeTo90 },
+  { name: 'Time to 90°', quantity: 'time', better: 'less', cap: 4, value: ({ timeTo90 }) => timeTo90 },
   { name: 'Side gust held', quantity: 'speed', better: 'more', value: ({ gustHeld }) => gustHeld },
   { name: 'Thrust per watt', quantity: 'ratio', better: 'more', value: ({ perWatt }) => perWatt },
 ];
@@ -134,19 +136,21 @@ function stripOf(
 ): Strip {
   const values = points.map(curve.value);
   const now = today && curve.value(today);
-  const scale = scaleOf(
-    [...values, now].filter((value) => value !== null),
-    curve.quantity,
-    units,
-  );
-  const height = (value: number | null): number | null =>
-    value === null ? null : foot - ((foot - top) * (value - scale.low)) / (scale.high - scale.low);
+  const known = [...values, now].filter((value) => value !== null);
+  const most = (curve.cap ?? Number.POSITIVE_INFINITY) * Math.min(...known);
+  const capped = known.some((value) => value > most);
+  const held = known.map((value) => (capped ? Math.min(value, most) : value));
+  const scale = scaleOf(held, curve.quantity, units);
+  const height = (value: number | null): number | null => {
+    if (value === null) return null;
+    return Math.max(top, foot - ((foot - top) * (value - scale.low)) / (scale.high - scale.low));
+  };
   const heights = values.map(height);
   return {
     curve,
     top,
     foot,
-    high: scale.labels.high,
+    high: capped ? `${scale.labels.high} +` : scale.labels.high,
     low: scale.labels.low,
     runs: runsOf(stations, heights),
     heights,

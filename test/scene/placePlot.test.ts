@@ -54,6 +54,14 @@ test('lead and wire are one sum; its curve breaks where there is no plan, and go
   expect(strip!.heights[2]).toBeNull();
 });
 
+test('where the arm is nil the time has no end: it is drawn at the top, and the scale is of the rest', () => {
+  const long = [3, 4, 900, 5, 3.5].map((timeTo90, i) => spot(i, { timeTo90 }));
+  const [, strip] = layPlace({ ...study, points: long, today: null }, view, 4, room, 'metric').strips;
+  expect([strip!.low, strip!.high]).toEqual(['0', '15 s +']);
+  expect(strip!.heights[2]).toBe(strip!.top);
+  expect(strip!.heights[3]!).toBeGreaterThan(strip!.top);
+});
+
 test('a propeller that strikes is hatched half-way to the stations where it does not', () => {
   expect(page.struck).toEqual([
     { left: 50, right: 100 },

@@ -40,7 +40,7 @@ const GROUPS: readonly GroupKind[] = [
   {
     id: 'cut',
     title: 'When the throttle is cut',
-    beside: { key: 'glide.halving', words: 'yaw halves in #' },
+    beside: { key: 'glide.halving', words: 'halves in #' },
     keys: /^glide\./,
   },
   {
@@ -58,7 +58,7 @@ const GROUPS: readonly GroupKind[] = [
   {
     id: 'inflow',
     title: 'Air at the propellers',
-    beside: { key: 'inflow.perWatt', words: '# thrust per watt' },
+    beside: { key: 'inflow.perWatt', words: '# per watt' },
     keys: /^inflow\./,
   },
   { id: 'more', title: 'More', beside: null, keys: /./ },
