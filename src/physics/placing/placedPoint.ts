@@ -22,7 +22,7 @@ export interface PlacedPoint extends Figures {
   readonly wireChange: number;
   /** What the propeller would strike; that it stands beyond the hull. One sentence each. */
   readonly cautions: readonly string[];
-  /** Whether the propeller strikes something or has less than the usual clearance. */
+  /** Whether one of them rules the station out: the propeller strikes something, or has less than the usual clearance. */
   readonly strikes: boolean;
   /** Whether there is a plan, nothing is struck, and no such station is as good in everything and better in something: ballast and wire, time to 90°, gust held, thrust per watt. */
   readonly best: boolean;

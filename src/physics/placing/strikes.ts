@@ -3,6 +3,7 @@
  * it stands beyond the hull. Geometry of the craft as drawn and level, wires and bending left out.
  */
 import { listed } from '../../craft/craft.ts';
+import type { Part } from '../../craft/schema.ts';
 import { say } from '../../units/sentence.ts';
 import type { CraftState } from '../craftState.ts';
 import { positionOf } from '../mass/position.ts';
@@ -13,27 +14,58 @@ import { clearanceOf, lowestOf, type Sweep, sweepOf } from './sweep.ts';
 export interface Strikes {
   /** One sentence each, what is the matter before its colon, by how much after it. */
   readonly cautions: readonly string[];
-  /** Whether the propeller strikes something or has less than the usual clearance; standing beyond the hull is no strike. */
+  /** Whether one of them rules the place out: not that it stands beyond the hull, nor what is meant. */
   readonly strikes: boolean;
 }
 
-export function strikesOf(state: CraftState, part: string): Strikes {
-  const thrusters = thrustersOf(state);
-  const own = thrusters.filter((thruster) => thruster.part === part);
-  const room = clearanceOf(Math.max(...own.map(({ diameter }) => diameter)));
-  const sweeps = own.map(sweepOf);
-  const others = thrusters.filter((thruster) => thruster.part !== part);
+/** What is so where the thruster sits today, and taken to be meant. */
+export interface Meant {
+  /** Fittings in the way of the blades: the mount, whose box is coarse and which goes wherever the thruster goes. */
+  readonly mounts: ReadonlySet<string>;
+  /** The propeller is the lowest of the craft: it is launched and caught by hand. Told at every station, it rules none out. */
+  readonly lowest: boolean;
+}
+
+const NOTHING_MEANT: Meant = { mounts: new Set(), lowest: false };
+
+export function meantOf(state: CraftState, part: string): Meant {
+  const { sweeps, room } = propellersOf(state, part);
+  const inWay = partsInWay(state, part, sweeps, NOTHING_MEANT);
+  return {
+    mounts: new Set(inWay.filter(({ kind }) => kind === 'fitting').map(({ id }) => id)),
+    lowest: groundWords(state, part, sweeps, room).length > 0,
+  };
+}
+
+export function strikesOf(state: CraftState, part: string, meant = NOTHING_MEANT): Strikes {
+  const { own, others, sweeps, room } = propellersOf(state, part);
+  const ground = groundWords(state, part, sweeps, room);
   const strikes = [
     ...skinWords(
       leastOf(sweeps, (sweep) => gapToSkin(sweep, state.hull)),
       room,
     ),
-    ...groundWords(lowestElse(state, part) - Math.min(...sweeps.map(lowestOf)), room),
-    ...partWords(state, part, sweeps),
+    ...partsInWay(state, part, sweeps, meant).map(
+      ({ name, kind }) => `The propeller would strike ${name || kind}.`,
+    ),
     ...propellerWords(sweeps, others, room),
     ...fellowWords(sweeps, room),
   ];
-  return { cautions: [...strikes, ...beyondWords(own, state.hull.length)], strikes: strikes.length > 0 };
+  return {
+    cautions: [...strikes, ...ground, ...beyondWords(own, state.hull.length)],
+    strikes: strikes.length > 0 || (ground.length > 0 && !meant.lowest),
+  };
+}
+
+function propellersOf(state: CraftState, part: string) {
+  const thrusters = thrustersOf(state);
+  const own = thrusters.filter((thruster) => thruster.part === part);
+  return {
+    own,
+    others: thrusters.filter((thruster) => thruster.part !== part),
+    sweeps: own.map(sweepOf),
+    room: clearanceOf(Math.max(...own.map(({ diameter }) => diameter))),
+  };
 }
 
 const leastOf = (sweeps: readonly Sweep[], gap: (sweep: Sweep) => number): number =>
@@ -52,8 +84,8 @@ function skinWords(gap: number, room: number): string[] {
 /** Less than this is rounding, m. */
 const DUST = 1e-9;
 
-/** `below`: by how much the propeller is the lowest of the craft, m. */
-function groundWords(below: number, room: number): string[] {
+function groundWords(state: CraftState, part: string, sweeps: readonly Sweep[], room: number): string[] {
+  const below = lowestElse(state, part) - Math.min(...sweeps.map(lowestOf));
   if (below <= DUST - room) return [];
   return below > 0
     ? [
@@ -76,13 +108,13 @@ function lowestElse(state: CraftState, part: string): number {
 const boxesOf = ({ craft, pieces }: CraftState, part: string): Box[] =>
   pieces[part]!.map((piece) => ({ piece, size: craft.parts.byId[part]!.size }));
 
-const partWords = (state: CraftState, part: string, sweeps: readonly Sweep[]): string[] =>
-  listed(state.craft.parts)
-    .filter(
-      ({ id }) =>
-        id !== part && boxesOf(state, id).some((box) => sweeps.some((sweep) => passesThrough(sweep, box))),
-    )
-    .map(({ name, kind }) => `The propeller would strike ${name || kind}.`);
+const partsInWay = (state: CraftState, part: string, sweeps: readonly Sweep[], { mounts }: Meant): Part[] =>
+  listed(state.craft.parts).filter(
+    ({ id }) =>
+      id !== part &&
+      !mounts.has(id) &&
+      boxesOf(state, id).some((box) => sweeps.some((sweep) => passesThrough(sweep, box))),
+  );
 
 function propellerWords(sweeps: readonly Sweep[], others: readonly Thruster[], room: number): string[] {
   const names = [...new Set(others.map(({ name }) => name))];

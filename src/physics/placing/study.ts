@@ -13,7 +13,7 @@ import { BallastAlong } from './ballastAt.ts';
 import { type FiguresAt, figuresAlong } from './figures.ts';
 import { heldAt, placeAt, stationsOf, type ThrusterPart } from './moved.ts';
 import { judged, type PlacedPoint } from './placedPoint.ts';
-import { strikesOf } from './strikes.ts';
+import { type Meant, meantOf, strikesOf } from './strikes.ts';
 
 export interface StudyOptions {
   /** How many stations, first and last among them, ≥ 2. Default 61. */
@@ -60,7 +60,8 @@ export function placementStudy(
   if (state.status === 'infeasible') return state;
   const ballast = new BallastAlong(solver);
   try {
-    return solved(studyOf({ craft, moving, state: state.value, ballast, options }));
+    const meant = meantOf(state.value, part);
+    return solved(studyOf({ craft, moving, state: state.value, meant, ballast, options }));
   } finally {
     ballast.dispose();
   }
@@ -82,6 +83,7 @@ interface Study {
   readonly moving: ThrusterPart;
   /** Of the craft as it is. */
   readonly state: CraftState;
+  readonly meant: Meant;
   readonly ballast: BallastAlong;
   readonly options: StudyOptions;
 }
@@ -113,7 +115,7 @@ function studyOf(study: Study): PlacementStudy {
 }
 
 function pointAt(
-  { craft, moving, ballast, options }: Study,
+  { craft, moving, meant, ballast, options }: Study,
   figuresAt: FiguresAt,
   place: Place,
 ): PlacedPoint {
@@ -131,7 +133,7 @@ function pointAt(
     wire: wireOf(state),
     wireChange: 0,
     ...figuresAt(state),
-    ...strikesOf(state, moving.id),
+    ...strikesOf(state, moving.id, meant),
     best: false,
   };
 }

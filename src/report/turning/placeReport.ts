@@ -48,7 +48,7 @@ function notesOf(craft: Craft, { part, points, complete }: PlacementStudy): stri
           'On the axis between the ends of the hull the thruster would be inside it: there it is tried below the keel.',
         ]
       : []),
-    `About the propeller ${say(room, 'smallLength')} is kept clear of skin, ground and other propellers (common practice, no source). Other parts are taken as boxes, the craft as level.`,
+    `About the propeller ${say(room, 'smallLength')} is kept clear of skin, ground and other propellers (common practice, no source). Other parts are taken as boxes, the craft as level; a fitting in the way where the thruster is today is taken as its mount, and where its propeller is the lowest of the craft today that rules no station out.`,
     'Thrust per watt is that in the slowed or quickened air at the propeller over that in free air; what its own suction does to the hull is left out.',
     'Try a new place on a tether before free flight.',
   ];

@@ -2,7 +2,7 @@ import { expect, test } from 'vitest';
 import { type Craft, keyed, listed } from '../../../src/craft/craft.ts';
 import type { Part } from '../../../src/craft/schema.ts';
 import { craftStateOf } from '../../../src/physics/craftState.ts';
-import { strikesOf } from '../../../src/physics/placing/strikes.ts';
+import { meantOf, strikesOf } from '../../../src/physics/placing/strikes.ts';
 import { inUnits } from '../../../src/units/sentence.ts';
 import { partOf } from '../../edit/craftFixture.ts';
 import { craftWith, degrees, solvedValue, thrusterPart, turning } from '../thrust/thrustFixture.ts';
@@ -97,4 +97,32 @@ test('turned far enough, a propeller behind the tail strikes it', () => {
   });
   expect(strikesOf(solvedValue(craftStateOf(at(4.05))), 'thruster').strikes).toBe(true);
   expect(strikesOf(solvedValue(craftStateOf(at(4.12))), 'thruster').strikes).toBe(false);
+});
+
+test('a fitting in the way today is the mount, which rules no place out; another part there is none', () => {
+  const size = { length: 0.1, width: 0.1, height: 0.1 };
+  const place = { kind: 'free', x: 2, y: 0.07, z: -0.75 } as const;
+  const arm = partOf('arm', { name: 'Arm', place, size });
+  const camera = partOf('camera', { kind: 'camera', name: 'Camera', place, size });
+  const leg = partOf('leg', { place: { kind: 'free', x: 1, y: 0, z: -1 } });
+  const thruster = thrusterPart({ place: { kind: 'free', x: 2, y: 0, z: -0.75 } });
+  const state = solvedValue(craftStateOf(craftWith([thruster, arm, camera, leg])));
+  const meant = meantOf(state, 'thruster');
+  expect(meant).toEqual({ mounts: new Set(['arm']), lowest: false });
+  expect(strikesOf(state, 'thruster').cautions).toEqual([
+    'The propeller would strike Arm.',
+    'The propeller would strike Camera.',
+  ]);
+  expect(strikesOf(state, 'thruster', meant).cautions).toEqual(['The propeller would strike Camera.']);
+});
+
+test('where the propeller is the lowest of the craft today, being lowest is told and rules no place out', () => {
+  const at = (station: number) =>
+    solvedValue(craftStateOf(craftWith([thrusterPart({ place: { kind: 'keel', station, drop: 0.15 } })])));
+  const meant = meantOf(at(2), 'thruster');
+  expect(meant.lowest).toBe(true);
+  expect(strikesOf(at(2.2), 'thruster').strikes).toBe(true);
+  const { cautions, strikes } = strikesOf(at(2.2), 'thruster', meant);
+  expect(cautions[0]).toMatch(/strike the ground first/);
+  expect(strikes).toBe(false);
 });
