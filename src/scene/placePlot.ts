@@ -176,7 +176,7 @@ export function scaleOf(values: readonly number[], quantity: Quantity, units: Un
   const shown = values.map((value) => unit.toDisplay(value));
   const [least, most] = [Math.min(...shown), Math.max(...shown)];
   const from = least >= 0 && least < FROM_NOUGHT * most ? 0 : least;
-  const step = roundUp(Math.max(most - from, LEAST_SPAN * 10 ** -unit.digits) / 2);
+  const step = roundUp(Math.max(most - from, LEAST_SPAN * 10 ** -unit.digits) / 3);
   const low = Math.floor(from / step + 1e-9) * step;
   const high = Math.max(Math.ceil(most / step - 1e-9) * step, low + step);
   const decimals = Math.max(0, -Math.floor(Math.log10(step) + 1e-9));

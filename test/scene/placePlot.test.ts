@@ -104,7 +104,7 @@ test('whatever the values, a scale holds them all and its numbers are those of i
 });
 
 test.each([
-  [[1, 2, 3], 'time', '0', '4 s'],
+  [[1, 2, 3], 'time', '0', '3 s'],
   [[1.02, 1.09], 'ratio', '1.00', '1.10'],
   [[0, 0], 'mass', '0.0', '0.5 g'],
   [[3.2], 'time', '3.0', '3.5 s'],
@@ -117,18 +117,25 @@ test('without a value a scale has no numbers', () => {
 });
 
 test('the name of a curve stands where the curve is not', () => {
-  const [strip] = layPlace(
-    { ...study, points: Array.from({ length: 41 }, (_, i) => spot(i / 10, { ballast: i / 100 })) },
-    view,
-    4,
-    room,
-    'metric',
-  ).strips;
-  const extent = { width: 120, height: 12 };
-  const stations = Array.from({ length: 41 }, (_, i) => 50 + 10 * i);
-  expect(nameSpot(strip!, { ...page, stations }, 500, extent)).toEqual({ left: 54, top: strip!.top });
-  const falling = { ...strip!, heights: strip!.heights.toReversed() };
-  expect(nameSpot(falling, { ...page, stations }, 500, extent)).toEqual({ left: 54, top: strip!.foot - 12 });
+  const steps = Array.from({ length: 41 }, (_, i) => i / 10);
+  const width = 120;
+  for (const ballast of [
+    (x: number) => x / 10,
+    (x: number) => 0.4 - x / 10,
+    (x: number) => (x - 2) ** 2 / 10,
+  ]) {
+    const points = steps.map((x) => spot(x, { ballast: ballast(x) }));
+    const tall = layPlace({ ...study, points }, view, 4, { top: 20, foot: 240 }, 'metric');
+    const [strip] = tall.strips;
+    const at = nameSpot(strip!, tall, 500, { width, height: 12 });
+    const under = strip!.heights.filter((y, i) => {
+      const x = tall.stations[i]!;
+      return x >= at.left && x <= at.left + width && y! >= at.top && y! <= at.top + 12;
+    });
+    expect(under).toEqual([]);
+    expect(at.left).toBeGreaterThanOrEqual(tall.left);
+    expect(at.left + width).toBeLessThanOrEqual(tall.right);
+  }
 });
 
 test('a station in words: every figure, why there is none, and what the propeller strikes', () => {
