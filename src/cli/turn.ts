@@ -2,8 +2,10 @@
 import { type Craft, listed } from '../craft/craft.ts';
 import type { Vectoring } from '../craft/thrustSchema.ts';
 import { hazardsOf } from '../report/hazards.ts';
+import type { Rows } from '../report/rows.ts';
 import { rowText } from '../report/rowText.ts';
 import type { PropellerLine } from '../report/turning/propellers.ts';
+import { TETHER } from '../report/turning/turnCautions.ts';
 import { type TurnReport, turnReport } from '../report/turning/turnReport.ts';
 import type { TurnVerdict } from '../report/turning/turnVerdicts.ts';
 import { formatQuantity } from '../units/format.ts';
@@ -61,14 +63,18 @@ function turnText(craft: Craft, report: TurnReport, units: UnitSystem): string {
     ...wrapped([headline, ...costWords].join(' ')),
     '',
     ...(verdicts.length > 0 ? ['Verdicts', ...verdicts.flatMap(verdictLines), ''] : []),
-    ...figures(rows, units),
+    ...figures(report.turn ? rows : withValues(rows), units),
     ...propellerTable(propellers, units),
     ...(notes.length > 0 ? ['Notes', ...notes.flatMap(bullet), ''] : []),
     'Cautions',
-    ...[...cautions, ...hazardsOf(craft)].flatMap(bullet),
+    ...[...cautions, ...hazardsOf(craft), TETHER].flatMap(bullet),
   ];
   return `${lines.join('\n')}\n`;
 }
+
+/** Without thrust the headline says why most figures are missing: only what there is is told. */
+const withValues = (rows: Rows): Rows =>
+  Object.fromEntries(Object.entries(rows).filter(([, { value }]) => value !== null));
 
 function verdictLines({ need, ...verdict }: TurnVerdict): string[] {
   const { state, title, word, figure, target, marginWords } = verdict;

@@ -11,11 +11,10 @@ import { cannotYaw, withoutThrust } from './thrusterWords.ts';
 import { rowsFrom } from './turnFigure.ts';
 
 export function leverageIn(state: CraftState, throttle: number): Outcome<Leverage> {
+  const missing = withoutThrust(state.craft, thrustersOf(state));
+  if (missing) return infeasible(missing);
   const craft = turningCraftOf(state);
-  if (craft.status === 'infeasible') {
-    const why = withoutThrust(state.craft, []);
-    return state.loading.solid.mass > 0 && why ? infeasible(why) : craft;
-  }
+  if (craft.status === 'infeasible') return craft;
   const { thrusters } = craft.value;
   return thrusters.some(yaws) ? solved(leverageOf(craft.value, throttle)) : infeasible(cannotYaw(thrusters)!);
 }

@@ -2,7 +2,6 @@
 import { type Craft, listed } from '../../craft/craft.ts';
 import type { Thruster } from '../../physics/thrust/thrusters.ts';
 import { yaws } from '../../physics/turning/leverage.ts';
-import { isStuck } from '../../physics/turning/steer.ts';
 import { joined } from '../planWords.ts';
 
 export const NO_THRUSTER =
@@ -14,10 +13,11 @@ export const missingFigures = (craft: Craft): string[] =>
     .filter(({ kind, thruster }) => kind === 'thruster' && thruster === null)
     .map(({ name }) => `${name || 'A thruster'} has no thrust figures: enter them under Selected.`);
 
-/** Why nothing can be said of thrust; null when some thruster has figures. */
+/** Why nothing can be said of thrust; null when some thruster gives any. */
 export function withoutThrust(craft: Craft, thrusters: readonly Thruster[]): string | null {
-  if (thrusters.length > 0) return null;
-  return missingFigures(craft)[0] ?? NO_THRUSTER;
+  if (thrusters.some(({ staticThrust }) => staticThrust > 0)) return null;
+  if (thrusters.length === 0) return missingFigures(craft)[0] ?? NO_THRUSTER;
+  return `${namesOf(thrusters)} has a static thrust of nil: enter it under Selected.`;
 }
 
 /** Each once, in order: "Tail thruster", "Port and Starboard". */
@@ -28,9 +28,3 @@ export function cannotYaw(thrusters: readonly Thruster[]): string | null {
   if (thrusters.length === 0 || thrusters.some(yaws)) return null;
   return `${namesOf(thrusters)} can only push straight: nothing turns in yaw and nothing is throttled apart, so the craft cannot be steered. Let a thruster turn in yaw, or throttle a pair apart.`;
 }
-
-/** Of those with limits in yaw but no slew rate: a servo that never gets anywhere. */
-export const stuckWords = (thrusters: readonly Thruster[]): string[] =>
-  thrusters
-    .filter((thruster) => isStuck(thruster) && thruster.copy === 0)
-    .map(({ name }) => `${name} has limits in yaw but turns at 0 °/s: it is taken to stay as it is set.`);

@@ -5,7 +5,10 @@ import { strikesOf } from '../../physics/placing/strikes.ts';
 import { pitchSpeedCautions } from '../../physics/thrust/speed.ts';
 import type { Thruster } from '../../physics/thrust/thrusters.ts';
 import type { Turn } from '../../physics/turning/turn.ts';
-import { cannotYaw, missingFigures } from './thrusterWords.ts';
+import { missingFigures } from './thrusterWords.ts';
+
+export const TETHER =
+  'Models leave things out. Try the craft, and every change to it, on a tether before it flies free.';
 
 export function turnCautions(
   state: CraftState,
@@ -13,10 +16,8 @@ export function turnCautions(
   turn: Outcome<Turn>,
 ): string[] {
   const own = thrusters.filter(({ copy }) => copy === 0);
-  const yaw = cannotYaw(thrusters);
   return [
     ...missingFigures(state.craft),
-    ...(yaw ? [yaw] : []),
     ...own.flatMap(({ part, name }) =>
       strikesOf(state, part).cautions.map((each) => `${name}: ${lower(each)}`),
     ),

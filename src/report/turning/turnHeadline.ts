@@ -9,7 +9,7 @@ import { joined } from '../planWords.ts';
 import { insignificant, type Rows } from '../rows.ts';
 import type { PlaceCost } from './costs.ts';
 
-/** "With Tail thruster at 4.29 m the arm is 2.28 m: 90° from rest in 3.1 s, radius 0.70 m at 3.0 m/s, holds a 0.4 m/s gust from the side in cruise and 2.4 m/s at rest." */
+/** "With Tail thruster at 4.29 m the arm is 2.28 m: 90° from rest in 3.1 s, radius 0.70 m at 3.0 m/s, holds a gust of 0.4 m/s from the side in cruise, 2.4 m/s at rest." */
 export function turnHeadline(thrusters: readonly Thruster[], turn: Outcome<Turn>, rows: Rows): string {
   const arm = rows['turn.arm']!;
   if (arm.value === null || turn.status === 'infeasible') return arm.why || why(turn);
@@ -43,13 +43,13 @@ function sideOf(thrusters: readonly Thruster[], arm: number): string {
   return thrusters.filter(yaws).every(({ differ }) => differ !== 0) ? ' to the side' : '';
 }
 
+/** m/s, in cruise and at rest. */
 function gustWords(cruise: number, rest: number): string {
-  const word = (held: number) =>
-    insignificant(held, 'speed') ? 'none' : `${say(held, 'speed')}${held >= STRONGEST ? ' and more' : ''}`;
-  if (insignificant(cruise, 'speed') && insignificant(rest, 'speed')) return 'holds no gust from the side';
-  return insignificant(cruise, 'speed')
-    ? `holds no gust from the side in cruise and ${word(rest)} at rest`
-    : `holds a ${word(cruise)} gust from the side in cruise and ${word(rest)} at rest`;
+  const none = (held: number) => insignificant(held, 'speed');
+  const speed = (held: number) => `${say(held, 'speed')}${held >= STRONGEST ? ' and more' : ''}`;
+  if (none(cruise) && none(rest)) return 'holds no gust from the side';
+  if (none(cruise)) return `holds no gust from the side in cruise, one of ${speed(rest)} at rest`;
+  return `holds a gust of ${speed(cruise)} from the side in cruise, ${none(rest) ? 'none' : speed(rest)} at rest`;
 }
 
 /** "It calls for 96 g of lead and 8 g of wire." One sentence a thruster; none for a place that costs nothing. */

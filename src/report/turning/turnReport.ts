@@ -158,7 +158,8 @@ function reportOf(state: CraftState, asked: TurnAsked): PlainReport {
   const cruise = figures.rows['speed.cruise']!;
   const inflows =
     cruise.value === null ? infeasible(cruise.why) : inflowsAt(state, cruise.value, asked.throttle);
-  const climbs = climbCurve(state, asked.throttle);
+  const moves = withoutThrust(craft, thrusters) === null;
+  const climbs = moves ? climbCurve(state, asked.throttle) : [];
   const rows = inOrder({
     ...figures.rows,
     ...turnRows(turn, figures.rows['thrust.static']!.value ?? 0),
@@ -167,18 +168,18 @@ function reportOf(state: CraftState, asked: TurnAsked): PlainReport {
     ...hullAirRows(state),
   });
   const verdicts = turnVerdictsOf(craft.targets, thrusters, turn, rows);
-  const moves = thrusters.length > 0;
+  const headline = turnHeadline(thrusters, turn, rows);
   return {
     ...figures,
     rows,
     verdicts,
     met: verdicts.every(({ state: each }) => each === 'met'),
-    headline: turnHeadline(thrusters, turn, rows),
+    headline,
     notes: turn.status === 'solved' ? turn.value.glide.notes : [],
-    cautions: turnCautions(state, thrusters, turn),
+    cautions: turnCautions(state, thrusters, turn).filter((each) => each !== headline),
     turn: valueOrNull(turn),
     speedCurve: moves ? speedCurve(state, { throttle: asked.throttle }) : [],
-    steadyCurve: valueOrNull(steadyCurve(state, asked)) ?? [],
+    steadyCurve: (moves && valueOrNull(steadyCurve(state, asked))) || [],
     climbCurve: climbs,
     propellers: propellerLines(state),
     inflows: valueOrNull(inflows)?.each ?? [],

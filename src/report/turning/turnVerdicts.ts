@@ -112,12 +112,12 @@ function workingWith(rows: Rows, key: TurnKey, keys: NeedKeys) {
 function needWords(need: Need | null, rows: Rows, keys: NeedKeys, limit: number): string[] {
   const moment = rows[keys.moment];
   if (!need || !moment) return [];
-  const takes =
-    moment.value === null
-      ? moment.why
-      : `It takes a yaw moment of ${say(moment.value, 'torque')}; steered hardest there is ${say(need.available, 'torque')}.`;
   return [
-    takes,
+    ...(moment.value === null
+      ? []
+      : [
+          `It takes a yaw moment of ${say(moment.value, 'torque')}; steered hardest there is ${say(need.available, 'torque')}.`,
+        ]),
     aloneWords('Thrust', rows[keys.thrust]!, rows['thrust.static']!.value),
     aloneWords('Vectoring', rows[keys.vector]!, limit),
     aloneWords('The arm', rows[keys.arm]!, Math.abs(rows['turn.arm']?.value ?? 0)),

@@ -1,11 +1,21 @@
 import { expect, test } from 'vitest';
 import type { Craft } from '../../../src/craft/craft.ts';
+import type { ThrusterData } from '../../../src/craft/thrustSchema.ts';
 import { TURN_KEYS } from '../../../src/report/turning/turnFigure.ts';
 import { turnFigures, turnReport } from '../../../src/report/turning/turnReport.ts';
 import type { TurnAsked } from '../../../src/report/turning/turns.ts';
 import { turnWorkingOf } from '../../../src/report/turning/turnWorkings.ts';
 import { craftFrom, samples } from '../../samples/readSamples.ts';
-import { DEGREE, levelCraft, pairCraft, straightCraft, tailCraft, unknownCraft } from './turningCrafts.ts';
+import {
+  DEGREE,
+  levelCraft,
+  pairCraft,
+  straightCraft,
+  tailCraft,
+  thrusterData,
+  unknownCraft,
+  upTo,
+} from './turningCrafts.ts';
 
 const FULL: TurnAsked = { throttle: 1, vector: null, speed: null };
 const reportOf = (craft: Craft, asked = FULL) => turnReport(craft, asked, 'metric');
@@ -123,7 +133,7 @@ test('the couples of cruise add up to nil', () => {
 
 test('the headline names place, arm, time, radius and gusts', () => {
   expect(reportOf(tailCraft()).headline).toMatch(
-    /^With Tail thruster at 3\.050 m the arm is \d\.\d+ m: 90° from rest in [\d.]+ s, radius [\d.]+ m at [\d.]+ m\/s, holds a [\d.]+ m\/s gust from the side in cruise and [\d.]+ m\/s at rest\.$/,
+    /^With Tail thruster at 3\.050 m the arm is \d\.\d+ m: 90° from rest in [\d.]+ s, radius [\d.]+ m at [\d.]+ m\/s, holds a gust of [\d.]+ m\/s from the side in cruise, [\d.]+ m\/s at rest\.$/,
   );
   expect(reportOf(pairCraft()).headline).toContain(
     'With Side thrusters at 1.500 m the arm is 0.600 m to the side:',
@@ -133,7 +143,7 @@ test('the headline names place, arm, time, radius and gusts', () => {
 test('what cannot be: no figures, no steering, no thruster, each with its sentence', () => {
   const unknown = reportOf(unknownCraft());
   expect(unknown.headline).toBe('Tail thruster has no thrust figures: enter them under Selected.');
-  expect(unknown.cautions).toContain(unknown.headline);
+  expect(unknown.cautions).not.toContain(unknown.headline);
   expect(unknown.rows['turn.timeTo90']!.why).toBe(unknown.headline);
   expect(unknown.turn).toBeNull();
   const straight = reportOf(straightCraft());
@@ -141,6 +151,32 @@ test('what cannot be: no figures, no steering, no thruster, each with its senten
   expect(straight.rows['speed.top']!.status).toBe('solved');
   const bare = { ...tailCraft(), parts: { byId: {}, order: [] }, wires: { byId: {}, order: [] } };
   expect(reportOf(bare).headline).toMatch(/^The craft has no thruster/);
+});
+
+const thrusterWith = (change: Partial<ThrusterData>): Craft =>
+  tailCraft({ thruster: thrusterData({ yaw: upTo(60), pitch: upTo(40), ...change }) });
+
+test.each<{ name: string; craft: Craft; asked?: Partial<TurnAsked> }>([
+  { name: 'no throttle', craft: tailCraft(), asked: { throttle: 0 } },
+  { name: 'next to no throttle', craft: tailCraft(), asked: { throttle: 1e-6 } },
+  { name: 'no way on', craft: tailCraft(), asked: { speed: 0 } },
+  { name: 'faster than it can', craft: tailCraft(), asked: { speed: 50 } },
+  { name: 'no thrust', craft: thrusterWith({ thrust: { kind: 'measured', staticThrust: 0 } }) },
+  { name: 'far too much thrust', craft: thrusterWith({ thrust: { kind: 'measured', staticThrust: 1000 } }) },
+  { name: 'next to no pitch speed', craft: thrusterWith({ pitchSpeed: { kind: 'given', speed: 0.1 } }) },
+  { name: 'pushing backwards', craft: thrusterWith({ yaw: { least: 3, most: 3.1, set: 3, slew: 1 } }) },
+  {
+    name: 'pushing up',
+    craft: thrusterWith({ pitch: { ...upTo(90), least: Math.PI / 2, set: Math.PI / 2 } }),
+  },
+  { name: 'a servo that never moves', craft: thrusterWith({ yaw: { ...upTo(60), slew: 0 } }) },
+])('$name: finite figures or a sentence', ({ craft, asked }) => {
+  const { rows, headline } = reportOf(craft, { ...FULL, ...asked });
+  expect(headline).toMatch(/^[A-Z].*\.$/s);
+  for (const [key, { value, status, why }] of Object.entries(rows)) {
+    expect(status === 'infeasible' ? value === null : Number.isFinite(value), key).toBe(true);
+    if (value === null) expect(why, key).toMatch(/^[A-Z].*[.!]$/s);
+  }
 });
 
 test('one pitch speed below 5 m/s is too low for outdoors', () => {
