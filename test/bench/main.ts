@@ -12,6 +12,7 @@ import { benchPage } from './page.ts';
 import { benchPlacing } from './placing.ts';
 import { benchPlan } from './plan.ts';
 import { benchShapes } from './shapes.ts';
+import { benchTurn } from './turn.ts';
 
 const quantile = (sorted: readonly number[], share: number): string =>
   `${sorted[Math.min(sorted.length - 1, Math.floor(share * sorted.length))]!.toFixed(3)} ms`;
@@ -78,6 +79,7 @@ benchRecompute(40, '0.3 ms');
 benchRecompute(500, '3 ms');
 for (const [name, shape] of Object.entries(benchShapes)) benchHull(name, shape);
 benchFlow(print);
+benchTurn(print);
 await benchPlan(print);
 await benchPlacing(print);
 await benchPage(print);

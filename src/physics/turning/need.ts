@@ -7,16 +7,15 @@
  *               it, over all gusts up to the one asked for, in cruise at today's speed
  */
 import { infeasible, type Outcome, solved } from '../../numeric/outcome.ts';
-import { findRoot } from '../../numeric/roots.ts';
 import { say } from '../../units/sentence.ts';
-import type { Thruster } from '../thrust/thrusters.ts';
+import { leastOf, withLongerArm, withThrust, withVectoring } from './alone.ts';
 import { commandsOf, straightAt } from './asked.ts';
 import { hardestGust } from './gust.ts';
 import { type Leverage, leverageOf, longestArm, yaws } from './leverage.ts';
 import { QUARTER, quarterEvent } from './quarterTurn.ts';
 import { sail } from './sail.ts';
 import { turnsInYaw } from './steer.ts';
-import { leverOf, type TurningCraft } from './turningCraft.ts';
+import type { TurningCraft } from './turningCraft.ts';
 
 export interface Need {
   /** s or m/s */
@@ -50,6 +49,7 @@ export interface Targets {
   readonly sideGust: number | null;
 }
 
+/** The gust is to be held at that speed ahead, m/s. */
 export function needsOf(
   craft: TurningCraft,
   { turnTime, sideGust }: Targets,
@@ -57,32 +57,28 @@ export function needsOf(
   cruiseSpeed: number,
 ): Needs | null {
   if (turnTime === null && sideGust === null) return null;
-  const leverage = leverageOf(craft, throttle);
-  const arm = Math.abs(leverage.arm);
+  const { yawMoment, arm } = leverageOf(craft, throttle);
+  const need = (asked: number, beyond: Beyond, available: number) =>
+    needOf(craft, asked, beyond, available, Math.abs(arm));
+  const gustOn = (each: TurningCraft, gust: number) => hardestGust(each, throttle, cruiseSpeed, gust);
   return {
-    turnTime:
-      turnTime === null
-        ? null
-        : needOf(craft, turnTime, turnBeyond(throttle, turnTime), leverage.yawMoment, arm),
+    turnTime: turnTime === null ? null : need(turnTime, turnBeyond(throttle, turnTime), yawMoment),
     sideGust:
       sideGust === null
         ? null
-        : needOf(
-            craft,
-            sideGust,
-            (each) => hardestGust(each, throttle, cruiseSpeed, sideGust).ratio - 1,
-            hardestGust(craft, throttle, cruiseSpeed, sideGust).available,
-            arm,
-          ),
+        : need(sideGust, (each) => gustOn(each, sideGust).ratio - 1, gustOn(craft, sideGust).available),
   };
 }
+
+/** Steps so coarse still give times right to 1e-4, as near as the answers are sought. */
+const COARSE = 1000;
 
 /** By how much the quarter turn beats the time, as a share of its own; where it does not, the share of 90° missing then (< 0). */
 const turnBeyond =
   (throttle: number, asked: number): Beyond =>
   (craft) => {
     const { straight, turn } = commandsOf(craft, { throttle, vector: null, speed: null });
-    const options = { until: asked, event: quarterEvent, coarseness: 100 };
+    const options = { until: asked, event: quarterEvent, coarseness: COARSE };
     const sailed = sail(craft, straightAt(0, straight), turn, options);
     if (sailed.status !== 'solved') return -1;
     const { stopped, end, last } = sailed.value.trajectory;
@@ -93,72 +89,45 @@ const turnBeyond =
 const [LEAST_THRUST, MOST_THRUST] = [1e-3, 1e3];
 
 function needOf(craft: TurningCraft, asked: number, beyond: Beyond, available: number, arm: number): Need {
-  const logThrust = least(
-    (log) => beyond(withThrust(craft, Math.exp(log))),
-    Math.log(LEAST_THRUST),
-    Math.log(MOST_THRUST),
-    `Even ${MOST_THRUST} times the thrust does not do it.`,
+  const thrust = mapped(
+    leastOf(
+      (log) => beyond(withThrust(craft, Math.exp(log))),
+      { least: Math.log(LEAST_THRUST), today: 0, most: Math.log(MOST_THRUST) },
+      `Even ${MOST_THRUST} times the thrust does not do it.`,
+    ),
+    Math.exp,
   );
-  const thrust = mapped(logThrust, Math.exp);
-  const longest = longestArm(craft);
   return {
     asked,
     needed: mapped(thrust, (times) => times * available),
     available,
     thrust,
-    vector: craft.thrusters.some(turnsInYaw)
-      ? least(
-          (limit) => beyond(withVectoring(craft, limit)),
-          0,
-          Math.PI / 2,
-          'Even turned square to the hull the thrusters do not do it.',
-        )
-      : infeasible('No thruster turns in yaw.'),
-    arm: craft.thrusters.some(yaws)
-      ? least(
-          (to) => beyond(withArm(craft, to - arm)),
-          0,
-          longest,
-          `Even an arm of ${say(longest, 'length')}, to the end of the hull, does not do it.`,
-        )
-      : infeasible('No thruster yaws the craft, so there is no arm to lengthen.'),
+    vector: vectorOf(craft, beyond),
+    arm: armOf(craft, beyond, arm),
   };
 }
 
-const TRIED = 16;
+function vectorOf(craft: TurningCraft, beyond: Beyond): Outcome<number> {
+  const turning = craft.thrusters.filter(turnsInYaw);
+  if (turning.length === 0) return infeasible('No thruster turns in yaw.');
+  const limits = turning.map(({ yaw }) => Math.max(Math.abs(yaw.least), Math.abs(yaw.most)));
+  return leastOf(
+    (limit) => beyond(withVectoring(craft, limit)),
+    { least: 0, today: Math.min(...limits, Math.PI / 2), most: Math.PI / 2 },
+    'Even turned square to the hull the thrusters do not do it.',
+  );
+}
 
-/** The least x for which `beyond` is not below nil, sought upward in even steps; `cannot` where it is so for none. */
-function least(beyond: (x: number) => number, lo: number, hi: number, cannot: string): Outcome<number> {
-  let below = lo;
-  for (let i = 0; i <= TRIED; i += 1) {
-    const x = lo + ((hi - lo) * i) / TRIED;
-    if (beyond(x) >= 0) return i === 0 ? solved(lo) : findRoot(beyond, below, x, 1e-4);
-    below = x;
-  }
-  return infeasible(cannot);
+function armOf(craft: TurningCraft, beyond: Beyond, today: number): Outcome<number> {
+  if (!craft.thrusters.some(yaws))
+    return infeasible('No thruster yaws the craft, so there is no arm to lengthen.');
+  const most = Math.max(longestArm(craft), today);
+  return leastOf(
+    (arm) => beyond(withLongerArm(craft, arm - today)),
+    { least: 0, today, most },
+    `Even an arm of ${say(most, 'length')}, to the end of the hull, does not do it.`,
+  );
 }
 
 const mapped = (outcome: Outcome<number>, to: (value: number) => number): Outcome<number> =>
   outcome.status === 'solved' ? solved(to(outcome.value)) : outcome;
-
-const changed = (craft: TurningCraft, change: (thruster: Thruster) => Partial<Thruster>): TurningCraft => ({
-  ...craft,
-  thrusters: craft.thrusters.map((each) => ({ ...each, ...change(each) })),
-});
-
-const withThrust = (craft: TurningCraft, times: number): TurningCraft =>
-  changed(craft, ({ staticThrust }) => ({ staticThrust: times * staticThrust }));
-
-const withVectoring = (craft: TurningCraft, limit: number): TurningCraft =>
-  changed(craft, (each) => (turnsInYaw(each) ? { yaw: { ...each.yaw, least: -limit, most: limit } } : {}));
-
-/** Further from the CG by so much: those that turn in yaw along the hull, those throttled apart to the side. */
-function withArm(craft: TurningCraft, by: number): TurningCraft {
-  const outward = (lever: number) => (lever < 0 ? -by : by);
-  return changed(craft, (each) => {
-    const [ahead, side] = leverOf(craft, each);
-    const [x, y, z] = each.at;
-    if (turnsInYaw(each)) return { at: [x + outward(-ahead), y, z] };
-    return each.differ === 0 ? {} : { at: [x, y + outward(side), z] };
-  });
-}

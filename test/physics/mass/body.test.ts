@@ -1,6 +1,13 @@
 import fc from 'fast-check';
 import { expect, test } from 'vitest';
-import { addSums, momentAbout, pitchInertia, pointMass, sumsOf } from '../../../src/physics/mass/body.ts';
+import {
+  addSums,
+  momentAbout,
+  pitchInertia,
+  pointMass,
+  sumsOf,
+  yawInertia,
+} from '../../../src/physics/mass/body.ts';
 import { boxSecond, secondOfInertia, turnedSecond } from '../../../src/physics/mass/inertia.ts';
 
 /** Station of the CG of masses at stations. */
@@ -97,6 +104,20 @@ test('a box cut into small boxes keeps its inertia: parallel axes against a fine
     return pointMass(3 / (n * n), [x, 0, z]);
   });
   expect(pitchInertia([whole], [1, 0, 1])).toBeCloseTo(pitchInertia(grains, [1, 0, 1]), 3);
+});
+
+test('yaw is pitch with the body laid on its side', () => {
+  fc.assert(
+    fc.property(bodies, fc.double({ min: -7, max: 7, noNaN: true }), (all, turn) => {
+      const boxes = all.map((each) => ({ ...each, second: turnedSecond(boxSecond(1, 0.5, 0.2, 0.1), turn) }));
+      const laid = boxes.map(({ mass, cg: [x, y, z], second: [xx, yy, zz, xy, yz, zx] }) => ({
+        mass,
+        cg: [x, z, -y] as const,
+        second: [xx, zz, yy, zx, -yz, -xy] as const,
+      }));
+      expect(yawInertia(boxes, [1, 2, 3])).toBeCloseTo(pitchInertia(laid, [1, 3, -2]), 8);
+    }),
+  );
 });
 
 test('turning a body leaves its trace and its moment of inertia about the axis of turning', () => {

@@ -69,6 +69,12 @@ test.each([
   }
 });
 
+test('steps a thousand times coarser, as needs are sought with, still give the time to 1e-4', () => {
+  for (const craftOf of [tailCraft, noseCraft, pairCraft, gondolaCraft]) {
+    near(timeFrom(craftOf(), 0, { coarseness: 1000 }), timeFrom(craftOf(), 0), 1e-4);
+  }
+});
+
 test('the longer the arm, the sooner the turn from rest', () => {
   const stations = [1.9, 2.1, 2.3, 2.5, 2.7, 2.95];
   const times = stations.map((station) =>

@@ -140,6 +140,17 @@ test('straight ahead, or without thrust, there is no steady turn, and it says wh
   });
 });
 
+test('too slow to settle in the time: the turn is found all the same, and marked as not reached', () => {
+  const craft = tailCraft();
+  const asked = { ...ASKED, throttle: 1e-5, speed: 0.01 };
+  const { turn, velocity, reached } = settled(craft, asked);
+  expect(reached).toBe(false);
+  const sums = new Float64Array(3);
+  motionOf(craft, commandsOf(craft, asked).turn).forces(0, Float64Array.from(velocity), sums);
+  for (const each of sums) expect(Math.abs(each)).toBeLessThan(1e-5 * 1e-6);
+  expect(turn.yawRate).toBeGreaterThan(0);
+});
+
 test('the curve ends in the turn asked for, and each of its points is a turn the motion comes to', () => {
   const craft = noseCraft();
   const points = steadyPoints(craft, ASKED);

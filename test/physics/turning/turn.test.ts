@@ -152,6 +152,12 @@ test('cautions: stuck servo, an angle beyond the limits, nothing that turns, air
   ]);
 });
 
+test('a turn that is not reached in the time is said not to be', () => {
+  expect(turned(tail, { ...ASKED, throttle: 1e-5, speed: 0.01 }).cautions).toEqual(
+    expect.arrayContaining([expect.stringContaining('does not come to a steady turn within {600 time}')]),
+  );
+});
+
 test('the few figures are those of everything', () => {
   const few = turnFigures(stateOf(tail), ASKED);
   const all = turned(tail);

@@ -1,0 +1,58 @@
+/** The same craft with one thing about its thrusters other than it is: thrust, how far they turn, or their arm. */
+import { infeasible, type Outcome, solved } from '../../numeric/outcome.ts';
+import { findRoot } from '../../numeric/roots.ts';
+import type { Thruster } from '../thrust/thrusters.ts';
+import { turnsInYaw } from './steer.ts';
+import { leverOf, type TurningCraft } from './turningCraft.ts';
+
+const changed = (craft: TurningCraft, change: (thruster: Thruster) => Partial<Thruster>): TurningCraft => ({
+  ...craft,
+  thrusters: craft.thrusters.map((each) => ({ ...each, ...change(each) })),
+});
+
+export const withThrust = (craft: TurningCraft, times: number): TurningCraft =>
+  changed(craft, ({ staticThrust }) => ({ staticThrust: times * staticThrust }));
+
+/** Those that turn in yaw, as far to either side, rad. */
+export const withVectoring = (craft: TurningCraft, limit: number): TurningCraft =>
+  changed(craft, (each) => (turnsInYaw(each) ? { yaw: { ...each.yaw, least: -limit, most: limit } } : {}));
+
+/** So much further from the CG, m: those that turn in yaw along the hull, those throttled apart to the side. */
+export function withLongerArm(craft: TurningCraft, by: number): TurningCraft {
+  const outward = (lever: number) => (lever < 0 ? -by : by);
+  return changed(craft, (each) => {
+    const [ahead, side] = leverOf(craft, each);
+    const [x, y, z] = each.at;
+    if (turnsInYaw(each)) return { at: [x + outward(-ahead), y, z] };
+    return each.differ === 0 ? {} : { at: [x, y + outward(side), z] };
+  });
+}
+
+/** From least to most, and where it stands today. */
+export interface Range {
+  readonly least: number;
+  readonly today: number;
+  readonly most: number;
+}
+
+const TRIED = 10;
+const WITHIN = 1e-4;
+
+/**
+ * The x nearest to the least at which `beyond` turns from below nil, sought upward in even steps: up to today's where that is
+ * enough, else from there on; `cannot` where none is.
+ */
+export function leastOf(
+  beyond: (x: number) => number,
+  { least, today, most }: Range,
+  cannot: string,
+): Outcome<number> {
+  const [from, to] = beyond(today) >= 0 ? [least, today] : [today, most];
+  let below = from;
+  for (let i = 0; i <= TRIED; i += 1) {
+    const x = from + ((to - from) * i) / TRIED;
+    if (beyond(x) >= 0) return i === 0 ? solved(x) : findRoot(beyond, below, x, WITHIN);
+    below = x;
+  }
+  return infeasible(cannot);
+}
