@@ -1,6 +1,7 @@
 /** What was typed after `craft`, made a command, or one sentence on what is wrong with it. */
 import { parseArgs } from 'node:util';
 import type { UnitSystem } from '../units/units.ts';
+import { type PlaceOptions, placeOptions } from './placeOptions.ts';
 import { type TurnOptions, turnOptions } from './turnOptions.ts';
 
 export type Command =
@@ -27,6 +28,9 @@ export type Command =
   | ({ readonly kind: 'turn'; readonly file: string; readonly json: boolean } & TurnOptions & {
         readonly units: UnitSystem;
       })
+  | ({ readonly kind: 'place'; readonly file: string; readonly json: boolean } & PlaceOptions & {
+        readonly units: UnitSystem;
+      })
   | { readonly kind: 'help' }
   | { readonly kind: 'version' }
   | { readonly kind: 'misuse'; readonly why: string };
@@ -41,6 +45,9 @@ const OPTIONS = {
   vector: { type: 'string' },
   throttle: { type: 'string' },
   speed: { type: 'string' },
+  part: { type: 'string' },
+  stations: { type: 'string' },
+  csv: { type: 'boolean' },
   help: { type: 'boolean', short: 'h' },
   version: { type: 'boolean' },
 } as const;
@@ -57,7 +64,7 @@ function withNegatives(args: readonly string[]): string[] {
   return [...args.slice(0, at), `${args[at]}=${args[at + 1]}`, ...withNegatives(args.slice(at + 2))];
 }
 
-const WORDS = 'balance, check, plan, carry, turn, help';
+const WORDS = 'balance, check, plan, carry, turn, place, help';
 
 /** The options that a command takes besides --help and --version. */
 const TAKEN: Readonly<Record<string, readonly string[]>> = {
@@ -66,6 +73,7 @@ const TAKEN: Readonly<Record<string, readonly string[]>> = {
   plan: ['json', 'units', 'robust', 'write', 'time-limit'],
   carry: ['json', 'units', 'line'],
   turn: ['json', 'units', 'vector', 'throttle', 'speed'],
+  place: ['json', 'csv', 'units', 'part', 'stations', 'throttle'],
 };
 
 const misuse = (why: string): Command => ({ kind: 'misuse', why });
@@ -93,7 +101,7 @@ function named(word: string | undefined, files: string[], values: Values): Comma
   return onOneFile(word as OnOneFile, files, values);
 }
 
-type OnOneFile = 'balance' | 'plan' | 'carry' | 'turn';
+type OnOneFile = 'balance' | 'plan' | 'carry' | 'turn' | 'place';
 
 function onOneFile(kind: OnOneFile, files: string[], values: Values): Command {
   const [file] = files;
@@ -108,6 +116,10 @@ function onOneFile(kind: OnOneFile, files: string[], values: Values): Command {
   if (kind === 'carry') return { kind, file, json, units, line };
   if (kind === 'turn') {
     const options = turnOptions(values);
+    return typeof options === 'string' ? misuse(options) : { kind, file, json, units, ...options };
+  }
+  if (kind === 'place') {
+    const options = placeOptions(values);
     return typeof options === 'string' ? misuse(options) : { kind, file, json, units, ...options };
   }
   const timeLimit = Number(values['time-limit'] ?? USUAL_SECONDS);

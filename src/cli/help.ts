@@ -19,6 +19,12 @@ export const HELP = `Steelyard: the balance of a small unmanned blimp.
       --vector: thrust turned in yaw by so many degrees, + to starboard, instead
       of as hard to starboard as it goes; --throttle: share of full thrust, 0 to
       1; --speed: of the cruise it turns from, in m/s.
+  npm run -s craft -- place FILE --part THRUSTER [--stations N] [--throttle F]
+                      [--json | --csv] [--units metric|imperial]
+      Where that thruster had better sit: moved through N stations (61) from
+      nose to tail, the ballast planned anew at each, what it then does, what
+      its propeller would strike, and which stations nothing beats. Exit 1 when
+      there is none with both a plan and room for the propeller.
   npm run -s craft -- help
   npm run -s craft -- --version
 

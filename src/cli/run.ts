@@ -5,6 +5,7 @@ import { check } from './check.ts';
 import { HELP } from './help.ts';
 import { EXIT, type ExitCode, type Io } from './io.ts';
 import { oneLine } from './layout.ts';
+import { placed } from './place.ts';
 import { carried, planned } from './planning.ts';
 import { turned } from './turn.ts';
 
@@ -22,6 +23,8 @@ export function run(args: readonly string[], io: Io): ExitCode | Promise<ExitCod
       return carried(command, io);
     case 'turn':
       return turned(command, io);
+    case 'place':
+      return placed(command, io);
     case 'help':
       io.write(HELP);
       return EXIT.fine;

@@ -45,12 +45,12 @@ test('--version gives the version alone', () => {
 });
 
 test.each([
-  [[], /No command given; allowed: balance, check, plan, carry, turn, help/],
+  [[], /No command given; allowed: balance, check, plan, carry, turn, place, help/],
   [['balance'], /balance takes one craft file; found 0/],
   [['balance', 'a', 'b'], /balance takes one craft file; found 2/],
   [['check'], /check takes one craft file or more; found 0/],
   [['check', 'a', '--json'], /check takes no --json/],
-  [['weigh', 'a'], /Unknown command "weigh"; allowed: balance, check, plan, carry, turn, help/],
+  [['weigh', 'a'], /Unknown command "weigh"; allowed: balance, check, plan, carry, turn, place, help/],
   [['balance', 'a', '--units', 'stone'], /--units: found "stone"; allowed: metric, imperial/],
   [['balance', 'a', '--units'], /--units/],
   [['balance', 'a', '--robust'], /balance takes no --robust/],

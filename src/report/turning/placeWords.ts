@@ -36,18 +36,38 @@ const leastBy = (points: readonly PlacedPoint[], of: (point: PlacedPoint) => num
     null,
   );
 
-/** "In the tail at 4.2 m: 90° in 3.1 s, holds 2.4 m/s from the side; costs 96 g of lead and 8 g of wire more than at 1.9 m." */
+/**
+ * "In the tail at 4.2 m: 90° in 3.1 s, holds 2.4 m/s from the side; costs 96 g of lead and 8 g of wire more than at 1.9 m, where
+ * it is now and takes 9.0 s." Where the thruster is there already, against the cheapest of those that nothing beats.
+ */
 export function placeHeadline(craft: Craft, study: Tried): string {
-  const { today } = study;
+  const { today, points } = study;
   const told = toldStation(study, craft.targets);
   if (!told) return 'At no station is there both a ballast plan and room for the propeller.';
-  const here = Math.abs(told.station - today.station) < 1e-6 ? ', where it is now' : '';
-  const does = `${whereWords(craft, told)}${here}: ${doesWords(told)}`;
-  if (here) return `${does}.`;
-  const now = say(today.station, 'length');
-  return today.ballast === null
-    ? `${does}; at ${now}, where it is now, no ballast plan can be made.`
-    : `${does}; ${costWords(told, today)} at ${now}, where it is now and ${nowWords(today)}.`;
+  const where = whereWords(craft, told);
+  const does = doesWords(told);
+  if (!isAt(told, today)) return `${where}: ${does}; ${againstToday(told, today)}.`;
+  const cheapest = leastBy(
+    points.filter(({ best }) => best),
+    costOf,
+  )!;
+  const more = isAt(cheapest, told)
+    ? ''
+    : `; ${costWords(told, cheapest)} at ${fareWords(cheapest, ', where it ')}`;
+  return `${where}, where it is now: ${does}${more}.`;
+}
+
+const isAt = (a: PlacedPoint, b: PlacedPoint): boolean => Math.abs(a.station - b.station) < 1e-6;
+
+const againstToday = (told: PlacedPoint, today: PlacedPoint): string =>
+  today.ballast === null
+    ? `at ${say(today.station, 'length')}, where it is now, no ballast plan can be made`
+    : `${costWords(told, today)} at ${fareWords(today, ', where it is now and ')}`;
+
+/** "1.9 m, where it takes 9.0 s" */
+function fareWords({ station, strikes, timeTo90 }: PlacedPoint, joint: string): string {
+  const fares = timeTo90 === null ? 'does not turn to 90°' : `takes ${say(timeTo90, 'time')}`;
+  return `${say(station, 'length')}${joint}${strikes ? 'the propeller has no room' : fares}`;
 }
 
 /** Where the hull begins and ends to be its nose and its tail, as a share of its length. */
@@ -65,11 +85,6 @@ const capital = (words: string): string => `${words.charAt(0).toUpperCase()}${wo
 function doesWords({ timeTo90, gustHeld }: PlacedPoint): string {
   const time = timeTo90 === null ? 'does not turn to 90°' : `90° in ${say(timeTo90, 'time')}`;
   return gustHeld === null ? time : `${time}, holds ${say(gustHeld, 'speed')} from the side`;
-}
-
-function nowWords({ strikes, timeTo90 }: PlacedPoint): string {
-  if (strikes) return 'the propeller has no room';
-  return timeTo90 === null ? 'does not turn to 90°' : `takes ${say(timeTo90, 'time')}`;
 }
 
 /** "costs 96 g of lead and 8 g of wire more than", "costs 12 g of lead more and 3 g of wire less than" */

@@ -51,6 +51,10 @@ test('the headline weighs the quickest of the best against where it is', () => {
   expect(headline(studyWith([middle, tail], { ...tail }))).toBe(
     'In the tail at 3.900 m, where it is now: 90° in 3.1 s, holds 2.40 m/s from the side.',
   );
+  const cheap = point(2, { best: true, ballast: 0, wire: 0.008, timeTo90: 9 });
+  expect(headline(studyWith([cheap, tail], { ...tail }))).toBe(
+    'In the tail at 3.900 m, where it is now: 90° in 3.1 s, holds 2.40 m/s from the side; costs 196.0 g of lead and 20.0 g of wire more than at 2.000 m, where it takes 9.0 s.',
+  );
 });
 
 test.each([
