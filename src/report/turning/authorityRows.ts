@@ -7,17 +7,16 @@ import { type Leverage, leverageOf, yaws } from '../../physics/turning/leverage.
 import { turningCraftOf } from '../../physics/turning/turningCraft.ts';
 import { spread } from '../floatRows.ts';
 import type { Rows } from '../rows.ts';
-import { cannotYaw, withoutThrust } from './thrusterWords.ts';
+import { cannotYaw, ifDriven } from './thrusterWords.ts';
 import { rowsFrom } from './turnFigure.ts';
 
-export function leverageIn(state: CraftState, throttle: number): Outcome<Leverage> {
-  const missing = withoutThrust(state.craft, thrustersOf(state));
-  if (missing) return infeasible(missing);
-  const craft = turningCraftOf(state);
-  if (craft.status === 'infeasible') return craft;
-  const { thrusters } = craft.value;
-  return thrusters.some(yaws) ? solved(leverageOf(craft.value, throttle)) : infeasible(cannotYaw(thrusters)!);
-}
+const leverageIn = (state: CraftState, throttle: number): Outcome<Leverage> =>
+  ifDriven(state, (thrusters) => {
+    const craft = turningCraftOf(state);
+    if (craft.status === 'infeasible') return craft;
+    const straight = cannotYaw(thrusters);
+    return straight ? infeasible(straight) : solved(leverageOf(craft.value, throttle));
+  });
 
 export function authorityRows(state: CraftState, throttle: number): Rows {
   const apart = thrustersOf(state)

@@ -7,9 +7,9 @@ import { hullFlowOf } from '../../physics/flow/hullFlow.ts';
 import { powerAgainstFree } from '../../physics/flow/idealPower.ts';
 import { type Inflow, inflowAt } from '../../physics/flow/inflow.ts';
 import { discArea } from '../../physics/thrust/propeller.ts';
-import { type Thruster, thrustAt, thrustersOf } from '../../physics/thrust/thrusters.ts';
+import { type Thruster, thrustAt } from '../../physics/thrust/thrusters.ts';
 import type { Rows } from '../rows.ts';
-import { withoutThrust } from './thrusterWords.ts';
+import { ifDriven } from './thrusterWords.ts';
 import { rowsFrom } from './turnFigure.ts';
 
 /** Of one piece of a thruster. */
@@ -27,24 +27,21 @@ export interface Inflows {
 }
 
 /** At a speed ahead, m/s, > 0. */
-export function inflowsAt(state: CraftState, speed: number, throttle: number): Outcome<Inflows> {
-  const { hull, air, craft } = state;
-  const thrusters = thrustersOf(state);
-  const why = withoutThrust(craft, thrusters);
-  if (why) return infeasible(why);
-  const flow = hullFlowOf(hull);
-  if (flow.status === 'infeasible') return flow;
-  const layer = boundaryLayerOf(flow.value, speed, kinematicViscosity(air));
-  if (layer.status === 'infeasible') return layer;
-  const each = thrusters.map((thruster): PropellerAir => {
-    const inflow = inflowAt(flow.value, layer.value, thruster);
-    const { part, copy, name, diameter } = thruster;
-    const thrust = thrustAt(thruster, throttle, speed);
-    const perWatt = powerAgainstFree(thrust, discArea(diameter), air.density, speed, inflow.ratio);
-    return { part, copy, name, ...inflow, perWatt };
+export const inflowsAt = (state: CraftState, speed: number, throttle: number): Outcome<Inflows> =>
+  ifDriven(state, (thrusters) => {
+    const flow = hullFlowOf(state.hull);
+    if (flow.status === 'infeasible') return flow;
+    const layer = boundaryLayerOf(flow.value, speed, kinematicViscosity(state.air));
+    if (layer.status === 'infeasible') return layer;
+    const each = thrusters.map((thruster): PropellerAir => {
+      const inflow = inflowAt(flow.value, layer.value, thruster);
+      const { part, copy, name, diameter } = thruster;
+      const thrust = thrustAt(thruster, throttle, speed);
+      const perWatt = powerAgainstFree(thrust, discArea(diameter), state.air.density, speed, inflow.ratio);
+      return { part, copy, name, ...inflow, perWatt };
+    });
+    return solved({ each, cautions: [...flow.value.cautions, ...layer.value.cautions] });
   });
-  return solved({ each, cautions: [...flow.value.cautions, ...layer.value.cautions] });
-}
 
 /** Of all propellers together, each by the area of its disc. */
 export function inflowRows(inflows: Outcome<Inflows>, thrusters: readonly Thruster[]): Rows {

@@ -6,16 +6,14 @@ import { type ClimbPoint, steadyClimb } from '../../physics/cruise/climb.ts';
 import { type Critical, criticalSpeed } from '../../physics/cruise/critical.ts';
 import { cruisePitch } from '../../physics/cruise/cruise.ts';
 import { hoverOf } from '../../physics/cruise/hover.ts';
-import { thrustersOf } from '../../physics/thrust/thrusters.ts';
 import type { TurnAsked } from '../../physics/turning/asked.ts';
 import { STANDARD_GRAVITY } from '../../units/constants.ts';
 import type { Rows } from '../rows.ts';
-import { withoutThrust } from './thrusterWords.ts';
+import { ifDriven } from './thrusterWords.ts';
 import { rowsFrom } from './turnFigure.ts';
 
 export function pitchRows(state: CraftState, { throttle, speed }: TurnAsked): Rows {
-  const why = withoutThrust(state.craft, thrustersOf(state));
-  const cruise = why ? infeasible(why) : cruisePitch(state, speed === null ? { throttle } : { speed });
+  const cruise = ifDriven(state, () => cruisePitch(state, speed === null ? { throttle } : { speed }));
   const caution = cruise.status === 'solved' ? cruise.value.cautions.join(' ') : null;
   return {
     ...rowsFrom(
@@ -43,21 +41,23 @@ const loosening = (critical: Outcome<Critical>): Outcome<number> => {
 };
 
 export function hoverRows(state: CraftState): Rows {
-  const why = withoutThrust(state.craft, thrustersOf(state));
   return {
     ...rowsFrom(solved(STANDARD_GRAVITY * heavinessOf(state.loading)), { 'hover.force': (force) => force }),
-    ...rowsFrom(why ? infeasible(why) : hoverOf(state), {
-      'hover.share': ({ share }) => share,
-      'hover.vector': ({ vector }) => vector,
-      'hover.pitch': ({ pitch }) => pitch,
-    }),
+    ...rowsFrom(
+      ifDriven(state, () => hoverOf(state)),
+      {
+        'hover.share': ({ share }) => share,
+        'hover.vector': ({ vector }) => vector,
+        'hover.pitch': ({ pitch }) => pitch,
+      },
+    ),
   };
 }
 
 /** `curve`: climb over vectoring in pitch, at the same throttle. */
 export function climbRows(state: CraftState, throttle: number, curve: readonly ClimbPoint[]): Rows {
-  const why = withoutThrust(state.craft, thrustersOf(state));
-  const asSet = why ? infeasible(why) : steadyClimb(state, { throttle, vector: null });
+  const asSet = ifDriven(state, () => steadyClimb(state, { throttle, vector: null }));
+  const extreme = (way: 1 | -1) => ifDriven(state, () => most(curve, way));
   const caution = asSet.status === 'solved' ? asSet.value.cautions.join(' ') : null;
   return {
     ...rowsFrom(
@@ -69,11 +69,11 @@ export function climbRows(state: CraftState, throttle: number, curve: readonly C
       },
       { 'climb.rate': { caution } },
     ),
-    ...rowsFrom(why ? infeasible(why) : most(curve, 1), {
+    ...rowsFrom(extreme(1), {
       'climb.best': ({ rate }) => rate,
       'climb.bestVector': ({ vector }) => vector,
     }),
-    ...rowsFrom(why ? infeasible(why) : most(curve, -1), {
+    ...rowsFrom(extreme(-1), {
       'climb.descent': ({ rate }) => rate,
       'climb.descentVector': ({ vector }) => vector,
     }),

@@ -1,5 +1,5 @@
 /** Thrust, drag, speed and power straight ahead. */
-import { infeasible, type Outcome, solved } from '../../numeric/outcome.ts';
+import { type Outcome, solved } from '../../numeric/outcome.ts';
 import type { CraftState } from '../../physics/craftState.ts';
 import type { AheadHelm } from '../../physics/thrust/ahead.ts';
 import { dragOf } from '../../physics/thrust/drag.ts';
@@ -7,19 +7,17 @@ import { powerAt, steadySpeed, topSpeed } from '../../physics/thrust/speed.ts';
 import { thrustersOf } from '../../physics/thrust/thrusters.ts';
 import type { TurnAsked } from '../../physics/turning/asked.ts';
 import type { Rows } from '../rows.ts';
-import { withoutThrust } from './thrusterWords.ts';
+import { ifDriven } from './thrusterWords.ts';
 import { rowsFrom } from './turnFigure.ts';
 
 const FULL: AheadHelm = { throttle: 1, vector: null };
 
 export function speedRows(state: CraftState, { throttle, speed }: TurnAsked): Rows {
-  const thrusters = thrustersOf(state);
-  const why = withoutThrust(state.craft, thrusters);
-  const known: Outcome<null> = why ? infeasible(why) : solved(null);
-  const top = why ? infeasible(why) : topSpeed(state);
-  const cruise = speed === null ? (why ? infeasible(why) : steadySpeed(state, throttle)) : solved(speed);
+  const driven = ifDriven(state, solved);
+  const top = ifDriven(state, () => topSpeed(state));
+  const cruise = speed === null ? ifDriven(state, () => steadySpeed(state, throttle)) : solved(speed);
   const drag = dragOf(state);
-  const powers = (at: number) => powerAt(thrusters, FULL, at, state.air.density);
+  const powers = (at: number) => powerAt(thrustersOf(state), FULL, at, state.air.density);
   return {
     ...rowsFrom(
       top,
@@ -31,9 +29,9 @@ export function speedRows(state: CraftState, { throttle, speed }: TurnAsked): Ro
       { 'speed.cruise': (at) => at },
       { 'speed.cruise': { why: speed === null ? 'The steady speed at that throttle.' : 'As asked.' } },
     ),
-    ...rowsFrom(known, {
-      'speed.pitchSpeed': () => Math.min(...thrusters.map(({ pitchSpeed }) => pitchSpeed)),
-      'thrust.static': () => thrusters.reduce((sum, { staticThrust }) => sum + staticThrust, 0),
+    ...rowsFrom(driven, {
+      'speed.pitchSpeed': (thrusters) => Math.min(...thrusters.map(({ pitchSpeed }) => pitchSpeed)),
+      'thrust.static': (thrusters) => thrusters.reduce((sum, { staticThrust }) => sum + staticThrust, 0),
     }),
     ...rowsFrom(top, {
       'drag.atTop': drag.at,
@@ -42,13 +40,13 @@ export function speedRows(state: CraftState, { throttle, speed }: TurnAsked): Ro
       'drag.podShare': (at) => drag.pods(at) / drag.at(at),
       'power.atTop': (at) => powers(at).idealPower,
     }),
-    ...rowsFrom(known, { 'power.atRest': () => powers(0).idealPower }),
-    ...shaftRows(known, powers(0).shaftPower),
+    ...rowsFrom(driven, { 'power.atRest': () => powers(0).idealPower }),
+    ...shaftRows(driven, powers(0).shaftPower),
   };
 }
 
 /** The shaft's power is known only where a figure of merit is. */
-const shaftRows = (known: Outcome<null>, power: number | null): Rows =>
-  power === null || known.status === 'infeasible'
+const shaftRows = (driven: Outcome<unknown>, power: number | null): Rows =>
+  power === null || driven.status === 'infeasible'
     ? {}
     : rowsFrom(solved(power), { 'power.shaftAtRest': (at) => at });

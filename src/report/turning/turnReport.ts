@@ -1,7 +1,7 @@
 /** Asks the physics once and gives everything that panels, drawing and terminal show of how a craft turns and flies. */
 import type { Craft } from '../../craft/craft.ts';
 import { kept } from '../../numeric/kept.ts';
-import { infeasible, type Outcome, valueOrNull } from '../../numeric/outcome.ts';
+import { infeasible, type Outcome, solved, valueOrNull } from '../../numeric/outcome.ts';
 import { type CraftState, craftStateOf } from '../../physics/craftState.ts';
 import { type ClimbPoint, climbCurve } from '../../physics/cruise/climb.ts';
 import { type SpeedPoint, speedCurve } from '../../physics/thrust/speed.ts';
@@ -25,7 +25,7 @@ import { inflowRows, inflowsAt, type PropellerAir } from './inflows.ts';
 import { climbRows, hoverRows, pitchRows } from './pitchRows.ts';
 import { type PropellerLine, propellerLines } from './propellers.ts';
 import { speedRows } from './speedRows.ts';
-import { withoutThrust } from './thrusterWords.ts';
+import { ifDriven } from './thrusterWords.ts';
 import { turnCautions } from './turnCautions.ts';
 import { TURN_KEYS } from './turnFigure.ts';
 import { costWords, turnHeadline } from './turnHeadline.ts';
@@ -51,9 +51,9 @@ export interface TurnReport extends TurnFigures {
   readonly notes: readonly string[];
   /** What to mind, and what is missing. */
   readonly cautions: readonly string[];
-  /** Null without a thruster that has figures, or without mass. */
+  /** Null without a thruster that gives thrust, or without mass. Its sentences are in SI; the rows have them in the units asked for. */
   readonly turn: Turn | null;
-  /** Empty where there is none. */
+  /** Empty where there is none; sentences in SI. */
   readonly speedCurve: readonly SpeedPoint[];
   readonly steadyCurve: readonly SteadyPoint[];
   readonly climbCurve: readonly ClimbPoint[];
@@ -154,12 +154,11 @@ function reportOf(state: CraftState, asked: TurnAsked): PlainReport {
   const { craft } = state;
   const thrusters = thrustersOf(state);
   const figures = figuresOf(state, asked);
-  const turn = turnIn(state, thrusters, asked);
+  const turn = ifDriven(state, () => turnOf(state, asked));
   const cruise = figures.rows['speed.cruise']!;
   const inflows =
     cruise.value === null ? infeasible(cruise.why) : inflowsAt(state, cruise.value, asked.throttle);
-  const moves = withoutThrust(craft, thrusters) === null;
-  const climbs = moves ? climbCurve(state, asked.throttle) : [];
+  const climbs = curveOf(ifDriven(state, () => solved(climbCurve(state, asked.throttle))));
   const rows = inOrder({
     ...figures.rows,
     ...turnRows(turn, figures.rows['thrust.static']!.value ?? 0),
@@ -178,22 +177,18 @@ function reportOf(state: CraftState, asked: TurnAsked): PlainReport {
     notes: turn.status === 'solved' ? turn.value.glide.notes : [],
     cautions: turnCautions(state, thrusters, turn).filter((each) => each !== headline),
     turn: valueOrNull(turn),
-    speedCurve: moves ? speedCurve(state, { throttle: asked.throttle }) : [],
-    steadyCurve: (moves && valueOrNull(steadyCurve(state, asked))) || [],
+    speedCurve: curveOf(ifDriven(state, () => solved(speedCurve(state, { throttle: asked.throttle })))),
+    steadyCurve: curveOf(ifDriven(state, () => steadyCurve(state, asked))),
     climbCurve: climbs,
     propellers: propellerLines(state),
     inflows: valueOrNull(inflows)?.each ?? [],
   };
 }
 
+const curveOf = <T>(curve: Outcome<readonly T[]>): readonly T[] => valueOrNull(curve) ?? [];
+
 const inOrder = (rows: Rows): Rows =>
   Object.fromEntries(TURN_KEYS.flatMap((key) => (rows[key] ? [[key, rows[key]]] : [])));
-
-/** Without thrust the sentence names the part that lacks it. */
-function turnIn(state: CraftState, thrusters: readonly Thruster[], asked: TurnAsked): Outcome<Turn> {
-  const missing = withoutThrust(state.craft, thrusters);
-  return missing ? infeasible(missing) : turnOf(state, asked);
-}
 
 const readFigures = <F extends TurnFigures>(figures: F, units: UnitSystem): F => ({
   ...figures,
