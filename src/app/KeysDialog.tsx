@@ -15,8 +15,8 @@ const IN_THE_DRAWING: readonly Line[] = [
   ['0', 'Fit'],
   ['← or → in the front view', 'Turn round the hull by 0.1°, with Shift by 1°'],
   [
-    ', or .',
-    'Turn the thrust of the thruster selected by 1°, with Shift by 10°: down or up in the side view, to port or starboard from above',
+    'Comma or full stop',
+    'Turn the thrust selected by 1°, with Shift by 10°: pitch in the side view, yaw from above',
   ],
 ];
 
