@@ -1,6 +1,6 @@
 /** How the craft sits in cruise, how it climbs and hovers, and up to which speed its pitch is held. */
 import { infeasible, type Outcome, solved } from '../../numeric/outcome.ts';
-import { heavinessOf } from '../../physics/balance/loading.ts';
+import { heavinessOf, type Loading } from '../../physics/balance/loading.ts';
 import type { CraftState } from '../../physics/craftState.ts';
 import { type ClimbPoint, steadyClimb } from '../../physics/cruise/climb.ts';
 import { type Critical, criticalSpeed } from '../../physics/cruise/critical.ts';
@@ -8,6 +8,7 @@ import { cruisePitch } from '../../physics/cruise/cruise.ts';
 import { hoverOf } from '../../physics/cruise/hover.ts';
 import type { TurnAsked } from '../../physics/turning/asked.ts';
 import { STANDARD_GRAVITY } from '../../units/constants.ts';
+import { spread } from '../floatRows.ts';
 import type { Rows } from '../rows.ts';
 import { ifDriven } from './thrusterWords.ts';
 import { rowsFrom } from './turnFigure.ts';
@@ -40,9 +41,16 @@ const loosening = (critical: Outcome<Critical>): Outcome<number> => {
   return speed === null ? infeasible('There is none: the fins hold the nose at any speed.') : solved(speed);
 };
 
+/** Less lift, N. */
+const weight = (loading: Loading): number => STANDARD_GRAVITY * heavinessOf(loading);
+
 export function hoverRows(state: CraftState): Rows {
   return {
-    ...rowsFrom(solved(STANDARD_GRAVITY * heavinessOf(state.loading)), { 'hover.force': (force) => force }),
+    ...rowsFrom(
+      solved(weight(state.loading)),
+      { 'hover.force': (force) => force },
+      { 'hover.force': { uncertainty: spread(state, weight) } },
+    ),
     ...rowsFrom(
       ifDriven(state, () => hoverOf(state)),
       {
