@@ -24,9 +24,9 @@ const FIGURES = {
   },
   'turn.virtualMoment': { label: 'Yaw moment about that centre', quantity: 'torque' },
   'turn.shareVectoring': {
-    label: 'Left by the vectoring limits',
+    label: 'Left by limits of vectoring, reverse',
     quantity: 'fraction',
-    why: 'Of the yaw moment that the same thrust would give turned square to its arm.',
+    why: 'Of the yaw moment that the same thrust would give, all of it square to its arm.',
   },
   'turn.shareArm': {
     label: 'Left by the arm',
