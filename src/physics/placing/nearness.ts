@@ -2,7 +2,7 @@
  * How near a propeller comes to what it must not strike: the least gap over the room it sweeps, m, negative where it
  * would cut in.
  *
- * To the skin it is measured square to the axis, beyond the ends straight. Of other parts the boxes of their outside
+ * Into the skin it is measured square to the axis. Of other parts the boxes of their outside
  * dimensions are taken, which stand upright or, on the skin, square to it: there only whether the blades pass through.
  */
 import type { Vec3 } from '../../numeric/vector.ts';
@@ -16,23 +16,46 @@ export interface Box {
   readonly size: { readonly length: number; readonly width: number; readonly height: number };
 }
 
-export function gapToSkin(sweep: Sweep, hull: Hull): number {
-  const tips: readonly Vec3[] = [
-    [0, 0, 0],
-    [hull.length, 0, 0],
-  ];
-  let least = outside(sweep.at, hull);
+/** Gaps below `room` are told to within a fraction of it; of greater ones only that they are. */
+export function gapToSkin(sweep: Sweep, hull: Hull, room: number): number {
+  const near = { hull, room, rise: riseOf(hull, room) };
+  let least = gapAt(sweep.at, near);
   for (const normal of sweep.normals) {
-    for (const tip of tips) least = Math.min(least, distanceTo(sweep, normal, tip));
-    for (const point of bladePoints(sweep, normal)) least = Math.min(least, outside(point, hull));
+    for (const tip of [0, hull.length]) least = Math.min(least, distanceTo(sweep, normal, [tip, 0, 0]));
+    for (const point of bladePoints(sweep, normal)) least = Math.min(least, gapAt(point, near));
   }
   return least;
 }
 
-function outside(point: Vec3, hull: Hull): number {
-  const station = Math.min(Math.max(point[0], 0), hull.length);
-  const off = distanceFromAxis(point) - hull.radius(station, clockOf(point));
-  return station === point[0] ? off : Math.hypot(point[0] - station, Math.max(0, off));
+interface Near {
+  readonly hull: Hull;
+  readonly room: number;
+  /** A point farther from the skin than this, square to the axis, has none of it within `room`, m. */
+  readonly rise: number;
+}
+
+/** A hull widens fastest at its ends, dents in measured ones left aside. */
+const riseOf = ({ length, radius }: Hull, room: number): number =>
+  Math.max(radius(room, 0), radius(length - room, 0), radius(room, ATHWART), radius(length - room, ATHWART)) +
+  room;
+
+const ATHWART = Math.PI / 2;
+
+/** How far fore and aft the nearest skin is looked for, as shares of the room to be kept. */
+const LOOKED = [-1, -0.5, 0.5, 1];
+
+/** Square to the axis, or to the skin a little fore or aft where the hull is blunt. */
+function gapAt(point: Vec3, { hull, room, rise }: Near): number {
+  const clock = clockOf(point);
+  const rho = distanceFromAxis(point);
+  const to = (station: number): number => {
+    const held = Math.min(Math.max(station, 0), hull.length);
+    const off = rho - hull.radius(held, clock);
+    return held === point[0] ? off : Math.hypot(point[0] - held, Math.max(0, off));
+  };
+  const square = to(point[0]);
+  if (square < 0 || square > rise) return square;
+  return Math.min(square, ...LOOKED.map((share) => to(point[0] + share * room)));
 }
 
 /**

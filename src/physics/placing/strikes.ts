@@ -42,7 +42,7 @@ export function strikesOf(state: CraftState, part: string, meant = NOTHING_MEANT
   const ground = groundWords(state, part, sweeps, room);
   const strikes = [
     ...skinWords(
-      leastOf(sweeps, (sweep) => gapToSkin(sweep, state.hull)),
+      leastOf(sweeps, (sweep) => gapToSkin(sweep, state.hull, room)),
       room,
     ),
     ...partsInWay(state, part, sweeps, meant).map(

@@ -45,7 +45,7 @@ test.each([
     expect(place.kind).toBe('keel');
     expect(stationOf(place)).toBe(station);
     const [thruster] = thrustersOf(stateWith([{ ...part, place }]));
-    expect(gapToSkin(sweepOf(thruster!), hull)).toBeGreaterThan(clearanceOf(0.2) - 1e-9);
+    expect(gapToSkin(sweepOf(thruster!), hull, clearanceOf(0.2))).toBeGreaterThan(clearanceOf(0.2) - 1e-9);
   }
   const middle = positionOf(placeAt(part, 2, hull), hull);
   expect(middle[2]).toBeCloseTo(-(0.5 + 0.1 + clearanceOf(0.2)), 2);

@@ -60,16 +60,24 @@ test.each([
   ],
   ['ahead of the flat nose', [-0.3, 0, 0], {}, 0.3],
 ] as const)('the gap to a cylinder: %s', (_, at, change, gap) => {
-  expect(gapToSkin(sweepAt(at, change), CYLINDER)).toBeCloseTo(gap, 9);
+  expect(gapToSkin(sweepAt(at, change), CYLINDER, 0.01)).toBeCloseTo(gap, 9);
 });
 
 test('turned by 60° close behind the tail the blades cut into it', () => {
-  expect(gapToSkin(sweepAt([4.06, 0, 0], { yaw: turning(0, 60 * degrees) }), CYLINDER)).toBeLessThan(0);
+  expect(gapToSkin(sweepAt([4.06, 0, 0], { yaw: turning(0, 60 * degrees) }), CYLINDER, 0.01)).toBeLessThan(0);
+});
+
+test('beside a blunt nose the skin just aft is near, though none is square across', () => {
+  // A disc in the plane of the nose, its rim 60 mm off the axis; 5 mm aft the spheroid is 61 mm across from the axis.
+  const blunt = solvedValue(hullOf({ kind: 'spheroid', length: 2, diameter: 1.22 }));
+  expect(blunt.radius(0.005, 0)).toBeCloseTo(0.061, 3);
+  expect(gapToSkin(sweepAt([0, 0, -0.16]), blunt, 0.01)).toBeLessThan(0.006);
+  expect(gapToSkin(sweepAt([-0.02, 0, -0.16]), blunt, 0.01)).toBeGreaterThan(0.01);
 });
 
 test('a disc about the tail, its rim outside, is struck by what passes through it', () => {
   const thin = { ...CYLINDER, radius: (x: number) => (x >= 0 && x <= 4 ? 0.02 : 0) };
-  expect(gapToSkin(sweepAt([3.9, 0, 0]), thin)).toBeLessThan(0);
+  expect(gapToSkin(sweepAt([3.9, 0, 0]), thin, 0.01)).toBeLessThan(0);
 });
 
 /** Points of a disc, hub left out, far denser than those of the program. */
