@@ -1,7 +1,7 @@
 /** `place`: where a thruster had better sit, as a table for reading, as JSON or as CSV. */
-import { type Craft, listed } from '../craft/craft.ts';
+import type { Craft } from '../craft/craft.ts';
 import type { PlacedPoint } from '../physics/placing/placedPoint.ts';
-import { type PlacementStudy, placementStudy } from '../physics/placing/study.ts';
+import { type PlacementStudy, placementStudy, thrusterParts } from '../physics/placing/study.ts';
 import { placeCsv } from '../report/turning/placeCsv.ts';
 import { PLACE_FIGURES, type PlaceFigure } from '../report/turning/placeFigures.ts';
 import { placeJson } from '../report/turning/placeJson.ts';
@@ -38,7 +38,7 @@ function told(trouble: string, io: Io): ExitCode {
 
 /** Empty when the part has thrust figures. */
 function partTrouble(craft: Craft, part: string | null): string {
-  const able = listed(craft.parts).filter(({ thruster }) => thruster !== null);
+  const able = thrusterParts(craft);
   if (able.some(({ id }) => id === part)) return '';
   const found = part === null ? 'none' : JSON.stringify(part);
   if (able.length === 0) return `--part: found ${found}; but no part of this craft has thrust figures`;

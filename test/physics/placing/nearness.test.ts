@@ -140,10 +140,37 @@ test('blades pass through a box as a dense cloud of points does, to within the g
         expect(found).toBe(false);
       }
     }),
-    { numRuns: 300, endOnFailure: true },
+    { numRuns: 300, endOnFailure: true, seed: 11 },
   );
   expect(seen.through).toBeGreaterThan(50);
   expect(seen.past).toBeGreaterThan(50);
+});
+
+const besideCylinder = fc
+  .record({ x: double(-0.3, 4.3), rho: double(0.3, 0.9), clock: double(0, 6.28) })
+  .map(({ x, rho, clock }): Vec3 => [x, rho * Math.sin(clock), rho * Math.cos(clock)]);
+
+test('a propeller cuts into a cylinder where a dense cloud of its points does, to within the gaps between points', () => {
+  const seen = { cut: 0, clear: 0 };
+  const grownBy = (sweep: Sweep, by: number) =>
+    cloud(sweep).some(([x, y, z]) => x >= -by && x <= 4 + by && Math.hypot(y, z) < 0.5 + by);
+  fc.assert(
+    fc.property(sweeps, besideCylinder, (sweep, at) => {
+      const there = { ...sweep, at };
+      const gap = gapToSkin(there, CYLINDER, 0.01);
+      if (grownBy(there, -0.03)) {
+        seen.cut++;
+        expect(gap).toBeLessThan(0);
+      }
+      if (!grownBy(there, 0.03)) {
+        seen.clear++;
+        expect(gap).toBeGreaterThan(0);
+      }
+    }),
+    { numRuns: 200, endOnFailure: true, seed: 11 },
+  );
+  expect(seen.cut).toBeGreaterThan(15);
+  expect(seen.clear).toBeGreaterThan(30);
 });
 
 test('what carries a propeller may come as near as its hub', () => {
