@@ -58,6 +58,7 @@ export function PlacePlot({ study, fresh, marked, name, length, units, palette, 
       role="slider"
       tabIndex={0}
       data-testid="place-plot"
+      data-tried={study.points.length}
       aria-label={`Stations tried for ${name}`}
       aria-valuemin={Math.min(0, study.points[0]?.station ?? 0)}
       aria-valuemax={Math.max(length, study.points.at(-1)?.station ?? 0)}

@@ -1,4 +1,5 @@
 /** Where a thruster had better sit: every station tried, the best of them in a list, the curves under the side view. */
+import { useMemo } from 'react';
 import { listed } from '../../craft/craft.ts';
 import { placeReport } from '../../report/turning/placeReport.ts';
 import { toldStation } from '../../report/turning/placeWords.ts';
@@ -76,22 +77,28 @@ function Buttons({ start }: { start: () => void }) {
 function Result() {
   const { craft, units } = useEditor();
   const studying = useStudying();
-  const { craft: then, part, points, today, complete, busy } = studying;
   const fresh = holdsFor(studying, craft, useTurning());
-  if (!then || part === null || !today) return null;
-  const study = { part, points, today, complete };
-  const { headline, obstacles, notes } = placeReport(then, study, units);
+  const { craft: then, part, points, today, complete, busy } = studying;
+  const told = useMemo(() => {
+    if (!then || part === null || !today) return null;
+    const study = { part, points, today, complete };
+    const station = toldStation(study, then.targets)?.station ?? null;
+    return { ...placeReport(then, study, units), station };
+  }, [then, part, points, today, complete, units]);
+  if (!told) return null;
+  const several = listed(craft.parts).filter(({ thruster }) => thruster).length > 1;
   return (
     <>
       {!fresh && <p className="aside">Worked out before the last change: try every station again.</p>}
       <div className={fresh ? 'plan-answer' : 'plan-answer plan-old'}>
         <p className="study-headline">
           {busy && 'So far: '}
-          {headline}
+          {several && <strong>{craft.parts.byId[part!]?.name || part}: </strong>}
+          {told.headline}
         </p>
-        <StudyTable fresh={fresh} told={toldStation(study, then.targets)?.station ?? null} />
-        <Sentences title="Where something is in the way" sentences={obstacles} />
-        <Sentences title="What the figures are of" sentences={notes} />
+        <StudyTable fresh={fresh} told={told.station} />
+        <Sentences title="Where something is in the way" sentences={told.obstacles} />
+        <Sentences title="What the figures are of" sentences={told.notes} />
       </div>
     </>
   );

@@ -12,18 +12,22 @@ export function holdsFor(
   now: Craft,
   turning: TurningState,
 ): boolean {
-  if (!then || part === null || !asked || !same(asked, askedOf(now, turning))) return false;
-  if (then === now) return true;
-  const { parts, ...rest } = now;
-  if (!same(then, rest) || parts.order !== then.parts.order) return false;
-  return parts.order.every((id) => {
-    const [a, b] = [then.parts.byId[id]!, parts.byId[id]!];
-    return a === b || (id === part && same(a, { ...b, place: a.place }));
-  });
+  if (!then || part === null || !asked || !alike(asked, askedOf(now, turning))) return false;
+  const place = then.parts.byId[part]!.place;
+  const moved = now.parts.byId[part];
+  if (!moved) return false;
+  const byId = { ...now.parts.byId, [part]: { ...moved, place } };
+  return alike(then, { ...now, parts: { ...now.parts, byId } });
 }
 
-const same = <T extends object>(whole: T, some: Partial<T>): boolean =>
-  (Object.keys(some) as (keyof T)[]).every((key) => whole[key] === some[key]);
+/** Whether both hold the same throughout; what is one object is not looked into, so that two states of a craft are soon compared. */
+function alike(a: unknown, b: unknown): boolean {
+  if (Object.is(a, b)) return true;
+  if (typeof a !== 'object' || typeof b !== 'object' || a === null || b === null) return false;
+  const keys = Object.keys(a);
+  const [of, other] = [a, b] as Readonly<Record<string, unknown>>[];
+  return keys.length === Object.keys(b).length && keys.every((key) => alike(of![key], other![key]));
+}
 
 /** The thruster as it sits now, where it was then or among the stations tried; null where it was not tried. */
 export function pointNow({ part, points, today }: StudyState, now: Craft): PlacedPoint | null {

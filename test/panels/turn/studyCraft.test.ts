@@ -21,7 +21,11 @@ const study: StudyState = {
   points: [point],
   today,
 };
-const stowage = { weights: [], slides: [{ part: 'battery', to: 0.5 }], loads: [] };
+const stowage = {
+  weights: [{ hardpoint: 'nose', pieces: [{ mass: 0.0123, count: 1 }] }],
+  slides: [{ part: 'battery', to: 0.5 }],
+  loads: [],
+};
 
 test('a study holds wherever its thruster is moved, and after that is undone', () => {
   const session = new Session(craft);
@@ -36,6 +40,14 @@ test('a study holds wherever its thruster is moved, and after that is undone', (
   session.undo();
   expect(holdsFor(study, now(), FIRST_TURNING)).toBe(true);
   expect(pointNow(study, now())).toBe(today);
+});
+
+test('it holds again once what was done is undone, whatever that was', () => {
+  const session = new Session(craft);
+  session.apply(moveAndHang(part, place, stowage));
+  expect(holdsFor(study, session.getState().craft, FIRST_TURNING)).toBe(false);
+  session.undo();
+  expect(holdsFor(study, session.getState().craft, FIRST_TURNING)).toBe(true);
 });
 
 test('it does not hold once anything else differs, or the thruster itself', () => {

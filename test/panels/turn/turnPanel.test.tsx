@@ -1,0 +1,151 @@
+import { createElement } from 'react';
+import { renderToStaticMarkup } from 'react-dom/server';
+import { expect, test } from 'vitest';
+import type { Craft } from '../../../src/craft/craft.ts';
+import { loadHighs } from '../../../src/numeric/linearProgram/highsSolver.ts';
+import { EditorContext } from '../../../src/panels/editor.ts';
+import { askedOf, steeringPart } from '../../../src/panels/turn/asked.ts';
+import { NO_STUDY, type Studying, StudyingContext } from '../../../src/panels/turn/studying.ts';
+import { TurnSheet } from '../../../src/panels/turn/TurnPanel.tsx';
+import { turnGroups } from '../../../src/panels/turn/turnGroups.ts';
+import { FIRST_TURNING, TurningContext, type TurningState } from '../../../src/panels/turn/turning.ts';
+import { placementStudy } from '../../../src/physics/placing/study.ts';
+import { HAZARDS } from '../../../src/report/hazards.ts';
+import { placeReport } from '../../../src/report/turning/placeReport.ts';
+import { turnFigures, turnReport } from '../../../src/report/turning/turnReport.ts';
+import type { UnitSystem } from '../../../src/units/units.ts';
+import { sampleCraft } from '../../samples/readSamples.ts';
+import { danglingIds, editorOn, seen, unnamed } from '../render.tsx';
+
+interface Look {
+  readonly units?: UnitSystem;
+  readonly studying?: Partial<Studying>;
+  readonly turning?: Partial<TurningState>;
+  readonly fresh?: boolean;
+}
+
+const nothing = () => {};
+
+function panel(craft: Craft, { units = 'metric', studying, turning, fresh = true }: Look = {}): string {
+  const choices = { ...FIRST_TURNING, ...turning };
+  const asked = askedOf(craft, choices);
+  const now = {
+    report: turnReport(craft, asked, units),
+    figures: turnFigures(craft, asked, units),
+    fresh,
+  };
+  const sheet = createElement(TurnSheet, { now, player: () => 'the path', onTargets: nothing });
+  const study = { ...NO_STUDY, start: nothing, stop: nothing, close: nothing, ...studying };
+  return renderToStaticMarkup(
+    createElement(
+      EditorContext,
+      { value: editorOn(craft, { units }) },
+      createElement(
+        StudyingContext,
+        { value: study },
+        createElement(TurningContext, { value: { ...choices, set: nothing } }, sheet),
+      ),
+    ),
+  );
+}
+
+const museum = sampleCraft('museum-atrium');
+const [thruster] = museum.parts.order.filter((id) => museum.parts.byId[id]!.thruster);
+const asked = askedOf(museum, FIRST_TURNING);
+const report = turnReport(museum, asked, 'metric');
+const outcome = placementStudy(museum, thruster!, await loadHighs(), { stations: 9, asked });
+if (outcome.status !== 'solved') throw new Error(outcome.why);
+const study = outcome.value;
+const studying = { ...NO_STUDY, ...study, craft: museum, asked, share: 1 };
+const studied = panel(museum, { studying });
+const unthrust = sampleCraft('two-sheet-advert');
+
+test.each([
+  ['at first', panel(museum)],
+  ['with a study', studied],
+  ['while it is worked out', panel(museum, { studying: { ...studying, busy: true, share: 0.4 } })],
+  ['without thrust', panel(unthrust)],
+])('%s: every field has a name, and every description is there', (_, markup) => {
+  expect(unnamed(markup)).toEqual([]);
+  expect(danglingIds(markup)).toEqual([]);
+});
+
+test('it is told in the words of the report, in the builder’s units, with every figure', () => {
+  for (const units of ['metric', 'imperial'] as const) {
+    const { headline, costWords, cautions, rows } = turnReport(museum, asked, units);
+    const text = seen(panel(museum, { units }));
+    const labels = Object.values(rows).map(({ label }) => label);
+    for (const each of [headline, ...costWords, ...cautions, ...labels]) expect(text).toContain(each);
+  }
+});
+
+test('every figure stands in one group, and none without a heading of its own', () => {
+  const groups = turnGroups(report.rows);
+  expect(groups.flatMap(({ rows }) => rows.map(({ key }) => key)).toSorted()).toEqual(
+    Object.keys(report.rows).toSorted(),
+  );
+  expect(groups.filter(({ id }) => id === 'more')).toEqual([]);
+  for (const { beside, rows } of groups) {
+    if (beside) expect(rows.map(({ key }) => key)).toContain(beside.key);
+  }
+});
+
+test('cautions stand there: propellers, people, and the tether', () => {
+  const text = seen(panel(museum));
+  for (const each of [HAZARDS.thruster, HAZARDS.people, 'on a tether']) expect(text).toContain(each);
+});
+
+test('a craft without thrust is told what is missing, once', () => {
+  const text = seen(panel(unthrust));
+  const { headline } = turnReport(unthrust, asked, 'metric');
+  expect(text.split(headline)).toHaveLength(2);
+  expect(text).not.toContain('Throttle');
+});
+
+test('figures that wait for a simulation are shown as old, those that follow at once are not', () => {
+  const old = (markup: string) =>
+    [...markup.matchAll(/data-figure="([\w.]+)" data-status="\w+" class="plan-old"/g)].map(([, key]) => key);
+  expect(old(panel(museum))).toEqual([]);
+  const waiting = old(panel(museum, { fresh: false }));
+  expect(waiting).toContain('turn.timeTo90');
+  expect(waiting.filter((key) => key! in turnFigures(museum, asked, 'metric').rows)).toEqual([]);
+});
+
+test('a study is told in the words of the report; each station that nothing beats has its row', () => {
+  const text = seen(studied);
+  expect(text).toContain(placeReport(museum, study, 'metric').headline);
+  const rows = [...studied.matchAll(/data-station="([\d.-]+)"/g)].map(([, station]) => Number(station));
+  expect(rows).toEqual(study.points.filter(({ best }) => best).map(({ station }) => station));
+  expect(rows.length).toBeGreaterThan(0);
+  expect(text).toContain('Close the study');
+});
+
+test('a study of another craft or throttle says so, and moves nothing', () => {
+  for (const look of [
+    { studying: { ...studying, craft: { ...museum, name: 'Before' } } },
+    { studying, turning: { throttle: 0.5 } },
+  ]) {
+    const markup = panel(museum, look);
+    expect(seen(markup)).toContain('Worked out before the last change: try every station again.');
+    expect(markup).toMatch(/aria-disabled="true"[^>]*>Move it there/);
+  }
+  expect(studied).toMatch(/aria-disabled="false"[^>]*>Move it there/);
+});
+
+test('of several thrusters one is chosen to be tried, and the study names the one it is of', () => {
+  const second = { ...museum.parts.byId[thruster!]!, id: 'second', name: 'Chin thruster' };
+  const { order, byId } = museum.parts;
+  const two = { ...museum, parts: { order: [...order, 'second'], byId: { ...byId, second } } };
+  const text = seen(panel(two, { studying: { ...studying, craft: two } }));
+  expect(text).toMatch(/Thruster Tail thruster Chin thruster/);
+  expect(text).toContain('Tail thruster: In the');
+  expect(seen(studied)).not.toContain('Chin thruster');
+});
+
+test('the arrow that was turned last is the one to steer by; without one it is hardest to starboard', () => {
+  expect(steeringPart(museum, FIRST_TURNING)?.id).toBe(thruster);
+  expect(steeringPart(unthrust, FIRST_TURNING)).toBeNull();
+  expect(askedOf(unthrust, { ...FIRST_TURNING, steering: 'set' }).vector).toBeNull();
+  const { set } = museum.parts.byId[thruster!]!.thruster!.yaw;
+  expect(askedOf(museum, { ...FIRST_TURNING, steering: 'set', turned: 'gone' }).vector).toBe(set);
+});
