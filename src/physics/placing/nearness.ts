@@ -109,10 +109,11 @@ function fromOrigin(a: Vec3, b: Vec3): number {
 /** Of another propeller, however either is turned; Infinity when it is farther off than `near`. */
 export function gapToPropeller(sweep: Sweep, other: Sweep, near: number): number {
   if (apart(sweep.at, other.at) > sweep.radius + other.radius + near) return Number.POSITIVE_INFINITY;
-  const points = sweep.normals.flatMap((normal) => bladePoints(sweep, normal));
-  return Math.min(
-    ...other.normals.flatMap((normal) => points.map((point) => distanceTo(other, normal, point))),
-  );
+  let gap = Number.POSITIVE_INFINITY;
+  for (const point of sweep.normals.flatMap((normal) => bladePoints(sweep, normal))) {
+    for (const normal of other.normals) gap = Math.min(gap, distanceTo(other, normal, point));
+  }
+  return gap;
 }
 
 /** Between two propellers of one part, which turn alike. */

@@ -189,6 +189,13 @@ test('between two propellers side by side, and one behind the other', () => {
   expect(gapToPropeller(sweepAt([0, 0, 0]), sweepAt([3, 0, 0]), 0.2)).toBe(Number.POSITIVE_INFINITY);
 });
 
+test('between two that turn every way there is an answer, however many the directions', () => {
+  const anyWay = { yaw: turning(-Math.PI, Math.PI), pitch: turning(-Math.PI, Math.PI) };
+  const [one, other] = [sweepAt([0, 0, 0], anyWay), sweepAt([0, 0, 0.21], anyWay)];
+  expect(gapToPropeller(one, other, 0.2)).toBeCloseTo(0.01, 9);
+  expect(gapToPropeller(one, one, 0.2)).toBeCloseTo(0, 9);
+});
+
 test('a propeller reaches lowest while it pushes level; a box leaned over reaches down by its corner', () => {
   expect(lowestOf(sweepAt([0, 0, -1], { pitch: turning(0, 80 * degrees) }))).toBeCloseTo(-1.1, 12);
   const fixed = { least: 60 * degrees, most: 60 * degrees, set: 60 * degrees, slew: 0 };
