@@ -12,8 +12,6 @@ export interface PlaceMarksProps {
   readonly size: Size;
   /** Index of the station that is read, and what each strip says there. */
   readonly read: { readonly index: number; readonly values: readonly string[] } | null;
-  /** What stands above the strips; the legend when it is empty. */
-  readonly words: string;
   readonly palette: Palette;
 }
 
@@ -30,8 +28,19 @@ export function PlaceMarks(props: PlaceMarksProps) {
         for (const band of page.struck) hatch(context, band, page, palette);
         today(context, props);
         for (const strip of page.strips) drawStrip(context, strip, props);
+        if (page.waiting) waiting(context, page.waiting, props);
         reading(context, props);
-        if (props.words) line(context, props.words, props);
+      }}
+    />
+  );
+}
+
+/** The line above the strips: the first of the words that fits, or without any the legend. */
+export function PlaceHead(props: HeadProps & { readonly words: readonly string[] }) {
+  return (
+    <Shape
+      sceneFunc={(context) => {
+        if (props.words.length > 0) line(context, props.words, props);
         else legend(context, props);
       }}
     />
@@ -77,6 +86,9 @@ function dot(context: Context, { x, y }: ScreenPoint, radius: number, ink: strin
   context.stroke();
 }
 
+const numbersFrom = ({ right, stations, today }: PlacePage): number =>
+  Math.max(right, stations.at(-1) ?? 0, today ?? 0) + 9;
+
 /** Aft of tail and stations while they are in sight, else at the edge. */
 function scaleNumbers(context: Context, { high, low, top, foot, runs }: Strip, props: PlaceMarksProps): void {
   if (runs.length === 0) return;
@@ -85,8 +97,7 @@ function scaleNumbers(context: Context, { high, low, top, foot, runs }: Strip, p
   context.textBaseline = 'middle';
   context.textAlign = 'left';
   const room = Math.max(textWidth(high, SMALL), textWidth(low, SMALL)) + 4;
-  const aft = Math.max(page.right, page.stations.at(-1) ?? 0, page.today ?? 0);
-  const x = Math.min(aft + 9, size.width - room);
+  const x = Math.min(numbersFrom(page), size.width - room);
   writeOn(context, high, { x, y: top + 5 }, palette.inkSoft, palette.paper);
   if (foot - top > 22) writeOn(context, low, { x, y: foot - 4 }, palette.inkSoft, palette.paper);
 }
@@ -142,39 +153,61 @@ function today(context: Context, { page, palette }: PlaceMarksProps): void {
   }
 }
 
-function reading(context: Context, { page, read, palette, size }: PlaceMarksProps): void {
+function reading(context: Context, { page, read, palette }: PlaceMarksProps): void {
   if (!read) return;
   const x = page.stations[read.index]!;
   context.strokeStyle = palette.brass;
   context.lineWidth = 1.5;
   across(context, { x, y: headOf(page) - 2 }, { x, y: footOf(page) + 4 });
-  page.strips.forEach(({ curve, heights, top, foot }, i) => {
+  const font = fontOf(12, 600);
+  const texts = page.strips.map(({ curve }, i) => `${curve.name} ${read.values[i]}`);
+  const widest = Math.max(...texts.map((text) => textWidth(text, font)));
+  // Not over the numbers of the scales.
+  const aft = x + APART_FROM_LINE + widest < numbersFrom(page) || x - APART_FROM_LINE < widest;
+  page.strips.forEach(({ heights, top, foot }, i) => {
     const y = heights[read.index] ?? null;
     if (y !== null) dot(context, { x, y }, 4, palette.brass, palette);
-    const text = `${curve.name} ${read.values[i]}`;
-    const width = textWidth(text, fontOf(12, 600));
-    const left = x + 9 + width < size.width ? x + 9 : x - 9 - width;
-    context.font = fontOf(12, 600);
+    context.font = font;
     context.textBaseline = 'middle';
-    context.textAlign = 'left';
-    const at = Math.min(Math.max(y ?? foot, top + 7), foot - 6);
-    writeOn(context, text, { x: left, y: at }, palette.ink, palette.paper);
+    context.textAlign = aft ? 'left' : 'right';
+    const at = {
+      x: aft ? x + APART_FROM_LINE : x - APART_FROM_LINE,
+      y: Math.min(Math.max(y ?? foot, top + 7), foot - 6),
+    };
+    writeOn(context, texts[i]!, at, palette.ink, palette.paper);
   });
 }
 
-function line(context: Context, words: string, { page, size, palette }: PlaceMarksProps): void {
+const APART_FROM_LINE = 9;
+
+const WAITING = 'not worked out yet';
+
+function waiting(context: Context, { left, right }: Band, { page, palette }: PlaceMarksProps): void {
+  if (right - left < textWidth(WAITING, TEXT) + 12) return;
+  const { top, foot } = page.strips[1]!;
+  context.font = TEXT;
+  context.textAlign = 'center';
+  context.textBaseline = 'middle';
+  writeOn(context, WAITING, { x: (left + right) / 2, y: (top + foot) / 2 }, palette.inkSoft, palette.paper);
+}
+
+type HeadProps = Omit<PlaceMarksProps, 'read'>;
+
+function line(context: Context, choices: readonly string[], { page, size, palette }: HeadProps): void {
+  const room = size.width - 12;
+  const words = choices.find((each) => textWidth(each, TEXT) <= room) ?? choices.at(-1)!;
   context.font = TEXT;
   context.textBaseline = 'middle';
   context.textAlign = 'left';
   const x = Math.max(6, Math.min(page.left, size.width - textWidth(words, TEXT) - 8));
-  const text = shortened(words, TEXT, size.width - 12) ?? '';
+  const text = shortened(words, TEXT, room) ?? '';
   writeOn(context, text, { x, y: WORDS_Y }, palette.ink, palette.paper);
 }
 
 const APART = 16;
 
 /** What dots, ring and hatching stand for. */
-function legend(context: Context, props: PlaceMarksProps): void {
+function legend(context: Context, props: HeadProps): void {
   const { page, palette } = props;
   context.font = TEXT;
   context.textBaseline = 'middle';

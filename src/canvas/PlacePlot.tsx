@@ -6,9 +6,9 @@ import { type CSSProperties, useRef } from 'react';
 import { Layer, Stage } from 'react-konva/es/ReactKonvaCore.js';
 import type { Palette } from '../scene/palette.ts';
 import { layPlace, type StudyToDraw } from '../scene/placePlot.ts';
-import { besideWords, curveWords, stationSentence } from '../scene/placeWords.ts';
+import { curveWords, headWords, stationSentence } from '../scene/placeWords.ts';
 import type { UnitSystem } from '../scene/subject.ts';
-import { PlaceMarks } from './PlaceMarks.tsx';
+import { PlaceHead, PlaceMarks } from './PlaceMarks.tsx';
 import { useSize } from './useSize.ts';
 import { useStationReader } from './useStationReader.ts';
 import type { ViewState } from './useView.ts';
@@ -75,7 +75,14 @@ export function PlacePlot({ study, fresh, marked, name, length, units, palette, 
             page={page}
             size={size}
             read={spot ? { index: at, values: curveWords(spot, units) } : null}
-            words={spot ? [besideWords(spot, units), press].filter(Boolean).join(' ') : fresh ? '' : OLD}
+            palette={palette}
+          />
+        </Layer>
+        <Layer listening={false}>
+          <PlaceHead
+            page={page}
+            size={size}
+            words={spot ? headWords(spot, press, units) : fresh ? [] : [OLD]}
             palette={palette}
           />
         </Layer>

@@ -58,6 +58,7 @@ export function useStationReader(
         else if (next === null) return;
         else setKept(next);
         setPointed(null);
+        setFocused(true);
         event.preventDefault();
         event.stopPropagation();
       },

@@ -12,25 +12,50 @@ export const curveWords = (spot: StudySpot, units: UnitSystem): string[] =>
   });
 
 /** What stands in no curve. */
-export function besideWords(spot: StudySpot, units: UnitSystem): string {
-  const { radius, cruisePitch, cautions, why } = spot;
+export function besideWords({ station, radius, cruisePitch }: StudySpot, units: UnitSystem): string {
   const facts = [
     radius === null ? '' : `radius ${formatQuantity(radius, 'pathLength', units)}`,
     cruisePitch === null ? '' : pitchWords(cruisePitch, units),
   ].filter(Boolean);
-  const at = `Station ${formatQuantity(spot.station, 'length', units)}`;
-  const first = facts.length > 0 ? `${at}: ${facts.join(', ')}.` : `${at}.`;
-  const matters = [why, ...cautions].filter(Boolean).map((sentence) => inUnits(sentence, units));
-  return [first, ...matters].join(' ');
+  return facts.length > 0
+    ? `${atWords(station, units)}: ${facts.join(', ')}.`
+    : `${atWords(station, units)}.`;
 }
+
+const atWords = (station: number, units: UnitSystem): string =>
+  `Station ${formatQuantity(station, 'length', units)}`;
+
+/** What is the matter there: no plan, or something the propeller would strike. One sentence each. */
+export const matterWords = ({ why, cautions }: StudySpot, units: UnitSystem): string[] =>
+  [why, ...cautions].filter(Boolean).map((sentence) => inUnits(sentence, units));
 
 function pitchWords(pitch: number, units: UnitSystem): string {
   const angle = formatQuantity(Math.abs(pitch), 'angle', units);
   return `${angle} ${pitch < 0 ? 'nose-down' : 'nose-up'} in cruise`;
 }
 
+/** What stands above the curves, for more room and for less: what is the matter goes before what stands in no curve. `press`: what a press does. */
+export function headWords(spot: StudySpot, press: string, units: UnitSystem): string[] {
+  const beside = besideWords(spot, units);
+  const [first, ...more] = matterWords(spot, units);
+  if (first === undefined) return [`${beside} ${press}`, beside];
+  const matter = more.length > 0 ? `${first} And ${more.length} more.` : first;
+  const short = `${atWords(spot.station, units)}. ${matter}`;
+  return [
+    [beside, first, ...more, press].join(' '),
+    `${beside} ${matter} ${press}`,
+    `${short} ${press}`,
+    short,
+  ].map((words) => words.trim());
+}
+
 /** Everything, for those who do not see the drawing. */
 export function stationSentence(spot: StudySpot, units: UnitSystem): string {
   const figures = curveWords(spot, units).map((words, i) => `${CURVES[i]!.name} ${words}`);
-  return `${besideWords(spot, units)} ${figures.join(', ')}.${spot.best ? ' Nothing beats it.' : ''}`;
+  return [
+    besideWords(spot, units),
+    `${figures.join(', ')}.`,
+    ...matterWords(spot, units),
+    ...(spot.best ? ['Nothing beats it.'] : []),
+  ].join(' ');
 }

@@ -1,7 +1,13 @@
 import fc from 'fast-check';
 import { expect, test } from 'vitest';
 import { CURVES, layPlace, nameSpot, type StudySpot, scaleOf } from '../../src/scene/placePlot.ts';
-import { besideWords, curveWords, stationSentence } from '../../src/scene/placeWords.ts';
+import {
+  besideWords,
+  curveWords,
+  headWords,
+  matterWords,
+  stationSentence,
+} from '../../src/scene/placeWords.ts';
 import { QUANTITIES, type Quantity } from '../../src/units/quantities.ts';
 
 const spot = (station: number, more: Partial<StudySpot> = {}): StudySpot => ({
@@ -140,11 +146,20 @@ test('the name of a curve stands where the curve is not', () => {
 
 test('a station in words: every figure, why there is none, and what the propeller strikes', () => {
   expect(curveWords(points[0]!, 'metric')).toEqual(['120.0 g', '3.0 s', '2.00 m/s', '1.100']);
-  expect(besideWords(points[0]!, 'metric')).toBe(
-    'Station 0.000 m: radius 0.70 m, 1.1° nose-down in cruise. The propeller reaches 30 mm into the ground.',
-  );
+  expect(besideWords(points[0]!, 'metric')).toBe('Station 0.000 m: radius 0.70 m, 1.1° nose-down in cruise.');
+  expect(matterWords(points[0]!, 'metric')).toEqual(['The propeller reaches 30 mm into the ground.']);
   expect(stationSentence(points[2]!, 'metric')).toBe(
-    'Station 2.000 m: radius 0.70 m, 1.1° nose-down in cruise. No plan keeps every target. Lead and wire none, Time to 90° none, Side gust held 2.00 m/s, Thrust per watt 1.100.',
+    'Station 2.000 m: radius 0.70 m, 1.1° nose-down in cruise. Lead and wire none, Time to 90° none, Side gust held 2.00 m/s, Thrust per watt 1.100. No plan keeps every target.',
   );
   expect(stationSentence(points[1]!, 'imperial')).toMatch(/4\.23 oz.*Nothing beats it\.$/);
+});
+
+test('with less room above the curves what is the matter stays longest', () => {
+  const struck = spot(1, { cautions: ['It strikes the skin.', 'It strikes a mast.', 'It strikes a fin.'] });
+  const choices = headWords(struck, 'Click moves it there.', 'metric');
+  expect(choices[0]).toMatch(/radius.*skin.*mast.*fin.*Click/);
+  expect(choices.at(-1)).toBe('Station 1.000 m. It strikes the skin. And 2 more.');
+  const lengths = choices.map(({ length }) => length);
+  expect(lengths).toEqual(lengths.toSorted((a, b) => b - a));
+  expect(headWords(spot(1), '', 'metric').at(-1)).toBe(besideWords(spot(1), 'metric'));
 });

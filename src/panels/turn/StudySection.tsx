@@ -97,7 +97,7 @@ function Result() {
           {told.headline}
         </p>
         <StudyTable fresh={fresh} told={told.station} />
-        <Sentences title="Where something is in the way" sentences={told.obstacles} />
+        <Sentences title="What is in the way" sentences={told.obstacles} />
         <Sentences title="What the figures are of" sentences={told.notes} />
       </div>
     </>

@@ -47,7 +47,7 @@ export function TurnSheet({ now, player, onTargets }: TurnPanelProps & { now: Re
             <div className={old}>{player(report.turn)}</div>
           </Foldable>
         )}
-        <Foldable title="Where should the thruster sit?" note="" open>
+        <Foldable title="Where should it sit?" note="" open>
           <StudySection />
         </Foldable>
         <TurnFigures
