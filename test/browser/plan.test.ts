@@ -1,12 +1,9 @@
-import { createRequire } from 'node:module';
-import type { AxeResults } from 'axe-core';
 import type { Locator, Page } from 'playwright-core';
 import { expect } from 'vitest';
 import { openFile, openSample, sample, savedText } from './craftFiles.ts';
 import { partOnPage, planeOnPage, verdictText } from './drawing.ts';
+import { findings } from './findings.ts';
 import { open, test } from './visit.ts';
-
-const axe = createRequire(import.meta.url).resolve('axe-core/axe.min.js');
 
 const planTab = (page: Page): Locator => page.getByRole('tab', { name: 'Plan', exact: true });
 const plan = (page: Page): Locator => page.getByRole('region', { name: 'Ballast plan' });
@@ -225,15 +222,4 @@ for (const colorScheme of ['light', 'dark'] as const) {
     await page.getByRole('button', { name: 'Do this' }).first().waitFor();
     expect(await findings(page)).toEqual([]);
   });
-}
-
-/** What axe-core 4.14 finds serious or critical, as "rule: where". */
-async function findings(page: Page): Promise<string[]> {
-  await page.addScriptTag({ path: axe });
-  const { violations } = await page.evaluate(() =>
-    (Reflect.get(window, 'axe') as { run(): Promise<AxeResults> }).run(),
-  );
-  return violations
-    .filter(({ impact }) => impact === 'serious' || impact === 'critical')
-    .flatMap(({ id, nodes }) => nodes.map(({ target }) => `${id}: ${target}`));
 }

@@ -1,12 +1,9 @@
-import { createRequire } from 'node:module';
-import type { AxeResults } from 'axe-core';
 import type { Locator, Page } from 'playwright-core';
 import { expect } from 'vitest';
 import { openSample, savedText } from './craftFiles.ts';
 import { planeOnPage } from './drawing.ts';
+import { findings } from './findings.ts';
 import { test } from './visit.ts';
-
-const axe = createRequire(import.meta.url).resolve('axe-core/axe.min.js');
 
 const turnTab = (page: Page): Locator => page.getByRole('tab', { name: 'Turn', exact: true });
 const plot = (page: Page): Locator => page.getByTestId('place-plot');
@@ -140,6 +137,23 @@ test('with another throttle the study is of before, and nothing moves', async ({
   expect(await savedText(page)).toBe(before);
 });
 
+test('whoever turns an arrow in yaw steers by it; the list goes back to the limit', async ({ visit }) => {
+  const page = await visit();
+  // Its first part is the thruster, which the first ] selects.
+  await openSample(page, 'worked-example');
+  await turnTab(page).click();
+  const steering = page.getByRole('combobox', { name: 'Turn with' });
+  expect(await steering.inputValue()).toBe('limit');
+  await page.getByTestId('above-view').focus();
+  for (const key of [']', 'Shift+Period']) await page.keyboard.press(key);
+  await expect.poll(() => steering.inputValue()).toBe('set');
+  expect(await steering.locator('option:checked').textContent()).toMatch(
+    /^The arrow as set, .* to starboard$/,
+  );
+  await steering.selectOption('limit');
+  expect(await steering.inputValue()).toBe('limit');
+});
+
 test('a craft without thrust is told so, and there is nothing to try', async ({ visit }) => {
   const page = await visit();
   await turnTab(page).click();
@@ -178,15 +192,4 @@ for (const viewport of [
     ).toEqual([]);
     expect((await plot(page).boundingBox())!.height).toBeGreaterThan(110);
   });
-}
-
-/** What axe-core 4.14 finds serious or critical, as "rule: where". */
-async function findings(page: Page): Promise<string[]> {
-  await page.addScriptTag({ path: axe });
-  const { violations } = await page.evaluate(() =>
-    (Reflect.get(window, 'axe') as { run(): Promise<AxeResults> }).run(),
-  );
-  return violations
-    .filter(({ impact }) => impact === 'serious' || impact === 'critical')
-    .flatMap(({ id, nodes }) => nodes.map(({ target }) => `${id}: ${target}`));
 }

@@ -18,7 +18,7 @@ export function MomentBars({ rows }: { rows: Readonly<Record<string, Row>> }) {
     <section className="moment" aria-label="Yaw moment and what makes it">
       <p>
         <strong>Yaw moment</strong> {rowText(has, units)}
-        {needed && `, needed ${rowText(needed, units)}`}
+        {needed?.value != null && `, needed ${rowText(needed, units)}`}
       </p>
       <ul>
         {SHARES.map(([name, key]) => {
