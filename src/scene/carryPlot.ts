@@ -6,6 +6,7 @@
 import type { CarrySpot, CurveToDraw } from '../report/planView.ts';
 import { formatNumber } from '../units/format.ts';
 import { unitOf } from '../units/units.ts';
+import { roundUp } from './roundScale.ts';
 import type { UnitSystem } from './subject.ts';
 import type { ScreenPoint, View } from './view.ts';
 
@@ -113,11 +114,6 @@ export function massTicks(most: number, units: UnitSystem): { at: number; label:
     label:
       i === count ? `${formatNumber(i * step, decimals)} ${unit.symbol}` : formatNumber(i * step, decimals),
   }));
-}
-
-function roundUp(least: number): number {
-  const power = 10 ** Math.floor(Math.log10(least));
-  return power * ([1, 2, 5, 10].find((n) => n * power >= least * (1 - 1e-9)) ?? 10);
 }
 
 export interface Stationed {

@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { expect, test } from 'vitest';
-import { CURVES, layPlace, nameSpot, type StudySpot, scaleOf } from '../../src/scene/placePlot.ts';
+import { CURVES, layPlace, nameSpot, type StudySpot } from '../../src/scene/placePlot.ts';
 import {
   besideWords,
   curveWords,
@@ -8,6 +8,7 @@ import {
   matterWords,
   stationSentence,
 } from '../../src/scene/placeWords.ts';
+import { scaleOf } from '../../src/scene/roundScale.ts';
 import { QUANTITIES, type Quantity } from '../../src/units/quantities.ts';
 
 const spot = (station: number, more: Partial<StudySpot> = {}): StudySpot => ({
