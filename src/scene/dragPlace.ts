@@ -38,14 +38,6 @@ export function draggedInSide(place: Place, hull: Hull, { du, dz, deadBand }: Si
   }
 }
 
-export interface FrontStep {
-  /** Where the piece was taken hold of and where the hand is now, seen from astern, m. */
-  readonly from: PlanePoint;
-  readonly to: PlanePoint;
-  /** Whether the piece in hand is the mirrored one of a pair. */
-  readonly mirrored: boolean;
-}
-
 /** A step in the front view as the hand goes: round the axis, rad clockwise; to starboard and up, m. */
 export interface FrontWay {
   readonly turn: number;
@@ -53,13 +45,14 @@ export interface FrontWay {
   readonly dz: number;
 }
 
-export const wayInFront = ({ from, to }: Pick<FrontStep, 'from' | 'to'>): FrontWay => ({
+/** From where a thing was taken hold of to where the hand is now, both seen from astern, m. */
+export const wayInFront = (from: PlanePoint, to: PlanePoint): FrontWay => ({
   turn: clockOf(to) - clockOf(from),
   du: to.u - from.u,
   dz: to.z - from.z,
 });
 
-/** Moved that way in the front view, each kind of place as far as it goes. */
+/** Moved that way in the front view, each kind of place as far as it goes; `mirrored`: by the mirrored piece of a pair. */
 export function movedInFront(place: Place, { turn, du, dz }: FrontWay, mirrored: boolean): Place {
   const sense = mirrored ? -1 : 1;
   switch (place.kind) {
@@ -73,10 +66,6 @@ export function movedInFront(place: Place, { turn, du, dz }: FrontWay, mirrored:
       return { ...place, y: place.y + sense * du, z: place.z + dz };
   }
 }
-
-/** Dragged in the front view. */
-export const draggedInFront = (place: Place, { from, to, mirrored }: FrontStep): Place =>
-  movedInFront(place, wayInFront({ from, to }), mirrored);
 
 /** Whether a piece is the mirrored one of a pair. */
 export const isMirrored = (copies: Copies, copy: number): boolean => copies.kind === 'pair' && copy === 1;

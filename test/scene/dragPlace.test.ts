@@ -3,12 +3,13 @@ import { expect, test } from 'vitest';
 import type { Place } from '../../src/craft/placeSchema.ts';
 import {
   atStation,
-  draggedInFront,
   draggedInSide,
   heldInFront,
   isMirrored,
+  movedInFront,
   sharedStep,
   stationOfPlace,
+  wayInFront,
 } from '../../src/scene/dragPlace.ts';
 import { onSection } from '../../src/scene/outline.ts';
 import { geometry } from './fixture.ts';
@@ -55,12 +56,10 @@ test('a small slip up or down leaves the drop, a larger one follows the hand', (
 
 test('round the skin the clock angle turns as far as the hand does, the other way for the mirrored piece', () => {
   const place: Place = { kind: 'skin', station: 1, clock: 1, standoff: 0.05 };
-  const [from, to] = [onSection(1, 0.5), onSection(1.4, 0.8)];
-  expect(draggedInFront(place, { from, to, mirrored: false })).toMatchObject({
-    clock: expect.closeTo(1.4, 9),
-  });
-  const port = { from: onSection(-1, 0.5), to: onSection(-1.4, 0.5), mirrored: true };
-  expect(draggedInFront(place, port)).toMatchObject({
+  const starboard = wayInFront(onSection(1, 0.5), onSection(1.4, 0.8));
+  expect(movedInFront(place, starboard, false)).toMatchObject({ clock: expect.closeTo(1.4, 9) });
+  const port = wayInFront(onSection(-1, 0.5), onSection(-1.4, 0.5));
+  expect(movedInFront(place, port, true)).toMatchObject({
     clock: expect.closeTo(1.4, 9),
     station: 1,
     standoff: 0.05,
@@ -69,16 +68,11 @@ test('round the skin the clock angle turns as far as the hand does, the other wa
 
 test('in the front view a free place goes athwart and up, mirrored for the port piece; the axis stays', () => {
   const place: Place = { kind: 'free', x: 1, y: 0.2, z: 0 };
-  const step = { from: { u: 0, z: 0 }, to: { u: 0.1, z: -0.3 } };
-  expect(draggedInFront(place, { ...step, mirrored: false })).toEqual({
-    kind: 'free',
-    x: 1,
-    y: 0.30000000000000004,
-    z: -0.3,
-  });
-  expect(draggedInFront(place, { ...step, mirrored: true })).toMatchObject({ y: 0.1 });
+  const way = wayInFront({ u: 0, z: 0 }, { u: 0.1, z: -0.3 });
+  expect(movedInFront(place, way, false)).toEqual({ ...place, y: expect.closeTo(0.3, 12), z: -0.3 });
+  expect(movedInFront(place, way, true)).toMatchObject({ y: 0.1 });
   const axis: Place = { kind: 'axis', station: 2 };
-  expect(draggedInFront(axis, { ...step, mirrored: false })).toBe(axis);
+  expect(movedInFront(axis, way, false)).toBe(axis);
   expect(heldInFront(axis)).toContain('axis');
   expect(heldInFront(place)).toBeNull();
 });

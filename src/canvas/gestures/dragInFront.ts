@@ -95,7 +95,7 @@ function followRound(
 ): { way: FrontWay; guide: Guide | null } {
   const { view } = ground.scene();
   const to = toWorld(view, hand);
-  const way = wayInFront({ from: toWorld(start.view, down), to });
+  const way = wayInFront(toWorld(start.view, down), to);
   const next = movedInFront(place, way, mirrored);
   if (place.kind !== 'skin' || next.kind !== 'skin') return { way, guide: null };
   const whole = 2 * Math.PI;
