@@ -16,7 +16,7 @@ const IN_THE_DRAWING: readonly Line[] = [
   ['← or → in the front view', 'Turn round the hull by 0.1°, with Shift by 1°'],
   [
     'Comma or full stop',
-    'Turn the thrust selected by 1°, with Shift by 10°: pitch in the side view, yaw from above',
+    'Turn the thrust selected by 1°, with Shift by 10°: pitch in the side view, yaw from above. The keys in the places where a US keyboard has them do so on every keyboard',
   ],
 ];
 

@@ -110,6 +110,31 @@ test('comma and full stop turn by 1°, with Shift by 10°: pitch in the side vie
   expect(thrustNudgeFor(stroke('x', 'KeyX'), 'side')).toBeNull();
 });
 
+// What the keys write, without and with Shift: the Windows layouts, from memory.
+test.each([
+  ['French, where the full stop needs Shift', [';', '.'], [':', '/']],
+  ['US', [',', '<'], ['.', '>']],
+  ['Dvorak', ['w', 'W'], ['v', 'V']],
+] as const)('both ways by 1° and by 10° in the places of the two keys: %s', (_, comma, period) => {
+  const turn = (key: string, code: string, shiftKey: boolean) =>
+    degrees(thrustNudgeFor({ key, code, shiftKey }, 'side')?.by ?? 0);
+  for (const [code, keys, sense] of [
+    ['Comma', comma, -1],
+    ['Period', period, 1],
+  ] as const) {
+    expect(turn(keys[0], code, false)).toBeCloseTo(sense, 9);
+    expect(turn(keys[1], code, true)).toBeCloseTo(10 * sense, 9);
+  }
+});
+
+test('where the two signs are on other keys, those turn by 1° too', () => {
+  const dvorak = (key: string, code: string, shiftKey = false) =>
+    thrustNudgeFor({ key, code, shiftKey }, 'side');
+  expect(dvorak(',', 'KeyW')?.by).toBeCloseTo(-DEGREE, 9);
+  expect(dvorak('.', 'KeyE')?.by).toBeCloseTo(DEGREE, 9);
+  expect(dvorak('>', 'KeyE', true)).toBeNull();
+});
+
 test('a burst of those keys is undone at once and stops at the limit; what cannot turn says so', () => {
   const session = new Session(craftWith({ yaw: fixed }));
   const turn = (way: 'yaw' | 'pitch', by: number) => {

@@ -15,14 +15,17 @@ export interface ThrustNudge {
 
 const WAYS: Readonly<Partial<Record<Facing, Way>>> = { side: 'pitch', above: 'yaw' };
 
-/** By the sign on the key; with Shift that is another one on every keyboard, so then by the key's place. */
+/** Which way the two keys turn, by their places: with Shift they write other signs, and not the same on every keyboard. */
+const PLACES: Readonly<Record<string, number>> = { Comma: -1, Period: 1 };
+/** By what they write without Shift, for a keyboard that has those signs in other places. */
+const SIGNS: Readonly<Record<string, number>> = { ',': -1, '.': 1 };
+
 export function thrustNudgeFor(
   { key, code, shiftKey }: { key: string; code: string; shiftKey: boolean },
   facing: Facing,
 ): ThrustNudge | null {
   const way = WAYS[facing];
-  const is = (sign: string, place: string) => key === sign || (shiftKey && code === place);
-  const sense = is('.', 'Period') ? 1 : is(',', 'Comma') ? -1 : 0;
+  const sense = PLACES[code] ?? (shiftKey ? 0 : (SIGNS[key] ?? 0));
   return way && sense !== 0 ? { way, by: sense * STEP * (shiftKey ? 10 : 1) } : null;
 }
 
