@@ -160,7 +160,7 @@ export const targetsSchema = z.strictObject({
     description: 'Longest time for the first 90° of yaw from rest; null when none is asked for',
   }),
   sideGust: q.number('m/s', 'Side gust to be held', 0, 50).nullable().meta({
-    description: 'Side gust that the thrusters have to hold in cruise; null when none is asked for',
+    description: 'Side gust that the thrusters have to hold at rest; null when none is asked for',
   }),
 });
 

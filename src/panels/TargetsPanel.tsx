@@ -100,7 +100,7 @@ function TargetFields() {
         quantity="speed"
         units={units}
         empty="not asked for"
-        hint="In cruise"
+        hint="At rest"
         onCommit={(next, run) => set('side gust', { sideGust: next }, run)}
         onClear={() => set('side gust', { sideGust: null })}
       />

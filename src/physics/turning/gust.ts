@@ -7,6 +7,9 @@
  * of everything in motion.ts: Munk's moment, fins, cross-flow, drag and thrust. It is held when N_V ≥ 0 with the
  * thrusters hardest to starboard and N_V ≤ 0 hardest to port: somewhere between they balance it. The gust is steady, as
  * wide as the craft, and strikes before the craft has drifted off with it; the speed ahead is kept.
+ *
+ * At rest (u = 0) cross-flow and fins are all that yaws it. With way on Munk's moment comes on top, soon many times as
+ * great: a real hull has less of it than flow without friction gives (from memory), so that the gust held in cruise errs low.
  */
 import { valueOrNull } from '../../numeric/outcome.ts';
 import { findRoot } from '../../numeric/roots.ts';

@@ -4,9 +4,9 @@
  *   moment  Σ T cos ε (X sin δ − Y cos δ) about a point from which the thruster lies X ahead and Y to starboard
  *   arm     Σ T |lever| ÷ Σ T over the thrusters that can yaw the craft: lever the distance aft of the point of one that turns in
  *           yaw, the side of one of a pair throttled apart; + when those that turn sit more aft than ahead
- *   shares  moment = vectoring · arm · thrust × (all thrust at full throttle) × (longest arm within the hull):
+ *   shares  moment = vectoring · arm · thrust × (all thrust at full throttle) × (longest arm):
  *           vectoring  moment ÷ (Σ T |arm|), the sine of the angle for a single thruster
- *           arm        |arm| ÷ longest distance from the CG to an end of the hull
+ *           arm        |arm| ÷ longest arm: from the CG to the farther end of the hull, or its own where that is longer
  *           thrust     Σ T ÷ all thrust at full throttle
  *
  * T = throttle · static thrust, N. What a thruster adds that the helm has no hold on (fixed and off the centreline) counts in
@@ -90,13 +90,13 @@ function sharesOf(craft: TurningCraft, throttle: number, { armSize, steered }: A
   const greatest = thrust * armSize;
   return {
     vectoring: greatest > 0 ? steered / greatest : 0,
-    arm: armSize / longestArm(craft),
+    arm: armSize / longestArm(craft, armSize),
     thrust: all > 0 ? thrust / all : 0,
   };
 }
 
-/** From the CG to the farther end of the hull, m. */
-export function longestArm({ length, cb, mass }: TurningCraft): number {
+/** From the CG to the farther end of the hull, or the arm there is where a thruster stands beyond it, m. */
+export function longestArm({ length, cb, mass }: TurningCraft, today: number): number {
   const cg = cb - mass.cgAhead;
-  return Math.max(cg, length - cg);
+  return Math.max(cg, length - cg, today);
 }

@@ -4,7 +4,7 @@
  *
  *   turn time   thrust is scaled until the first 90° from rest takes just so long; needed moment = scale × available
  *   side gust   the greatest ratio of the air's moment about the virtual mass centre to what the thrusters have against
- *               it, over all gusts up to the one asked for, in cruise at today's speed
+ *               it, over all gusts up to the one asked for, at rest
  */
 import { infeasible, type Outcome, solved } from '../../numeric/outcome.ts';
 import { say } from '../../units/sentence.ts';
@@ -49,18 +49,16 @@ export interface Targets {
   readonly sideGust: number | null;
 }
 
-/** The gust is to be held at that speed ahead, m/s. */
 export function needsOf(
   craft: TurningCraft,
   { turnTime, sideGust }: Targets,
   throttle: number,
-  cruiseSpeed: number,
 ): Needs | null {
   if (turnTime === null && sideGust === null) return null;
   const { yawMoment, arm } = leverageOf(craft, throttle);
   const need = (asked: number, beyond: Beyond, available: number) =>
     needOf(craft, asked, beyond, available, Math.abs(arm));
-  const gustOn = (each: TurningCraft, gust: number) => hardestGust(each, throttle, cruiseSpeed, gust);
+  const gustOn = (each: TurningCraft, gust: number) => hardestGust(each, throttle, 0, gust);
   return {
     turnTime: turnTime === null ? null : need(turnTime, turnBeyond(throttle, turnTime), yawMoment),
     sideGust:
@@ -121,11 +119,11 @@ function vectorOf(craft: TurningCraft, beyond: Beyond): Outcome<number> {
 function armOf(craft: TurningCraft, beyond: Beyond, today: number): Outcome<number> {
   if (!craft.thrusters.some(yaws))
     return infeasible('No thruster yaws the craft, so there is no arm to lengthen.');
-  const most = Math.max(longestArm(craft), today);
+  const most = longestArm(craft, today);
   return leastOf(
     (arm) => beyond(withLongerArm(craft, arm - today)),
     { least: 0, today, most },
-    `Even an arm of ${say(most, 'length')}, to the end of the hull, does not do it.`,
+    `Even an arm of ${say(most, 'length')}, the longest there is room for, does not do it.`,
   );
 }
 

@@ -26,11 +26,11 @@ export interface Turn {
   readonly fromCruise: Outcome<QuarterTurn>;
   readonly stop: Outcome<YawStop>;
   readonly steady: Outcome<SteadyTurn>;
-  /** Side gust held in cruise and at rest, m/s; 50 stands for that or more. */
+  /** Side gust held at rest, and at `cruiseSpeed`, m/s; 50 stands for that or more. */
   readonly gust: Outcome<number>;
-  readonly gustAtRest: Outcome<number>;
+  readonly gustCruise: Outcome<number>;
   readonly glide: Glide;
-  /** From which `fromCruise` begins, m/s. */
+  /** From which `fromCruise` begins and in which the gust strikes, m/s. */
   readonly cruiseSpeed: number;
   /** One sentence each. */
   readonly cautions: readonly string[];
@@ -57,13 +57,13 @@ function turnOfCraft(craft: TurningCraft, asked: TurnAsked, { craft: { targets }
   const fromCruise = quarterTurn(craft, straightAt(cruiseSpeed, straight), turn);
   const steady = steadyTurn(craft, straight, turn, cruiseSpeed);
   return {
-    authority: { ...leverageOf(craft, throttle), need: needsOf(craft, targets, throttle, cruiseSpeed) },
+    authority: { ...leverageOf(craft, throttle), need: needsOf(craft, targets, throttle) },
     fromRest: mapped(fromRest, (sailed) => quarterTurnOf(craft, sailed)),
     fromCruise: mapped(fromCruise, (sailed) => quarterTurnOf(craft, sailed)),
     stop: fromCruise.status === 'solved' ? yawStop(craft, fromCruise.value, commands) : fromCruise,
     steady: mapped(steady, (settled) => settled.turn),
-    gust: held(craft, throttle, cruiseSpeed),
-    gustAtRest: held(craft, throttle, 0),
+    gust: held(craft, throttle, 0),
+    gustCruise: held(craft, throttle, cruiseSpeed),
     glide: glideOf(craft, fromCruise, cruiseSpeed),
     cruiseSpeed,
     cautions: turnCautions(craft, asked, turn, steady),

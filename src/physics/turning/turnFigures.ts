@@ -15,9 +15,8 @@ export interface TurnFigures {
   readonly timeTo90: number | null;
   /** m */
   readonly radius: number | null;
-  /** In cruise and at rest, m/s. */
+  /** At rest, m/s. */
   readonly gustHeld: number;
-  readonly gustAtRest: number;
 }
 
 export function turnFigures(state: CraftState, asked: TurnAsked): Outcome<TurnFigures> {
@@ -32,7 +31,6 @@ export function turnFigures(state: CraftState, asked: TurnAsked): Outcome<TurnFi
     arm: leverageOf(craft, asked.throttle).arm,
     timeTo90: quarter.status === 'solved' ? quarter.value.trajectory.end : null,
     radius: steady.status === 'solved' ? steady.value.turn.radius : null,
-    gustHeld: gustHeld(craft, asked.throttle, speed),
-    gustAtRest: gustHeld(craft, asked.throttle, 0),
+    gustHeld: gustHeld(craft, asked.throttle, 0),
   });
 }

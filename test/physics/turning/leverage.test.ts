@@ -19,12 +19,20 @@ import {
 test('one thruster in the tail: moment = thrust × distance aft of the CG × sine of its limit', () => {
   const craft = tailCraft();
   const { arm, yawMoment, shares } = leverageOf(craft, 0.5);
-  const aft = 2.95 - (craft.cb - craft.mass.cgAhead);
+  const cg = craft.cb - craft.mass.cgAhead;
+  const aft = 2.95 - cg;
   near(arm, aft, 1e-12);
   near(yawMoment, 0.5 * 0.6 * aft * Math.sin(40 * degrees), 1e-12);
   near(shares.vectoring, Math.sin(40 * degrees), 1e-12);
   near(shares.thrust, 0.5, 1e-12);
-  near(shares.arm, aft / longestArm(craft), 1e-12);
+  near(shares.arm, aft / Math.max(cg, 3 - cg), 1e-12);
+});
+
+test('a thruster further out than the hull goes has the longest arm there is: its own', () => {
+  const shareAt = (station: number) =>
+    leverageOf(turning(craftWith([battery, tailThruster(station), fins()])), 1).shares.arm;
+  for (const station of [-1, 4]) near(shareAt(station), 1, 1e-12);
+  expect(shareAt(2.9)).toBeLessThan(1);
 });
 
 test('a pair throttled apart has its side for an arm', () => {
@@ -67,10 +75,10 @@ test('the moment is the product of its shares and of the greatest conceivable', 
   fc.assert(
     fc.property(anyCraft, fc.double({ min: 0.01, max: 1, noNaN: true }), (file, throttle) => {
       const craft = turning(file);
-      const { yawMoment, shares } = leverageOf(craft, throttle);
+      const { arm, yawMoment, shares } = leverageOf(craft, throttle);
       if (!craft.thrusters.every(yaws)) return;
       const all = craft.thrusters.reduce((sum, { staticThrust }) => sum + staticThrust, 0);
-      const product = shares.vectoring * shares.arm * shares.thrust * all * longestArm(craft);
+      const product = shares.vectoring * shares.arm * shares.thrust * all * longestArm(craft, Math.abs(arm));
       expect(Math.abs(product - yawMoment)).toBeLessThan(1e-12);
     }),
   );
