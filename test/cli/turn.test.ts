@@ -37,7 +37,9 @@ const KEYS = [
   'turn.speed',
   'turn.vector',
   'turn.gustHeld',
-  'turn.gustHeldAtRest',
+  'turn.gustHeldCruise',
+  'turn.widestRadius',
+  'turn.widestSpeed',
   'turn.shareVectoring',
   'turn.shareArm',
   'turn.shareThrust',
@@ -155,7 +157,7 @@ test('throttle, angle and speed reach the physics', () => {
 test('headline first, then verdicts, figures, propellers, notes and cautions with the hazards', () => {
   const { out } = turn('museum-atrium');
   const unfolded = out.replace(/\s+/g, ' ');
-  expect(unfolded).toMatch(/^Museum atrium camera craft With Tail thruster at 4\.290 m the arm is /);
+  expect(unfolded).toMatch(/^Museum atrium camera craft With the thruster at 4\.290 m the arm is /);
   const titles = ['Verdicts', 'Turning', 'Speed', 'Pitch', 'Inflow', 'Propellers', 'Notes', 'Cautions'];
   const places = titles.map((title) => out.search(new RegExp(`^${title}`, 'm')));
   expect(places.every((place) => place > 0)).toBe(true);

@@ -12,6 +12,18 @@ test('very small and negative quantities are read too', () => {
   expect(inUnits(say(-0.0125, 'mass'), 'metric')).toBe('\u221212.5 g');
 });
 
+test('the article goes by how the number is read', () => {
+  const gust = (speed: number) => inUnits(`a ${say(speed, 'speed')} gust`, 'metric');
+  const read = [2.4, 8.2, 11, 18.5, 80, 110, 0.8].map(gust);
+  expect(read.filter((each) => each.startsWith('an '))).toEqual([
+    'an 8.20 m/s gust',
+    'an 11.00 m/s gust',
+    'an 18.50 m/s gust',
+    'an 80.00 m/s gust',
+  ]);
+  expect(inUnits(`extra ${say(8, 'speed')}`, 'metric')).toBe('extra 8.00 m/s');
+});
+
 test('braces that hold no quantity stay as they are', () => {
   expect(inUnits('a {note} of mine', 'metric')).toBe('a {note} of mine');
 });

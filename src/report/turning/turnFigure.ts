@@ -31,7 +31,7 @@ const FIGURES = {
   'turn.shareArm': {
     label: 'Left by the arm',
     quantity: 'fraction',
-    why: 'Of the longest arm that the hull has room for.',
+    why: 'Of the longest arm that the hull has room for, or of its own where that is longer.',
   },
   'turn.shareThrust': {
     label: 'Left by thrust and throttle',
@@ -60,12 +60,18 @@ const FIGURES = {
   'turn.yawRate': { label: 'Yaw rate in the turn', quantity: 'yawRate', why: '+ to starboard.' },
   'turn.speed': { label: 'Speed in the turn', quantity: 'speed', why: 'Along the path.' },
   'turn.vector': { label: 'Thrust turned in yaw by', quantity: 'angle', why: '+ thrust to starboard.' },
-  'turn.gustHeld': {
-    label: 'Side gust held in cruise',
-    quantity: 'speed',
-    why: 'The strongest steady gust square from the side in which it can keep its heading.',
+  'turn.widestRadius': {
+    label: 'Widest circle that holds by itself',
+    quantity: 'pathLength',
+    why: 'Its radius, with a little steering; for anything wider it is steered against the Munk moment.',
   },
-  'turn.gustHeldAtRest': { label: 'Side gust held at rest', quantity: 'speed' },
+  'turn.widestSpeed': { label: 'Speed in that circle', quantity: 'speed', why: 'Along the path.' },
+  'turn.gustHeld': {
+    label: 'Side gust held at rest',
+    quantity: 'speed',
+    why: 'The strongest steady gust square from the side in which it can keep its heading; it still drifts.',
+  },
+  'turn.gustHeldCruise': { label: 'Side gust held in cruise', quantity: 'speed' },
   'turn.neededMoment': {
     label: 'Yaw moment needed for the turn time',
     quantity: 'torque',

@@ -1,29 +1,31 @@
 /** How the craft turns, in one sentence; and what the places of its thrusters cost. In SI, for `inUnits`. */
+import { type Craft, listed } from '../../craft/craft.ts';
 import type { Outcome } from '../../numeric/outcome.ts';
 import type { Thruster } from '../../physics/thrust/thrusters.ts';
 import { STRONGEST } from '../../physics/turning/gust.ts';
 import { yaws } from '../../physics/turning/leverage.ts';
-import type { Turn } from '../../physics/turning/turn.ts';
+import type { SteadyTurn, Turn } from '../../physics/turning/turn.ts';
 import { say } from '../../units/sentence.ts';
 import { joined } from '../planWords.ts';
 import { insignificant, type Rows } from '../rows.ts';
 import type { PlaceCost } from './costs.ts';
 
-/** "With Tail thruster at 4.29 m the arm is 2.28 m: 90° from rest in 3.1 s, radius 0.70 m at 3.0 m/s, holds a gust of 0.4 m/s from the side in cruise, 2.4 m/s at rest." */
-export function turnHeadline(thrusters: readonly Thruster[], turn: Outcome<Turn>, rows: Rows): string {
+/** "With the thruster at 4.29 m the arm is 2.28 m: 90° from rest in 3.1 s, radius 1.70 m at 1.00 m/s, holds a 2.40 m/s gust from the side." */
+export function turnHeadline(
+  craft: Craft,
+  thrusters: readonly Thruster[],
+  turn: Outcome<Turn>,
+  rows: Rows,
+): string {
   const arm = rows['turn.arm']!;
   if (arm.value === null || turn.status === 'infeasible') return arm.why || why(turn);
-  const { fromRest, steady, gust, gustAtRest } = turn.value;
+  const { fromRest, steady, gust } = turn.value;
   const does = [
     ...(fromRest.status === 'solved' ? [`90° from rest in ${say(fromRest.value.time, 'time')}`] : []),
-    ...(steady.status === 'solved'
-      ? [`radius ${say(steady.value.radius, 'pathLength')} at ${say(steady.value.speed, 'speed')}`]
-      : []),
-    ...(gust.status === 'solved' && gustAtRest.status === 'solved'
-      ? [gustWords(gust.value, gustAtRest.value)]
-      : []),
+    ...(steady.status === 'solved' ? [steadyWords(steady.value)] : []),
+    ...(gust.status === 'solved' ? [gustWords(gust.value)] : []),
   ];
-  const stands = `With ${placesOf(thrusters)} the arm is ${say(Math.abs(arm.value), 'length')}${sideOf(thrusters, arm.value)}`;
+  const stands = `With ${placesOf(craft, thrusters)} the arm is ${say(Math.abs(arm.value), 'length')}${sideOf(thrusters, arm.value)}`;
   const slow = fromRest.status === 'infeasible' ? ` ${why(fromRest)}` : '';
   return `${stands}: ${does.join(', ')}.${slow}`;
 }
@@ -31,10 +33,13 @@ export function turnHeadline(thrusters: readonly Thruster[], turn: Outcome<Turn>
 const why = (outcome: Outcome<unknown>): string =>
   outcome.status === 'solved' ? '' : [outcome.why, outcome.remedy].filter(Boolean).join(' ');
 
-/** "Tail thruster at 4.29 m and Side thrusters at 1.50 m", of those that can yaw the craft. */
-function placesOf(thrusters: readonly Thruster[]): string {
+/** "Tail thruster at 4.29 m and Side thrusters at 1.50 m", of those that can yaw the craft; "the thruster at 4.29 m" of the only one. */
+function placesOf(craft: Craft, thrusters: readonly Thruster[]): string {
+  const only =
+    listed(craft.parts).filter(({ kind, thruster }) => kind === 'thruster' || thruster).length === 1;
+  const own = only && (thrusters.length > 1 ? 'the thrusters' : 'the thruster');
   const first = thrusters.filter((thruster) => yaws(thruster) && thruster.copy === 0);
-  return joined(first.map(({ name, at }) => `${name} at ${say(at[0], 'length')}`));
+  return joined(first.map(({ name, at }) => `${own || name} at ${say(at[0], 'length')}`));
 }
 
 /** Ahead of the CG the arm has another sign; a pair throttled apart has its lever to the side. */
@@ -43,13 +48,21 @@ function sideOf(thrusters: readonly Thruster[], arm: number): string {
   return thrusters.filter(yaws).every(({ differ }) => differ !== 0) ? ' to the side' : '';
 }
 
-/** m/s, in cruise and at rest. */
-function gustWords(cruise: number, rest: number): string {
-  const none = (held: number) => insignificant(held, 'speed');
-  const speed = (held: number) => `${say(held, 'speed')}${held >= STRONGEST ? ' and more' : ''}`;
-  if (none(cruise) && none(rest)) return 'holds no gust from the side';
-  if (none(cruise)) return `holds no gust from the side in cruise, one of ${speed(rest)} at rest`;
-  return `holds a gust of ${speed(cruise)} from the side in cruise, ${none(rest) ? 'none' : speed(rest)} at rest`;
+/** A radius below this share of the hull's length is told as none. */
+const ON_THE_SPOT = 0.25;
+
+const steadyWords = ({ lengths, radius, speed }: SteadyTurn): string =>
+  lengths < ON_THE_SPOT
+    ? 'turns almost on the spot'
+    : `radius ${say(radius, 'pathLength')} at ${say(speed, 'speed')}`;
+
+/** m/s, at rest. */
+function gustWords(held: number): string {
+  if (insignificant(held, 'speed')) return 'holds no gust from the side';
+  const speed = say(held, 'speed');
+  return held >= STRONGEST
+    ? `holds gusts of ${speed} and more from the side`
+    : `holds a ${speed} gust from the side`;
 }
 
 /** "It calls for 96 g of lead and 8 g of wire." One sentence a thruster; none for a place that costs nothing. */

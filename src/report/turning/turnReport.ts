@@ -31,6 +31,7 @@ import { TURN_KEYS } from './turnFigure.ts';
 import { costWords, turnHeadline } from './turnHeadline.ts';
 import { turnRows } from './turnRows.ts';
 import { type PlainTurnVerdict, type TurnVerdict, turnVerdictsOf } from './turnVerdicts.ts';
+import { widestCircle, widestNotes, widestRows } from './widest.ts';
 
 /** What is cheap enough to follow a drag. */
 export interface TurnFigures {
@@ -159,26 +160,29 @@ function reportOf(state: CraftState, asked: TurnAsked): PlainReport {
   const inflows =
     cruise.value === null ? infeasible(cruise.why) : inflowsAt(state, cruise.value, asked.throttle);
   const climbs = curveOf(ifDriven(state, () => solved(climbCurve(state, asked.throttle))));
+  const steadies = curveOf(ifDriven(state, () => steadyCurve(state, asked)));
+  const widest = widestCircle(turn, steadies);
   const rows = inOrder({
     ...figures.rows,
     ...turnRows(turn, figures.rows['thrust.static']!.value ?? 0),
+    ...widestRows(widest),
     ...climbRows(state, asked.throttle, climbs),
     ...inflowRows(inflows, thrusters),
     ...hullAirRows(state),
   });
   const verdicts = turnVerdictsOf(craft.targets, thrusters, turn, rows);
-  const headline = turnHeadline(thrusters, turn, rows);
+  const headline = turnHeadline(craft, thrusters, turn, rows);
   return {
     ...figures,
     rows,
     verdicts,
     met: verdicts.every(({ state: each }) => each === 'met'),
     headline,
-    notes: turn.status === 'solved' ? turn.value.glide.notes : [],
+    notes: [...widestNotes(widest), ...(turn.status === 'solved' ? turn.value.glide.notes : [])],
     cautions: turnCautions(state, thrusters, turn).filter((each) => each !== headline),
     turn: valueOrNull(turn),
     speedCurve: curveOf(ifDriven(state, () => solved(speedCurve(state, { throttle: asked.throttle })))),
-    steadyCurve: curveOf(ifDriven(state, () => steadyCurve(state, asked))),
+    steadyCurve: steadies,
     climbCurve: climbs,
     propellers: propellerLines(state),
     inflows: valueOrNull(inflows)?.each ?? [],

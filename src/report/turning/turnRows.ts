@@ -1,6 +1,7 @@
 /** How the craft turns, and what is left when the throttle is cut. */
 import { type Outcome, solved } from '../../numeric/outcome.ts';
 import type { Need, Turn } from '../../physics/turning/turn.ts';
+import { say } from '../../units/sentence.ts';
 import type { Rows } from '../rows.ts';
 import { rowsFrom } from './turnFigure.ts';
 
@@ -37,13 +38,19 @@ export function turnRows(turn: Outcome<Turn>, thrust: number): Rows {
       { 'turn.gustHeld': (speed) => speed },
     ),
     ...rowsFrom(
-      part(({ gustAtRest }) => gustAtRest),
-      { 'turn.gustHeldAtRest': (speed) => speed },
+      part(({ gustCruise }) => gustCruise),
+      { 'turn.gustHeldCruise': (speed) => speed },
+      { 'turn.gustHeldCruise': { why: cruiseWords(turn) } },
     ),
     ...needRows(turn, thrust),
     ...glideRows(turn),
   };
 }
+
+const cruiseWords = (turn: Outcome<Turn>): string =>
+  turn.status === 'solved'
+    ? `At ${say(turn.value.cruiseSpeed, 'speed')} ahead, with the Munk moment on top.`
+    : '';
 
 function needRows(turn: Outcome<Turn>, thrust: number): Rows {
   const need = turn.status === 'solved' ? turn.value.authority.need : null;

@@ -65,7 +65,7 @@ function gustVerdict(least: number, told: boolean, rows: Rows): Bare {
     key: 'sideGust',
     title: 'Side gust',
     ...judged(row, margin, told, ['holds it', 'turned by it']),
-    target: `at least ${say(least, 'speed')}`,
+    target: `at least ${say(least, 'speed')} at rest`,
     working: workingWith(rows, 'turn.gustHeld', AGAINST_GUST),
   };
 }

@@ -37,7 +37,7 @@ export const TURNING_RECIPES: Recipes<Turning> = {
     source: 'Definition: vectoring × arm × thrust make the moment.',
   },
   'turn.shareArm': {
-    formula: 'arm ÷ longest distance from the CG to an end of the hull',
+    formula: 'arm ÷ the longest: from the CG to the farther end of the hull, or its own where that is longer',
     from: ['turn.arm'],
     source: 'Definition: vectoring × arm × thrust make the moment.',
   },
@@ -92,16 +92,27 @@ export const TURNING_RECIPES: Recipes<Turning> = {
     from: [],
     source: 'The craft as entered.',
   },
+  'turn.widestRadius': {
+    formula: 'greatest √(u² + v²) ÷ |r| of the steady turns that hold, from a little of the steering to all',
+    from: ['turn.widestSpeed', 'turn.radius', 'glide.munk', 'glide.fins'],
+    source: `${STEADY} That they hold after Routh and Hurwitz.`,
+  },
+  'turn.widestSpeed': {
+    formula: '√(u² + v²) of that steady turn',
+    from: ['turn.widestRadius', 'speed.cruise'],
+    source: STEADY,
+  },
   'turn.gustHeld': {
     formula:
       'the greatest side gust up to which the thrusters can make the moment about the virtual mass centre nil',
-    from: ['turn.virtualMoment', 'speed.cruise', 'added.k1', 'added.k2'],
-    source: 'Munk, NACA TR 184 (1924); cross-flow by strips; fins after Helmbold (1942).',
-  },
-  'turn.gustHeldAtRest': {
-    formula: 'the same without way on',
     from: ['turn.virtualMoment'],
     source: 'Cross-flow by strips; fins square to the air.',
+  },
+  'turn.gustHeldCruise': {
+    formula: 'the same with way on, the Munk moment −(k2 − k1) ρV u v on top',
+    from: ['turn.virtualMoment', 'speed.cruise', 'added.k1', 'added.k2'],
+    source:
+      'Munk, NACA TR 184 (1924); cross-flow by strips; fins after Helmbold (1942). A real hull has less of the Munk moment than flow without friction gives (from memory), so the figure errs low.',
   },
   'turn.neededMoment': {
     formula: 'moment there is × the factor on thrust with which the first 90° take just the time asked for',
@@ -125,7 +136,7 @@ export const TURNING_RECIPES: Recipes<Turning> = {
   },
   'turn.gustMoment': {
     formula: 'what the air gives at worst, over all gusts up to the one asked for',
-    from: ['turn.gustHeld', 'turn.virtualMoment', 'speed.cruise'],
+    from: ['turn.gustHeld', 'turn.virtualMoment'],
     source: ALONE,
   },
   'turn.gustThrust': {

@@ -5,6 +5,7 @@ import { TURN_KEYS } from '../../../src/report/turning/turnFigure.ts';
 import { turnFigures, turnReport } from '../../../src/report/turning/turnReport.ts';
 import type { TurnAsked } from '../../../src/report/turning/turns.ts';
 import { turnWorkingOf } from '../../../src/report/turning/turnWorkings.ts';
+import { partOf } from '../../edit/craftFixture.ts';
 import { craftFrom, samples } from '../../samples/readSamples.ts';
 import {
   DEGREE,
@@ -15,6 +16,7 @@ import {
   thrusterData,
   unknownCraft,
   upTo,
+  withParts,
 } from './turningCrafts.ts';
 
 const FULL: TurnAsked = { throttle: 1, vector: null, speed: null };
@@ -133,11 +135,73 @@ test('the couples of cruise add up to nil', () => {
 
 test('the headline names place, arm, time, radius and gusts', () => {
   expect(reportOf(tailCraft()).headline).toMatch(
-    /^With Tail thruster at 3\.050 m the arm is \d\.\d+ m: 90° from rest in [\d.]+ s, radius [\d.]+ m at [\d.]+ m\/s, holds a gust of [\d.]+ m\/s from the side in cruise, [\d.]+ m\/s at rest\.$/,
+    /^With the thruster at 3\.050 m the arm is \d\.\d+ m: 90° from rest in [\d.]+ s, turns almost on the spot, holds a [\d.]+ m\/s gust from the side\.$/,
+  );
+  const slow = tailCraft({ thruster: thrusterData({ yaw: upTo(10) }) });
+  expect(reportOf(slow).headline).toMatch(
+    /, radius [\d.]+ m at [\d.]+ m\/s, holds a [\d.]+ m\/s gust from the side\.$/,
   );
   expect(reportOf(pairCraft()).headline).toContain(
-    'With Side thrusters at 1.500 m the arm is 0.600 m to the side:',
+    'With the thrusters at 1.500 m the arm is 0.600 m to the side:',
   );
+});
+
+test('of several thrusters each that yaws it has its name, of the only one it needs none', () => {
+  const pusher = partOf('pusher', { name: 'Pusher', thruster: thrusterData() });
+  const spare = partOf('spare', { name: 'Spare', kind: 'thruster' });
+  for (const other of [pusher, spare]) {
+    expect(reportOf(withParts(tailCraft(), other)).headline).toMatch(
+      /^With Tail thruster at 3\.050 m the arm is /,
+    );
+  }
+});
+
+test('the gust is held at rest; in cruise the Munk moment leaves far less, and the speed of it is said', () => {
+  const rows = (speed: number | null) => reportOf(tailCraft(), { ...FULL, speed }).rows;
+  const { 'turn.gustHeld': rest, 'turn.gustHeldCruise': cruise, 'speed.cruise': way } = rows(null);
+  expect(cruise!.value!).toBeLessThan(rest!.value! / 4);
+  expect(cruise!.why).toBe(`At ${way!.value!.toFixed(2)} m/s ahead, with the Munk moment on top.`);
+  expect(rows(0)['turn.gustHeldCruise']!.value).toBe(rest!.value);
+  expect(rows(0.5)['turn.gustHeld']!.value).toBe(rest!.value);
+  expect(rows(0.5)['turn.gustHeldCruise']!.value!).toBeGreaterThan(cruise!.value!);
+});
+
+test('the target of the side gust is judged at rest', () => {
+  const rest = value(tailCraft(), 'turn.gustHeld');
+  const judged = (sideGust: number) => {
+    const craft = tailCraft();
+    return reportOf({ ...craft, targets: { ...craft.targets, sideGust } }).verdicts[0]!;
+  };
+  expect(judged(0.99 * rest)).toMatchObject({ key: 'sideGust', state: 'met', word: 'holds it' });
+  expect(judged(1.01 * rest)).toMatchObject({ state: 'missed', target: expect.stringMatching(/ at rest$/) });
+});
+
+test('the widest circle that holds, of a craft that does not keep its heading; of one that does there is none', () => {
+  const { rows, steadyCurve, notes } = reportOf(tailCraft());
+  const radii = steadyCurve.flatMap(({ turn }) => (turn.status === 'solved' ? [turn.value.radius] : []));
+  const widest = rows['turn.widestRadius']!;
+  expect(widest.value).toBe(Math.max(...radii));
+  expect(widest.value!).toBeGreaterThan(rows['turn.radius']!.value!);
+  expect(notes[0]).toBe(
+    `Circles wider than about ${widest.value!.toFixed(2)} m do not hold by themselves: those, and straight flight, have to be steered against the Munk moment.`,
+  );
+  const steady = withParts(
+    tailCraft(),
+    partOf('fins', {
+      kind: 'fin',
+      mass: 0.024,
+      place: { kind: 'skin', station: 2.62, clock: Math.PI / 4, standoff: 0.1 },
+      copies: { kind: 'ring', count: 4 },
+      fin: { area: 0.8, aspectRatio: 1.2 },
+    }),
+  );
+  const keeping = reportOf(steady);
+  expect(keeping.turn!.glide.stability.keepsHeading).toBe(true);
+  expect(keeping.rows['turn.widestRadius']).toMatchObject({
+    value: null,
+    why: expect.stringMatching(/keeps its heading/),
+  });
+  expect(keeping.notes.join(' ')).not.toMatch(/Circles wider/);
 });
 
 test('what cannot be: no figures, no steering, no thruster, each with its sentence', () => {
