@@ -9,6 +9,7 @@ import { topSpeed } from '../../src/physics/thrust/speed.ts';
 import { type Thruster, thrustersOf } from '../../src/physics/thrust/thrusters.ts';
 import { type Turn, turnOf } from '../../src/physics/turning/turn.ts';
 import { assess } from '../../src/report/assess.ts';
+import { turnReport } from '../../src/report/turning/turnReport.ts';
 import { craftFrom, sampleCraft, samples } from './readSamples.ts';
 
 const G = 9.80665;
@@ -113,6 +114,25 @@ test('it needs no lead, because its battery hangs aft of the CB; forward of it, 
 });
 
 const vault = sampleCraft('vault-inspector');
+
+test.each([
+  ['museum-atrium', 2, 'met'],
+  ['aviary-counter', 1.5, 'met'],
+  ['vault-inspector', 0.8, 'met'],
+  ['warehouse-stock', 1.5, 'missed'],
+] as const)(
+  '%s: the gust of %d m/s of which its notes speak is %s at rest, with a margin',
+  (name, gust, state) => {
+    const craft = sampleCraft(name);
+    expect(craft.targets.sideGust).toBe(gust);
+    expect(craft.notes).toContain(`${gust} m/s`);
+    const { verdicts } = turnReport(craft, { throttle: 1, vector: null, speed: null }, 'metric');
+    const verdict = verdicts.find(({ key }) => key === 'sideGust')!;
+    expect(verdict.state).toBe(state);
+    expect(Math.abs(verdict.margin!)).toBeGreaterThan(0.1 * gust);
+  },
+);
+
 const upright = (craft: Craft): Thruster[] =>
   thrustersOf(stateOf(craft)).filter(({ pitch }) => pitch.most >= Math.PI / 2);
 
