@@ -22,6 +22,9 @@ const offline = (): Plugin => ({
   },
 });
 
+/** HiGHS asks for it when it runs in Node, and there alone: in a browser nothing is missing. Any other module is told of. */
+const ASKED_IN_NODE = /^Module "node:module" has been externalized .*[\\/]highs[\\/]build[\\/]/;
+
 export default defineConfig({
   root: 'src/app',
   base: './',
@@ -32,6 +35,11 @@ export default defineConfig({
     target: 'es2022',
     reportCompressedSize: false,
     chunkSizeWarningLimit: 1000,
+    rolldownOptions: {
+      onLog: (level, log, tell) => {
+        if (!ASKED_IN_NODE.test(log.message)) tell(level, log);
+      },
+    },
   },
   // A port of its own: the work is kept by address, and other programs are served on the usual one.
   preview: { host: '127.0.0.1', port: 4793 },
