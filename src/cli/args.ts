@@ -45,6 +45,7 @@ const OPTIONS = {
   vector: { type: 'string' },
   throttle: { type: 'string' },
   speed: { type: 'string' },
+  planned: { type: 'boolean' },
   part: { type: 'string' },
   stations: { type: 'string' },
   csv: { type: 'boolean' },
@@ -72,7 +73,7 @@ const TAKEN: Readonly<Record<string, readonly string[]>> = {
   check: [],
   plan: ['json', 'units', 'robust', 'write', 'time-limit'],
   carry: ['json', 'units', 'line'],
-  turn: ['json', 'units', 'vector', 'throttle', 'speed'],
+  turn: ['json', 'units', 'vector', 'throttle', 'speed', 'planned'],
   place: ['json', 'csv', 'units', 'part', 'stations', 'throttle'],
 };
 

@@ -19,11 +19,11 @@ export function balance({ file, json, units }: Asked, io: Io): ExitCode {
   return report.met ? EXIT.fine : EXIT.misses;
 }
 
-/** Values in SI whatever the units; these only change the sentences in `why`. */
-export function rowsJson(rows: Rows): string {
+/** Values in SI whatever the units; these only change the sentences in `why`. `before`: what the object holds besides. */
+export function rowsJson(rows: Rows, before: object = {}): string {
   const entries = Object.entries(rows).map(([key, { value, unit, uncertainty, status, why }]) => [
     key,
     { value, unit, ...(uncertainty === undefined ? {} : { uncertainty }), status, why },
   ]);
-  return `${JSON.stringify({ rows: Object.fromEntries(entries) }, null, 2)}\n`;
+  return `${JSON.stringify({ ...before, rows: Object.fromEntries(entries) }, null, 2)}\n`;
 }

@@ -1,7 +1,10 @@
 /** `turn FILE`: how a craft turns, flies and climbs by its thrusters, for reading or as JSON. */
 import { type Craft, listed } from '../craft/craft.ts';
 import type { Vectoring } from '../craft/thrustSchema.ts';
+import { type PlanFound, planOf } from '../physics/ballast/plan.ts';
 import { hazardsOf } from '../report/hazards.ts';
+import { planReport } from '../report/planReport.ts';
+import { plannedWords } from '../report/planWords.ts';
 import type { Rows } from '../report/rows.ts';
 import { rowText } from '../report/rowText.ts';
 import type { PropellerLine } from '../report/turning/propellers.ts';
@@ -9,6 +12,7 @@ import { TETHER } from '../report/turning/turnCautions.ts';
 import { type TurnReport, turnReport } from '../report/turning/turnReport.ts';
 import type { TurnVerdict } from '../report/turning/turnVerdicts.ts';
 import { formatQuantity } from '../units/format.ts';
+import { inUnits } from '../units/sentence.ts';
 import type { UnitSystem } from '../units/units.ts';
 import type { Command } from './args.ts';
 import { rowsJson } from './balance.ts';
@@ -19,10 +23,9 @@ import { readCraft } from './readCraft.ts';
 
 type Asked = Extract<Command, { kind: 'turn' }>;
 
-/** Exit 1 when a turning target is missed, or nothing is known of any thruster. */
-export function turned(asked: Asked, io: Io): ExitCode {
-  const { file, json, units } = asked;
-  const read = readCraft(file, units, io);
+/** Exit 1 when a turning target is missed, nothing is known of any thruster, or no plan can be made that is asked for. */
+export function turned(asked: Asked, io: Io): ExitCode | Promise<ExitCode> {
+  const read = readCraft(asked.file, asked.units, io);
   if (!read) return EXIT.bad;
   const { craft } = read;
   const wrong = vectorTrouble(craft, asked.vector);
@@ -30,10 +33,30 @@ export function turned(asked: Asked, io: Io): ExitCode {
     io.error(`${oneLine(wrong)}\n`);
     return EXIT.bad;
   }
-  const report = turnReport(craft, asked, units);
-  io.write(json ? rowsJson(report.rows) : turnText(craft, report, units));
+  return asked.planned ? turnedAsPlanned(craft, asked, io) : told(craft, null, asked, io);
+}
+
+async function turnedAsPlanned(craft: Craft, asked: Asked, io: Io): Promise<ExitCode> {
+  const { json, units } = asked;
+  const plan = planOf(craft, await io.solver(), { explain: false, units });
+  if (!('why' in plan)) return told(craft, plan, asked, io);
+  const why = planReport(craft, plan, units).headline;
+  const said = `There is no ballast plan to carry out. ${why} The command plan tells what would help.`;
+  const text = [...wrapped(craft.name || 'Craft without a name'), ...wrapped(said)].join('\n');
+  io.write(json ? rowsJson({}, { plan: { status: plan.status, why } }) : `${text}\n`);
+  return EXIT.misses;
+}
+
+/** Of the craft as it is, or as planned. */
+function told(craft: Craft, plan: PlanFound | null, asked: Asked, io: Io): ExitCode {
+  const { json, units } = asked;
+  const report = turnReport(plan?.craft ?? craft, asked, units);
+  const first = plan ? wrapped(inUnits(plannedWords(craft, plan), units)) : [];
+  io.write(json ? rowsJson(report.rows, plan ? planHead(plan) : {}) : turnText(craft, first, report, units));
   return report.turn && report.met ? EXIT.fine : EXIT.misses;
 }
+
+const planHead = ({ status, deadBallast }: PlanFound) => ({ plan: { status, deadBallast } });
 
 /** Why no thruster, or not every one, can be turned to that angle in yaw; null when all that turn can. */
 function vectorTrouble(craft: Craft, vector: number | null): string | null {
@@ -56,10 +79,11 @@ const turns = ({ least, most, slew }: Vectoring): boolean => most > least && sle
 
 const degrees = (angle: number): string => formatQuantity(angle, 'angle', 'metric');
 
-function turnText(craft: Craft, report: TurnReport, units: UnitSystem): string {
+function turnText(craft: Craft, first: readonly string[], report: TurnReport, units: UnitSystem): string {
   const { headline, costWords, verdicts, rows, notes, propellers, cautions } = report;
   const lines = [
     ...wrapped(craft.name || 'Craft without a name'),
+    ...first,
     ...wrapped([headline, ...costWords].join(' ')),
     '',
     ...(verdicts.length > 0 ? ['Verdicts', ...verdicts.flatMap(verdictLines), ''] : []),

@@ -7,18 +7,21 @@ export interface TurnOptions {
   readonly vector: number | null;
   /** Of the cruise it begins from, m/s; null for the steady speed at that throttle. */
   readonly speed: number | null;
+  /** Of the craft with its ballast plan carried out. */
+  readonly planned: boolean;
 }
 
 interface Typed {
   readonly vector?: string;
   readonly throttle?: string;
   readonly speed?: string;
+  readonly planned?: boolean;
 }
 
 const DEGREE = Math.PI / 180;
 const MOST_SPEED = 50;
 
-export function turnOptions({ vector, throttle = '1', speed }: Typed): TurnOptions | string {
+export function turnOptions({ vector, throttle = '1', speed, planned = false }: Typed): TurnOptions | string {
   const share = numberOf(throttle);
   if (!(share > 0 && share <= 1)) return wrong('throttle', throttle, 'a share above 0 and up to 1');
   const degrees = numberOf(vector ?? '0');
@@ -29,6 +32,7 @@ export function turnOptions({ vector, throttle = '1', speed }: Typed): TurnOptio
     throttle: share,
     vector: vector === undefined ? null : degrees * DEGREE,
     speed: speed === undefined ? null : cruise,
+    planned,
   };
 }
 

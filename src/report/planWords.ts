@@ -108,6 +108,15 @@ function outcome(
   return moves.length > 0 ? `${joined(moves)}, and ${does}${fixed}.` : `${does}${fixed}.`;
 }
 
+/** Of which craft figures are that were worked out with the plan carried out. */
+export function plannedWords(craft: Craft, plan: PlanFound): string {
+  const steps = planSteps(craft, plan);
+  const lead = `${say(plan.deadBallast, 'mass')} of dead ballast`;
+  if (steps.length === 0) return `The ballast plan changes nothing: ${lead}.`;
+  const unproven = plan.status === 'stopped' ? ' The search was stopped: one with less may exist.' : '';
+  return `With the ballast plan carried out, ${lead}: ${joined(steps)}.${unproven}`;
+}
+
 const capital = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1);
 
 /** Why there is no plan with less, or what is left open. */

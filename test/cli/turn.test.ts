@@ -10,8 +10,8 @@ import {
   tailCraft,
   unknownCraft,
 } from '../report/turning/turningCrafts.ts';
-import { samples } from '../samples/readSamples.ts';
-import { heard } from './terminal.ts';
+import { sampleCraft, samples } from '../samples/readSamples.ts';
+import { heard, heardLater } from './terminal.ts';
 
 const DEGREE = Math.PI / 180;
 const names = samples.map(({ name }) => ({ name }));
@@ -76,6 +76,7 @@ test('left out, throttle is full, steering hardest to starboard, cruise as fast 
     throttle: 1,
     vector: null,
     speed: null,
+    planned: false,
   });
 });
 
@@ -201,6 +202,62 @@ test('a craft that nothing steers says so, and still tells its speed', () => {
   expect(out).toMatch(/Tail thruster can only push straight/);
   expect(out).toMatch(/missed {2}Turns 90° +does not get there/);
   expect(out).toMatch(/Top speed +\d/);
+});
+
+const planned = (name: string, ...options: string[]) =>
+  heardLater(['turn', name, '--planned', ...options], files);
+
+test('as planned: the figures of the craft that plan writes, and the lead that it has then', async () => {
+  const kept: Record<string, string> = { ...files };
+  const { out: plan } = await heardLater(['plan', 'museum-atrium', '--json', '--write', 'then'], kept);
+  const { out } = await planned('museum-atrium', '--json');
+  const json = JSON.parse(out);
+  const then = JSON.parse(heard(['turn', 'then', '--json'], kept).out).rows;
+  expect(json.plan).toEqual({ status: 'optimal', deadBallast: expect.any(Number) });
+  expect(json.plan.deadBallast).toBeCloseTo(JSON.parse(plan).plan.deadBallast, 6);
+  for (const key of KEYS) {
+    // The file has rounded masses and places.
+    if (then[key].value === null) expect(json.rows[key].value, key).toBeNull();
+    else expect(json.rows[key].value, key).toBeCloseTo(then[key].value, 5);
+  }
+  const now = JSON.parse(turn('museum-atrium', '--json').out).rows;
+  expect(json.rows['cruise.pitch'].value).toBeLessThan(now['cruise.pitch'].value - 5 * DEGREE);
+});
+
+test('as planned, to read: what was hung and moved stands first, in the units asked for', async () => {
+  const { out, code } = await planned('museum-atrium');
+  expect(code).toBe(0);
+  const unfolded = out.replace(/\s+/g, ' ');
+  expect(unfolded).toMatch(
+    /^Museum atrium camera craft With the ballast plan carried out, [\d.]+ g of dead ballast: slide Battery to /,
+  );
+  expect((await planned('museum-atrium', '--units', 'imperial')).out).toMatch(
+    /carried out, [\d.]+ oz of dead\s+ballast/,
+  );
+  expect((await planned('school-cylinder')).out).toContain(
+    'The ballast plan changes nothing: 30.0 g of dead ballast.',
+  );
+});
+
+test('where no plan can be made: why, and exit 1', async () => {
+  const { out, code, errors } = await planned('cave-mapper');
+  expect({ code, errors }).toEqual({ code: 1, errors: [] });
+  expect(out.replace(/\s+/g, ' ')).toMatch(
+    /There is no ballast plan to carry out\. No ballast, slide or place of a load keeps every target at once\. The command plan/,
+  );
+  const json = await planned('cave-mapper', '--json');
+  expect(json.code).toBe(1);
+  expect(JSON.parse(json.out)).toEqual({
+    plan: { status: 'infeasible', why: expect.stringContaining('No ballast') },
+    rows: {},
+  });
+});
+
+test('a turning target that only the craft as planned misses is exit 1', async () => {
+  const museum = sampleCraft('museum-atrium');
+  const it = serialize(aimed(museum, null, 2.3));
+  expect(heard(['turn', 'it'], { it }).code).toBe(0);
+  expect((await heardLater(['turn', 'it', '--planned'], { it })).code).toBe(1);
 });
 
 test('a broken file is exit 2', () => {
