@@ -37,7 +37,7 @@ for (const viewport of SIZES) {
     visit,
   }) => {
     const page = await visit({ viewport });
-    for (const tab of ['Selected', 'Hull', 'Gas, day', 'Targets', 'Figures', 'Notes']) {
+    for (const tab of ['Selected', 'Hull', 'Gas, day', 'Targets', 'Plan', 'Turn', 'Figures', 'Notes']) {
       await page.getByRole('tab', { name: tab, exact: true }).click();
       expect(await scrollRoom(page)).toEqual({ across: 0, down: 0 });
       expect(await clipped(page)).toEqual([]);
@@ -49,6 +49,49 @@ for (const viewport of SIZES) {
     expect(side.height).toBeGreaterThan(200);
   });
 }
+
+/** How many tabs of the column stand in each row, and the least width and height of one, px. */
+const tabRows = (page: Page) =>
+  page.locator('.column [role="tab"]').evaluateAll((tabs) => {
+    const boxes = tabs.map((tab) => tab.getBoundingClientRect());
+    const tops = boxes.map(({ top }) => Math.round(top));
+    return {
+      rows: [...new Set(tops)].map((row) => tops.filter((top) => top === row).length),
+      width: Math.min(...boxes.map(({ width }) => width)),
+      height: Math.min(...boxes.map(({ height }) => height)),
+    };
+  });
+
+/** Makes the column as narrow as it goes. */
+async function narrow(page: Page): Promise<void> {
+  const splitter = page.getByRole('separator', { name: 'Width of the panels' });
+  await splitter.focus();
+  await page.keyboard.press('Enter');
+  await page.keyboard.press('ArrowLeft');
+}
+
+test('the tabs of the column stand in one row, in a narrow column in two even ones', async ({ visit }) => {
+  for (const viewport of SIZES) {
+    const page = await visit({ viewport });
+    expect((await tabRows(page)).rows).toEqual([8]);
+    await narrow(page);
+    expect((await tabRows(page)).rows).toEqual([4, 4]);
+    expect(await clipped(page)).toEqual([]);
+  }
+});
+
+test('for a finger the tabs stand in two even rows, each as wide as a fingertip', async ({ visit }) => {
+  for (const viewport of SIZES) {
+    const page = await visit({ viewport, hasTouch: true, isMobile: true });
+    for (const make of [async () => {}, narrow]) {
+      await make(page);
+      const { rows, width, height } = await tabRows(page);
+      expect(rows).toEqual([4, 4]);
+      expect(Math.min(width, height)).toBeGreaterThanOrEqual(40);
+      expect(await clipped(page)).toEqual([]);
+    }
+  }
+});
 
 test('the beam stands under the side view on the same scale of stations', async ({ visit }) => {
   const page = await visit();
