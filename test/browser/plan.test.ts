@@ -105,6 +105,26 @@ test('the order of wishes is changed by buttons and by arrow keys, and the plan 
   expect(await savedText(page)).toBe(before);
 });
 
+test('what was unfolded or folded stays so while other tabs are in front', async ({ visit }) => {
+  const page = await visit();
+  const tab = (name: string) => page.getByRole('tab', { name, exact: true }).click();
+  const isOpen = (title: string) =>
+    page
+      .locator('.foldable', { has: page.getByRole('heading', { name: title, exact: true }) })
+      .evaluate((part) => (part as HTMLDetailsElement).open);
+  await tab('Plan');
+  await unfold(page, 'Wishes');
+  await tab('Turn');
+  await unfold(page, 'Where should it sit?');
+  await tab('Plan');
+  expect([await isOpen('Wishes'), await isOpen('Useful loads')]).toEqual([true, false]);
+  await unfold(page, 'Wishes');
+  await tab('Turn');
+  expect(await isOpen('Where should it sit?')).toBe(false);
+  await tab('Plan');
+  expect(await isOpen('Wishes')).toBe(false);
+});
+
 test('while a part is dragged the plan follows before it is let go', async ({ visit }) => {
   const page = await visit();
   await openSample(page, 'library-scanner');
