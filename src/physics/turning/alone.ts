@@ -35,7 +35,7 @@ export interface Range {
   readonly most: number;
 }
 
-const TRIED = 10;
+const TRIED = 6;
 const WITHIN = 1e-4;
 
 /**
@@ -47,12 +47,23 @@ export function leastOf(
   { least, today, most }: Range,
   cannot: string,
 ): Outcome<number> {
-  const [from, to] = beyond(today) >= 0 ? [least, today] : [today, most];
+  const at = remembered(beyond);
+  const [from, to] = at(today) >= 0 ? [least, today] : [today, most];
   let below = from;
   for (let i = 0; i <= TRIED; i += 1) {
-    const x = from + ((to - from) * i) / TRIED;
-    if (beyond(x) >= 0) return i === 0 ? solved(x) : findRoot(beyond, below, x, WITHIN);
+    const x = i === TRIED ? to : from + ((to - from) * i) / TRIED;
+    if (at(x) >= 0) return i === 0 ? solved(x) : findRoot(at, below, x, WITHIN);
     below = x;
   }
   return infeasible(cannot);
+}
+
+/** Each x is worked out once: a motion has to be followed for it. */
+function remembered(f: (x: number) => number): (x: number) => number {
+  const known = new Map<number, number>();
+  return (x) => {
+    const value = known.get(x) ?? f(x);
+    known.set(x, value);
+    return value;
+  };
 }

@@ -70,7 +70,7 @@ export interface HardestGust {
 }
 
 const EASY = 1e6;
-const TRIED = 24;
+const TRIED = 8;
 
 /** Of all gusts up to `strongest` from either side, the one that is hardest to hold. */
 export function hardestGust(

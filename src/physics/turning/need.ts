@@ -13,7 +13,7 @@ import { commandsOf, straightAt } from './asked.ts';
 import { hardestGust } from './gust.ts';
 import { type Leverage, leverageOf, longestArm, yaws } from './leverage.ts';
 import { QUARTER, quarterEvent } from './quarterTurn.ts';
-import { sail } from './sail.ts';
+import { COARSE, sail } from './sail.ts';
 import { turnsInYaw } from './steer.ts';
 import type { TurningCraft } from './turningCraft.ts';
 
@@ -67,9 +67,6 @@ export function needsOf(
         : need(sideGust, (each) => gustOn(each, sideGust).ratio - 1, gustOn(craft, sideGust).available),
   };
 }
-
-/** Steps so coarse still give times right to 1e-4, as near as the answers are sought. */
-const COARSE = 1000;
 
 /** By how much the quarter turn beats the time, as a share of its own; where it does not, the share of 90° missing then (< 0). */
 const turnBeyond =

@@ -14,6 +14,9 @@ const ABSOLUTE = 1e-10;
 /** Times to a yaw angle or rate are right to this share; held against finer steps in the tests. */
 export const TIME_ERROR = 1e-6;
 
+/** A coarseness at which times are still right to 1e-4. */
+export const COARSE = 1000;
+
 /** (u, v, r, x, y, ψ) and the angle of each thruster. */
 export interface Moment {
   readonly state: ArrayLike<number>;

@@ -13,7 +13,7 @@ import { say } from '../../units/sentence.ts';
 import { straightAt } from './asked.ts';
 import { turnsUnder } from './motion.ts';
 import { NOTHING_TURNS } from './quarterTurn.ts';
-import { LONGEST, type Moment, sail, shownThruster } from './sail.ts';
+import { COARSE, LONGEST, type Moment, sail, shownThruster } from './sail.ts';
 import { settlesAt, sizesOf, steadyNear, type Velocity, velocityOf } from './steadyRoot.ts';
 import { type Command, partOfTheWay } from './steer.ts';
 import type { TurningCraft } from './turningCraft.ts';
@@ -60,7 +60,8 @@ export function steadyTurn(
   let at: Moment = straightAt(cruiseSpeed, straight);
   let followed = 0;
   for (let stretch = STRETCH; followed < LONGEST; stretch *= 2) {
-    const sailed = sail(craft, at, command, { until: Math.min(stretch, LONGEST - followed) });
+    const until = Math.min(stretch, LONGEST - followed);
+    const sailed = sail(craft, at, command, { until, coarseness: COARSE });
     if (sailed.status !== 'solved') return sailed;
     at = sailed.value.end;
     followed += stretch;

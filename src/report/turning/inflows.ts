@@ -1,9 +1,10 @@
 /** The air that reaches each propeller in cruise, and what it does for the thrust per watt. */
+import { kept } from '../../numeric/kept.ts';
 import { infeasible, type Outcome, solved } from '../../numeric/outcome.ts';
 import { kinematicViscosity } from '../../physics/air/viscosity.ts';
 import type { CraftState } from '../../physics/craftState.ts';
 import { boundaryLayerOf } from '../../physics/flow/boundaryLayer.ts';
-import { hullFlowOf } from '../../physics/flow/hullFlow.ts';
+import { type HullFlow, hullFlowOf } from '../../physics/flow/hullFlow.ts';
 import { powerAgainstFree } from '../../physics/flow/idealPower.ts';
 import { type Inflow, inflowAt } from '../../physics/flow/inflow.ts';
 import { discArea } from '../../physics/thrust/propeller.ts';
@@ -31,7 +32,7 @@ export const inflowsAt = (state: CraftState, speed: number, throttle: number): O
   ifDriven(state, (thrusters) => {
     const flow = hullFlowOf(state.hull);
     if (flow.status === 'infeasible') return flow;
-    const layer = boundaryLayerOf(flow.value, speed, kinematicViscosity(state.air));
+    const layer = layerOf(flow.value, speed, kinematicViscosity(state.air));
     if (layer.status === 'infeasible') return layer;
     const each = thrusters.map((thruster): PropellerAir => {
       const inflow = inflowAt(flow.value, layer.value, thruster);
@@ -42,6 +43,11 @@ export const inflowsAt = (state: CraftState, speed: number, throttle: number): O
     });
     return solved({ each, cautions: [...flow.value.cautions, ...layer.value.cautions] });
   });
+
+/** While masses move, hull and speed stay as they are. */
+const layerOf = kept((flow: HullFlow, speed: number, viscosity: number) =>
+  boundaryLayerOf(flow, speed, viscosity),
+);
 
 /** Of all propellers together, each by the area of its disc. */
 export function inflowRows(inflows: Outcome<Inflows>, thrusters: readonly Thruster[]): Rows {

@@ -2,7 +2,7 @@
 import { infeasible, type Outcome, solved } from '../../numeric/outcome.ts';
 import { heavinessOf, type Loading } from '../../physics/balance/loading.ts';
 import type { CraftState } from '../../physics/craftState.ts';
-import { type ClimbPoint, steadyClimb } from '../../physics/cruise/climb.ts';
+import { type Climb, type ClimbPoint, steadyClimb } from '../../physics/cruise/climb.ts';
 import { type Critical, criticalSpeed } from '../../physics/cruise/critical.ts';
 import { cruisePitch } from '../../physics/cruise/cruise.ts';
 import { hoverOf } from '../../physics/cruise/hover.ts';
@@ -62,10 +62,14 @@ export function hoverRows(state: CraftState): Rows {
   };
 }
 
+/** Points of a climb curve: enough to draw it, and to find the best between them. */
+export const CLIMB_POINTS = 13;
+
 /** `curve`: climb over vectoring in pitch, at the same throttle. */
 export function climbRows(state: CraftState, throttle: number, curve: readonly ClimbPoint[]): Rows {
   const asSet = ifDriven(state, () => steadyClimb(state, { throttle, vector: null }));
-  const extreme = (way: 1 | -1) => ifDriven(state, () => most(curve, way));
+  const rateAt = (vector: number) => rateOf(vector, steadyClimb(state, { throttle, vector }));
+  const extreme = (way: 1 | -1) => ifDriven(state, () => most(curve, way, rateAt));
   const caution = asSet.status === 'solved' ? asSet.value.cautions.join(' ') : null;
   return {
     ...rowsFrom(
@@ -94,16 +98,53 @@ interface Rate {
   readonly rate: number;
 }
 
-/** The point that goes up fastest, or down fastest. */
-function most(curve: readonly ClimbPoint[], way: 1 | -1): Outcome<Rate> {
+const rateOf = (vector: number, climb: Outcome<Climb>): Rate | null =>
+  climb.status === 'solved' ? { vector, rate: climb.value.climbRate } : null;
+
+/** Where it goes up fastest, or down fastest: the best of the points, and what lies better beside it. */
+function most(
+  curve: readonly ClimbPoint[],
+  way: 1 | -1,
+  rateAt: (vector: number) => Rate | null,
+): Outcome<Rate> {
   if (curve.length < 2) return infeasible('No thruster turns in pitch.');
-  const rates = curve.flatMap(({ vector, climb }) =>
-    climb.status === 'solved' ? [{ vector, rate: climb.value.climbRate }] : [],
-  );
-  const [first, ...rest] = rates;
-  if (!first) {
+  const rates = curve.map(({ vector, climb }) => rateOf(vector, climb));
+  const better = (a: Rate | null, b: Rate | null) => (b && (!a || way * b.rate > way * a.rate) ? b : a);
+  const best = rates.reduce(better, null);
+  if (!best) {
     const [{ climb }] = curve as [ClimbPoint];
     return climb.status === 'infeasible' ? climb : infeasible('No steady path was found.');
   }
-  return solved(rest.reduce((best, each) => (way * each.rate > way * best.rate ? each : best), first));
+  const i = rates.indexOf(best);
+  const [before, after] = [rates[i - 1], rates[i + 1]];
+  if (before && after) return solved(better(best, rateAt(topOf(before, best, after))) ?? best);
+  const gap = [i - 1, i + 1].find((k) => rates[k] === null);
+  return solved(gap === undefined ? best : towards(curve[gap]!.vector, best, better, rateAt));
+}
+
+/** Top of the parabola through three points at equal steps, the best in the middle. */
+function topOf(before: Rate, best: Rate, after: Rate): number {
+  const [rise, fall] = [best.rate - before.rate, best.rate - after.rate];
+  return rise + fall === 0
+    ? best.vector
+    : best.vector + ((after.vector - best.vector) * (rise - fall)) / (2 * (rise + fall));
+}
+
+const HALVINGS = 4;
+
+/** As far towards an angle without a steady path as it gets better. */
+function towards(
+  gap: number,
+  from: Rate,
+  better: (a: Rate, b: Rate | null) => Rate | null,
+  rateAt: (vector: number) => Rate | null,
+): Rate {
+  let [best, far] = [from, gap];
+  for (let i = 0; i < HALVINGS; i += 1) {
+    const middle = (best.vector + far) / 2;
+    const next = better(best, rateAt(middle)) ?? best;
+    if (next === best) far = middle;
+    best = next;
+  }
+  return best;
 }

@@ -22,7 +22,7 @@ import { arrowsOf, type ThrustArrow } from './arrows.ts';
 import { authorityRows } from './authorityRows.ts';
 import { type PlaceCost, placeCostOf } from './costs.ts';
 import { inflowRows, inflowsAt, type PropellerAir } from './inflows.ts';
-import { climbRows, hoverRows, pitchRows } from './pitchRows.ts';
+import { CLIMB_POINTS, climbRows, hoverRows, pitchRows } from './pitchRows.ts';
 import { type PropellerLine, propellerLines } from './propellers.ts';
 import { speedRows } from './speedRows.ts';
 import { ifDriven } from './thrusterWords.ts';
@@ -159,7 +159,7 @@ function reportOf(state: CraftState, asked: TurnAsked): PlainReport {
   const cruise = figures.rows['speed.cruise']!;
   const inflows =
     cruise.value === null ? infeasible(cruise.why) : inflowsAt(state, cruise.value, asked.throttle);
-  const climbs = curveOf(ifDriven(state, () => solved(climbCurve(state, asked.throttle))));
+  const climbs = curveOf(ifDriven(state, () => solved(climbCurve(state, asked.throttle, CLIMB_POINTS))));
   const steadies = curveOf(ifDriven(state, () => steadyCurve(state, asked)));
   const widest = widestCircle(turn, steadies);
   const rows = inOrder({

@@ -1,7 +1,13 @@
 import { expect, test } from 'vitest';
 import { commandsOf, cruiseSpeedOf, straightAt } from '../../../src/physics/turning/asked.ts';
 import { QUARTER, quarterTurn, quarterTurnOf, yawStop } from '../../../src/physics/turning/quarterTurn.ts';
-import { LONGEST, type Sailed, type SailOptions, TIME_ERROR } from '../../../src/physics/turning/sail.ts';
+import {
+  COARSE,
+  LONGEST,
+  type Sailed,
+  type SailOptions,
+  TIME_ERROR,
+} from '../../../src/physics/turning/sail.ts';
 import { commandOf } from '../../../src/physics/turning/steer.ts';
 import type { TurningCraft } from '../../../src/physics/turning/turningCraft.ts';
 import { near } from '../hull/near.ts';
@@ -69,9 +75,9 @@ test.each([
   }
 });
 
-test('steps a thousand times coarser, as needs are sought with, still give the time to 1e-4', () => {
+test('the coarse steps with which needs and steady turns are sought still give the time to 1e-4', () => {
   for (const craftOf of [tailCraft, noseCraft, pairCraft, gondolaCraft]) {
-    near(timeFrom(craftOf(), 0, { coarseness: 1000 }), timeFrom(craftOf(), 0), 1e-4);
+    near(timeFrom(craftOf(), 0, { coarseness: COARSE }), timeFrom(craftOf(), 0), 1e-4);
   }
 });
 

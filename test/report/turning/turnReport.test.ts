@@ -1,12 +1,14 @@
 import { expect, test } from 'vitest';
 import type { Craft } from '../../../src/craft/craft.ts';
 import type { ThrusterData } from '../../../src/craft/thrustSchema.ts';
+import { craftStateOf } from '../../../src/physics/craftState.ts';
+import { climbCurve } from '../../../src/physics/cruise/climb.ts';
 import { TURN_KEYS } from '../../../src/report/turning/turnFigure.ts';
 import { turnFigures, turnReport } from '../../../src/report/turning/turnReport.ts';
 import type { TurnAsked } from '../../../src/report/turning/turns.ts';
 import { turnWorkingOf } from '../../../src/report/turning/turnWorkings.ts';
 import { partOf } from '../../edit/craftFixture.ts';
-import { craftFrom, samples } from '../../samples/readSamples.ts';
+import { craftFrom, sampleCraft, samples } from '../../samples/readSamples.ts';
 import {
   DEGREE,
   levelCraft,
@@ -203,6 +205,21 @@ test('the widest circle that holds, of a craft that does not keep its heading; o
   });
   expect(keeping.notes.join(' ')).not.toMatch(/Circles wider/);
 });
+
+test.each(['museum-atrium', 'aviary-counter', 'vault-inspector', 'survey-6m'])(
+  '%s: fastest climb and descent are those of a sweep in steps of a quarter of a degree, to 3 %',
+  (name) => {
+    const craft = sampleCraft(name);
+    const state = craftStateOf(craft);
+    if (state.status !== 'solved') throw new Error(state.why);
+    const rates = climbCurve(state.value, 1, 401).flatMap(({ climb }) =>
+      climb.status === 'solved' ? [climb.value.climbRate] : [],
+    );
+    const { rows } = reportOf(craft);
+    expect(Math.abs(rows['climb.best']!.value! / Math.max(...rates) - 1)).toBeLessThan(0.03);
+    expect(Math.abs(rows['climb.descent']!.value! / Math.min(...rates) - 1)).toBeLessThan(0.03);
+  },
+);
 
 test('what cannot be: no figures, no steering, no thruster, each with its sentence', () => {
   const unknown = reportOf(unknownCraft());
