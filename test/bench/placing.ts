@@ -9,7 +9,7 @@ import { placementStudy, thrusterParts } from '../../src/physics/placing/study.t
 type Print = (label: string, ...figures: string[]) => void;
 
 /** From the folder of the project, in which npm runs this. */
-function sample(name: string): Craft {
+export function sample(name: string): Craft {
   const parsed = parse(readFileSync(`samples/${name}.json`, 'utf8'));
   if (!parsed.ok) throw new Error(`${name} is no craft file`);
   return parsed.craft;
