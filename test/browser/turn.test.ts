@@ -70,7 +70,7 @@ test('from above it turns in yaw, to its limit and no farther, and says what tha
   await openTurn(page);
   const far = await reach(page, 'above-view');
   await drag(page, await outOf(page, 'above-view', 0, far), await outOf(page, 'above-view', -80, far));
-  expect(degrees(await savedText(page), 'yaw')).toBeCloseTo(-60, 6);
+  expect(degrees(await savedText(page), 'yaw')).toBeCloseTo(-45, 6);
   const above = page.getByRole('application', { name: 'View from above' });
   // Thrust to port at the tail brings the nose to starboard.
   await expect.poll(() => above.locator('p').first().textContent()).toContain('yaws to starboard');
@@ -173,4 +173,46 @@ test('the path of the turn is played to its end, stopped half-way, and moved by 
   await player.getByRole('button', { name: 'Play' }).waitFor();
   expect(await player.textContent()).toContain('90.0° to starboard');
   expect(await savedText(page)).toBe(sample(NAME));
+});
+
+test('with the ballast plan the figures are of the craft it makes, the drawing and the file are not; and back', async ({
+  visit,
+}) => {
+  const page = await visit();
+  await openSample(page, 'museum-atrium');
+  await page.getByRole('tab', { name: 'Turn', exact: true }).click();
+  const turning = page.getByRole('region', { name: 'Turning' });
+  await turning.getByText('Pitch', { exact: true }).click();
+  const figure = turning.locator('[data-figure="cruise.pitch"]');
+  const pitch = async () => {
+    const old = await figure.evaluate((element) => element.closest('.plan-old') !== null);
+    return old ? Number.NaN : Number.parseFloat((await figure.locator('.number').first().textContent())!);
+  };
+  await expect.poll(pitch).toBeGreaterThan(20);
+  const asItIs = await pitch();
+  const floats = await page.locator('[data-verdict="level"]').textContent();
+  const choice = turning.getByLabel('Of the craft');
+  await choice.selectOption('With the ballast plan');
+  await turning
+    .getByText(/^With the ballast plan carried out, [\d.]+ g of dead ballast: slide Battery/)
+    .waitFor();
+  await expect.poll(pitch).toBeLessThan(asItIs - 5);
+  expect(await page.locator('[data-verdict="level"]').textContent()).toBe(floats);
+  await choice.selectOption('As it is');
+  await expect.poll(pitch).toBe(asItIs);
+  expect(await savedText(page)).toBe(sample('museum-atrium'));
+});
+
+test('where no plan can be made that is said, and the figures stay those of the craft as it is', async ({
+  visit,
+}) => {
+  const page = await visit();
+  await openTurn(page);
+  const turning = page.getByRole('region', { name: 'Turning' });
+  const headline = turning.locator('.plan-headline');
+  const asItIs = await headline.textContent();
+  await turning.getByLabel('Of the craft').selectOption('With the ballast plan');
+  await turning.getByText(/^There is no ballast plan to carry out: .* No ballast, slide/).waitFor();
+  await expect.poll(() => turning.locator('.plan-old').count()).toBe(0);
+  expect(await headline.textContent()).toBe(asItIs);
 });

@@ -1,7 +1,7 @@
 /** What to mind of thrust and turning, and what is missing. In SI, for `inUnits`. */
 import type { Outcome } from '../../numeric/outcome.ts';
 import type { CraftState } from '../../physics/craftState.ts';
-import { strikesOf } from '../../physics/placing/strikes.ts';
+import { meantOf, strikesOf } from '../../physics/placing/strikes.ts';
 import { pitchSpeedCautions } from '../../physics/thrust/speed.ts';
 import type { Thruster } from '../../physics/thrust/thrusters.ts';
 import type { Turn } from '../../physics/turning/turn.ts';
@@ -19,7 +19,7 @@ export function turnCautions(
   return [
     ...missingFigures(state.craft),
     ...own.flatMap(({ part, name }) =>
-      strikesOf(state, part).cautions.map((each) => `${name}: ${lower(each)}`),
+      strikesOf(state, part, meantOf(state, part)).cautions.map((each) => `${name}: ${lower(each)}`),
     ),
     ...pitchSpeedCautions(state),
     ...(turn.status === 'solved' ? turn.value.cautions : []),
