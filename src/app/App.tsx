@@ -23,9 +23,9 @@ export function App({ store }: { store: Store }) {
   const editor = useEditorOf(store);
   // One thread for plans, curves and studies; it begins with the first request.
   const [client] = useState(() => new PlanClient());
-  const planning = usePlanningOf(store, client);
   const studying = useStudyingOf(store, client);
   const turning = useTurningOf(store);
+  const planning = usePlanningOf(store, client, turning.subject);
   const palette = usePalette(useCell(store.settings).theme);
   const over = useDrops(store);
   useEffect(() => takePastes(store.table.set), [store]);

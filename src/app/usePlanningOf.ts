@@ -1,21 +1,22 @@
 /** What the plan panel and the drawing are given of the plan, made from the store. */
 import { useEffect, useMemo, useState } from 'react';
 import type { Planning } from '../panels/plan/planning.ts';
+import type { Subject } from '../panels/turn/turning.ts';
 import type { PlanClient } from '../worker/planClient.ts';
 import { Carries } from './carries.ts';
 import { useCell } from './cell.ts';
 import { Plans } from './plans.ts';
 import type { Store } from './store.ts';
 
-export function usePlanningOf(store: Store, client: PlanClient): Planning {
+export function usePlanningOf(store: Store, client: PlanClient, subject: Subject): Planning {
   const [{ plans, carries }] = useState(() => begin(store, client));
   const plansState = useCell(plans.state);
   const carriesState = useCell(carries.state);
-  const looked = useCell(store.view).tab === 'plan';
-  useEffect(() => {
-    plans.lookAt(looked);
-    carries.lookAt(looked);
-  }, [plans, carries, looked]);
+  const { tab } = useCell(store.view);
+  const inFront = tab === 'plan';
+  const looked = inFront || (tab === 'turn' && subject === 'planned');
+  useEffect(() => plans.lookAt(looked), [plans, looked]);
+  useEffect(() => carries.lookAt(inFront), [carries, inFront]);
   return useMemo(
     () => ({
       ...plansState,

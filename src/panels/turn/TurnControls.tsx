@@ -1,4 +1,4 @@
-/** Throttle, steering and the cruise that the turn begins from. */
+/** Of which craft the figures are; throttle, steering and the cruise that the turn begins from. */
 import type { Craft } from '../../craft/craft.ts';
 import { formatQuantity } from '../../units/format.ts';
 import type { UnitSystem } from '../../units/units.ts';
@@ -7,7 +7,33 @@ import { ChoiceField } from '../fields/ChoiceField.tsx';
 import { FieldFrame } from '../fields/FieldFrame.tsx';
 import { QuantityField } from '../fields/QuantityField.tsx';
 import { steeringPart } from './asked.ts';
-import { type Steering, type Turning, useTurning } from './turning.ts';
+import { type Steering, type Subject, type Turning, useTurning } from './turning.ts';
+
+/** `words`: what there is to say of the plan. */
+export function SubjectChoice({ words }: { words: string }) {
+  const { subject, set } = useTurning();
+  return (
+    <div className="turn-controls">
+      <ChoiceField<Subject>
+        label="Of the craft"
+        value={subject}
+        choices={SUBJECTS}
+        onCommit={(next) => {
+          set({ subject: next });
+          return null;
+        }}
+      />
+      <p className="aside" role="status">
+        {words}
+      </p>
+    </div>
+  );
+}
+
+const SUBJECTS = [
+  { value: 'today', label: 'As it is' },
+  { value: 'planned', label: 'With the ballast plan' },
+] as const;
 
 export function TurnControls() {
   const { craft, units } = useEditor();

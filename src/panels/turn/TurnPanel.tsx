@@ -1,4 +1,4 @@
-/** How the craft turns, climbs and flies with its thrusters as they are, and where a thruster had better sit. */
+/** How the craft turns, climbs and flies, as it is or as its ballast plan would have it, and where a thruster had better sit. */
 import type { ReactNode } from 'react';
 import { HAZARDS } from '../../report/hazards.ts';
 import type { TurnReport } from '../../report/turning/turnReport.ts';
@@ -10,7 +10,7 @@ import { Foldable } from '../plan/Foldable.tsx';
 import { MomentBars } from './MomentBars.tsx';
 import { StudySection } from './StudySection.tsx';
 import { TurnAnswer } from './TurnAnswer.tsx';
-import { TurnControls } from './TurnControls.tsx';
+import { SubjectChoice, TurnControls } from './TurnControls.tsx';
 import { TurnFigures } from './TurnFigures.tsx';
 import { type ReportNow, useTurnReport } from './useTurnReport.ts';
 import './turn.css';
@@ -28,7 +28,7 @@ export function TurnPanel(props: TurnPanelProps) {
 }
 
 export function TurnSheet({ now, player, onTargets }: TurnPanelProps & { now: ReportNow }) {
-  const { report, fresh, figures } = now;
+  const { report, fresh, figures, subject } = now;
   const sheet = useFigureSheet();
   const old = fresh ? '' : 'plan-old';
   // What follows at once stands among what is of before the last change.
@@ -40,7 +40,10 @@ export function TurnSheet({ now, player, onTargets }: TurnPanelProps & { now: Re
         <div className={`plan-answer ${old}`}>
           <TurnAnswer report={report} onTargets={onTargets} />
         </div>
-        <MomentBars rows={rows} />
+        <div className={subject.waits ? 'plan-old' : ''}>
+          <MomentBars rows={rows} />
+        </div>
+        <SubjectChoice words={subject.words} />
         {report.turn && <TurnControls />}
         {report.turn && (
           <Foldable title="Path of the turn" note="">
@@ -50,12 +53,14 @@ export function TurnSheet({ now, player, onTargets }: TurnPanelProps & { now: Re
         <Foldable title="Where should it sit?" note="" open>
           <StudySection />
         </Foldable>
-        <TurnFigures
-          report={report}
-          rows={rows}
-          sheet={sheet}
-          isOld={(key) => !fresh && !(key in figures.rows)}
-        />
+        <div className={`turn-figures ${subject.waits ? 'plan-old' : ''}`}>
+          <TurnFigures
+            report={report}
+            rows={rows}
+            sheet={sheet}
+            isOld={(key) => !fresh && !subject.waits && !(key in figures.rows)}
+          />
+        </div>
       </section>
       <Cautions report={report} />
     </>

@@ -4,7 +4,12 @@ import { createContext, useContext } from 'react';
 /** limit: hardest to starboard. set: as the arrows of the thrusters are turned. */
 export type Steering = 'limit' | 'set';
 
+/** today: the craft as it is. planned: with its ballast plan carried out. */
+export type Subject = 'today' | 'planned';
+
 export interface TurningState {
+  /** Of which craft the figures are. */
+  readonly subject: Subject;
   /** Share of full throttle, 0 … 1. */
   readonly throttle: number;
   readonly steering: Steering;
@@ -23,6 +28,7 @@ export interface Turning extends TurningState {
 }
 
 export const FIRST_TURNING: TurningState = {
+  subject: 'today',
   throttle: 1,
   steering: 'limit',
   turned: null,

@@ -6,6 +6,7 @@ import { loadHighs } from '../../../src/numeric/linearProgram/highsSolver.ts';
 import { EditorContext } from '../../../src/panels/editor.ts';
 import { askedOf, steeringPart } from '../../../src/panels/turn/asked.ts';
 import { NO_STUDY, type Studying, StudyingContext } from '../../../src/panels/turn/studying.ts';
+import { AS_IT_IS, type SubjectNow } from '../../../src/panels/turn/subject.ts';
 import { TurnSheet } from '../../../src/panels/turn/TurnPanel.tsx';
 import { turnGroups } from '../../../src/panels/turn/turnGroups.ts';
 import { FIRST_TURNING, TurningContext, type TurningState } from '../../../src/panels/turn/turning.ts';
@@ -22,17 +23,22 @@ interface Look {
   readonly studying?: Partial<Studying>;
   readonly turning?: Partial<TurningState>;
   readonly fresh?: boolean;
+  readonly subject?: SubjectNow;
 }
 
 const nothing = () => {};
 
-function panel(craft: Craft, { units = 'metric', studying, turning, fresh = true }: Look = {}): string {
+function panel(
+  craft: Craft,
+  { units = 'metric', studying, turning, fresh = true, subject = AS_IT_IS }: Look = {},
+): string {
   const choices = { ...FIRST_TURNING, ...turning };
   const asked = askedOf(craft, choices);
   const now = {
     report: turnReport(craft, asked, units),
     figures: turnFigures(craft, asked, units),
     fresh,
+    subject,
   };
   const sheet = createElement(TurnSheet, { now, player: () => 'the path', onTargets: nothing });
   const study = { ...NO_STUDY, start: nothing, stop: nothing, close: nothing, ...studying };
@@ -102,13 +108,27 @@ test('a craft without thrust is told what is missing, once', () => {
   expect(text).not.toContain('Throttle');
 });
 
+const old = (markup: string) =>
+  [...markup.matchAll(/data-figure="([\w.]+)" data-status="\w+" class="plan-old"/g)].map(([, key]) => key);
+
 test('figures that wait for a simulation are shown as old, those that follow at once are not', () => {
-  const old = (markup: string) =>
-    [...markup.matchAll(/data-figure="([\w.]+)" data-status="\w+" class="plan-old"/g)].map(([, key]) => key);
   expect(old(panel(museum))).toEqual([]);
   const waiting = old(panel(museum, { fresh: false }));
   expect(waiting).toContain('turn.timeTo90');
   expect(waiting.filter((key) => key! in turnFigures(museum, asked, 'metric').rows)).toEqual([]);
+});
+
+test('while a plan is worked out every figure is shown as old, and a line says so', () => {
+  const words = 'Working out the ballast plan…';
+  const markup = panel(museum, { fresh: false, subject: { plan: null, waits: true, words } });
+  expect(seen(markup)).toContain(words);
+  const [before, figures] = markup.split('<div class="turn-figures plan-old">');
+  expect(before).not.toContain('data-figure');
+  expect(figures!.split('data-figure="')).toHaveLength(Object.keys(report.rows).length + 1);
+  // None fades twice.
+  expect(old(markup)).toEqual([]);
+  expect(before!.match(/plan-old/g)).toHaveLength(3);
+  expect(seen(panel(museum))).toContain('Of the craft As it is With the ballast plan');
 });
 
 test('a study is told in the words of the report; each station that nothing beats has its row', () => {
