@@ -12,7 +12,7 @@ import { leastOf, withLongerArm, withThrust, withVectoring } from './alone.ts';
 import { commandsOf, straightAt } from './asked.ts';
 import { hardestGust } from './gust.ts';
 import { type Leverage, leverageOf, longestArm, yaws } from './leverage.ts';
-import { QUARTER, quarterEvent } from './quarterTurn.ts';
+import { notTurned, QUARTER, quarterEvent } from './quarterTurn.ts';
 import { COARSE, sail } from './sail.ts';
 import { turnsInYaw } from './steer.ts';
 import type { TurningCraft } from './turningCraft.ts';
@@ -73,6 +73,7 @@ const turnBeyond =
   (throttle: number, asked: number): Beyond =>
   (craft) => {
     const { straight, turn } = commandsOf(craft, { throttle, vector: null, speed: null });
+    if (notTurned(craft, turn)) return -1;
     const options = { until: asked, event: quarterEvent, coarseness: COARSE };
     const sailed = sail(craft, straightAt(0, straight), turn, options);
     if (sailed.status !== 'solved') return -1;

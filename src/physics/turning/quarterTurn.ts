@@ -2,6 +2,7 @@
 import { infeasible, type Outcome, solved } from '../../numeric/outcome.ts';
 import { say } from '../../units/sentence.ts';
 import type { Commands } from './asked.ts';
+import { yaws } from './leverage.ts';
 import { turnsUnder } from './motion.ts';
 import { type Moment, type Sailed, type SailOptions, sail, type Track, trackOf } from './sail.ts';
 import { type Command, momentOf } from './steer.ts';
@@ -27,10 +28,21 @@ export const QUARTER = Math.PI / 2;
 /** Turns from below nil where the heading is first 90° off, either way. */
 export const quarterEvent = (_: number, state: Float64Array): number => Math.abs(state[5]!) - QUARTER;
 
-export const NOTHING_TURNS = infeasible(
-  'Nothing turns the craft: at this setting the thrust gives no yaw moment.',
-  'Let a thruster turn in yaw, or throttle a pair apart.',
+const REMEDY = 'Let a thruster turn in yaw, or throttle a pair apart.';
+const NO_HELM = infeasible(
+  'Nothing turns the craft: no thruster turns in yaw, and none is throttled apart.',
+  REMEDY,
 );
+const NO_MOMENT = infeasible(
+  'Nothing turns the craft: at this setting the thrust gives no yaw moment.',
+  REMEDY,
+);
+
+/** Why a command turns nothing, or null. A craft that veers by itself, as Munk's moment makes of the least unevenness, is not turned. */
+export function notTurned(craft: TurningCraft, command: Command): Outcome<never> | null {
+  if (!craft.thrusters.some(yaws)) return NO_HELM;
+  return turnsUnder(craft, command) ? null : NO_MOMENT;
+}
 
 /** Until the heading is 90° off, or infeasible with how far it got. */
 export function quarterTurn(
@@ -39,7 +51,8 @@ export function quarterTurn(
   command: Command,
   options: SailOptions = {},
 ): Outcome<Sailed> {
-  if (!turnsUnder(craft, command)) return NOTHING_TURNS;
+  const still = notTurned(craft, command);
+  if (still) return still;
   const sailed = sail(craft, from, command, { ...options, event: quarterEvent });
   if (sailed.status !== 'solved' || sailed.value.trajectory.stopped) return sailed;
   const { end, last } = sailed.value.trajectory;

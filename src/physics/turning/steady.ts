@@ -11,8 +11,7 @@
 import { infeasible, type Outcome, solved } from '../../numeric/outcome.ts';
 import { say } from '../../units/sentence.ts';
 import { straightAt } from './asked.ts';
-import { turnsUnder } from './motion.ts';
-import { NOTHING_TURNS } from './quarterTurn.ts';
+import { notTurned } from './quarterTurn.ts';
 import { COARSE, LONGEST, type Moment, sail, shownThruster } from './sail.ts';
 import { settlesAt, sizesOf, steadyNear, type Velocity, velocityOf } from './steadyRoot.ts';
 import { type Command, partOfTheWay } from './steer.ts';
@@ -55,7 +54,8 @@ export function steadyTurn(
   if (!craft.thrusters.some(({ staticThrust }, i) => staticThrust * command.shares[i]! !== 0)) {
     return infeasible('Without thrust there is no steady turn: the craft comes to rest.');
   }
-  if (!turnsUnder(craft, command)) return NOTHING_TURNS;
+  const still = notTurned(craft, command);
+  if (still) return still;
   const sizes = sizesOf(craft, command, cruiseSpeed);
   let at: Moment = straightAt(cruiseSpeed, straight);
   let followed = 0;

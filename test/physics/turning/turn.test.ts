@@ -121,6 +121,30 @@ test('fixed thrust on the centreline: no yaw, no steady turn, no gust held, and 
   }
 });
 
+test('nor does a fixed thruster beside the CG turn it, though Munk’s moment makes a turn of the least unevenness', () => {
+  for (const y of [1e-12, 1e-6, 1e-3, 0.05]) {
+    const off = {
+      ...tailThruster(2.9, { yaw: fixedAt(0) }),
+      place: { kind: 'free', x: 2.9, y, z: 0 },
+    } as const;
+    const file = craftWith([battery, off, fins()]);
+    const craft = { ...file, targets: { ...file.targets, turnTime: 60 } };
+    const { fromRest, fromCruise, stop, steady, authority } = turned(craft);
+    for (const each of [fromRest, fromCruise, stop, steady, authority.need!.turnTime!.thrust]) {
+      expect(each.status).toBe('infeasible');
+    }
+    expect(turnFigures(stateOf(craft), ASKED)).toMatchObject({
+      timeTo90: null,
+      radius: null,
+      gustHeld: null,
+    });
+    const curve = steadyCurve(stateOf(craft), ASKED);
+    expect(curve.status === 'solved' && curve.value.every(({ turn }) => turn.status === 'infeasible')).toBe(
+      true,
+    );
+  }
+});
+
 test('targets are answered, and only when something is asked', () => {
   expect(turned(tail).authority.need).toBeNull();
   const asking = { ...tail, targets: { ...tail.targets, turnTime: 2 } };
