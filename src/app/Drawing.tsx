@@ -35,7 +35,7 @@ export function Drawing({ store, editor, palette }: DrawingProps) {
   const turning = tab === 'turn';
   const shown = { session, craft, selection, assessment, units, palette, tilted, snap, several, turning };
   return (
-    <div className="drawing">
+    <div className={studyDrawn ? 'drawing studied' : 'drawing'}>
       <NoticeArea notices={store.notices} />
       <div className="side-view">
         <SideView {...shown} {...planDrawn} viewState={viewState} />

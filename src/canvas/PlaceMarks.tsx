@@ -3,6 +3,7 @@ import type { Context } from 'konva/lib/Context.js';
 import { Shape } from 'react-konva/es/ReactKonvaCore.js';
 import type { Palette } from '../scene/palette.ts';
 import { type Band, nameSpot, type PlacePage, type Strip } from '../scene/placePlot.ts';
+import type { Rect } from '../scene/rect.ts';
 import type { ScreenPoint } from '../scene/view.ts';
 import { fontOf, shortened, textWidth, traceOnScreen, writeOn } from './paint.ts';
 import type { Size } from './useSize.ts';
@@ -26,9 +27,9 @@ export function PlaceMarks(props: PlaceMarksProps) {
       sceneFunc={(context) => {
         const { page, palette } = props;
         for (const band of page.struck) hatch(context, band, page, palette);
+        if (page.waiting) waiting(context, page.waiting, props);
         today(context, props);
         for (const strip of page.strips) drawStrip(context, strip, props);
-        if (page.waiting) waiting(context, page.waiting, props);
         reading(context, props);
       }}
     />
@@ -180,15 +181,18 @@ function reading(context: Context, { page, read, palette }: PlaceMarksProps): vo
 
 const APART_FROM_LINE = 9;
 
-const WAITING = 'not worked out yet';
-
+/** Shaded until it is worked out. */
 function waiting(context: Context, { left, right }: Band, { page, palette }: PlaceMarksProps): void {
-  if (right - left < textWidth(WAITING, TEXT) + 12) return;
-  const { top, foot } = page.strips[1]!;
-  context.font = TEXT;
-  context.textAlign = 'center';
-  context.textBaseline = 'middle';
-  writeOn(context, WAITING, { x: (left + right) / 2, y: (top + foot) / 2 }, palette.inkSoft, palette.paper);
+  const [top, foot] = [headOf(page), footOf(page)];
+  shade(context, { left, top, right, bottom: foot }, palette);
+}
+
+function shade(context: Context, { left, top, right, bottom }: Rect, { line: ink }: Palette): void {
+  context.save();
+  context.globalAlpha = 0.35;
+  context.fillStyle = ink;
+  context.fillRect(left, top, right - left, bottom - top);
+  context.restore();
 }
 
 type HeadProps = Omit<PlaceMarksProps, 'read'>;
@@ -206,7 +210,7 @@ function line(context: Context, choices: readonly string[], { page, size, palett
 
 const APART = 16;
 
-/** What dots, ring and hatching stand for. */
+/** What dots, ring, shade and hatching stand for. */
 function legend(context: Context, props: HeadProps): void {
   const { page, palette } = props;
   context.font = TEXT;
@@ -227,6 +231,11 @@ function legend(context: Context, props: HeadProps): void {
       context.lineWidth = 1.5;
       context.stroke();
     });
+  }
+  if (page.waiting) {
+    entry('not worked out yet', ({ x: left, y }) =>
+      shade(context, { left: left - 5, top: y - 5, right: left + 5, bottom: y + 5 }, palette),
+    );
   }
   if (page.struck.length > 0) {
     entry('propeller would strike', ({ x: left, y }) => {
