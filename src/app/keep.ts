@@ -15,6 +15,7 @@ export interface Keep {
   craft(id: string): Promise<KeptCraft | undefined>;
   /** Keeps the craft, merged with what is there; see `merge`. */
   put(next: KeptCraft, known: string | null): Promise<Pick<Merged, 'displaced'>>;
+  /** With its versions and the plans put by for it. */
   remove(id: string): Promise<void>;
   versions(id: string): Promise<readonly KeptVersion[]>;
   setting(name: string): Promise<unknown>;

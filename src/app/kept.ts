@@ -29,6 +29,9 @@ export interface Merged {
   readonly displaced: boolean;
 }
 
+/** The setting under which the plans put by for a craft are kept. */
+export const plansSetting = (craftId: string): string => `plans ${craftId}`;
+
 export const MOST_VERSIONS = 10;
 /** Within this many milliseconds one page's earlier texts count as one version. */
 export const VERSION_SPAN = 120_000;

@@ -1,7 +1,7 @@
 /** The keep in IndexedDB. A craft and its versions change in one transaction, so tabs cannot write over each other unseen. */
 import { type DBSchema, type IDBPDatabase, openDB } from 'idb';
 import type { Keep, Unmerged } from './keep.ts';
-import { type KeptCraft, type KeptVersion, merge, newestFirst } from './kept.ts';
+import { type KeptCraft, type KeptVersion, merge, newestFirst, plansSetting } from './kept.ts';
 
 interface Tables extends DBSchema {
   crafts: { key: string; value: KeptCraft };
@@ -54,10 +54,11 @@ class LastingKeep implements Keep {
   }
 
   async remove(id: string) {
-    const work = this.db.transaction(['crafts', 'versions'], 'readwrite', RELAXED);
+    const work = this.db.transaction(['crafts', 'versions', 'settings'], 'readwrite', RELAXED);
     await Promise.all([
       work.objectStore('crafts').delete(id),
       work.objectStore('versions').delete(id),
+      work.objectStore('settings').delete(plansSetting(id)),
       work.done,
     ]);
   }

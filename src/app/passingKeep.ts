@@ -1,6 +1,6 @@
 /** A keep in memory, for a browser window that refuses to store anything. */
 import type { Keep } from './keep.ts';
-import { type KeptCraft, type KeptVersion, merge, newestFirst } from './kept.ts';
+import { type KeptCraft, type KeptVersion, merge, newestFirst, plansSetting } from './kept.ts';
 
 export class PassingKeep implements Keep {
   readonly lasting = false;
@@ -26,6 +26,7 @@ export class PassingKeep implements Keep {
   async remove(id: string) {
     this.#crafts.delete(id);
     this.#versions.delete(id);
+    this.#settings.delete(plansSetting(id));
   }
 
   async versions(id: string) {

@@ -1,18 +1,18 @@
 /** What the drawing is given of the plan while the plan is in front. */
 import { useMemo } from 'react';
 import { withStation } from '../craft/station.ts';
-import { stowed } from '../craft/stowage.ts';
 import { hangLoad } from '../edit/edits/carry.ts';
 import type { Editor } from '../panels/editor.ts';
 import { type Planning, usePlanning } from '../panels/plan/planning.ts';
 import type { Assessment } from '../report/assessment.ts';
-import type { CarryCurve, PlanFound } from '../report/plans.ts';
+import type { CarryCurve } from '../report/plans.ts';
+import { type PlanToDraw, stowageToDraw } from '../report/planView.ts';
 import { assessed } from './assessed.ts';
 
 export interface PlanDrawn {
   /** Whether the plan is in front: where loads may go is drawn only then. */
   readonly planning: boolean;
-  readonly plan: PlanFound | null;
+  readonly plan: PlanToDraw | null;
   /** The craft with the plan carried out. */
   readonly planned: Assessment | null;
   readonly carry: CarryCurve | null;
@@ -33,10 +33,10 @@ export function usePlanDrawn(editor: Editor, inFront: boolean): PlanDrawn {
 }
 
 /** The kept plan that is looked at, else the latest; on the craft as it is now. */
-function planToDraw({ shown, answer }: Planning, { craft }: Editor): PlanFound | null {
-  const plan = shown?.plan ?? answer?.plan;
-  if (!plan || 'why' in plan) return null;
-  return !shown && answer?.craft === craft ? plan : { ...plan, craft: stowed(craft, plan.stowage) };
+function planToDraw({ shown, answer }: Planning, { craft }: Editor): PlanToDraw | null {
+  if (shown) return stowageToDraw(craft, shown.stowage);
+  if (!answer || 'why' in answer.plan) return null;
+  return answer.craft === craft ? answer.plan : stowageToDraw(craft, answer.plan.stowage);
 }
 
 /** Hangs the chosen load on the line of the curve; else the one that is selected, else the first. */

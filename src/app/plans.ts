@@ -61,12 +61,15 @@ export class Plans {
     else this.#put({ busy: false });
   };
 
-  readonly keep = (plan: PlanFound): void => {
+  readonly keep = ({ robust, stowage }: PlanFound): void => {
     const { kept } = this.state.get();
     if (kept.length >= MOST_KEPT) return;
     const number = Math.max(0, ...kept.map((each) => each.number)) + 1;
-    this.#put({ kept: [...kept, { number, plan }] });
+    this.#put({ kept: [...kept, { number, robust, stowage }] });
   };
+
+  /** Takes in what was put by on an earlier visit. */
+  readonly bringBack = (kept: readonly KeptPlan[]): void => this.#put({ kept });
 
   readonly show = (shown: KeptPlan | null): void => this.#put({ shown });
 

@@ -5,6 +5,7 @@ import type { Subject } from '../panels/turn/turning.ts';
 import type { PlanClient } from '../worker/planClient.ts';
 import { Carries } from './carries.ts';
 import { useCell } from './cell.ts';
+import { keptPlans, putKeptPlans } from './keptPlans.ts';
 import { Plans } from './plans.ts';
 import type { Store } from './store.ts';
 
@@ -27,29 +28,50 @@ export function usePlanningOf(store: Store, client: PlanClient, subject: Subject
       },
       again: plans.again,
       stop: plans.stop,
-      keep: plans.keep,
+      keep: (plan) => {
+        plans.keep(plan);
+        putBy(store, plans);
+      },
       show: plans.show,
-      drop: plans.drop,
+      drop: (kept) => {
+        plans.drop(kept);
+        putBy(store, plans);
+      },
       setLine: carries.setLine,
       stopCarry: carries.stopCurve,
       setCarryLoad: carries.setLoad,
       workOutTable: carries.workOutTable,
       stopTable: carries.stopTable,
     }),
-    [plansState, carriesState, plans, carries],
+    [plansState, carriesState, plans, carries, store],
   );
 }
 
-/** On another craft everything begins afresh. */
+/** So that they are there on the next visit too. */
+function putBy({ keep, craftId, notices }: Store, { state }: Plans): void {
+  putKeptPlans(keep, craftId, state.get().kept).catch(() =>
+    notices.add('This browser could not keep the plans put by: they last as long as this page.', 'bad'),
+  );
+}
+
+async function bringBack(store: Store, plans: Plans): Promise<void> {
+  const { craftId } = store;
+  const kept = await keptPlans(store.keep, craftId);
+  if (store.craftId === craftId) plans.bringBack(kept);
+}
+
+/** On another craft everything begins afresh, but for the plans put by for it. */
 function begin(store: Store, client: PlanClient): { plans: Plans; carries: Carries } {
   const plans = new Plans(store.shown, client);
   const carries = new Carries(store.shown, client);
+  void bringBack(store, plans);
   let { craftId } = store;
   store.shown.subscribe(() => {
     if (store.craftId === craftId) return;
     craftId = store.craftId;
     plans.forget();
     carries.forget();
+    void bringBack(store, plans);
   });
   return { plans, carries };
 }

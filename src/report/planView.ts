@@ -2,10 +2,10 @@
 import { type Craft, listed } from '../craft/craft.ts';
 import type { Place } from '../craft/placeSchema.ts';
 import type { Fill, LeadPiece, Slide } from '../craft/planningSchema.ts';
-import { withStation } from '../craft/station.ts';
-import { hungBallast, looseLoads, slidingParts } from '../craft/stowage.ts';
+import { stationOf, withStation } from '../craft/station.ts';
+import { hungBallast, looseLoads, type Stowage, slidingParts, stowed } from '../craft/stowage.ts';
 import type { CarryCurve, CarryPoint } from '../physics/ballast/carry.ts';
-import type { PlanFound } from '../physics/ballast/plan.ts';
+import type { PlanFound, PlannedLoad, PlannedWeight } from '../physics/ballast/plan.ts';
 import { ballastMass } from '../physics/ballast/setting.ts';
 import { positionOf } from '../physics/mass/position.ts';
 import type { Geometry, Hull, PieceView, Vec3 } from './assessment.ts';
@@ -13,8 +13,53 @@ import type { Geometry, Hull, PieceView, Vec3 } from './assessment.ts';
 /** The plan as far as it is drawn and told. */
 export type PlanToDraw = Pick<
   PlanFound,
-  'status' | 'craft' | 'weights' | 'slides' | 'loads' | 'deadBallast' | 'deadBallastToday'
+  'craft' | 'weights' | 'slides' | 'loads' | 'deadBallast' | 'deadBallastToday'
 >;
+
+/** A stowage as a plan for the craft of now, whichever it was worked out for; what it names that is gone is passed over. */
+export function stowageToDraw(today: Craft, stowage: Stowage): PlanToDraw {
+  const craft = stowed(today, stowage);
+  return {
+    craft,
+    weights: stowage.weights.flatMap((weight) => plannedWeight(today, weight)),
+    slides: stowage.slides.flatMap(({ part, to }) => {
+      const place = today.parts.byId[part]?.place;
+      return place && stationOf(place) !== to ? [{ part, from: stationOf(place), to }] : [];
+    }),
+    loads: looseLoads(today).map(({ id }) => plannedLoad(today, craft, id)),
+    deadBallast: ballastMass(listed(craft.parts)),
+    deadBallastToday: ballastMass(listed(today.parts)),
+  };
+}
+
+function plannedWeight(
+  { hardpoints }: Craft,
+  { hardpoint, pieces }: Stowage['weights'][number],
+): PlannedWeight[] {
+  const spot = hardpoints.byId[hardpoint];
+  const mass = pieces.reduce((sum, piece) => sum + piece.mass * piece.count, 0);
+  return spot ? [{ hardpoint, mass, pieces: spot.fill === 'pieces' ? pieces : [] }] : [];
+}
+
+function plannedLoad(today: Craft, then: Craft, load: string): PlannedLoad {
+  const place = then.parts.byId[load]?.place ?? null;
+  return {
+    load,
+    place,
+    hardpoint: place && hardpointOf(then, load, place),
+    placeToday: today.parts.byId[load]?.place ?? null,
+  };
+}
+
+/** The hardpoint at which a load hangs, of those where it may; null when it hangs at none. */
+export function hardpointOf({ loads, hardpoints }: Craft, load: string, place: Place): string | null {
+  const spot = JSON.stringify(place);
+  const at = loads.byId[load]?.options.find(
+    (option) =>
+      option.kind === 'hardpoint' && JSON.stringify(hardpoints.byId[option.hardpoint]?.place) === spot,
+  );
+  return at?.kind === 'hardpoint' ? at.hardpoint : null;
+}
 
 export type CarrySpot = Pick<CarryPoint, 'station' | 'mass' | 'deadBallast' | 'proven'>;
 

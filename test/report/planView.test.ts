@@ -4,7 +4,13 @@ import { loadHighs } from '../../src/numeric/linearProgram/highsSolver.ts';
 import { type PlanFound, planOf } from '../../src/physics/ballast/plan.ts';
 import { assess } from '../../src/report/assess.ts';
 import type { Geometry } from '../../src/report/assessment.ts';
-import { alongPlace, hardpointFills, planView, slideLines } from '../../src/report/planView.ts';
+import {
+  alongPlace,
+  hardpointFills,
+  planView,
+  slideLines,
+  stowageToDraw,
+} from '../../src/report/planView.ts';
 import { sampleCraft } from '../samples/readSamples.ts';
 
 const solver = await loadHighs();
@@ -97,4 +103,25 @@ test('rails are of what a plan may move: not of locked parts, and of a load the 
       .map(({ owner }) => owner)
       .filter(({ kind }) => kind === 'load'),
   ).toEqual(slides);
+});
+
+test.each(['orchard-counter', 'planetarium-moon', 'library-scanner', 'museum-atrium'])(
+  '%s: a stowage on its own is drawn as the plan that it is of',
+  (name) => {
+    const { craft, plan } = seen(name);
+    const { weights, slides, loads, craft: then } = plan;
+    const drawn = stowageToDraw(craft, plan.stowage);
+    expect(drawn).toMatchObject({ weights, slides, loads, craft: then });
+    expect(drawn.deadBallast).toBeCloseTo(plan.deadBallast, 9);
+    expect(drawn.deadBallastToday).toBeCloseTo(plan.deadBallastToday, 9);
+  },
+);
+
+test('what a stowage names that is gone by now is not drawn', () => {
+  const { plan } = seen('library-scanner');
+  const craft: Craft = { ...plan.craft, hardpoints: keyed([]) };
+  const slides = [{ part: 'gone', to: 1 }];
+  const drawn = stowageToDraw(craft, { ...plan.stowage, slides });
+  expect(plan.weights.length).toBeGreaterThan(0);
+  expect([drawn.weights, drawn.slides]).toEqual([[], []]);
 });

@@ -16,7 +16,7 @@ const HEADS = ['Plan', 'Dead ballast', 'Useful load', 'Pitch', 'Parts moved'];
 export function KeptPlans() {
   const { craft } = useEditor();
   const { kept, shown } = usePlanning();
-  const then = useMemo(() => shown && stowed(craft, shown.plan.stowage), [craft, shown]);
+  const then = useMemo(() => shown && stowed(craft, shown.stowage), [craft, shown]);
   if (kept.length === 0) return null;
   return (
     <>
@@ -47,7 +47,7 @@ export function KeptPlans() {
 function KeptRow({ kept, craft }: { kept: KeptPlan; craft: Craft }) {
   const { units, apply } = useEditor();
   const { shown, show, drop } = usePlanning();
-  const then = useMemo(() => stowed(craft, kept.plan.stowage), [craft, kept]);
+  const then = useMemo(() => stowed(craft, kept.stowage), [craft, kept]);
   const figures = useMemo(() => planFigures(then), [then]);
   const isShown = shown === kept;
   const name = `plan ${kept.number}`;
@@ -56,7 +56,7 @@ function KeptRow({ kept, craft }: { kept: KeptPlan; craft: Craft }) {
       <tr>
         <th scope="row">
           {kept.number}
-          {kept.plan.robust && <span className="aside"> robust</span>}
+          {kept.robust && <span className="aside"> robust</span>}
           {!figures.met && <span className="field-error"> misses a target</span>}
         </th>
         {FIGURES.map((key) => (
@@ -76,7 +76,7 @@ function KeptRow({ kept, craft }: { kept: KeptPlan; craft: Craft }) {
             <button type="button" aria-pressed={isShown} onClick={() => show(isShown ? null : kept)}>
               Show<span className="spoken"> {name}</span>
             </button>
-            <button type="button" onClick={() => apply(applyPlan(kept.plan.stowage))}>
+            <button type="button" onClick={() => apply(applyPlan(kept.stowage))}>
               Apply<span className="spoken"> {name}</span>
             </button>
             <button type="button" onClick={() => drop(kept)}>

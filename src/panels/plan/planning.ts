@@ -1,6 +1,7 @@
 /** What the plan panel is given: the plan as far as it is worked out, and the ways to ask for another. The page provides it. */
 import { createContext, useContext } from 'react';
 import type { Craft } from '../../craft/craft.ts';
+import type { Stowage } from '../../craft/stowage.ts';
 import type { CarryCurve, CarryLine, CarryTable, Plan, PlanFound, PlanProgress } from '../../report/plans.ts';
 
 /** The plan, and the plans put by. */
@@ -35,7 +36,8 @@ export interface PlanAnswer {
 export interface KeptPlan {
   /** Counted from 1. */
   readonly number: number;
-  readonly plan: PlanFound;
+  readonly robust: boolean;
+  readonly stowage: Stowage;
 }
 
 export interface CarryState {

@@ -58,7 +58,7 @@ function foundOn(craft: Craft): PlanFound {
 
 const plan = foundOn(orchard);
 const curve = carryCurve(orchard, solver, { kind: 'keel' });
-const shown: PlansState['kept'] = [{ number: 1, plan }];
+const shown: PlansState['kept'] = [{ number: 1, robust: false, stowage: plan.stowage }];
 const full = panel(orchard, {
   answer: { plan, craft: orchard },
   kept: shown,
