@@ -1,6 +1,7 @@
 /** How the craft turns, climbs and flies, as it is or as its ballast plan would have it, and where a thruster had better sit. */
 import type { ReactNode } from 'react';
 import { HAZARDS } from '../../report/hazards.ts';
+import { TETHER } from '../../report/turning/turnCautions.ts';
 import type { TurnReport } from '../../report/turning/turnReport.ts';
 import type { Turn } from '../../report/turning/turns.ts';
 import { Caution } from '../Caution.tsx';
@@ -70,9 +71,6 @@ export function TurnSheet({ now, player, onTargets }: TurnPanelProps & { now: Re
 /** Of a craft without thrust only what can be said: the sentence on top says why there is no more. */
 const told = (rows: TurnReport['rows']): TurnReport['rows'] =>
   Object.fromEntries(Object.entries(rows).filter(([, { value }]) => value !== null));
-
-const TETHER =
-  'Models leave things out. Try the craft, and every change to it, on a tether before it flies free.';
 
 function Cautions({ report: { cautions } }: { report: TurnReport }) {
   const { craft } = useEditor();
