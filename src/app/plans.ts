@@ -71,11 +71,21 @@ export class Plans {
   /** Takes in what was put by on an earlier visit. */
   readonly bringBack = (kept: readonly KeptPlan[]): void => this.#put({ kept });
 
-  readonly show = (shown: KeptPlan | null): void => this.#put({ shown });
+  readonly show = (shown: KeptPlan | null): void => {
+    const { beside } = this.state.get();
+    this.#put({ shown, beside: shown === beside ? null : beside });
+  };
+
+  readonly showBeside = (beside: KeptPlan | null): void => this.#put({ beside });
 
   readonly drop = (dropped: KeptPlan): void => {
-    const { kept, shown } = this.state.get();
-    this.#put({ kept: kept.filter((each) => each !== dropped), shown: shown === dropped ? null : shown });
+    const { kept, shown, beside } = this.state.get();
+    const unless = (each: KeptPlan | null) => (each === dropped ? null : each);
+    this.#put({
+      kept: kept.filter((each) => each !== dropped),
+      shown: unless(shown),
+      beside: unless(beside),
+    });
   };
 
   /** Plans belong to one craft: on another it begins with none. */

@@ -33,6 +33,7 @@ export function usePlanningOf(store: Store, client: PlanClient, subject: Subject
         putBy(store, plans);
       },
       show: plans.show,
+      showBeside: plans.showBeside,
       drop: (kept) => {
         plans.drop(kept);
         putBy(store, plans);

@@ -48,7 +48,7 @@ export function weightWords(craft: Craft, { hardpoint, mass, pieces }: PlannedWe
 }
 
 /** Differences of lead smaller than this are none, kg. */
-const LEAST_LEAD = 5e-5;
+export const LEAST_LEAD = 5e-5;
 
 /** What to do at each hardpoint: hang, change or take off; nothing where the lead is right already. */
 export function leadSteps(craft: Craft, { weights }: PlanFound): string[] {

@@ -146,7 +146,7 @@ test('a robust plan is another plan', async () => {
   expect(client.asked.map(({ robust }) => robust)).toEqual([false, true]);
 });
 
-test('a handful of plans is kept, each under a number of its own, and none beyond', () => {
+test('a handful of plans is kept, each under a number of its own, and none beyond; none stands beside itself', () => {
   const { plans } = onPage();
   for (let i = 0; i < MOST_KEPT + 1; i++) plans.keep(found(i));
   const { kept } = plans.state.get();
@@ -154,6 +154,13 @@ test('a handful of plans is kept, each under a number of its own, and none beyon
   plans.show(kept[1]!);
   plans.drop(kept[1]!);
   expect(plans.state.get()).toMatchObject({ shown: null, kept: [kept[0], ...kept.slice(2)] });
+  plans.show(kept[2]!);
+  plans.showBeside(kept[3]!);
+  plans.show(kept[3]!);
+  expect(plans.state.get()).toMatchObject({ shown: kept[3], beside: null });
+  plans.showBeside(kept[2]!);
+  plans.drop(kept[2]!);
+  expect(plans.state.get()).toMatchObject({ shown: kept[3], beside: null });
   plans.keep(found(9));
   expect(plans.state.get().kept.at(-1)!.number).toBe(6);
 });

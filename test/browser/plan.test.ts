@@ -168,6 +168,10 @@ test('plans are kept over a reload, compared, shown and dropped; a mistyped load
   expect(await page.locator('.kept-plans tbody th').allInnerTexts()).toHaveLength(2);
   await page.getByRole('button', { name: 'Show plan 1' }).click();
   await page.getByText('The drawing shows kept plan 1.').waitFor();
+  await page.getByRole('combobox', { name: 'Plan 1 beside' }).selectOption('Plan 2');
+  const beside = page.getByRole('table', { name: 'Plan 2 and plan 1' });
+  expect(await beside.getByRole('columnheader').allInnerTexts()).toEqual(['Figure', 'Plan 2', 'Plan 1']);
+  await beside.getByText('What differs').waitFor();
   await page.getByRole('button', { name: 'Drop plan 1' }).click();
   expect(await page.locator('.kept-plans tbody th').allInnerTexts()).toEqual([expect.stringMatching(/^2\b/)]);
   await open(page);

@@ -1,4 +1,4 @@
-/** Plans put by to be compared: each as it would be on the craft of now. */
+/** Plans put by to be compared, with today or two by two: each as it would be on the craft of now. */
 import { useMemo } from 'react';
 import type { Craft } from '../../craft/craft.ts';
 import { stowed } from '../../craft/stowage.ts';
@@ -7,7 +7,7 @@ import { movedParts } from '../../report/movedParts.ts';
 import { planFigures } from '../../report/planFigures.ts';
 import { formatQuantity } from '../../units/format.ts';
 import { useEditor } from '../editor.ts';
-import { Compared } from './Compared.tsx';
+import { KeptBeside } from './KeptBeside.tsx';
 import { type KeptPlan, usePlanning } from './planning.ts';
 
 const FIGURES = ['deadBallast', 'usefulLoad', 'float.pitch'];
@@ -16,7 +16,6 @@ const HEADS = ['Plan', 'Dead ballast', 'Useful load', 'Pitch', 'Parts moved'];
 export function KeptPlans() {
   const { craft } = useEditor();
   const { kept, shown } = usePlanning();
-  const then = useMemo(() => shown && stowed(craft, shown.stowage), [craft, shown]);
   if (kept.length === 0) return null;
   return (
     <>
@@ -39,7 +38,7 @@ export function KeptPlans() {
           </tbody>
         </table>
       </div>
-      {shown && then && <Compared today={craft} then={then} title={`Today and with plan ${shown.number}`} />}
+      {shown && <KeptBeside shown={shown} />}
     </>
   );
 }

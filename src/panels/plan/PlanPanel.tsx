@@ -60,7 +60,13 @@ function Answer({ answer: { plan, craft } }: { answer: PlanAnswer }) {
   return (
     <div className={waiting ? 'plan-answer plan-old' : 'plan-answer'}>
       <PlanFoundView plan={plan} report={report} fresh={craft === now} />
-      <Compared today={craft} then={plan.craft} title="Today and with the plan" />
+      <Compared
+        title="Today and with the plan"
+        sides={[
+          { head: 'Today', craft },
+          { head: 'Plan', craft: plan.craft },
+        ]}
+      />
     </div>
   );
 }

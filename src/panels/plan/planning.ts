@@ -20,6 +20,8 @@ export interface PlansState {
   readonly kept: readonly KeptPlan[];
   /** The kept plan that is looked at instead of the latest. */
   readonly shown: KeptPlan | null;
+  /** The kept plan that it is compared with; null for today. */
+  readonly beside: KeptPlan | null;
 }
 
 /** What can be carried where, as far as it was asked for. */
@@ -70,6 +72,7 @@ export interface Planning extends PlansState, CarriesState {
   stop(): void;
   keep(plan: PlanFound): void;
   show(kept: KeptPlan | null): void;
+  showBeside(kept: KeptPlan | null): void;
   drop(kept: KeptPlan): void;
   setLine(line: CarryLine | null): void;
   stopCarry(): void;
@@ -90,6 +93,7 @@ export const NO_PLANS: PlansState = {
   failure: null,
   kept: [],
   shown: null,
+  beside: null,
 };
 
 export const NO_CARRIES: CarriesState = {

@@ -32,6 +32,7 @@ const planning = (state: Partial<Planning>): Planning => ({
   stop: nothing,
   keep: nothing,
   show: nothing,
+  showBeside: nothing,
   drop: nothing,
   setLine: nothing,
   stopCarry: nothing,
@@ -124,6 +125,23 @@ test('kept plans stand in a table; each can be shown, applied and dropped', () =
   for (const word of ['Kept plans', 'Show plan 1', 'Apply plan 1', 'Drop plan 1', 'Today and with plan 1']) {
     expect(text).toContain(word);
   }
+});
+
+test('two kept plans stand side by side in their figures and in what differs', () => {
+  const [first] = plan.stowage.loads;
+  const without = { ...plan.stowage, loads: plan.stowage.loads.filter((load) => load !== first) };
+  const kept = [...shown, { number: 2, robust: false, stowage: without }];
+  const beside = (state: Partial<Planning>) => seen(panel(orchard, { kept, shown: kept[1]!, ...state }));
+  const text = beside({ beside: kept[0]! });
+  for (const word of ['Plan 2 beside', 'Plan 1 and plan 2', 'Pendulum depth', 'What differs', 'ashore']) {
+    expect(text).toContain(word);
+  }
+  expect(text).toContain(orchard.loads.byId[first!.load]!.name);
+  expect(beside({})).toContain('Today and with plan 2');
+  const same = [...shown, { ...shown[0]!, number: 2 }];
+  expect(beside({ kept: same, shown: same[1]!, beside: same[0]! })).toContain(
+    'Everything is in the same place.',
+  );
 });
 
 test('a part’s slide and a hardpoint’s limit and fill are typed in the inspector', () => {
