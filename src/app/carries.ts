@@ -3,8 +3,9 @@ import type { Craft } from '../craft/craft.ts';
 import { type CarriesState, type CarryState, NO_CARRIES, type TableState } from '../panels/plan/planning.ts';
 import type { CarryLine } from '../report/plans.ts';
 import type { Tasks } from '../worker/messages.ts';
-import type { Answer, Job, PlanClient } from '../worker/planClient.ts';
+import type { Answer, PlanClient } from '../worker/planClient.ts';
 import { Cell } from './cell.ts';
+import { OneJob } from './oneJob.ts';
 import type { Store } from './store.ts';
 
 type Curve = Tasks['carry']['value'];
@@ -18,12 +19,12 @@ export class Carries {
   readonly #shown: Store['shown'];
   readonly #client: PlanClient;
   readonly #pause: number;
+  readonly #curve = new OneJob<Curve, number>();
+  readonly #table = new OneJob<Table>();
   /** The craft, line and robustness of the last request, in one. */
   #asked: readonly unknown[] = [];
   #robust = false;
   #looked = false;
-  #curve: Job<Curve> | null = null;
-  #table: Job<Table> | null = null;
   #timer: ReturnType<typeof setTimeout> | undefined;
 
   constructor(shown: Store['shown'], client: PlanClient, pause = PAUSE) {
@@ -53,29 +54,24 @@ export class Carries {
 
   readonly stopCurve = (): void => {
     clearTimeout(this.#timer);
-    this.#curve?.stop();
+    this.#curve.stop();
     this.#putCarry({ busy: false });
   };
 
   readonly workOutTable = (): void => {
     const { craft } = this.#shown.get();
-    const job = this.#client.table({ craft, options: { robust: this.#robust } });
-    this.#table = job;
     this.#putTable({ busy: true, why: null });
-    void job.answer.then((answer) => {
-      if (this.#table !== job) return;
-      this.#table = null;
-      this.#putTable({ busy: false, ...tableOutcome(answer, craft) });
-    });
+    this.#table.begin(
+      () => this.#client.table({ craft, options: { robust: this.#robust } }),
+      (answer) => this.#putTable({ busy: false, ...tableOutcome(answer, craft) }),
+    );
   };
 
-  readonly stopTable = (): void => this.#table?.stop();
+  readonly stopTable = (): void => void this.#table.stop();
 
   readonly forget = (): void => {
     this.#dropCurve();
-    const table = this.#table;
-    this.#table = null;
-    table?.stop();
+    this.#table.drop();
     this.#asked = [];
     this.state.set(NO_CARRIES);
   };
@@ -98,22 +94,15 @@ export class Carries {
 
   #dropCurve(): void {
     clearTimeout(this.#timer);
-    const job = this.#curve;
-    this.#curve = null;
-    job?.stop();
+    this.#curve.drop();
   }
 
   #workOut(craft: Craft, line: CarryLine): void {
-    const tell = (share: number) => {
-      if (this.#curve === job) this.#putCarry({ share });
-    };
-    const job = this.#client.carry({ craft, line, options: { robust: this.#robust } }, tell);
-    this.#curve = job;
-    void job.answer.then((answer) => {
-      if (this.#curve !== job) return;
-      this.#curve = null;
-      this.#putCarry({ busy: false, ...curveOutcome(answer) });
-    });
+    this.#curve.begin(
+      (tell) => this.#client.carry({ craft, line, options: { robust: this.#robust } }, tell),
+      (answer) => this.#putCarry({ busy: false, ...curveOutcome(answer) }),
+      (share) => this.#putCarry({ share }),
+    );
   }
 
   #putCarry(change: Partial<CarryState>): void {

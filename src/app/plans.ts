@@ -6,8 +6,9 @@
 import type { Craft } from '../craft/craft.ts';
 import { type KeptPlan, MOST_KEPT, NO_PLANS, type PlansState } from '../panels/plan/planning.ts';
 import type { Plan, PlanFound, PlanProgress } from '../report/plans.ts';
-import type { Answer, Job, PlanClient } from '../worker/planClient.ts';
+import type { Answer, PlanClient } from '../worker/planClient.ts';
 import { Cell } from './cell.ts';
+import { OneJob } from './oneJob.ts';
 import type { Store } from './store.ts';
 
 interface Asked {
@@ -25,9 +26,9 @@ export class Plans {
   readonly #shown: Store['shown'];
   readonly #client: PlanClient;
   readonly #pause: number;
+  readonly #job = new OneJob<Plan, PlanProgress>();
   #looked = false;
   #asked: Asked | null = null;
-  #job: Job<Plan> | null = null;
   #timer: ReturnType<typeof setTimeout> | undefined;
 
   /** The client begins its thread with the first request. */
@@ -57,8 +58,7 @@ export class Plans {
   /** What was found so far stays, as a plan that is not proven. */
   readonly stop = (): void => {
     clearTimeout(this.#timer);
-    if (this.#job) this.#job.stop();
-    else this.#put({ busy: false });
+    if (!this.#job.stop()) this.#put({ busy: false });
   };
 
   readonly keep = ({ robust, stowage }: PlanFound): void => {
@@ -110,9 +110,7 @@ export class Plans {
   /** What runs is no longer wanted, nor what it found. */
   #dropJob(): void {
     clearTimeout(this.#timer);
-    const job = this.#job;
-    this.#job = null;
-    job?.stop();
+    this.#job.drop();
   }
 
   #follow({ craft, robust }: Asked): void {
@@ -130,19 +128,15 @@ export class Plans {
 
   #workOut({ craft, robust }: Asked): void {
     let best: PlanFound | null = null;
-    const hear = (progress: PlanProgress) => {
-      best = progress.plan ?? best;
-      if (this.#job !== job) return;
-      const done = progress.step === 'explaining' && best;
-      this.#put({ progress, ...(done ? { answer: { plan: best!, craft } } : {}) });
-    };
-    const job = this.#client.plan(craft, { robust }, hear);
-    this.#job = job;
-    void job.answer.then((answer) => {
-      if (this.#job !== job) return;
-      this.#job = null;
-      this.#put({ busy: false, progress: null, ...outcome(answer, craft, best) });
-    });
+    this.#job.begin(
+      (tell) => this.#client.plan(craft, { robust }, tell),
+      (answer) => this.#put({ busy: false, progress: null, ...outcome(answer, craft, best) }),
+      (progress) => {
+        best = progress.plan ?? best;
+        const done = progress.step === 'explaining' && best;
+        this.#put({ progress, ...(done ? { answer: { plan: best!, craft } } : {}) });
+      },
+    );
   }
 
   #put(change: Partial<PlansState>): void {

@@ -5,8 +5,9 @@
 import { NO_STUDY, type StudyState } from '../panels/turn/studying.ts';
 import type { PlacementStudy, TurnAsked } from '../report/turning/studies.ts';
 import type { Tasks } from '../worker/messages.ts';
-import type { Answer, Job, PlanClient } from '../worker/planClient.ts';
+import type { Answer, PlanClient } from '../worker/planClient.ts';
 import { Cell } from './cell.ts';
+import { OneJob } from './oneJob.ts';
 import type { Store } from './store.ts';
 
 type Study = Tasks['place']['value'];
@@ -15,7 +16,7 @@ export class Studies {
   readonly state = new Cell<StudyState>(NO_STUDY);
   readonly #shown: Store['shown'];
   readonly #client: PlanClient;
-  #job: Job<Study> | null = null;
+  readonly #job = new OneJob<Study, Tasks['place']['progress']>();
 
   constructor(shown: Store['shown'], client: PlanClient) {
     this.#shown = shown;
@@ -27,23 +28,17 @@ export class Studies {
     this.close();
     const { craft } = this.#shown.get();
     this.state.set({ ...NO_STUDY, part, craft, asked, busy: true });
-    const job = this.#client.place({ craft, part, options: { asked } }, (progress) => {
-      if (this.#job === job) this.#put(progress);
-    });
-    this.#job = job;
-    void job.answer.then((answer) => {
-      if (this.#job !== job) return;
-      this.#job = null;
-      this.#put({ busy: false, ...outcome(answer, this.state.get()) });
-    });
+    this.#job.begin(
+      (tell) => this.#client.place({ craft, part, options: { asked } }, tell),
+      (answer) => this.#put({ busy: false, ...outcome(answer, this.state.get()) }),
+      (progress) => this.#put(progress),
+    );
   };
 
-  readonly stop = (): void => this.#job?.stop();
+  readonly stop = (): void => void this.#job.stop();
 
   readonly close = (): void => {
-    const job = this.#job;
-    this.#job = null;
-    job?.stop();
+    this.#job.drop();
     this.state.set(NO_STUDY);
   };
 
