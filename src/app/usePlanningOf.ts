@@ -6,13 +6,15 @@ import type { PlanClient } from '../worker/planClient.ts';
 import { Carries } from './carries.ts';
 import { useCell } from './cell.ts';
 import { keptPlans, putKeptPlans } from './keptPlans.ts';
+import { Orders } from './orders.ts';
 import { Plans } from './plans.ts';
 import type { Store } from './store.ts';
 
 export function usePlanningOf(store: Store, client: PlanClient, subject: Subject): Planning {
-  const [{ plans, carries }] = useState(() => begin(store, client));
+  const [{ plans, carries, orders }] = useState(() => begin(store, client));
   const plansState = useCell(plans.state);
   const carriesState = useCell(carries.state);
+  const ordersState = useCell(orders.state);
   const { tab } = useCell(store.view);
   const inFront = tab === 'plan';
   const looked = inFront || (tab === 'turn' && subject === 'planned');
@@ -22,7 +24,9 @@ export function usePlanningOf(store: Store, client: PlanClient, subject: Subject
     () => ({
       ...plansState,
       ...carriesState,
+      orders: ordersState,
       setRobust: (robust) => {
+        orders.forget();
         plans.setRobust(robust);
         carries.setRobust(robust);
       },
@@ -43,8 +47,10 @@ export function usePlanningOf(store: Store, client: PlanClient, subject: Subject
       setCarryLoad: carries.setLoad,
       workOutTable: carries.workOutTable,
       stopTable: carries.stopTable,
+      tryOrders: () => plansState.answer && orders.start(plansState.answer),
+      stopOrders: orders.stop,
     }),
-    [plansState, carriesState, plans, carries, store],
+    [plansState, carriesState, ordersState, plans, carries, orders, store],
   );
 }
 
@@ -62,9 +68,10 @@ async function bringBack(store: Store, plans: Plans): Promise<void> {
 }
 
 /** On another craft everything begins afresh, but for the plans put by for it. */
-function begin(store: Store, client: PlanClient): { plans: Plans; carries: Carries } {
+function begin(store: Store, client: PlanClient): { plans: Plans; carries: Carries; orders: Orders } {
   const plans = new Plans(store.shown, client);
   const carries = new Carries(store.shown, client);
+  const orders = new Orders(store.shown, client);
   void bringBack(store, plans);
   let { craftId } = store;
   store.shown.subscribe(() => {
@@ -72,7 +79,8 @@ function begin(store: Store, client: PlanClient): { plans: Plans; carries: Carri
     craftId = store.craftId;
     plans.forget();
     carries.forget();
+    orders.forget();
     void bringBack(store, plans);
   });
-  return { plans, carries };
+  return { plans, carries, orders };
 }

@@ -51,7 +51,8 @@ function placeDifferences([one, other]: Two): PlanDifference[] {
   });
 }
 
-const isSameSpot = (craft: Craft, a: Part, b: Part): boolean =>
+/** Whether a part is where it was, to the half millimetre, and at the same hardpoint if at any. */
+export const isSameSpot = (craft: Craft, a: Part, b: Part): boolean =>
   !isElsewhere(a.place, b.place) && hardpointOf(craft, a.id, a.place) === hardpointOf(craft, b.id, b.place);
 
 function placeText(craft: Craft, part: Part | undefined): string {

@@ -105,6 +105,25 @@ test('the order of wishes is changed by buttons and by arrow keys, and the plan 
   expect(await savedText(page)).toBe(before);
 });
 
+test('the other orders of the wishes are tried when asked for; one that changes the plan can be taken', async ({
+  visit,
+}) => {
+  const page = await visit();
+  await planTab(page).click();
+  await upToDate(page);
+  await unfold(page, 'Wishes');
+  await page.getByRole('button', { name: 'Would another order change it?' }).click();
+  await page.getByText('Another order would not change this plan: the other 5 were tried.').waitFor();
+  await openSample(page, 'aviary-counter');
+  await upToDate(page);
+  await page.getByRole('button', { name: 'Would another order change it?' }).click();
+  const other = page.getByRole('list', { name: 'Orders that change the plan' }).getByRole('listitem');
+  expect(await other.textContent()).toMatch(/^Useful load, wire, parts moved: 1 part moved instead of 0/);
+  await other.getByRole('button', { name: 'Take it' }).click();
+  expect(JSON.parse(await savedText(page)).wishes).toEqual(['usefulLoad', 'leastWire', 'fewestMoved']);
+  await other.waitFor({ state: 'detached' });
+});
+
 test('what was unfolded or folded stays so while other tabs are in front', async ({ visit }) => {
   const page = await visit();
   const tab = (name: string) => page.getByRole('tab', { name, exact: true }).click();

@@ -3,6 +3,7 @@ import { type KeyboardEvent, useRef } from 'react';
 import { WISHES, type Wish } from '../../craft/planningSchema.ts';
 import { setWishes } from '../../edit/edits/craft.ts';
 import { useEditor } from '../editor.ts';
+import { OrderCheck } from './OrderCheck.tsx';
 
 const WORDS: Readonly<Record<Wish, string>> = {
   usefulLoad: 'Most useful load, by rank',
@@ -45,6 +46,7 @@ export function WishList() {
           Add “{WORDS[wish]}”
         </button>
       ))}
+      <OrderCheck />
     </>
   );
 }

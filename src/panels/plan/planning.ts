@@ -3,6 +3,7 @@ import { createContext, useContext } from 'react';
 import type { Craft } from '../../craft/craft.ts';
 import type { Stowage } from '../../craft/stowage.ts';
 import type { CarryCurve, CarryLine, CarryTable, Plan, PlanFound, PlanProgress } from '../../report/plans.ts';
+import type { OrderTried } from '../../report/wishOrders.ts';
 
 /** The plan, and the plans put by. */
 export interface PlansState {
@@ -64,7 +65,18 @@ export interface TableState {
   readonly why: string | null;
 }
 
+/** Plans for the other orders of the wishes, as far as they were asked for. */
+export interface OrdersState {
+  /** For what they are tried; null while nobody asked. */
+  readonly asked: { readonly craft: Craft; readonly robust: boolean } | null;
+  readonly tried: readonly OrderTried[];
+  readonly busy: boolean;
+  /** Why not all of them were tried. */
+  readonly why: string | null;
+}
+
 export interface Planning extends PlansState, CarriesState {
+  readonly orders: OrdersState;
   setRobust(robust: boolean): void;
   /** Works the plan out again, as after stopping. */
   again(): void;
@@ -79,6 +91,9 @@ export interface Planning extends PlansState, CarriesState {
   setCarryLoad(load: string): void;
   workOutTable(): void;
   stopTable(): void;
+  /** Plans for every other order of the wishes, beside the plan there is. */
+  tryOrders(): void;
+  stopOrders(): void;
 }
 
 /** As many plans as can be kept side by side. */
@@ -100,6 +115,8 @@ export const NO_CARRIES: CarriesState = {
   carry: { line: null, curve: null, busy: false, share: 0, why: null, load: null },
   table: { table: null, craft: null, busy: false, why: null },
 };
+
+export const NO_ORDERS: OrdersState = { asked: null, tried: [], busy: false, why: null };
 
 export const PlanningContext = createContext<Planning | null>(null);
 

@@ -109,7 +109,7 @@ function heldAt(craft: Craft, place: Place): number {
 }
 
 /** All its pieces, kg. */
-const massOf = ({ mass, copies }: Part): number => mass * (copies.kind === 'pair' ? 2 : copies.count);
+export const massOf = ({ mass, copies }: Part): number => mass * (copies.kind === 'pair' ? 2 : copies.count);
 
 function loadChoice(craft: Craft, load: Load): LoadChoice {
   const options = load.options.map((option) => siteOf(craft, option));

@@ -2,12 +2,14 @@ import { createElement } from 'react';
 import { renderToStaticMarkup } from 'react-dom/server';
 import { expect, test } from 'vitest';
 import type { Craft } from '../../../src/craft/craft.ts';
+import { stowed } from '../../../src/craft/stowage.ts';
 import { loadHighs } from '../../../src/numeric/linearProgram/highsSolver.ts';
 import { EditorContext } from '../../../src/panels/editor.ts';
 import { Inspector } from '../../../src/panels/Inspector.tsx';
 import { PlanPanel } from '../../../src/panels/plan/PlanPanel.tsx';
 import {
   NO_CARRIES,
+  NO_ORDERS,
   NO_PLANS,
   type Planning,
   PlanningContext,
@@ -17,6 +19,7 @@ import { carryCurve } from '../../../src/physics/ballast/carry.ts';
 import { carryTable } from '../../../src/physics/ballast/carryTable.ts';
 import { type PlanFound, planOf } from '../../../src/physics/ballast/plan.ts';
 import { planReport } from '../../../src/report/planReport.ts';
+import { otherOrders } from '../../../src/report/wishOrders.ts';
 import type { UnitSystem } from '../../../src/units/units.ts';
 import { sampleCraft } from '../../samples/readSamples.ts';
 import { danglingIds, editorOn, render, seen, unnamed } from '../render.tsx';
@@ -27,6 +30,7 @@ const nothing = () => {};
 const planning = (state: Partial<Planning>): Planning => ({
   ...NO_PLANS,
   ...NO_CARRIES,
+  orders: NO_ORDERS,
   setRobust: nothing,
   again: nothing,
   stop: nothing,
@@ -39,6 +43,8 @@ const planning = (state: Partial<Planning>): Planning => ({
   setCarryLoad: nothing,
   workOutTable: nothing,
   stopTable: nothing,
+  tryOrders: nothing,
+  stopOrders: nothing,
   ...state,
 });
 
@@ -118,6 +124,34 @@ test('progress says how far it is, and there is a way to stop', () => {
   const text = seen(panel(orchard, { busy: true, progress }));
   expect(text).toContain('Searching: best so far 50.0 g, none below 40.0 g.');
   expect(text).toContain('Stop');
+});
+
+test('whether another order of the wishes changes the plan is said once all were tried, and not before', () => {
+  const answer = { plan, craft: orchard };
+  const asked = { craft: orchard, robust: false };
+  const tried = otherOrders(orchard.wishes).map((order) => ({ order, plan }));
+  const text = (orders: Partial<Planning['orders']>, state: Partial<Planning> = {}) =>
+    seen(panel(orchard, { answer, orders: { ...NO_ORDERS, asked, ...orders }, ...state }));
+  const none = `Another order would not change this plan: the other ${tried.length} were tried.`;
+  expect(text({ tried })).toContain(none);
+  for (const orders of [{}, { tried, busy: true }, { tried: tried.slice(1), why: 'Stopped.' }]) {
+    expect(text(orders)).not.toContain('not change this plan');
+  }
+  const open = tried.map((each) => ({ ...each, plan: { ...plan, wishesProven: false } }));
+  expect(text({ tried: open })).toContain(`${tried.length} of ${tried.length} other orders could not be`);
+  const less = { ...plan, craft: stowed(orchard, { ...plan.stowage, loads: [] }) };
+  expect(text({ tried: tried.map((each) => ({ ...each, plan: less })) })).toMatch(
+    /: 0\.0 g of useful load .* Take it/,
+  );
+  const question = 'Would another order change it?';
+  expect(text({})).toContain(question);
+  for (const state of [
+    { busy: true },
+    { answer: { plan, craft: { ...orchard } } },
+    { answer: { plan: { ...plan, wishesProven: false }, craft: orchard } },
+  ]) {
+    expect(text({}, state)).not.toContain(question);
+  }
 });
 
 test('kept plans stand in a table; each can be shown, applied and dropped', () => {
