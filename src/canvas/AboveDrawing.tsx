@@ -10,7 +10,7 @@ import type { Scene } from './gestures/gesture.ts';
 import { HandMarks, Outlines } from './HandMarks.tsx';
 import type { Overlay } from './overlay.ts';
 import { PartMarks } from './PartMarks.tsx';
-import { fontOf, trace, worldTransform, writeOn } from './paint.ts';
+import { fontOf, paintAxis, paintHull, worldTransform, writeOn } from './paint.ts';
 import { arcShown, ThrustMarks, thrustHandles } from './ThrustMarks.tsx';
 import type { Movers } from './useMovers.ts';
 import { YawMarks } from './YawMarks.tsx';
@@ -77,25 +77,9 @@ interface HullProps {
 const Hull = memo(({ outline, palette, px }: HullProps) => (
   <Shape
     sceneFunc={(context) => {
-      trace(context, outline, true);
-      context.fillStyle = palette.gas;
-      context.fill();
-      context.strokeStyle = palette.skin;
-      context.lineWidth = 1.5 * px;
-      context.stroke();
+      paintHull(context, outline, palette, px);
       const ends = outline.map(({ z }) => z);
-      trace(
-        context,
-        [
-          { u: 0, z: Math.max(...ends) },
-          { u: 0, z: Math.min(...ends) },
-        ],
-        false,
-      );
-      context.setLineDash([14 * px, 5 * px, 3 * px, 5 * px]);
-      context.lineWidth = px;
-      context.globalAlpha = 0.6;
-      context.stroke();
+      paintAxis(context, { u: 0, z: Math.max(...ends) }, { u: 0, z: Math.min(...ends) }, px);
     }}
   />
 ));

@@ -17,7 +17,7 @@ import { HandMarks, type HandMarksProps, Outlines } from './HandMarks.tsx';
 import type { Overlay } from './overlay.ts';
 import { PartMarks } from './PartMarks.tsx';
 import { PointMarks } from './PointMarks.tsx';
-import { fontOf, trace, traceOnScreen, worldTransform, writeOn } from './paint.ts';
+import { fontOf, paintHull, trace, traceOnScreen, worldTransform, writeOn } from './paint.ts';
 import type { Movers } from './useMovers.ts';
 import { WireMarks } from './WireMarks.tsx';
 
@@ -89,16 +89,7 @@ interface SectionProps {
 }
 
 const Greatest = memo(({ outline, palette, px }: SectionProps) => (
-  <Shape
-    sceneFunc={(context) => {
-      trace(context, outline, true);
-      context.fillStyle = palette.gas;
-      context.fill();
-      context.strokeStyle = palette.skin;
-      context.lineWidth = 1.5 * px;
-      context.stroke();
-    }}
-  />
+  <Shape sceneFunc={(context) => paintHull(context, outline, palette, px)} />
 ));
 
 /** The section at the part selected. */

@@ -4,7 +4,7 @@ import { Shape } from 'react-konva/es/ReactKonvaCore.js';
 import { keelLine, sideOutline } from '../scene/outline.ts';
 import type { Palette } from '../scene/palette.ts';
 import type { Geometry } from '../scene/subject.ts';
-import { trace } from './paint.ts';
+import { paintAxis, paintHull, trace } from './paint.ts';
 
 export interface HullMarksProps {
   readonly hull: Geometry['hull'];
@@ -19,22 +19,11 @@ export const HullMarks = memo(({ hull, palette, px }: HullMarksProps) => {
   return (
     <Shape
       sceneFunc={(context) => {
-        trace(context, outline, true);
-        context.fillStyle = palette.gas;
-        context.fill();
-        context.strokeStyle = palette.skin;
-        context.lineWidth = 1.5 * px;
-        context.stroke();
+        paintHull(context, outline, palette, px);
         trace(context, keel, false);
         context.lineWidth = 3 * px;
         context.stroke();
-        context.beginPath();
-        context.moveTo(0, 0);
-        context.lineTo(hull.length, 0);
-        context.setLineDash([14 * px, 5 * px, 3 * px, 5 * px]);
-        context.lineWidth = px;
-        context.globalAlpha = 0.6;
-        context.stroke();
+        paintAxis(context, { u: 0, z: 0 }, { u: hull.length, z: 0 }, px);
       }}
     />
   );

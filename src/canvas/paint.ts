@@ -1,5 +1,6 @@
 /** Strokes on a Konva context: paths in metres under the transform of the view, and text in px. */
 import type { Context } from 'konva/lib/Context.js';
+import type { Palette } from '../scene/palette.ts';
 import type { Path } from '../scene/path.ts';
 import type { PlanePoint, ScreenPoint, View } from '../scene/view.ts';
 
@@ -31,6 +32,30 @@ export function traceOnScreen(context: Context, points: readonly ScreenPoint[], 
     points.map(({ x, y }) => ({ u: x, z: y })),
     closed,
   );
+}
+
+/** Gas within its skin; `px`: size of a pixel in the unit of the context. */
+export function paintHull(
+  context: Context,
+  outline: readonly PlanePoint[],
+  { gas, skin }: Pick<Palette, 'gas' | 'skin'>,
+  px: number,
+): void {
+  trace(context, outline, true);
+  context.fillStyle = gas;
+  context.fill();
+  context.strokeStyle = skin;
+  context.lineWidth = 1.5 * px;
+  context.stroke();
+}
+
+/** The hull's axis, dashed, in the ink in hand. */
+export function paintAxis(context: Context, from: PlanePoint, to: PlanePoint, px: number): void {
+  trace(context, [from, to], false);
+  context.setLineDash([14 * px, 5 * px, 3 * px, 5 * px]);
+  context.lineWidth = px;
+  context.globalAlpha = 0.6;
+  context.stroke();
 }
 
 export interface Inks {
