@@ -70,7 +70,7 @@ test('from above it turns in yaw, to its limit and no farther, and says what tha
   await openTurn(page);
   const far = await reach(page, 'above-view');
   await drag(page, await outOf(page, 'above-view', 0, far), await outOf(page, 'above-view', -80, far));
-  expect(degrees(await savedText(page), 'yaw')).toBeCloseTo(-45, 6);
+  expect(degrees(await savedText(page), 'yaw')).toBeCloseTo(-60, 6);
   const above = page.getByRole('application', { name: 'View from above' });
   // Thrust to port at the tail brings the nose to starboard.
   await expect.poll(() => above.locator('p').first().textContent()).toContain('yaws to starboard');

@@ -84,12 +84,13 @@ export const setParts = (ids: readonly string[], label: string, change: Partial<
 
 /**
  * What becomes a fin is one as large as its box, and a fin as large as its box stays so when the box changes. What is a
- * fin no more keeps its figures, should it become one again.
+ * fin no more loses figures that are only those of its box, and keeps others, should it become one again.
  */
 function alter(part: Part, change: Partial<PartFields>): void {
   const boxed = part.fin !== null && isBoxed(part.fin, part.size);
   Object.assign(part, change);
   if (change.kind === 'fin') part.fin ??= finOfBox(part.size);
+  else if (change.kind && boxed) part.fin = null;
   if (change.size && boxed) part.fin = finOfBox(part.size) ?? part.fin;
 }
 

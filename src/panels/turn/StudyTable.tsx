@@ -1,6 +1,7 @@
 /** The stations that nothing beats. One that is picked can be moved to; one that is pointed at is marked in the drawing. */
 import { useState } from 'react';
 import { moveAndHang, moveThruster } from '../../edit/edits/moveThruster.ts';
+import { placed } from '../../edit/place.ts';
 import type { PlacedPoint } from '../../report/turning/studies.ts';
 import { formatNumber } from '../../units/format.ts';
 import { inUnits } from '../../units/sentence.ts';
@@ -155,6 +156,7 @@ function Actions({ point, at, fresh }: { point: PlacedPoint; at: string; fresh: 
     return <p className="aside">{thruster.name || 'It'} is locked. Unlock it to move it.</p>;
   const { stowage } = point;
   const ready = fresh && !dragging;
+  const here = placed(thruster.place, point.place) === thruster.place;
   return (
     <>
       {point.cautions.map((caution) => (
@@ -163,20 +165,25 @@ function Actions({ point, at, fresh }: { point: PlacedPoint; at: string; fresh: 
         </p>
       ))}
       <span className="plan-actions">
-        <button
-          type="button"
-          aria-disabled={!ready}
-          onClick={() => ready && apply(moveThruster(thruster, point.place))}
-        >
-          Move it there<span className="spoken">, to {at}</span>
-        </button>
+        {here ? (
+          <span className="aside">It is there now.</span>
+        ) : (
+          <button
+            type="button"
+            aria-disabled={!ready}
+            onClick={() => ready && apply(moveThruster(thruster, point.place))}
+          >
+            Move it there<span className="spoken">, to {at}</span>
+          </button>
+        )}
         {stowage && (
           <button
             type="button"
             aria-disabled={!ready}
             onClick={() => ready && apply(moveAndHang(thruster, point.place, stowage))}
           >
-            Move it, hang the ballast<span className="spoken">, at {at}</span>
+            {here ? 'Hang the ballast' : 'Move it, hang the ballast'}
+            <span className="spoken">, at {at}</span>
           </button>
         )}
       </span>
