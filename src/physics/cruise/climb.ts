@@ -144,6 +144,6 @@ function munkCautions(craft: PitchCraft, speed: number): string[] {
   if (critical.status === 'infeasible' || critical.value.speed === null || speed < critical.value.speed)
     return [];
   return [
-    `From ${say(critical.value.speed, 'speed')} on the Munk moment overcomes what holds the nose: a disturbance may swing it off before the path follows.`,
+    `From ${say(critical.value.speed, 'speed')} on the Munk moment overcomes what holds the nose: this is an attitude that it may not keep.`,
   ];
 }

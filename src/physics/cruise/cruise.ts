@@ -43,6 +43,8 @@ export function cruiseOf(craft: PitchCraft, asked: CruiseAsked): Outcome<Cruise>
   if (craft.thrusters.length === 0) return NO_THRUSTER;
   const floating = floatingOf(craft);
   if (floating.status === 'infeasible') return floating;
+  const loose = neverHeld(craft, asked, floating.value);
+  if (loose) return loose;
   const pitch = balanceFrom(craft, asked, floating.value);
   if (pitch.status === 'infeasible') return pitch;
   const level = levelAt(craft, asked, pitch.value);
@@ -121,6 +123,17 @@ function noBalance(craft: PitchCraft, asked: CruiseAsked, floating: number): Out
       'Bring the line of thrust nearer to the CB, fly slower or hang weight lower.',
     )
   );
+}
+
+/**
+ * Why the nose is held at no attitude that would be searched, told before the search. Level flight is slower the further
+ * the hull stands from the path, so it is slowest at one of the ends.
+ */
+function neverHeld(craft: PitchCraft, asked: CruiseAsked, floating: number) {
+  const levels = [floating, FARTHEST, -FARTHEST].map((pitch) => levelAt(craft, asked, pitch));
+  const speeds = levels.flatMap((level) => (level.status === 'solved' ? level.value.speed : []));
+  if (speeds.length < levels.length || !notHeld(craft, Math.min(...speeds))) return undefined;
+  return notHeld(craft, speeds[0]!);
 }
 
 /** Why the nose is not held at a speed, or nothing when it is. */

@@ -8,7 +8,9 @@
  * H weight less lift, N. The thrusters stand at that angle to the hull, so that the attitude nearest to level holds by the
  * pendulum even where a foot at S would tip over. Still air, thrust as at rest, heel and downwash on the hull left out.
  *
- * Thrusters that cannot be turned that far take no part. Derived from moments about S.
+ * Thrusters that cannot be turned that far take no part. Where none can, but some come within 5° of it, s short, those
+ * stand at their limit: Σ T = |H| / cos s, and |H| tan s is left that pushes the craft ahead or astern. The moment of that
+ * force and of the drag it meets is left out. Derived from moments about S.
  */
 import { infeasible, type Outcome, solved } from '../../numeric/outcome.ts';
 import type { Vec3 } from '../../numeric/vector.ts';
@@ -17,6 +19,7 @@ import { say } from '../../units/sentence.ts';
 import { heavinessOf, type Loading } from '../balance/loading.ts';
 import type { CraftState } from '../craftState.ts';
 import { momentAbout } from '../mass/body.ts';
+import { heldWithin } from '../thrust/ahead.ts';
 import { NO_THRUSTER } from '../thrust/speed.ts';
 import { type Thruster, thrustersOf } from '../thrust/thrusters.ts';
 import { FARTHEST } from './cruise.ts';
@@ -34,8 +37,12 @@ export interface Hover {
   readonly available: number;
   /** Needed over available, 0 … 1. */
   readonly share: number;
+  /** N, + ahead: left where the thrust does not stand quite upright; the craft drifts by it. */
+  readonly sideways: number;
   /** Ids of the parts that take part, each once. */
   readonly parts: readonly string[];
+  /** One sentence each. */
+  readonly cautions: readonly string[];
 }
 
 /** Lighter or heavier than this by less needs no thrust, N. */
@@ -44,38 +51,65 @@ const NOTHING = 1e-6;
 export function hoverOf(state: CraftState): Outcome<Hover> {
   const thrusters = thrustersOf(state).filter(({ staticThrust }) => staticThrust > 0);
   if (thrusters.length === 0) return NO_THRUSTER;
-  const forward = hoverWith(state.loading, thrusters, false);
-  if (forward.status === 'solved') return forward;
   const able = thrusters.filter(({ reverse }) => reverse > 0);
-  const backward = able.length > 0 ? hoverWith(state.loading, able, true) : forward;
-  return backward.status === 'solved' ? backward : forward;
+  const tries = [ROUNDING, NEARLY].flatMap((slack) => [
+    hoverWith(state.loading, thrusters, false, slack),
+    ...(able.length > 0 ? [hoverWith(state.loading, able, true, slack)] : []),
+  ]);
+  return tries.find(({ status }) => status === 'solved') ?? tries[0]!;
 }
 
-/** Thrusters are left out one after the other, the one that reaches least far first, until the rest can be turned as needed. */
-function hoverWith(loading: Loading, thrusters: readonly Thruster[], reversed: boolean): Outcome<Hover> {
+/**
+ * Thrusters are left out one after the other, the one that reaches least far first, until the rest can be turned as
+ * needed, or nearly so by `slack`, rad.
+ */
+function hoverWith(
+  loading: Loading,
+  thrusters: readonly Thruster[],
+  reversed: boolean,
+  slack: number,
+): Outcome<Hover> {
   const needed = STANDARD_GRAVITY * heavinessOf(loading);
   const strengths = thrusters.map(({ staticThrust, reverse }) => (reversed ? reverse : 1) * staticThrust);
   const available = strengths.reduce((sum, each) => sum + each, 0);
   const pitch = levelPitch(loading, thrustCentre(thrusters, strengths, available));
   const upward = needed > 0 !== reversed;
-  const vector = (upward ? Math.PI / 2 : -Math.PI / 2) - pitch;
-  const short = thrusters.map((thruster) => shortOf(thruster, vector));
+  const upright = (upward ? Math.PI / 2 : -Math.PI / 2) - pitch;
+  const idle = Math.abs(needed) <= NOTHING;
+  const short = thrusters.map((thruster) => (idle ? 0 : shortOf(thruster, upright)));
   const worst = short.indexOf(Math.max(...short));
-  if (Math.abs(needed) > NOTHING && short[worst]! > ROUNDING) {
-    if (thrusters.length > 1)
-      return hoverWith(
-        loading,
-        thrusters.filter((_, i) => i !== worst),
-        reversed,
-      );
-    return outOfReach(thrusters[0]!, needed, vector);
+  if (short[worst]! > slack && thrusters.length > 1) {
+    const rest = thrusters.filter((_, i) => i !== worst);
+    return hoverWith(loading, rest, reversed, slack);
   }
-  const share = Math.abs(needed) / available;
-  if (share > 1) return tooWeak(needed, available);
   if (Math.abs(pitch) > FARTHEST) return tooSteep(pitch);
-  const parts = [...new Set(thrusters.map(({ part }) => part))];
-  return solved({ pitch, vector, reversed, needed, available, share, parts });
+  if (short[worst]! > slack) return outOfReach(thrusters[0]!, needed, upright);
+  const vector = idle
+    ? upright
+    : thrusters.reduce((angle, { pitch: limits }) => heldWithin(limits, angle), upright);
+  const thrust = Math.abs(needed) / Math.cos(vector - upright);
+  if (thrust > available) return tooWeak(thrust, available);
+  const sideways = (reversed ? -1 : 1) * thrust * Math.cos(vector + pitch);
+  return solved({
+    pitch,
+    vector,
+    reversed,
+    needed,
+    available,
+    share: thrust / available,
+    sideways,
+    parts: [...new Set(thrusters.map(({ part }) => part))],
+    cautions: Math.abs(vector - upright) > ROUNDING ? [drifts(upright, vector, sideways)] : [],
+  });
 }
+
+/** So near to upright it is a hover that drifts, rad. */
+const NEARLY = (5 * Math.PI) / 180;
+
+const way = (sideways: number): string => (sideways > 0 ? 'ahead' : 'astern');
+
+const drifts = (upright: number, vector: number, sideways: number): string =>
+  `The thrust would have to stand at ${say(upright, 'angle')} to the hull; turned to its limit of ${say(vector, 'angle')} it holds the height and pushes the craft ${way(sideways)} with ${say(Math.abs(sideways), 'force')}: it drifts.`;
 
 /** Angles as near as this are one, rad. */
 const ROUNDING = 1e-9;
@@ -97,21 +131,25 @@ function levelPitch({ solid, cb, grossLift }: Loading, at: Vec3): number {
 }
 
 function outOfReach({ name, pitch: { least, most } }: Thruster, needed: number, vector: number) {
-  const task = needed > 0 ? 'To carry the heaviness' : 'To hold the lightness';
+  const [force, mass] = [Math.abs(needed), Math.abs(needed) / STANDARD_GRAVITY];
+  const task =
+    needed > 0
+      ? `It is heavy by ${say(force, 'force')}, which the thrust has to carry`
+      : `It is light by ${say(force, 'force')} and has to be held down`;
   const limits =
     most > least
       ? `turns from ${say(least, 'angle')} to ${say(most, 'angle')}`
       : `is fixed at ${say(least, 'angle')}`;
   return infeasible(
-    `${task} the thrust has to stand at ${say(vector, 'angle')} to the hull; ${name} ${limits}.`,
-    'Let a thruster turn further in pitch, or trim the craft to no heaviness.',
+    `${task} at ${say(vector, 'angle')} to the hull; ${name} ${limits}.`,
+    `Let a thruster turn further in pitch, or ${needed > 0 ? 'take off' : 'hang on'} ${say(mass, 'mass')}, so that it needs no thrust to stay.`,
   );
 }
 
 const tooWeak = (needed: number, available: number) =>
   infeasible(
     `Hovering takes ${say(Math.abs(needed), 'force')} of thrust; the thrusters that can be turned that far give ${say(available, 'force')}.`,
-    'Trim the craft nearer to no heaviness, or fit more thrust.',
+    'Bring weight nearer to lift, or fit more thrust.',
   );
 
 const tooSteep = (pitch: number) =>

@@ -119,6 +119,11 @@ test('from the critical speed on no attitude is given, and the sentence names bo
     status: 'infeasible',
     why: expect.stringContaining(`{${critical} speed}`),
   });
+  expect(solvedValue(steadySpeed(state, 1))).toBeGreaterThan(2 * critical);
+  expect(cruisePitch(state, { throttle: 1 })).toMatchObject({
+    status: 'infeasible',
+    why: expect.stringContaining(`{${critical} speed}`),
+  });
 });
 
 test('why not: no thruster, too steep at rest, too little thrust, thrust backwards, couple too strong', () => {

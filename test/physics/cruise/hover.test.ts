@@ -96,10 +96,12 @@ test('why not, with amounts: no thruster, angle out of reach, too little thrust,
     return hover.status === 'infeasible' ? hover.why : '';
   };
   expect(why(stateWith([]))).toBe('No part has the figures of a thruster.');
-  expect(why(balanced({ heaviness: 0.05 }))).toMatch(/To carry the heaviness .* is fixed at \{0 angle\}/);
+  expect(why(balanced({ heaviness: 0.05 }))).toMatch(
+    /heavy by \{0\.49.* force\}, which the thrust has to carry at .* is fixed at \{0 angle\}/,
+  );
   const half = { pitch: turning(0, 60 * degrees) };
   expect(why(balanced({ heaviness: -0.05, thrusterAft: 0, thruster: half }))).toMatch(
-    /To hold the lightness .*-1\.57.* angle.*turns from \{-1\.047.* to \{1\.047/,
+    /light by \{0\.49.* force\} and has to be held down at .*-1\.57.* angle.*turns from \{-1\.047.* to \{1\.047/,
   );
   expect(why(balanced({ heaviness: 0.2, thrusterAft: 0, thruster: free }))).toMatch(
     /Hovering takes \{1\.96.* force\}.*give \{1 force\}/,
@@ -107,4 +109,33 @@ test('why not, with amounts: no thruster, angle out of reach, too little thrust,
   expect(why(balanced({ heaviness: 0.1, thrusterAft: 2, thruster: { pitch: turning(0, 3) } }))).toMatch(
     /would stand at/,
   );
+});
+
+test('short of upright by less than 5° it hovers at its limit and drifts; by more it is refused', () => {
+  const upTo = (angle: number, heaviness = 0.05) =>
+    hoverOf(balanced({ heaviness, thrusterAft: 0, thruster: { pitch: turning(0, angle * degrees) } }));
+  const needed = 0.05 * STANDARD_GRAVITY;
+  for (const [angle, heaviness, way] of [
+    [87, 0.05, 'ahead'],
+    [87, -0.05, 'ahead'],
+    [85.1, 0.05, 'ahead'],
+  ] as const) {
+    const { vector, share, available, sideways, cautions } = solvedValue(upTo(angle, heaviness));
+    expect(Math.abs(vector)).toBeCloseTo(angle * degrees, 9);
+    // What is left of the thrust carries the weight, and the rest pushes ahead.
+    expect(share * available * Math.sin(angle * degrees)).toBeCloseTo(needed, 9);
+    expect(sideways).toBeCloseTo(needed / Math.tan(angle * degrees), 9);
+    expect(cautions).toEqual([expect.stringMatching(new RegExp(`pushes the craft ${way}.*drifts`))]);
+  }
+  expect(solvedValue(upTo(90)).cautions).toEqual([]);
+  expect(upTo(84.9).status).toBe('infeasible');
+});
+
+test('a light craft is told how much to hang on, a heavy one how much to take off', () => {
+  const remedy = (heaviness: number) => {
+    const hover = hoverOf(balanced({ heaviness, thrusterAft: 0 }));
+    return hover.status === 'infeasible' ? hover.remedy : '';
+  };
+  expect(remedy(0.05)).toMatch(/take off \{0\.05\d* mass\}|take off \{0\.0499\d* mass\}/);
+  expect(remedy(-0.05)).toMatch(/hang on \{0\.05\d* mass\}|hang on \{0\.0499\d* mass\}/);
 });
