@@ -49,12 +49,14 @@ export function useLabels(asked: LabelsAsked): readonly Label[] {
 
 export interface LabelsProps {
   readonly labels: readonly Label[];
+  /** Parts that are amiss: their names stand out. */
+  readonly amiss: ReadonlySet<string>;
   readonly palette: Palette;
   /** Whether gas, not paper, lies under a label. */
   onGas(at: Label): boolean;
 }
 
-export const Labels = memo(({ labels, palette, onGas }: LabelsProps) => (
+export const Labels = memo(({ labels, amiss, palette, onGas }: LabelsProps) => (
   <Shape
     sceneFunc={(context) => {
       for (const { leader } of labels) if (leader) line(context, leader, palette);
@@ -62,7 +64,8 @@ export const Labels = memo(({ labels, palette, onGas }: LabelsProps) => (
       context.textAlign = 'left';
       context.textBaseline = 'middle';
       for (const label of labels) {
-        writeOn(context, label.text, label, palette.ink, onGas(label) ? palette.gas : palette.paper);
+        const ink = amiss.has(label.id) ? palette.bad : palette.ink;
+        writeOn(context, label.text, label, ink, onGas(label) ? palette.gas : palette.paper);
       }
     }}
   />

@@ -12,12 +12,13 @@ export interface PartMarkProps {
   readonly px: number;
 }
 
-/** A figure drawn larger than it is has a dotted edge; one on the far side is faint. */
+/** A figure drawn larger than it is has a dotted edge; one on the far side is faint; one that is amiss has a bad one. */
 const PartMark = memo(({ figure, palette, px }: PartMarkProps) => (
   <Shape
     opacity={figure.far ? 0.5 : 1}
     sceneFunc={(context) => {
-      context.strokeStyle = palette.partEdge;
+      const edge = figure.amiss ? palette.bad : palette.partEdge;
+      context.strokeStyle = edge;
       context.lineWidth = px;
       for (const strut of figure.struts) {
         trace(context, strut, false);
@@ -25,7 +26,7 @@ const PartMark = memo(({ figure, palette, px }: PartMarkProps) => (
       }
       if (figure.enlarged) context.setLineDash([1.5 * px, 1.5 * px]);
       const fill = figure.kind === 'ballast' ? palette.lead : palette.part;
-      paintPaths(context, figure.paths, { fill, edge: palette.partEdge, width: 1.2 * px });
+      paintPaths(context, figure.paths, { fill, edge, width: (figure.amiss ? 2 : 1.2) * px });
     }}
   />
 ));

@@ -53,6 +53,7 @@ export function SideDrawing({ scene, selection, overlay, faded, sparing, childre
     ],
     [hull, view, units, still],
   );
+  const amiss = useMemo(() => new Set(still.filter((each) => each.amiss).map(({ part }) => part)), [still]);
   const hoveredPart = hover?.kind === 'part' ? hover.id : null;
   const labels = useLabels({
     wanted: wantedLabels(craft, scene.still, view, idsOf(selection, 'part'), hoveredPart, sparing),
@@ -92,7 +93,7 @@ export function SideDrawing({ scene, selection, overlay, faded, sparing, childre
           <WireMarks lines={scene.stillLines} ink={palette.wire} px={px} />
           <PartMarks figures={scene.still} palette={palette} px={px} />
         </Group>
-        <Labels labels={labels} palette={palette} onGas={onGas} />
+        <Labels labels={labels} amiss={amiss} palette={palette} onGas={onGas} />
         {view.tilt === 0 && <FootRuler view={view} palette={palette} units={units} />}
       </Layer>
       {children(labels)}

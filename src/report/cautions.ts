@@ -1,14 +1,20 @@
 /** Things to mind that belong to no single figure. */
 import { listed } from '../craft/craft.ts';
 import type { Place } from '../craft/placeSchema.ts';
+import { kept } from '../numeric/kept.ts';
 import type { CraftState } from '../physics/craftState.ts';
 import { say } from '../units/sentence.ts';
+import { insideWords } from './insideHull.ts';
+
+/** A drag asks again at every frame, and moves few parts. */
+const insideHull = kept(insideWords);
 
 export function cautionsOf(state: CraftState): string[] {
   const { craft, air, hull } = state;
   return [
     ...air.cautions,
     ...listed(craft.parts).flatMap(({ name, kind, place }) => beyondHull(name || kind, place, hull.length)),
+    ...listed(craft.parts).flatMap((part) => insideHull(part, state.pieces[part.id]!, hull) ?? []),
     ...listed(craft.hardpoints).flatMap(({ name, place }) =>
       beyondHull(name || 'Hardpoint', place, hull.length),
     ),

@@ -24,3 +24,12 @@ export function placeAs(kind: PlaceKind, at: Vec3, hull: Hull): Place {
     }
   }
 }
+
+/**
+ * The place that a builder who chooses another kind means: the same point, but never one buried under the skin that was
+ * chosen. A list stepped through with the arrow keys passes the axis on its way to the skin.
+ */
+export function placeChosen(kind: PlaceKind, at: Vec3, hull: Hull): Place {
+  const place = placeAs(kind, at, hull);
+  return place.kind === 'skin' ? { ...place, standoff: Math.max(0, place.standoff) } : place;
+}

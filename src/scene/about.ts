@@ -2,6 +2,7 @@
 import type { BeamBar } from '../report/assessment.ts';
 import { formatQuantity } from '../units/format.ts';
 import type { Grip } from './grip.ts';
+import { insideLines } from './insideLines.ts';
 import type { Readout } from './readout.ts';
 import { geometryOf, type Subject } from './subject.ts';
 import { thrustReadout } from './thrustWords.ts';
@@ -16,7 +17,8 @@ export function aboutGrip(subject: Subject, grip: Grip): Readout | null {
     case 'part':
     case 'wire': {
       const bar = geometry.beam.find(({ kind, id }) => kind === grip.kind && id === grip.id);
-      return bar ? aboutBar(subject, bar) : { title, lines: [] };
+      const about = bar ? aboutBar(subject, bar) : { title, lines: [] };
+      return { ...about, lines: [...about.lines, ...insideLines(subject, geometry, grip)] };
     }
     case 'wireEnd':
       return { title, lines: ['Drag it onto a part to join it'] };

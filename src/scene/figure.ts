@@ -5,6 +5,7 @@
 import { finOutline } from '../craft/finOutline.ts';
 import type { Part } from '../craft/schema.ts';
 import type { Hull, PieceView } from '../report/assessment.ts';
+import { depthInside } from '../report/insideHull.ts';
 import { keelAt, onSection } from './outline.ts';
 import { box, carried, type Path, p, polygon, stroke } from './path.ts';
 import { FRONT_SHAPES } from './shapesFront.ts';
@@ -24,6 +25,8 @@ export interface Figure {
   readonly enlarged: boolean;
   /** On the side away from the eye. */
   readonly far: boolean;
+  /** A propeller or a fin inside the hull, where it works nothing. */
+  readonly amiss: boolean;
 }
 
 /** Least size on screen, px: of the larger and of the smaller dimension. */
@@ -79,7 +82,7 @@ export function sideFigure(part: Part, piece: PieceView, hull: Hull, px: number)
   const top = z + outward / 2;
   const struts =
     part.place.kind === 'keel' ? strutsTo(hull, x, top, kind === 'gondola' ? 0.3 * across : 0) : [];
-  return finish(part, piece, {
+  return finish(part, piece, hull, {
     middle: p(x, z),
     paths,
     struts,
@@ -109,7 +112,7 @@ export function frontFigure(part: Part, piece: PieceView, hull: Hull, px: number
   );
   const struts = part.place.kind === 'keel' ? [[p(0, keelAt(hull, x)), p(y, z + outward / 2)]] : [];
   const hanging = struts.filter(([keel, end]) => keel!.z > end!.z + 1e-9);
-  return finish(part, piece, { middle: p(y, z), paths, struts: hanging, enlarged, far: false });
+  return finish(part, piece, hull, { middle: p(y, z), paths, struts: hanging, enlarged, far: false });
 }
 
 /** From above, the nose up: what drives and steadies the craft; of anything else its box. */
@@ -127,7 +130,7 @@ export function aboveFigure(part: Part, piece: PieceView, hull: Hull, px: number
   const paths = rooted
     ? finOnSkin(size, piece, hull, ({ u }, station) => p(u, -station))
     : shape.map((path) => carried(path, ({ u, z: out }) => carry(p(out, -u))));
-  return finish(part, piece, {
+  return finish(part, piece, hull, {
     middle: p(y, -x),
     paths,
     struts: [],
@@ -138,11 +141,12 @@ export function aboveFigure(part: Part, piece: PieceView, hull: Hull, px: number
 
 type Drawn = Pick<Figure, 'middle' | 'paths' | 'struts' | 'enlarged' | 'far'>;
 
-const finish = (part: Part, piece: PieceView, drawn: Drawn): Figure => ({
+const finish = (part: Part, piece: PieceView, hull: Hull, drawn: Drawn): Figure => ({
   part: part.id,
   copy: piece.copy,
   kind: part.kind,
   ...drawn,
+  amiss: depthInside(part, piece.middle, hull) > 0,
   box: boxOf(drawn.paths.flatMap((path) => path.points)),
 });
 

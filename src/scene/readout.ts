@@ -2,6 +2,7 @@
 import type { Place } from '../craft/placeSchema.ts';
 import { formatQuantity } from '../units/format.ts';
 import type { Grip } from './grip.ts';
+import { insideLines } from './insideLines.ts';
 import { type Geometry, geometryOf, rowValue, type Subject, type UnitSystem } from './subject.ts';
 import { thrustReadout } from './thrustWords.ts';
 import { floatWords, heelWords, momentWords, nameOfGrip, pitchWords } from './words.ts';
@@ -47,18 +48,16 @@ function aboutHeld(
   }
 }
 
-function aboutPart(
-  { craft, units }: Subject,
-  { hull, cb, pieces, beam }: Geometry,
-  id: string,
-  copy: number,
-): string[] | null {
+function aboutPart(subject: Subject, geometry: Geometry, id: string, copy: number): string[] | null {
+  const { craft, units } = subject;
+  const { hull, cb, pieces, beam } = geometry;
   const piece = pieces.find((each) => each.part === id && each.copy === copy);
   const part = craft.parts.byId[id];
   if (!piece || !part) return null;
   const bar = beam.find((each) => each.kind === 'part' && each.id === id);
   const moment = bar ? [momentWords(bar.mass, bar.station - cb[0], units)] : [];
-  return [...whereWords(units, hull, part.place, piece.middle[0]), ...moment];
+  const inside = insideLines(subject, geometry, { kind: 'part', id });
+  return [...whereWords(units, hull, part.place, piece.middle[0]), ...moment, ...inside];
 }
 
 function whereWords(units: UnitSystem, hull: Geometry['hull'], place: Place, station: number): string[] {

@@ -1,9 +1,11 @@
 import { expect, test } from 'vitest';
 import { firstThruster } from '../../src/craft/firstFigures.ts';
 import { PART_KINDS } from '../../src/craft/schema.ts';
-import { apparentSize, frontFigure, LEAST_PX, sideFigure } from '../../src/scene/figure.ts';
+import { aboutGrip } from '../../src/scene/about.ts';
+import { aboveFigure, apparentSize, frontFigure, LEAST_PX, sideFigure } from '../../src/scene/figure.ts';
 import { keelAt } from '../../src/scene/outline.ts';
-import { craft, geometry, part } from './fixture.ts';
+import { sideReadout } from '../../src/scene/readout.ts';
+import { craft, geometry, part, subject } from './fixture.ts';
 
 const PX = 1 / 400;
 
@@ -92,4 +94,23 @@ test('a thruster is drawn as wide as its propeller, a fin as large as its outlin
   const [outline] = figuresOf([fin]);
   expect(outline!.box.top - outline!.box.bottom).toBeCloseTo(0.3, 9);
   expect(outline!.box.right - outline!.box.left).toBeCloseTo(0.2, 9);
+});
+
+test('a propeller inside the hull is drawn as amiss and says so in the notes, one beside it is not', () => {
+  const motor = { kind: 'thruster' as const, thruster: firstThruster({ width: 0.2, height: 0.2 }) };
+  const parts = [
+    part('inside', { kind: 'axis', station: 1.4 }, motor),
+    part('beyond', { kind: 'keel', station: 1.4, drop: 0.2 }, motor),
+    part('load', { kind: 'axis', station: 1.4 }),
+  ];
+  for (const make of [sideFigure, frontFigure, aboveFigure]) {
+    expect(figuresOf(parts, make).map(({ amiss }) => amiss)).toEqual([true, false, false]);
+  }
+  const lines = (id: string) => [
+    ...aboutGrip(subject(craft(parts, [])), { kind: 'part', id, copy: 0 })!.lines,
+    ...sideReadout(subject(craft(parts, [])), { kind: 'part', id, copy: 0 })!.lines,
+  ];
+  const said = (id: string) => lines(id).filter((line) => line.includes('into the hull'));
+  expect(said('inside')).toHaveLength(2);
+  expect(said('beyond')).toEqual([]);
 });

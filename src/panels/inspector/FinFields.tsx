@@ -9,6 +9,7 @@ import { useCommit } from '../commit.ts';
 import { useEditor } from '../editor.ts';
 import { FactList } from './FactList.tsx';
 import { FigureField, type SetFigures } from './FigureField.tsx';
+import { InsideCaution } from './InsideCaution.tsx';
 
 export function FinFields({ part }: { part: Part }) {
   const { apply } = useEditor();
@@ -45,6 +46,7 @@ function Outline({ part, fin }: { part: Part; fin: FinData }) {
   const length = (value: number) => formatQuantity(value, 'smallLength', units);
   return (
     <>
+      <InsideCaution part={part} />
       <FigureField
         label="Outline area"
         figures={fin}

@@ -1,8 +1,8 @@
-/** Where a thing sits: the kind of place, and the fields of that kind. Changing the kind keeps the point in space. */
+/** Where a thing sits: the kind of place, and the fields of that kind. Changing the kind keeps the point in space, but for one inside the hull that goes onto the skin. */
 import type { Place, PlaceKind } from '../../craft/placeSchema.ts';
 import type { Problem } from '../../craft/problem.ts';
 import type { Hull, Vec3 } from '../../report/assessment.ts';
-import { placeAs } from '../../report/placeAs.ts';
+import { placeChosen } from '../../report/placeAs.ts';
 import type { Quantity } from '../../units/units.ts';
 import { useEditor } from '../editor.ts';
 import { ChoiceField } from '../fields/ChoiceField.tsx';
@@ -28,7 +28,7 @@ export function PlaceFields({ place, at, prefix = '', onPlace }: PlaceFieldsProp
   const hull = geometry.status === 'solved' ? geometry.hull : null;
   const choose = (kind: PlaceKind): Problem | null =>
     at && hull
-      ? onPlace(placeAs(kind, at, hull), 'kind of place')
+      ? onPlace(placeChosen(kind, at, hull), 'kind of place')
       : { path: '', found: kind, allowed: 'a change of place once the hull can be formed' };
   return (
     <>

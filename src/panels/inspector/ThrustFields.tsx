@@ -13,6 +13,7 @@ import { useEditor } from '../editor.ts';
 import { CheckField } from '../fields/CheckField.tsx';
 import { FactList } from './FactList.tsx';
 import { FigureField, type SetFigures } from './FigureField.tsx';
+import { InsideCaution } from './InsideCaution.tsx';
 import { PitchSpeedFields } from './PitchSpeedFields.tsx';
 import { StaticThrustFields } from './StaticThrustFields.tsx';
 import { VectoringFields } from './VectoringFields.tsx';
@@ -50,6 +51,7 @@ function Figures({ part, data }: { part: Part; data: ThrusterData }) {
   return (
     <>
       {part.kind !== 'thruster' && <PartCaution kind="thruster" />}
+      <InsideCaution part={part} />
       {isGuess(part, data) && (
         <p className="aside">These are guesses from its size. Change them to what you measure.</p>
       )}

@@ -4,7 +4,7 @@ import type { Problem } from '../../craft/problem.ts';
 import type { MassSource, Part, PartKind } from '../../craft/schema.ts';
 import { stationOf, withStation } from '../../craft/station.ts';
 import { type PartFields, setPart } from '../../edit/edits/parts.ts';
-import { placeAs } from '../../report/placeAs.ts';
+import { placeChosen } from '../../report/placeAs.ts';
 import { formatQuantity } from '../../units/format.ts';
 import { copiesText, readCopies } from '../csv/copiesText.ts';
 import { useEditor } from '../editor.ts';
@@ -84,14 +84,14 @@ function NameCell(cell: Cell) {
   );
 }
 
-/** Another kind of place at the same point. */
+/** Another kind of place at the same point, or out on the skin. */
 function PlaceCell(cell: Cell) {
   const { geometry } = useEditor().assessment;
   const { part } = cell.row;
   const choose = (kind: PlaceKind): Problem | null => {
     const piece = geometry.status === 'solved' && geometry.pieces.find((each) => each.part === part.id);
     return piece
-      ? set(cell, 'kind of place', { place: placeAs(kind, piece.middle, geometry.hull) })
+      ? set(cell, 'kind of place', { place: placeChosen(kind, piece.middle, geometry.hull) })
       : { path: '', found: kind, allowed: 'a change of place once the hull can be formed' };
   };
   return (

@@ -1,7 +1,7 @@
 /** The line on which a slide lies: the kind of place, and what holds it off the hull. Its station is where the slide begins. */
 import { PLACE_KINDS, type Place, type PlaceKind } from '../../craft/placeSchema.ts';
 import type { Problem } from '../../craft/problem.ts';
-import { placeAs } from '../../report/placeAs.ts';
+import { placeChosen } from '../../report/placeAs.ts';
 import { pointOf } from '../../report/pointOf.ts';
 import type { Quantity } from '../../units/units.ts';
 import { useEditor } from '../editor.ts';
@@ -48,7 +48,7 @@ export function LineFields({ prefix, place, onPlace }: LineFieldsProps) {
     const at = pointOf(place, assessment);
     const { geometry } = assessment;
     return at && geometry.status === 'solved'
-      ? onPlace(placeAs(kind, at, geometry.hull))
+      ? onPlace(placeChosen(kind, at, geometry.hull))
       : { path: '', found: kind, allowed: 'a change of line once the hull can be formed' };
   };
   return (

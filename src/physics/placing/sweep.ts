@@ -62,9 +62,23 @@ const SPOTS: readonly (readonly [number, number])[] = RINGS.flatMap((ring) =>
 );
 
 /** Points all over the blades' part of one disc. */
-export function bladePoints({ at, radius }: Sweep, normal: Vec3): Vec3[] {
+export const bladePoints = ({ at, radius }: Sweep, normal: Vec3): Vec3[] =>
+  pointsAt(SPOTS, at, radius, normal);
+
+const RIM: readonly (readonly [number, number])[] = SPOTS.filter((_, i) => i >= SPOKES && i % 2 === 0);
+
+/** A dozen points round the edge of one disc. */
+export const rimPoints = ({ at, radius }: Pick<Sweep, 'at' | 'radius'>, normal: Vec3): Vec3[] =>
+  pointsAt(RIM, at, radius, normal);
+
+function pointsAt(
+  spots: readonly (readonly [number, number])[],
+  at: Vec3,
+  radius: number,
+  normal: Vec3,
+): Vec3[] {
   const [e, f] = acrossOf(normal);
-  return SPOTS.map(
+  return spots.map(
     ([a, b]): Vec3 => [
       at[0] + radius * (a * e[0] + b * f[0]),
       at[1] + radius * (a * e[1] + b * f[1]),
