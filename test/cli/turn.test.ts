@@ -27,6 +27,7 @@ const KEYS = [
   'turn.virtualArm',
   'turn.virtualMoment',
   'turn.timeTo90',
+  'turn.timeThere',
   'turn.timeTo90Cruise',
   'turn.stopTime',
   'turn.stopAngle',

@@ -15,18 +15,18 @@ export interface TurnAsked {
 
 export interface Commands {
   readonly straight: Command;
-  /** The turn asked for, and the one against it. */
+  /** The turn asked for. */
   readonly turn: Command;
-  readonly counter: Command;
 }
 
-export function commandsOf(craft: TurningCraft, { throttle, vector }: TurnAsked): Commands {
-  const way = (steer: -1 | 0 | 1) =>
-    vector === null || steer === 0
-      ? commandOf(craft, { throttle, steer, vector: null })
-      : commandOf(craft, { throttle, steer: 0, vector: steer * vector });
-  return { straight: way(0), turn: way(1), counter: way(-1) };
-}
+export const commandsOf = (craft: TurningCraft, { throttle, vector }: TurnAsked): Commands => ({
+  straight: commandOf(craft, { throttle, steer: 0, vector: null }),
+  turn: commandOf(craft, { throttle, steer: vector === null ? 1 : 0, vector }),
+});
+
+/** Hardest against a yaw to starboard (`way` > 0) or to port, whatever angle the turn is steered with. */
+export const counterTo = (craft: TurningCraft, throttle: number, way: number): Command =>
+  commandOf(craft, { throttle, steer: way > 0 ? -1 : 1, vector: null });
 
 /** m/s; 0 where its thrust does not move it ahead. */
 export function cruiseSpeedOf(craft: TurningCraft, { throttle, speed }: TurnAsked): number {

@@ -1,7 +1,7 @@
-/** Time to the first 90° of yaw, either way, and to stop the yaw again by countering. */
+/** Time to the first 90° of yaw, either way, and to stop the yaw again by countering as hard as the thrusters can. */
 import { infeasible, type Outcome, solved } from '../../numeric/outcome.ts';
 import { say } from '../../units/sentence.ts';
-import type { Commands } from './asked.ts';
+import { counterTo } from './asked.ts';
 import { yaws } from './leverage.ts';
 import { turnsUnder } from './motion.ts';
 import { type Moment, type Sailed, type SailOptions, sail, type Track, trackOf } from './sail.ts';
@@ -15,7 +15,7 @@ export interface QuarterTurn {
 }
 
 export interface YawStop {
-  /** s, from the opposite command until the craft no longer yaws. */
+  /** s, from the hardest steering the other way until the craft no longer yaws. */
   readonly time: number;
   /** Yawed on meanwhile, rad, ≥ 0. */
   readonly angle: number;
@@ -67,17 +67,17 @@ export const quarterTurnOf = (craft: TurningCraft, { trajectory, ...rest }: Sail
   track: trackOf(craft, { trajectory, ...rest }),
 });
 
-/** From the end of a quarter turn, the opposite command until the yaw rate is nil. */
-export function yawStop(craft: TurningCraft, { end }: Sailed, { counter }: Commands): Outcome<YawStop> {
+/** From the end of a quarter turn, steered hardest the other way until the yaw rate is nil. */
+export function yawStop(craft: TurningCraft, { end }: Sailed, throttle: number): Outcome<YawStop> {
   const way = Math.sign(end.state[5]!);
   const event = (_: number, state: Float64Array) => -way * state[2]!;
-  const sailed = sail(craft, end, counter, { event });
+  const sailed = sail(craft, end, counterTo(craft, throttle, way), { event });
   if (sailed.status !== 'solved') return sailed;
   const { trajectory } = sailed.value;
   const angle = way * (trajectory.last[5]! - end.state[5]!);
   if (!trajectory.stopped) {
     return infeasible(
-      `Countering does not stop the yaw: after ${say(trajectory.end, 'time')} and ${say(angle, 'angle')} the craft still yaws ${say(way * trajectory.last[2]!, 'yawRate')}.`,
+      `Countering does not stop the yaw, however long it goes on: steered hardest the other way, the craft still turns on against it at ${say(way * trajectory.last[2]!, 'yawRate')}.`,
       'Larger fins, a longer arm or a wider vectoring angle to the other side would help.',
     );
   }

@@ -11,6 +11,7 @@ import { type QuarterTurn, quarterTurn, quarterTurnOf, type YawStop, yawStop } f
 import { type SteadyTurn, steadyTurn } from './steady.ts';
 import { type SteadyPoint, steadyPoints } from './steadyCurve.ts';
 import { type TurningCraft, turningCraftOf } from './turningCraft.ts';
+import { type TurnedThere, turnThere } from './turnThere.ts';
 
 export type { TurnAsked } from './asked.ts';
 export type { Glide } from './glide.ts';
@@ -23,7 +24,10 @@ export type { SteadyPoint } from './steadyCurve.ts';
 export interface Turn {
   readonly authority: Authority;
   readonly fromRest: Outcome<QuarterTurn>;
+  /** From rest to 90° and stopped there. */
+  readonly there: Outcome<TurnedThere>;
   readonly fromCruise: Outcome<QuarterTurn>;
+  /** After `fromCruise`. */
   readonly stop: Outcome<YawStop>;
   readonly steady: Outcome<SteadyTurn>;
   /** Side gust held at rest, and at `cruiseSpeed`, m/s; 50 stands for that or more. */
@@ -50,17 +54,17 @@ export function steadyCurve(state: CraftState, asked: TurnAsked): Outcome<readon
 
 function turnOfCraft(craft: TurningCraft, asked: TurnAsked, { craft: { targets } }: CraftState): Turn {
   const { throttle } = asked;
-  const commands = commandsOf(craft, asked);
-  const { straight, turn } = commands;
+  const { straight, turn } = commandsOf(craft, asked);
   const cruiseSpeed = cruiseSpeedOf(craft, asked);
   const fromRest = quarterTurn(craft, straightAt(0, straight), turn);
   const fromCruise = quarterTurn(craft, straightAt(cruiseSpeed, straight), turn);
   const steady = steadyTurn(craft, straight, turn, cruiseSpeed);
   return {
     authority: { ...leverageOf(craft, throttle), need: needsOf(craft, targets, throttle) },
+    there: fromRest.status === 'solved' ? turnThere(craft, fromRest.value, throttle) : fromRest,
     fromRest: mapped(fromRest, (sailed) => quarterTurnOf(craft, sailed)),
     fromCruise: mapped(fromCruise, (sailed) => quarterTurnOf(craft, sailed)),
-    stop: fromCruise.status === 'solved' ? yawStop(craft, fromCruise.value, commands) : fromCruise,
+    stop: fromCruise.status === 'solved' ? yawStop(craft, fromCruise.value, throttle) : fromCruise,
     steady: mapped(steady, (settled) => settled.turn),
     gust: held(craft, throttle, 0),
     gustCruise: held(craft, throttle, cruiseSpeed),

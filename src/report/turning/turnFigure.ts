@@ -38,8 +38,17 @@ const FIGURES = {
     quantity: 'fraction',
     why: 'What can yaw the craft, of the thrust of all at full throttle.',
   },
-  'turn.timeTo90': { label: 'Time to yaw 90° from rest', quantity: 'time' },
-  'turn.timeTo90Cruise': { label: 'Time to yaw 90° from cruise', quantity: 'time' },
+  'turn.timeTo90': {
+    label: 'Time to pass 90° from rest',
+    quantity: 'time',
+    why: 'The yaw goes on from there.',
+  },
+  'turn.timeThere': {
+    label: 'Time to turn 90° and stop there',
+    quantity: 'time',
+    why: 'From rest, steered hardest the other way in time; the craft may still drift.',
+  },
+  'turn.timeTo90Cruise': { label: 'Time to pass 90° from cruise', quantity: 'time' },
   'turn.stopTime': {
     label: 'Time to stop the yaw',
     quantity: 'time',

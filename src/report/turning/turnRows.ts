@@ -15,6 +15,10 @@ export function turnRows(turn: Outcome<Turn>, thrust: number): Rows {
       { 'turn.timeTo90': ({ time }) => time },
     ),
     ...rowsFrom(
+      part(({ there }) => there),
+      { 'turn.timeThere': ({ time }) => time },
+    ),
+    ...rowsFrom(
       part(({ fromCruise }) => fromCruise),
       { 'turn.timeTo90Cruise': ({ time }) => time },
     ),

@@ -51,6 +51,12 @@ export const TURNING_RECIPES: Recipes<Turning> = {
     from: ['turn.yawMoment', 'inertia.yaw', 'inertia.airYaw'],
     source: MOTION,
   },
+  'turn.timeThere': {
+    formula:
+      's + time until r = 0, steered hardest the other way from s on; s so that the heading is 90° off then',
+    from: ['turn.timeTo90', 'turn.yawMoment', 'inertia.yaw', 'inertia.airYaw'],
+    source: `${MOTION} s by Brent’s method.`,
+  },
   'turn.timeTo90Cruise': {
     formula: 'M ν̇ + C(ν) ν = τ from cruise until the heading is 90° off',
     from: ['turn.yawMoment', 'speed.cruise', 'inertia.yaw', 'inertia.airYaw', 'added.k1', 'added.k2'],

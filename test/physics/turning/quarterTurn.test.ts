@@ -13,6 +13,7 @@ import type { TurningCraft } from '../../../src/physics/turning/turningCraft.ts'
 import { near } from '../hull/near.ts';
 import {
   battery,
+  coupled,
   craftWith,
   degrees,
   fins,
@@ -20,7 +21,6 @@ import {
   gondolaCraft,
   noseCraft,
   pairCraft,
-  sidePair,
   slippery,
   tailCraft,
   tailThruster,
@@ -40,23 +40,13 @@ function turnFrom(craft: TurningCraft, speed: number, options?: SailOptions): Sa
 const timeFrom = (craft: TurningCraft, speed: number, options?: SailOptions): number =>
   turnFrom(craft, speed, options).trajectory.end;
 
-/** A pure couple on a craft without drag, CG in the CB: N/I is its yaw acceleration, for ever. */
-function coupled(): { craft: TurningCraft; acceleration: number } {
-  const even = turning(
-    craftWith([{ ...battery, place: { kind: 'axis', station: 1.5 } }, sidePair({ reverse: 1 }, 1.5)]),
-  );
-  const slick = slippery(even);
-  const craft = { ...slick, thrusters: slick.thrusters.map((each) => ({ ...each, pitchSpeed: 1e12 })) };
-  return { craft, acceleration: (2 * 0.3 * 0.55) / craft.mass.yaw };
-}
-
 // ψ = ½ (N/I) t²: any text on mechanics.
 test('a constant couple without resistance: 90° after √(π I/N), and as long and as far again to stop', () => {
   const { craft, acceleration } = coupled();
   const quarter = turnFrom(craft, 0);
   const wanted = Math.sqrt(Math.PI / acceleration);
   near(quarter.trajectory.end, wanted, TIME_ERROR);
-  const stop = yawStop(craft, quarter, commandsOf(craft, ASKED));
+  const stop = yawStop(craft, quarter, ASKED.throttle);
   if (stop.status !== 'solved') throw new Error(stop.why);
   near(stop.value.time, wanted, TIME_ERROR);
   near(stop.value.angle, QUARTER, TIME_ERROR);
@@ -126,8 +116,21 @@ test('a thruster that turns to one side only cannot stop the yaw', () => {
   // Without fins the air does not stop it either.
   const craft = slippery(turning(craftWith([battery, tailThruster(2.9, { yaw: oneSided })])));
   const quarter = turnFrom(craft, 0);
-  const stop = yawStop(craft, quarter, commandsOf(craft, ASKED));
-  expect(stop).toMatchObject({ status: 'infeasible', why: expect.stringContaining('still yaws') });
+  const stop = yawStop(craft, quarter, ASKED.throttle);
+  expect(stop).toMatchObject({ status: 'infeasible', why: expect.stringContaining('still turns on') });
+});
+
+test('with a small angle by hand the yaw is stopped hardest, as by the whole of the limits', () => {
+  const craft = tailCraft();
+  const { straight, turn } = commandsOf(craft, { ...ASKED, vector: -12 * degrees });
+  const quarter = quarterTurn(craft, straightAt(0, straight), turn);
+  if (quarter.status !== 'solved') throw new Error(quarter.why);
+  const stop = yawStop(craft, quarter.value, 1);
+  if (stop.status !== 'solved') throw new Error(stop.why);
+  // The limit is 40°; at 3 rad/s it has come from −12° to there before the yaw is nil, or it is on its way.
+  const reached = Math.max(...stop.value.track.vector);
+  near(reached, Math.min(40 * degrees, 3 * stop.value.time - 12 * degrees), 1e-6);
+  expect(reached).toBeGreaterThan(12 * degrees);
 });
 
 test('the track: equal steps from the start to 90°, along its own velocities, the thruster at its slew rate', () => {
@@ -148,7 +151,7 @@ test('the track: equal steps from the start to 90°, along its own velocities, t
       Math.abs(track.heading[i]! - track.heading[i - 1]! - (dt * (track.r[i]! + track.r[i - 1]!)) / 2),
     ).toBeLessThan(1e-5);
   }
-  const stop = yawStop(craft, sailed, commandsOf(craft, ASKED));
+  const stop = yawStop(craft, sailed, ASKED.throttle);
   if (stop.status !== 'solved') throw new Error(stop.why);
   expect(stop.value.track.x[0]).toBe(track.x.at(-1));
   expect(Math.abs(stop.value.track.r.at(-1)!)).toBeLessThan(1e-9);

@@ -178,3 +178,13 @@ export const anyCraft: fc.Arbitrary<Craft> = fc
       },
     ]),
   );
+
+/** A pure couple on a craft without drag, CG in the CB: N/I is its yaw acceleration, for ever. */
+export function coupled(): { craft: TurningCraft; acceleration: number } {
+  const even = turning(
+    craftWith([{ ...battery, place: { kind: 'axis', station: 1.5 } }, sidePair({ reverse: 1 }, 1.5)]),
+  );
+  const slick = slippery(even);
+  const craft = { ...slick, thrusters: slick.thrusters.map((each) => ({ ...each, pitchSpeed: 1e12 })) };
+  return { craft, acceleration: (2 * 0.3 * 0.55) / craft.mass.yaw };
+}
