@@ -60,6 +60,8 @@ export interface Handle {
   readonly way: ScreenPoint;
   /** Under the pointer or in hand. */
   readonly lit: boolean;
+  /** A round bead in the ink of thrust, for what turns thrust; else a lozenge. */
+  readonly bead?: boolean;
 }
 
 export interface HandMarksProps {
@@ -75,7 +77,7 @@ export function HandMarks({ handles, wireEnds, guide, marquee, palette }: HandMa
   return (
     <Shape
       sceneFunc={(context) => {
-        for (const each of handles) handle(context, each, palette);
+        for (const each of handles) (each.bead ? bead : lozenge)(context, each, palette);
         for (const each of wireEnds) wireEnd(context, each, palette);
         if (guide) guideLine(context, guide, palette);
         if (marquee) rubber(context, marquee, palette);
@@ -85,19 +87,43 @@ export function HandMarks({ handles, wireEnds, guide, marquee, palette }: HandMa
 }
 
 /** A lozenge with an arrow either way. */
-function handle(context: Context, { at, way, lit }: Handle, palette: Palette): void {
-  const point = (along: number, across: number) => ({
-    x: at.x + way.x * along - way.y * across,
-    y: at.y + way.y * along + way.x * across,
-  });
+function lozenge(context: Context, { at, way, lit }: Handle, palette: Palette): void {
+  const point = pointer(at, way);
   context.strokeStyle = palette.brass;
   context.fillStyle = lit ? palette.brass : palette.paper;
   context.lineWidth = 1.8;
   traceOnScreen(context, [point(-6, 0), point(0, 4.5), point(6, 0), point(0, -4.5)], true);
   context.fill();
   context.stroke();
+  wings(context, point, 9);
+}
+
+/** A round bead with an arrow either way. */
+function bead(context: Context, { at, way, lit }: Handle, palette: Palette): void {
+  context.beginPath();
+  context.arc(at.x, at.y, 5.5, 0, 2 * Math.PI, false);
+  context.strokeStyle = palette.thrust;
+  context.fillStyle = lit ? palette.thrust : palette.paper;
+  context.lineWidth = 2.2;
+  context.fill();
+  context.stroke();
+  context.lineWidth = 1.5;
+  wings(context, pointer(at, way), 9.5);
+}
+
+type Pointer = (along: number, across: number) => ScreenPoint;
+
+const pointer =
+  (at: ScreenPoint, way: ScreenPoint): Pointer =>
+  (along, across) => ({
+    x: at.x + way.x * along - way.y * across,
+    y: at.y + way.y * along + way.x * across,
+  });
+
+function wings(context: Context, point: Pointer, from: number): void {
   for (const end of [-1, 1]) {
-    traceOnScreen(context, [point(9 * end, -4), point(13 * end, 0), point(9 * end, 4)], false);
+    const out = (from + 4) * end;
+    traceOnScreen(context, [point(from * end, -4), point(out, 0), point(from * end, 4)], false);
     context.stroke();
   }
 }

@@ -163,9 +163,9 @@ function pointsOf(scene: SideScene, selection: Selection): Points {
 }
 
 /** Hidden while something else is in hand. */
-function handlesShown({ geometry, view }: SideScene, { held, hover }: Overlay): Handle[] {
+function handlesShown({ geometry, view, thrust }: SideScene, { held, hover }: Overlay): Handle[] {
   if (held && held.kind !== 'hull') return [];
-  const { tail, waist } = handlesOf(geometry, view.scale);
+  const { tail, waist } = handlesOf(geometry, view.scale, thrust);
   const lit = (end: 'tail' | 'waist') =>
     [held, hover].some((grip) => grip?.kind === 'hull' && grip.end === end);
   const [cos, sin] = [Math.cos(view.tilt), Math.sin(view.tilt)];

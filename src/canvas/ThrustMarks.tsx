@@ -94,5 +94,5 @@ export const thrustHandles = ({ view, thrust }: Turned, { held, hover }: Overlay
     const [at, from] = [toScreen(view, mark.handle), toScreen(view, mark.at)];
     const long = Math.hypot(at.x - from.x, at.y - from.y);
     const way = { x: -(at.y - from.y) / long, y: (at.x - from.x) / long };
-    return [{ at, way, lit: isIt(mark, held) || isIt(mark, hover) }];
+    return [{ at, way, lit: isIt(mark, held) || isIt(mark, hover), bead: true }];
   });

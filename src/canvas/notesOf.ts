@@ -65,7 +65,7 @@ function boxesOf(scene: Scene, grip: Grip): Rect[] {
           ...rectsAlong(toScreen(view, at), toScreen(view, tip), REACH),
         ]);
     case 'hull':
-      return spot(handlesOf(geometry, view.scale)[grip.end]);
+      return spot(handlesOf(geometry, view.scale, thrust)[grip.end]);
     case 'wire':
       return [];
   }

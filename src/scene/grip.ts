@@ -3,7 +3,7 @@
  * what is selected within its brackets, then nearer and smaller things.
  */
 import type { Figure } from './figure.ts';
-import { distanceToLine, figureAt, figuresAt, lineAt, pointAt } from './hit.ts';
+import { distanceToLine, distanceToSegment, figureAt, figuresAt, lineAt, pointAt } from './hit.ts';
 import { widestStation } from './outline.ts';
 import type { Geometry } from './subject.ts';
 import type { ThrustMark, Way } from './thrustArrows.ts';
@@ -50,12 +50,26 @@ export interface Reachable {
 /** Where the two handles of the hull are: beyond the tail tip for the length, on top of the waist for the diameter. */
 export const TAIL_HANDLE_PX = 30;
 
-export function handlesOf({ hull }: Geometry, scale: number): { tail: PlanePoint; waist: PlanePoint } {
+/** From the tail tip, px aft and up: the first of these that is clear of every arrow of thrust. */
+const TAIL_SPOTS = [
+  [TAIL_HANDLE_PX, 0],
+  [TAIL_HANDLE_PX, -34],
+  [TAIL_HANDLE_PX, 34],
+  [TAIL_HANDLE_PX, -68],
+] as const;
+/** So far from the middle of a handle to an arrow or its own handle, px. */
+const APART_PX = 30;
+
+export function handlesOf(
+  { hull }: Geometry,
+  scale: number,
+  thrust: readonly ThrustMark[],
+): { tail: PlanePoint; waist: PlanePoint } {
   const u = widestStation(hull);
-  return {
-    tail: { u: hull.length + TAIL_HANDLE_PX / scale, z: 0 },
-    waist: { u, z: hull.radius(u, 0) },
-  };
+  const spots = TAIL_SPOTS.map(([aft, up]) => ({ u: hull.length + aft / scale, z: up / scale }));
+  const clear = (spot: PlanePoint) =>
+    thrust.every(({ at, tip, handle }) => distanceToSegment(spot, at, handle ?? tip) >= APART_PX / scale);
+  return { tail: spots.find(clear) ?? spots[0]!, waist: { u, z: hull.radius(u, 0) } };
 }
 
 /** Half the least touch target of a handle, px. */
@@ -163,8 +177,12 @@ function thrustAt({ thrust }: Reachable, point: PlanePoint, near: number): Grip 
   return { kind: 'thrust', id: part, copy, way };
 }
 
-function handleAt({ geometry }: Reachable, point: PlanePoint, scale: number): Grip | null {
-  const { tail, waist } = handlesOf(geometry, scale);
+/** The arrow under the point, whether or not a hand can turn it. */
+export const arrowAt = (thrust: readonly ThrustMark[], point: PlanePoint, near: number): ThrustMark | null =>
+  thrust.find(({ at, tip }) => distanceToSegment(point, at, tip) <= near) ?? null;
+
+function handleAt({ geometry, thrust }: Reachable, point: PlanePoint, scale: number): Grip | null {
+  const { tail, waist } = handlesOf(geometry, scale, thrust);
   const handles = [
     { id: 'tail', at: tail },
     { id: 'waist', at: waist },

@@ -100,12 +100,12 @@ test('a hardpoint is dragged as a part is', () => {
 
 test('the handle beyond the tail changes the length, the one on the waist the diameter', () => {
   const ground = sideGround();
-  const { tail, waist } = handlesOf(ground.scene().geometry, ground.view().scale);
+  const { tail, waist } = handlesOf(ground.scene().geometry, ground.view().scale, []);
   const pull = takeInSide(ground, ground.at(tail));
   pull.move(ground.at(by(tail, 0.502, 0.3)));
   pull.end(ground.at(by(tail, 0.502, 0.3)), true);
   expect(ground.craft().hull.shape).toEqual({ kind: 'spheroid', length: 3.5, diameter: 1 });
-  const now = handlesOf(ground.scene().geometry, ground.view().scale).waist;
+  const now = handlesOf(ground.scene().geometry, ground.view().scale, []).waist;
   expect(now.u).toBeGreaterThan(waist.u);
   const lift = takeInSide(ground, ground.at(now));
   lift.move(ground.at(by(now, 0, 0.1)));

@@ -99,6 +99,24 @@ test('what does not turn has no handle; a click on one selects its part; from ab
   expect(ground.craft().parts.byId.thruster!.place).toEqual(craftWith({}).parts.byId.thruster!.place);
 });
 
+test('dragging an arrow that does not turn in this view moves nothing and says where its limits are; a click selects its part', () => {
+  for (const [way, ground, take] of [
+    ['pitch', sideGround(craftWith({ pitch: fixed })), takeInSide],
+    ['yaw', groundFromAbove(craftWith({ yaw: fixed })), takeFromAbove],
+  ] as const) {
+    const [before, view] = [ground.craft(), ground.view()];
+    const { at, tip } = ground.scene().thrust[0]!;
+    const near = ground.at({ u: 0.1 * at.u + 0.9 * tip.u, z: 0.1 * at.z + 0.9 * tip.z });
+    const gesture = take(ground, near);
+    gesture.move({ ...near, x: near.x + 40, y: near.y + 30 });
+    expect(ground.overlay().hint).toBe(`Tail thruster is fixed in ${way}: set its limits under Selected.`);
+    expect(ground.view()).toEqual(view);
+    expect(ground.craft()).toBe(before);
+    take(ground, near).end(near, false);
+    expect(ground.session.getState().selection).toEqual([{ kind: 'part', id: 'thruster' }]);
+  }
+});
+
 test('comma and full stop turn by 1°, with Shift by 10°: pitch in the side view, yaw from above, nothing from astern', () => {
   const stroke = (key: string, code: string, shiftKey = false) => ({ key, code, shiftKey });
   expect(thrustNudgeFor(stroke('.', 'Period'), 'side')).toEqual({ way: 'pitch', by: DEGREE });

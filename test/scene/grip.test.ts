@@ -47,8 +47,8 @@ test('each thing can be taken where it is drawn', () => {
   const at = (point: { u: number; z: number }) => gripAt(things(), point, SCALE, 5);
   expect(at(middleOf('battery'))).toEqual({ kind: 'part', id: 'battery', copy: 0 });
   expect(at({ u: 0.06, z: 0 })).toEqual({ kind: 'hardpoint', id: 'nose' });
-  expect(at(handlesOf(drawn, SCALE).tail)).toEqual({ kind: 'hull', end: 'tail' });
-  expect(at(handlesOf(drawn, SCALE).waist)).toEqual({ kind: 'hull', end: 'waist' });
+  expect(at(handlesOf(drawn, SCALE, []).tail)).toEqual({ kind: 'hull', end: 'tail' });
+  expect(at(handlesOf(drawn, SCALE, []).waist)).toEqual({ kind: 'hull', end: 'waist' });
   const along = lines[0]!.at.find(({ u }) => u > 2 && u < 2.2)!;
   expect(at(along)).toEqual({ kind: 'wire', id: 'power' });
   expect(at({ u: 2.4, z: -0.69 })).toEqual({ kind: 'support' });
@@ -98,7 +98,7 @@ test('what is selected wins within its brackets over what is smaller or nearer; 
 });
 
 test('handles have a target of at least 32 px across', () => {
-  const { tail } = handlesOf(drawn, SCALE);
+  const { tail } = handlesOf(drawn, SCALE, []);
   for (const [du, dz] of [
     [15.9, 0],
     [0, 15.9],
@@ -163,4 +163,25 @@ test('grips are the same when they take the same', () => {
   expect(sameGrip({ kind: 'wire', id: 'a' }, { kind: 'part', id: 'a', copy: 0 })).toBe(false);
   expect(sameGrip(null, { kind: 'wire', id: 'a' })).toBe(false);
   expect(sameGrip(null, null)).toBe(true);
+});
+
+test('the handle of the length keeps clear of arrows of thrust at the tail, and stays where it is without', () => {
+  const { length } = drawn.hull;
+  const arrow = (px: number, angle: number) => {
+    const at = { u: length + px / SCALE, z: 0 };
+    const out = (far: number) => ({
+      u: at.u - (far * Math.cos(angle)) / SCALE,
+      z: (far * Math.sin(angle)) / SCALE,
+    });
+    return { part: 't', copy: 0, way: 'pitch' as const, at, tip: out(60), angle, handle: out(72) };
+  };
+  const plain = handlesOf(drawn, SCALE, []).tail;
+  for (const angle of [0, 0.5, Math.PI / 2, -Math.PI / 2, -0.7, Math.PI]) {
+    for (const px of [0, 20, 60, 90]) {
+      const mark = arrow(px, angle);
+      const { tail } = handlesOf(drawn, SCALE, [mark]);
+      expect(distanceToSegment(tail, mark.at, mark.handle) * SCALE).toBeGreaterThanOrEqual(29.9);
+    }
+  }
+  expect(handlesOf(drawn, SCALE, [arrow(-60, 0)]).tail).toEqual(plain);
 });

@@ -1,5 +1,6 @@
 /** Which gesture begins where the hand presses. */
-import { type Grip, gripAt } from '../../scene/grip.ts';
+import type { Vectoring } from '../../craft/thrustSchema.ts';
+import { arrowAt, type Grip, gripAt } from '../../scene/grip.ts';
 import { toWorld } from '../../scene/view.ts';
 import { refusing } from './dragging.ts';
 import { dragHardpoint } from './dragHardpoint.ts';
@@ -12,7 +13,7 @@ import { dragWireEnd } from './dragWireEnd.ts';
 import type { Gesture, Ground, Hand } from './gesture.ts';
 import { pan } from './pan.ts';
 import { reachable, slopOf } from './reach.ts';
-import { clickThrough, marquee } from './select.ts';
+import { click, clickThrough, marquee } from './select.ts';
 import { turnArrow } from './turnThrust.ts';
 
 export type Take = (ground: Ground, hand: Hand) => Gesture;
@@ -25,6 +26,18 @@ export function gripUnder(ground: Ground, hand: Hand): Grip | null {
 
 const onEmpty: Take = (ground, hand) =>
   hand.shift || ground.habits.several ? marquee(ground, hand) : pan(ground, hand);
+
+/** An arrow that does not turn in this view stays; anywhere else the drawing is moved. */
+function onArrowOrEmpty(ground: Ground, hand: Hand): Gesture {
+  const { thrust, view, craft } = ground.scene();
+  const mark = arrowAt(thrust, toWorld(view, hand), slopOf(hand) / view.scale);
+  const part = mark && craft.parts.byId[mark.part];
+  if (!mark || !part?.thruster || turns(part.thruster[mark.way])) return onEmpty(ground, hand);
+  const hint = `${part.name || part.kind} is fixed in ${mark.way}: set its limits under Selected.`;
+  return refusing(ground, hint, (at) => click(ground, { kind: 'part', id: part.id }, at));
+}
+
+const turns = ({ least, most }: Vectoring): boolean => most > least;
 
 /** A wire run is selected by a click; dragging it moves the drawing. */
 function onWire(ground: Ground, hand: Hand, id: string): Gesture {
@@ -41,7 +54,7 @@ export const takeInSide: Take = (ground, hand) => {
   const grip = gripUnder(ground, hand);
   switch (grip?.kind) {
     case undefined:
-      return onEmpty(ground, hand);
+      return onArrowOrEmpty(ground, hand);
     case 'part':
       return dragPart(ground, hand, grip);
     case 'hardpoint':
@@ -84,7 +97,7 @@ export const takeFromAbove: Take = (ground, hand) => {
         clickThrough(ground, { kind: 'part', id: grip.id }, at),
       );
     default:
-      return onEmpty(ground, hand);
+      return onArrowOrEmpty(ground, hand);
   }
 };
 
