@@ -16,7 +16,7 @@ import { readCraft } from './readCraft.ts';
 
 type Asked = Extract<Command, { kind: 'place' }>;
 
-/** Exit 2 when there is no such thruster, 1 when at no station there is both a plan and room for its propeller. */
+/** Exit 2 when there is no such thruster, 1 when neither where it is nor at any station there is both a plan and room for its propeller. */
 export async function placed(asked: Asked, io: Io): Promise<ExitCode> {
   const { part, stations, throttle, units } = asked;
   const read = readCraft(asked.file, units, io);
@@ -28,7 +28,8 @@ export async function placed(asked: Asked, io: Io): Promise<ExitCode> {
   const study = placementStudy(craft, part, await io.solver(), { stations, asked: flown });
   if (study.status === 'infeasible') return told(`${study.why} ${study.remedy}`, io);
   io.write(textOf(craft, study.value, asked));
-  return study.value.points.some(({ best }) => best) ? EXIT.fine : EXIT.misses;
+  const { points, today } = study.value;
+  return [today, ...points].some(({ best }) => best) ? EXIT.fine : EXIT.misses;
 }
 
 function told(trouble: string, io: Io): ExitCode {

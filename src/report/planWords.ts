@@ -22,7 +22,7 @@ export const joined = (words: readonly string[]): string =>
 export const slideWords = (craft: Craft, { part, to }: PlannedSlide): string =>
   `slide ${partName(craft, part)} to ${say(to, 'length')}`;
 
-export const toldSlides = ({ slides }: PlanFound): PlannedSlide[] =>
+export const toldSlides = ({ slides }: Pick<PlanFound, 'slides'>): PlannedSlide[] =>
   slides.filter(({ from, to }) => Math.abs(to - from) >= LEAST_MOVE);
 
 /** "hang Camera at the chin instead of at 0.30 m", "leave Logger ashore"; null when it stays as it is. */
@@ -51,7 +51,7 @@ export function weightWords(craft: Craft, { hardpoint, mass, pieces }: PlannedWe
 export const LEAST_LEAD = 5e-5;
 
 /** What to do at each hardpoint: hang, change or take off; nothing where the lead is right already. */
-export function leadSteps(craft: Craft, { weights }: PlanFound): string[] {
+export function leadSteps(craft: Craft, { weights }: Pick<PlanFound, 'weights'>): string[] {
   const hung = hungBallast(craft);
   return craft.hardpoints.order.flatMap((hardpoint) => {
     const today = ballastMass(hung.get(hardpoint) ?? []);
@@ -64,7 +64,7 @@ export function leadSteps(craft: Craft, { weights }: PlanFound): string[] {
 }
 
 /** Everything there is to do, one thing each; empty when the craft is as planned already. */
-export const planSteps = (craft: Craft, plan: PlanFound): string[] => [
+export const planSteps = (craft: Craft, plan: Pick<PlanFound, 'slides' | 'loads' | 'weights'>): string[] => [
   ...toldSlides(plan).map((slide) => slideWords(craft, slide)),
   ...plan.loads.flatMap((load) => loadWords(craft, load) ?? []),
   ...leadSteps(craft, plan),

@@ -2,7 +2,7 @@
 import { useMemo } from 'react';
 import { listed } from '../../craft/craft.ts';
 import { placeReport } from '../../report/turning/placeReport.ts';
-import { toldStation } from '../../report/turning/placeWords.ts';
+import { toldPlace } from '../../report/turning/placeWords.ts';
 import { formatQuantity } from '../../units/format.ts';
 import { inUnits } from '../../units/sentence.ts';
 import { useEditor } from '../editor.ts';
@@ -82,7 +82,7 @@ function Result() {
   const told = useMemo(() => {
     if (!then || part === null || !today) return null;
     const study = { part, points, today, complete };
-    const station = toldStation(study, then.targets)?.station ?? null;
+    const station = toldPlace(study, then.targets)?.station ?? null;
     return { ...placeReport(then, study, units), station };
   }, [then, part, points, today, complete, units]);
   if (!told) return null;

@@ -2,7 +2,7 @@
 import type { Place } from '../../craft/placeSchema.ts';
 import type { Stowage } from '../../craft/stowage.ts';
 import type { Figures } from './figures.ts';
-import { beats, unbeaten } from './pareto.ts';
+import { equals, unbeaten } from './pareto.ts';
 
 export interface PlacedPoint extends Figures {
   /** m */
@@ -24,7 +24,7 @@ export interface PlacedPoint extends Figures {
   readonly cautions: readonly string[];
   /** Whether one of them rules the station out: the propeller strikes something, or has less than the usual clearance. */
   readonly strikes: boolean;
-  /** Whether there is a plan, nothing is struck, and no such station is as good in everything and better in something: ballast and wire, time to 90°, gust held, thrust per watt. */
+  /** Whether there is a plan, nothing is struck, and no such place, today's among them, is as good in everything and better in something, as far as the model can tell: ballast and wire, time to 90°, gust held, thrust per watt. */
   readonly best: boolean;
 }
 
@@ -33,31 +33,40 @@ export interface Judged {
   readonly today: PlacedPoint;
 }
 
-/** With what nothing beats told from the rest. */
+/** With what nothing beats told from the rest; the place of today is a rival like any other. */
 export function judged(points: readonly PlacedPoint[], today: PlacedPoint): Judged {
-  const able = points.filter(isAble);
-  const rivals = able.map(worthOf);
-  const stands = unbeaten(rivals);
+  const able = [today, ...points].filter(isAble);
+  const stands = unbeaten(able.map(worthOf), 1);
   const best = new Set(able.filter((_, i) => stands[i]));
-  const worth = worthOf(today);
-  return {
-    points: points.map((point) => ({ ...point, best: best.has(point) })),
-    today: { ...today, best: isAble(today) && !rivals.some((rival) => beats(rival, worth)) },
-  };
+  const told = (point: PlacedPoint): PlacedPoint => ({ ...point, best: best.has(point) });
+  return { points: points.map(told), today: told(today) };
 }
 
-const isAble = ({ ballast, strikes }: PlacedPoint): boolean => ballast !== null && !strikes;
+export const isAble = ({ ballast, strikes }: PlacedPoint): boolean => ballast !== null && !strikes;
 
-/** What a builder can tell apart: 0.1 g, 0.01 s, 0.01 m/s, 0.1 %. */
-const TOLD_APART = { mass: 1e-4, time: 0.01, speed: 0.01, share: 0.001 } as const;
+/** Whether every figure of the two is within what the model can tell. */
+export const asGood = (a: PlacedPoint, b: PlacedPoint): boolean => equals(worthOf(a), worthOf(b), 1);
 
-/** What stations are compared by, the better the smaller; what there is none of is worst. */
+/** What the model can tell apart, by a step or by a share, whichever is more (kg, s, m/s; our choice). */
+export const TOLD_APART = {
+  mass: { step: 1e-3, share: 0.01 },
+  time: { step: 0.01, share: 0.03 },
+  gust: { step: 0.01, share: 0.03 },
+  perWatt: { step: 0.01, share: 0.01 },
+} as const;
+
+/** What stations are compared by, in what the model can tell apart; the better the smaller, what there is none of is worst. */
 export const worthOf = ({ ballast, wire, timeTo90, gustHeld, perWatt }: PlacedPoint): number[] => [
-  steps(ballast === null ? null : ballast + wire, TOLD_APART.mass),
-  steps(timeTo90, TOLD_APART.time),
-  steps(gustHeld === null ? null : -gustHeld, TOLD_APART.speed),
-  steps(perWatt === null ? null : -perWatt, TOLD_APART.share),
+  worst(ballast === null ? null : inSteps(ballast + wire, TOLD_APART.mass)),
+  worst(timeTo90 === null ? null : inSteps(timeTo90, TOLD_APART.time)),
+  worst(gustHeld === null ? null : -inSteps(gustHeld, TOLD_APART.gust)),
+  worst(perWatt === null ? null : -inSteps(perWatt, TOLD_APART.perWatt)),
 ];
 
-const steps = (figure: number | null, step: number): number =>
-  figure === null ? Number.POSITIVE_INFINITY : Math.round(figure / step);
+const worst = (steps: number | null): number => steps ?? Number.POSITIVE_INFINITY;
+
+/** Steps of one size while they are more than the share, from there on each greater than the one before by that share. */
+function inSteps(figure: number, { step, share }: { readonly step: number; readonly share: number }): number {
+  const knee = step / share;
+  return figure <= knee ? figure / step : 1 / share + Math.log(figure / knee) / Math.log1p(share);
+}

@@ -24,9 +24,11 @@ export interface Meant {
   readonly mounts: ReadonlySet<string>;
   /** The propeller is the lowest of the craft: it is launched and caught by hand. Told at every station, it rules none out. */
   readonly lowest: boolean;
+  /** The parts there are; null where no plan has hung any other. */
+  readonly aboard: ReadonlySet<string> | null;
 }
 
-const NOTHING_MEANT: Meant = { mounts: new Set(), lowest: false };
+const NOTHING_MEANT: Meant = { mounts: new Set(), lowest: false, aboard: null };
 
 export function meantOf(state: CraftState, part: string): Meant {
   const { sweeps, room } = propellersOf(state, part);
@@ -34,6 +36,7 @@ export function meantOf(state: CraftState, part: string): Meant {
   return {
     mounts: new Set(inWay.filter(({ kind }) => kind === 'fitting').map(({ id }) => id)),
     lowest: groundWords(state, part, sweeps, room).length > 0,
+    aboard: new Set(state.craft.parts.order),
   };
 }
 
@@ -46,7 +49,7 @@ export function strikesOf(state: CraftState, part: string, meant = NOTHING_MEANT
       room,
     ),
     ...partsInWay(state, part, sweeps, meant).map(
-      ({ name, kind }) => `The propeller would strike ${name || kind}.`,
+      (each) => `The propeller would strike ${struckName(each, meant)}.`,
     ),
     ...propellerWords(sweeps, others, room),
     ...fellowWords(sweeps, room),
@@ -56,6 +59,9 @@ export function strikesOf(state: CraftState, part: string, meant = NOTHING_MEANT
     strikes: strikes.length > 0 || (ground.length > 0 && !meant.lowest),
   };
 }
+
+const struckName = ({ id, name, kind }: Part, { aboard }: Meant): string =>
+  `${name || kind}${aboard && !aboard.has(id) ? ' (hung by the plan)' : ''}`;
 
 function propellersOf(state: CraftState, part: string) {
   const thrusters = thrustersOf(state);

@@ -20,6 +20,8 @@ export interface StudyOptions {
   readonly stations?: number;
   /** How it is flown. Default full throttle, hardest to starboard, from the steady speed. */
   readonly asked?: TurnAsked;
+  /** Of a study of the same that was stopped: the stations it had done, nose first, which are not worked out again. */
+  readonly done?: readonly PlacedPoint[];
   /** Told about every twentieth of the way. */
   readonly onProgress?: (progress: StudyProgress) => void;
   readonly shouldStop?: () => boolean;
@@ -90,23 +92,23 @@ interface Study {
 
 function studyOf(study: Study): PlacementStudy {
   const { moving, state, options } = study;
-  const { stations = 61, asked = USUAL, onProgress, shouldStop } = options;
+  const { stations = 61, asked = USUAL, done = [], onProgress, shouldStop } = options;
   const figuresAt = figuresAlong(state, moving.id, asked);
   const today = pointAt(study, figuresAt, moving.place);
-  const points: PlacedPoint[] = [];
-  let told = 0;
+  const points = [...done];
+  let told = done.length / stations;
   const result = (complete: boolean): PlacementStudy => ({
     part: moving.id,
     ...judged(points, today),
     complete,
   });
-  for (const [i, station] of stationsOf(moving, state.hull, stations).entries()) {
+  for (const station of stationsOf(moving, state.hull, stations).slice(done.length)) {
     if (shouldStop?.()) return result(false);
     const point = pointAt(study, figuresAt, placeAt(moving, station, state.hull));
     // Asked to stop meanwhile, the search for a plan may have broken off.
     if (shouldStop?.()) return result(false);
     points.push({ ...point, wireChange: point.wire - today.wire });
-    const share = (i + 1) / stations;
+    const share = points.length / stations;
     if (share < 1 && share < told + 1 / TOLD) continue;
     told = share;
     onProgress?.({ share, ...judged(points, today) });

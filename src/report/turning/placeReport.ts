@@ -1,5 +1,6 @@
 /** A placement study for reading: one sentence on top, where what is in the way, and what the figures are of. */
 import type { Craft } from '../../craft/craft.ts';
+import { TOLD_APART } from '../../physics/placing/placedPoint.ts';
 import type { PlacementStudy } from '../../physics/placing/study.ts';
 import { clearanceOf } from '../../physics/placing/sweep.ts';
 import { inUnits, say } from '../../units/sentence.ts';
@@ -15,8 +16,13 @@ export interface PlaceReport {
   readonly cautions: readonly string[];
 }
 
-/** Sentences come in the units asked for. */
-export function placeReport(craft: Craft, study: PlacementStudy, units: UnitSystem = 'metric'): PlaceReport {
+/** Sentences come in the units asked for. `moved`: whether the thruster has been moved since. */
+export function placeReport(
+  craft: Craft,
+  study: PlacementStudy,
+  units: UnitSystem = 'metric',
+  moved = false,
+): PlaceReport {
   const { points } = study;
   const obstacles = [
     ...stretchesOf(points, ({ why }) => (why ? [matterOf(why)] : [])),
@@ -24,7 +30,7 @@ export function placeReport(craft: Craft, study: PlacementStudy, units: UnitSyst
   ];
   const read = (sentence: string) => inUnits(sentence, units);
   return {
-    headline: read(placeHeadline(craft, study)),
+    headline: read(placeHeadline(craft, study, moved)),
     obstacles: obstacles.map(read),
     notes: notesOf(craft, study).map(read),
     cautions: [
@@ -42,7 +48,8 @@ function notesOf(craft: Craft, { part, points, complete }: PlacementStudy): stri
   return [
     ...(complete ? [] : ['The study was stopped before the last station.']),
     'At each station the figures are of the craft with the ballast planned for it; where no plan can be made, of the craft as it hangs today.',
-    'Nothing beats a station when no other is as good in all of lead and wire, time to 90°, gust held and thrust per watt, and better in one.',
+    'Nothing beats a place when no other is as good in all of lead and wire, time to 90°, gust held and thrust per watt, and better in one; where it is today counts as one of them.',
+    `Closer than the model can tell is taken as equal (our choice): lead and wire within ${say(TOLD_APART.mass.step, 'mass')} or ${say(TOLD_APART.mass.share, 'fraction')}, time within ${say(TOLD_APART.time.share, 'fraction')}, gust within ${say(TOLD_APART.gust.share, 'fraction')}, thrust per watt within ${say(TOLD_APART.perWatt.share, 'fraction')}.`,
     ...(hung
       ? [
           'On the axis between the ends of the hull the thruster would be inside it: there it is tried below the keel.',

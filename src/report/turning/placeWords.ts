@@ -3,7 +3,7 @@ import type { Craft } from '../../craft/craft.ts';
 import type { Targets } from '../../craft/schema.ts';
 import { valueOrNull } from '../../numeric/outcome.ts';
 import { hullOfCraft } from '../../physics/craftState.ts';
-import type { PlacedPoint } from '../../physics/placing/placedPoint.ts';
+import { asGood, isAble, type PlacedPoint } from '../../physics/placing/placedPoint.ts';
 import type { PlacementStudy } from '../../physics/placing/study.ts';
 import { say } from '../../units/sentence.ts';
 import { joined } from '../planWords.ts';
@@ -12,17 +12,24 @@ import { insignificant } from '../rows.ts';
 export type Tried = Pick<PlacementStudy, 'part' | 'points' | 'today'>;
 
 /**
- * The station to tell of, among those that nothing beats: the one that costs least where turning targets are set and it meets
- * them, else the quickest to turn, else the cheapest. Null when there is none.
+ * The place to tell of, among those that nothing beats: the one that costs least where turning targets are set and it meets
+ * them, else the quickest to turn, else the cheapest; today's where that is as good as the model can tell. Null when there is none.
  */
-export function toldStation({ points }: Tried, targets: Targets): PlacedPoint | null {
-  const best = points.filter((point) => point.best);
+export function toldPlace(study: Tried, targets: Targets): PlacedPoint | null {
+  const told = foremost(study, targets);
+  return told && isAble(study.today) && asGood(study.today, told) ? study.today : told;
+}
+
+function foremost(study: Tried, targets: Targets): PlacedPoint | null {
+  const best = unbeatenOf(study);
   const asked = targets.turnTime !== null || targets.sideGust !== null;
   const meeting = asked ? best.filter((point) => meets(point, targets)) : [];
   if (meeting.length > 0) return leastBy(meeting, costOf);
   const turning = best.filter(({ timeTo90 }) => timeTo90 !== null);
   return turning.length > 0 ? leastBy(turning, ({ timeTo90 }) => timeTo90!) : leastBy(best, costOf);
 }
+
+const unbeatenOf = ({ points, today }: Tried): PlacedPoint[] => [today, ...points].filter(({ best }) => best);
 
 export const meets = ({ timeTo90, gustHeld }: PlacedPoint, { turnTime, sideGust }: Targets): boolean =>
   (turnTime === null || (timeTo90 !== null && timeTo90 <= turnTime)) &&
@@ -38,31 +45,32 @@ const leastBy = (points: readonly PlacedPoint[], of: (point: PlacedPoint) => num
 
 /**
  * "In the tail at 4.2 m: 90° in 3.1 s, holds 2.4 m/s from the side; costs 96 g of lead and 8 g of wire more than at 1.9 m, where
- * it is now and takes 9.0 s." Where the thruster is there already, against the cheapest of those that nothing beats.
+ * it is now and takes 9.0 s." Where the thruster is there already, against the cheapest of those that nothing beats. `moved`:
+ * whether it has been moved since the study.
  */
-export function placeHeadline(craft: Craft, study: Tried): string {
-  const { today, points } = study;
-  const told = toldStation(study, craft.targets);
+export function placeHeadline(craft: Craft, study: Tried, moved = false): string {
+  const { today } = study;
+  const told = toldPlace(study, craft.targets);
   if (!told) return 'At no station is there both a ballast plan and room for the propeller.';
-  const where = whereWords(craft, told);
   const does = doesWords(told);
-  if (!isAt(told, today)) return `${where}: ${does}; ${againstToday(told, today)}.`;
-  const cheapest = leastBy(
-    points.filter(({ best }) => best),
-    costOf,
-  )!;
-  const more = isAt(cheapest, told)
+  const then = moved ? 'where it was' : 'where it is now';
+  if (told !== today) return `${whereWords(craft, told)}: ${does}; ${againstToday(told, today, then)}.`;
+  const cheapest = leastBy(unbeatenOf(study), costOf) ?? told;
+  const more = asGood(cheapest, told)
     ? ''
     : `; ${costWords(told, cheapest)} at ${fareWords(cheapest, ', where it ')}`;
-  return `${where}, where it is now: ${does}${more}.`;
+  const other = foremost(study, craft.targets);
+  if (!other || isAt(other, told)) return `${whereWords(craft, told)}, ${then}: ${does}${more}.`;
+  const stays = moved ? 'Where it was,' : 'Staying';
+  return `${stays} at ${say(told.station, 'length')} is as good as moving to ${say(other.station, 'length')}: ${does}${more}.`;
 }
 
-const isAt = (a: PlacedPoint, b: PlacedPoint): boolean => Math.abs(a.station - b.station) < 1e-6;
+export const isAt = (a: PlacedPoint, b: PlacedPoint): boolean => Math.abs(a.station - b.station) < 1e-6;
 
-const againstToday = (told: PlacedPoint, today: PlacedPoint): string =>
+const againstToday = (told: PlacedPoint, today: PlacedPoint, then: string): string =>
   today.ballast === null
-    ? `at ${say(today.station, 'length')}, where it is now, no ballast plan can be made`
-    : `${costWords(told, today)} at ${fareWords(today, ', where it is now and ')}`;
+    ? `at ${say(today.station, 'length')}, ${then}, no ballast plan can be made`
+    : `${costWords(told, today)} at ${fareWords(today, `, ${then} and `)}`;
 
 /** "1.9 m, where it takes 9.0 s" */
 function fareWords({ station, strikes, timeTo90 }: PlacedPoint, joint: string): string {

@@ -45,3 +45,24 @@ test('sorting and sweeping finds the same, at random', () => {
     }),
   );
 });
+
+const tuple = fc.array(fc.integer({ min: 0, max: 6 }), { minLength: 3, maxLength: 3 });
+
+test('with figures taken as equal there is always one that nothing beats, though they may go round in a ring', () => {
+  // Each is 2 better than the next in one thing and 1 worse in the other two: without the sum each would be beaten.
+  const ring = [
+    [0, 2, 1],
+    [2, 1, 0],
+    [1, 0, 2],
+  ];
+  expect(unbeaten(ring, 1)).toEqual([true, true, true]);
+  fc.assert(
+    fc.property(fc.array(tuple, { minLength: 1, maxLength: 12 }), (choices) => {
+      expect(unbeaten(choices, 1)).toContain(true);
+      // What stands when every figure counts and is far from the rest stands here too.
+      expect(unbeaten(choices, 0).map((stands, i) => !stands || unbeaten(choices, 6)[i])).not.toContain(
+        false,
+      );
+    }),
+  );
+});

@@ -2,7 +2,7 @@ import { expect, test } from 'vitest';
 import { type Craft, keyed, listed } from '../../../src/craft/craft.ts';
 import type { Part } from '../../../src/craft/schema.ts';
 import { craftStateOf } from '../../../src/physics/craftState.ts';
-import { meantOf, strikesOf } from '../../../src/physics/placing/strikes.ts';
+import { type Meant, meantOf, strikesOf } from '../../../src/physics/placing/strikes.ts';
 import { inUnits } from '../../../src/units/sentence.ts';
 import { partOf } from '../../edit/craftFixture.ts';
 import { craftWith, degrees, solvedValue, thrusterPart, turning } from '../thrust/thrustFixture.ts';
@@ -108,12 +108,26 @@ test('a fitting in the way today is the mount, which rules no place out; another
   const thruster = thrusterPart({ place: { kind: 'free', x: 2, y: 0, z: -0.75 } });
   const state = solvedValue(craftStateOf(craftWith([thruster, arm, camera, leg])));
   const meant = meantOf(state, 'thruster');
-  expect(meant).toEqual({ mounts: new Set(['arm']), lowest: false });
+  expect(meant).toMatchObject({ mounts: new Set(['arm']), lowest: false });
   expect(strikesOf(state, 'thruster').cautions).toEqual([
     'The propeller would strike Arm.',
     'The propeller would strike Camera.',
   ]);
   expect(strikesOf(state, 'thruster', meant).cautions).toEqual(['The propeller would strike Camera.']);
+});
+
+test('a part in the way that only the plan has hung there is told as such', () => {
+  const thruster = thrusterPart({ place: { kind: 'free', x: 2, y: 0, z: -0.75 } });
+  const lead = partOf('lead', {
+    kind: 'ballast',
+    name: 'Chin lead',
+    place: { kind: 'free', x: 2, y: 0.07, z: -0.75 },
+  });
+  const stateWith = (...parts: Part[]) => solvedValue(craftStateOf(craftWith(parts)));
+  const [bare, hung] = [stateWith(thruster), stateWith(thruster, lead)];
+  const words = (meant: Meant) => strikesOf(hung, 'thruster', meant).cautions[0];
+  expect(words(meantOf(bare, 'thruster'))).toBe('The propeller would strike Chin lead (hung by the plan).');
+  expect(words(meantOf(hung, 'thruster'))).toBe('The propeller would strike Chin lead.');
 });
 
 test('where the propeller is the lowest of the craft today, being lowest is told and rules no place out', () => {

@@ -7,7 +7,7 @@ import { craftStateOf } from '../../../src/physics/craftState.ts';
 import { cruisePitch } from '../../../src/physics/cruise/cruise.ts';
 import { heldAt } from '../../../src/physics/placing/moved.ts';
 import type { PlacedPoint } from '../../../src/physics/placing/placedPoint.ts';
-import { worthOf } from '../../../src/physics/placing/placedPoint.ts';
+import { judged } from '../../../src/physics/placing/placedPoint.ts';
 import { placementStudy } from '../../../src/physics/placing/study.ts';
 import { turnOf } from '../../../src/physics/turning/turn.ts';
 import { solvedValue } from '../thrust/thrustFixture.ts';
@@ -177,24 +177,87 @@ test('behind the tail the air is slower, and thrust per watt greater than in fre
   expect(tail.perWatt).toBeGreaterThan(1);
 });
 
-test('the best are those that no other station beats, by brute force; what strikes is left out', () => {
+/** Whether `a` is the greater by more than a share of the less and more than a step: the bands as the notes tell them. */
+const above = (a: number, b: number, step: number, share: number): boolean =>
+  a - b > step * (1 + 1e-9) && a > b * (1 + share) * (1 + 1e-9);
+
+test('the best are those that no other place beats by more than the model can tell, by brute force', () => {
   const { points, today } = studyOf(placingCraft(), { stations: 31 });
-  const able = points.filter(({ ballast, strikes }) => ballast !== null && !strikes);
-  const beaten = (point: PlacedPoint): boolean =>
-    able.some((other) => {
-      const [a, b] = [worthOf(other), worthOf(point)];
-      let better = false;
-      for (let i = 0; i < a.length; i++) {
-        if (a[i]! > b[i]!) return false;
-        better ||= a[i]! < b[i]!;
-      }
-      return better;
-    });
-  for (const point of [...points, today]) {
-    expect(point.best).toBe(point.ballast !== null && !point.strikes && !beaten(point));
+  const able = [...points, today].filter(({ ballast, strikes }) => ballast !== null && !strikes);
+  const lead = ({ ballast, wire }: PlacedPoint) => ballast! + wire;
+  const time = ({ timeTo90 }: PlacedPoint) => timeTo90 ?? 1e9;
+  const gust = ({ gustHeld }: PlacedPoint) => gustHeld ?? 0;
+  const clearlyBetter = (a: PlacedPoint, b: PlacedPoint): boolean[] => [
+    above(lead(b), lead(a), 1e-3, 0.01),
+    above(time(b), time(a), 0.01, 0.03),
+    above(gust(a), gust(b), 0.01, 0.03),
+    above(a.perWatt!, b.perWatt!, 0, 0.01),
+  ];
+  for (const best of able.filter((point) => point.best)) {
+    // Whoever is clearly better in two things or more, and clearly worse in none, would beat it.
+    for (const other of able) {
+      const wins = clearlyBetter(other, best).filter(Boolean).length;
+      expect(wins > 1 && !clearlyBetter(best, other).some(Boolean)).toBe(false);
+    }
   }
-  expect(points.filter(({ best }) => best).length).toBeGreaterThan(1);
-  expect(able.length).toBeLessThan(points.length);
+  for (const beaten of able.filter((point) => !point.best)) {
+    expect(
+      able.some(
+        (other) => clearlyBetter(other, beaten).some(Boolean) && !clearlyBetter(beaten, other).some(Boolean),
+      ),
+    ).toBe(true);
+  }
+  for (const point of points) if (!able.includes(point)) expect(point.best).toBe(false);
+  expect(able.filter(({ best }) => best).length).toBeGreaterThan(1);
+  expect(able.length).toBeLessThan(points.length + 1);
+});
+
+test('what today beats is not best, and what differs by less than the model can tell is as good', () => {
+  const [one] = studyOf(placingCraft(), { stations: 2 }).points;
+  const at = (ballast: number, timeTo90: number): PlacedPoint => ({
+    ...one!,
+    ...{ ballast, timeTo90, wire: 0, gustHeld: 1, perWatt: 1, strikes: false },
+  });
+  const bestOf = (points: PlacedPoint[], today: PlacedPoint) =>
+    [today, ...judged(points, today).points].map((point, i) =>
+      i === 0 ? judged(points, today).today.best : point.best,
+    );
+  expect(bestOf([at(0.05, 4), at(0.02, 5)], at(0.05, 3))).toEqual([true, false, true]);
+  expect(bestOf([at(0.0509, 4)], at(0.05, 4))).toEqual([true, true]);
+  expect(bestOf([at(0.0511, 4)], at(0.05, 4))).toEqual([true, false]);
+  expect(bestOf([at(0.5045, 4), at(0.506, 4)], at(0.5, 4))).toEqual([true, true, false]);
+  expect(bestOf([at(0.05, 4.11), at(0.05, 4.13)], at(0.05, 4))).toEqual([true, true, false]);
+});
+
+test('one that was stopped goes on with the stations not done yet, to the same end', () => {
+  const whole = studyOf(placingCraft(), { stations: 21 });
+  let heard = 0;
+  const half = studyOf(placingCraft(), {
+    stations: 21,
+    onProgress: ({ points }) => {
+      heard = points.length;
+    },
+    shouldStop: () => heard >= 8,
+  });
+  const shares: number[] = [];
+  const rest = studyOf(placingCraft(), {
+    stations: 21,
+    done: half.points,
+    onProgress: ({ share }) => shares.push(share),
+  });
+  expect(half.points).toHaveLength(8);
+  expect(shares[0]).toBeGreaterThan(half.points.length / 21);
+  expect(rest.complete).toBe(true);
+  expect(rest.points.map(({ station, best }) => [station, best])).toEqual(
+    whole.points.map(({ station, best }) => [station, best]),
+  );
+  whole.points.map(figuresOf).forEach((figures, i) => {
+    figures.forEach((figure, k) => {
+      const found = figuresOf(rest.points[i]!)[k]!;
+      if (figure === null) expect(found).toBe(null);
+      else expect(found).toBeCloseTo(figure, 6);
+    });
+  });
 });
 
 test('progress holds the stations so far; asked to stop half-way, the study ends there', () => {

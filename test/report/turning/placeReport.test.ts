@@ -1,14 +1,20 @@
 import Papa from 'papaparse';
 import { expect, test } from 'vitest';
+import { stowed } from '../../../src/craft/stowage.ts';
+import { planOf } from '../../../src/physics/ballast/plan.ts';
+import { heldAt } from '../../../src/physics/placing/moved.ts';
 import type { PlacedPoint } from '../../../src/physics/placing/placedPoint.ts';
 import type { PlacementStudy } from '../../../src/physics/placing/study.ts';
+import { planSteps } from '../../../src/report/planWords.ts';
 import { placeCsv } from '../../../src/report/turning/placeCsv.ts';
 import { PLACE_FIGURES } from '../../../src/report/turning/placeFigures.ts';
 import { placeJson } from '../../../src/report/turning/placeJson.ts';
 import { placeReport } from '../../../src/report/turning/placeReport.ts';
-import { matterOf, stretchesOf, toldStation } from '../../../src/report/turning/placeWords.ts';
+import { bestOfRuns } from '../../../src/report/turning/placeRuns.ts';
+import { stowageSteps } from '../../../src/report/turning/placeSteps.ts';
+import { matterOf, stretchesOf, toldPlace } from '../../../src/report/turning/placeWords.ts';
 import { inUnits } from '../../../src/units/sentence.ts';
-import { placingCraft, studyOf } from '../../physics/placing/placingCrafts.ts';
+import { placingCraft, solver, studyOf } from '../../physics/placing/placingCrafts.ts';
 
 const craft = placingCraft({ part: { name: 'Tail motor' } });
 
@@ -68,6 +74,60 @@ test.each([
   );
 });
 
+test('once it has been moved, that is where it was', () => {
+  const told = (today: PlacedPoint) =>
+    placeReport(craft, studyWith([middle, tail], today), 'metric', true).headline;
+  expect(told(middle)).toMatch(/than at 1\.900 m, where it was and takes 9\.0 s\.$/);
+  expect(told({ ...tail })).toMatch(/^In the tail at 3\.900 m, where it was: /);
+});
+
+test('where today is as good as the model can tell, staying leads', () => {
+  const today = { ...tail, station: 3.8, ballast: 0.197, timeTo90: 3.17 };
+  expect(headline(studyWith([middle, tail], today))).toBe(
+    'Staying at 3.800 m is as good as moving to 3.900 m: 90° in 3.2 s, holds 2.40 m/s from the side.',
+  );
+  expect(toldPlace(studyWith([tail], today), craft.targets)).toBe(today);
+  const slower = { ...today, timeTo90: 3.3 };
+  expect(toldPlace(studyWith([tail], slower), craft.targets)).toBe(tail);
+  expect(toldPlace(studyWith([tail], { ...today, strikes: true }), craft.targets)).toBe(tail);
+  expect(headline(studyWith([middle], { ...today, best: true }))).toMatch(
+    /^In the tail at 3.800 m, where it is now/,
+  );
+});
+
+test('of neighbours that cannot be told apart a table has the best, and the one told of', () => {
+  const at = (station: number, timeTo90: number, best = true) => point(station, { timeTo90, best });
+  const points = [
+    at(1, 4),
+    at(1.1, 3.95),
+    at(1.2, 4),
+    at(1.3, 3.5),
+    at(1.4, 3.5, false),
+    at(1.5, 3.5),
+    at(1.6, 3.45),
+  ];
+  const shown = (told: number | null, today = middle) =>
+    bestOfRuns({ points, today }, told).map(({ station }) => station);
+  expect(shown(null)).toEqual([1.1, 1.3, 1.6]);
+  expect(shown(1.2)).toEqual([1.2, 1.3, 1.6]);
+  expect(shown(null, at(1.3, 3.5))).toEqual([1.1, 1.6]);
+  // A slope that falls by less than can be told from one to the next is no one run.
+  const slope = Array.from({ length: 9 }, (_, i) => at(i, 4 * 0.98 ** i));
+  expect(bestOfRuns({ points: slope, today: middle }, null).length).toBeGreaterThan(3);
+});
+
+test('what carrying a plan out changes is told in the words of the Plan tab', () => {
+  const { points } = studyOf(craft, { stations: 2 });
+  const { place, stowage } = points.at(-1)!;
+  const plan = planOf(heldAt(craft, craft.parts.byId.thruster!, place), solver, { explain: false });
+  if ('why' in plan) throw new Error(plan.why);
+  const read = planSteps(craft, plan).map((each) => inUnits(each, 'metric'));
+  expect(stowageSteps(craft, stowage!, 'metric')).toEqual(read);
+  expect(read[0]).toMatch(/^hang [\d.]+ g at the nose$/);
+  const done = stowed(craft, stowage!);
+  expect(stowageSteps(done, stowage!, 'metric')).toEqual([]);
+});
+
 test('where today stands ill it says so', () => {
   const best = point(2, { best: true });
   expect(headline(studyWith([best], point(1.9, { ballast: null, why: 'None.' })))).toMatch(
@@ -86,14 +146,14 @@ test('where turning targets are set, the cheapest of the best that meets them is
   const between = point(3, { best: true, ballast: 0.1, timeTo90: 4 });
   const study = studyWith([cheap, between, tail], middle);
   const told = (turnTime: number | null, sideGust: number | null = null) =>
-    toldStation(study, { ...craft.targets, turnTime, sideGust });
+    toldPlace(study, { ...craft.targets, turnTime, sideGust });
   expect(told(null)).toBe(tail);
   expect(told(7)).toBe(cheap);
   expect(told(5)).toBe(between);
   expect(told(7, 2)).toBe(tail);
   expect(told(1)).toBe(tail);
   const straight = [tail, cheap].map((each) => ({ ...each, timeTo90: null }));
-  expect(toldStation(studyWith(straight, middle), craft.targets)).toBe(straight[1]);
+  expect(toldPlace(studyWith(straight, middle), craft.targets)).toBe(straight[1]);
 });
 
 test('obstacles are told by the stations where they are', () => {
