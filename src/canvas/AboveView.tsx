@@ -3,12 +3,12 @@ import { useMemo, useRef, useState } from 'react';
 import { idsOf } from '../edit/selection.ts';
 import { aboveInWords, aboveMarks, piecesAbove } from '../scene/above.ts';
 import { aboveFigure } from '../scene/figure.ts';
-import { sameGrip } from '../scene/grip.ts';
+import { type Grip, sameGrip } from '../scene/grip.ts';
 import { FigureCache } from '../scene/keepSame.ts';
 import { aboveMargins } from '../scene/margins.ts';
 import { planOutline } from '../scene/outline.ts';
 import { LONGEST_PX } from '../scene/thrustArrows.ts';
-import { angleReadout, thrustReadout, turnStatus } from '../scene/thrustWords.ts';
+import { angleReadout, turnStatus } from '../scene/thrustWords.ts';
 import type { View } from '../scene/view.ts';
 import { AboveDrawing } from './AboveDrawing.tsx';
 import { Frame } from './Frame.tsx';
@@ -40,9 +40,6 @@ export function AboveView(props: CanvasProps) {
 
 /** Arrows no longer than a part of a small pane. */
 const longestIn = ({ width, height }: Size): number => Math.min(LONGEST_PX, 0.2 * Math.min(width, height));
-
-/** Narrower than this there is no room for more than an angle beside the hand, px. */
-const ROOMY = 190;
 
 function AboveFrame(props: CanvasProps & DrawnProps) {
   const { session, selection, palette, geometry, craft, assessment, units } = props;
@@ -100,7 +97,11 @@ function AboveFrame(props: CanvasProps & DrawnProps) {
   };
   const gestures = useGestures(frame, ground, take, hover);
   const { held, hint } = overlay;
-  const readout = size.width < ROOMY ? angleReadout : thrustReadout;
+  // The drawing itself says what the thrust does: a label as large as elsewhere would cover half of this small view.
+  const angleOf = (grip: Grip | null) =>
+    grip?.kind === 'thrust' ? angleReadout(scene, grip.id, grip.way) : null;
+  const under = thingUnder(scene, overlay);
+  const angle = angleOf(overlay.hover);
   return (
     <Frame
       frame={frame}
@@ -120,8 +121,8 @@ function AboveFrame(props: CanvasProps & DrawnProps) {
       <AboveDrawing scene={scene} selection={selection} overlay={overlay} />
       <Notes
         hint={hint}
-        readout={held?.kind === 'thrust' ? readout(scene, held.id, held.way) : null}
-        under={thingUnder(scene, overlay)}
+        readout={angleOf(held)}
+        under={under && angle ? { ...under, about: angle } : under}
         inSight={inSightOf(scene, aboveMarks(view, geometry), held, outline)}
         size={size}
         palette={palette}

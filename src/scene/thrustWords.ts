@@ -24,7 +24,7 @@ export function turnedWords(way: Way, angle: number, units: UnitSystem): string 
   return `${formatQuantity(Math.abs(angle), 'angle', units)} ${angle > 0 ? plus : minus}`;
 }
 
-/** The same where there is no room for more than the angle. */
+/** No more than the angle, for a small view. */
 export function angleReadout({ craft, units }: Subject, id: string, way: Way): Readout | null {
   const vectoring = craft.parts.byId[id]?.thruster?.[way];
   return vectoring ? { title: turnedWords(way, vectoring.set, units), lines: [] } : null;

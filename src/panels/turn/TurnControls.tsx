@@ -115,11 +115,11 @@ function steeringChoices(craft: Craft, turning: Turning, units: UnitSystem) {
   if (!part?.thruster) return [hardest];
   return [
     hardest,
-    { value: 'set', label: `The arrow as set, ${angleWords(part.thruster.yaw.set, units)}` } as const,
+    { value: 'set', label: `As the arrow: ${angleWords(part.thruster.yaw.set, units)}` } as const,
   ];
 }
 
 function angleWords(angle: number, units: UnitSystem): string {
-  const side = angle > 0 ? ' to starboard' : angle < 0 ? ' to port' : '';
+  const side = angle > 0 ? ' starboard' : angle < 0 ? ' port' : '';
   return `${formatQuantity(Math.abs(angle), 'angle', units)}${side}`;
 }

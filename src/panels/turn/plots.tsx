@@ -36,30 +36,33 @@ export function SpeedPlot({ curve }: { curve: readonly SpeedPoint[] }) {
   );
 }
 
-/** Wider turns than so many times the tightest are left out: towards straight ahead the radius has no end. */
-const WIDEST = 6;
+/** The axis begins a little below the tightest turn. */
+const BELOW = 0.8;
 
+/** Every circle that holds, on a scale of equal ratios: towards straight ahead the radius grows without end. */
 export function SteadyPlot({ curve }: { curve: readonly SteadyPoint[] }) {
   const { units } = useEditor();
   const byAngle = curve.some(({ vector }) => vector !== 0);
-  const all = curve.flatMap(({ share, vector, turn, settles }) =>
+  const held = curve.flatMap(({ share, vector, turn, settles }) =>
     turn.status === 'solved' && settles
       ? [{ x: Math.abs(byAngle ? vector : share), y: turn.value.radius }]
       : [],
   );
-  const tightest = Math.min(...ys(all));
-  const radius = all.filter(({ y }) => y <= WIDEST * tightest);
-  if (radius.length < LEAST_POINTS) return null;
+  if (held.length < LEAST_POINTS) return null;
+  const [tightest, widest] = [Math.min(...ys(held)), Math.max(...ys(held))];
+  const bottom = BELOW * tightest;
+  const words = (radius: number) => formatQuantity(radius, 'pathLength', units);
+  const points = held.map(({ x, y }) => ({ x, y: Math.log(y / bottom) / Math.log(widest / bottom) }));
   return (
     <SmallPlot
-      title={byAngle ? 'Radius over vectoring' : 'Radius over thrust apart'}
-      words={`The radius falls to ${formatQuantity(tightest, 'pathLength', units)} at its least.`}
-      curves={[{ name: 'radius', points: radius }]}
+      title={`Radius over ${byAngle ? 'vectoring' : 'thrust apart'}, equal steps for equal ratios`}
+      words={`The radius falls from ${words(widest)} to ${words(tightest)} at its least.`}
+      curves={[{ name: 'radius', points }]}
       x={{
-        ...axisOf(xs(radius), byAngle ? 'angle' : 'fraction', units),
+        ...axisOf(xs(points), byAngle ? 'angle' : 'fraction', units),
         name: byAngle ? 'angle in yaw' : 'share of what there is',
       }}
-      y={axisOf(ys(radius), 'pathLength', units)}
+      y={{ least: 0, most: 1, leastWords: words(bottom), mostWords: words(widest) }}
     />
   );
 }

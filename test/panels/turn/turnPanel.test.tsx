@@ -14,6 +14,7 @@ import { placementStudy } from '../../../src/physics/placing/study.ts';
 import { HAZARDS } from '../../../src/report/hazards.ts';
 import { placeReport } from '../../../src/report/turning/placeReport.ts';
 import { turnFigures, turnReport } from '../../../src/report/turning/turnReport.ts';
+import { formatQuantity } from '../../../src/units/format.ts';
 import type { UnitSystem } from '../../../src/units/units.ts';
 import { sampleCraft } from '../../samples/readSamples.ts';
 import { danglingIds, editorOn, seen, unnamed } from '../render.tsx';
@@ -168,4 +169,17 @@ test('the arrow that was turned last is the one to steer by; without one it is h
   expect(askedOf(unthrust, { ...FIRST_TURNING, steering: 'set' }).vector).toBeNull();
   const { set } = museum.parts.byId[thruster!]!.thruster!.yaw;
   expect(askedOf(museum, { ...FIRST_TURNING, steering: 'set', turned: 'gone' }).vector).toBe(set);
+});
+
+test('the curve of radii reaches to the widest circle that holds, and the choice of steering is short', () => {
+  const craft = sampleCraft('worked-example');
+  const { steadyCurve, rows } = turnReport(craft, askedOf(craft, FIRST_TURNING), 'metric');
+  const radii = steadyCurve.flatMap(({ turn, settles }) =>
+    turn.status === 'solved' && settles ? [turn.value.radius] : [],
+  );
+  const widest = Math.max(...radii);
+  expect(widest).toBeGreaterThanOrEqual(rows['turn.radius']!.value!);
+  const markup = panel(craft);
+  expect(markup).toContain(`The radius falls from ${formatQuantity(widest, 'pathLength', 'metric')} to`);
+  expect(markup).toMatch(/As the arrow: 0\.0°/);
 });
