@@ -81,15 +81,8 @@ export const FLIGHT_RECIPES: Recipes<Flight> = {
     source: 'Figures of merit as entered.',
   },
   'cruise.pitch': {
-    formula: 'θ at which all couples about the CB add up to nil',
-    from: [
-      'cruise.thrustCouple',
-      'cruise.dragCouple',
-      'cruise.munkCouple',
-      'cruise.finCouple',
-      'cruise.crossFlowCouple',
-      'cruise.pendulumCouple',
-    ],
+    formula: 'θ at which the six couples listed with it add up to nil',
+    from: ['speed.cruise'],
     source: PITCH,
   },
   'cruise.thrustCouple': {

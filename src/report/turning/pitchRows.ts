@@ -4,18 +4,20 @@ import { heavinessOf, type Loading } from '../../physics/balance/loading.ts';
 import type { CraftState } from '../../physics/craftState.ts';
 import { type Climb, type ClimbPoint, steadyClimb } from '../../physics/cruise/climb.ts';
 import { type Critical, criticalSpeed } from '../../physics/cruise/critical.ts';
-import { cruisePitch } from '../../physics/cruise/cruise.ts';
+import { type Cruise, cruisePitch } from '../../physics/cruise/cruise.ts';
 import { hoverOf } from '../../physics/cruise/hover.ts';
+import { thrustersOf } from '../../physics/thrust/thrusters.ts';
 import type { TurnAsked } from '../../physics/turning/asked.ts';
 import { STANDARD_GRAVITY } from '../../units/constants.ts';
+import { say } from '../../units/sentence.ts';
 import { spread } from '../floatRows.ts';
 import type { Rows } from '../rows.ts';
 import { ifDriven } from './thrusterWords.ts';
-import { rowsFrom } from './turnFigure.ts';
+import { rowsFrom, type TurnKey } from './turnFigure.ts';
 
 export function pitchRows(state: CraftState, { throttle, speed }: TurnAsked): Rows {
   const cruise = ifDriven(state, () => cruisePitch(state, speed === null ? { throttle } : { speed }));
-  const caution = cruise.status === 'solved' ? cruise.value.cautions.join(' ') : null;
+  const caution = cruise.status === 'solved' ? cautionsOf(cruise.value, state) : null;
   return {
     ...rowsFrom(
       cruise,
@@ -29,10 +31,25 @@ export function pitchRows(state: CraftState, { throttle, speed }: TurnAsked): Ro
         'cruise.pendulumCouple': ({ terms }) => terms.tailHeaviness + terms.depth,
         'cruise.rising': ({ rising }) => rising,
       },
-      { 'cruise.pitch': { caution } },
+      { 'cruise.pitch': { caution, why: LEVEL } },
     ),
     ...rowsFrom(loosening(criticalSpeed(state)), { 'cruise.criticalSpeed': (at) => at }),
   };
+}
+
+const LEVEL =
+  '+ nose-up, in level flight, as if a hand held its height; left to itself it flies as told under “Climbs”.';
+
+/** Less is lost in what trimming can do, N: about 2 g. */
+const TRIMMED = 0.02;
+
+function cautionsOf({ rising, cautions }: Cruise, state: CraftState): string {
+  if (Math.abs(rising) < TRIMMED) return cautions.join(' ');
+  const trim = `${say(Math.abs(rising) / STANDARD_GRAVITY, 'mass')} ${rising > 0 ? 'heavier' : 'lighter'}`;
+  const turns = thrustersOf(state).some(({ pitch }) => pitch.most > pitch.least);
+  const orTurned = turns ? ' or held there by thrust turned in pitch, which changes this pitch too' : '';
+  const level = `Level only if trimmed ${trim}${orTurned}; left to itself it flies as told under “Climbs”.`;
+  return [level, ...cautions].join(' ');
 }
 
 const loosening = (critical: Outcome<Critical>): Outcome<number> => {
@@ -45,6 +62,8 @@ const loosening = (critical: Outcome<Critical>): Outcome<number> => {
 const weight = (loading: Loading): number => STANDARD_GRAVITY * heavinessOf(loading);
 
 export function hoverRows(state: CraftState): Rows {
+  const hover = ifDriven(state, () => hoverOf(state));
+  const caution = hover.status === 'solved' ? hover.value.cautions.join(' ') : null;
   return {
     ...rowsFrom(
       solved(weight(state.loading)),
@@ -52,12 +71,13 @@ export function hoverRows(state: CraftState): Rows {
       { 'hover.force': { uncertainty: spread(state, weight) } },
     ),
     ...rowsFrom(
-      ifDriven(state, () => hoverOf(state)),
+      hover,
       {
         'hover.share': ({ share }) => share,
         'hover.vector': ({ vector }) => vector,
         'hover.pitch': ({ pitch }) => pitch,
       },
+      { 'hover.share': { caution } },
     ),
   };
 }
@@ -81,25 +101,42 @@ export function climbRows(state: CraftState, throttle: number, curve: readonly C
       },
       { 'climb.rate': { caution } },
     ),
-    ...rowsFrom(extreme(1), {
-      'climb.best': ({ rate }) => rate,
-      'climb.bestVector': ({ vector }) => vector,
-    }),
-    ...rowsFrom(extreme(-1), {
-      'climb.descent': ({ rate }) => rate,
-      'climb.descentVector': ({ vector }) => vector,
-    }),
+    ...extremeRows(extreme(1), 'climb.best', 'climb.bestVector'),
+    ...extremeRows(extreme(-1), 'climb.descent', 'climb.descentVector'),
   };
+}
+
+function extremeRows(rate: Outcome<Rate>, key: TurnKey, vectorKey: TurnKey): Rows {
+  const found = rate.status === 'solved' ? rate.value : null;
+  const why = found
+    ? `At ${say(found.climb.pitch, 'angle')} of pitch, of all angles of thrust within the limits; + is up.`
+    : '';
+  return rowsFrom(
+    rate,
+    { [key]: ({ rate: each }: Rate) => each, [vectorKey]: ({ vector }: Rate) => vector },
+    { [key]: { why, caution: found?.climb.cautions.join(' ') ?? null } },
+  );
 }
 
 interface Rate {
   readonly vector: number;
   /** m/s, + up */
   readonly rate: number;
+  readonly climb: Climb;
 }
 
 const rateOf = (vector: number, climb: Outcome<Climb>): Rate | null =>
-  climb.status === 'solved' ? { vector, rate: climb.value.climbRate } : null;
+  climb.status === 'solved' ? { vector, rate: climb.value.climbRate, climb: climb.value } : null;
+
+/** Not a descent when it climbs at every angle, nor a climb when it sinks. */
+function goingThatWay(best: Rate, way: 1 | -1): Outcome<Rate> {
+  if (way * best.rate > 0) return solved(best);
+  const [cannot, goes] = way > 0 ? ['climb', 'sinks'] : ['descend', 'climbs'];
+  return infeasible(
+    `It cannot ${cannot} under this throttle: at every angle of thrust it ${goes}, slowest at ${say(best.vector, 'angle')} with ${say(Math.abs(best.rate), 'speed')}.`,
+    way > 0 ? 'Make it lighter, or fit more thrust.' : 'Throttle back, or make it heavier.',
+  );
+}
 
 /** Where it goes up fastest, or down fastest: the best of the points, and what lies better beside it. */
 function most(
@@ -117,9 +154,9 @@ function most(
   }
   const i = rates.indexOf(best);
   const [before, after] = [rates[i - 1], rates[i + 1]];
-  if (before && after) return solved(better(best, rateAt(topOf(before, best, after))) ?? best);
+  if (before && after) return goingThatWay(better(best, rateAt(topOf(before, best, after))) ?? best, way);
   const gap = [i - 1, i + 1].find((k) => rates[k] === null);
-  return solved(gap === undefined ? best : towards(curve[gap]!.vector, best, better, rateAt));
+  return goingThatWay(gap === undefined ? best : towards(curve[gap]!.vector, best, better, rateAt), way);
 }
 
 /** Top of the parabola through three points at equal steps, the best in the middle. */

@@ -128,6 +128,31 @@ test('shares of vectoring, arm and thrust make the moment', () => {
   ).toBeCloseTo(share('turn.yawMoment'), 12);
 });
 
+test('a cruise pitch that only a trimmed craft flies level says by how much, and where what it does by itself is told', () => {
+  const { rows } = reportOf(sampleCraft('museum-atrium'));
+  const grams = (1000 * rows['cruise.rising']!.value!) / 9.80665;
+  expect(rows['cruise.pitch']!.why).toMatch(`Level only if trimmed ${grams.toFixed(1)} g heavier`);
+  expect(rows['cruise.pitch']!.why).toMatch(/left to itself it flies as told under “Climbs”/);
+  // Trimmed by what it says, at the CB so that the pitch stays, it flies level by itself.
+  const slow = { ...FULL, speed: 0.3 };
+  const { 'cruise.rising': rising } = reportOf(levelCraft(), slow).rows;
+  const station = reportedCb(levelCraft());
+  const weight = partOf('trim', {
+    mass: rising!.value! / 9.80665,
+    massTolerance: 0,
+    place: { kind: 'axis', station },
+  });
+  const trimmed = reportOf(withParts(levelCraft(), weight), slow).rows;
+  expect(Math.abs(trimmed['cruise.rising']!.value!)).toBeLessThan(0.02);
+  expect(trimmed['cruise.pitch']!.why).not.toMatch(/Level only/);
+});
+
+const reportedCb = (craft: Craft): number => {
+  const state = craftStateOf(craft);
+  if (state.status !== 'solved') throw new Error(state.why);
+  return state.value.loading.cb[0];
+};
+
 test('the couples of cruise add up to nil', () => {
   const { rows } = reportOf(levelCraft(), { ...FULL, speed: 0.5 });
   const terms = Object.entries(rows).filter(([key]) => key.endsWith('Couple'));
@@ -216,8 +241,16 @@ test.each(['museum-atrium', 'aviary-counter', 'vault-inspector', 'survey-6m'])(
       climb.status === 'solved' ? [climb.value.climbRate] : [],
     );
     const { rows } = reportOf(craft);
-    expect(Math.abs(rows['climb.best']!.value! / Math.max(...rates) - 1)).toBeLessThan(0.03);
-    expect(Math.abs(rows['climb.descent']!.value! / Math.min(...rates) - 1)).toBeLessThan(0.03);
+    const [most, least] = [Math.max(...rates), Math.min(...rates)];
+    for (const [key, rate, way] of [
+      ['climb.best', most, 1],
+      ['climb.descent', least, -1],
+    ] as const) {
+      const { value, why } = rows[key]!;
+      if (way * rate > 0) expect(Math.abs(value! / rate - 1), key).toBeLessThan(0.03);
+      else
+        expect([value, why], key).toEqual([null, expect.stringMatching(/^It cannot (climb|descend) under/)]);
+    }
   },
 );
 
