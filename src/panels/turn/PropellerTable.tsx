@@ -1,9 +1,9 @@
 /** The thrust of the craft with other propellers: what it would cost in ideal power. */
 import { rowText } from '../../report/rowText.ts';
-import type { PropellerLine } from '../../report/turning/propellers.ts';
+import { PROPELLERS_LEAVE_OUT, type PropellerLine } from '../../report/turning/propellers.ts';
 import { useEditor } from '../editor.ts';
 
-const HEADS = ['Propellers', 'At rest', 'Against today', 'At top speed', 'Against today'];
+const HEADS = ['Propellers', 'Discs', 'At rest', 'Against today', 'At top speed', 'Against today'];
 
 export function PropellerTable({ lines }: { lines: readonly PropellerLine[] }) {
   const { units } = useEditor();
@@ -25,6 +25,7 @@ export function PropellerTable({ lines }: { lines: readonly PropellerLine[] }) {
           {lines.map(({ name, ...figures }) => (
             <tr key={name}>
               <th scope="row">{name}</th>
+              <td className="number">{rowText(figures.area, units)}</td>
               <td className="number">{rowText(figures.atRest, units)}</td>
               <td className="number">{rowText(figures.atRestOverToday, units)}</td>
               <td className="number">{rowText(figures.atTop, units)}</td>
@@ -34,8 +35,7 @@ export function PropellerTable({ lines }: { lines: readonly PropellerLine[] }) {
         </tbody>
       </table>
       <p className="source">
-        Momentum theory: the larger the disc, the less power for the same thrust. The shaft takes more, by the
-        figure of merit.
+        Momentum theory. {PROPELLERS_LEAVE_OUT} The shaft takes more, by the figure of merit.
       </p>
     </div>
   );

@@ -22,6 +22,8 @@ export interface Discs {
   readonly count: number;
   /** m */
   readonly diameter: number;
+  /** Of all discs, m². */
+  readonly area: number;
   readonly atRest: PowerNeeded;
   /** Null when there is no top speed. */
   readonly atTop: PowerNeeded | null;
@@ -47,7 +49,11 @@ export interface Comparison {
   readonly choices: readonly Discs[];
 }
 
-/** Choices: propellers of the largest diameter aboard, one, two and four of them; one of today's disc area; one half as large again and one twice as large. */
+/**
+ * Choices: propellers of the largest diameter aboard, one, two and four of them; one, two and four that share today's disc
+ * area; two and four of half the largest diameter; one half as large again and one twice as large. What is the same as
+ * today, or as another, is left out.
+ */
 export function comparePropellers(state: CraftState): Outcome<Comparison> {
   const thrusters = thrustersOf(state).filter(({ staticThrust }) => staticThrust > 0);
   if (thrusters.length === 0) return NO_THRUSTER;
@@ -64,7 +70,13 @@ export function comparePropellers(state: CraftState): Outcome<Comparison> {
   };
   const choices = choicesOf(thrusters, area).map(({ count, diameter }) => {
     const discs = count * discArea(diameter);
-    return { count, diameter, atRest: needed(rest, discs), atTop: atTop && needed(atTop, discs) };
+    return {
+      count,
+      diameter,
+      area: discs,
+      atRest: needed(rest, discs),
+      atTop: atTop && needed(atTop, discs),
+    };
   });
   return solved({
     atRest: rest.demand,
@@ -74,16 +86,27 @@ export function comparePropellers(state: CraftState): Outcome<Comparison> {
   });
 }
 
-function choicesOf(thrusters: readonly Thruster[], area: number): Pick<Discs, 'count' | 'diameter'>[] {
+type Choice = Pick<Discs, 'count' | 'diameter'>;
+
+function choicesOf(thrusters: readonly Thruster[], area: number): Choice[] {
   const diameter = Math.max(...thrusters.map((each) => each.diameter));
-  const sameArea = { count: 1, diameter: Math.sqrt((4 * area) / Math.PI) };
-  return [
+  const choices = [
     ...[1, 2, 4].map((count) => ({ count, diameter })),
-    ...(thrusters.length > 1 ? [sameArea] : []),
+    ...[1, 2, 4].map((count) => ({ count, diameter: Math.sqrt((4 * area) / (count * Math.PI)) })),
+    ...[2, 4].map((count) => ({ count, diameter: diameter / 2 })),
     { count: 1, diameter: 1.5 * diameter },
     { count: 1, diameter: 2 * diameter },
   ];
+  const alike = thrusters.every((each) => same(each.diameter, diameter));
+  const today = alike ? [{ count: thrusters.length, diameter }] : [];
+  return choices.filter(
+    (choice, i) => ![...today, ...choices.slice(0, i)].some((other) => repeats(choice, other)),
+  );
 }
+
+const repeats = (a: Choice, b: Choice): boolean => a.count === b.count && same(a.diameter, b.diameter);
+
+const same = (a: number, b: number): boolean => Math.abs(a - b) < 1e-9;
 
 interface Work {
   readonly demand: Demand;

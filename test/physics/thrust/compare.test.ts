@@ -19,7 +19,7 @@ test('today’s thrust at rest and at top speed, where it is the drag', () => {
   expect(comparison.atTop!.thrust).toBeCloseTo(dragOf(pair).at(comparison.atTop!.speed), 9);
 });
 
-test('as today costs as today; at rest one of a pair costs √2, four cost 1/√2, twice the diameter of one 1/√2', () => {
+test('at rest one of a pair costs √2, four 1/√2, the same area as today, two of half the diameter twice; today is not repeated', () => {
   const relative = comparison.choices.map(({ count, diameter, atRest }) => [
     count,
     Number(diameter.toFixed(4)),
@@ -28,9 +28,11 @@ test('as today costs as today; at rest one of a pair costs √2, four cost 1/√
   const near = (value: number) => expect.closeTo(value, 9);
   expect(relative).toEqual([
     [1, 0.2, near(Math.SQRT2)],
-    [2, 0.2, near(1)],
     [4, 0.2, near(Math.SQRT1_2)],
     [1, 0.2828, near(1)],
+    [4, 0.1414, near(1)],
+    [2, 0.1, near(2)],
+    [4, 0.1, near(Math.SQRT2)],
     [1, 0.3, near(Math.SQRT2 / 1.5)],
     [1, 0.4, near(Math.SQRT1_2)],
   ]);
@@ -41,7 +43,7 @@ test('several small propellers need more power than one with a larger disc, at r
   const { choices } = comparison;
   const two = choices.find(({ count }) => count === 2)!;
   const large = choices.at(-1)!;
-  expect(large.diameter).toBeGreaterThan(Math.SQRT2 * two.diameter);
+  expect(large.area).toBeGreaterThan(two.area);
   expect(large.atRest.power).toBeLessThan(two.atRest.power);
   expect(large.atTop!.power).toBeLessThan(two.atTop!.power);
   // At speed the disc counts for less.
@@ -50,15 +52,19 @@ test('several small propellers need more power than one with a larger disc, at r
 
 test('discs unequally loaded cost more than one of their area', () => {
   const { choices, today } = solvedValue(comparePropellers(mixed));
-  const merged = choices.find(({ diameter }) => Math.abs(discArea(diameter) - today.area) < 1e-12)!;
+  const merged = choices.find(({ count, area }) => count === 1 && Math.abs(area - today.area) < 1e-12)!;
   expect(merged.atRest.relative).toBeLessThan(1);
   const [large, small] = [idealPower(1, discArea(0.2), 1.225), idealPower(2, discArea(0.1), 1.225)];
   expect(today.atRest).toBeCloseTo(large + small, 3);
 });
 
-test('one thruster has no second choice of its own area; none has no choice', () => {
-  const single = solvedValue(comparePropellers(stateWith([thrusterPart()])));
-  expect(single.choices).toHaveLength(5);
-  expect(single.choices[0]!.atRest.relative).toBe(1);
+test('no choice repeats today or another; each says the area of its discs', () => {
+  for (const state of [stateWith([thrusterPart()]), pair, mixed]) {
+    const { choices, today } = solvedValue(comparePropellers(state));
+    const names = choices.map(({ count, diameter }) => `${count} of ${diameter.toFixed(6)}`);
+    expect(new Set(names).size).toBe(names.length);
+    if (state !== mixed) expect(names).not.toContain(`${today.count} of 0.200000`);
+    for (const { count, diameter, area } of choices) expect(area).toBeCloseTo(count * discArea(diameter), 12);
+  }
   expect(comparePropellers(stateWith([])).status).toBe('infeasible');
 });
