@@ -4,6 +4,7 @@ import { catalogue } from '../catalogue/catalogue.ts';
 import type { PartEntry } from '../catalogue/schema.ts';
 import { PART_KINDS, type PartKind } from '../craft/schema.ts';
 import { addPart, hasRoom } from '../edit/edits/parts.ts';
+import { firstPlace } from '../report/firstPlace.ts';
 import { thrusterFacts } from '../report/thrusterAs.ts';
 import { formatQuantity } from '../units/format.ts';
 import type { UnitSystem } from '../units/units.ts';
@@ -38,8 +39,8 @@ export function CatalogueDialog({ onClose }: { onClose: () => void }) {
   return (
     <DialogFrame title="Add from the catalogue" onClose={onClose}>
       <p className="aside">
-        Invented, generic parts to start from. Weigh your own and mark them weighed. Each goes below the keel
-        at the CB; drag it where it belongs.
+        Invented, generic parts to start from. Weigh your own and mark them weighed. Each goes where such a
+        part often sits, aft of what is there already; drag it where it belongs.
       </p>
       <div className="toolbar">
         <input
@@ -98,8 +99,14 @@ interface EntryProps {
 function Entry({ entry, units, onAdded }: EntryProps) {
   const { craft, assessment } = useEditor();
   const add = useAdding('part');
-  const { name, kind, mass, massTolerance, note, source } = entry;
+  const { name, kind, mass, massTolerance, size, fin = null, note, source } = entry;
   const doing = doingWords(entry, assessment.rows['air.density']?.value ?? USUAL_DENSITY, units);
+  const placeOf = () => {
+    const { geometry } = assessment;
+    return geometry.status === 'solved'
+      ? firstPlace({ kind, size, fin }, craft, geometry.hull)
+      : defaultPlace(assessment);
+  };
   return (
     <li>
       <div>
@@ -115,7 +122,7 @@ function Entry({ entry, units, onAdded }: EntryProps) {
         aria-label={`Add ${name}`}
         disabled={!hasRoom(craft, 1)}
         onClick={() => {
-          if (add(addPart(partFrom(entry, defaultPlace(assessment))))) onAdded(`Added ${name}.`);
+          if (add(addPart(partFrom(entry, placeOf())))) onAdded(`Added ${name}.`);
         }}
       >
         Add

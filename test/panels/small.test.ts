@@ -25,6 +25,16 @@ test('a search finds entries that hold every word, in any order and case', () =>
   expect(foundParts(catalogue.parts, '', 'battery').every(({ kind }) => kind === 'battery')).toBe(true);
 });
 
+test('where no entry holds every word, those that hold any stand there, best first', () => {
+  const kinds = foundParts(catalogue.parts, 'tail thruster', null).map(({ kind }) => kind);
+  expect(kinds.slice(0, 3)).toEqual(['thruster', 'thruster', 'thruster']);
+  expect(foundParts(catalogue.parts, 'xyzzy', null)).toEqual([]);
+  const noted = foundParts(catalogue.parts, 'battery swollen xyzzy', null);
+  expect(noted[0]!.kind).toBe('battery');
+  const both = noted.filter(({ note }) => note.includes('swollen')).length;
+  expect(noted.slice(0, both).every(({ note }) => note.includes('swollen'))).toBe(true);
+});
+
 test.each([
   ['Atrium camera craft', 'json', 'atrium-camera-craft.json'],
   ['Atrium / camera: 2', 'csv', 'atrium-camera-2.csv'],
@@ -42,7 +52,7 @@ test('a search finds what stands in the note or in the word for the kind', () =>
   expect(names('lithium swollen')).toContain('battery');
   expect(names('light')).toContain('load');
   expect(names('lamp')).toContain('load');
-  expect(names('no such thing')).toEqual([]);
+  expect(names('xyzzy quux')).toEqual([]);
 });
 
 test('rows are alike when every value is', () => {
