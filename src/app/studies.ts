@@ -27,13 +27,25 @@ export class Studies {
   readonly start = (part: string, asked: TurnAsked): void => {
     this.close();
     const { craft } = this.#shown.get();
-    this.state.set({ ...NO_STUDY, part, craft, asked, busy: true });
+    this.#begin({ ...NO_STUDY, part, craft, asked });
+  };
+
+  /** Works out what was left when the study was stopped, for the craft as it was then. */
+  readonly goOn = (): void => {
+    const state = this.state.get();
+    if (!state.busy && !state.complete) this.#begin(state);
+  };
+
+  #begin(state: StudyState): void {
+    const { part, craft, asked, points } = state;
+    if (part === null || !craft || !asked) return;
+    this.state.set({ ...state, busy: true, why: null });
     this.#job.begin(
-      (tell) => this.#client.place({ craft, part, options: { asked } }, tell),
+      (tell) => this.#client.place({ craft, part, options: { asked, done: points } }, tell),
       (answer) => this.#put({ busy: false, ...outcome(answer, this.state.get()) }),
       (progress) => this.#put(progress),
     );
-  };
+  }
 
   readonly stop = (): void => void this.#job.stop();
 

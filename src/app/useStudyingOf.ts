@@ -9,10 +9,10 @@ import { Studies } from './studies.ts';
 export function useStudyingOf(store: Store, client: PlanClient): Studying {
   const [studies] = useState(() => begin(store, client));
   const state = useCell(studies.state);
-  return useMemo(
-    () => ({ ...state, start: studies.start, stop: studies.stop, close: studies.close }),
-    [state, studies],
-  );
+  return useMemo(() => {
+    const { start, goOn, stop, close } = studies;
+    return { ...state, start, goOn, stop, close };
+  }, [state, studies]);
 }
 
 /** On another craft there is no study. */

@@ -2,7 +2,15 @@
 import type { Context } from 'konva/lib/Context.js';
 import { Shape } from 'react-konva/es/ReactKonvaCore.js';
 import type { Palette } from '../scene/palette.ts';
-import { type Band, nameSpot, type PlacePage, type Strip } from '../scene/placePlot.ts';
+import {
+  type Band,
+  CURVES,
+  type Curve,
+  NAME_APART,
+  NAME_LINE,
+  type PlacePage,
+  type Strip,
+} from '../scene/placePlot.ts';
 import type { Rect } from '../scene/rect.ts';
 import type { ScreenPoint } from '../scene/view.ts';
 import { fontOf, shortened, textWidth, traceOnScreen, writeOn } from './paint.ts';
@@ -26,6 +34,7 @@ export function PlaceMarks(props: PlaceMarksProps) {
     <Shape
       sceneFunc={(context) => {
         const { page, palette } = props;
+        for (const band of page.unplanned) dim(context, band, page, palette);
         for (const band of page.struck) hatch(context, band, page, palette);
         if (page.waiting) waiting(context, page.waiting, props);
         today(context, props);
@@ -74,7 +83,7 @@ function drawStrip(context: Context, strip: Strip, props: PlaceMarksProps): void
     if (typeof y === 'number') dot(context, { x: page.stations[index]!, y }, 2.6, palette.good, palette);
   }
   scaleNumbers(context, strip, props);
-  if (!props.read) name(context, strip, props);
+  name(context, strip, props);
 }
 
 function dot(context: Context, { x, y }: ScreenPoint, radius: number, ink: string, { paper }: Palette): void {
@@ -103,18 +112,51 @@ function scaleNumbers(context: Context, { high, low, top, foot, runs }: Strip, p
   if (foot - top > 22) writeOn(context, low, { x, y: foot - 4 }, palette.inkSoft, palette.paper);
 }
 
-/** What it is and which way is better, where the curve leaves room for it. */
+const betterWords = ({ better }: Curve): string => `${better} is better`;
+
+/** Of the names of the curves on two lines, px. */
+export const widestName = (): number =>
+  Math.max(
+    ...CURVES.flatMap((curve) => [curve.name, betterWords(curve)]).map((text) => textWidth(text, SMALL)),
+  );
+
+/** What it is and which way is better, clear of the curve: fore of the nose or above the strip. */
 function name(context: Context, strip: Strip, { page, size, palette }: PlaceMarksProps): void {
-  const room = Math.min(page.right, size.width) - Math.max(page.left, 0) - 12;
-  const { name: what, better } = strip.curve;
-  const whole = strip.runs.length > 0 ? `${what} – ${better} is better` : `${what} – at no station so far`;
-  const text = textWidth(whole, SMALL) < room ? whole : shortened(what, SMALL, room);
-  if (text === null) return;
-  const at = nameSpot(strip, page, size.width, { width: textWidth(text, SMALL), height: 12 });
+  const what = strip.curve.name;
+  const which = strip.runs.length > 0 ? betterWords(strip.curve) : 'at no station';
+  const write = (text: string, x: number, y: number, ink: string) =>
+    writeOn(context, text, { x, y }, ink, palette.paper);
   context.font = SMALL;
   context.textBaseline = 'middle';
+  if (page.names === 'beside') {
+    const x = Math.min(page.left, page.stations[0] ?? page.left) - NAME_APART;
+    const middle = (strip.top + strip.foot) / 2;
+    const two = strip.foot - strip.top >= 2 * NAME_LINE - 2;
+    context.textAlign = 'right';
+    write(what, x, two ? middle - NAME_LINE / 2 : middle, palette.ink);
+    if (two) write(which, x, middle + NAME_LINE / 2, palette.inkSoft);
+    return;
+  }
+  const from = Math.max(page.left, 0) + 4;
+  const room = Math.min(page.right, size.width) - from;
+  const whole = `${what} – ${which}`;
+  const text = textWidth(whole, SMALL) < room ? whole : shortened(what, SMALL, room);
   context.textAlign = 'left';
-  writeOn(context, text, { x: at.left, y: at.top + 6 }, palette.ink, palette.paper);
+  if (text !== null) write(text, from, strip.top - NAME_LINE / 2, palette.ink);
+}
+
+/** Where there is no ballast plan: no curve, but dots. */
+function dim(context: Context, { left, right }: Band, page: PlacePage, palette: Palette): void {
+  dots(context, { left, top: headOf(page), right, bottom: footOf(page) }, palette);
+}
+
+function dots(context: Context, { left, top, right, bottom }: Rect, { inkSoft }: Palette): void {
+  context.save();
+  context.globalAlpha = 0.5;
+  context.fillStyle = inkSoft;
+  for (let y = top + 3; y < bottom; y += 6)
+    for (let x = left + 3; x < right; x += 6) context.fillRect(x - 0.75, y - 0.75, 1.5, 1.5);
+  context.restore();
 }
 
 function hatch(context: Context, { left, right }: Band, page: PlacePage, palette: Palette): void {
@@ -161,7 +203,7 @@ function reading(context: Context, { page, read, palette }: PlaceMarksProps): vo
   context.lineWidth = 1.5;
   across(context, { x, y: headOf(page) - 2 }, { x, y: footOf(page) + 4 });
   const font = fontOf(12, 600);
-  const texts = page.strips.map(({ curve }, i) => `${curve.name} ${read.values[i]}`);
+  const texts = read.values;
   const widest = Math.max(...texts.map((text) => textWidth(text, font)));
   // Not over the numbers of the scales.
   const aft = x + APART_FROM_LINE + widest < numbersFrom(page) || x - APART_FROM_LINE < widest;
@@ -235,6 +277,11 @@ function legend(context: Context, props: HeadProps): void {
   if (page.waiting) {
     entry('not worked out yet', ({ x: left, y }) =>
       shade(context, { left: left - 5, top: y - 5, right: left + 5, bottom: y + 5 }, palette),
+    );
+  }
+  if (page.unplanned.length > 0) {
+    entry('no ballast plan', ({ x: left, y }) =>
+      dots(context, { left: left - 6, top: y - 6, right: left + 6, bottom: y + 6 }, palette),
     );
   }
   if (page.struck.length > 0) {

@@ -1,6 +1,6 @@
 /**
  * A placement study on the station scale of the side view: one strip for each curve, one below the other, each with its name and a
- * scale of its own; bands where the propeller would strike something; where the thruster is today and where it is best. px.
+ * scale of its own; bands where the propeller would strike something or no ballast plan can be made; where the thruster is today and where it is best. px.
  */
 import type { PlacedPoint } from '../report/turning/studies.ts';
 import type { Quantity } from '../units/units.ts';
@@ -82,11 +82,17 @@ export interface PlacePage {
   readonly today: number | null;
   /** Where the propeller would strike. */
   readonly struck: readonly Band[];
+  /** Where there is no ballast plan. */
+  readonly unplanned: readonly Band[];
   /** The stretch not worked out yet. */
   readonly waiting: Band | null;
   readonly left: number;
   readonly right: number;
+  readonly names: NamesAt;
 }
+
+/** Where the names of the curves stand: fore of the nose, or each on a line of its own above its curve. */
+export type NamesAt = 'beside' | 'above';
 
 export interface StripRoom {
   readonly top: number;
@@ -100,6 +106,15 @@ const xOf = ({ scale, originX }: Scale, station: number): number => originX + st
 /** Between strips, so that a curve at the foot of one and at the top of the next stay apart. */
 const GAP = 6;
 
+/** Height of a line of names. */
+export const NAME_LINE = 12;
+/** Between a name and what is beside it. */
+export const NAME_APART = 8;
+
+/** `widest`: of the names. */
+export const namesAt = ({ points }: StudyToDraw, view: Scale, widest: number): NamesAt =>
+  xOf(view, Math.min(0, points[0]?.station ?? 0)) >= widest + 2 * NAME_APART ? 'beside' : 'above';
+
 /** `length`: of the hull, m. */
 export function layPlace(
   { points, today, complete }: StudyToDraw,
@@ -107,24 +122,31 @@ export function layPlace(
   length: number,
   { top, foot }: StripRoom,
   units: UnitSystem,
+  names: NamesAt = 'beside',
 ): PlacePage {
   const stations = points.map(({ station }) => xOf(view, station));
   const high = (foot - top + GAP) / CURVES.length;
-  const strips = CURVES.map((curve, i) =>
-    stripOf(curve, points, today, stations, { top: top + i * high, foot: top + (i + 1) * high - GAP }, units),
-  );
+  const head = names === 'above' ? NAME_LINE : 0;
+  const strips = CURVES.map((curve, i) => {
+    const strip = { top: top + i * high + head, foot: top + (i + 1) * high - GAP };
+    return stripOf(curve, points, today, stations, strip, units);
+  });
   const [left, right] = [xOf(view, 0), xOf(view, length)];
   return {
     strips,
     stations,
     best: points.flatMap(({ best }, i) => (best ? [i] : [])),
     today: today && xOf(view, today.station),
-    struck: struckBands(points, stations),
+    struck: bandsOf(points, stations, ({ strikes }) => strikes),
+    unplanned: bandsOf(points, stations, withoutPlan),
     waiting: complete ? null : { left: stations.at(-1) ?? left, right },
     left,
     right,
+    names,
   };
 }
+
+const withoutPlan = ({ ballast }: StudySpot): boolean => ballast === null;
 
 function stripOf(
   curve: Curve,
@@ -134,7 +156,8 @@ function stripOf(
   { top, foot }: StripRoom,
   units: UnitSystem,
 ): Strip {
-  const values = points.map(curve.value);
+  // Without a plan the figures are of another craft: that of today.
+  const values = points.map((point) => (withoutPlan(point) ? null : curve.value(point)));
   const now = today && curve.value(today);
   const known = [...values, now].filter((value) => value !== null);
   const most = (curve.cap ?? Number.POSITIVE_INFINITY) * Math.min(...known);
@@ -170,45 +193,19 @@ function runsOf(stations: readonly number[], heights: readonly (number | null)[]
 }
 
 /** Each station stands for the stretch half-way to its neighbours. */
-function struckBands(points: readonly StudySpot[], stations: readonly number[]): Band[] {
+function bandsOf(
+  points: readonly StudySpot[],
+  stations: readonly number[],
+  isIn: (spot: StudySpot) => boolean,
+): Band[] {
   const bands: { left: number; right: number }[] = [];
-  points.forEach(({ strikes }, i) => {
-    if (!strikes) return;
+  points.forEach((point, i) => {
+    if (!isIn(point)) return;
     const x = stations[i]!;
     const [before, after] = [stations[i - 1] ?? x, stations[i + 1] ?? x];
     const last = bands.at(-1);
-    if (last && points[i - 1]!.strikes) last.right = (x + after) / 2;
+    if (last && isIn(points[i - 1]!)) last.right = (x + after) / 2;
     else bands.push({ left: (before + x) / 2, right: (x + after) / 2 });
   });
   return bands;
-}
-
-interface Extent {
-  readonly width: number;
-  readonly height: number;
-}
-
-/** Where in its strip a name hides least of the curve: at either end or in the middle, above or below. */
-export function nameSpot(
-  { heights, top, foot }: Strip,
-  { stations, left, right }: PlacePage,
-  pane: number,
-  { width, height }: Extent,
-): { readonly left: number; readonly top: number } {
-  const [from, to] = [Math.max(left, 0) + 4, Math.min(right, pane) - 4 - width];
-  const spots = [from, to, (from + to) / 2].flatMap((x) =>
-    [top, foot - height].map((y) => ({ left: x, top: y })),
-  );
-  const hidden = (spot: { left: number; top: number }): number =>
-    heights.filter((y, i) => {
-      const x = stations[i]!;
-      return (
-        y !== null &&
-        x > spot.left - 4 &&
-        x < spot.left + width + 4 &&
-        y > spot.top - 3 &&
-        y < spot.top + height + 3
-      );
-    }).length;
-  return spots.reduce((best, spot) => (hidden(spot) < hidden(best) ? spot : best));
 }

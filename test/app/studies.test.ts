@@ -82,6 +82,30 @@ test('stopped half-way it keeps the stations it has told of', async () => {
   expect(today).toMatchObject({ station: 4.2 });
 });
 
+test('a stopped one goes on with the stations that were left, for the craft it was begun for', async () => {
+  const { session, studies } = onPage();
+  const watching = studies.state.subscribe(() => {
+    if (studies.state.get().share > 0.4) studies.stop();
+  });
+  studies.start('thruster', ASKED);
+  await idle(studies);
+  watching();
+  const { craft, points: before, share } = studies.state.get();
+  session.apply(setName('Changed'));
+  const shares: number[] = [];
+  studies.state.subscribe(() => shares.push(studies.state.get().share));
+  studies.goOn();
+  expect(studies.state.get()).toMatchObject({ busy: true, why: null, points: before });
+  await idle(studies);
+  expect(Math.min(...shares)).toBe(share);
+  expect(studies.state.get()).toMatchObject({ complete: true, share: 1, why: null });
+  expect(studies.state.get().craft).toBe(craft);
+  const stations = studies.state.get().points.map(({ station }) => station);
+  expect(stations).toHaveLength(61);
+  expect(stations).toEqual(stations.toSorted((a, b) => a - b));
+  expect(stations.slice(0, before.length)).toEqual(before.map(({ station }) => station));
+});
+
 test('stopped before anything was told there is nothing; begun again it is worked out afresh', async () => {
   const { studies } = onPage();
   studies.start('thruster', ASKED);

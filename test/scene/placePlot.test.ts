@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { expect, test } from 'vitest';
-import { CURVES, layPlace, nameSpot, type StudySpot } from '../../src/scene/placePlot.ts';
+import { CURVES, layPlace, NAME_LINE, namesAt, type StudySpot } from '../../src/scene/placePlot.ts';
 import {
   besideWords,
   curveWords,
@@ -123,26 +123,22 @@ test('without a value a scale has no numbers', () => {
   expect(scaleOf([], 'time', 'metric').labels).toEqual({ low: '', high: 's' });
 });
 
-test('the name of a curve stands where the curve is not', () => {
-  const steps = Array.from({ length: 41 }, (_, i) => i / 10);
-  const width = 120;
-  for (const ballast of [
-    (x: number) => x / 10,
-    (x: number) => 0.4 - x / 10,
-    (x: number) => (x - 2) ** 2 / 10,
-  ]) {
-    const points = steps.map((x) => spot(x, { ballast: ballast(x) }));
-    const tall = layPlace({ ...study, points }, view, 4, { top: 20, foot: 240 }, 'metric');
-    const [strip] = tall.strips;
-    const at = nameSpot(strip!, tall, 500, { width, height: 12 });
-    const under = strip!.heights.filter((y, i) => {
-      const x = tall.stations[i]!;
-      return x >= at.left && x <= at.left + width && y! >= at.top && y! <= at.top + 12;
-    });
-    expect(under).toEqual([]);
-    expect(at.left).toBeGreaterThanOrEqual(tall.left);
-    expect(at.left + width).toBeLessThanOrEqual(tall.right);
-  }
+test('names stand fore of the nose and of every station where there is room, else above each curve', () => {
+  expect(namesAt(study, { scale: 100, originX: 120 }, 90)).toBe('beside');
+  expect(namesAt(study, { scale: 100, originX: 90 }, 90)).toBe('above');
+  const ahead = { ...study, points: [spot(-0.5), ...points] };
+  expect(namesAt(ahead, { scale: 100, originX: 120 }, 90)).toBe('above');
+  const above = layPlace(study, view, 4, room, 'metric', 'above');
+  above.strips.forEach(({ top, heights }, i) => {
+    expect(top - NAME_LINE).toBeGreaterThanOrEqual(above.strips[i - 1]?.foot ?? room.top);
+    for (const y of heights) if (y !== null) expect(y).toBeGreaterThanOrEqual(top);
+  });
+});
+
+test('without a ballast plan every curve breaks, and a band of its own says so', () => {
+  expect(page.unplanned).toEqual([{ left: 200, right: 300 }]);
+  for (const { heights } of page.strips) expect(heights[2]).toBeNull();
+  expect(layPlace({ ...study, points: [spot(1)] }, view, 4, room, 'metric').unplanned).toEqual([]);
 });
 
 test('a station in words: every figure, why there is none, and what the propeller strikes', () => {

@@ -1,12 +1,11 @@
 /** The stations that nothing beats. One that is picked can be moved to; one that is pointed at is marked in the drawing. */
 import { useState } from 'react';
-import { moveAndHang, moveThruster } from '../../edit/edits/moveThruster.ts';
-import { placed } from '../../edit/place.ts';
+import { bestOfRuns } from '../../report/turning/placeRuns.ts';
 import type { PlacedPoint } from '../../report/turning/studies.ts';
 import { formatNumber } from '../../units/format.ts';
-import { inUnits } from '../../units/sentence.ts';
 import { type Quantity, type UnitSystem, unitOf } from '../../units/units.ts';
 import { useEditor } from '../editor.ts';
+import { StudyActions } from './StudyActions.tsx';
 import { useStudying } from './studying.ts';
 import { useTurning } from './turning.ts';
 
@@ -29,19 +28,27 @@ const COLUMNS: readonly Column[] = [
   { head: 'Pitch', quantity: 'angle', value: ({ cruisePitch }) => cruisePitch },
 ];
 
+/** The row of the place the thruster had when the study began. */
+export const TODAY = 'today' as const;
+
+/** A station, or the place of today. */
+type Row = number | typeof TODAY;
+
 interface StudyTableProps {
   readonly fresh: boolean;
-  /** The station that the sentence above tells of, open until another is picked. */
-  readonly told: number | null;
+  /** The row that the sentence above tells of, open until another is picked. */
+  readonly told: Row | null;
+  /** Whether the thruster has been moved since. */
+  readonly moved: boolean;
 }
 
-export function StudyTable({ fresh, told }: StudyTableProps) {
-  const { units } = useEditor();
-  const { points, today, busy } = useStudying();
-  const [chosen, setPicked] = useState<number | null | undefined>(undefined);
+export function StudyTable({ fresh, told, moved }: StudyTableProps) {
+  const { points, today, busy, complete } = useStudying();
+  const [chosen, setPicked] = useState<Row | null | undefined>(undefined);
+  if (!today) return null;
   const picked = chosen === undefined ? told : chosen;
-  const best = points.filter((point) => point.best);
-  if (best.length === 0) {
+  const best = bestOfRuns({ points, today }, typeof told === 'number' ? told : null);
+  if (best.length === 0 && !today.best) {
     return (
       <p>
         {busy
@@ -50,37 +57,25 @@ export function StudyTable({ fresh, told }: StudyTableProps) {
       </p>
     );
   }
+  const row = (key: Row) => ({
+    fresh,
+    open: key === picked,
+    onPick: () => setPicked(key === picked ? null : key),
+  });
+  const unheld = [today, ...best].some(({ cruisePitch }) => cruisePitch === null);
   return (
     <div className="plan-scroll">
       <table className="study-table">
-        <caption>Nothing beats these{busy && ' so far'}</caption>
-        <thead>
-          <tr>
-            <th scope="col">
-              Station <small>{unitOf('length', units).symbol}</small>
-            </th>
-            {COLUMNS.map(({ head, quantity }) => (
-              <th scope="col" key={head}>
-                {head} <small>{unitOf(quantity, units).symbol}</small>
-              </th>
-            ))}
-          </tr>
-        </thead>
+        <caption>
+          Nothing beats these{!complete && ' so far'}
+          {!today.best && `, against ${moved ? 'before' : 'today'}`}
+          {unheld && `; – under Pitch: ${NO_PITCH}`}
+        </caption>
+        <Head />
         <tbody>
-          {today && (
-            <tr>
-              <th scope="row">today</th>
-              <Figures point={today} />
-            </tr>
-          )}
+          <StudyRow point={today} name={moved ? 'before' : TODAY} {...row(TODAY)} />
           {best.map((point) => (
-            <StudyRow
-              key={point.station}
-              point={point}
-              open={point.station === picked}
-              fresh={fresh}
-              onPick={() => setPicked(point.station === picked ? null : point.station)}
-            />
+            <StudyRow key={point.station} point={point} name={null} {...row(point.station)} />
           ))}
         </tbody>
       </table>
@@ -88,14 +83,36 @@ export function StudyTable({ fresh, told }: StudyTableProps) {
   );
 }
 
+const NO_PITCH = 'no attitude is held';
+
+function Head() {
+  const { units } = useEditor();
+  return (
+    <thead>
+      <tr>
+        <th scope="col">
+          Station <small>{unitOf('length', units).symbol}</small>
+        </th>
+        {COLUMNS.map(({ head, quantity }) => (
+          <th scope="col" key={head}>
+            {head} <small>{unitOf(quantity, units).symbol}</small>
+          </th>
+        ))}
+      </tr>
+    </thead>
+  );
+}
+
 interface StudyRowProps {
   readonly point: PlacedPoint;
+  /** Instead of the station, where it is not one of those tried. */
+  readonly name: string | null;
   readonly open: boolean;
   readonly fresh: boolean;
   onPick(): void;
 }
 
-function StudyRow({ point, open, fresh, onPick }: StudyRowProps) {
+function StudyRow({ point, name, open, fresh, onPick }: StudyRowProps) {
   const { units } = useEditor();
   const { set } = useTurning();
   const mark = () => set({ marked: point.station });
@@ -103,7 +120,7 @@ function StudyRow({ point, open, fresh, onPick }: StudyRowProps) {
   const at = bare(point.station, 'length', units);
   return (
     <>
-      <tr data-station={point.station} onPointerEnter={mark} onPointerLeave={unmark}>
+      <tr data-station={name ?? point.station} onPointerEnter={mark} onPointerLeave={unmark}>
         <th scope="row">
           <button
             type="button"
@@ -113,7 +130,7 @@ function StudyRow({ point, open, fresh, onPick }: StudyRowProps) {
             onFocus={mark}
             onBlur={unmark}
           >
-            {at}
+            {name ?? at}
           </button>
         </th>
         <Figures point={point} />
@@ -121,7 +138,7 @@ function StudyRow({ point, open, fresh, onPick }: StudyRowProps) {
       {open && (
         <tr className="kept-actions" onPointerEnter={mark} onPointerLeave={unmark}>
           <td colSpan={COLUMNS.length + 1}>
-            <Actions point={point} at={at} fresh={fresh} />
+            <StudyActions point={point} at={at} fresh={fresh} />
           </td>
         </tr>
       )}
@@ -134,7 +151,11 @@ function Figures({ point }: { point: PlacedPoint }) {
   return COLUMNS.map(({ head, quantity, value }) => {
     const figure = value(point);
     return (
-      <td className="number" key={head}>
+      <td
+        className="number"
+        key={head}
+        title={figure === null && head === 'Pitch' ? `In cruise ${NO_PITCH}.` : undefined}
+      >
         {figure === null ? '–' : bare(figure, quantity, units)}
       </td>
     );
@@ -146,47 +167,3 @@ const bare = (si: number, quantity: Quantity, units: UnitSystem): string => {
   const unit = unitOf(quantity, units);
   return formatNumber(unit.toDisplay(si), unit.digits);
 };
-
-function Actions({ point, at, fresh }: { point: PlacedPoint; at: string; fresh: boolean }) {
-  const { craft, units, apply, dragging } = useEditor();
-  const { part } = useStudying();
-  const thruster = craft.parts.byId[part ?? ''];
-  if (!thruster) return null;
-  if (thruster.locked)
-    return <p className="aside">{thruster.name || 'It'} is locked. Unlock it to move it.</p>;
-  const { stowage } = point;
-  const ready = fresh && !dragging;
-  const here = placed(thruster.place, point.place) === thruster.place;
-  return (
-    <>
-      {point.cautions.map((caution) => (
-        <p className="row-why" key={caution}>
-          {inUnits(caution, units)}
-        </p>
-      ))}
-      <span className="plan-actions">
-        {here ? (
-          <span className="aside">It is there now.</span>
-        ) : (
-          <button
-            type="button"
-            aria-disabled={!ready}
-            onClick={() => ready && apply(moveThruster(thruster, point.place))}
-          >
-            Move it there<span className="spoken">, to {at}</span>
-          </button>
-        )}
-        {stowage && (
-          <button
-            type="button"
-            aria-disabled={!ready}
-            onClick={() => ready && apply(moveAndHang(thruster, point.place, stowage))}
-          >
-            {here ? 'Hang the ballast' : 'Move it, hang the ballast'}
-            <span className="spoken">, at {at}</span>
-          </button>
-        )}
-      </span>
-    </>
-  );
-}

@@ -1,6 +1,7 @@
 /** What the study is of, and whether it still holds: it tried the thruster everywhere, so where that one sits makes no difference. */
 import type { Craft } from '../../craft/craft.ts';
 import type { Place } from '../../craft/placeSchema.ts';
+import type { Part } from '../../craft/schema.ts';
 import type { PlacedPoint } from '../../report/turning/studies.ts';
 import { askedOf } from './asked.ts';
 import type { StudyState } from './studying.ts';
@@ -35,6 +36,10 @@ export function pointNow({ part, points, today }: StudyState, now: Craft): Place
   const tried = today ? [today, ...points] : points;
   return (place && tried.find((point) => samePlace(point.place, place))) ?? null;
 }
+
+/** Whether a part sits where the point has it. */
+export const isThere = (point: PlacedPoint | null, part: Part | undefined): boolean =>
+  point !== null && part !== undefined && samePlace(point.place, part.place);
 
 /** m, rad: edits round to the nanometre. */
 const NEAR = 1e-8;

@@ -25,6 +25,8 @@ export interface StudyState {
 
 export interface Studying extends StudyState {
   start(part: string, asked: TurnAsked): void;
+  /** Takes a stopped one up again: only what was not worked out yet. */
+  goOn(): void;
   /** What was worked out so far stays. */
   stop(): void;
   /** Puts the study away. */

@@ -2,6 +2,7 @@ import { createElement } from 'react';
 import { renderToStaticMarkup } from 'react-dom/server';
 import { expect, test } from 'vitest';
 import type { Craft } from '../../../src/craft/craft.ts';
+import type { Place } from '../../../src/craft/placeSchema.ts';
 import { loadHighs } from '../../../src/numeric/linearProgram/highsSolver.ts';
 import { EditorContext } from '../../../src/panels/editor.ts';
 import { askedOf, steeringPart } from '../../../src/panels/turn/asked.ts';
@@ -13,6 +14,9 @@ import { FIRST_TURNING, TurningContext, type TurningState } from '../../../src/p
 import { placementStudy } from '../../../src/physics/placing/study.ts';
 import { HAZARDS } from '../../../src/report/hazards.ts';
 import { placeReport } from '../../../src/report/turning/placeReport.ts';
+import { bestOfRuns } from '../../../src/report/turning/placeRuns.ts';
+import { stowageSteps } from '../../../src/report/turning/placeSteps.ts';
+import { toldPlace } from '../../../src/report/turning/placeWords.ts';
 import { turnFigures, turnReport } from '../../../src/report/turning/turnReport.ts';
 import { formatQuantity } from '../../../src/units/format.ts';
 import type { UnitSystem } from '../../../src/units/units.ts';
@@ -42,7 +46,7 @@ function panel(
     subject,
   };
   const sheet = createElement(TurnSheet, { now, player: () => 'the path', onTargets: nothing });
-  const study = { ...NO_STUDY, start: nothing, stop: nothing, close: nothing, ...studying };
+  const study = { ...NO_STUDY, start: nothing, goOn: nothing, stop: nothing, close: nothing, ...studying };
   return renderToStaticMarkup(
     createElement(
       EditorContext,
@@ -60,11 +64,22 @@ const museum = sampleCraft('museum-atrium');
 const [thruster] = museum.parts.order.filter((id) => museum.parts.byId[id]!.thruster);
 const asked = askedOf(museum, FIRST_TURNING);
 const report = turnReport(museum, asked, 'metric');
-const outcome = placementStudy(museum, thruster!, await loadHighs(), { stations: 9, asked });
-if (outcome.status !== 'solved') throw new Error(outcome.why);
-const study = outcome.value;
-const studying = { ...NO_STUDY, ...study, craft: museum, asked, share: 1 };
+const solver = await loadHighs();
+function studyOf(craft: Craft) {
+  const outcome = placementStudy(craft, thruster!, solver, { stations: 9, asked });
+  if (outcome.status !== 'solved') throw new Error(outcome.why);
+  return { ...NO_STUDY, ...outcome.value, craft, asked, share: 1 };
+}
+const studying = studyOf(museum);
 const studied = panel(museum, { studying });
+/** The same with its thruster below the keel, where it turns slowly: another place is told of. */
+const slow = withThrusterAt({ kind: 'keel', station: 2.6, drop: 0.3 });
+const slowStudying = studyOf(slow);
+const slowStudied = panel(slow, { studying: slowStudying });
+function withThrusterAt(place: Place): Craft {
+  const moved = { ...museum.parts.byId[thruster!]!, place };
+  return { ...museum, parts: { ...museum.parts, byId: { ...museum.parts.byId, [moved.id]: moved } } };
+}
 const unthrust = sampleCraft('two-sheet-advert');
 
 test.each([
@@ -132,25 +147,63 @@ test('while a plan is worked out every figure is shown as old, and a line says s
   expect(seen(panel(museum))).toContain('Of the craft As it is With the ballast plan');
 });
 
-test('a study is told in the words of the report; each station that nothing beats has its row', () => {
-  const text = seen(studied);
-  expect(text).toContain(placeReport(museum, study, 'metric').headline);
-  const rows = [...studied.matchAll(/data-station="([\d.-]+)"/g)].map(([, station]) => Number(station));
-  expect(rows).toEqual(study.points.filter(({ best }) => best).map(({ station }) => station));
-  expect(rows.length).toBeGreaterThan(0);
-  expect(text).toContain('Close the study');
+const rowsOf = (markup: string) => [...markup.matchAll(/data-station="([\w.-]+)"/g)].map(([, row]) => row);
+
+test('a study is told in the words of the report; today has its row, and each best of a run', () => {
+  for (const [craft, study, markup] of [
+    [museum, studying, studied],
+    [slow, slowStudying, slowStudied],
+  ] as const) {
+    const text = seen(markup);
+    expect(text).toContain(placeReport(craft, study, 'metric').headline);
+    const told = toldPlace(study, craft.targets)!.station;
+    const best = bestOfRuns(study, told).map(({ station }) => String(station));
+    expect(rowsOf(markup)).toEqual(['today', ...best]);
+    expect(text).toContain('Close the study');
+    expect(text).not.toContain('so far');
+  }
+  expect(rowsOf(slowStudied).length).toBeGreaterThan(1);
+});
+
+test('where it is the best already its own row is open, and there is nothing to move', () => {
+  expect(seen(studied)).toContain('It is there now.');
+  expect(studied).not.toContain('Move it there');
+});
+
+test('before the ballast is hung it stands there what would change', () => {
+  const { stowage } = toldPlace(slowStudying, slow.targets)!;
+  const steps = stowageSteps(slow, stowage!, 'metric');
+  expect(steps.length).toBeGreaterThan(0);
+  for (const step of steps) expect(seen(slowStudied)).toContain(step);
+});
+
+test('once the thruster has been moved, the place of today is that of before', () => {
+  const text = seen(
+    panel(withThrusterAt({ kind: 'keel', station: 2.4, drop: 0.3 }), { studying: slowStudying }),
+  );
+  expect(text).toContain('where it was');
+  expect(text).not.toContain('where it is now');
+  expect(text).toContain('before');
+});
+
+test('a stopped study is of the stations so far, and can go on', () => {
+  const text = seen(panel(slow, { studying: { ...slowStudying, complete: false } }));
+  for (const each of ['So far:', 'Nothing beats these so far', 'Go on', 'Try every station again']) {
+    expect(text).toContain(each);
+  }
+  expect(seen(slowStudied)).not.toContain('Go on');
 });
 
 test('a study of another craft or throttle says so, and moves nothing', () => {
   for (const look of [
-    { studying: { ...studying, craft: { ...museum, name: 'Before' } } },
-    { studying, turning: { throttle: 0.5 } },
+    { studying: { ...slowStudying, craft: { ...slow, name: 'Before' } } },
+    { studying: slowStudying, turning: { throttle: 0.5 } },
   ]) {
-    const markup = panel(museum, look);
+    const markup = panel(slow, look);
     expect(seen(markup)).toContain('Worked out before the last change: try every station again.');
     expect(markup).toMatch(/aria-disabled="true"[^>]*>Move it there/);
   }
-  expect(studied).toMatch(/aria-disabled="false"[^>]*>Move it there/);
+  expect(slowStudied).toMatch(/aria-disabled="false"[^>]*>Move it there/);
 });
 
 test('of several thrusters one is chosen to be tried, and the study names the one it is of', () => {
