@@ -46,6 +46,7 @@ const OPTIONS = {
   throttle: { type: 'string' },
   speed: { type: 'string' },
   planned: { type: 'boolean' },
+  all: { type: 'boolean' },
   part: { type: 'string' },
   stations: { type: 'string' },
   csv: { type: 'boolean' },
@@ -73,7 +74,7 @@ const TAKEN: Readonly<Record<string, readonly string[]>> = {
   check: [],
   plan: ['json', 'units', 'robust', 'write', 'time-limit'],
   carry: ['json', 'units', 'line'],
-  turn: ['json', 'units', 'vector', 'throttle', 'speed', 'planned'],
+  turn: ['json', 'units', 'vector', 'throttle', 'speed', 'planned', 'all'],
   place: ['json', 'csv', 'units', 'part', 'stations', 'throttle'],
 };
 

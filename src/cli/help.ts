@@ -13,14 +13,14 @@ export const HELP = `Steelyard: the balance of a small unmanned blimp.
   npm run -s craft -- carry FILE [--line keel|axis|HARDPOINT] [--json]
       The most useful load at each station of a line, the rest planned anew.
   npm run -s craft -- turn FILE [--vector DEG] [--throttle F] [--speed M/S]
-                      [--planned] [--json] [--units metric|imperial]
+                      [--planned] [--all | --json] [--units metric|imperial]
       How it turns, flies and climbs by its thrusters: arm and yaw moment, time
       to yaw 90°, radius, side gust held, top speed, pitch under way.
       --vector: thrust turned in yaw by so many degrees, + to starboard, instead
       of as hard to starboard as it goes; --throttle: share of full thrust, 0 to
       1; --speed: of the cruise it turns from, in m/s; --planned: of the craft
-      with its ballast plan carried out.
-  npm run -s craft -- place FILE --part THRUSTER [--stations N] [--throttle F]
+      with its ballast plan carried out; --all: every figure there is.
+  npm run -s craft -- place FILE --part ID|NAME [--stations N] [--throttle F]
                       [--json | --csv] [--units metric|imperial]
       Where that thruster had better sit: moved through N stations (61) from
       nose to tail, the ballast planned anew at each, what it then does, what

@@ -22,10 +22,10 @@ export async function placed(asked: Asked, io: Io): Promise<ExitCode> {
   const read = readCraft(asked.file, units, io);
   if (!read) return EXIT.bad;
   const { craft } = read;
-  const trouble = partTrouble(craft, part);
-  if (trouble || part === null) return told(trouble, io);
+  const id = partOf(craft, part);
+  if (id === null) return told(partTrouble(craft, part), io);
   const flown = { throttle, vector: null, speed: null };
-  const study = placementStudy(craft, part, await io.solver(), { stations, asked: flown });
+  const study = placementStudy(craft, id, await io.solver(), { stations, asked: flown });
   if (study.status === 'infeasible') return told(`${study.why} ${study.remedy}`, io);
   io.write(textOf(craft, study.value, asked));
   const { points, today } = study.value;
@@ -37,13 +37,21 @@ function told(trouble: string, io: Io): ExitCode {
   return EXIT.bad;
 }
 
-/** Empty when the part has thrust figures. */
+/** The thruster of that id; else of that name, capitals aside, when only one has it; null when there is none or more. */
+function partOf(craft: Craft, typed: string | null): string | null {
+  if (typed === null) return null;
+  const able = thrusterParts(craft);
+  if (able.some(({ id }) => id === typed)) return typed;
+  const alike = able.filter(({ name }) => name.toLowerCase() === typed.toLowerCase());
+  return alike.length === 1 ? alike[0]!.id : null;
+}
+
 function partTrouble(craft: Craft, part: string | null): string {
   const able = thrusterParts(craft);
-  if (able.some(({ id }) => id === part)) return '';
   const found = part === null ? 'none' : JSON.stringify(part);
   if (able.length === 0) return `--part: found ${found}; but no part of this craft has thrust figures`;
-  return `--part: found ${found}; allowed: ${able.map(({ id }) => id).join(', ')}`;
+  const words = able.map(({ id, name }) => (name ? `${id} (${name})` : id));
+  return `--part: found ${found}; allowed: ${words.join(', ')}`;
 }
 
 function textOf(craft: Craft, study: PlacementStudy, { json, csv, units }: Asked): string {

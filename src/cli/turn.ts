@@ -2,24 +2,17 @@
 import { type Craft, listed } from '../craft/craft.ts';
 import type { Vectoring } from '../craft/thrustSchema.ts';
 import { type PlanFound, planOf } from '../physics/ballast/plan.ts';
-import { hazardsOf } from '../report/hazards.ts';
 import { planReport } from '../report/planReport.ts';
 import { plannedWords } from '../report/planWords.ts';
-import type { Rows } from '../report/rows.ts';
-import { rowText } from '../report/rowText.ts';
-import type { PropellerLine } from '../report/turning/propellers.ts';
-import { TETHER } from '../report/turning/turnCautions.ts';
-import { type TurnReport, turnReport } from '../report/turning/turnReport.ts';
-import type { TurnVerdict } from '../report/turning/turnVerdicts.ts';
+import { turnReport } from '../report/turning/turnReport.ts';
 import { formatQuantity } from '../units/format.ts';
 import { inUnits } from '../units/sentence.ts';
-import type { UnitSystem } from '../units/units.ts';
 import type { Command } from './args.ts';
 import { rowsJson } from './balance.ts';
-import { figures } from './figures.ts';
 import { EXIT, type ExitCode, type Io } from './io.ts';
-import { left, oneLine, right, wrapped } from './layout.ts';
+import { oneLine, wrapped } from './layout.ts';
 import { readCraft } from './readCraft.ts';
+import { turnText } from './turnText.ts';
 
 type Asked = Extract<Command, { kind: 'turn' }>;
 
@@ -52,7 +45,7 @@ function told(craft: Craft, plan: PlanFound | null, asked: Asked, io: Io): ExitC
   const { json, units } = asked;
   const report = turnReport(plan?.craft ?? craft, asked, units);
   const first = plan ? wrapped(inUnits(plannedWords(craft, plan), units)) : [];
-  io.write(json ? rowsJson(report.rows, plan ? planHead(plan) : {}) : turnText(craft, first, report, units));
+  io.write(json ? rowsJson(report.rows, plan ? planHead(plan) : {}) : turnText(craft, first, report, asked));
   return report.turn && report.met ? EXIT.fine : EXIT.misses;
 }
 
@@ -78,52 +71,3 @@ const DUST = 1e-9;
 const turns = ({ least, most, slew }: Vectoring): boolean => most > least && slew > 0;
 
 const degrees = (angle: number): string => formatQuantity(angle, 'angle', 'metric');
-
-function turnText(craft: Craft, first: readonly string[], report: TurnReport, units: UnitSystem): string {
-  const { headline, costWords, verdicts, rows, notes, propellers, cautions } = report;
-  const lines = [
-    ...wrapped(craft.name || 'Craft without a name'),
-    ...first,
-    ...wrapped([headline, ...costWords].join(' ')),
-    '',
-    ...(verdicts.length > 0 ? ['Verdicts', ...verdicts.flatMap(verdictLines), ''] : []),
-    ...figures(report.turn ? rows : withValues(rows), units),
-    ...propellerTable(propellers, units),
-    ...(notes.length > 0 ? ['Notes', ...notes.flatMap(bullet), ''] : []),
-    'Cautions',
-    ...[...cautions, ...hazardsOf(craft), TETHER].flatMap(bullet),
-  ];
-  return `${lines.join('\n')}\n`;
-}
-
-/** Without thrust the headline says why most figures are missing: only what there is is told. */
-const withValues = (rows: Rows): Rows =>
-  Object.fromEntries(Object.entries(rows).filter(([, { value }]) => value !== null));
-
-function verdictLines({ need, ...verdict }: TurnVerdict): string[] {
-  const { state, title, word, figure, target, marginWords } = verdict;
-  const cells = [left(state, 8), `${left(title, 19)} `, left(word, 20), figure];
-  const by = marginWords && `: ${marginWords}`;
-  return [
-    oneLine(`  ${cells.join('')}`).trimEnd(),
-    ...wrapped(`wanted ${target}${by}`, 10),
-    ...need.flatMap((each) => wrapped(each, 10)),
-  ];
-}
-
-function propellerTable(lines: readonly PropellerLine[], units: UnitSystem): string[] {
-  if (lines.length === 0) return [];
-  const row = (name: string, ...cells: readonly string[]) =>
-    oneLine(`  ${left(name, 26)}${cells.map((cell) => right(cell, 12)).join('')}`).trimEnd();
-  return [
-    'Propellers: ideal power for the same thrust, and that over today’s',
-    row('', 'at rest', 'over', 'at top', 'over'),
-    ...lines.map(({ name, atRest, atRestOverToday, atTop, atTopOverToday }) =>
-      row(name, ...[atRest, atRestOverToday, atTop, atTopOverToday].map((each) => rowText(each, units))),
-    ),
-    '',
-  ];
-}
-
-const bullet = (sentence: string): string[] =>
-  wrapped(sentence, 4).map((line, i) => (i === 0 ? `  - ${line.slice(4)}` : line));

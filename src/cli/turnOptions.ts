@@ -9,6 +9,8 @@ export interface TurnOptions {
   readonly speed: number | null;
   /** Of the craft with its ballast plan carried out. */
   readonly planned: boolean;
+  /** Every figure, to read; JSON has them always. */
+  readonly all: boolean;
 }
 
 interface Typed {
@@ -16,12 +18,19 @@ interface Typed {
   readonly throttle?: string;
   readonly speed?: string;
   readonly planned?: boolean;
+  readonly all?: boolean;
 }
 
 const DEGREE = Math.PI / 180;
 const MOST_SPEED = 50;
 
-export function turnOptions({ vector, throttle = '1', speed, planned = false }: Typed): TurnOptions | string {
+export function turnOptions({
+  vector,
+  throttle = '1',
+  speed,
+  planned = false,
+  all = false,
+}: Typed): TurnOptions | string {
   const share = numberOf(throttle);
   if (!(share > 0 && share <= 1)) return wrong('throttle', throttle, 'a share above 0 and up to 1');
   const degrees = numberOf(vector ?? '0');
@@ -33,6 +42,7 @@ export function turnOptions({ vector, throttle = '1', speed, planned = false }: 
     vector: vector === undefined ? null : degrees * DEGREE,
     speed: speed === undefined ? null : cruise,
     planned,
+    all,
   };
 }
 

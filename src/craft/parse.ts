@@ -1,5 +1,5 @@
 /** The one loading gate: text becomes a craft, or a list of problems. Nothing is loaded in part. */
-import type { z } from 'zod';
+import { z } from 'zod';
 import { type Craft, craftOf } from './craft.ts';
 import { foundText, type Problem, pathText } from './problem.ts';
 import { referenceProblems } from './references.ts';
@@ -41,7 +41,7 @@ export function parseJson(json: unknown): Parsed {
       ok: false,
       problems: limited(
         named(
-          checked.error.issues.flatMap((issue) => problemsOf(issue, stepped.file)),
+          checked.error.issues.flatMap((issue) => problemsOf(issue, stepped.file).map(orNull(issue.path))),
           stepped.file,
         ),
       ),
@@ -91,6 +91,21 @@ export function problemsOf(issue: z.core.$ZodIssue, file: unknown): Problem[] {
     default:
       return [{ path, found, allowed: allowedText(issue) }];
   }
+}
+
+/** Where a field may be null that is said too: a thruster of which nothing is known has `null`, not nothing. */
+const orNull =
+  (path: readonly PropertyKey[]) =>
+  (problem: Problem): Problem =>
+    schemaAt(path) instanceof z.ZodNullable
+      ? { ...problem, allowed: `${problem.allowed}, or null` }
+      : problem;
+
+function schemaAt(path: readonly PropertyKey[]): unknown {
+  return path.reduce<unknown>((at, key) => {
+    if (at instanceof z.ZodArray) return at.element;
+    return at instanceof z.ZodObject ? at.shape[key as string] : undefined;
+  }, craftFileSchema);
 }
 
 function valueAt(file: unknown, path: readonly PropertyKey[]): unknown {

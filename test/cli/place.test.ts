@@ -1,5 +1,6 @@
 import { expect, test } from 'vitest';
 import { commandOf } from '../../src/cli/args.ts';
+import { keyed, listed } from '../../src/craft/craft.ts';
 import { serialize } from '../../src/craft/serialize.ts';
 import { placingCraft, studyOf } from '../physics/placing/placingCrafts.ts';
 import { heard, heardLater } from './terminal.ts';
@@ -76,11 +77,22 @@ test('61 stations unless told otherwise', () => {
 });
 
 test.each([
-  [['--part', 'battery'], '--part: found "battery"; allowed: thruster'],
-  [['--part', '__proto__'], '--part: found "__proto__"; allowed: thruster'],
-  [[], '--part: found none; allowed: thruster'],
+  [['--part', 'battery'], '--part: found "battery"; allowed: thruster (Tail motor)'],
+  [['--part', '__proto__'], '--part: found "__proto__"; allowed: thruster (Tail motor)'],
+  [[], '--part: found none; allowed: thruster (Tail motor)'],
 ])('%j is exit 2 with the thrusters there are', async (options, said) => {
   expect(await place(...options)).toEqual({ code: 2, out: '', errors: [said] });
+});
+
+test('a part goes by its name too, capitals aside, when no other has it', async () => {
+  const named = await place('--part', 'tail MOTOR', '--stations', '3');
+  expect(named).toMatchObject({ code: 0, errors: [] });
+  expect(named.out).toBe((await place('--part', 'thruster', '--stations', '3')).out);
+  const twin = { ...craft.parts.byId.thruster!, id: 'twin' };
+  const two = { ...craft, parts: keyed([...listed(craft.parts), twin]) };
+  const { code, errors } = await heardLater(['place', 'it', '--part', 'Tail motor'], { it: serialize(two) });
+  expect(code).toBe(2);
+  expect(errors).toEqual(['--part: found "Tail motor"; allowed: thruster (Tail motor), twin (Tail motor)']);
 });
 
 test('a craft without thrust figures is exit 2, and so is a file that is none', async () => {

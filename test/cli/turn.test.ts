@@ -78,6 +78,7 @@ test('left out, throttle is full, steering hardest to starboard, cruise as fast 
     vector: null,
     speed: null,
     planned: false,
+    all: false,
   });
 });
 
@@ -157,7 +158,7 @@ test('throttle, angle and speed reach the physics', () => {
 });
 
 test('headline first, then verdicts, figures, propellers, notes and cautions with the hazards', () => {
-  const { out } = turn('museum-atrium');
+  const { out } = turn('museum-atrium', '--all');
   const unfolded = out.replace(/\s+/g, ' ');
   expect(unfolded).toMatch(/^Museum atrium camera craft With the thruster at 4\.290 m the arm is /);
   const titles = ['Verdicts', 'Turning', 'Speed', 'Pitch', 'Inflow', 'Propellers', 'Notes', 'Cautions'];
@@ -173,6 +174,25 @@ test('headline first, then verdicts, figures, propellers, notes and cautions wit
     expect(unfolded).toContain(caution);
 });
 
+test('without --all what one looks for first, and where the rest is; nothing is told as missing twice', () => {
+  const { out } = turn('vault-inspector');
+  for (const said of ['Top speed', 'Pitch in cruise', 'Cautions', 'A turning propeller cuts'])
+    expect(out).toContain(said);
+  for (const rest of ['Inflow', 'Propellers', 'Couple of the fins', 'Added mass', 'as above'])
+    expect(out).not.toContain(rest);
+  expect(out).toMatch(/More with --all: .*\n$/);
+  const all = turn('vault-inspector', '--all').out;
+  expect(all).not.toMatch(/More with --all|as above/);
+  expect(all.match(/so no attitude near level is held/g)).toHaveLength(1);
+  expect(all.split('\n').length).toBeGreaterThan(out.split('\n').length + 30);
+});
+
+test('a speed that it cannot fly is told, one that it can is not', () => {
+  const caution = (speed: string) => turn('museum-atrium', '--speed', speed).out.replace(/\s+/g, ' ');
+  expect(caution('30')).toMatch(/--speed: 30\.00 m\/s is faster than its top speed of 2\.69 m\/s/);
+  expect(caution('1')).not.toContain('faster than its top speed');
+});
+
 const aimed = (craft: Craft, turnTime: number | null, sideGust: number | null): Craft => ({
   ...craft,
   targets: { ...craft.targets, turnTime, sideGust },
@@ -181,7 +201,7 @@ const aimed = (craft: Craft, turnTime: number | null, sideGust: number | null): 
 test('a turning target missed is exit 1, and says what it would take', () => {
   const { code, out } = turnOf(aimed(levelCraft(), 1, null));
   expect(code).toBe(1);
-  expect(out).toMatch(/missed {2}Turns 90° +too slow +\d\.\d s\n +wanted within 1\.0 s: off by \d\.\d s\n/);
+  expect(out).toMatch(/missed {2}Passes 90° +too slow +\d\.\d s\n +wanted within 1\.0 s: off by \d\.\d s\n/);
   expect(out).toMatch(/It takes a yaw moment of [\d.]+ N·m; steered\s+hardest there is [\d.]+\s+N·m\./);
   expect(out).toMatch(/Thrust alone: [\d.]+ N would do; it is 0\.400 N\./);
   expect(turnOf(aimed(levelCraft(), 30, null)).code).toBe(0);
@@ -192,7 +212,9 @@ test('a turning target missed is exit 1, and says what it would take', () => {
 test('without a thruster of which anything is known: the whole report, exit 1', () => {
   const { code, out } = turnOf(unknownCraft());
   expect(code).toBe(1);
-  expect(out).toContain('Tail thruster has no thrust figures: enter them under Selected.');
+  expect(out.replace(/\s+/g, ' ')).toContain(
+    'Tail thruster has no thrust figures: enter them under Selected on the page, or as “thruster” in the file.',
+  );
   expect(out).toContain('Added mass ahead, k1');
   expect(turn('two-sheet-advert', '--json').code).toBe(1);
 });
@@ -201,7 +223,7 @@ test('a craft that nothing steers says so, and still tells its speed', () => {
   const { code, out } = turnOf(aimed(straightCraft(), 10, null));
   expect(code).toBe(1);
   expect(out).toMatch(/Tail thruster can only push straight/);
-  expect(out).toMatch(/missed {2}Turns 90° +does not get there/);
+  expect(out).toMatch(/missed {2}Passes 90° +does not get there/);
   expect(out).toMatch(/Top speed +\d/);
 });
 

@@ -257,3 +257,14 @@ test('a band of heaviness the wrong way round is named', () => {
     allowed: 'at most targets.heaviness.most (-0.1 kg)',
   });
 });
+
+test('a field that is missing and may be null says so; one that may not does not', () => {
+  const problems = problemsAfter((file) => {
+    delete file.parts[0].thruster;
+    delete file.parts[1].mass;
+  });
+  expect(problems.map(({ path, allowed }) => [path, allowed])).toEqual([
+    ['parts[0].thruster', 'an object with its fields, or null'],
+    ['parts[1].mass', 'a finite number'],
+  ]);
+});

@@ -82,7 +82,7 @@ function hoverWith(
     const rest = thrusters.filter((_, i) => i !== worst);
     return hoverWith(loading, rest, reversed, slack);
   }
-  if (Math.abs(pitch) > FARTHEST) return tooSteep(pitch);
+  if (Math.abs(pitch) > FARTHEST) return tooSteep(pitch, needed);
   if (short[worst]! > slack) return outOfReach(thrusters[0]!, needed, upright);
   const vector = idle
     ? upright
@@ -152,8 +152,8 @@ const tooWeak = (needed: number, available: number) =>
     'Bring weight nearer to lift, or fit more thrust.',
   );
 
-const tooSteep = (pitch: number) =>
+const tooSteep = (pitch: number, needed: number) =>
   infeasible(
-    `Hovering on its thrusters the craft would stand at ${say(pitch, 'angle')}, more than ${say(FARTHEST, 'angle')} from level.`,
-    'Bring the thrusters under the CB, or hang weight lower.',
+    `${needed > 0 ? 'It is heavy' : 'It is light'} by ${say(Math.abs(needed), 'force')}; ${needed > 0 ? 'carried' : 'held down'} by its thrusters it would stand at ${say(pitch, 'angle')}, more than ${say(FARTHEST, 'angle')} from level.`,
+    'Bring the thrusters under the CB, hang weight lower, or bring weight nearer to lift.',
   );

@@ -6,13 +6,17 @@ import { type Thruster, thrustersOf } from '../../physics/thrust/thrusters.ts';
 import { yaws } from '../../physics/turning/leverage.ts';
 import { joined } from '../planWords.ts';
 
-const NO_THRUSTER = 'The craft has no thruster: add a part of that kind and enter its thrust under Selected.';
+const NO_THRUSTER =
+  'The craft has no thruster: add a part of that kind and enter its thrust under Selected on the page, or as “thruster” in the file.';
 
 /** One sentence for each thruster of which nothing is known. */
 export const missingFigures = (craft: Craft): string[] =>
   listed(craft.parts)
     .filter(({ kind, thruster }) => kind === 'thruster' && thruster === null)
-    .map(({ name }) => `${name || 'A thruster'} has no thrust figures: enter them under Selected.`);
+    .map(
+      ({ name }) =>
+        `${name || 'A thruster'} has no thrust figures: enter them under Selected on the page, or as “thruster” in the file.`,
+    );
 
 /** What the physics answers, or why nothing drives the craft. */
 export function ifDriven<T>(
@@ -28,7 +32,7 @@ export function ifDriven<T>(
 function withoutThrust(craft: Craft, thrusters: readonly Thruster[]): string | null {
   if (thrusters.some(({ staticThrust }) => staticThrust > 0)) return null;
   if (thrusters.length === 0) return missingFigures(craft)[0] ?? NO_THRUSTER;
-  return `${namesOf(thrusters)} has a static thrust of nil: enter it under Selected.`;
+  return `${namesOf(thrusters)} has a static thrust of nil: enter it under Selected on the page, or in “thruster” in the file.`;
 }
 
 /** Each once, in order: "Tail thruster", "Port and Starboard". */

@@ -107,7 +107,7 @@ test('why not, with amounts: no thruster, angle out of reach, too little thrust,
     /Hovering takes \{1\.96.* force\}.*give \{1 force\}/,
   );
   expect(why(balanced({ heaviness: 0.1, thrusterAft: 2, thruster: { pitch: turning(0, 3) } }))).toMatch(
-    /would stand at/,
+    /heavy by \{0\.98.* force\}; carried by its thrusters it would stand at/,
   );
 });
 
