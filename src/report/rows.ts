@@ -23,7 +23,7 @@ export function row({ label, quantity, value, uncertainty, caution, why }: RowSp
     unit: unitText(quantity),
     ...(uncertainty ? { uncertainty } : {}),
     status: caution ? 'caution' : 'solved',
-    why: caution ?? why ?? '',
+    why: caution || why || '',
   };
 }
 

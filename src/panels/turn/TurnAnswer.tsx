@@ -17,6 +17,11 @@ export function TurnAnswer({ report, onTargets }: TurnAnswerProps) {
   return (
     <>
       <p className="plan-headline">{report.headline}</p>
+      {report.handling.map((words) => (
+        <p key={words} className="turn-cost">
+          {words}
+        </p>
+      ))}
       {report.costWords.map((words) => (
         <p key={words} className="turn-cost">
           {words}
@@ -47,9 +52,9 @@ export function TurnAnswer({ report, onTargets }: TurnAnswerProps) {
 
 function Verdict({ verdict }: { verdict: TurnVerdict }) {
   const [open, setOpen] = useState(false);
-  const { key, state, title, word, figure, marginWords, target, need, row, working } = verdict;
+  const { key, state, close, title, word, figure, marginWords, target, need, row, working } = verdict;
   return (
-    <div className="verdict" data-state={state} data-verdict={key}>
+    <div className="verdict" data-state={close ? 'close' : state} data-verdict={key}>
       <button type="button" className="turn-verdict-face" aria-expanded={open} onClick={() => setOpen(!open)}>
         <span className="verdict-title">{title}</span>
         <span className="verdict-word">{word}</span>

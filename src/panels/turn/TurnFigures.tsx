@@ -1,6 +1,7 @@
 /** The figures of thrust and turning in groups, each opening into its working. */
 
 import { rowText } from '../../report/rowText.ts';
+import { MODEL_ERROR } from '../../report/turning/modelError.ts';
 import type { TurnReport } from '../../report/turning/turnReport.ts';
 import { turnWorkingOf } from '../../report/turning/turnWorkings.ts';
 import { useEditor } from '../editor.ts';
@@ -33,6 +34,10 @@ export function TurnFigures(props: TurnFiguresProps) {
   );
 }
 
+/** What does not stand elsewhere on the panel. */
+const cutNotes = ({ notes, handling }: TurnReport): string[] =>
+  notes.filter((note) => note !== MODEL_ERROR && !handling.includes(note));
+
 function Group({ group, report, rows, sheet, isOld }: TurnFiguresProps & { group: TurnGroup }) {
   const { units } = useEditor();
   const { beside } = group;
@@ -48,10 +53,11 @@ function Group({ group, report, rows, sheet, isOld }: TurnFiguresProps & { group
         whyInside
         isOld={isOld}
       />
+      {group.id === 'turning' && <p className="aside">{MODEL_ERROR}</p>}
       {group.id === 'turning' && <SteadyPlot curve={report.steadyCurve} />}
       {group.id === 'pitch' && <ClimbPlot curve={report.climbCurve} />}
       {group.id === 'speed' && <SpeedPlot curve={report.speedCurve} />}
-      {group.id === 'cut' && report.notes.map((note) => <p key={note}>{note}</p>)}
+      {group.id === 'cut' && cutNotes(report).map((note) => <p key={note}>{note}</p>)}
     </Foldable>
   );
 }

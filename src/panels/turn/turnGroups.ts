@@ -36,7 +36,12 @@ const GROUPS: readonly GroupKind[] = [
     beside: null,
     keys: /^(added|inertia|turn\.virtual)/,
   },
-  { id: 'turning', title: 'Turning', beside: { key: 'turn.timeTo90', words: 'passes 90° in #' }, keys: /^turn\./ },
+  {
+    id: 'turning',
+    title: 'Turning',
+    beside: { key: 'turn.timeTo90', words: 'passes 90° in #' },
+    keys: /^turn\./,
+  },
   {
     id: 'cut',
     title: 'When the throttle is cut',

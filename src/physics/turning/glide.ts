@@ -44,8 +44,15 @@ export interface Stability {
 
 const SPEED_WITHOUT_CRUISE = 1;
 
+/** Without thrust and straight ahead, at any speed. */
+export const keepsHeading = (craft: TurningCraft): boolean =>
+  diesOut(craft, cutCommand(craft), SPEED_WITHOUT_CRUISE);
+
+const cutCommand = (craft: TurningCraft): Command =>
+  commandOf(craft, { throttle: 0, steer: 0, vector: null });
+
 export function glideOf(craft: TurningCraft, quarter: Outcome<Sailed>, cruiseSpeed: number): Glide {
-  const cut = commandOf(craft, { throttle: 0, steer: 0, vector: null });
+  const cut = cutCommand(craft);
   const stability = stabilityOf(craft, cut, cruiseSpeed || SPEED_WITHOUT_CRUISE);
   return {
     after: quarter.status === 'solved' ? glideFrom(craft, quarter.value.end, cut) : quarter,
@@ -53,8 +60,8 @@ export function glideOf(craft: TurningCraft, quarter: Outcome<Sailed>, cruiseSpe
     notes: [
       'With the throttle cut the thrusters give no control: the craft glides as fins and air will have it.',
       stability.keepsHeading
-        ? 'Gliding straight, it keeps its heading: fins and damping outweigh the Munk moment.'
-        : 'Gliding straight, it does not keep its heading: the Munk moment turns it broadside unless thrust holds it. Larger fins, further aft, would help.',
+        ? 'Gliding straight, it keeps its heading.'
+        : 'Gliding straight, it does not keep its heading: the Munk moment turns it broadside. Larger fins, further aft, would help.',
     ],
   };
 }

@@ -4,7 +4,7 @@ import { say } from '../../units/sentence.ts';
 import { counterTo } from './asked.ts';
 import { yaws } from './leverage.ts';
 import { turnsUnder } from './motion.ts';
-import { type Moment, type Sailed, type SailOptions, sail, type Track, trackOf } from './sail.ts';
+import { LONGEST, type Moment, type Sailed, type SailOptions, sail, type Track, trackOf } from './sail.ts';
 import { type Command, momentOf } from './steer.ts';
 import type { TurningCraft } from './turningCraft.ts';
 
@@ -77,7 +77,7 @@ export function yawStop(craft: TurningCraft, { end }: Sailed, throttle: number):
   const angle = way * (trajectory.last[5]! - end.state[5]!);
   if (!trajectory.stopped) {
     return infeasible(
-      `Countering does not stop the yaw, however long it goes on: steered hardest the other way, the craft still turns on against it at ${say(way * trajectory.last[2]!, 'yawRate')}.`,
+      `Countering does not stop the yaw: steered hardest the other way for ${LONGEST / 60} minutes, the craft still turns on against it, at ${say(way * trajectory.last[2]!, 'yawRate')}.`,
       'Larger fins, a longer arm or a wider vectoring angle to the other side would help.',
     );
   }

@@ -15,6 +15,8 @@ export interface PlaceCost {
   readonly part: string;
   readonly name: string;
   readonly station: number;
+  /** Of the CB, m. */
+  readonly cb: number;
   /** kg; negative when its place saves lead. */
   readonly lead: number;
   /** kg; negative when the runs would be longer at the CB. */
@@ -31,6 +33,7 @@ export function placeCostOf(state: CraftState, part: string): PlaceCost | null {
       part,
       name: name || kind,
       station: stationOf(place),
+      cb: loading.cb[0],
       lead: leadOf(state) - leadOf(central),
       wire: wireOf(state) - wireOf(central),
     }

@@ -1,12 +1,13 @@
 /** Thrust, drag, speed and power straight ahead. */
-import { type Outcome, solved } from '../../numeric/outcome.ts';
+import { type Outcome, solved, valueOrNull } from '../../numeric/outcome.ts';
 import type { CraftState } from '../../physics/craftState.ts';
 import type { AheadHelm } from '../../physics/thrust/ahead.ts';
-import { dragOf } from '../../physics/thrust/drag.ts';
+import { type Drag, dragOf } from '../../physics/thrust/drag.ts';
 import { powerAt, steadySpeed, topSpeed } from '../../physics/thrust/speed.ts';
 import { thrustersOf } from '../../physics/thrust/thrusters.ts';
 import type { TurnAsked } from '../../physics/turning/asked.ts';
 import type { Rows } from '../rows.ts';
+import { handlingWords } from './handling.ts';
 import { ifDriven } from './thrusterWords.ts';
 import { rowsFrom } from './turnFigure.ts';
 
@@ -22,7 +23,7 @@ export function speedRows(state: CraftState, { throttle, speed }: TurnAsked): Ro
     ...rowsFrom(
       top,
       { 'speed.top': (at) => at },
-      { 'speed.top': { caution: top.status === 'solved' ? drag.cautions(top.value).join(' ') : null } },
+      { 'speed.top': topWords(handlingWords(state, top), valueOrNull(top), drag) },
     ),
     ...rowsFrom(
       cruise,
@@ -42,6 +43,14 @@ export function speedRows(state: CraftState, { throttle, speed }: TurnAsked): Ro
     }),
     ...rowsFrom(driven, { 'power.atRest': () => powers(0).idealPower }),
     ...shaftRows(driven, powers(0).shaftPower),
+  };
+}
+
+function topWords(handling: readonly string[], top: number | null, drag: Drag) {
+  const rough = top === null ? [] : drag.cautions(top);
+  return {
+    why: ['Level, in still air, at full throttle.', ...handling].join(' '),
+    caution: rough.length > 0 ? [...rough, ...handling].join(' ') : null,
   };
 }
 

@@ -76,11 +76,10 @@ const FIGURES = {
   },
   'turn.widestSpeed': { label: 'Speed in that circle', quantity: 'speed', why: 'Along the path.' },
   'turn.gustHeld': {
-    label: 'Side gust held at rest',
+    label: 'Keeps its heading in a side gust of',
     quantity: 'speed',
-    why: 'The strongest steady gust square from the side in which it can keep its heading; it still drifts.',
   },
-  'turn.gustHeldCruise': { label: 'Side gust held in cruise', quantity: 'speed' },
+  'turn.gustHeldCruise': { label: 'In cruise, in a side gust of', quantity: 'speed' },
   'turn.neededMoment': {
     label: 'Yaw moment needed for the turn time',
     quantity: 'torque',
@@ -114,7 +113,7 @@ const FIGURES = {
     quantity: 'momentPerAngle',
     why: 'At cruise speed; + brings the nose back to the path.',
   },
-  'speed.top': { label: 'Top speed', quantity: 'speed', why: 'Level, in still air, at full throttle.' },
+  'speed.top': { label: 'Top speed', quantity: 'speed' },
   'speed.cruise': { label: 'Cruise speed', quantity: 'speed' },
   'speed.pitchSpeed': {
     label: 'Pitch speed, the least',

@@ -10,7 +10,7 @@ import { joined } from '../planWords.ts';
 import { insignificant, type Rows } from '../rows.ts';
 import type { PlaceCost } from './costs.ts';
 
-/** "With the thruster at 4.29 m the arm is 2.28 m: 90° from rest in 3.1 s, radius 1.70 m at 1.00 m/s, holds a 2.40 m/s gust from the side." */
+/** "With the thruster at 4.29 m the arm is 2.28 m: turns 90° and stops in 5.7 s, radius 1.70 m at 1.00 m/s, keeps its heading at rest in a 2.40 m/s side gust (drifting with it)." What cannot be stopped is said before. */
 export function turnHeadline(
   craft: Craft,
   thrusters: readonly Thruster[],
@@ -21,13 +21,30 @@ export function turnHeadline(
   if (arm.value === null || turn.status === 'infeasible') return arm.why || why(turn);
   const { fromRest, steady, gust } = turn.value;
   const does = [
-    ...(fromRest.status === 'solved' ? [`90° from rest in ${say(fromRest.value.time, 'time')}`] : []),
+    ...quarterWords(turn.value),
     ...(steady.status === 'solved' ? [steadyWords(steady.value)] : []),
     ...(gust.status === 'solved' ? [gustWords(gust.value)] : []),
   ];
   const stands = `With ${placesOf(craft, thrusters)} the arm is ${say(Math.abs(arm.value), 'length')}${sideOf(thrusters, arm.value)}`;
   const slow = fromRest.status === 'infeasible' ? ` ${why(fromRest)}` : '';
-  return `${stands}: ${does.join(', ')}.${slow}`;
+  const first = runsAway(turn.value) ? `${RUNS_AWAY}. ` : '';
+  return `${first}${stands}: ${does.join(', ')}.${slow}`;
+}
+
+const RUNS_AWAY = 'Once turning from cruise it cannot be stopped by steering';
+
+const runsAway = ({ fromCruise, stop }: Turn): boolean =>
+  fromCruise.status === 'solved' && stop.status === 'infeasible';
+
+/** The same for the cautions, with what would help; or that it cannot be stopped from rest. None where the yaw can be stopped. */
+export function runawayCautions(turn: Turn): string[] {
+  if (runsAway(turn)) return [`${RUNS_AWAY}. ${why(turn.stop)}`];
+  return turn.fromRest.status === 'solved' && turn.there.status === 'infeasible' ? [why(turn.there)] : [];
+}
+
+function quarterWords({ fromRest, there }: Turn): string[] {
+  if (there.status === 'solved') return [`turns 90° and stops in ${say(there.value.time, 'time')}`];
+  return fromRest.status === 'solved' ? [`passes 90° from rest in ${say(fromRest.value.time, 'time')}`] : [];
 }
 
 const why = (outcome: Outcome<unknown>): string =>
@@ -53,28 +70,28 @@ const ON_THE_SPOT = 0.25;
 
 const steadyWords = ({ lengths, radius, speed }: SteadyTurn): string =>
   lengths < ON_THE_SPOT
-    ? 'turns almost on the spot'
+    ? 'almost on the spot'
     : `radius ${say(radius, 'pathLength')} at ${say(speed, 'speed')}`;
 
 /** m/s, at rest. */
 function gustWords(held: number): string {
-  if (insignificant(held, 'speed')) return 'holds no gust from the side';
+  if (insignificant(held, 'speed')) return 'keeps its heading in no side gust';
   const speed = say(held, 'speed');
-  return held >= STRONGEST
-    ? `holds gusts of ${speed} and more from the side`
-    : `holds a ${speed} gust from the side`;
+  const gusts = held >= STRONGEST ? `side gusts of ${speed} and more` : `a ${speed} side gust`;
+  return `keeps its heading at rest in ${gusts} (drifting with it)`;
 }
 
-/** "It calls for 96 g of lead and 8 g of wire." One sentence a thruster; none for a place that costs nothing. */
+/** "The place of Tail thruster costs 96 g of lead and 8 g of wire, compared with the same thruster at the CB (2.000 m)." One sentence a thruster; none for a place that costs nothing. */
 export function costWords(costs: readonly PlaceCost[]): string[] {
-  return costs.flatMap(({ name, lead, wire }) => {
+  return costs.flatMap(({ name, lead, wire, cb }) => {
     const calls = [massWords(lead, 'lead'), massWords(wire, 'wire')].filter(Boolean);
     const saves = [massWords(-lead, 'lead'), massWords(-wire, 'wire')].filter(Boolean);
     const words = [
-      ...(calls.length > 0 ? [`calls for ${joined(calls)}`] : []),
+      ...(calls.length > 0 ? [`costs ${joined(calls)}`] : []),
       ...(saves.length > 0 ? [`saves ${joined(saves)}`] : []),
     ];
-    return words.length > 0 ? [`The place of ${name} ${joined(words)}, against one at the CB.`] : [];
+    const central = `the same thruster at the CB (${say(cb, 'length')})`;
+    return words.length > 0 ? [`The place of ${name} ${joined(words)}, compared with ${central}.`] : [];
   });
 }
 

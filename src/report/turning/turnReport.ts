@@ -4,7 +4,7 @@ import { kept } from '../../numeric/kept.ts';
 import { infeasible, type Outcome, solved, valueOrNull } from '../../numeric/outcome.ts';
 import { type CraftState, craftStateOf } from '../../physics/craftState.ts';
 import { type ClimbPoint, climbCurve } from '../../physics/cruise/climb.ts';
-import { type SpeedPoint, speedCurve } from '../../physics/thrust/speed.ts';
+import { type SpeedPoint, speedCurve, topSpeed } from '../../physics/thrust/speed.ts';
 import { type Thruster, thrustersOf } from '../../physics/thrust/thrusters.ts';
 import {
   type SteadyPoint,
@@ -21,7 +21,9 @@ import { addedRows, hullAirRows } from './addedRows.ts';
 import { arrowsOf, type ThrustArrow } from './arrows.ts';
 import { authorityRows } from './authorityRows.ts';
 import { type PlaceCost, placeCostOf } from './costs.ts';
+import { handlingWords } from './handling.ts';
 import { inflowRows, inflowsAt, type PropellerAir } from './inflows.ts';
+import { MODEL_ERROR } from './modelError.ts';
 import { CLIMB_POINTS, climbRows, hoverRows, pitchRows } from './pitchRows.ts';
 import { type PropellerLine, propellerLines } from './propellers.ts';
 import { speedRows } from './speedRows.ts';
@@ -48,7 +50,9 @@ export interface TurnReport extends TurnFigures {
   /** Whether every turning target that is set is met. */
   readonly met: boolean;
   readonly headline: string;
-  /** What to know of how it flies. */
+  /** How much it has to be steered, and up to which speed its pitch is held: stands with the headline. */
+  readonly handling: readonly string[];
+  /** What to know of how it flies; what is in `handling` first. */
   readonly notes: readonly string[];
   /** What to mind, and what is missing. */
   readonly cautions: readonly string[];
@@ -119,6 +123,7 @@ function withoutHull(sentence: string, units: UnitSystem): TurnReport {
     verdicts: [],
     met: false,
     headline: said,
+    handling: [],
     notes: [],
     cautions: [],
     turn: null,
@@ -164,13 +169,17 @@ function reportOf(state: CraftState, asked: TurnAsked): PlainReport {
   const widest = widestCircle(turn, steadies);
   const rows = inOrder({
     ...figures.rows,
-    ...turnRows(turn, figures.rows['thrust.static']!.value ?? 0),
+    ...turnRows(turn, figures.rows['thrust.static']!.value ?? 0, figures.rows['speed.top']!.value),
     ...widestRows(widest),
     ...climbRows(state, asked.throttle, climbs),
     ...inflowRows(inflows, thrusters),
     ...hullAirRows(state),
   });
   const verdicts = turnVerdictsOf(craft.targets, thrusters, turn, rows);
+  const handling = handlingWords(
+    state,
+    ifDriven(state, () => topSpeed(state)),
+  );
   const headline = turnHeadline(craft, thrusters, turn, rows);
   return {
     ...figures,
@@ -178,7 +187,12 @@ function reportOf(state: CraftState, asked: TurnAsked): PlainReport {
     verdicts,
     met: verdicts.every(({ state: each }) => each === 'met'),
     headline,
-    notes: [...widestNotes(widest), ...(turn.status === 'solved' ? turn.value.glide.notes : [])],
+    handling,
+    notes: [
+      ...handling,
+      ...widestNotes(widest),
+      ...(turn.status === 'solved' ? [...turn.value.glide.notes, MODEL_ERROR] : []),
+    ],
     cautions: turnCautions(state, thrusters, turn).filter((each) => each !== headline),
     turn: valueOrNull(turn),
     speedCurve: curveOf(ifDriven(state, () => solved(speedCurve(state, { throttle: asked.throttle })))),
@@ -215,6 +229,7 @@ function readReport(report: PlainReport, units: UnitSystem): TurnReport {
     ...readFigures(report, units),
     verdicts: report.verdicts.map(readVerdict),
     headline: read(report.headline),
+    handling: report.handling.map(read),
     notes: report.notes.map(read),
     cautions: report.cautions.map(read),
     propellers: report.propellers.map((line) => ({ ...line, name: read(line.name) })),

@@ -1,12 +1,12 @@
 /** How the craft turns, and what is left when the throttle is cut. */
-import { type Outcome, solved } from '../../numeric/outcome.ts';
+import { type Outcome, solved, valueOrNull } from '../../numeric/outcome.ts';
 import type { Need, Turn } from '../../physics/turning/turn.ts';
 import { say } from '../../units/sentence.ts';
 import type { Rows } from '../rows.ts';
 import { rowsFrom } from './turnFigure.ts';
 
-/** Of one answer of the physics; `thrust`: what all thrusters give at rest at full throttle, N. */
-export function turnRows(turn: Outcome<Turn>, thrust: number): Rows {
+/** Of one answer of the physics; `thrust`: what all thrusters give at rest at full throttle, N; `top`: top speed, m/s. */
+export function turnRows(turn: Outcome<Turn>, thrust: number, top: number | null): Rows {
   const part = <T>(of: (turn: Turn) => Outcome<T>): Outcome<T> =>
     turn.status === 'solved' ? of(turn.value) : turn;
   return {
@@ -40,6 +40,7 @@ export function turnRows(turn: Outcome<Turn>, thrust: number): Rows {
     ...rowsFrom(
       part(({ gust }) => gust),
       { 'turn.gustHeld': (speed) => speed },
+      { 'turn.gustHeld': { why: gustWhy(turn, top) } },
     ),
     ...rowsFrom(
       part(({ gustCruise }) => gustCruise),
@@ -49,6 +50,16 @@ export function turnRows(turn: Outcome<Turn>, thrust: number): Rows {
     ...needRows(turn, thrust),
     ...glideRows(turn),
   };
+}
+
+/** Against more than its top speed no heading keeps it where it is. */
+function gustWhy(turn: Outcome<Turn>, top: number | null): string {
+  const held = turn.status === 'solved' ? valueOrNull(turn.value.gust) : null;
+  const drifts =
+    held !== null && top !== null && held > top
+      ? `it is above the top speed of ${say(top, 'speed')}, so it drifts whichever way it is steered.`
+      : 'it drifts with it.';
+  return `The strongest, steady and square from the side, at rest; ${drifts}`;
 }
 
 const cruiseWords = (turn: Outcome<Turn>): string =>

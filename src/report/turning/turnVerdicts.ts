@@ -9,6 +9,7 @@ import type { Row } from '../row.ts';
 import type { Rows } from '../rows.ts';
 import type { Verdict } from '../verdict.ts';
 import { marginWords, type PlainVerdict } from '../verdicts.ts';
+import { WITHIN_ERROR, withinError } from './modelError.ts';
 import type { TurnKey } from './turnFigure.ts';
 import { turnWorkingOf } from './turnWorkings.ts';
 
@@ -16,6 +17,8 @@ export type TurnVerdictKey = 'turnTime' | 'sideGust';
 
 export interface TurnVerdict extends Omit<Verdict, 'key'> {
   readonly key: TurnVerdictKey;
+  /** Met by less than the model's error: about enough. */
+  readonly close: boolean;
   /** What the target takes and what there is, and what thrust, vectoring and arm would each have to become: one sentence each. */
   readonly need: readonly string[];
 }
@@ -51,7 +54,7 @@ function timeVerdict(most: number, told: boolean, rows: Rows): Bare {
   const short = row.value === null ? 'does not get there' : 'too slow';
   return {
     key: 'turnTime',
-    title: 'Turns 90°',
+    title: 'Passes 90°',
     ...judged(row, margin, told, ['quick enough', short]),
     target: `within ${say(most, 'time')}`,
     working: workingWith(rows, 'turn.timeTo90', NEEDED),
@@ -64,21 +67,27 @@ function gustVerdict(least: number, told: boolean, rows: Rows): Bare {
   return {
     key: 'sideGust',
     title: 'Side gust',
-    ...judged(row, margin, told, ['holds it', 'turned by it']),
+    ...judged(row, margin, told, ['keeps its heading', 'turned by it']),
     target: `at least ${say(least, 'speed')} at rest`,
     working: workingWith(rows, 'turn.gustHeld', AGAINST_GUST),
   };
 }
 
-/** What cannot be told is open; what is told to have no figure is missed. */
-const judged = (row: Row, margin: number | null, told: boolean, [good, bad]: readonly [string, string]) => ({
-  state: !told ? ('open' as const) : margin !== null && margin >= 0 ? ('met' as const) : ('missed' as const),
-  word: !told ? 'cannot be told' : margin !== null && margin >= 0 ? good : bad,
-  row,
-  sides: ['', ''] as const,
-  margin,
-  marginWords: marginWords(margin, row.quantity),
-});
+/** What cannot be told is open; what is told to have no figure is missed. Met or missed goes by the bare target. */
+function judged(row: Row, margin: number | null, told: boolean, [good, bad]: readonly [string, string]) {
+  const met = margin !== null && margin >= 0;
+  const unsure = margin !== null && withinError(margin, row.value!);
+  const close = met && unsure;
+  return {
+    state: !told ? ('open' as const) : met ? ('met' as const) : ('missed' as const),
+    close,
+    word: !told ? 'cannot be told' : close ? 'about enough' : met ? good : bad,
+    row,
+    sides: ['', ''] as const,
+    margin,
+    marginWords: [marginWords(margin, row.quantity), ...(unsure ? [WITHIN_ERROR] : [])].join(', '),
+  };
+}
 
 interface NeedKeys {
   readonly moment: TurnKey;
