@@ -1,4 +1,5 @@
 /** Every field of what is selected. */
+import type { ReactNode } from 'react';
 import { idsOf } from '../edit/selection.ts';
 import { useEditor } from './editor.ts';
 import { HardpointInspector } from './inspector/HardpointInspector.tsx';
@@ -9,20 +10,47 @@ import { WireInspector } from './inspector/WireInspector.tsx';
 export function Inspector() {
   const { craft, selection } = useEditor();
   const parts = idsOf(selection, 'part').flatMap((id) => craft.parts.byId[id] ?? []);
-  if (parts.length > 1) return <PartsInspector key={parts.map((part) => part.id).join(' ')} parts={parts} />;
+  if (parts.length > 1) {
+    return (
+      <FromTop key={parts.map((part) => part.id).join(' ')}>
+        <PartsInspector parts={parts} />
+      </FromTop>
+    );
+  }
   const last = selection.at(-1);
   if (!last) return <NothingSelected />;
   // The key gives each thing its own fields, so that a text half typed for one never lands in another.
   const key = `${last.kind} ${last.id}`;
   switch (last.kind) {
     case 'part':
-      return <PartInspector key={key} part={craft.parts.byId[last.id]!} />;
+      return (
+        <FromTop key={key}>
+          <PartInspector part={craft.parts.byId[last.id]!} />
+        </FromTop>
+      );
     case 'wire':
-      return <WireInspector key={key} wire={craft.wires.byId[last.id]!} />;
+      return (
+        <FromTop key={key}>
+          <WireInspector wire={craft.wires.byId[last.id]!} />
+        </FromTop>
+      );
     case 'hardpoint':
-      return <HardpointInspector key={key} hardpoint={craft.hardpoints.byId[last.id]!} />;
+      return (
+        <FromTop key={key}>
+          <HardpointInspector hardpoint={craft.hardpoints.byId[last.id]!} />
+        </FromTop>
+      );
   }
 }
+
+/** What is newly selected is read from its name down, wherever the one before was scrolled to. */
+function FromTop({ children }: { children: ReactNode }) {
+  return <div ref={scrollUp}>{children}</div>;
+}
+
+/** Called once, as the thing comes onto the page. */
+const scrollUp = (element: HTMLElement | null): void =>
+  element?.closest('[role="tabpanel"]')?.scrollTo({ top: 0 });
 
 function NothingSelected() {
   return (

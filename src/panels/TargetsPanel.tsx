@@ -1,4 +1,5 @@
 /** What the craft is to meet, where the lead hangs, and what carries the heaviness. */
+import { lazy, Suspense } from 'react';
 import { listed } from '../craft/craft.ts';
 import type { Targets } from '../craft/schema.ts';
 import { setTargets } from '../edit/edits/craft.ts';
@@ -12,6 +13,10 @@ import { QuantityField } from './fields/QuantityField.tsx';
 import { PlaceFields } from './inspector/PlaceFields.tsx';
 import { FlightCaution } from './NotesPanel.tsx';
 import { RowList } from './RowList.tsx';
+
+const TargetVerdicts = lazy(async () => ({
+  default: (await import('./turn/TargetVerdicts.tsx')).TargetVerdicts,
+}));
 
 export function TargetsPanel() {
   const { craft } = useEditor();
@@ -104,6 +109,11 @@ function TargetFields() {
         onCommit={(next, run) => set('side gust', { sideGust: next }, run)}
         onClear={() => set('side gust', { sideGust: null })}
       />
+      {(turnTime !== null || sideGust !== null) && (
+        <Suspense fallback={<p className="aside">Loading…</p>}>
+          <TargetVerdicts />
+        </Suspense>
+      )}
     </>
   );
 }
