@@ -101,4 +101,4 @@ export const takeFromAbove: Take = (ground, hand) => {
   }
 };
 
-const MOVED_ELSEWHERE = 'Parts are moved in the side view and from astern. Here the arrows are turned.';
+const MOVED_ELSEWHERE = 'Parts are moved in the side view and from astern.';

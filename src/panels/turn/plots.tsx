@@ -1,4 +1,6 @@
 /** Thrust against drag, the turn over what is steered, the climb over vectoring in pitch. None where there is too little to draw. */
+import type { Rows } from '../../report/rows.ts';
+import { climbPieces } from '../../report/turning/climbPieces.ts';
 import type { ClimbPoint, SpeedPoint, SteadyPoint } from '../../report/turning/turns.ts';
 import { formatQuantity } from '../../units/format.ts';
 import type { Quantity, UnitSystem } from '../../units/units.ts';
@@ -27,8 +29,8 @@ export function SpeedPlot({ curve }: { curve: readonly SpeedPoint[] }) {
       title="Force over speed"
       words="Thrust falls and drag grows with speed; where they meet is the steady speed."
       curves={[
-        { name: 'thrust', points: thrust },
-        { name: 'drag', points: drag },
+        { name: 'thrust', pieces: [thrust] },
+        { name: 'drag', pieces: [drag] },
       ]}
       x={{ ...axisOf(xs(thrust), 'speed', units), name: 'speed' }}
       y={y}
@@ -55,9 +57,9 @@ export function SteadyPlot({ curve }: { curve: readonly SteadyPoint[] }) {
   const points = held.map(({ x, y }) => ({ x, y: Math.log(y / bottom) / Math.log(widest / bottom) }));
   return (
     <SmallPlot
-      title={`Radius over ${byAngle ? 'vectoring' : 'thrust apart'}, equal steps for equal ratios`}
+      title={`Radius over ${byAngle ? 'vectoring' : 'thrust apart'} (log scale)`}
       words={`The radius falls from ${words(widest)} to ${words(tightest)} at its least.`}
-      curves={[{ name: 'radius', points }]}
+      curves={[{ name: 'radius', pieces: [points] }]}
       x={{
         ...axisOf(xs(points), byAngle ? 'angle' : 'fraction', units),
         name: byAngle ? 'angle in yaw' : 'share of what there is',
@@ -67,17 +69,17 @@ export function SteadyPlot({ curve }: { curve: readonly SteadyPoint[] }) {
   );
 }
 
-export function ClimbPlot({ curve }: { curve: readonly ClimbPoint[] }) {
+export function ClimbPlot({ curve, rows }: { curve: readonly ClimbPoint[]; rows: Rows }) {
   const { units } = useEditor();
-  const climb = curve.flatMap(({ vector, climb: each }) =>
-    each.status === 'solved' ? [{ x: vector, y: each.value.climbRate }] : [],
-  );
+  const pieces = climbPieces(curve, rows);
+  const climb = pieces.flat();
   if (climb.length < LEAST_POINTS) return null;
+  const broken = pieces.length > 1 ? ' The line is broken where there is no steady path near level.' : '';
   return (
     <SmallPlot
       title="Climb over vectoring in pitch"
-      words={`It climbs at ${formatQuantity(Math.max(...ys(climb)), 'speed', units)} at most.`}
-      curves={[{ name: 'climb', points: climb }]}
+      words={`It climbs at ${formatQuantity(Math.max(...ys(climb)), 'speed', units)} at most.${broken}`}
+      curves={[{ name: 'climb', pieces }]}
       x={{ ...axisOf(xs(climb), 'angle', units), name: 'thrust turned up' }}
       y={axisOf(ys(climb), 'speed', units)}
     />
