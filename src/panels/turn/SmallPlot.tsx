@@ -2,7 +2,8 @@
 
 export interface PlotCurve {
   readonly name: string;
-  readonly points: readonly PlotPoint[];
+  /** Each a line of its own: the curve is broken between them. */
+  readonly pieces: readonly (readonly PlotPoint[])[];
 }
 
 export interface PlotPoint {
@@ -55,13 +56,15 @@ export function SmallPlot({ title, words, curves, x, y }: SmallPlotProps) {
         aria-label={words}
       >
         {nought !== null && <line className="nought" x1={0} x2={1} y1={nought} y2={nought} />}
-        {curves.map(({ name, points }, i) => (
-          <polyline
-            key={name}
-            className={`curve-${i}`}
-            points={points.map((at) => `${shareOf(at.x, x)},${1 - shareOf(at.y, y)}`).join(' ')}
-          />
-        ))}
+        {curves.flatMap(({ name, pieces }, i) =>
+          pieces.map((points) => (
+            <polyline
+              key={`${name} from ${points[0]?.x}`}
+              className={`curve-${i}`}
+              points={points.map((at) => `${shareOf(at.x, x)},${1 - shareOf(at.y, y)}`).join(' ')}
+            />
+          )),
+        )}
       </svg>
       <span className="small-plot-x" aria-hidden="true">
         <span>{x.leastWords}</span>

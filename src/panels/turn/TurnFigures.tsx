@@ -2,6 +2,7 @@
 
 import { rowText } from '../../report/rowText.ts';
 import { MODEL_ERROR } from '../../report/turning/modelError.ts';
+import { noneOnce } from '../../report/turning/noneOnce.ts';
 import type { TurnReport } from '../../report/turning/turnReport.ts';
 import { turnWorkingOf } from '../../report/turning/turnWorkings.ts';
 import { useEditor } from '../editor.ts';
@@ -46,7 +47,7 @@ function Group({ group, report, rows, sheet, isOld }: TurnFiguresProps & { group
   return (
     <Foldable title={group.title} note={note} open={group.id === 'turning'}>
       <FigureList
-        rows={group.rows}
+        rows={noneOnce(group.rows)}
         sheet={sheet}
         all={rows}
         workingOf={(key) => turnWorkingOf(key, rows)}
@@ -55,7 +56,7 @@ function Group({ group, report, rows, sheet, isOld }: TurnFiguresProps & { group
       />
       {group.id === 'turning' && <p className="aside">{MODEL_ERROR}</p>}
       {group.id === 'turning' && <SteadyPlot curve={report.steadyCurve} />}
-      {group.id === 'pitch' && <ClimbPlot curve={report.climbCurve} />}
+      {group.id === 'pitch' && <ClimbPlot curve={report.climbCurve} rows={rows} />}
       {group.id === 'speed' && <SpeedPlot curve={report.speedCurve} />}
       {group.id === 'cut' && cutNotes(report).map((note) => <p key={note}>{note}</p>)}
     </Foldable>
