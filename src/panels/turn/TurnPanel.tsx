@@ -42,7 +42,7 @@ export function TurnSheet({ now, player, onTargets }: TurnPanelProps & { now: Re
           <TurnAnswer report={report} onTargets={onTargets} />
         </div>
         <div className={subject.waits ? 'plan-old' : ''}>
-          <MomentBars rows={rows} />
+          <MomentBars rows={rows} need={report.need} />
         </div>
         <SubjectChoice words={subject.words} />
         {report.turn && <TurnControls />}

@@ -22,6 +22,7 @@ import { arrowsOf, type ThrustArrow } from './arrows.ts';
 import { authorityRows } from './authorityRows.ts';
 import { type PlaceCost, placeCostOf } from './costs.ts';
 import { handlingWords } from './handling.ts';
+import { type HarderNeed, harderNeed } from './harderNeed.ts';
 import { inflowRows, inflowsAt, type PropellerAir } from './inflows.ts';
 import { MODEL_ERROR } from './modelError.ts';
 import { CLIMB_POINTS, climbRows, hoverRows, pitchRows } from './pitchRows.ts';
@@ -49,6 +50,8 @@ export interface TurnReport extends TurnFigures {
   readonly verdicts: readonly TurnVerdict[];
   /** Whether every turning target that is set is met. */
   readonly met: boolean;
+  /** What the targets ask the most of; null where they ask nothing. */
+  readonly need: HarderNeed | null;
   readonly headline: string;
   /** How much it has to be steered, and up to which speed its pitch is held: stands with the headline. */
   readonly handling: readonly string[];
@@ -122,6 +125,7 @@ function withoutHull(sentence: string, units: UnitSystem): TurnReport {
     costWords: [],
     verdicts: [],
     met: false,
+    need: null,
     headline: said,
     handling: [],
     notes: [],
@@ -186,6 +190,7 @@ function reportOf(state: CraftState, asked: TurnAsked): PlainReport {
     rows,
     verdicts,
     met: verdicts.every(({ state: each }) => each === 'met'),
+    need: turn.status === 'solved' ? harderNeed(turn.value.authority) : null,
     headline,
     handling,
     notes: [
