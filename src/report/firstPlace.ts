@@ -48,13 +48,17 @@ function passedAft(start: Place, part: NewPart, others: readonly Part[], { lengt
   return start.kind === 'axis' || stationOf(place) <= length ? place : start;
 }
 
-/** Whether the two lie over each other along the same line of the hull. */
+/** Whether the two lie over each other along the same line of the hull, and at one height below the keel. */
 function covers(place: Place, { size }: NewPart, other: Part): boolean {
-  const sameLine =
-    place.kind === other.place.kind &&
-    (place.kind !== 'skin' || (other.place.kind === 'skin' && place.clock === other.place.clock));
   const apart = Math.abs(stationOf(place) - stationOf(other.place));
-  return sameLine && apart < (size.length + other.size.length) / 2 + BETWEEN / 2;
+  return sameLine(place, size, other) && apart < (size.length + other.size.length) / 2 + BETWEEN / 2;
+}
+
+function sameLine(place: Place, size: Part['size'], other: Part): boolean {
+  if (place.kind === 'skin') return other.place.kind === 'skin' && place.clock === other.place.clock;
+  if (place.kind !== 'keel') return place.kind === other.place.kind;
+  if (other.place.kind !== 'keel') return false;
+  return Math.abs(place.drop - other.place.drop) < (size.height + other.size.height) / 2;
 }
 
 const toMillimetre = (value: number): number => Number(value.toFixed(3));

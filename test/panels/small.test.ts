@@ -28,6 +28,7 @@ test('a search finds entries that hold every word, in any order and case', () =>
 test('where no entry holds every word, those that hold any stand there, best first', () => {
   const kinds = foundParts(catalogue.parts, 'tail thruster', null).map(({ kind }) => kind);
   expect(kinds.slice(0, 3)).toEqual(['thruster', 'thruster', 'thruster']);
+  expect(foundParts(catalogue.parts, 'fin', null)[0]!.kind).toBe('fin');
   expect(foundParts(catalogue.parts, 'xyzzy', null)).toEqual([]);
   const noted = foundParts(catalogue.parts, 'battery swollen xyzzy', null);
   expect(noted[0]!.kind).toBe('battery');

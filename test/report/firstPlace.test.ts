@@ -51,3 +51,12 @@ test('parts added one after the other do not lie on each other, and fins go roun
     else expect(spots.map(([x]) => x)).toEqual(spots.map(([x]) => x).toSorted((a, b) => a - b));
   }
 });
+
+test('what hangs well below the keel is in nobody’s way, what touches it is', () => {
+  const made = asPart(entry('battery'));
+  const { cbStation } = hull;
+  const hung = (drop: number) => part('hung', { kind: 'keel', station: cbStation, drop });
+  const station = (drop: number) => stationOf(firstPlace(made, craft([hung(drop)], []), hull));
+  expect(station(0.3)).toBeCloseTo(cbStation, 3);
+  expect(station(0)).toBeGreaterThan(cbStation + 0.05);
+});
