@@ -74,3 +74,24 @@ test('a target of turning is asked for, and emptied again', async ({ visit }) =>
   await type(page, 'First 90° within', '');
   expect((await saved(page)).targets).toMatchObject({ turnTime: null, sideGust: 1 });
 });
+
+test('what is newly selected is read from its top; fins stepped through the kinds of place end on the skin', async ({
+  visit,
+}) => {
+  const page = await visit();
+  await openSample(page, 'worked-example');
+  await page.getByText('Tail thruster', { exact: true }).first().click();
+  const panel = page.getByRole('tabpanel', { name: 'Selected' });
+  const scrolled = () => panel.evaluate((element) => element.scrollTop);
+  await panel.evaluate((element) => element.scrollTo(0, 400));
+  expect(await scrolled()).toBeGreaterThan(100);
+  await page.getByText('Fins', { exact: true }).first().click();
+  await expect.poll(scrolled).toBe(0);
+
+  await panel.getByText('Fins: inside the hull').waitFor();
+  for (const kind of ['keel', 'axis', 'skin'])
+    await page.getByLabel('Place', { exact: true }).selectOption(kind);
+  const fins = (await saved(page)).parts.find(({ id }: { id: string }) => id === 'fins');
+  expect(fins.place).toMatchObject({ kind: 'skin', standoff: 0 });
+  expect(await panel.getByText('inside the hull').count()).toBe(0);
+});
