@@ -19,12 +19,12 @@ export function rowText(row: Row, units: UnitSystem): string {
 }
 
 /**
- * Below a thousandth of the last digit usually shown it is rounding of the arithmetic, as for the side of a craft that
- * is alike on both.
+ * Below half of the last digit usually shown all that is shown is certain: more digits would claim more than the sums are
+ * good for, or be rounding of the arithmetic, as for the side of a craft that is alike on both.
  */
 const isDust = (uncertainty: number, quantity: Quantity, units: UnitSystem): boolean => {
   const { si, digits } = unitOf(quantity, units);
-  return uncertainty / si < 10 ** -(digits + 3);
+  return uncertainty / si < 10 ** -digits / 2;
 };
 
 function uncertainText(value: number, uncertainty: number, quantity: Quantity, units: UnitSystem): string {

@@ -20,6 +20,16 @@ test('an uncertainty that is only rounding of the arithmetic is not shown', () =
   expect(rowText({ ...ROW, value: 1e-17, quantity: 'length', uncertainty: 3e-18 }, 'metric')).toBe('0.000 m');
 });
 
+test('one that does not reach the digits usually shown is left out, and adds none', () => {
+  const length: Row = { ...ROW, quantity: 'length', value: 0.2 };
+  expect(rowText({ ...length, uncertainty: 0.000021 }, 'metric')).toBe('0.200 m');
+  expect(rowText({ ...length, uncertainty: 0.00049 }, 'metric')).toBe('0.200 m');
+  expect(rowText({ ...length, uncertainty: 0.00051 }, 'metric')).toBe('0.20000 ± 0.00051 m');
+  expect(rowText({ ...ROW, quantity: 'force', value: 2.14448, uncertainty: 0.00021 }, 'metric')).toBe(
+    '2.144 N',
+  );
+});
+
 test('no value is a word, not a number', () => {
   expect(rowText({ ...ROW, value: null, status: 'infeasible' }, 'metric')).toBe('none');
 });

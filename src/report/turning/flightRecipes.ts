@@ -125,6 +125,11 @@ export const FLIGHT_RECIPES: Recipes<Flight> = {
     from: ['added.k1'],
     source: PITCH,
   },
+  'cruise.heldPitch': {
+    formula: 'θ at which the couples of cruise add up to nil, at 80 % of that speed',
+    from: ['cruise.criticalSpeed'],
+    source: PITCH,
+  },
   'climb.rate': {
     formula: 'u sin θ + w cos θ where forces along, forces across and couples are all nil',
     from: ['climb.path', 'climb.pitch', 'thrust.static'],

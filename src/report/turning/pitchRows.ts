@@ -1,5 +1,5 @@
 /** How the craft sits in cruise, how it climbs and hovers, and up to which speed its pitch is held. */
-import { infeasible, type Outcome, solved } from '../../numeric/outcome.ts';
+import { infeasible, type Outcome, solved, valueOrNull } from '../../numeric/outcome.ts';
 import { heavinessOf, type Loading } from '../../physics/balance/loading.ts';
 import type { CraftState } from '../../physics/craftState.ts';
 import { type Climb, type ClimbPoint, steadyClimb } from '../../physics/cruise/climb.ts';
@@ -17,7 +17,8 @@ import { rowsFrom, type TurnKey } from './turnFigure.ts';
 
 export function pitchRows(state: CraftState, { throttle, speed }: TurnAsked): Rows {
   const cruise = ifDriven(state, () => cruisePitch(state, speed === null ? { throttle } : { speed }));
-  const caution = cruise.status === 'solved' ? cautionsOf(cruise.value, state) : null;
+  const critical = loosening(criticalSpeed(state));
+  const caution = cruise.status === 'solved' ? cautionsOf(cruise.value, state, BY_ITSELF) : null;
   return {
     ...rowsFrom(
       cruise,
@@ -33,8 +34,21 @@ export function pitchRows(state: CraftState, { throttle, speed }: TurnAsked): Ro
       },
       { 'cruise.pitch': { caution, why: LEVEL } },
     ),
-    ...rowsFrom(loosening(criticalSpeed(state)), { 'cruise.criticalSpeed': (at) => at }),
+    ...rowsFrom(critical, { 'cruise.criticalSpeed': (at) => at }),
+    ...(cruise.status === 'solved' ? {} : heldRows(state, valueOrNull(critical))),
   };
+}
+
+/** Well below the speed up to which the nose is held. */
+const HELD = 0.8;
+
+/** Where cruise has no pitch, that of a speed at which there is one; no row where there is none either. */
+function heldRows(state: CraftState, critical: number | null): Rows {
+  if (critical === null) return {};
+  const cruise = ifDriven(state, () => cruisePitch(state, { speed: HELD * critical }));
+  if (cruise.status === 'infeasible') return {};
+  const caution = cautionsOf(cruise.value, state);
+  return rowsFrom(cruise, { 'cruise.heldPitch': ({ pitch }) => pitch }, { 'cruise.heldPitch': { caution } });
 }
 
 const LEVEL =
@@ -43,13 +57,16 @@ const LEVEL =
 /** Less is lost in what trimming can do, N: about 2 g. */
 const TRIMMED = 0.02;
 
-function cautionsOf({ rising, cautions }: Cruise, state: CraftState): string {
+const BY_ITSELF = 'Left to itself it flies as told under “Climbs”.';
+
+/** `byItself`: where it is told how it flies untrimmed, if anywhere. */
+function cautionsOf({ rising, cautions }: Cruise, state: CraftState, byItself?: string): string {
   if (Math.abs(rising) < TRIMMED) return cautions.join(' ');
   const trim = `${say(Math.abs(rising) / STANDARD_GRAVITY, 'mass')} ${rising > 0 ? 'heavier' : 'lighter'}`;
   const turns = thrustersOf(state).some(({ pitch }) => pitch.most > pitch.least);
-  const orTurned = turns ? ' or held there by thrust turned in pitch, which changes this pitch too' : '';
-  const level = `Level only if trimmed ${trim}${orTurned}; left to itself it flies as told under “Climbs”.`;
-  return [level, ...cautions].join(' ');
+  const orTurned = turns ? ', or held there by thrust turned in pitch, which changes this pitch too' : '';
+  const level = `Level only if trimmed ${trim}${orTurned}.`;
+  return [level, ...(byItself ? [byItself] : []), ...cautions].join(' ');
 }
 
 const loosening = (critical: Outcome<Critical>): Outcome<number> => {
@@ -109,12 +126,12 @@ export function climbRows(state: CraftState, throttle: number, curve: readonly C
 function extremeRows(rate: Outcome<Rate>, key: TurnKey, vectorKey: TurnKey): Rows {
   const found = rate.status === 'solved' ? rate.value : null;
   const why = found
-    ? `At ${say(found.climb.pitch, 'angle')} of pitch, of all angles of thrust within the limits; + is up.`
+    ? `+ thrust up; the craft then pitches to ${say(found.climb.pitch, 'angle')}, + nose-up.`
     : '';
   return rowsFrom(
     rate,
     { [key]: ({ rate: each }: Rate) => each, [vectorKey]: ({ vector }: Rate) => vector },
-    { [key]: { why, caution: found?.climb.cautions.join(' ') ?? null } },
+    { [key]: { caution: found?.climb.cautions.join(' ') ?? null }, [vectorKey]: { why } },
   );
 }
 

@@ -157,6 +157,11 @@ const FIGURES = {
     quantity: 'speed',
     why: 'From there on the Munk moment overcomes pendulum and fins, and the nose goes where it likes.',
   },
+  'cruise.heldPitch': {
+    label: 'Pitch at 80 % of that speed',
+    quantity: 'angle',
+    why: '+ nose-up. There the nose is held; at the cruise asked for it is not.',
+  },
   'climb.rate': {
     label: 'Climbs, left to itself',
     quantity: 'speed',

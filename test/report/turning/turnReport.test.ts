@@ -137,7 +137,7 @@ test('a cruise pitch that only a trimmed craft flies level says by how much, and
   const { rows } = reportOf(sampleCraft('museum-atrium'));
   const grams = (1000 * rows['cruise.rising']!.value!) / 9.80665;
   expect(rows['cruise.pitch']!.why).toMatch(`Level only if trimmed ${grams.toFixed(1)} g heavier`);
-  expect(rows['cruise.pitch']!.why).toMatch(/left to itself it flies as told under “Climbs”/);
+  expect(rows['cruise.pitch']!.why).toMatch(/Left to itself it flies as told under “Climbs”/);
   // Trimmed by what it says, at the CB so that the pitch stays, it flies level by itself.
   const slow = { ...FULL, speed: 0.3 };
   const { 'cruise.rising': rising } = reportOf(levelCraft(), slow).rows;
@@ -157,6 +157,16 @@ const reportedCb = (craft: Craft): number => {
   if (state.status !== 'solved') throw new Error(state.why);
   return state.value.loading.cb[0];
 };
+
+test('too fast for its nose to be held, the pitch at 80 % of the speed up to which it is stands instead', () => {
+  const vault = sampleCraft('vault-inspector');
+  const { rows } = reportOf(vault);
+  expect(rows['cruise.pitch']!.value).toBeNull();
+  const held = 0.8 * rows['cruise.criticalSpeed']!.value!;
+  const slower = reportOf(vault, { ...FULL, speed: held }).rows;
+  expect(rows['cruise.heldPitch']!.value).toBeCloseTo(slower['cruise.pitch']!.value!, 12);
+  expect(slower).not.toHaveProperty('cruise.heldPitch');
+});
 
 test('the couples of cruise add up to nil', () => {
   const { rows } = reportOf(levelCraft(), { ...FULL, speed: 0.5 });
@@ -333,6 +343,7 @@ test('the widest circle that holds, of a craft that does not keep its heading; o
     why: expect.stringMatching(/keeps its heading/),
   });
   expect(keeping.notes.join(' ')).not.toMatch(/Circles wider/);
+  expect(keeping.handling[0]).toMatch(/^It keeps its heading by itself/);
 });
 
 test.each(['museum-atrium', 'aviary-counter', 'vault-inspector', 'survey-6m'])(
