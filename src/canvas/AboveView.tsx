@@ -28,6 +28,7 @@ import { useMovers } from './useMovers.ts';
 import { type Size, useSize } from './useSize.ts';
 import { useThrust } from './useThrust.ts';
 import { useView } from './useView.ts';
+import { captionTaken } from './YawMarks.tsx';
 
 const KEYS =
   'Comma and full stop turn the thrust of what is selected by 1 degree to port and to starboard, with Shift by 10. Square brackets select the part before or after.';
@@ -102,6 +103,7 @@ function AboveFrame(props: CanvasProps & DrawnProps) {
     grip?.kind === 'thrust' ? angleReadout(scene, grip.id, grip.way) : null;
   const under = thingUnder(scene, overlay);
   const angle = angleOf(overlay.hover);
+  const inSight = inSightOf(scene, aboveMarks(view, geometry), held, outline);
   return (
     <Frame
       frame={frame}
@@ -123,7 +125,7 @@ function AboveFrame(props: CanvasProps & DrawnProps) {
         hint={hint}
         readout={angleOf(held)}
         under={under && angle ? { ...under, about: angle } : under}
-        inSight={inSightOf(scene, aboveMarks(view, geometry), held, outline)}
+        inSight={{ ...inSight, clear: [...inSight.clear, captionTaken(size)] }}
         size={size}
         palette={palette}
         most={220}

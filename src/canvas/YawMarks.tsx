@@ -4,8 +4,10 @@ import { memo } from 'react';
 import { Shape } from 'react-konva/es/ReactKonvaCore.js';
 import type { Lever, YawMark } from '../scene/above.ts';
 import type { Palette } from '../scene/palette.ts';
+import type { Rect } from '../scene/rect.ts';
 import { type ScreenPoint, toScreen, type View } from '../scene/view.ts';
 import { fontOf, textWidth, traceOnScreen, writeOn } from './paint.ts';
+import type { Size } from './useSize.ts';
 
 export interface YawMarksProps {
   readonly yaw: YawMark;
@@ -66,6 +68,14 @@ function sense(context: Context, view: View, { at, sense: way }: YawMark, palett
 const FOOT = 12;
 const LINE = 14;
 const EDGE = 4;
+
+/** Where it stands, on two lines at most. */
+export const captionTaken = ({ width, height }: Size): Rect => ({
+  left: 0,
+  right: width,
+  top: height - FOOT - 1.5 * LINE,
+  bottom: height,
+});
 
 /** On one line where it fits. */
 function caption(context: Context, words: readonly string[], view: View, palette: Palette): void {

@@ -27,7 +27,7 @@ export function turnedWords(way: Way, angle: number, units: UnitSystem): string 
 /** No more than the angle, for a small view. */
 export function angleReadout({ craft, units }: Subject, id: string, way: Way): Readout | null {
   const vectoring = craft.parts.byId[id]?.thruster?.[way];
-  return vectoring ? { title: turnedWords(way, vectoring.set, units), lines: [] } : null;
+  return vectoring ? { title: turnedWords(way, vectoring.set, units).replace(' to ', ' '), lines: [] } : null;
 }
 
 /** What stands beside the hand, or beside the arrow under the pointer. */

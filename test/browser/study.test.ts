@@ -149,7 +149,7 @@ test('whoever turns an arrow in yaw steers by it; the list goes back to the limi
   await page.getByTestId('above-view').focus();
   for (const key of [']', 'Shift+Period']) await page.keyboard.press(key);
   await expect.poll(() => steering.inputValue()).toBe('set');
-  expect(await steering.locator('option:checked').textContent()).toMatch(/^As the arrow: .* starboard$/);
+  expect(await steering.locator('option:checked').textContent()).toMatch(/^Arrow: .* starboard$/);
   await steering.selectOption('limit');
   expect(await steering.inputValue()).toBe('limit');
 });

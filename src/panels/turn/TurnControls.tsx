@@ -113,13 +113,13 @@ function steeringChoices(craft: Craft, turning: Turning, units: UnitSystem) {
   const part = steeringPart(craft, turning);
   const hardest = { value: 'limit', label: 'Hardest to starboard' } as const;
   if (!part?.thruster) return [hardest];
-  return [
-    hardest,
-    { value: 'set', label: `As the arrow: ${angleWords(part.thruster.yaw.set, units)}` } as const,
-  ];
+  return [hardest, { value: 'set', label: `Arrow: ${angleWords(part.thruster.yaw.set, units)}` } as const];
 }
+
+/** So that whole degrees are shown, rad: the list is narrow. */
+const COARSE = 0.2;
 
 function angleWords(angle: number, units: UnitSystem): string {
   const side = angle > 0 ? ' starboard' : angle < 0 ? ' port' : '';
-  return `${formatQuantity(Math.abs(angle), 'angle', units)}${side}`;
+  return `${formatQuantity(Math.abs(angle), 'angle', units, { uncertainty: COARSE })}${side}`;
 }
