@@ -142,7 +142,7 @@ function name(context: Context, strip: Strip, { page, size, palette }: PlaceMark
   const whole = `${what} – ${which}`;
   const text = textWidth(whole, SMALL) < room ? whole : shortened(what, SMALL, room);
   context.textAlign = 'left';
-  if (text !== null) write(text, from, strip.top - NAME_LINE / 2, palette.ink);
+  if (text !== null) write(text, from, strip.top - NAME_LINE / 2 - 2, palette.ink);
 }
 
 /** Where there is no ballast plan: no curve, but dots. */
@@ -187,12 +187,7 @@ function today(context: Context, { page, palette }: PlaceMarksProps): void {
   across(context, { x: page.today, y: headOf(page) }, { x: page.today, y: footOf(page) + 3 });
   context.restore();
   for (const strip of page.strips) {
-    if (strip.today === null) continue;
-    context.beginPath();
-    context.arc(page.today, strip.today, 4.5, 0, 2 * Math.PI, false);
-    context.strokeStyle = palette.ink;
-    context.lineWidth = 1.5;
-    context.stroke();
+    if (strip.today !== null) ring(context, { x: page.today, y: strip.today }, palette);
   }
 }
 
@@ -215,7 +210,8 @@ function reading(context: Context, { page, read, palette }: PlaceMarksProps): vo
     context.textAlign = aft ? 'left' : 'right';
     const at = {
       x: aft ? x + APART_FROM_LINE : x - APART_FROM_LINE,
-      y: Math.min(Math.max(y ?? foot, top + 7), foot - 6),
+      // Beside the curve, not on it.
+      y: Math.min(y === null ? foot : y - top > 14 ? y - 9 : y + 9, foot - 6),
     };
     writeOn(context, texts[i]!, at, palette.ink, palette.paper);
   });
@@ -252,44 +248,71 @@ function line(context: Context, choices: readonly string[], { page, size, palett
 
 const APART = 16;
 
+interface Entry {
+  readonly text: string;
+  sample(context: Context, at: ScreenPoint, palette: Palette): void;
+}
+
 /** What dots, ring, shade and hatching stand for. */
-function legend(context: Context, props: HeadProps): void {
-  const { page, palette } = props;
+function legend(context: Context, { page, size, palette }: HeadProps): void {
+  const entries = entriesOf(page);
   context.font = TEXT;
   context.textBaseline = 'middle';
   context.textAlign = 'left';
-  let x = Math.max(6, page.left);
-  const entry = (text: string, sample: (at: ScreenPoint) => void) => {
-    sample({ x: x + 5, y: WORDS_Y });
+  const widths = entries.map(({ text }) => 14 + textWidth(text, TEXT) + APART);
+  const whole = widths.reduce((sum, each) => sum + each, 0);
+  let x = Math.max(6, Math.min(page.left, size.width - whole));
+  entries.forEach(({ text, sample }, i) => {
+    sample(context, { x: x + 5, y: WORDS_Y }, palette);
     writeOn(context, text, { x: x + 14, y: WORDS_Y }, palette.inkSoft, palette.paper);
-    x += 14 + textWidth(text, TEXT) + APART;
-  };
-  entry('nothing beats it', (at) => dot(context, at, 3.2, palette.good, palette));
-  if (page.today !== null) {
-    entry('today', ({ x: left, y }) => {
-      context.beginPath();
-      context.arc(left, y, 4.5, 0, 2 * Math.PI, false);
-      context.strokeStyle = palette.ink;
-      context.lineWidth = 1.5;
-      context.stroke();
-    });
-  }
-  if (page.waiting) {
-    entry('not worked out yet', ({ x: left, y }) =>
-      shade(context, { left: left - 5, top: y - 5, right: left + 5, bottom: y + 5 }, palette),
-    );
-  }
-  if (page.unplanned.length > 0) {
-    entry('no ballast plan', ({ x: left, y }) =>
-      dots(context, { left: left - 6, top: y - 6, right: left + 6, bottom: y + 6 }, palette),
-    );
-  }
-  if (page.struck.length > 0) {
-    entry('propeller would strike', ({ x: left, y }) => {
-      context.strokeStyle = palette.bad;
-      context.lineWidth = 1;
-      for (let i = -6; i <= 2; i += 4)
-        across(context, { x: left + i, y: y + 5 }, { x: left + i + 6, y: y - 5 });
-    });
-  }
+    x += widths[i]!;
+  });
+}
+
+const entriesOf = ({ today: now, waiting: rest, unplanned, struck }: PlacePage): Entry[] => [
+  {
+    text: 'nothing beats it',
+    sample: (context, at, palette) => dot(context, at, 3.2, palette.good, palette),
+  },
+  ...(now === null ? [] : [{ text: 'today', sample: ring }]),
+  ...(rest
+    ? [
+        {
+          text: 'not worked out yet',
+          sample: (context: Context, at: ScreenPoint, palette: Palette) =>
+            shade(context, about(at, 5), palette),
+        },
+      ]
+    : []),
+  ...(unplanned.length > 0
+    ? [
+        {
+          text: 'no ballast plan',
+          sample: (context: Context, at: ScreenPoint, palette: Palette) =>
+            dots(context, about(at, 6), palette),
+        },
+      ]
+    : []),
+  ...(struck.length > 0 ? [{ text: 'propeller would strike', sample: strokes }] : []),
+];
+
+const about = ({ x, y }: ScreenPoint, reach: number): Rect => ({
+  left: x - reach,
+  top: y - reach,
+  right: x + reach,
+  bottom: y + reach,
+});
+
+function ring(context: Context, { x, y }: ScreenPoint, { ink }: Palette): void {
+  context.beginPath();
+  context.arc(x, y, 4.5, 0, 2 * Math.PI, false);
+  context.strokeStyle = ink;
+  context.lineWidth = 1.5;
+  context.stroke();
+}
+
+function strokes(context: Context, { x, y }: ScreenPoint, { bad }: Palette): void {
+  context.strokeStyle = bad;
+  context.lineWidth = 1;
+  for (let i = -6; i <= 2; i += 4) across(context, { x: x + i, y: y + 5 }, { x: x + i + 6, y: y - 5 });
 }

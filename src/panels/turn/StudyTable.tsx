@@ -43,20 +43,12 @@ interface StudyTableProps {
 }
 
 export function StudyTable({ fresh, told, moved }: StudyTableProps) {
-  const { points, today, busy, complete } = useStudying();
+  const { points, today, complete } = useStudying();
   const [chosen, setPicked] = useState<Row | null | undefined>(undefined);
   if (!today) return null;
   const picked = chosen === undefined ? told : chosen;
   const best = bestOfRuns({ points, today }, typeof told === 'number' ? told : null);
-  if (best.length === 0 && !today.best) {
-    return (
-      <p>
-        {busy
-          ? 'None so far that can be flown.'
-          : 'No station has both a ballast plan and room for the propeller.'}
-      </p>
-    );
-  }
+  if (best.length === 0 && !today.best) return null;
   const row = (key: Row) => ({
     fresh,
     open: key === picked,
@@ -69,7 +61,7 @@ export function StudyTable({ fresh, told, moved }: StudyTableProps) {
         <caption>
           Nothing beats these{!complete && ' so far'}
           {!today.best && `, against ${moved ? 'before' : 'today'}`}
-          {unheld && `; – under Pitch: ${NO_PITCH}`}
+          {unheld && <small className="study-note">– under Pitch: {NO_PITCH}</small>}
         </caption>
         <Head />
         <tbody>
