@@ -138,8 +138,8 @@ function outOfReach({ name, pitch: { least, most } }: Thruster, needed: number, 
       : `It is light by ${say(force, 'force')} and has to be held down`;
   const limits =
     most > least
-      ? `turns from ${say(least, 'angle')} to ${say(most, 'angle')}`
-      : `is fixed at ${say(least, 'angle')}`;
+      ? `can turn from ${say(least, 'angle')} to ${say(most, 'angle')}`
+      : `can only stand at ${say(least, 'angle')}`;
   return infeasible(
     `${task} at ${say(vector, 'angle')} to the hull; ${name} ${limits}.`,
     `Let a thruster turn further in pitch, or ${needed > 0 ? 'take off' : 'hang on'} ${say(mass, 'mass')}, so that it needs no thrust to stay.`,

@@ -97,11 +97,11 @@ test('why not, with amounts: no thruster, angle out of reach, too little thrust,
   };
   expect(why(stateWith([]))).toBe('No part has the figures of a thruster.');
   expect(why(balanced({ heaviness: 0.05 }))).toMatch(
-    /heavy by \{0\.49.* force\}, which the thrust has to carry at .* is fixed at \{0 angle\}/,
+    /heavy by \{0\.49.* force\}, which the thrust has to carry at .* can only stand at \{0 angle\}/,
   );
   const half = { pitch: turning(0, 60 * degrees) };
   expect(why(balanced({ heaviness: -0.05, thrusterAft: 0, thruster: half }))).toMatch(
-    /light by \{0\.49.* force\} and has to be held down at .*-1\.57.* angle.*turns from \{-1\.047.* to \{1\.047/,
+    /light by \{0\.49.* force\} and has to be held down at .*-1\.57.* angle.*can turn from \{-1\.047.* to \{1\.047/,
   );
   expect(why(balanced({ heaviness: 0.2, thrusterAft: 0, thruster: free }))).toMatch(
     /Hovering takes \{1\.96.* force\}.*give \{1 force\}/,
