@@ -138,7 +138,7 @@ test.each(names)('$name as JSON: one object of rows, in SI, as the report has th
 
 test.each(names)('$name to read: 80 columns, no stray spaces, minus as a hyphen, no NaN', ({ name }) => {
   for (const units of ['metric', 'imperial']) {
-    const { out } = turn(name, '--units', units);
+    const { out } = turn(name, '--all', '--units', units);
     for (const line of out.split('\n')) {
       expect([...line].length, line).toBeLessThanOrEqual(80);
       expect(line).toBe(line.trimEnd());
