@@ -9,6 +9,8 @@ const turnTab = (page: Page): Locator => page.getByRole('tab', { name: 'Turn', e
 const plot = (page: Page): Locator => page.getByTestId('place-plot');
 const begin = (page: Page): Locator => page.getByRole('button', { name: 'Try every station', exact: true });
 const again = (page: Page): Locator => page.getByRole('button', { name: 'Try every station again' });
+const goOn = (page: Page): Locator => page.getByRole('button', { name: 'Go on', exact: true });
+const focused = (page: Page) => page.evaluate(() => document.activeElement?.textContent ?? '');
 const progress = (page: Page): Locator => page.getByRole('progressbar', { name: 'Trying every station' });
 const moveThere = (page: Page): Locator => page.getByRole('button', { name: /^Move it there/ });
 
@@ -57,12 +59,14 @@ test('by pointer: stopped half-way, run to the end, a best station applied, and 
   expect(stopped).toBeGreaterThan(5);
   expect(stopped).toBeLessThan(61);
 
-  await again(page).click();
+  await page.getByText('So far:').waitFor();
+  await goOn(page).click();
   await again(page).waitFor();
   expect(await plot(page).getAttribute('data-tried')).toBe('61');
+  expect(await page.getByText('So far:').count()).toBe(0);
   // The one that is told of is where it is already.
   await page.getByText('It is there now.').waitFor();
-  await page.locator('[data-station] [aria-expanded=false]').first().click();
+  await page.locator('[data-station] [aria-expanded=false]').last().click();
   const best = await page.locator('[data-station]:has([aria-expanded=true])').getAttribute('data-station');
   await moveThere(page).click();
   const { station } = await thrusterPlace(page);
@@ -92,8 +96,38 @@ test('a click in the curves moves the thruster to the station under it, with ano
   await page.getByTestId('beam-view').waitFor();
 });
 
+test('where the propeller would strike a click moves nothing and says what is in the way', async ({
+  visit,
+}) => {
+  const page = await visit();
+  const before = await savedText(page);
+  await study(page);
+  const { y, height } = (await plot(page).boundingBox())!;
+  const { x } = await planeOnPage(page, 1.8, 0);
+  await page.mouse.click(x, y + height / 2);
+  await page.getByText(/There the propeller would strike .* Drag it there, or type its station/).waitFor();
+  expect(await savedText(page)).toBe(before);
+});
+
+test('a tap in the curves reads the station; only its button moves the thruster there', async ({ visit }) => {
+  const page = await visit({ hasTouch: true });
+  const before = await savedText(page);
+  await study(page);
+  const { y, height } = (await plot(page).boundingBox())!;
+  const { x } = await planeOnPage(page, 1, 0);
+  await page.touchscreen.tap(x, y + height / 2);
+  const button = page.getByRole('button', { name: 'Move it there', exact: true });
+  await button.waitFor();
+  expect(await savedText(page)).toBe(before);
+  await button.tap();
+  expect((await thrusterPlace(page)).station).toBeCloseTo(1, 1);
+  await page.getByRole('button', { name: /^Undo/ }).click();
+  expect(await savedText(page)).toBe(before);
+});
+
 test('by keyboard: run, read, applied from the list and from the curves, and back', async ({ visit }) => {
   const page = await visit();
+  await openSample(page, 'library-scanner');
   const before = await savedText(page);
   await turnTab(page).focus();
   for (let i = 0; i < 12 && (await turnTab(page).getAttribute('aria-selected')) !== 'true'; i++) {
@@ -104,7 +138,14 @@ test('by keyboard: run, read, applied from the list and from the curves, and bac
   await begin(page).waitFor();
   await tabTo(page, 'Try every station');
   await page.keyboard.press('Enter');
+  // The focus stays where it was, on what can be done there now.
+  expect(await focused(page)).toBe('Stop');
   await again(page).waitFor();
+  expect(await focused(page)).toBe('Try every station again');
+  await tabTo(page, 'today');
+  await page.keyboard.press('Tab');
+  if ((await focused(page)).startsWith('Hang')) await page.keyboard.press('Tab');
+  await page.keyboard.press('Enter');
   await tabTo(page, 'Move it, hang the ballast');
   await page.keyboard.press('Enter');
   await page.getByText('Worked out before the last change: try every station again.').waitFor();
@@ -116,7 +157,8 @@ test('by keyboard: run, read, applied from the list and from the curves, and bac
 
   await plot(page).focus();
   await page.keyboard.press('Home');
-  for (let i = 0; i < 10; i++) await page.keyboard.press('ArrowRight');
+  await page.keyboard.press('ArrowRight');
+  await page.keyboard.press('ArrowRight');
   const read = await plot(page).getAttribute('aria-valuetext');
   expect(read).toMatch(/^Station [\d.]+ m: .*Lead and wire .* g, Time to 90° .* s, Side gust held .* m\/s/);
   await page.keyboard.press('Enter');
@@ -129,7 +171,9 @@ test('by keyboard: run, read, applied from the list and from the curves, and bac
 
 test('with another throttle the study is of before, and nothing moves', async ({ visit }) => {
   const page = await visit();
+  await openSample(page, 'library-scanner');
   await study(page);
+  await page.locator('[data-station] [aria-expanded=false]').last().click();
   await page.getByRole('slider', { name: 'Throttle' }).fill('0.5');
   await page.getByText('Worked out before the last change: try every station again.').waitFor();
   const before = await savedText(page);
