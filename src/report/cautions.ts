@@ -11,10 +11,12 @@ const insideHull = kept(insideWords);
 
 export function cautionsOf(state: CraftState): string[] {
   const { craft, air, hull } = state;
+  const parts = listed(craft.parts);
+  const outside = parts.filter(({ thruster, fin }) => thruster || fin);
   return [
     ...air.cautions,
-    ...listed(craft.parts).flatMap(({ name, kind, place }) => beyondHull(name || kind, place, hull.length)),
-    ...listed(craft.parts).flatMap((part) => insideHull(part, state.pieces[part.id]!, hull) ?? []),
+    ...parts.flatMap(({ name, kind, place }) => beyondHull(name || kind, place, hull.length)),
+    ...outside.flatMap((part) => insideHull(part, state.pieces[part.id]!, hull) ?? []),
     ...listed(craft.hardpoints).flatMap(({ name, place }) =>
       beyondHull(name || 'Hardpoint', place, hull.length),
     ),
