@@ -5,12 +5,13 @@ import { floatOf } from '../physics/balance/float.ts';
 import { cgOf } from '../physics/balance/loading.ts';
 import { type CraftState, craftStateOf } from '../physics/craftState.ts';
 import type { Hull } from '../physics/hull/hull.ts';
+import type { Piece } from '../physics/mass/pieces.ts';
 import { positionOf } from '../physics/mass/position.ts';
 import { type Branch, drawnBranch } from '../physics/mass/wirePath.ts';
 import { inUnits } from '../units/sentence.ts';
 import type { UnitSystem } from '../units/units.ts';
 import { adviceOf } from './advice.ts';
-import type { Assessment, Geometry } from './assessment.ts';
+import type { Assessment, Geometry, PieceView } from './assessment.ts';
 import { beamOf, leadBar } from './beam.ts';
 import { cautionsOf } from './cautions.ts';
 import { floatRows, supportRows } from './floatRows.ts';
@@ -76,6 +77,11 @@ const drawnBranches = kept((branches: readonly Branch[], hull: Hull) =>
   branches.map((branch) => drawnBranch(branch, hull)),
 );
 
+/** Of what did not move they are the same objects. */
+const pieceViews = kept((pieces: readonly Piece[], part: string): PieceView[] =>
+  pieces.map(({ middle, cg, roll }, copy) => ({ part, copy, middle, cg, roll })),
+);
+
 function geometryOf(state: CraftState, rows: Rows): Geometry {
   const { craft, hull, loading, pieces, branches } = state;
   const attitude = floatOf(loading);
@@ -85,9 +91,7 @@ function geometryOf(state: CraftState, rows: Rows): Geometry {
     cb: loading.cb,
     cg: cgOf(loading),
     attitude: attitude.status === 'solved' ? attitude.value : null,
-    pieces: listed(craft.parts).flatMap(({ id }) =>
-      pieces[id]!.map(({ middle, cg, roll }, copy) => ({ part: id, copy, middle, cg, roll })),
-    ),
+    pieces: craft.parts.order.flatMap((id) => pieceViews(pieces[id]!, id)),
     wires: listed(craft.wires).map(({ id }) => ({
       wire: id,
       branches: drawnBranches(branches[id]!, hull),
